@@ -1,0 +1,199 @@
+import type { Expression } from '../expression/expression.ts';
+import type { SourcePlace } from '../problem.ts';
+
+/**
+ * A study with every name resolved and every default filled in: what the later stages read.
+ * What the analyst wrote (the YAML's own shape) is the generated type `StudyFile`.
+ */
+export interface Study {
+  /** The study file's name as reports show it: its base name, never an absolute path. */
+  readonly file: string;
+  /** The folder that relative file names in the study start from. */
+  readonly folder: string;
+  /** SHA-256 of the study file's bytes, lower-case hexadecimal. */
+  readonly sha256: string;
+  readonly title: string;
+  readonly question: string | null;
+  readonly data: DataPlan;
+  readonly derive: readonly DerivationPlan[];
+  readonly leaveOut: readonly LeaveOutPlan[];
+  readonly response: ResponsePlan;
+  /** Name of the variable of weights, or null. */
+  readonly weights: string | null;
+  readonly candidates: readonly CandidatePlan[];
+  readonly selection: SelectionPlan;
+  readonly inference: InferencePlan;
+  readonly predict: PredictPlan;
+  readonly acceptance: readonly AcceptancePlan[];
+  readonly report: ReportPlan;
+  /** Every setting that has a default, in schema order, with whether the analyst wrote it. */
+  readonly settings: readonly Setting[];
+  /** The place of a value in the study file, by its path of keys and indexes; the nearest parent if absent. */
+  readonly placeOf: (path: readonly (string | number)[]) => SourcePlace;
+}
+
+export interface Setting {
+  /** Dotted path, for example `selection.prefer_smaller_within`. */
+  readonly key: string;
+  /** The value in force, as text. */
+  readonly value: string;
+  readonly written: boolean;
+}
+
+export interface DataPlan {
+  /** As written, relative to the study file. */
+  readonly file: string;
+  readonly format: {
+    /** null: find out from the data. */
+    readonly delimiter: string | null;
+    readonly decimalMark: '.' | ',';
+    readonly encoding: 'utf-8' | 'latin-1' | null;
+  };
+  /** Cell texts read as missing in every column, compared after trimming. */
+  readonly missing: readonly string[];
+  readonly rowId: string | null;
+  readonly time: string | null;
+  readonly variables: readonly VariablePlan[];
+  readonly onBadValue: 'stop' | 'set_missing' | 'leave_out_row';
+}
+
+export type VariableType = 'number' | 'integer' | 'category' | 'flag' | 'date' | 'text' | 'identifier';
+
+export interface VariablePlan {
+  readonly name: string;
+  readonly type: VariableType;
+  /** The column's header in the data file; the name itself unless `column` is written. */
+  readonly column: string;
+  readonly unit: string | null;
+  readonly label: string | null;
+  readonly atLeast: number | null;
+  readonly atMost: number | null;
+  /** Declared levels of a category in order, or null: take those in the data, sorted. */
+  readonly levels: readonly string[] | null;
+  /** Baseline of a category; null: the first level. */
+  readonly baseline: string | null;
+  /** The two texts of a flag: [coded 0, coded 1]; null: any of no/yes, false/true, 0/1 (any letter case). */
+  readonly flagValues: readonly [string, string] | null;
+  /** Pattern of a date made of YYYY MM DD hh mm ss and literal text; null: ISO 8601 date or date and time. */
+  readonly pattern: string | null;
+  /** Missing codes of this variable in addition to `data.missing`. */
+  readonly missing: readonly string[];
+}
+
+export interface DerivationPlan {
+  readonly name: string;
+  readonly expression: Expression;
+  readonly text: string;
+  readonly unit: string | null;
+  readonly label: string | null;
+  /** What the expression yields: a number, a flag (a condition) or a date. */
+  readonly type: 'number' | 'flag' | 'date';
+}
+
+export interface LeaveOutPlan {
+  readonly where: Expression;
+  readonly text: string;
+  readonly because: string;
+}
+
+export type Scale =
+  | { readonly kind: 'natural' }
+  | { readonly kind: 'log' }
+  | { readonly kind: 'sqrt' }
+  | { readonly kind: 'reciprocal' }
+  | { readonly kind: 'box_cox'; readonly lambda: number };
+
+export interface ResponsePlan {
+  readonly variable: string;
+  readonly scale: Scale;
+}
+
+export type TermPlan =
+  | { readonly kind: 'variable'; readonly variable: string }
+  | { readonly kind: 'interaction'; readonly of: readonly TermPlan[] }
+  | { readonly kind: 'polynomial'; readonly variable: string; readonly degree: number }
+  | { readonly kind: 'power'; readonly variable: string; readonly to: number }
+  /** max(0, x − at) for side above, max(0, at − x) for side below. */
+  | {
+      readonly kind: 'bend';
+      readonly variable: string;
+      readonly at: number;
+      readonly side: 'above' | 'below';
+    }
+  /** Natural cubic spline; the first and last knots are the boundary knots: knots − 1 columns, the first is x. */
+  | { readonly kind: 'spline'; readonly variable: string; readonly knots: readonly number[] };
+
+export interface CandidatePlan {
+  readonly name: string;
+  readonly terms: readonly TermPlan[];
+  /** The candidate's own response scale where it declares one, else the study's. */
+  readonly scale: Scale;
+  readonly intercept: boolean;
+}
+
+export type RankBy = 'adjusted_r_squared' | 'aic' | 'aicc' | 'bic' | 'mallows_cp' | 'press' | 'partial_f';
+
+export interface SelectionPlan {
+  readonly rankBy: RankBy;
+  readonly preferSmallerWithin: number;
+  readonly significance: number;
+  readonly admit: AdmitPlan;
+}
+
+export interface AdmitPlan {
+  readonly vif: { readonly atMost: number } | null;
+  readonly pValue: { readonly atMost: number } | null;
+  /** By the name of a term with one column, or of a single coefficient ("vessel Tern"). */
+  readonly signs: ReadonlyMap<string, 'positive' | 'negative'>;
+  readonly rowsPerCoefficient: { readonly atLeast: number } | null;
+  readonly adjustedRSquared: { readonly atLeast: number } | null;
+}
+
+export interface InferencePlan {
+  /** Of intervals for coefficients, between 0 and 1. */
+  readonly confidence: number;
+  /** What to do with a column that depends exactly on earlier ones: go on without it, or stop. */
+  readonly dependentColumns: 'drop' | 'stop';
+}
+
+export interface PredictPlan {
+  readonly rows: readonly PredictRowPlan[];
+  /** A CSV file of rows with the same contract as the data, relative to the study file, or null. */
+  readonly file: string | null;
+  /** Confidence of prediction intervals, between 0 and 1. */
+  readonly interval: number;
+  /** Whether to predict the total of all rows as well. */
+  readonly total: boolean;
+}
+
+export interface PredictRowPlan {
+  readonly label: string;
+  readonly values: ReadonlyMap<string, number | string | boolean>;
+  readonly place: SourcePlace;
+}
+
+/** A limit on a figure of the chosen model, or (`chosen`) on which candidate wins. */
+export type AcceptancePlan =
+  | {
+      readonly criterion: AcceptanceFigure;
+      readonly atLeast: number | null;
+      readonly atMost: number | null;
+    }
+  | { readonly criterion: 'chosen'; readonly names: readonly string[] };
+
+export type AcceptanceFigure =
+  | 'r_squared'
+  | 'adjusted_r_squared'
+  | 'predicted_r_squared'
+  | 'residual_standard_error'
+  | 'largest_vif'
+  | 'condition_number'
+  | 'rows_used';
+
+export interface ReportPlan {
+  readonly formats: readonly ('html' | 'markdown')[];
+  /** The user's own templates, relative to the study file, by format. */
+  readonly templates: { readonly html: string | null; readonly markdown: string | null };
+  /** A sentence of the analyst's own for the cautions (the local code, who must review), or null. */
+  readonly caution: string | null;
+}
