@@ -21,6 +21,8 @@ export interface Fit {
   readonly estimates: Float64Array;
   /** (X′WX)⁻¹, p × p, column-major, symmetric. */
   readonly inverse: Float64Array;
+  /** R⁻¹, p × p upper triangular, column-major: leverage of a row x is ‖x′R⁻¹‖². */
+  readonly rootInverse: Float64Array;
   /** Σ w (y − Xb)². */
   readonly residualSumOfSquares: number;
   /** Σ w (y − ȳ)² about the weighted mean with an intercept, Σ w y² without one. */
