@@ -24,27 +24,19 @@ export function refineFit(fit: Fit, rows: DesignRows, facts: RowFacts): Fit {
   // Estimates in the rows' scaled units, as pairs.
   const high = Float64Array.from(fit.columns, (column, j) => (fit.estimates[j]! * responseScale) / scales[column]!);
   const low = new Float64Array(p);
-  const inverse = Float64Array.from(fit.inverse, (value, k) => {
-    const i = k % p;
-    const j = (k - i) / p;
-    return value / (scales[fit.columns[i]!]! * scales[fit.columns[j]!]!);
-  });
+  const root = fit.rootInverse.map((value, k) => value / scales[fit.columns[k % p]!]!);
 
   let rss = 0;
   const sum = pair();
   let before = Number.POSITIVE_INFINITY;
   for (let step = 0; step < MOST_STEPS; step++) {
     const { gradient, squares } = residualPass(rows, fit.columns, responseAt, high, low);
+    const corrections = solveThroughRoot(root, p, gradient);
     let largest = 0;
     let gain = 0;
-    const corrections = new Float64Array(p);
     for (let i = 0; i < p; i++) {
-      let correction = 0;
-      for (let j = 0; j < p; j++) correction += inverse[j * p + i]! * gradient[j]!;
-      corrections[i] = correction;
-      gain += correction * gradient[i]!;
-      const relative = Math.abs(correction) / Math.abs(high[i]!);
-      if (relative > largest) largest = relative;
+      gain += corrections[i]! * gradient[i]!;
+      largest = Math.max(largest, Math.abs(corrections[i]! / high[i]!));
     }
     // At b + correction the sum of squares is smaller by correction′ gradient.
     rss = Math.max(0, squares - gain);
@@ -67,6 +59,15 @@ export function refineFit(fit: Fit, rows: DesignRows, facts: RowFacts): Fit {
     logLikelihood: fit.exact ? null : logLikelihood(fit.rowCount, residualSumOfSquares, facts, fit.candidate.responseColumn),
     arithmetic: 'refined',
   };
+}
+
+/** R⁻¹ (R⁻ᵀ g): through the root and not its square, which would lose twice the digits. */
+function solveThroughRoot(root: Float64Array, p: number, g: Float64Array): Float64Array {
+  const half = new Float64Array(p);
+  for (let j = 0; j < p; j++) for (let i = 0; i <= j; i++) half[j]! += root[j * p + i]! * g[i]!;
+  const whole = new Float64Array(p);
+  for (let j = 0; j < p; j++) for (let i = 0; i <= j; i++) whole[i]! += root[j * p + i]! * half[j]!;
+  return whole;
 }
 
 /** X′(y − Xb) and ‖y − Xb‖², all sums in double-double, in one pass. */

@@ -1,7 +1,6 @@
 import type { CategoryColumn, Column } from '../data/table.ts';
 import { multiplyPair, pair, twoSum } from '../stats/double-double.ts';
-import type { Design, DesignColumn, Piece } from './design.ts';
-import { toScale } from './response-scale.ts';
+import type { DesignColumn, Piece } from './design.ts';
 
 /**
  * Rows of [X | Y], formed block by block from the columns of the sample; the whole matrix is never held.
@@ -43,34 +42,27 @@ export interface DesignSource {
 }
 
 /**
- * Compiles a design over the columns of a sample.
- * @param response name of the response variable, or null to form predictor columns only (prediction rows).
- * @param weights name of the weights variable, or null.
+ * Compiles design columns over the columns of a sample.
+ * @param responses what to put after the predictors, each of length n, on the scale it is fitted on; may be none
+ * @param weights name of the weights variable, or null
  */
 export function designRows(
-  design: Pick<Design, 'columns' | 'responses'>,
+  columns: readonly DesignColumn[],
   source: DesignSource,
-  response: string | null,
+  responses: readonly Float64Array[],
   weights: string | null,
 ): DesignRows {
   const n = source.rowCount;
-  const predictorCount = design.columns.length;
-  const own = response === null ? null : numbersOf(source, response);
-  const responses =
-    own === null
-      ? []
-      : design.responses.map(({ scale }) =>
-          scale.kind === 'natural' ? own : own.map((y) => toScale(y, scale)),
-        );
+  const predictorCount = columns.length;
   const rootWeights = weights === null ? null : numbersOf(source, weights).map(Math.sqrt);
   const bounds = boundCache(source);
   const weightBound = rootWeights === null ? 1 : largestSize(rootWeights);
   const scales = Float64Array.from([
-    ...design.columns.map((column) => powerOfTwoFor(bounds(column) * weightBound)),
+    ...columns.map((column) => powerOfTwoFor(bounds(column) * weightBound)),
     ...responses.map((values) => powerOfTwoFor(largestSize(values) * weightBound)),
   ]);
   const writers = [
-    ...design.columns.map((column) => columnWriter(column, source)),
+    ...columns.map((column) => columnWriter(column, source)),
     ...responses.map((values) => copyWriter(values)),
   ];
 
@@ -81,9 +73,9 @@ export function designRows(
     scales,
     rootWeights,
     responses,
-    fill(columns, from, to, stride, hi, lo) {
-      for (let c = 0; c < columns.length; c++) {
-        const column = columns[c]!;
+    fill(wanted, from, to, stride, hi, lo) {
+      for (let c = 0; c < wanted.length; c++) {
+        const column = wanted[c]!;
         const at = c * stride;
         if (lo !== null) lo.fill(0, at, at + to - from);
         writers[column]!(from, to, hi, lo, at);
@@ -245,7 +237,8 @@ function rescale(scale: number, count: number, hi: Float64Array, lo: Float64Arra
   if (lo !== null) for (let k = at; k < at + count; k++) lo[k]! *= scale;
 }
 
-function numbersOf(source: DesignSource, name: string): Float64Array {
+/** The values of a column of numbers; the study's check has made sure that it is one. */
+export function numbersOf(source: DesignSource, name: string): Float64Array {
   const column = source.columns.get(name);
   if (column === undefined || column.kind === 'category' || column.kind === 'text') {
     throw new TypeError(`${name} is not a column of numbers`);

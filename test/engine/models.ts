@@ -2,6 +2,7 @@
 import type { NumberColumn } from '../../src/data/table.ts';
 import type { CandidateModel, Design, DesignColumn, Piece } from '../../src/model/design.ts';
 import { type DesignRows, designRows } from '../../src/model/design-rows.ts';
+import { toScale } from '../../src/model/response-scale.ts';
 import { columnName } from '../../src/model/names.ts';
 import type { RowFacts } from '../../src/engine/fit-candidate.ts';
 import type { Scale } from '../../src/study/study.ts';
@@ -50,7 +51,12 @@ export function testModel(
     ]),
   );
   const rowCount = data.y!.length;
-  const rows = designRows(design, { rowCount, columns: table }, 'y', options.weights ?? null);
+  const rows = designRows(
+    union,
+    { rowCount, columns: table },
+    scales.map((scale) => Float64Array.from(data.y!, (y) => toScale(y, scale))),
+    options.weights ?? null,
+  );
   const facts: RowFacts = {
     logWeights: options.weights === undefined ? 0 : data[options.weights]!.reduce((sum, w) => sum + Math.log(w), 0),
     logJacobians: scales.map(() => 0),
