@@ -1,0 +1,25 @@
+// Generated from schemas/study.schema.json by schemas/generate.ts. Change the schema, then: npx tsx schemas/generate.ts
+
+export const STUDY_DEFAULTS = {
+  'data.format.delimiter': null,
+  'data.format.decimal_mark': ".",
+  'data.format.encoding': null,
+  'data.missing': ["","NA","n/a"],
+  'data.row_id': null,
+  'data.time': null,
+  'data.on_bad_value': "stop",
+  'response.scale': "natural",
+  'weights': null,
+  'selection.rank_by': "aicc",
+  'selection.prefer_smaller_within': 0,
+  'selection.significance': 0.05,
+  'inference.confidence': 0.95,
+  'inference.dependent_columns': "drop",
+  'predict.file': null,
+  'predict.interval': 0.9,
+  'predict.total': false,
+  'report.formats': ["html","markdown"],
+  'report.templates.html': null,
+  'report.templates.markdown': null,
+  'report.caution': null,
+} as const;
