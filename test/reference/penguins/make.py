@@ -11,6 +11,7 @@ import os
 import sys
 
 HERE = os.path.dirname(os.path.abspath(__file__))
+sys.dont_write_bytecode = True
 sys.path.insert(0, os.path.dirname(HERE))
 from least_squares import Data, number, study_fixtures, write  # noqa: E402
 
