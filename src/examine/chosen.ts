@@ -1,0 +1,69 @@
+import type { Fit } from '../engine/fit.ts';
+import { FULL_LEVERAGE, visitRows } from '../engine/row-figures.ts';
+import type { DesignColumn } from '../model/design.ts';
+import type { DesignRows } from '../model/design-rows.ts';
+import type { Sample } from '../prepare/sample.ts';
+import type { Study } from '../study/study.ts';
+
+/** The chosen model with the figures of each row: what every diagnostic reads. Arrays have length n, in file order. */
+export interface Chosen {
+  readonly study: Study;
+  readonly sample: Sample;
+  /** The union's columns; `fit.columns` are indexes into them. */
+  readonly columns: readonly DesignColumn[];
+  readonly fit: Fit;
+  /** s = √(RSS/(n − p)); null where there are no degrees of freedom or the fit is exact. */
+  readonly s: number | null;
+  /** √w (y − Xb), on the fitted scale. */
+  readonly residuals: Float64Array;
+  readonly leverages: Float64Array;
+  /** Xb, on the fitted scale, unweighted. */
+  readonly fitted: Float64Array;
+  /** y on the fitted scale. */
+  readonly observed: Float64Array;
+}
+
+/** One pass over the rows: residuals, leverages and fitted values of the chosen model. */
+export function examineRows(study: Study, sample: Sample, columns: readonly DesignColumn[], fit: Fit, rows: DesignRows): Chosen {
+  const n = rows.rowCount;
+  const residuals = new Float64Array(n);
+  const leverages = new Float64Array(n);
+  visitRows(fit, rows, (from, count, e, h) => {
+    residuals.set(e.subarray(0, count), from);
+    leverages.set(h.subarray(0, count), from);
+  });
+  const observed = rows.responses[fit.candidate.responseColumn]!;
+  const { rootWeights } = rows;
+  const fitted = observed.map((y, i) => y - residuals[i]! / (rootWeights === null ? 1 : rootWeights[i]!));
+  const s = fit.degreesOfFreedom < 1 || fit.exact ? null : Math.sqrt(fit.residualSumOfSquares / fit.degreesOfFreedom);
+  return { study, sample, columns, fit, s, residuals, leverages, fitted, observed };
+}
+
+/** e_i/(s √(1 − h_i)); null where s is undefined or the leverage is 1. */
+export function standardisedResidual(chosen: Chosen, row: number): number | null {
+  const h = chosen.leverages[row]!;
+  return chosen.s === null || h > FULL_LEVERAGE ? null : chosen.residuals[row]! / (chosen.s * Math.sqrt(1 - h));
+}
+
+/** D_i = e_i² h_i/(p s² (1 − h_i)²) (Cook 1977); null as for the standardised residual. */
+export function cooksDistance(chosen: Chosen, row: number): number | null {
+  const z = standardisedResidual(chosen, row);
+  const h = chosen.leverages[row]!;
+  return z === null ? null : (z * z * h) / (chosen.fit.columns.length * (1 - h));
+}
+
+/**
+ * The deleted residual t_i = z_i √((n − p − 1)/(n − p − z_i²)), on n − p − 1 degrees of freedom (Belsley, Kuh &
+ * Welsch 1980); null where undefined; infinite where the row alone spoils an otherwise exact fit.
+ */
+export function deletedResidual(chosen: Chosen, row: number): number | null {
+  const z = standardisedResidual(chosen, row);
+  const df = chosen.fit.degreesOfFreedom;
+  if (z === null || df < 2) return null;
+  return z * Math.sqrt((df - 1) / Math.max(0, df - z * z));
+}
+
+/** How a row is named to a person: its identity where the study declares one, else its line in the file. */
+export function rowName(sample: Sample, row: number): string {
+  return sample.ids?.[row] ?? `line ${sample.lines[row]}`;
+}

@@ -1,0 +1,60 @@
+import { EXTENDED_BUDGET, factorExtended, factorRows } from '../../engine/factor.ts';
+import { fitCandidate } from '../../engine/fit-candidate.ts';
+import { designRows } from '../../model/design-rows.ts';
+import { chiSquaredUpper } from '../../stats/distributions.ts';
+import type { Chosen } from '../chosen.ts';
+import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
+
+/** n R² of the squared residuals on the model's columns, χ² on their number without the intercept. */
+export const equalSpread: Diagnostic = {
+  name: 'equal_spread',
+  question: 'Is the spread even?',
+  statisticName: 'Breusch–Pagan statistic, Koenker’s form',
+  source: 'Breusch & Pagan 1979; Koenker 1981',
+  find(chosen) {
+    if (chosen.s === null) return notPossible('Without residual degrees of freedom the spread cannot be judged.');
+    const found = koenker(chosen);
+    if (found === null) return notPossible('The model has no column that the spread could depend on.');
+    const { statistic, df } = found;
+    const p = chiSquaredUpper(statistic, df);
+    const concern = concernOf(p);
+    return {
+      statistic,
+      df: [df],
+      p_value: p,
+      mark: null,
+      verdict:
+        concern === 0
+          ? 'The squared residuals do not visibly depend on the model’s variables.'
+          : 'The size of the residuals depends on the model’s variables: standard errors and intervals are too narrow in some places and too wide in others.',
+      concern,
+      advice:
+        concern === 0
+          ? null
+          : 'Try the response on a log or square-root scale, or declare weights; do not lean on intervals at the edge of the data.',
+    };
+  },
+};
+
+/** The statistic and its degrees of freedom; null where the model has no column beside the intercept. */
+export function koenker(chosen: Chosen): { statistic: number; df: number } | null {
+  const { columns, fit, sample, residuals } = chosen;
+  const own = fit.columns.filter((column) => column !== 0);
+  if (own.length === 0) return null;
+  const rows = designRows([columns[0]!, ...own.map((column) => columns[column]!)], sample, [residuals.map((e) => e * e)], null);
+  const factor = rows.rowCount * rows.width ** 2 <= EXTENDED_BUDGET ? factorExtended(rows) : factorRows(rows);
+  const auxiliary = fitCandidate(
+    factor,
+    {
+      name: '',
+      response: { variable: '', scale: { kind: 'natural' } },
+      intercept: true,
+      terms: [],
+      columns: Array.from({ length: own.length + 1 }, (_, j) => j),
+      responseColumn: 0,
+    },
+    { logWeights: 0, logJacobians: [0], columnNames: [], columnVariables: Array.from({ length: own.length + 1 }, () => []) },
+  );
+  const share = auxiliary.totalSumOfSquares > 0 ? 1 - auxiliary.residualSumOfSquares / auxiliary.totalSumOfSquares : 0;
+  return { statistic: sample.rowCount * Math.max(0, share), df: auxiliary.columns.length - 1 };
+}

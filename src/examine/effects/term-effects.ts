@@ -1,0 +1,168 @@
+import type { ModelTerm } from '../../model/design.ts';
+import type { TermPlan } from '../../study/study.ts';
+import type { Chosen } from '../chosen.ts';
+import { type Effect, effectsBetween, moved, type Reference, type ReferenceVariable, type Setting } from './settings.ts';
+
+/** What moving a term's variable over its typical step goes with, the others held. */
+export interface TypicalStep extends Effect {
+  readonly from: string;
+  readonly to: string;
+  readonly from_value: number | null;
+  readonly to_value: number | null;
+}
+
+/** The relationship with one variable over its range, relative to its mean. Equal lengths. */
+export interface Curve {
+  readonly variable: string;
+  readonly x: number[];
+  readonly y: number[];
+  readonly lower: (number | null)[];
+  readonly upper: (number | null)[];
+}
+
+/** For an interaction: what the first member goes with where the others stand. */
+export interface Slope extends Effect {
+  readonly at: string;
+  readonly of: string;
+  /** The step of a number ("1"), null for a difference between levels. */
+  readonly per: string | null;
+}
+
+const CURVE_POINTS = 61;
+const MOST_SLOPES = 24;
+
+/** The variables of a term, in order, each once. */
+export function variablesOf(plan: TermPlan): string[] {
+  return plan.kind === 'interaction' ? [...new Set(plan.of.flatMap(variablesOf))] : [plan.variable];
+}
+
+/** Lower to upper quartile of a number; baseline to each other level of a category; 0 to 1 of a flag. */
+export function typicalSteps(chosen: Chosen, term: ModelTerm, reference: Reference): TypicalStep[] {
+  if (term.plan.kind === 'interaction') return [];
+  const variable = term.plan.variable;
+  const described = reference.variables.get(variable);
+  if (described === undefined) return [];
+  const steps = stepsOf(described);
+  const effects = effectsBetween(
+    chosen,
+    steps.map((step): [Setting, Setting] => [
+      moved(reference.setting, { [variable]: step.from }),
+      moved(reference.setting, { [variable]: step.to }),
+    ]),
+  );
+  return steps.map((step, k) => ({
+    from: step.fromText,
+    to: step.toText,
+    from_value: typeof step.from === 'number' ? step.from : null,
+    to_value: typeof step.to === 'number' ? step.to : null,
+    ...effects[k]!,
+  }));
+}
+
+interface Step {
+  readonly from: number | string;
+  readonly to: number | string;
+  readonly fromText: string;
+  readonly toText: string;
+}
+
+function stepsOf(variable: ReferenceVariable): Step[] {
+  switch (variable.kind) {
+    case 'number': {
+      // Where half the rows or more share one value, the quartiles tell nothing: use the whole range.
+      const flat = variable.lowerQuartile === variable.upperQuartile;
+      const from = flat ? variable.smallest : variable.lowerQuartile;
+      const to = flat ? variable.largest : variable.upperQuartile;
+      return [{ from, to, fromText: String(from), toText: String(to) }];
+    }
+    case 'flag':
+      return [{ from: 0, to: 1, fromText: variable.texts?.[0] ?? 'no', toText: variable.texts?.[1] ?? 'yes' }];
+    case 'category':
+      return variable.levels
+        .filter((level) => level !== variable.baseline)
+        .map((level) => ({ from: variable.baseline, to: level, fromText: variable.baseline, toText: level }));
+  }
+}
+
+/** The curve over the variable's range, for a term of one numeric variable; null for the rest. */
+export function curveOf(chosen: Chosen, term: ModelTerm, reference: Reference): Curve | null {
+  if (term.plan.kind === 'interaction') return null;
+  const variable = term.plan.variable;
+  const described = reference.variables.get(variable);
+  if (described === undefined || described.kind !== 'number') return null;
+  const { smallest, largest } = described;
+  const x = Array.from({ length: CURVE_POINTS }, (_, i) => smallest + ((largest - smallest) * i) / (CURVE_POINTS - 1));
+  const effects = effectsBetween(
+    chosen,
+    x.map((value): [Setting, Setting] => [reference.setting, moved(reference.setting, { [variable]: value })]),
+  );
+  return {
+    variable,
+    x,
+    y: effects.map((effect) => effect.estimate),
+    lower: effects.map((effect) => effect.lower),
+    upper: effects.map((effect) => effect.upper),
+  };
+}
+
+/**
+ * The slope (number) or difference (flag, category) of an interaction's first variable at each level, or at
+ * the quartiles, of the others; at most two dozen.
+ */
+export function slopesOf(chosen: Chosen, term: ModelTerm, reference: Reference): Slope[] {
+  if (term.plan.kind !== 'interaction') return [];
+  const [first, ...others] = variablesOf(term.plan);
+  const described = first === undefined ? undefined : reference.variables.get(first);
+  if (first === undefined || described === undefined) return [];
+  const places = others
+    .map((name) => placesOf(name, reference.variables.get(name)!))
+    .reduce<{ at: string; changes: Record<string, number | string> }[]>(
+      (soFar, more) =>
+        soFar.flatMap((left) =>
+          more.map((right) => ({
+            at: left.at === '' ? right.at : `${left.at}, ${right.at}`,
+            changes: { ...left.changes, ...right.changes },
+          })),
+        ),
+      [{ at: '', changes: {} }],
+    );
+  const wanted = places
+    .flatMap((place) => movesOf(first, described).map((move) => ({ place, move })))
+    .slice(0, MOST_SLOPES);
+  const effects = effectsBetween(
+    chosen,
+    wanted.map(({ place, move }): [Setting, Setting] => {
+      const there = moved(reference.setting, place.changes);
+      return [moved(there, { [first]: move.from }), moved(there, { [first]: move.to })];
+    }),
+  );
+  return wanted.map(({ place, move }, k) => ({ at: place.at, of: move.of, per: move.per, ...effects[k]! }));
+}
+
+function placesOf(name: string, variable: ReferenceVariable): { at: string; changes: Record<string, number | string> }[] {
+  switch (variable.kind) {
+    case 'category':
+      return variable.levels.map((level) => ({ at: `${name} ${level}`, changes: { [name]: level } }));
+    case 'flag':
+      return [0, 1].map((value) => ({ at: `${name} ${variable.texts?.[value as 0 | 1] ?? (value === 1 ? 'yes' : 'no')}`, changes: { [name]: value } }));
+    case 'number':
+      return [...new Set([variable.lowerQuartile, variable.median, variable.upperQuartile])].map((value) => ({
+        at: `${name} ${value}`,
+        changes: { [name]: value },
+      }));
+  }
+}
+
+function movesOf(name: string, variable: ReferenceVariable): { of: string; per: string | null; from: number | string; to: number | string }[] {
+  switch (variable.kind) {
+    case 'number':
+      // The slope at the median; exact for a straight line, a chord of one unit for a curve.
+      return [{ of: name, per: '1', from: variable.median, to: variable.median + 1 }];
+    case 'flag':
+      return [{ of: `${name} ${variable.texts?.[1] ?? 'yes'}`, per: null, from: 0, to: 1 }];
+    case 'category':
+      return variable.levels
+        .filter((level) => level !== variable.baseline)
+        .map((level) => ({ of: `${name} ${level} rather than ${variable.baseline}`, per: null, from: variable.baseline, to: level }));
+  }
+}
