@@ -1,0 +1,8 @@
+import { jsonText } from './json.ts';
+import type { StudyRecord } from './record.ts';
+import { recordSchema } from './record-schema.ts';
+
+/** The text of record.json: keys in the schema's order, full-precision numbers, the same bytes every time. */
+export function recordText(record: StudyRecord): string {
+  return jsonText(record, recordSchema());
+}

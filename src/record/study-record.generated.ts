@@ -1,0 +1,1162 @@
+// Generated from schemas/record.schema.json by schemas/generate.ts. Change the schema, then: npx tsx schemas/generate.ts
+
+/**
+ * The record of one run of a study (record.json): what was declared, read, tried, chosen, found and predicted. The same study, data and version of the program give the same bytes. Later versions may add keys; a program that reads records should pass over those that it does not know.
+ */
+export interface StudyRecord {
+  /**
+   * Name and version of this format.
+   */
+  format: 'plumbrule-record/1';
+  /**
+   * The program that wrote the record.
+   */
+  tool: {
+    /**
+     * Its name.
+     */
+    name: 'plumbrule';
+    /**
+     * Its version.
+     */
+    version: string;
+  };
+  /**
+   * The study as declared.
+   */
+  study: {
+    /**
+     * Its title.
+     */
+    title: string;
+    /**
+     * The question that it answers; null where none is written.
+     */
+    question: string | null;
+    /**
+     * The study file's base name.
+     */
+    file: string;
+    /**
+     * SHA-256 of the study file's bytes.
+     */
+    sha256: string;
+    /**
+     * Every setting that has a default, in force for this run.
+     *
+     * Items: One setting.
+     */
+    settings: {
+      /**
+       * Its dotted path in the study file.
+       */
+      key: string;
+      /**
+       * The value in force.
+       */
+      value: string;
+      /**
+       * Whether the study writes it; otherwise it is the default.
+       */
+      written: boolean;
+    }[];
+    /**
+     * The analyst's own sentence for the cautions.
+     */
+    caution: string | null;
+    /**
+     * Confidence of the intervals of coefficients.
+     */
+    confidence: number;
+    /**
+     * Confidence of the intervals of predictions.
+     */
+    prediction_interval: number;
+    /**
+     * What the study asks to be rendered.
+     */
+    report: {
+      /**
+       * Formats of the report.
+       */
+      formats: ('html' | 'markdown')[];
+      /**
+       * The user's own templates, relative to the study file; null for the built-in one.
+       */
+      templates: {
+        /**
+         * For HTML.
+         */
+        html: string | null;
+        /**
+         * For Markdown.
+         */
+        markdown: string | null;
+      };
+    };
+  };
+  /**
+   * The data as read.
+   */
+  data: {
+    /**
+     * The data file as the study names it.
+     */
+    file: string;
+    /**
+     * SHA-256 of the data file's bytes.
+     */
+    sha256: string;
+    /**
+     * The delimiter used between cells.
+     */
+    delimiter: string;
+    /**
+     * The encoding of the text.
+     */
+    encoding: 'utf-8' | 'latin-1';
+    /**
+     * Rows in the file, the header not counted.
+     */
+    rows_read: number;
+    /**
+     * Rows that every candidate is fitted on.
+     */
+    rows_used: number;
+    /**
+     * Every row read but not used, under exactly one reason, in the order in which the reasons were applied.
+     *
+     * Items: One reason.
+     */
+    left_out: {
+      /**
+       * The reason, for people.
+       */
+      because: string;
+      /**
+       * Its kind.
+       */
+      kind: 'bad_value' | 'left_out' | 'missing' | 'undefined';
+      /**
+       * Rows counted under it.
+       */
+      rows: number;
+      /**
+       * For missing values: the variable that is missing first, in order of declaration.
+       */
+      variable: string | null;
+      /**
+       * For missing values: all remaining rows in which that variable is missing.
+       */
+      missing_any: number | null;
+    }[];
+    /**
+     * Headers that the study does not declare, in file order.
+     */
+    columns_ignored: string[];
+    /**
+     * The first cells that break the contract, in file order.
+     *
+     * Items: One cell.
+     */
+    bad_values: {
+      /**
+       * Line in the data file as a person counts it.
+       */
+      row: number;
+      /**
+       * The variable.
+       */
+      variable: string;
+      /**
+       * The cell's text.
+       */
+      text: string;
+      /**
+       * What is wrong with it.
+       */
+      because: string;
+    }[];
+    /**
+     * All cells that break the contract.
+     */
+    bad_value_count: number;
+    /**
+     * First and last of the rows used, where the study declares a time variable; null otherwise.
+     */
+    time: {
+      /**
+       * The time variable.
+       */
+      variable: string;
+      /**
+       * ISO date of the first row used.
+       */
+      first: string;
+      /**
+       * ISO date of the last row used.
+       */
+      last: string;
+    } | null;
+    /**
+     * Declared and derived variables, in order.
+     */
+    variables: RecordVariable[];
+  };
+  /**
+   * The response that the study asks about.
+   */
+  response: {
+    /**
+     * Its name.
+     */
+    variable: string;
+    /**
+     * The study's scale for it; a candidate may have its own.
+     */
+    scale: string;
+    /**
+     * Its unit.
+     */
+    unit: string | null;
+    /**
+     * Its label for people.
+     */
+    label: string;
+  };
+  /**
+   * Every candidate, in the order declared.
+   */
+  candidates: RecordCandidate[];
+  /**
+   * Partial F tests of pairs of candidates in which the column space of one lies inside the other's.
+   *
+   * Items: One pair.
+   */
+  partial_f: {
+    /**
+     * Name of the smaller candidate.
+     */
+    smaller: string;
+    /**
+     * Name of the larger candidate.
+     */
+    larger: string;
+    /**
+     * The F statistic; null where it is not defined.
+     */
+    statistic: number | null;
+    /**
+     * Degrees of freedom of the numerator.
+     */
+    df1: number;
+    /**
+     * Degrees of freedom of the denominator.
+     */
+    df2: number;
+    /**
+     * Upper tail probability of the statistic; null with it.
+     */
+    p_value: number | null;
+    /**
+     * Whether the choice rests on it.
+     */
+    decided: boolean;
+  }[];
+  /**
+   * Why not every nested pair is listed, as a sentence; null where all are.
+   */
+  partial_f_omitted: string | null;
+  /**
+   * The declared rule and what it chose.
+   */
+  selection: {
+    /**
+     * The criterion that ranks.
+     */
+    rank_by: 'adjusted_r_squared' | 'aic' | 'aicc' | 'bic' | 'mallows_cp' | 'press' | 'partial_f';
+    /**
+     * Candidates within this much of the best count as equal; the fewest coefficients win.
+     */
+    prefer_smaller_within: number;
+    /**
+     * Significance for partial F.
+     */
+    significance: number;
+    /**
+     * The admission rules in force, one sentence each.
+     */
+    admission: string[];
+    /**
+     * Candidates, best first.
+     *
+     * Items: One place.
+     */
+    ranking: {
+      /**
+       * Place, from 1.
+       */
+      rank: number;
+      /**
+       * The candidate's name.
+       */
+      candidate: string;
+      /**
+       * The criterion's value; null where it is not defined.
+       */
+      value: number | null;
+      /**
+       * Distance from the best value; null with it.
+       */
+      difference: number | null;
+    }[];
+    /**
+     * Name of the candidate chosen; null where none was admitted.
+     */
+    chosen: string | null;
+    /**
+     * Why that one, or none, in sentences.
+     */
+    because: string;
+  };
+  /**
+   * The chosen model; null where no candidate was admitted.
+   */
+  model: RecordModel | null;
+  /**
+   * What was found on examining it; null where no candidate was admitted.
+   */
+  examination: RecordExamination | null;
+  /**
+   * The predictions that the study asks for.
+   */
+  predictions: RecordPrediction[];
+  /**
+   * Prediction of the total of all predicted rows, on the response's own scale; null where it is not asked for.
+   */
+  prediction_total: {
+    /**
+     * Rows summed.
+     */
+    rows: number;
+    /**
+     * The total of their estimates.
+     */
+    estimate: number;
+    /**
+     * Lower end of its interval.
+     */
+    lower: number;
+    /**
+     * Upper end of its interval.
+     */
+    upper: number;
+    /**
+     * The total of their means where the scale is not natural, else null.
+     */
+    mean: number | null;
+  } | null;
+  /**
+   * The study's acceptance criteria, held against the chosen model.
+   *
+   * Items: One criterion.
+   */
+  acceptance: {
+    /**
+     * The figure, or "chosen".
+     */
+    criterion: string;
+    /**
+     * The limit, for people.
+     */
+    limit: string;
+    /**
+     * The value found; null where there is none.
+     */
+    value: number | string | null;
+    /**
+     * Whether the limit is kept.
+     */
+    passed: boolean;
+  }[];
+  /**
+   * What to know before relying on the results, in the order found.
+   *
+   * Items: One warning.
+   */
+  warnings: {
+    /**
+     * What it is about.
+     */
+    about: string;
+    /**
+     * The warning, as sentences.
+     */
+    text: string;
+  }[];
+}
+/**
+ * One declared or derived variable: what it is, how the study uses it, and its values over the rows used.
+ */
+export interface RecordVariable {
+  /**
+   * Its name in the study.
+   */
+  name: string;
+  /**
+   * Its label for people; the name where the study gives none.
+   */
+  label: string;
+  /**
+   * Its unit as the study writes it.
+   */
+  unit: string | null;
+  /**
+   * Its type.
+   */
+  type: 'number' | 'integer' | 'category' | 'flag' | 'date' | 'text' | 'identifier';
+  /**
+   * The expression that it is derived by; null for a variable read from the data.
+   */
+  derived_from: string | null;
+  /**
+   * How the study uses it: "response", "predictor", "weights", "row identity", "time order", "condition", "derivation" or "declared only".
+   */
+  used_as: string[];
+  /**
+   * Rows in which it is missing, among the rows read.
+   */
+  missing: number;
+  /**
+   * Smallest value over the rows used. Dates are days since 1970-01-01. Null where the variable is not numeric; so for the six figures that follow.
+   */
+  smallest: number | null;
+  /**
+   * Value below which a quarter of the rows used lie.
+   */
+  lower_quartile: number | null;
+  /**
+   * Middle value of the rows used.
+   */
+  median: number | null;
+  /**
+   * Mean over the rows used.
+   */
+  mean: number | null;
+  /**
+   * Value below which three quarters of the rows used lie.
+   */
+  upper_quartile: number | null;
+  /**
+   * Largest value over the rows used.
+   */
+  largest: number | null;
+  /**
+   * Standard deviation over the rows used, with divisor n − 1.
+   */
+  standard_deviation: number | null;
+  /**
+   * Rows used per level of a category (baseline first) or flag; null for the rest.
+   */
+  levels:
+    | {
+        /**
+         * The level's text.
+         */
+        level: string;
+        /**
+         * Rows used that have it.
+         */
+        rows: number;
+      }[]
+    | null;
+}
+/**
+ * One candidate, fitted on the common rows.
+ */
+export interface RecordCandidate {
+  /**
+   * Its name in the study.
+   */
+  name: string;
+  /**
+   * Names of its terms, in the order declared.
+   */
+  terms: string[];
+  /**
+   * Scale on which its response is fitted: "natural", "log", "sqrt", "reciprocal" or "box_cox" with its λ.
+   */
+  scale: string;
+  /**
+   * Whether it has an intercept.
+   */
+  intercept: boolean;
+  /**
+   * n: the rows fitted.
+   */
+  rows: number;
+  /**
+   * p: columns of the design that were kept, the intercept included.
+   */
+  coefficient_count: number;
+  /**
+   * R² = 1 − RSS/TSS; TSS about the mean with an intercept, about zero without one. Null where the response does not vary.
+   */
+  r_squared: number | null;
+  /**
+   * R² adjusted for the number of coefficients; null where there are no degrees of freedom.
+   */
+  adjusted_r_squared: number | null;
+  /**
+   * 1 − PRESS/TSS; null where PRESS is.
+   */
+  predicted_r_squared: number | null;
+  /**
+   * s = √(RSS/(n − p)), in units of the response's scale; null where there are no degrees of freedom.
+   */
+  residual_standard_error: number | null;
+  /**
+   * RSS, weighted where the study has weights.
+   */
+  residual_sum_of_squares: number;
+  /**
+   * n − p.
+   */
+  degrees_of_freedom: number;
+  /**
+   * Gaussian log-likelihood with every constant, the weights and the Jacobian of the response's scale; null where RSS is 0.
+   */
+  log_likelihood: number | null;
+  /**
+   * Akaike's information criterion, σ² counted as a parameter; null with the log-likelihood.
+   */
+  aic: number | null;
+  /**
+   * AIC corrected for small samples; null where it is not defined.
+   */
+  aicc: number | null;
+  /**
+   * Bayesian information criterion; null with the log-likelihood.
+   */
+  bic: number | null;
+  /**
+   * Mallows' Cp against the union of all candidates' terms; null where that union leaves no degrees of freedom.
+   */
+  mallows_cp: number | null;
+  /**
+   * PRESS: the sum of squared errors of each row predicted from all the others; null where it was not worked out or a leverage is 1.
+   */
+  press: number | null;
+  /**
+   * Overall F test against the intercept alone (against nothing without an intercept); null where it has no other column.
+   */
+  overall_f: {
+    /**
+     * The F statistic; null where it is not defined (an exact fit, no degrees of freedom).
+     */
+    statistic: number | null;
+    /**
+     * Degrees of freedom of the numerator.
+     */
+    df1: number;
+    /**
+     * Degrees of freedom of the denominator.
+     */
+    df2: number;
+    /**
+     * Upper tail probability of the statistic; null with it.
+     */
+    p_value: number | null;
+  } | null;
+  /**
+   * Largest variance inflation factor of its columns.
+   */
+  largest_vif: number | null;
+  /**
+   * Largest condition index: columns scaled to unit length, not centred.
+   */
+  condition_number: number | null;
+  /**
+   * Its coefficients in the order of its columns.
+   */
+  coefficients: RecordCoefficient[];
+  /**
+   * Columns left out because they depend exactly on earlier ones.
+   *
+   * Items: One column.
+   */
+  dropped: {
+    /**
+     * The column's name.
+     */
+    column: string;
+    /**
+     * How it depends on the others, as a sentence.
+     */
+    sentence: string;
+  }[];
+  /**
+   * How the numbers were computed: the factor in extended precision, in double precision with refined estimates, or in plain double precision.
+   */
+  arithmetic: 'extended' | 'refined' | 'plain';
+  /**
+   * Whether it passed every admission rule.
+   */
+  admitted: boolean;
+  /**
+   * Each rule that it broke, as a sentence; empty where admitted.
+   */
+  refused_because: string[];
+}
+/**
+ * One column of a candidate's design with its estimate, on the candidate's response scale.
+ */
+export interface RecordCoefficient {
+  /**
+   * The column's name, for example "cargo × vessel Tern"; "intercept" for the constant.
+   */
+  name: string;
+  /**
+   * Name of the term that the column belongs to; "intercept" for the constant.
+   */
+  term: string;
+  /**
+   * The estimated coefficient.
+   */
+  estimate: number;
+  /**
+   * Its standard error; null where there are no degrees of freedom or the fit is exact; so for the five figures that depend on it.
+   */
+  standard_error: number | null;
+  /**
+   * Estimate divided by standard error.
+   */
+  t: number | null;
+  /**
+   * Two-sided p-value of t on the residual degrees of freedom.
+   */
+  p_value: number | null;
+  /**
+   * Lower end of its interval at the study's confidence.
+   */
+  lower: number | null;
+  /**
+   * Upper end of its interval at the study's confidence.
+   */
+  upper: number | null;
+  /**
+   * Variance inflation factor; null for the intercept, and in a model with fewer than two other columns.
+   */
+  vif: number | null;
+}
+/**
+ * The chosen model, complete enough to predict from without the data.
+ */
+export interface RecordModel {
+  /**
+   * Name of the candidate chosen.
+   */
+  candidate: string;
+  /**
+   * What it predicts.
+   */
+  response: {
+    /**
+     * The response's name.
+     */
+    variable: string;
+    /**
+     * Scale on which it is fitted.
+     */
+    scale: string;
+    /**
+     * λ of a Box–Cox scale; null for the others.
+     */
+    lambda: number | null;
+    /**
+     * The response's unit on its own scale.
+     */
+    unit: string | null;
+    /**
+     * The response's label for people.
+     */
+    label: string;
+  };
+  /**
+   * Whether it has an intercept.
+   */
+  intercept: boolean;
+  /**
+   * n: the rows fitted.
+   */
+  rows: number;
+  /**
+   * n − p.
+   */
+  degrees_of_freedom: number;
+  /**
+   * s, in units of the response's scale; null where there are no degrees of freedom.
+   */
+  residual_standard_error: number | null;
+  /**
+   * Mean of the response over the rows used, on its own scale.
+   */
+  response_mean: number;
+  /**
+   * Columns of its design in order, the intercept first where there is one.
+   *
+   * Items: One column: the product of its pieces.
+   */
+  columns: {
+    /**
+     * The column's name.
+     */
+    name: string;
+    /**
+     * Name of its term; null for the intercept.
+     */
+    term: string | null;
+    /**
+     * Unit of one step of the column; null where it has none or it is unknown.
+     */
+    unit: string | null;
+    /**
+     * Factors of the product; empty for the intercept.
+     *
+     * Items: One factor of the column's product.
+     */
+    pieces: {
+      /**
+       * What it does to the variable.
+       */
+      kind: 'variable' | 'level' | 'power' | 'bend' | 'spline';
+      /**
+       * The variable's name.
+       */
+      variable: string;
+      /**
+       * For a level: the level that is coded 1.
+       */
+      level?: string;
+      /**
+       * For a power: the exponent.
+       */
+      to?: number;
+      /**
+       * For a bend: the value at which the slope changes.
+       */
+      at?: number;
+      /**
+       * For a bend: the side on which it acts.
+       */
+      side?: 'above' | 'below';
+      /**
+       * For a spline: its knots, the outer two being the boundary.
+       */
+      knots?: number[];
+      /**
+       * For a spline: which of its curved columns, from 1.
+       */
+      index?: number;
+    }[];
+    /**
+     * The estimated coefficient.
+     */
+    estimate: number;
+    /**
+     * Mean of the column over the rows used.
+     */
+    mean: number;
+  }[];
+  /**
+   * (X′WX)⁻¹, p × p and symmetric, row by row in the order of `columns`.
+   */
+  inverse: number[][];
+  /**
+   * Residuals (sorted; evenly spaced quantiles of them where there are very many) for the mean on the response's own scale (Duan 1983); null on the natural scale.
+   */
+  smearing: number[] | null;
+  /**
+   * Largest leverage among the rows used.
+   */
+  largest_leverage: number;
+  /**
+   * What each term says, in the order declared.
+   */
+  terms: RecordTerm[];
+}
+/**
+ * What one term of the chosen model says, on the response's fitted scale.
+ */
+export interface RecordTerm {
+  /**
+   * The term's name.
+   */
+  name: string;
+  /**
+   * Its kind.
+   */
+  kind: 'number' | 'flag' | 'category' | 'interaction' | 'polynomial' | 'power' | 'bend' | 'spline';
+  /**
+   * Names of the variables in it.
+   */
+  variables: string[];
+  /**
+   * Names of its columns.
+   */
+  columns: string[];
+  /**
+   * F test of all its columns together; null where nothing can be tested.
+   */
+  joint_f: {
+    /**
+     * The F statistic; null where it is not defined (an exact fit, no degrees of freedom).
+     */
+    statistic: number | null;
+    /**
+     * Degrees of freedom of the numerator.
+     */
+    df1: number;
+    /**
+     * Degrees of freedom of the denominator.
+     */
+    df2: number;
+    /**
+     * Upper tail probability of the statistic; null with it.
+     */
+    p_value: number | null;
+  } | null;
+  /**
+   * Generalised variance inflation factor of its columns (Fox & Monette 1992); null as for `vif`.
+   */
+  generalised_vif: number | null;
+  /**
+   * The same to the power 1/(2 · columns), comparable among terms.
+   */
+  generalised_vif_per_column: number | null;
+  /**
+   * What a typical step of its variable goes with: from lower to upper quartile, or from baseline to each level. Empty for interactions.
+   *
+   * Items: One step.
+   */
+  typical_steps: {
+    /**
+     * Where the step starts, for people.
+     */
+    from: string;
+    /**
+     * Where it ends, for people.
+     */
+    to: string;
+    /**
+     * Where it starts as a number; null for a level.
+     */
+    from_value: number | null;
+    /**
+     * Where it ends as a number; null for a level.
+     */
+    to_value: number | null;
+    /**
+     * Difference in the response, the other terms held.
+     */
+    estimate: number;
+    /**
+     * Lower end of its interval at the study's confidence.
+     */
+    lower: number | null;
+    /**
+     * Upper end of its interval.
+     */
+    upper: number | null;
+  }[];
+  /**
+   * The fitted relationship of all columns that depend on this variable alone, over its range, relative to its mean, with its confidence band; null for categories, flags and interactions.
+   */
+  curve: {
+    /**
+     * The variable along the curve.
+     */
+    variable: string;
+    /**
+     * Its values.
+     */
+    x: number[];
+    /**
+     * The fitted relationship at each.
+     */
+    y: number[];
+    /**
+     * Lower end of the band at each.
+     */
+    lower: (number | null)[];
+    /**
+     * Upper end of the band at each.
+     */
+    upper: (number | null)[];
+  } | null;
+  /**
+   * For an interaction: slope or difference of the first member at levels or quartiles of the others.
+   *
+   * Items: One slope.
+   */
+  slopes: {
+    /**
+     * Where the other members are held.
+     */
+    at: string;
+    /**
+     * What moves.
+     */
+    of: string;
+    /**
+     * Unit of the step; null for a level or where there is none.
+     */
+    per: string | null;
+    /**
+     * Slope or difference.
+     */
+    estimate: number;
+    /**
+     * Lower end of its interval at the study's confidence.
+     */
+    lower: number | null;
+    /**
+     * Upper end of its interval.
+     */
+    upper: number | null;
+  }[];
+}
+/**
+ * What was found on examining the chosen model.
+ */
+export interface RecordExamination {
+  /**
+   * Questions and answers, in the order in which a reader asks.
+   */
+  findings: RecordFinding[];
+  /**
+   * The most influential rows, most influential first, at most 10.
+   *
+   * Items: One row.
+   */
+  influential_rows: {
+    /**
+     * Line in the data file as a person counts it.
+     */
+    row: number;
+    /**
+     * Its identity; null where the study declares none.
+     */
+    id: string | null;
+    /**
+     * Fitted value on the response's fitted scale.
+     */
+    fitted: number;
+    /**
+     * Observed value on the response's fitted scale.
+     */
+    observed: number;
+    /**
+     * e/(s √(1 − h)); null where the leverage is 1 or nothing can be tested.
+     */
+    standardised_residual: number | null;
+    /**
+     * Leverage h.
+     */
+    leverage: number;
+    /**
+     * Cook's distance; null with the standardised residual.
+     */
+    cooks_distance: number | null;
+  }[];
+  /**
+   * Counts over all rows used.
+   */
+  counts: {
+    /**
+     * Rows used.
+     */
+    rows: number;
+    /**
+     * Rows whose standardised residual is beyond ±2.
+     */
+    beyond_2: number;
+    /**
+     * Rows whose standardised residual is beyond ±3.
+     */
+    beyond_3: number;
+    /**
+     * Rows whose leverage is above 2p/n.
+     */
+    leverage_beyond_2p_over_n: number;
+    /**
+     * Rows whose leverage is above 3p/n.
+     */
+    leverage_beyond_3p_over_n: number;
+  };
+  /**
+   * Rows for the charts: all rows up to 2,000, beyond that a fixed thinning that keeps the most extreme. Lists of equal length, in file order.
+   */
+  points: {
+    /**
+     * Whether some rows are not listed.
+     */
+    thinned: boolean;
+    /**
+     * Line in the data file of each.
+     */
+    row: number[];
+    /**
+     * Identity of each; null where the study declares none.
+     */
+    id: (string | null)[];
+    /**
+     * Fitted value of each, on the response's fitted scale.
+     */
+    fitted: number[];
+    /**
+     * Observed value of each, on the response's fitted scale.
+     */
+    observed: number[];
+    /**
+     * Observed − fitted of each.
+     */
+    residual: number[];
+    /**
+     * Standardised residual of each.
+     */
+    standardised_residual: (number | null)[];
+    /**
+     * Leverage of each.
+     */
+    leverage: number[];
+    /**
+     * Cook's distance of each.
+     */
+    cooks_distance: (number | null)[];
+    /**
+     * Position of each in time order, from 1; null where the study declares no time.
+     */
+    time_position: number[] | null;
+    /**
+     * Values of the chosen model's variables.
+     *
+     * Items: One variable.
+     */
+    values: {
+      /**
+       * Its name.
+       */
+      variable: string;
+      /**
+       * Its values where numeric, else null.
+       */
+      numbers: number[] | null;
+      /**
+       * Its levels where a category, else null.
+       */
+      texts: string[] | null;
+    }[];
+  };
+}
+/**
+ * One question put to the chosen model, with what was found.
+ */
+export interface RecordFinding {
+  /**
+   * Stable name, for example "equal_spread", "independence", "influence".
+   */
+  name: string;
+  /**
+   * The question, as a reader asks it.
+   */
+  question: string;
+  /**
+   * The figure that answers it; null where it is not defined.
+   */
+  statistic: number | null;
+  /**
+   * What the figure is called.
+   */
+  statistic_name: string;
+  /**
+   * Its degrees of freedom, if any.
+   */
+  df: number[];
+  /**
+   * Its p-value; null where it has none.
+   */
+  p_value: number | null;
+  /**
+   * The customary mark that it is held against, in words; null where there is none.
+   */
+  mark: string | null;
+  /**
+   * What was found, as a sentence.
+   */
+  verdict: string;
+  /**
+   * 0 nothing to see, 1 worth a look, 2 take care before relying on the model.
+   */
+  concern: 0 | 1 | 2;
+  /**
+   * What to do about it, as a sentence; null where nothing is to be done.
+   */
+  advice: string | null;
+}
+/**
+ * One predicted row, on the response's own scale.
+ */
+export interface RecordPrediction {
+  /**
+   * The row's label.
+   */
+  label: string;
+  /**
+   * Values that it is predicted at.
+   *
+   * Items: One value.
+   */
+  values: {
+    /**
+     * The variable's name.
+     */
+    variable: string;
+    /**
+     * Its value.
+     */
+    value: number | string | boolean;
+  }[];
+  /**
+   * The prediction: x′b, or the median g⁻¹(x′b) where the response is fitted on another scale.
+   */
+  estimate: number;
+  /**
+   * Lower end of the interval for a new row at the study's prediction confidence.
+   */
+  lower: number;
+  /**
+   * Upper end of the interval for a new row.
+   */
+  upper: number;
+  /**
+   * Lower end of the interval for the mean (the median on another scale).
+   */
+  mean_lower: number;
+  /**
+   * Upper end of the interval for the mean (the median on another scale).
+   */
+  mean_upper: number;
+  /**
+   * The mean on the own scale by smearing (Duan 1983) where the scale is not natural, else null.
+   */
+  mean: number | null;
+  /**
+   * x′(X′WX)⁻¹x.
+   */
+  leverage: number;
+  /**
+   * Each way in which the row lies outside the data, as a sentence.
+   */
+  outside: string[];
+}
