@@ -48,7 +48,10 @@ export function seeded(seed: number): Random {
   };
 }
 
-/** Writes a CSV; a cell that holds the delimiter or a quote is quoted. */
+/**
+ * Writes a CSV, to the file named on the command line where there is one. A cell that holds the delimiter or
+ * a quote is quoted.
+ */
 export function writeCsv(
   file: URL,
   header: readonly string[],
@@ -58,7 +61,7 @@ export function writeCsv(
   const cell = (text: string) =>
     text.includes(delimiter) || text.includes('"') ? `"${text.replaceAll('"', '""')}"` : text;
   const lines = [header, ...rows].map((row) => row.map(cell).join(delimiter));
-  writeFileSync(file, `${lines.join('\n')}\n`);
+  writeFileSync(process.argv[2] ?? file, `${lines.join('\n')}\n`);
 }
 
 /** 2025-03-09 or, with the time, 2025-03-09T07:40. */
