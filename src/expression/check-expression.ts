@@ -1,7 +1,14 @@
 import type { BinaryOperator, Expression, ExpressionFault, Span, ValueType } from './expression.ts';
 import { callPattern, FUNCTIONS, type FunctionArgument, functionNamed } from './functions.ts';
-import { isoDays } from './iso-date.ts';
 import { nearest } from './nearest.ts';
+import {
+  addFault,
+  PLURAL,
+  requireDateText,
+  requireFlag,
+  requireNumber,
+  WITH_ARTICLE,
+} from './type-faults.ts';
 
 /** What a whole expression is: its type (null where it is not known because of a fault) and what it reads. */
 export interface CheckedExpression {
@@ -45,10 +52,10 @@ function checkNode(check: Check, node: Expression): ValueType | null {
     case 'name':
       return checkName(check, node);
     case 'negate':
-      requireNumber(check, node.of, checkNode(check, node.of), 'The minus sign');
+      requireNumber(check.faults, node.of, checkNode(check, node.of), 'The minus sign');
       return 'number';
     case 'not':
-      requireFlag(check, node.of, checkNode(check, node.of), '"not"');
+      requireFlag(check.faults, node.of, checkNode(check, node.of), '"not"');
       return 'flag';
     case 'binary':
       return checkBinary(check, node.operator, node.left, node.right, node);
@@ -66,7 +73,7 @@ function checkName(check: Check, node: Expression & { kind: 'name' }, besideWord
   }
   const message = `The expression names "${node.name}", which is neither a variable nor derived.`;
   const quote = besideWord ? `A text stands in quotation marks: "${node.name}".` : undefined;
-  addFault(check, node, 'expression_name', message, nameHint(check, node.name) ?? quote);
+  addFault(check.faults, node, 'expression_name', message, nameHint(check, node.name) ?? quote);
   return null;
 }
 
@@ -95,14 +102,14 @@ function checkBinary(
     case '-':
       if (leftType === 'date' || rightType === 'date') {
         const message = `"${operator}" does not work on dates.`;
-        addFault(check, whole, 'expression_type', message, 'Use days_between(from, to).');
+        addFault(check.faults, whole, 'expression_type', message, 'Use days_between(from, to).');
         return 'number';
       }
       break;
     case 'and':
     case 'or':
-      requireFlag(check, left, leftType, `"${operator}"`);
-      requireFlag(check, right, rightType, `"${operator}"`);
+      requireFlag(check.faults, left, leftType, `"${operator}"`);
+      requireFlag(check.faults, right, rightType, `"${operator}"`);
       return 'flag';
     case '==':
     case '!=':
@@ -121,8 +128,8 @@ function checkBinary(
       }
       return 'flag';
   }
-  requireNumber(check, left, leftType, `"${operator}"`);
-  requireNumber(check, right, rightType, `"${operator}"`);
+  requireNumber(check.faults, left, leftType, `"${operator}"`);
+  requireNumber(check.faults, right, rightType, `"${operator}"`);
   return 'number';
 }
 
@@ -148,19 +155,19 @@ function checkComparison(
     [right, left],
   ] as const) {
     if (date.type === 'date' && other.node.kind === 'text') {
-      requireDateText(check, other.node);
+      requireDateText(check.faults, other.node);
       return;
     }
   }
   const comparable = left.type === right.type || (isWord(left.type) && isWord(right.type));
   if (!comparable) {
     const message = `"${operator}" compares ${WITH_ARTICLE[left.type]} with ${WITH_ARTICLE[right.type]}.`;
-    addFault(check, whole, 'expression_type', message, comparisonHint(left, right));
+    addFault(check.faults, whole, 'expression_type', message, comparisonHint(left, right));
     return;
   }
   if (!equality && left.type !== 'number' && left.type !== 'date') {
     const message = `"${operator}" puts values in order, and ${PLURAL[left.type]} have none.`;
-    addFault(check, whole, 'expression_type', message, 'Only == and != work here.');
+    addFault(check.faults, whole, 'expression_type', message, 'Only == and != work here.');
   }
 }
 
@@ -188,7 +195,7 @@ function checkCall(check: Check, node: Expression & { kind: 'call' }): ValueType
   if (known === null) {
     for (const argument of node.arguments) checkNode(check, argument);
     const message = `There is no function "${node.function}".`;
-    addFault(check, node.functionSpan, 'expression_name', message, functionHint(check, node.function));
+    addFault(check.faults, node.functionSpan, 'expression_name', message, functionHint(check, node.function));
     return null;
   }
 
@@ -197,7 +204,7 @@ function checkCall(check: Check, node: Expression & { kind: 'call' }): ValueType
   const given = node.arguments.length;
   if (given < least || given > most) {
     const message = `${known.name} takes ${countOf(least, most)}, and ${given} ${given === 1 ? 'is' : 'are'} given.`;
-    addFault(check, node, 'expression_type', message, `Write ${callPattern(known)}.`);
+    addFault(check.faults, node, 'expression_type', message, `Write ${callPattern(known)}.`);
   }
 
   let same: ValueType | null = null;
@@ -233,16 +240,16 @@ function checkArgument(
   const type = checkNode(check, argument);
   switch (wanted.kind) {
     case 'number':
-      requireNumber(check, argument, type, caller);
+      requireNumber(check.faults, argument, type, caller);
       break;
     case 'flag':
-      requireFlag(check, argument, type, `The ${wanted.name} of ${caller}`);
+      requireFlag(check.faults, argument, type, `The ${wanted.name} of ${caller}`);
       break;
     case 'date':
-      if (argument.kind === 'text') requireDateText(check, argument);
+      if (argument.kind === 'text') requireDateText(check.faults, argument);
       else if (type !== null && type !== 'date') {
         addFault(
-          check,
+          check.faults,
           argument,
           'expression_type',
           `${caller} works on dates, and this is ${WITH_ARTICLE[type]}.`,
@@ -253,18 +260,18 @@ function checkArgument(
       if (argument.kind !== 'name') {
         const message = `${caller} works on the name of a variable, not on a formula.`;
         const hint = 'Derive the formula as a variable of its own first.';
-        addFault(check, argument, 'expression_type', message, hint);
+        addFault(check.faults, argument, 'expression_type', message, hint);
       }
       break;
     case 'same':
       if (type === 'text' || type === 'category') {
         const message = `${caller} chooses between numbers, flags or dates, and this is ${WITH_ARTICLE[type]}.`;
-        addFault(check, argument, 'expression_type', message);
+        addFault(check.faults, argument, 'expression_type', message);
         return null;
       }
       if (type !== null && same !== null && type !== same) {
         const message = `Both values of ${caller} must be of one type, and these are ${WITH_ARTICLE[same]} and ${WITH_ARTICLE[type]}.`;
-        addFault(check, argument, 'expression_type', message);
+        addFault(check.faults, argument, 'expression_type', message);
       }
   }
   return type;
@@ -276,76 +283,11 @@ function checkDigits(check: Check, digits: Expression): void {
   if (written.kind !== 'number') return;
   const value = sign * written.value;
   if (Number.isInteger(value) && Math.abs(value) <= 15) return;
-  addFault(check, digits, 'expression_type', 'The digits of round are a whole number from -15 to 15.');
+  addFault(check.faults, digits, 'expression_type', 'The digits of round are a whole number from -15 to 15.');
 }
-
-function requireNumber(check: Check, node: Expression, type: ValueType | null, user: string): void {
-  if (type === null || type === 'number') return;
-  const hint =
-    type === 'flag'
-      ? `To count a flag as 1 or 0, write if(${node.kind === 'name' ? node.name : '…'}, 1, 0).`
-      : type === 'date'
-        ? 'Use days_between(from, to), or year, month, day or weekday of the date.'
-        : node.kind === 'text' && Number.isFinite(Number.parseFloat(node.value))
-          ? 'Write the number without quotation marks.'
-          : undefined;
-  addFault(
-    check,
-    node,
-    'expression_type',
-    `${user} works on numbers, and this is ${WITH_ARTICLE[type]}.`,
-    hint,
-  );
-}
-
-function requireFlag(check: Check, node: Expression, type: ValueType | null, user: string): void {
-  if (type === null || type === 'flag') return;
-  const name = node.kind === 'name' ? node.name : '…';
-  const hint = type === 'number' ? `Compare it with something: ${name} > 0.` : undefined;
-  const message = `${user} works on conditions (true or false), and this is ${WITH_ARTICLE[type]}.`;
-  addFault(check, node, 'expression_type', message, hint);
-}
-
-function requireDateText(check: Check, node: Expression & { kind: 'text' }): void {
-  if (isoDays(node.value) !== null) return;
-  const message = `"${node.value}" is not a date.`;
-  addFault(check, node, 'expression_type', message, 'Write it as year, month and day: "2024-03-01".');
-}
-
-const WITH_ARTICLE: Readonly<Record<ValueType, string>> = {
-  number: 'a number',
-  flag: 'a flag',
-  category: 'a category',
-  text: 'a text',
-  date: 'a date',
-};
-
-const PLURAL: Readonly<Record<ValueType, string>> = {
-  number: 'numbers',
-  flag: 'flags',
-  category: 'categories',
-  text: 'texts',
-  date: 'dates',
-};
 
 function countOf(least: number, most: number): string {
   if (most === Number.POSITIVE_INFINITY) return `${least} or more arguments`;
   if (least !== most) return `${least} or ${most} arguments`;
   return `${least} ${least === 1 ? 'argument' : 'arguments'}`;
-}
-
-function addFault(
-  check: Check,
-  span: Span,
-  code: 'expression_name' | 'expression_type',
-  message: string,
-  hint?: string,
-): void {
-  check.faults.push({
-    code,
-    start: span.start,
-    end: span.end,
-    message,
-    ...(hint === undefined ? {} : { hint }),
-  });
 }

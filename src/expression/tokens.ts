@@ -15,7 +15,7 @@ const NUMBER = /(?:\d+(?:\.\d+)?|\.\d+)(?:[eE][+-]?\d+)?/y;
 const NAME = /[A-Za-z_][A-Za-z0-9_]*/y;
 const BLANK = /[ \t\r\n\u00a0]*/y;
 /** A word as a person would see it, with letters that a plain name may not have. */
-const ANY_WORD = /[\p{L}\p{M}\p{N}_]+/uy;
+const ANY_WORD = /[\p{L}\p{M}\p{Nd}_]+/uy;
 const OPERATOR = /==|!=|<=|>=|[-+*/^<>]/y;
 
 /** Signs that other notations use here, longest first, with what to write instead. */

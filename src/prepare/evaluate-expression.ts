@@ -1,7 +1,9 @@
-import type { CategoryColumn, Column, TextColumn } from '../data/table.ts';
+import type { Column } from '../data/table.ts';
 import type { BinaryOperator, Expression } from '../expression/expression.ts';
 import type { FunctionName } from '../expression/functions.ts';
 import { calendarDay, isoDays, isoWeekday } from '../expression/iso-date.ts';
+import { compareWords } from './compare-words.ts';
+import { isMissing } from './is-missing.ts';
 import { add, type Block, both, choose, combine, divide, either, map, multiply, subtract } from './loops.ts';
 import { roundTo } from './round-to.ts';
 
@@ -167,8 +169,14 @@ const POWERS: ReadonlyMap<number, (x: number) => number> = new Map([
 function compileBinary(node: Expression & { kind: 'binary' }, scope: Scope, depth: number): Step {
   const { operator, left, right } = node;
   if (operator === '==' || operator === '!=') {
-    const words = compileWords(left, right, operator === '==', scope, depth);
-    if (words !== null) return words;
+    const words = compareWords(left, right, operator === '==', scope.columns);
+    if (words !== null) {
+      const out = scratchAt(scope, depth);
+      return (start, n) => {
+        words(out, start, n);
+        return out;
+      };
+    }
   }
   if (operator === '^' && right.kind === 'number') {
     const power = POWERS.get(right.value);
@@ -194,64 +202,6 @@ function compileOrdered(node: Expression, scope: Scope, depth: number): Step {
   const days = isoDays(node.value);
   if (days === null) throw new Error(`"${node.value}" is not a date.`);
   return constant(days, scope);
-}
-
-/** Equality of categories and texts with one another or with a written text; null where it is of numbers. */
-function compileWords(
-  left: Expression,
-  right: Expression,
-  equal: boolean,
-  scope: Scope,
-  depth: number,
-): Step | null {
-  const a = wordsOf(left, scope);
-  const b = wordsOf(right, scope);
-  if (a === null || b === null) return null;
-  const out = scratchAt(scope, depth);
-  const [same, different] = equal ? [1, 0] : [0, 1];
-  if (a.kind === 'category' && b.kind === 'written') return compileLevel(a, b.text, same, different, out);
-  if (b.kind === 'category' && a.kind === 'written') return compileLevel(b, a.text, same, different, out);
-  return (start, n) => {
-    for (let i = 0; i < n; i++) {
-      const x = wordAt(a, start + i);
-      const y = wordAt(b, start + i);
-      out[i] = x === null || y === null ? Number.NaN : x === y ? same : different;
-    }
-    return out;
-  };
-}
-
-function compileLevel(
-  column: CategoryColumn,
-  text: string,
-  same: number,
-  different: number,
-  out: Block,
-): Step {
-  const { codes } = column;
-  const wanted = column.levels.indexOf(text);
-  return (start, n) => {
-    for (let i = 0; i < n; i++) {
-      const code = codes[start + i]!;
-      out[i] = code < 0 ? Number.NaN : code === wanted ? same : different;
-    }
-    return out;
-  };
-}
-
-type Words = CategoryColumn | TextColumn | { readonly kind: 'written'; readonly text: string };
-
-function wordsOf(node: Expression, scope: Scope): Words | null {
-  if (node.kind === 'text') return { kind: 'written', text: node.value };
-  if (node.kind !== 'name') return null;
-  const column = columnOf(node.name, scope);
-  return column.kind === 'category' || column.kind === 'text' ? column : null;
-}
-
-function wordAt(words: Words, row: number): string | null {
-  if (words.kind === 'written') return words.text;
-  if (words.kind === 'text') return words.values[row] ?? null;
-  return words.levels[words.codes[row]!] ?? null;
 }
 
 const OF_ONE: Readonly<Partial<Record<FunctionName, (x: number) => number>>> = {
@@ -318,11 +268,4 @@ function compileIsMissing(name: string, scope: Scope, depth: number): Step {
     for (let i = 0; i < n; i++) out[i] = isMissing(column, start + i) ? 1 : 0;
     return out;
   };
-}
-
-/** Whether a column has no value in a row. */
-export function isMissing(column: Column, row: number): boolean {
-  if (column.kind === 'category') return column.codes[row]! < 0;
-  if (column.kind === 'text') return column.values[row] === null;
-  return Number.isNaN(column.values[row]!);
 }
