@@ -1,0 +1,46 @@
+import type { Problem, Report } from '../problem.ts';
+import type { DataPlan } from '../study/study.ts';
+import type { RowBatch } from './split-rows.ts';
+
+/** Rows in which bytes were not UTF-8: one problem for the file, with the first place and the count. */
+export interface EncodingWatch {
+  /** Looks through rows decoded with replacements. `header` names the columns once it is known. */
+  readonly look: (batch: RowBatch, header: readonly string[] | null) => void;
+  /** Reports what was found, and says whether all was UTF-8. */
+  readonly settle: (report: Report) => boolean;
+}
+
+export function watchEncoding(plan: DataPlan): EncodingWatch {
+  let rows = 0;
+  let first: { row: number; variable: string | null } | null = null;
+  return {
+    look: ({ cells, lines }, header) => {
+      cells.forEach((row, index) => {
+        const position = row.findIndex((cell) => cell.includes('\ufffd'));
+        if (position < 0) return;
+        rows++;
+        if (first !== null) return;
+        const column = header?.[position]?.trim();
+        const declared = plan.variables.find((variable) => variable.column === column);
+        first = { row: lines[index]!, variable: declared?.name ?? column ?? null };
+      });
+    },
+    settle: (report) => {
+      if (first === null) return true;
+      report(notUtf8(plan.file, first, rows));
+      return false;
+    },
+  };
+}
+
+function notUtf8(file: string, first: { row: number; variable: string | null }, rows: number): Problem {
+  const { row, variable } = first;
+  const count = rows === 1 ? 'One row holds' : `${rows} rows hold`;
+  return {
+    code: 'cell_encoding',
+    severity: 'error',
+    place: { kind: 'cell', file, row, ...(variable === null ? {} : { variable }) },
+    message: `${count} bytes that are not UTF-8${rows === 1 ? '' : `, line ${row} first`}.`,
+    hint: 'Declare encoding: latin-1 under data.format, or save the file as UTF-8.',
+  };
+}
