@@ -12,7 +12,8 @@ export function conditionIndex(rootInverse: Float64Array, p: number, lengths: Fl
   if (p < 2) return 1;
   const scaled = new Matrix(p, p);
   // (R D⁻¹)⁻¹ = D R⁻¹ with D the lengths.
-  for (let j = 0; j < p; j++) for (let i = 0; i <= j; i++) scaled.set(i, j, lengths[i]! * rootInverse[j * p + i]!);
+  for (let j = 0; j < p; j++)
+    for (let i = 0; i <= j; i++) scaled.set(i, j, lengths[i]! * rootInverse[j * p + i]!);
   const values = new SingularValueDecomposition(scaled, {
     computeLeftSingularVectors: false,
     computeRightSingularVectors: false,

@@ -25,7 +25,12 @@ const BLOCK = 256;
 export const EXTENDED_BUDGET = 6e6;
 
 /** The factor of rows from…to−1, streamed block by block in double arithmetic. */
-export function factorRows(rows: DesignRows, from = 0, to = rows.rowCount, onProgress?: (done: number) => void): Factor {
+export function factorRows(
+  rows: DesignRows,
+  from = 0,
+  to = rows.rowCount,
+  onProgress?: (done: number) => void,
+): Factor {
   const m = rows.width;
   const triangle = matrix(m, m, false);
   const block = new Float64Array(BLOCK * m);
@@ -36,7 +41,13 @@ export function factorRows(rows: DesignRows, from = 0, to = rows.rowCount, onPro
     absorb(triangle.hi, m, block, BLOCK, stop - start);
     if (onProgress !== undefined && ((start / BLOCK) & 127) === 127) onProgress(stop - from);
   }
-  return { width: m, predictorCount: rows.predictorCount, rowCount: to - from, triangle, scales: rows.scales };
+  return {
+    width: m,
+    predictorCount: rows.predictorCount,
+    rowCount: to - from,
+    triangle,
+    scales: rows.scales,
+  };
 }
 
 /** The factor of all rows in double-double: about 31 digits. Holds the whole block, so for small work only. */

@@ -36,7 +36,9 @@ export function rowFacts(design: Design, rows: DesignRows, ownResponse: Float64A
     logWeights,
     logJacobians: design.responses.map(({ scale }) => logJacobian(ownResponse, scale)),
     columnNames: design.columns.map((column) => column.name),
-    columnVariables: design.columns.map((column) => [...new Set(column.pieces.map((piece) => piece.variable))]),
+    columnVariables: design.columns.map((column) => [
+      ...new Set(column.pieces.map((piece) => piece.variable)),
+    ]),
   };
 }
 
@@ -44,7 +46,12 @@ export function rowFacts(design: Design, rows: DesignRows, ownResponse: Float64A
  * Fits every candidate: one pass for the factor, then each from the triangle, refined by the budget.
  * @param ownResponse the response on its own scale, length n
  */
-export function fitAll(design: Design, rows: DesignRows, ownResponse: Float64Array, options: FitOptions): FittedAll {
+export function fitAll(
+  design: Design,
+  rows: DesignRows,
+  ownResponse: Float64Array,
+  options: FitOptions,
+): FittedAll {
   const facts = rowFacts(design, rows, ownResponse);
   const n = rows.rowCount;
   const extended = n * rows.width * rows.width <= EXTENDED_BUDGET;
@@ -53,7 +60,14 @@ export function fitAll(design: Design, rows: DesignRows, ownResponse: Float64Arr
     : factorRows(rows, 0, n, (done) => options.onProgress?.(done, n));
   const plain = design.candidates.map((candidate) => fitCandidate(factor, candidate, facts));
   const fits = extended ? plain : refineByBudget(plain, rows, facts);
-  return { fits, ...pressByBudget(fits, rows, options), fullModelVariance: fullVariance(factor, design, facts), columnNames: facts.columnNames, factor, facts };
+  return {
+    fits,
+    ...pressByBudget(fits, rows, options),
+    fullModelVariance: fullVariance(factor, design, facts),
+    columnNames: facts.columnNames,
+    factor,
+    facts,
+  };
 }
 
 function refineByBudget(fits: readonly Fit[], rows: DesignRows, facts: RowFacts): Fit[] {
@@ -67,7 +81,11 @@ function refineByBudget(fits: readonly Fit[], rows: DesignRows, facts: RowFacts)
   });
 }
 
-function pressByBudget(fits: readonly Fit[], rows: DesignRows, options: FitOptions): Pick<FitContext, 'press' | 'pressOmitted'> {
+function pressByBudget(
+  fits: readonly Fit[],
+  rows: DesignRows,
+  options: FitOptions,
+): Pick<FitContext, 'press' | 'pressOmitted'> {
   const cost = fits.reduce((sum, fit) => sum + rows.rowCount * fit.columns.length ** 2, 0);
   if (!options.pressRanks && cost > PRESS_BUDGET) {
     return {
@@ -86,7 +104,9 @@ function pressByBudget(fits: readonly Fit[], rows: DesignRows, options: FitOptio
 
 /** s² of the model with all columns of all candidates on each response; null without degrees of freedom. */
 function fullVariance(factor: Factor, design: Design, facts: RowFacts): (number | null)[] {
-  const used = [...new Set(design.candidates.flatMap((candidate) => candidate.columns))].sort((a, b) => a - b);
+  const used = [...new Set(design.candidates.flatMap((candidate) => candidate.columns))].sort(
+    (a, b) => a - b,
+  );
   return design.responses.map((response, responseColumn) => {
     const fit = fitCandidate(
       factor,

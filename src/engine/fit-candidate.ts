@@ -72,7 +72,10 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
   copyTop(work, y, solution, 0, p);
   backSubstitute(work, keptAt, solution, 0);
   const responseScale = scales[responseAt]!;
-  const estimates = Float64Array.from(kept, (column, j) => (solution.hi[j]! * scales[column]!) / responseScale);
+  const estimates = Float64Array.from(
+    kept,
+    (column, j) => (solution.hi[j]! * scales[column]!) / responseScale,
+  );
 
   const rootInverse = invertTriangle(work, keptAt, kept, scales);
   const inverse = squareOf(rootInverse, p);
@@ -90,7 +93,8 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
   for (const column of kept) setBit(ownMask, column);
   for (let j = 0; j < others.length; j++) {
     const at = own.length + j;
-    if (columnNorm(work, at, p, height) <= 10 * DEPENDENT * columnNorm(work, at, 0, height)) setBit(span, others[j]!);
+    if (columnNorm(work, at, p, height) <= 10 * DEPENDENT * columnNorm(work, at, 0, height))
+      setBit(span, others[j]!);
   }
 
   return {
@@ -114,7 +118,13 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
     arithmetic: work.lo === null ? 'plain' : 'extended',
   };
 
-  function describe(m: Matrix, j: number, column: number, how: 'exact' | 'nearly', share: number): DependentColumn {
+  function describe(
+    m: Matrix,
+    j: number,
+    column: number,
+    how: 'exact' | 'nearly',
+    share: number,
+  ): DependentColumn {
     const coefficients = matrix(kept.length, 1, m.lo !== null);
     copyTop(m, j, coefficients, 0, kept.length);
     backSubstitute(m, keptAt, coefficients, 0);
@@ -131,14 +141,18 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
 
   function involvesSeveral(column: number): boolean {
     const variables = new Set(facts.columnVariables[column]);
-    return kept.some((other) => other !== 0 && facts.columnVariables[other]!.some((name) => !variables.has(name)));
+    return kept.some(
+      (other) => other !== 0 && facts.columnVariables[other]!.some((name) => !variables.has(name)),
+    );
   }
 }
 
 /** −n/2 (ln 2π + ln(RSS/n) + 1) + ½ Σ ln w + J: every constant kept, so that scales and weights compare. */
 export function logLikelihood(n: number, rss: number, facts: RowFacts, response: number): number {
   return (
-    (-n / 2) * (Math.log(2 * Math.PI) + Math.log(rss / n) + 1) + facts.logWeights / 2 + facts.logJacobians[response]!
+    (-n / 2) * (Math.log(2 * Math.PI) + Math.log(rss / n) + 1) +
+    facts.logWeights / 2 +
+    facts.logJacobians[response]!
   );
 }
 
@@ -158,12 +172,18 @@ function columnsOf(factor: Factor, columns: readonly number[], height: number): 
 function copyTop(from: Matrix, column: number, to: Matrix, target: number, count: number): void {
   for (let i = 0; i < count; i++) {
     to.hi[target * to.stride + i] = from.hi[column * from.stride + i]!;
-    if (from.lo !== null && to.lo !== null) to.lo[target * to.stride + i] = from.lo[column * from.stride + i]!;
+    if (from.lo !== null && to.lo !== null)
+      to.lo[target * to.stride + i] = from.lo[column * from.stride + i]!;
   }
 }
 
 /** R⁻¹ of the kept columns in true units, p × p upper triangular, column-major, rounded to doubles. */
-function invertTriangle(work: Matrix, keptAt: readonly number[], kept: readonly number[], scales: Float64Array): Float64Array {
+function invertTriangle(
+  work: Matrix,
+  keptAt: readonly number[],
+  kept: readonly number[],
+  scales: Float64Array,
+): Float64Array {
   const p = kept.length;
   const unit = matrix(p, p, work.lo !== null);
   for (let j = 0; j < p; j++) {
@@ -195,15 +215,24 @@ function responseNorm(factor: Factor, at: number, aboutMean: boolean): number {
 }
 
 function lengthsOf(factor: Factor, kept: readonly number[]): Float64Array {
-  return Float64Array.from(kept, (column) => columnNorm(factor.triangle, column, 0, column + 1) / factor.scales[column]!);
+  return Float64Array.from(
+    kept,
+    (column) => columnNorm(factor.triangle, column, 0, column + 1) / factor.scales[column]!,
+  );
 }
 
 /** VIF_j = (X′WX)⁻¹_jj · Σ w (x_j − x̄_j)², about zero without an intercept (Marquardt 1970). */
-function inflation(factor: Factor, candidate: CandidateModel, kept: readonly number[], inverse: Float64Array): Float64Array {
+function inflation(
+  factor: Factor,
+  candidate: CandidateModel,
+  kept: readonly number[],
+  inverse: Float64Array,
+): Float64Array {
   const p = kept.length;
   return Float64Array.from(kept, (column, j) => {
     if (column === 0) return Number.NaN;
-    const spread = columnNorm(factor.triangle, column, candidate.intercept ? 1 : 0, column + 1) / factor.scales[column]!;
+    const spread =
+      columnNorm(factor.triangle, column, candidate.intercept ? 1 : 0, column + 1) / factor.scales[column]!;
     return Math.max(1, inverse[j * p + j]! * spread * spread);
   });
 }

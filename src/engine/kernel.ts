@@ -31,7 +31,14 @@ export function eliminate(m: Matrix, column: number, row: number, end: number, c
   else eliminateExtended(m.hi, m.lo, m.stride, column, row, end, columns);
 }
 
-function eliminatePlain(a: Float64Array, stride: number, column: number, row: number, end: number, columns: number): void {
+function eliminatePlain(
+  a: Float64Array,
+  stride: number,
+  column: number,
+  row: number,
+  end: number,
+  columns: number,
+): void {
   const base = column * stride;
   const pivot = base + row;
   const last = base + end;
@@ -108,7 +115,14 @@ function eliminateExtended(
 }
 
 /** Dot product of two stretches in twice the working precision (Ogita, Rump & Oishi 2005), low parts included. */
-export function dotExtended(hi: Float64Array, lo: Float64Array, a: number, b: number, count: number, out: Float64Array): void {
+export function dotExtended(
+  hi: Float64Array,
+  lo: Float64Array,
+  a: number,
+  b: number,
+  count: number,
+  out: Float64Array,
+): void {
   let sum = 0;
   let rest = 0;
   for (let i = 0; i < count; i++) {
@@ -172,7 +186,8 @@ export function backSubstitute(m: Matrix, columns: readonly number[], rhs: Matri
     const diagonal = columns[i]! * m.stride + i;
     if (m.lo === null || rhs.lo === null) {
       let value = rhs.hi[at + i]!;
-      for (let k = i + 1; k < columns.length; k++) value -= m.hi[columns[k]! * m.stride + i]! * rhs.hi[at + k]!;
+      for (let k = i + 1; k < columns.length; k++)
+        value -= m.hi[columns[k]! * m.stride + i]! * rhs.hi[at + k]!;
       rhs.hi[at + i] = value / m.hi[diagonal]!;
       continue;
     }

@@ -22,7 +22,10 @@ export function refineFit(fit: Fit, rows: DesignRows, facts: RowFacts): Fit {
   const responseAt = rows.predictorCount + fit.candidate.responseColumn;
   const responseScale = scales[responseAt]!;
   // Estimates in the rows' scaled units, as pairs.
-  const high = Float64Array.from(fit.columns, (column, j) => (fit.estimates[j]! * responseScale) / scales[column]!);
+  const high = Float64Array.from(
+    fit.columns,
+    (column, j) => (fit.estimates[j]! * responseScale) / scales[column]!,
+  );
   const low = new Float64Array(p);
   const root = fit.rootInverse.map((value, k) => value / scales[fit.columns[k % p]!]!);
 
@@ -56,7 +59,9 @@ export function refineFit(fit: Fit, rows: DesignRows, facts: RowFacts): Fit {
     ...fit,
     estimates: Float64Array.from(fit.columns, (column, j) => (high[j]! * scales[column]!) / responseScale),
     residualSumOfSquares,
-    logLikelihood: fit.exact ? null : logLikelihood(fit.rowCount, residualSumOfSquares, facts, fit.candidate.responseColumn),
+    logLikelihood: fit.exact
+      ? null
+      : logLikelihood(fit.rowCount, residualSumOfSquares, facts, fit.candidate.responseColumn),
     arithmetic: 'refined',
   };
 }
@@ -103,7 +108,15 @@ function residualPass(
 }
 
 /** y −= (bh + bl) · x over a block, as pairs. */
-function subtractMultiple(hi: Float64Array, lo: Float64Array, x: number, y: number, count: number, bh: number, bl: number): void {
+function subtractMultiple(
+  hi: Float64Array,
+  lo: Float64Array,
+  x: number,
+  y: number,
+  count: number,
+  bh: number,
+  bl: number,
+): void {
   const c = SPLITTER * bh;
   const bhh = c - (c - bh);
   const bhl = bh - bhh;

@@ -4,7 +4,12 @@ import type { Fit } from './fit.ts';
 const BLOCK = 256;
 
 /** Called with figures of consecutive rows; the arrays are reused from block to block. */
-export type RowVisitor = (from: number, count: number, weightedResiduals: Float64Array, leverages: Float64Array) => void;
+export type RowVisitor = (
+  from: number,
+  count: number,
+  weightedResiduals: Float64Array,
+  leverages: Float64Array,
+) => void;
 
 /**
  * One pass over the rows of a fit: √w (y − Xb) on the fitted scale, and the leverage h = ‖x′R⁻¹‖² of the

@@ -24,7 +24,13 @@ export interface Chosen {
 }
 
 /** One pass over the rows: residuals, leverages and fitted values of the chosen model. */
-export function examineRows(study: Study, sample: Sample, columns: readonly DesignColumn[], fit: Fit, rows: DesignRows): Chosen {
+export function examineRows(
+  study: Study,
+  sample: Sample,
+  columns: readonly DesignColumn[],
+  fit: Fit,
+  rows: DesignRows,
+): Chosen {
   const n = rows.rowCount;
   const residuals = new Float64Array(n);
   const leverages = new Float64Array(n);
@@ -35,14 +41,17 @@ export function examineRows(study: Study, sample: Sample, columns: readonly Desi
   const observed = rows.responses[fit.candidate.responseColumn]!;
   const { rootWeights } = rows;
   const fitted = observed.map((y, i) => y - residuals[i]! / (rootWeights === null ? 1 : rootWeights[i]!));
-  const s = fit.degreesOfFreedom < 1 || fit.exact ? null : Math.sqrt(fit.residualSumOfSquares / fit.degreesOfFreedom);
+  const s =
+    fit.degreesOfFreedom < 1 || fit.exact ? null : Math.sqrt(fit.residualSumOfSquares / fit.degreesOfFreedom);
   return { study, sample, columns, fit, s, residuals, leverages, fitted, observed };
 }
 
 /** e_i/(s √(1 − h_i)); null where s is undefined or the leverage is 1. */
 export function standardisedResidual(chosen: Chosen, row: number): number | null {
   const h = chosen.leverages[row]!;
-  return chosen.s === null || h > FULL_LEVERAGE ? null : chosen.residuals[row]! / (chosen.s * Math.sqrt(1 - h));
+  return chosen.s === null || h > FULL_LEVERAGE
+    ? null
+    : chosen.residuals[row]! / (chosen.s * Math.sqrt(1 - h));
 }
 
 /** D_i = e_i² h_i/(p s² (1 − h_i)²) (Cook 1977); null as for the standardised residual. */

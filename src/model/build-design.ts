@@ -138,7 +138,10 @@ function unitOf(pieces: readonly Piece[], units: ReadonlyMap<string, string | nu
     const unit = units.get(piece.variable) ?? null;
     if (unit === null || piece.kind === 'spline') return null;
     if (piece.kind !== 'power' || piece.to === 1) parts.push(unit);
-    else parts.push(/^[\p{L}°%]+$/u.test(unit) ? `${unit}${superscript(piece.to)}` : `(${unit})${superscript(piece.to)}`);
+    else
+      parts.push(
+        /^[\p{L}°%]+$/u.test(unit) ? `${unit}${superscript(piece.to)}` : `(${unit})${superscript(piece.to)}`,
+      );
   }
   return parts.length === 0 ? null : parts.join('·');
 }

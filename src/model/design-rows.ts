@@ -187,7 +187,13 @@ function powerPair(x: number, to: number, out: Float64Array): void {
  * d_j(x) = ((x − t_j)₊³ − (x − t_k)₊³)/(t_k − t_j), j = index (Hastie, Tibshirani & Friedman, The Elements of
  * Statistical Learning, 5.2.1). Beyond the outer knots it is linear.
  */
-function splinePair(x: number, knots: readonly number[], index: number, out: Float64Array, scratch: Float64Array): void {
+function splinePair(
+  x: number,
+  knots: readonly number[],
+  index: number,
+  out: Float64Array,
+  scratch: Float64Array,
+): void {
   const k = knots.length;
   const last = knots[k - 1]!;
   ratioOfCubes(x, knots[index - 1]!, last, out, scratch);
@@ -219,7 +225,14 @@ function cubePair(distance: number, out: Float64Array): void {
 
 const product = pair();
 
-function weigh(rootWeights: Float64Array, from: number, to: number, hi: Float64Array, lo: Float64Array | null, at: number): void {
+function weigh(
+  rootWeights: Float64Array,
+  from: number,
+  to: number,
+  hi: Float64Array,
+  lo: Float64Array | null,
+  at: number,
+): void {
   if (lo === null) {
     for (let i = from; i < to; i++) hi[at + i - from]! *= rootWeights[i]!;
     return;

@@ -2,7 +2,17 @@ import type { TermPlan } from '../study/study.ts';
 import type { Piece } from './design.ts';
 
 const SUPERSCRIPTS: Readonly<Record<string, string>> = {
-  '0': '⁰', '1': '¹', '2': '²', '3': '³', '4': '⁴', '5': '⁵', '6': '⁶', '7': '⁷', '8': '⁸', '9': '⁹', '-': '⁻',
+  '0': '⁰',
+  '1': '¹',
+  '2': '²',
+  '3': '³',
+  '4': '⁴',
+  '5': '⁵',
+  '6': '⁶',
+  '7': '⁷',
+  '8': '⁸',
+  '9': '⁹',
+  '-': '⁻',
 };
 
 /** "³" for 3; "^1.5" where the exponent has no superscript form; "" for 1. */

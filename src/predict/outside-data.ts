@@ -1,35 +1,69 @@
 import type { Column } from '../data/table.ts';
-import { presentLevels } from '../model/build-design.ts';
 import type { Chosen } from '../examine/chosen.ts';
+import { presentLevels } from '../model/build-design.ts';
+
+export interface Range {
+  readonly smallest: number;
+  readonly largest: number;
+}
 
 /**
- * Each way in which a row lies outside the sample, as a sentence: a variable of the chosen model beyond its
- * range, or a combination more remote than any row fitted. Levels are checked before (`unknownLevels`).
+ * Each way in which a row lies outside the sample, as a sentence: a value beyond the range of its variable, or
+ * a combination more remote than any row fitted. A derived variable is named only where no given one is.
+ * Levels are checked before (`unknownLevels`).
  */
 export function outsideData(
-  chosen: Chosen,
+  given: readonly { variable: string; value: number | string | boolean }[],
   columns: ReadonlyMap<string, Column>,
   row: number,
-  leverage: number,
-  largestLeverage: number,
+  ranges: ReadonlyMap<string, Range>,
+  remote: boolean,
 ): string[] {
-  const sentences: string[] = [];
-  for (const name of modelVariables(chosen)) {
-    const here = columns.get(name);
-    const range = rangeOf(chosen, name);
-    if (here === undefined || range === null || here.kind === 'category' || here.kind === 'text') continue;
-    const value = here.values[row]!;
-    if (value < range.smallest) sentences.push(`${name} ${value} is below ${range.smallest}, the smallest in the data`);
-    if (value > range.largest) sentences.push(`${name} ${value} is above ${range.largest}, the largest in the data`);
+  const beyond = (name: string, value: number): string[] => {
+    const range = ranges.get(name);
+    if (range === undefined || !Number.isFinite(value)) return [];
+    if (value < range.smallest)
+      return [`${name} ${value} is below ${range.smallest}, the smallest in the data`];
+    return value > range.largest
+      ? [`${name} ${value} is above ${range.largest}, the largest in the data`]
+      : [];
+  };
+  const named = given.flatMap(({ variable, value }) =>
+    typeof value === 'number' ? beyond(variable, value) : [],
+  );
+  if (named.length > 0) return named;
+  const derived = [...ranges.keys()].flatMap((name) => {
+    const column = columns.get(name);
+    return column === undefined || column.kind === 'category' || column.kind === 'text'
+      ? []
+      : beyond(name, column.values[row]!);
+  });
+  if (derived.length > 0) return derived;
+  return remote ? ['its combination of values is more remote than any row in the data'] : [];
+}
+
+/** Smallest and largest value in the sample of every column of numbers. */
+export function rangesOf(sample: Chosen['sample']): Map<string, Range> {
+  const ranges = new Map<string, Range>();
+  for (const [name, column] of sample.columns) {
+    if (column.kind !== 'number') continue;
+    let smallest = Number.POSITIVE_INFINITY;
+    let largest = Number.NEGATIVE_INFINITY;
+    for (const value of column.values) {
+      if (value < smallest) smallest = value;
+      if (value > largest) largest = value;
+    }
+    ranges.set(name, { smallest, largest });
   }
-  if (leverage > largestLeverage * (1 + 1e-9) && sentences.length === 0) {
-    sentences.push('its combination of values is more remote than any row in the data');
-  }
-  return sentences;
+  return ranges;
 }
 
 /** Levels of the model's categories at a row that no row of the sample has: such a row cannot be predicted. */
-export function unknownLevels(chosen: Chosen, columns: ReadonlyMap<string, Column>, row: number): { variable: string; level: string; known: string[] }[] {
+export function unknownLevels(
+  chosen: Chosen,
+  columns: ReadonlyMap<string, Column>,
+  row: number,
+): { variable: string; level: string; known: string[] }[] {
   const unknown: { variable: string; level: string; known: string[] }[] = [];
   for (const name of modelVariables(chosen)) {
     const here = columns.get(name);
@@ -44,24 +78,11 @@ export function unknownLevels(chosen: Chosen, columns: ReadonlyMap<string, Colum
 
 /** The variables of the chosen model's terms, each once, in order of first use. */
 export function modelVariables(chosen: Chosen): string[] {
-  return [...new Set(chosen.fit.candidate.columns.flatMap((column) => chosen.columns[column]!.pieces.map((piece) => piece.variable)))];
-}
-
-const ranges = new WeakMap<Column, { smallest: number; largest: number }>();
-
-function rangeOf(chosen: Chosen, name: string): { smallest: number; largest: number } | null {
-  const column = chosen.sample.columns.get(name);
-  if (column === undefined || column.kind === 'category' || column.kind === 'text') return null;
-  let range = ranges.get(column);
-  if (range === undefined) {
-    let smallest = Number.POSITIVE_INFINITY;
-    let largest = Number.NEGATIVE_INFINITY;
-    for (const value of column.values) {
-      if (value < smallest) smallest = value;
-      if (value > largest) largest = value;
-    }
-    range = { smallest, largest };
-    ranges.set(column, range);
-  }
-  return range;
+  return [
+    ...new Set(
+      chosen.fit.candidate.columns.flatMap((column) =>
+        chosen.columns[column]!.pieces.map((piece) => piece.variable),
+      ),
+    ),
+  ];
 }

@@ -4,7 +4,8 @@ import { rootForm } from '../examine/effects/settings.ts';
 import { designRows } from '../model/design-rows.ts';
 import { fromScale, isDecreasing } from '../model/response-scale.ts';
 import { tTwoSidedQuantile } from '../stats/distributions.ts';
-import { outsideData } from './outside-data.ts';
+import type { Scale } from '../study/study.ts';
+import { outsideData, rangesOf } from './outside-data.ts';
 
 /** Rows to be predicted: every variable of the model, declared and derived. */
 export interface PredictionRows {
@@ -51,81 +52,127 @@ export interface Predicted {
 export const SMEARING_RESIDUALS = 2000;
 
 /**
- * Predictions at stated rows. Mean: x′b ± t s √(x′(X′WX)⁻¹x); new row: s²(1 + …), of weight 1. The total adds
- * the rows' covariance: m s² + s² 1′X(X′WX)⁻¹X′1. Intervals are taken back to the own scale by their ends, the
- * mean there by smearing (Duan 1983).
+ * Predictions at stated rows. Mean: x′b ± t s √(x′(X′WX)⁻¹x); new row: s²(1/w + …), w the row's weight where it
+ * gives one, else 1. The total adds the rows' covariance: Σ s²/w + s² 1′X(X′WX)⁻¹X′1. Intervals are taken back
+ * to the own scale by their ends, the mean there by smearing (Duan 1983).
  *
- * The chosen model must have degrees of freedom; intervals of an exact fit have no width.
+ * The chosen model has degrees of freedom; intervals of an exact fit have no width.
  */
-export function predict(chosen: Chosen, rows: PredictionRows, smearing: Float64Array | null): Predicted {
-  const { fit, columns, study } = chosen;
+export function predict(
+  chosen: Chosen,
+  sources: readonly PredictionRows[],
+  smearing: Float64Array | null,
+): Predicted {
+  const { fit, study } = chosen;
   const p = fit.columns.length;
-  const m = rows.rowCount;
   const { scale } = fit.candidate.response;
   const s = chosen.s ?? 0;
-  const t = fit.degreesOfFreedom < 1 ? Number.NaN : tTwoSidedQuantile(1 - study.predict.interval, fit.degreesOfFreedom);
-  const design = designRows(fit.columns.map((column) => columns[column]!), rows, [], null);
-  const x = new Float64Array(m * p);
-  design.fill(fit.columns.map((_, j) => j), 0, m, m, x, null);
+  const t = tTwoSidedQuantile(1 - study.predict.interval, fit.degreesOfFreedom);
+  const ranges = rangesOf(chosen.sample);
   const largestLeverage = chosen.leverages.reduce((most, h) => Math.max(most, h), 0);
-
   const sum = new Float64Array(p);
-  const row = new Float64Array(p);
-  let estimateTotal = 0;
-  const predictions = Array.from({ length: m }, (_, i): Prediction => {
-    let centre = 0;
-    for (let j = 0; j < p; j++) {
-      row[j] = x[j * m + i]! / design.scales[j]!;
-      sum[j]! += row[j]!;
-      centre += row[j]! * fit.estimates[j]!;
-    }
-    estimateTotal += centre;
-    const root = rootForm(fit.rootInverse, p, row);
-    const leverage = root * root;
-    const halfMean = t * s * root;
-    const halfNew = t * s * Math.sqrt(1 + leverage);
-    const back = (low: number, high: number): [number, number] => {
-      const a = fromScaleEnd(low, scale);
-      const b = fromScaleEnd(high, scale);
-      return isDecreasing(scale) ? [b, a] : [a, b];
-    };
-    const [lower, upper] = back(centre - halfNew, centre + halfNew);
-    const [meanLower, meanUpper] = back(centre - halfMean, centre + halfMean);
-    return {
-      label: rows.labels[i]!,
-      values: rows.given[i]!,
-      estimate: fromScaleEnd(centre, scale),
-      lower,
-      upper,
-      mean_lower: meanLower,
-      mean_upper: meanUpper,
-      mean: smearing === null ? null : smearedMean(centre, smearing, (z) => fromScale(z, scale)),
-      leverage,
-      outside: outsideData(chosen, rows.columns, i, leverage, largestLeverage),
-    };
+  let centres = 0;
+  let newRows = 0;
+
+  const predictions = sources.flatMap((rows) => {
+    const at = designAt(chosen, rows);
+    const weightOf = weightsOf(chosen, rows);
+    return rows.labels.map((label, i): Prediction => {
+      const row = at(i);
+      const centre = dot(row, fit.estimates);
+      const leverage = rootForm(fit.rootInverse, p, row) ** 2;
+      const weight = weightOf(i);
+      centres += centre;
+      newRows += 1 / weight;
+      for (let j = 0; j < p; j++) sum[j]! += row[j]!;
+      const [lower, upper] = ends(centre, t * s * Math.sqrt(1 / weight + leverage), scale);
+      const [meanLower, meanUpper] = ends(centre, t * s * Math.sqrt(leverage), scale);
+      const remote = weight * leverage > largestLeverage * (1 + 1e-9);
+      return {
+        label,
+        values: rows.given[i]!,
+        estimate: fromScaleEnd(centre, scale),
+        lower,
+        upper,
+        mean_lower: meanLower,
+        mean_upper: meanUpper,
+        mean: smearing === null ? null : smearedMean(centre, smearing, scale),
+        leverage,
+        outside: outsideData(rows.given[i]!, rows.columns, i, ranges, remote),
+      };
+    });
   });
-  const natural = scale.kind === 'natural';
-  const halfTotal = t * s * Math.sqrt(m + rootForm(fit.rootInverse, p, sum) ** 2);
+  const half = t * s * Math.sqrt(newRows + rootForm(fit.rootInverse, p, sum) ** 2);
+  const wanted = study.predict.total && scale.kind === 'natural' && predictions.length > 0;
   return {
     predictions,
-    total:
-      study.predict.total && natural && m > 0
-        ? { rows: m, estimate: estimateTotal, lower: estimateTotal - halfTotal, upper: estimateTotal + halfTotal, mean: null }
-        : null,
+    total: wanted
+      ? {
+          rows: predictions.length,
+          estimate: centres,
+          lower: centres - half,
+          upper: centres + half,
+          mean: null,
+        }
+      : null,
   };
 }
 
+/** The rows of the chosen model's design, one at a time, in an array that is used again. */
+function designAt(chosen: Chosen, rows: PredictionRows): (row: number) => Float64Array {
+  const { fit, columns } = chosen;
+  const m = rows.rowCount;
+  const design = designRows(
+    fit.columns.map((column) => columns[column]!),
+    rows,
+    [],
+    null,
+  );
+  const x = new Float64Array(m * fit.columns.length);
+  design.fill(
+    fit.columns.map((_, j) => j),
+    0,
+    m,
+    m,
+    x,
+    null,
+  );
+  const row = new Float64Array(fit.columns.length);
+  return (i) => {
+    for (let j = 0; j < row.length; j++) row[j] = x[j * m + i]! / design.scales[j]!;
+    return row;
+  };
+}
+
+function weightsOf(chosen: Chosen, rows: PredictionRows): (row: number) => number {
+  const column = chosen.study.weights === null ? undefined : rows.columns.get(chosen.study.weights);
+  return (row) => (column?.kind === 'number' && column.values[row]! > 0 ? column.values[row]! : 1);
+}
+
+function dot(a: Float64Array, b: Float64Array): number {
+  let sum = 0;
+  for (let j = 0; j < a.length; j++) sum += a[j]! * b[j]!;
+  return sum;
+}
+
+/** centre ± half on the own scale, lower end first. */
+function ends(centre: number, half: number, scale: Scale): [number, number] {
+  const a = fromScaleEnd(centre - half, scale);
+  const b = fromScaleEnd(centre + half, scale);
+  return isDecreasing(scale) ? [b, a] : [a, b];
+}
+
 /** An end beyond the image of the scale is the end of the own scale: zero, or no bound at all. */
-function fromScaleEnd(z: number, scale: Chosen['fit']['candidate']['response']['scale']): number {
+function fromScaleEnd(z: number, scale: Scale): number {
   const value = fromScale(z, scale);
   if (!Number.isNaN(value)) return value;
   return scale.kind === 'reciprocal' || (scale.kind === 'box_cox' && scale.lambda < 0) ? Number.MAX_VALUE : 0;
 }
 
 /** Mean of g⁻¹(x′b + e_i) over the residuals; null where one of them leaves the scale's image. */
-function smearedMean(centre: number, residuals: Float64Array, back: (z: number) => number): number | null {
+function smearedMean(centre: number, residuals: Float64Array, scale: Scale): number | null {
   let sum = 0;
-  for (const e of residuals) sum += back(centre + e);
+  for (const e of residuals) sum += fromScale(centre + e, scale);
   const mean = sum / residuals.length;
   return Number.isFinite(mean) ? mean : null;
 }

@@ -16,7 +16,13 @@ export function quartilesOf(values: Float64Array): Quartiles {
   const work = values.slice();
   const n = work.length;
   if (n === 0) {
-    return { smallest: Number.NaN, lowerQuartile: Number.NaN, median: Number.NaN, upperQuartile: Number.NaN, largest: Number.NaN };
+    return {
+      smallest: Number.NaN,
+      lowerQuartile: Number.NaN,
+      median: Number.NaN,
+      upperQuartile: Number.NaN,
+      largest: Number.NaN,
+    };
   }
   const last = n - 1;
   // Each selection leaves everything below its position smaller, so later ones look only to the right.

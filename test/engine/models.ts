@@ -1,10 +1,10 @@
 /** Small builders of designs for tests: from plain arrays, without a study file. */
 import type { NumberColumn } from '../../src/data/table.ts';
+import type { RowFacts } from '../../src/engine/fit-candidate.ts';
 import type { CandidateModel, Design, DesignColumn, Piece } from '../../src/model/design.ts';
 import { type DesignRows, designRows } from '../../src/model/design-rows.ts';
-import { toScale } from '../../src/model/response-scale.ts';
 import { columnName } from '../../src/model/names.ts';
-import type { RowFacts } from '../../src/engine/fit-candidate.ts';
+import { toScale } from '../../src/model/response-scale.ts';
 import type { Scale } from '../../src/study/study.ts';
 
 export interface TestModel {
@@ -26,7 +26,11 @@ export function testModel(
   candidates: readonly (readonly number[])[],
   options: { weights?: string; scales?: readonly Scale[] } = {},
 ): TestModel {
-  const union: DesignColumn[] = [[], ...columns].map((pieces) => ({ name: columnName(pieces), pieces, unit: null }));
+  const union: DesignColumn[] = [[], ...columns].map((pieces) => ({
+    name: columnName(pieces),
+    pieces,
+    unit: null,
+  }));
   const scales = options.scales ?? [{ kind: 'natural' as const }];
   const design: Design = {
     columns: union,
@@ -38,7 +42,11 @@ export function testModel(
         intercept: own.includes(0),
         terms: own
           .filter((j) => j > 0)
-          .map((j) => ({ name: union[j]!.name, plan: { kind: 'variable', variable: union[j]!.name }, columns: [j] })),
+          .map((j) => ({
+            name: union[j]!.name,
+            plan: { kind: 'variable', variable: union[j]!.name },
+            columns: [j],
+          })),
         columns: own,
         responseColumn: 0,
       }),
@@ -58,7 +66,8 @@ export function testModel(
     options.weights ?? null,
   );
   const facts: RowFacts = {
-    logWeights: options.weights === undefined ? 0 : data[options.weights]!.reduce((sum, w) => sum + Math.log(w), 0),
+    logWeights:
+      options.weights === undefined ? 0 : data[options.weights]!.reduce((sum, w) => sum + Math.log(w), 0),
     logJacobians: scales.map(() => 0),
     columnNames: union.map((column) => column.name),
     columnVariables: union.map((column) => column.pieces.map((piece) => piece.variable)),

@@ -10,8 +10,17 @@ const FOLDER = fileURLToPath(new URL('../../../shared/reference/nist-strd/', imp
 export const STRD_PRESENT = existsSync(FOLDER);
 
 export const STRD_SETS = [
-  'Norris', 'Pontius', 'NoInt1', 'NoInt2', 'Filip', 'Longley',
-  'Wampler1', 'Wampler2', 'Wampler3', 'Wampler4', 'Wampler5',
+  'Norris',
+  'Pontius',
+  'NoInt1',
+  'NoInt2',
+  'Filip',
+  'Longley',
+  'Wampler1',
+  'Wampler2',
+  'Wampler3',
+  'Wampler4',
+  'Wampler5',
 ] as const;
 
 export type StrdName = (typeof STRD_SETS)[number];
@@ -32,11 +41,22 @@ export interface StrdSet {
 export function readStrd(name: StrdName): StrdSet {
   const lines = readFileSync(`${FOLDER}${name}.dat`, 'latin1').split(/\r?\n/);
   const numbers = (line: string) =>
-    line.trim().split(/\s+/).filter((text) => text !== '').map((text) => Number(text.replace(/D/i, 'e'))).filter((value) => !Number.isNaN(value));
-  const coefficients = lines.filter((line) => /^\s*B\d+\s/.test(line)).map((line) => numbers(line.replace(/B\d+/, '')));
-  const after = (pattern: RegExp, skip = 0) => numbers(lines[lines.findIndex((line) => pattern.test(line)) + skip]!.replace(pattern, ''));
+    line
+      .trim()
+      .split(/\s+/)
+      .filter((text) => text !== '')
+      .map((text) => Number(text.replace(/D/i, 'e')))
+      .filter((value) => !Number.isNaN(value));
+  const coefficients = lines
+    .filter((line) => /^\s*B\d+\s/.test(line))
+    .map((line) => numbers(line.replace(/B\d+/, '')));
+  const after = (pattern: RegExp, skip = 0) =>
+    numbers(lines[lines.findIndex((line) => pattern.test(line)) + skip]!.replace(pattern, ''));
   const start = lines.findLastIndex((line) => /^\s*Data:\s+y/i.test(line));
-  const rows = lines.slice(start + 1).map(numbers).filter((row) => row.length > 0);
+  const rows = lines
+    .slice(start + 1)
+    .map(numbers)
+    .filter((row) => row.length > 0);
   const regression = lines.find((line) => /^Regression\s/.test(line))!;
   return {
     name,
@@ -46,7 +66,9 @@ export function readStrd(name: StrdName): StrdSet {
     standardErrors: coefficients.map((row) => row[1]!),
     residualStandardError: after(/^\s*Standard Deviation(?=\s+[\d.])/)[0]!,
     rSquared: after(/^\s*R-Squared/)[0]!,
-    residualSumOfSquares: numbers(lines.find((line) => /^Residual\s+\d/.test(line))!.replace('Residual', ''))[1]!,
+    residualSumOfSquares: numbers(
+      lines.find((line) => /^Residual\s+\d/.test(line))!.replace('Residual', ''),
+    )[1]!,
     overallF: numbers(regression.replace('Regression', '')).at(-1)!,
   };
 }

@@ -21,7 +21,10 @@ export const collinearity: Diagnostic = {
     const built = columns[fit.columns[at]!]!.pieces.some((piece) =>
       fit.columns.some(
         (other) =>
-          other !== fit.columns[at] && columns[other]!.pieces.some((another) => another.variable === piece.variable && another.kind !== 'level'),
+          other !== fit.columns[at] &&
+          columns[other]!.pieces.some(
+            (another) => another.variable === piece.variable && another.kind !== 'level',
+          ),
       ),
     );
     const concern = built ? (largest > 1e4 ? 1 : 0) : largest > 10 ? 2 : largest > 5 ? 1 : 0;

@@ -18,7 +18,10 @@ export const enoughRows: Diagnostic = {
       mark: 'ten to twenty (common practice)',
       verdict: `${n} rows carry ${p} coefficients${concern === 0 ? '.' : ': R² flatters the model, and the coefficients may not come back on new rows.'}`,
       concern,
-      advice: concern === 0 ? null : 'Look at the predicted R² rather than R², and prefer a smaller candidate or wait for more rows.',
+      advice:
+        concern === 0
+          ? null
+          : 'Look at the predicted R² rather than R², and prefer a smaller candidate or wait for more rows.',
     };
   },
 };

@@ -12,7 +12,8 @@ export const equalSpread: Diagnostic = {
   statisticName: 'Breusch–Pagan statistic, Koenker’s form',
   source: 'Breusch & Pagan 1979; Koenker 1981',
   find(chosen) {
-    if (chosen.s === null) return notPossible('Without residual degrees of freedom the spread cannot be judged.');
+    if (chosen.s === null)
+      return notPossible('Without residual degrees of freedom the spread cannot be judged.');
     const found = koenker(chosen);
     if (found === null) return notPossible('The model has no column that the spread could depend on.');
     const { statistic, df } = found;
@@ -41,7 +42,12 @@ export function koenker(chosen: Chosen): { statistic: number; df: number } | nul
   const { columns, fit, sample, residuals } = chosen;
   const own = fit.columns.filter((column) => column !== 0);
   if (own.length === 0) return null;
-  const rows = designRows([columns[0]!, ...own.map((column) => columns[column]!)], sample, [residuals.map((e) => e * e)], null);
+  const rows = designRows(
+    [columns[0]!, ...own.map((column) => columns[column]!)],
+    sample,
+    [residuals.map((e) => e * e)],
+    null,
+  );
   const factor = rows.rowCount * rows.width ** 2 <= EXTENDED_BUDGET ? factorExtended(rows) : factorRows(rows);
   const auxiliary = fitCandidate(
     factor,
@@ -53,8 +59,14 @@ export function koenker(chosen: Chosen): { statistic: number; df: number } | nul
       columns: Array.from({ length: own.length + 1 }, (_, j) => j),
       responseColumn: 0,
     },
-    { logWeights: 0, logJacobians: [0], columnNames: [], columnVariables: Array.from({ length: own.length + 1 }, () => []) },
+    {
+      logWeights: 0,
+      logJacobians: [0],
+      columnNames: [],
+      columnVariables: Array.from({ length: own.length + 1 }, () => []),
+    },
   );
-  const share = auxiliary.totalSumOfSquares > 0 ? 1 - auxiliary.residualSumOfSquares / auxiliary.totalSumOfSquares : 0;
+  const share =
+    auxiliary.totalSumOfSquares > 0 ? 1 - auxiliary.residualSumOfSquares / auxiliary.totalSumOfSquares : 0;
   return { statistic: sample.rowCount * Math.max(0, share), df: auxiliary.columns.length - 1 };
 }

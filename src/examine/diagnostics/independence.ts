@@ -10,7 +10,8 @@ export const independence: Diagnostic = {
   find(chosen) {
     const order = chosen.sample.timeOrder;
     if (order === null) return null;
-    if (chosen.s === null || order.length < 3) return notPossible('Too few rows or degrees of freedom to judge neighbours in time.');
+    if (chosen.s === null || order.length < 3)
+      return notPossible('Too few rows or degrees of freedom to judge neighbours in time.');
     const statistic = durbinWatson(chosen.residuals, order);
     const away = Math.abs(statistic - 2);
     const concern = away > 1 ? 2 : away > 0.5 ? 1 : 0;
@@ -27,7 +28,9 @@ export const independence: Diagnostic = {
           : statistic < 2
             ? `A row’s residual resembles the one before it (correlation ${correlation}): there is less information in the rows than their number says, and the intervals are too narrow.`
             : `A row’s residual tends to oppose the one before it (correlation ${correlation}), as where one period’s excess is booked in the next.`) +
-        (repeated > 0 ? ` ${repeated} rows share their time with the row before; they are taken in file order.` : ''),
+        (repeated > 0
+          ? ` ${repeated} rows share their time with the row before; they are taken in file order.`
+          : ''),
       concern,
       advice:
         concern === 0

@@ -25,7 +25,12 @@ export const influence: Diagnostic = {
     const alone =
       full.length === 0
         ? ''
-        : ` ${full.slice(0, 5).map((i) => rowName(chosen.sample, i)).join(', ')}${full.length > 5 ? ` and ${full.length - 5} more` : ''}: fitted by a coefficient of its own (leverage 1), so nothing checks it.`;
+        : ` ${full
+            .slice(0, 5)
+            .map((i) => rowName(chosen.sample, i))
+            .join(
+              ', ',
+            )}${full.length > 5 ? ` and ${full.length - 5} more` : ''}: fitted by a coefficient of its own (leverage 1), so nothing checks it.`;
     const concern = full.length > 0 || largest >= 1 ? 2 : largest >= 0.5 ? 1 : 0;
     return {
       statistic: largest,
@@ -37,7 +42,10 @@ export const influence: Diagnostic = {
           ? `${name} moves the coefficients noticeably: without it the model would say something else.`
           : `No single row moves the coefficients much; ${name} moves them most.`) + alone,
       concern,
-      advice: concern === 0 ? null : 'Check these rows at their source, and say in the study what the result is without them.',
+      advice:
+        concern === 0
+          ? null
+          : 'Check these rows at their source, and say in the study what the result is without them.',
     };
   },
 };

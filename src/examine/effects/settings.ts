@@ -1,8 +1,8 @@
 import type { CategoryColumn, Column } from '../../data/table.ts';
 import { baselineOf, presentLevels } from '../../model/build-design.ts';
 import { designRows } from '../../model/design-rows.ts';
-import { quartilesOf } from '../../stats/quartiles.ts';
 import { tTwoSidedQuantile } from '../../stats/distributions.ts';
+import { quartilesOf } from '../../stats/quartiles.ts';
 import type { Chosen } from '../chosen.ts';
 
 /** A value of every variable of the chosen model: a number, or a level of a category. */
@@ -38,14 +38,19 @@ export type ReferenceVariable =
 /** Numbers at their mean, flags at 0, categories at their baseline. */
 export function referenceOf(chosen: Chosen): Reference {
   const names = new Set(
-    chosen.fit.candidate.columns.flatMap((column) => chosen.columns[column]!.pieces.map((piece) => piece.variable)),
+    chosen.fit.candidate.columns.flatMap((column) =>
+      chosen.columns[column]!.pieces.map((piece) => piece.variable),
+    ),
   );
   const setting = new Map<string, number | string>();
   const variables = new Map<string, ReferenceVariable>();
   for (const name of names) {
     const described = describe(chosen.sample.columns.get(name)!);
     variables.set(name, described);
-    setting.set(name, described.kind === 'category' ? described.baseline : described.kind === 'flag' ? 0 : described.mean);
+    setting.set(
+      name,
+      described.kind === 'category' ? described.baseline : described.kind === 'flag' ? 0 : described.mean,
+    );
   }
   return { setting, variables };
 }
@@ -61,7 +66,16 @@ function describe(column: Column): ReferenceVariable {
   for (const value of column.values) mean += value;
   mean /= column.values.length;
   const kind = column.kind === 'flag' ? 'flag' : 'number';
-  return { kind, smallest, lowerQuartile, median, upperQuartile, largest, mean, texts: column.flagTexts ?? null };
+  return {
+    kind,
+    smallest,
+    lowerQuartile,
+    median,
+    upperQuartile,
+    largest,
+    mean,
+    texts: column.flagTexts ?? null,
+  };
 }
 
 /** The setting with some variables moved. */
@@ -108,18 +122,40 @@ function designAt(chosen: Chosen, settings: readonly Setting[]): Float64Array {
   const source = new Map<string, Column>();
   for (const name of settings[0]?.keys() ?? []) {
     const like = sample.columns.get(name)!;
-    source.set(name, like.kind === 'category' ? codesLike(like, settings, name) : numbersLike(settings, name));
+    source.set(
+      name,
+      like.kind === 'category' ? codesLike(like, settings, name) : numbersLike(settings, name),
+    );
   }
-  const rows = designRows(fit.columns.map((column) => columns[column]!), { rowCount: settings.length, columns: source }, [], null);
+  const rows = designRows(
+    fit.columns.map((column) => columns[column]!),
+    { rowCount: settings.length, columns: source },
+    [],
+    null,
+  );
   const values = new Float64Array(settings.length * fit.columns.length);
-  rows.fill(fit.columns.map((_, j) => j), 0, settings.length, settings.length, values, null);
+  rows.fill(
+    fit.columns.map((_, j) => j),
+    0,
+    settings.length,
+    settings.length,
+    values,
+    null,
+  );
   return values.map((value, k) => value / rows.scales[Math.floor(k / settings.length)]!);
 }
 
 function codesLike(like: CategoryColumn, settings: readonly Setting[], name: string): CategoryColumn {
-  return { ...like, codes: Int32Array.from(settings, (setting) => like.levels.indexOf(String(setting.get(name)))) };
+  return {
+    ...like,
+    codes: Int32Array.from(settings, (setting) => like.levels.indexOf(String(setting.get(name)))),
+  };
 }
 
 function numbersLike(settings: readonly Setting[], name: string): Column {
-  return { kind: 'number', name, values: Float64Array.from(settings, (setting) => Number(setting.get(name))) };
+  return {
+    kind: 'number',
+    name,
+    values: Float64Array.from(settings, (setting) => Number(setting.get(name))),
+  };
 }

@@ -1,7 +1,14 @@
 import type { ModelTerm } from '../../model/design.ts';
-import type { TermPlan } from '../../study/study.ts';
+import { termVariables } from '../../prepare/needed-variables.ts';
 import type { Chosen } from '../chosen.ts';
-import { type Effect, effectsBetween, moved, type Reference, type ReferenceVariable, type Setting } from './settings.ts';
+import {
+  type Effect,
+  effectsBetween,
+  moved,
+  type Reference,
+  type ReferenceVariable,
+  type Setting,
+} from './settings.ts';
 
 /** What moving a term's variable over its typical step goes with, the others held. */
 export interface TypicalStep extends Effect {
@@ -30,11 +37,6 @@ export interface Slope extends Effect {
 
 const CURVE_POINTS = 61;
 const MOST_SLOPES = 24;
-
-/** The variables of a term, in order, each once. */
-export function variablesOf(plan: TermPlan): string[] {
-  return plan.kind === 'interaction' ? [...new Set(plan.of.flatMap(variablesOf))] : [plan.variable];
-}
 
 /** Lower to upper quartile of a number; baseline to each other level of a category; 0 to 1 of a flag. */
 export function typicalSteps(chosen: Chosen, term: ModelTerm, reference: Reference): TypicalStep[] {
@@ -76,7 +78,9 @@ function stepsOf(variable: ReferenceVariable): Step[] {
       return [{ from, to, fromText: String(from), toText: String(to) }];
     }
     case 'flag':
-      return [{ from: 0, to: 1, fromText: variable.texts?.[0] ?? 'no', toText: variable.texts?.[1] ?? 'yes' }];
+      return [
+        { from: 0, to: 1, fromText: variable.texts?.[0] ?? 'no', toText: variable.texts?.[1] ?? 'yes' },
+      ];
     case 'category':
       return variable.levels
         .filter((level) => level !== variable.baseline)
@@ -91,10 +95,16 @@ export function curveOf(chosen: Chosen, term: ModelTerm, reference: Reference): 
   const described = reference.variables.get(variable);
   if (described === undefined || described.kind !== 'number') return null;
   const { smallest, largest } = described;
-  const x = Array.from({ length: CURVE_POINTS }, (_, i) => smallest + ((largest - smallest) * i) / (CURVE_POINTS - 1));
+  const x = Array.from(
+    { length: CURVE_POINTS },
+    (_, i) => smallest + ((largest - smallest) * i) / (CURVE_POINTS - 1),
+  );
   const effects = effectsBetween(
     chosen,
-    x.map((value): [Setting, Setting] => [reference.setting, moved(reference.setting, { [variable]: value })]),
+    x.map((value): [Setting, Setting] => [
+      reference.setting,
+      moved(reference.setting, { [variable]: value }),
+    ]),
   );
   return {
     variable,
@@ -111,7 +121,7 @@ export function curveOf(chosen: Chosen, term: ModelTerm, reference: Reference): 
  */
 export function slopesOf(chosen: Chosen, term: ModelTerm, reference: Reference): Slope[] {
   if (term.plan.kind !== 'interaction') return [];
-  const [first, ...others] = variablesOf(term.plan);
+  const [first, ...others] = termVariables(term.plan);
   const described = first === undefined ? undefined : reference.variables.get(first);
   if (first === undefined || described === undefined) return [];
   const places = others
@@ -139,12 +149,18 @@ export function slopesOf(chosen: Chosen, term: ModelTerm, reference: Reference):
   return wanted.map(({ place, move }, k) => ({ at: place.at, of: move.of, per: move.per, ...effects[k]! }));
 }
 
-function placesOf(name: string, variable: ReferenceVariable): { at: string; changes: Record<string, number | string> }[] {
+function placesOf(
+  name: string,
+  variable: ReferenceVariable,
+): { at: string; changes: Record<string, number | string> }[] {
   switch (variable.kind) {
     case 'category':
       return variable.levels.map((level) => ({ at: `${name} ${level}`, changes: { [name]: level } }));
     case 'flag':
-      return [0, 1].map((value) => ({ at: `${name} ${variable.texts?.[value as 0 | 1] ?? (value === 1 ? 'yes' : 'no')}`, changes: { [name]: value } }));
+      return [0, 1].map((value) => ({
+        at: `${name} ${variable.texts?.[value as 0 | 1] ?? (value === 1 ? 'yes' : 'no')}`,
+        changes: { [name]: value },
+      }));
     case 'number':
       return [...new Set([variable.lowerQuartile, variable.median, variable.upperQuartile])].map((value) => ({
         at: `${name} ${value}`,
@@ -153,7 +169,10 @@ function placesOf(name: string, variable: ReferenceVariable): { at: string; chan
   }
 }
 
-function movesOf(name: string, variable: ReferenceVariable): { of: string; per: string | null; from: number | string; to: number | string }[] {
+function movesOf(
+  name: string,
+  variable: ReferenceVariable,
+): { of: string; per: string | null; from: number | string; to: number | string }[] {
   switch (variable.kind) {
     case 'number':
       // The slope at the median; exact for a straight line, a chord of one unit for a curve.
@@ -163,6 +182,11 @@ function movesOf(name: string, variable: ReferenceVariable): { of: string; per: 
     case 'category':
       return variable.levels
         .filter((level) => level !== variable.baseline)
-        .map((level) => ({ of: `${name} ${level} rather than ${variable.baseline}`, per: null, from: variable.baseline, to: level }));
+        .map((level) => ({
+          of: `${name} ${level} rather than ${variable.baseline}`,
+          per: null,
+          from: variable.baseline,
+          to: level,
+        }));
   }
 }

@@ -1,0 +1,147 @@
+import type { Design } from '../model/design.ts';
+import type { DesignRows } from '../model/design-rows.ts';
+import type { Sample } from '../prepare/sample.ts';
+import type { Report } from '../problem.ts';
+import type { Study } from '../study/study.ts';
+import type { DependentColumn, Fit } from './fit.ts';
+
+/**
+ * What the fits say about the declaration: responses and predictors that do not vary, columns that depend on
+ * one another, fewer rows than coefficients, numbers too large to compute with. Each is said once, with the
+ * candidates it touches, at the term that brings it in.
+ */
+export function checkFits(
+  study: Study,
+  sample: Sample,
+  design: Design,
+  fits: readonly Fit[],
+  report: Report,
+): void {
+  const place = study.placeOf(['response']);
+  if (isConstant(sample, study.response.variable)) {
+    report({
+      code: 'response_constant',
+      severity: 'error',
+      place,
+      message: `${study.response.variable} has the same value in all ${sample.rowCount} rows used, so there is nothing to explain.`,
+    });
+    return;
+  }
+  reportTooFewRows(study, fits, report);
+  reportDependencies(study, design, fits, report);
+}
+
+/**
+ * Looks for design values that are not finite (a power that overflows, 0 to a negative power) or so large that
+ * their squares overflow together; true where all is well.
+ */
+export function checkFinite(
+  sample: Sample,
+  design: Design,
+  rows: DesignRows,
+  dataFile: string,
+  report: Report,
+): boolean {
+  const block = 1024;
+  const values = new Float64Array(block);
+  let sound = true;
+  for (let column = 0; column < rows.width; column++) {
+    // A column that is a variable itself holds what the contract let in, which is finite.
+    const pieces = design.columns[column]?.pieces ?? [];
+    if (pieces.every((piece) => piece.kind === 'variable' || piece.kind === 'level') && pieces.length < 2)
+      continue;
+    for (let from = 0; from < rows.rowCount; from += block) {
+      const count = Math.min(block, rows.rowCount - from);
+      rows.fill([column], from, from + count, block, values, null);
+      const at = values.subarray(0, count).findIndex((value) => !Number.isFinite(value));
+      if (at < 0) continue;
+      sound = false;
+      const name = design.columns[column]!.name;
+      report({
+        code: 'value_not_finite',
+        severity: 'error',
+        place: { kind: 'cell', file: dataFile, row: sample.lines[from + at]!, variable: pieces[0]!.variable },
+        message: `${name} is not a finite number there.`,
+        hint: 'Leave such rows out for a stated reason, or choose a term that is defined in all rows.',
+      });
+      break;
+    }
+  }
+  return sound;
+}
+
+function isConstant(sample: Sample, variable: string): boolean {
+  const column = sample.columns.get(variable);
+  if (column === undefined || column.kind === 'category' || column.kind === 'text') return false;
+  return sample.rowCount > 1 && column.values.every((value) => value === column.values[0]);
+}
+
+function reportTooFewRows(study: Study, fits: readonly Fit[], report: Report): void {
+  const crowded = fits.flatMap((fit, index) => (isCrowded(fit) ? [index] : []));
+  const none = crowded.length === fits.length;
+  for (const index of crowded) {
+    const { rowCount, candidate } = fits[index]!;
+    const wanted = candidate.columns.length;
+    report({
+      code: 'rows_too_few',
+      severity: none ? 'error' : 'warning',
+      place: study.placeOf(['candidates', index]),
+      message: `${candidate.name} has ${wanted} coefficients for ${rowCount} ${rowCount === 1 ? 'row' : 'rows'}: ${
+        wanted === rowCount ? 'it fits them exactly, whatever they are' : 'there is no one answer'
+      }, and nothing can be tested.`,
+      hint: 'Take terms out, or wait for more rows.',
+    });
+  }
+}
+
+function isCrowded(fit: Fit): boolean {
+  return fit.candidate.columns.length >= fit.rowCount;
+}
+
+function reportDependencies(study: Study, design: Design, fits: readonly Fit[], report: Report): void {
+  const told = new Map<string, { dependent: DependentColumn; near: boolean; candidates: number[] }>();
+  fits.forEach((fit, index) => {
+    if (isCrowded(fit)) return;
+    const note = (dependent: DependentColumn, near: boolean) => {
+      const entry = told.get(dependent.sentence) ?? { dependent, near, candidates: [] };
+      entry.candidates.push(index);
+      told.set(dependent.sentence, entry);
+    };
+    for (const dependent of fit.dropped) note(dependent, false);
+    for (const dependent of fit.nearlyDependent) note(dependent, true);
+  });
+  for (const { dependent, near, candidates } of told.values()) {
+    const [first] = candidates;
+    const term = fits[first!]!.candidate.terms.findIndex((one) => one.columns.includes(dependent.column));
+    const place = study.placeOf(['candidates', first!, 'terms', Math.max(0, term)]);
+    const names = candidates
+      .slice(0, 3)
+      .map((index) => fits[index]!.candidate.name)
+      .join(', ');
+    const more = candidates.length > 3 ? ` and ${candidates.length - 3} more` : '';
+    if (near) {
+      report({
+        code: 'columns_nearly_dependent',
+        severity: 'warning',
+        place,
+        message: `${dependent.sentence}: their coefficients can hardly be told apart in ${names}${more}.`,
+      });
+      continue;
+    }
+    const constant = dependent.sentence.endsWith('in every row used') && !isProduct(design, dependent.column);
+    const stop = study.inference.dependentColumns === 'stop';
+    report({
+      code: constant ? 'predictor_constant' : 'columns_dependent',
+      severity: stop ? 'error' : 'warning',
+      place,
+      message: `${dependent.sentence}${stop ? '' : `, so ${design.columns[dependent.column]!.name} is left out of ${names}${more}`}.`,
+      hint: stop
+        ? 'Take it out, or let the fit go on without it by inference.dependent_columns: drop.'
+        : 'Take it out of the candidate: it can say nothing of its own in these rows.',
+    });
+  }
+}
+
+function isProduct(design: Design, column: number): boolean {
+  return design.columns[column]!.pieces.length > 1;
+}

@@ -1,0 +1,140 @@
+import { readTable } from './data/read-table.ts';
+import type { Table } from './data/table.ts';
+import { checkFinite, checkFits } from './engine/check-fits.ts';
+import { type FittedAll, fitAll } from './engine/fit-all.ts';
+import { refineFit } from './engine/refine.ts';
+import { type Chosen, examineRows } from './examine/chosen.ts';
+import { buildDesign } from './model/build-design.ts';
+import type { Design } from './model/design.ts';
+import { type DesignRows, designRows, numbersOf } from './model/design-rows.ts';
+import { toScale } from './model/response-scale.ts';
+import { type Predicted, predict, smearingResiduals } from './predict/predict.ts';
+import { fileRows, statedRows } from './predict/prediction-rows.ts';
+import { prepareSample } from './prepare/prepare-sample.ts';
+import type { Sample } from './prepare/sample.ts';
+import type { Problem, Report } from './problem.ts';
+import { buildRecord } from './record/build-record.ts';
+import type { StudyRecord } from './record/record.ts';
+import { residualColumns } from './record/residual-columns.ts';
+import type { ResidualColumns } from './record/tables.ts';
+import { choose } from './select/choose.ts';
+import { readStudy } from './study/read-study.ts';
+import type { Study } from './study/study.ts';
+
+export interface RunOptions {
+  /** Told of long work: the stage in words, how much is done, and of how much where that is known. */
+  readonly onProgress?: (stage: string, done: number, total: number | null) => void;
+}
+
+export interface CheckedStudy {
+  readonly study: Study | null;
+  readonly table: Table | null;
+  readonly sample: Sample | null;
+  /** Everything found, in the order found. */
+  readonly problems: readonly Problem[];
+}
+
+export interface RunResult {
+  /** Null where an error stopped the run; the problems say which. */
+  readonly record: StudyRecord | null;
+  readonly problems: readonly Problem[];
+  /** Row figures of the chosen model, for a table; null where none was chosen. */
+  readonly residuals: ResidualColumns | null;
+}
+
+/** Reads and checks a study and its data, down to the rows that would be fitted, and fits nothing. */
+export async function checkStudy(path: string, options: RunOptions = {}): Promise<CheckedStudy> {
+  const problems: Problem[] = [];
+  const report: Report = (problem) => problems.push(problem);
+  const study = await readStudy(path, report);
+  if (study === null || hasError(problems)) return { study, table: null, sample: null, problems };
+  const table = await readTable(study.data, study.folder, report, {
+    onProgress: (rows) => options.onProgress?.('reading rows', rows, null),
+  });
+  if (table === null) return { study, table, sample: null, problems };
+  const sample = prepareSample(study, table, report);
+  return { study, table, sample, problems };
+}
+
+/**
+ * The whole study, stage by stage:
+ *
+ *     study file ─ data ─ sample ─ design ─ factor ─ fits ─ choice ─ examination ─ predictions ─ record
+ *
+ * Every candidate is fitted on the same rows; where an error is found the stages after it are left out.
+ */
+export async function runStudy(path: string, options: RunOptions = {}): Promise<RunResult> {
+  const { study, table, sample, problems: found } = await checkStudy(path, options);
+  const problems = [...found];
+  const report: Report = (problem) => problems.push(problem);
+  const stopped: () => RunResult = () => ({ record: null, problems, residuals: null });
+  if (study === null || table === null || sample === null || hasError(problems)) return stopped();
+
+  const design = buildDesign(study, sample, report);
+  if (design === null) return stopped();
+  const own = numbersOf(sample, study.response.variable);
+  const rows = rowsOf(study, sample, design, own);
+
+  if (!checkFinite(sample, design, rows, table.file, report)) return stopped();
+
+  const fitted = fitAll(design, rows, own, {
+    pressRanks: study.selection.rankBy === 'press',
+    onProgress: (done, total) => options.onProgress?.('fitting candidates', done, total),
+  });
+  checkFits(study, sample, design, fitted.fits, report);
+  if (hasError(problems)) return stopped();
+
+  const choice = choose(study, fitted, report);
+  if (hasError(problems)) return stopped();
+
+  const chosen =
+    choice.chosen === null ? null : examineChosen(study, sample, design, rows, fitted, choice.chosen);
+  const predicted = chosen === null ? null : await predictAll(chosen, report);
+  if (hasError(problems)) return stopped();
+
+  const record = buildRecord({
+    study,
+    table,
+    sample,
+    design,
+    rows,
+    fitted,
+    choice,
+    chosen,
+    predicted,
+    problems,
+  });
+  return { record, problems, residuals: chosen === null ? null : residualColumns(chosen) };
+}
+
+function rowsOf(study: Study, sample: Sample, design: Design, own: Float64Array): DesignRows {
+  const responses = design.responses.map(({ scale }) =>
+    scale.kind === 'natural' ? own : own.map((y) => toScale(y, scale)),
+  );
+  return designRows(design.columns, sample, responses, study.weights);
+}
+
+/** The chosen model is refined whatever it costs; the record shows the refined figures. */
+function examineChosen(
+  study: Study,
+  sample: Sample,
+  design: Design,
+  rows: DesignRows,
+  fitted: FittedAll,
+  index: number,
+): Chosen {
+  const fit = refineFit(fitted.fits[index]!, rows, fitted.facts);
+  return examineRows(study, sample, design.columns, fit, rows);
+}
+
+/** Rows stated in the study, then those of its file. */
+async function predictAll(chosen: Chosen, report: Report): Promise<Predicted> {
+  const smearing = smearingResiduals(chosen);
+  const stated = statedRows(chosen, report);
+  const fromFile = await fileRows(chosen, report);
+  return predict(chosen, fromFile === null ? [stated] : [stated, fromFile], smearing);
+}
+
+function hasError(problems: readonly Problem[]): boolean {
+  return problems.some((problem) => problem.severity === 'error');
+}
