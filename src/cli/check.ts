@@ -1,0 +1,27 @@
+import { type CheckedStudy, checkStudy } from '../run.ts';
+import type { CommonOptions } from './common-options.ts';
+import { contractSummary } from './contract-summary.ts';
+import { DONE, UNUSABLE } from './exit-status.ts';
+import { hasError } from './has-error.ts';
+import { progressOn } from './progress.ts';
+import { showProblems } from './show-problems.ts';
+import { sourceTexts } from './source-texts.ts';
+import type { Terminal } from './terminal.ts';
+
+/** `plumbrule check STUDY`: declaration and data contract, no fit. */
+export async function checkCommand(
+  path: string,
+  options: CommonOptions,
+  terminal: Terminal,
+): Promise<number> {
+  const progress = progressOn(terminal, options.quiet === true);
+  let checked: CheckedStudy;
+  try {
+    checked = await checkStudy(path, { onProgress: progress.show });
+  } finally {
+    progress.clear();
+  }
+  await showProblems(checked.problems, await sourceTexts(path, checked.problems), options.problems, terminal);
+  if (options.quiet !== true && options.problems === 'text') terminal.out(contractSummary(checked, terminal));
+  return hasError(checked.problems) ? UNUSABLE : DONE;
+}

@@ -1,0 +1,155 @@
+import { readFileSync } from 'node:fs';
+import { Command, CommanderError, Option } from 'commander';
+import type { Problem } from '../problem.ts';
+import type { CommonOptions } from './common-options.ts';
+import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
+import { showProblems } from './show-problems.ts';
+import type { Terminal } from './terminal.ts';
+
+/**
+ * Runs one command line (without the program's own name) and gives its exit status. Commands are loaded
+ * when they are called for, so that `--help` costs next to nothing.
+ */
+export async function runCommandLine(args: readonly string[], terminal: Terminal): Promise<number> {
+  let status = 0;
+  const program = commands(terminal, (found) => {
+    status = found;
+  });
+  try {
+    await program.parseAsync([...args], { from: 'user' });
+    return status;
+  } catch (fault) {
+    if (fault instanceof CommanderError) return await misused(fault, program, args, terminal);
+    return ownFault(fault, terminal);
+  }
+}
+
+function commands(terminal: Terminal, ended: (status: number) => void): Command {
+  const program = new Command('plumbrule')
+    .description(
+      'Runs declared multiple-regression studies: fits every candidate, chooses one by the declared rule,\nexamines it, predicts, records and reports.',
+    )
+    .version(packageVersion(), '--version', 'print the version')
+    .helpOption('--help', 'print help for a command')
+    .helpCommand(false)
+    .showSuggestionAfterError(true)
+    .exitOverride()
+    .configureOutput({
+      writeOut: terminal.out,
+      // Faults are printed once, by `misused`.
+      writeErr: () => {},
+      getOutHelpWidth: () => terminal.width,
+    });
+
+  const problems = () =>
+    new Option(
+      '--problems <form>',
+      'print problems as text, or as JSON on standard output and nothing else there',
+    )
+      .choices(['text', 'json'])
+      .default('text');
+  const quiet = () => new Option('--quiet', 'print problems only');
+
+  program
+    .command('check')
+    .description('check a study and its data, and fit nothing')
+    .argument('<study>', 'the study file')
+    .addOption(quiet())
+    .addOption(problems())
+    .action(async (study: string, options: CommonOptions) => {
+      const { checkCommand } = await import('./check.ts');
+      ended(await checkCommand(study, options, terminal));
+    });
+
+  program
+    .command('fit')
+    .description('run the whole study and write its record, reports and tables')
+    .argument('<study>', 'the study file')
+    .option('--out <folder>', 'where to write (default: results/ and the name of the study)')
+    .addOption(quiet())
+    .addOption(problems())
+    .action(async (study: string, options: CommonOptions & { out?: string }) => {
+      const { fitCommand } = await import('./fit.ts');
+      ended(await fitCommand(study, options, terminal));
+    });
+
+  program
+    .command('render')
+    .description('write the reports of a record again, without its data')
+    .argument('<record>', 'the record file, record.json')
+    .option('--out <folder>', 'where to write (default: the folder of the record)')
+    .addOption(
+      new Option('--format <format>', 'one format only (default: those that the study asks for)').choices([
+        'html',
+        'markdown',
+      ]),
+    )
+    .addOption(quiet())
+    .addOption(problems())
+    .action(
+      async (record: string, options: CommonOptions & { out?: string; format?: 'html' | 'markdown' }) => {
+        const { renderCommand } = await import('./render.ts');
+        ended(await renderCommand(record, options, terminal));
+      },
+    );
+
+  program.addHelpText(
+    'after',
+    '\nExit status: 0 done; 1 done, but an acceptance criterion was missed or no candidate was admitted;\n2 the study, the data or the command line cannot be used; 3 a fault of the program.\n',
+  );
+  return program;
+}
+
+/** Help and version come here too: the parser ends each of them by throwing. */
+async function misused(
+  fault: CommanderError,
+  program: Command,
+  args: readonly string[],
+  terminal: Terminal,
+): Promise<number> {
+  if (fault.exitCode === 0) return 0;
+  if (fault.code === 'commander.help') {
+    terminal.err(program.helpInformation());
+    return UNUSABLE;
+  }
+  const [first, ...rest] = fault.message.replace(/^error: /, '').split('\n');
+  const suggestion = rest.join(' ').match(/\(Did you mean (?:one of )?(.*?)\??\)/)?.[1];
+  const named = program.commands.some((command) => command.name() === args[0]);
+  const problem: Problem = {
+    code: 'command_unusable',
+    severity: 'error',
+    place: { kind: 'command' },
+    message: sentence(first ?? 'The command line cannot be understood'),
+    hint:
+      suggestion === undefined
+        ? `See plumbrule ${named ? `${args[0]} ` : ''}--help.`
+        : `Did you mean ${suggestion}?`,
+  };
+  await showProblems([problem], new Map(), jsonAsked(args) ? 'json' : 'text', terminal);
+  return UNUSABLE;
+}
+
+function jsonAsked(args: readonly string[]): boolean {
+  return args.includes('--problems=json') || args[args.indexOf('--problems') + 1] === 'json';
+}
+
+function sentence(text: string): string {
+  const raised = text.charAt(0).toUpperCase() + text.slice(1);
+  return raised.endsWith('.') ? raised : `${raised}.`;
+}
+
+function ownFault(fault: unknown, terminal: Terminal): number {
+  const said = fault instanceof Error ? `${fault.name}: ${fault.message}` : String(fault);
+  terminal.err(`plumbrule failed through a fault of its own; nothing was written. ${said}\n`);
+  if (process.env.PLUMBRULE_DEBUG === '1') {
+    terminal.err(`${fault instanceof Error ? fault.stack : said}\n`);
+  } else {
+    terminal.err('Set PLUMBRULE_DEBUG=1 to see where it happened.\n');
+  }
+  return OWN_FAULT;
+}
+
+function packageVersion(): string {
+  const text = readFileSync(new URL('../../package.json', import.meta.url), 'utf8');
+  return (JSON.parse(text) as { version: string }).version;
+}

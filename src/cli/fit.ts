@@ -1,0 +1,95 @@
+import { basename, dirname, join, relative, resolve } from 'node:path';
+import type { Problem } from '../problem.ts';
+import type { StudyRecord } from '../record/record.ts';
+import { recordFaults } from '../record/record-faults.ts';
+import { recordText } from '../record/record-text.ts';
+import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
+import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
+import { type RunResult, runStudy } from '../run.ts';
+import type { CommonOptions } from './common-options.ts';
+import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
+import { hasError } from './has-error.ts';
+import { progressOn } from './progress.ts';
+import { reportFiles } from './report-files.ts';
+import { showProblems } from './show-problems.ts';
+import { sourceTexts } from './source-texts.ts';
+import { summary } from './summary.ts';
+import type { Terminal } from './terminal.ts';
+
+/** `plumbrule fit STUDY`: the whole study, down to record, reports and tables in the output folder. */
+export async function fitCommand(
+  path: string,
+  options: CommonOptions & { readonly out?: string },
+  terminal: Terminal,
+): Promise<number> {
+  const progress = progressOn(terminal, options.quiet === true);
+  const problems: Problem[] = [];
+  let written: { readonly record: StudyRecord; readonly out: string; readonly names: string[] } | null = null;
+  try {
+    const result = await runStudy(path, { onProgress: progress.show });
+    problems.push(...result.problems);
+    if (result.record !== null && !hasError(problems)) {
+      const out = options.out ?? defaultFolder(path);
+      const files = await resultFiles(result.record, result, dirname(path), (problem) =>
+        problems.push(problem),
+      );
+      if (!hasError(problems)) {
+        progress.show('writing results', 0, null);
+        const done = await writeResults(out, files, (problem) => problems.push(problem), RESULT_FILES);
+        if (done) written = { record: result.record, out, names: files.map((file) => file.name) };
+      }
+    }
+  } finally {
+    progress.clear();
+  }
+
+  await showProblems(problems, await sourceTexts(path, problems), options.problems, terminal);
+  if (written === null) return UNUSABLE;
+  if (options.quiet !== true && options.problems === 'text') {
+    terminal.out(summary(written.record, places(written.out, written.names), terminal));
+  }
+  return statusOf(written.record);
+}
+
+async function resultFiles(
+  record: StudyRecord,
+  result: RunResult,
+  folder: string,
+  report: (problem: Problem) => void,
+): Promise<ResultFile[]> {
+  const faults = recordFaults(record);
+  if (faults.length > 0)
+    throw new Error(`The record is not as its schema says: ${faults.slice(0, 3).join(' ')}`);
+  return [
+    { name: 'record.json', content: recordText(record) },
+    ...(await reportFiles(record, record.study.report.formats, folder, report)),
+    { name: 'tables/candidates.csv', content: candidatesTable(record) },
+    { name: 'tables/coefficients.csv', content: coefficientsTable(record) },
+    ...(result.residuals === null
+      ? []
+      : [{ name: 'tables/residuals.csv', content: residualsTable(result.residuals) }]),
+    ...(record.predictions.length === 0
+      ? []
+      : [{ name: 'tables/predictions.csv', content: predictionsTable(record) }]),
+  ];
+}
+
+/** 0, or 1 where no candidate was admitted or an acceptance criterion was missed. */
+export function statusOf(record: StudyRecord): number {
+  const accepted = record.acceptance.every((criterion) => criterion.passed);
+  return record.selection.chosen !== null && accepted ? DONE : NOT_ACCEPTED;
+}
+
+/** results/ and the study's name: its file's, or its folder's where the file is called study.yaml. */
+export function defaultFolder(path: string): string {
+  const name = basename(path).replace(/(?:\.study)?\.ya?ml$/i, '');
+  return join('results', name === 'study' ? basename(dirname(resolve(path))) || name : name);
+}
+
+/** The reports first, for a reader; then the record and the tables' folder. Relative where that is shorter. */
+function places(out: string, names: readonly string[]): string[] {
+  const near = relative('.', out);
+  const shown = near.startsWith('..') ? resolve(out) : near;
+  const reports = names.filter((name) => name.startsWith('report.')).sort();
+  return [...reports, 'record.json', 'tables'].map((name) => join(shown, name));
+}

@@ -1,0 +1,106 @@
+import { bold, faint, type Terminal } from './terminal.ts';
+
+/** One question that a reader asks, with its answer as lines or paragraphs. */
+export interface Section {
+  /** One word, at most nine letters. */
+  readonly label: string;
+  readonly paragraphs: readonly Paragraph[];
+}
+
+/** A text to be wrapped; or one with a first line mark ("1.", "·"); or a line to be kept as it is. */
+export type Paragraph = string | { readonly mark: string; readonly text: string } | { readonly line: string };
+
+const LABEL = 9;
+
+/**
+ * The look of what is printed: a line hung down the page, the reader's questions on its left, the answers
+ * on its right, the bob at the last of them.
+ *
+ *        asked │ How much fuel will the spring timetable burn?
+ *              │
+ *         data │ All 240 rows read were used.
+ *       report ▼ results/ferry-fuel/report.html
+ */
+export function plumbLine(sections: readonly Section[], terminal: Terminal): string {
+  const width = terminal.width - LABEL - 3;
+  const lines: string[] = [];
+  sections.forEach((section, index) => {
+    if (index > 0) lines.push(`${' '.repeat(LABEL)} ${faint('│', terminal)}`);
+    const answer = section.paragraphs.flatMap((paragraph) => laidOut(paragraph, width));
+    answer.forEach((line, at) => {
+      const label = at === 0 ? section.label : '';
+      const bob = index === sections.length - 1 && at === answer.length - 1;
+      const hung = bob ? bold('▼', terminal) : faint('│', terminal);
+      lines.push(`${' '.repeat(LABEL - label.length)}${bold(label, terminal)} ${hung} ${line}`.trimEnd());
+    });
+  });
+  return `${lines.join('\n')}\n`;
+}
+
+function laidOut(paragraph: Paragraph, width: number): string[] {
+  if (typeof paragraph === 'string') return wrapped(printable(paragraph), width);
+  if ('line' in paragraph) return [paragraph.line];
+  const indent = paragraph.mark.length + 1;
+  return wrapped(printable(paragraph.text), width - indent).map(
+    (line, index) => (index === 0 ? `${paragraph.mark} ` : ' '.repeat(indent)) + line,
+  );
+}
+
+/** Breaks at ordinary spaces only: a number keeps its unit. A word longer than the line has one of its own. */
+export function wrapped(text: string, width: number): string[] {
+  const lines: string[] = [];
+  let line = '';
+  for (const word of text.split(/[ \n\t]+/)) {
+    if (line !== '' && shownLength(line) + 1 + shownLength(word) > width) {
+      lines.push(line);
+      line = word;
+    } else {
+      line = line === '' ? word : `${line} ${word}`;
+    }
+  }
+  return [...lines, line];
+}
+
+/** A text without control characters: names from a data file must not be able to steer the terminal. */
+export function printable(text: string): string {
+  return text.replace(/[\p{Cc}\u2028\u2029\u202a-\u202e\u2066-\u2069]/gu, (character) =>
+    /\s/.test(character) ? ' ' : '\ufffd',
+  );
+}
+
+export interface TableColumn {
+  readonly heading: string;
+  readonly align: 'left' | 'right';
+  /** Longest that a cell is shown; the rest becomes an ellipsis. */
+  readonly widest?: number;
+}
+
+/** A table as lines to be kept: headings, then rows, columns two spaces apart. */
+export function tableLines(
+  columns: readonly TableColumn[],
+  rows: readonly (readonly string[])[],
+): Paragraph[] {
+  const shown = [columns.map((column) => column.heading), ...rows].map((row) =>
+    columns.map((column, j) => shortened(printable(row[j] ?? ''), column.widest ?? Number.MAX_SAFE_INTEGER)),
+  );
+  const widths = columns.map((_, j) => Math.max(...shown.map((row) => shownLength(row[j] ?? ''))));
+  return shown.map((row) => ({
+    line: row
+      .map((cell, j) => {
+        const gap = ' '.repeat((widths[j] ?? 0) - shownLength(cell));
+        return columns[j]?.align === 'right' ? gap + cell : cell + gap;
+      })
+      .join('  ')
+      .trimEnd(),
+  }));
+}
+
+function shortened(text: string, widest: number): string {
+  const letters = [...text];
+  return letters.length <= widest ? text : `${letters.slice(0, widest - 1).join('')}…`;
+}
+
+/** Characters that take a place on the line: marks above letters and joiners take none. */
+function shownLength(text: string): number {
+  return [...text.replace(/\p{Mn}|\p{Cf}/gu, '')].length;
+}
