@@ -9,15 +9,23 @@ export function roundTo(x: number, digits: number): number {
   if (digits === 0) return Math.sign(x) * Math.round(size);
   const power = 10 ** Math.abs(digits);
   const shifted = digits > 0 ? size * power : size / power;
-  // From 2^52 on a double has no fraction to round, and shifting back could only disturb it.
-  if (shifted >= 4_503_599_627_370_496) return x;
-  const near = Math.abs(shifted - Math.floor(shifted) - 0.5);
-  const whole = near < 1e-6 * Math.max(1, shifted * 1e-9) ? roundWritten(size, digits) : Math.round(shifted);
+  // No double needs more than 17 digits to write it, so none is left to round.
+  if (shifted >= 1e17) return x;
+  const fromHalf = Math.abs(shifted - Math.floor(shifted) - 0.5);
+  // Shifting may have moved a half by a rounding error of 2e-16 of the number or so.
+  if (fromHalf < 1e-6 * Math.max(1, shifted * 1e-9)) return Math.sign(x) * roundWritten(size, digits);
+  const whole = Math.round(shifted);
   return Math.sign(x) * (digits > 0 ? whole / power : whole * power);
 }
 
-/** Shifts the point in the number's shortest decimal form, where no digit is lost. */
+/** The same on the digits of the number's shortest decimal form, in whole numbers of any length. */
 function roundWritten(size: number, digits: number): number {
-  const [mantissa, exponent] = size.toExponential().split('e');
-  return Math.round(Number(`${mantissa}e${Number(exponent) + digits}`));
+  const [mantissa = '', exponent = ''] = size.toExponential().split('e');
+  const [whole, fraction = ''] = mantissa.split('.');
+  const written = BigInt(`${whole}${fraction}`);
+  // The number is written × 10^−places once it has been shifted by `digits`.
+  const places = fraction.length - Number(exponent) - digits;
+  if (places <= 0) return size;
+  const unit = 10n ** BigInt(places);
+  return Number(`${(written + unit / 2n) / unit}e${-digits}`);
 }
