@@ -8,14 +8,14 @@ const standalone = standaloneModule as unknown as typeof standaloneModule.defaul
 /**
  * TypeScript source of a module that exports `name`, a check of a value against the schema that needs no
  * schema compiler at run time. `name(value)` is true where the value is valid, else `name.errors` lists
- * every fault in the compiler's own form, with the part of the schema that was broken.
+ * every fault in the compiler's own form; where `verbose`, with the value and the part of the schema it broke.
  */
-export function checkCode(schema: JsonSchema, name: string): string {
+export function checkCode(schema: JsonSchema, name: string, verbose: boolean): string {
   const ajv = new Ajv2020({
     strict: true,
     allowUnionTypes: true,
     allErrors: true,
-    verbose: false,
+    verbose,
     code: { source: true, esm: true },
   });
   const check = ajv.compile(withoutNotes(schema) as JsonSchema);
@@ -25,7 +25,8 @@ export function checkCode(schema: JsonSchema, name: string): string {
     .replace(/export const validate =/, 'const validate =')
     .replaceAll(
       /const (\w+) = require\("(ajv\/dist\/runtime\/\w+)"\)\.default;?/g,
-      'import $1Module from "$2.js";\nconst $1 = $1Module.default;',
+      // Loaders differ in how much of a CommonJS module they unwrap.
+      'import $1Module from "$2.js";\nconst $1 = typeof $1Module === "function" ? $1Module : $1Module.default;\n',
     );
   if (code.includes('require(')) throw new Error('The compiled check still requires a module.');
   return [

@@ -20,7 +20,7 @@ interface SchemaOutputs {
   /** TypeScript types of a value as written. */
   readonly types?: string;
   /** A check compiled ahead of time, which spares every run the compiler; see `checkCode`. */
-  readonly check?: { readonly file: string; readonly name: string };
+  readonly check?: { readonly file: string; readonly name: string; readonly verbose: boolean };
   /** The defaults of all keys with a fixed path, as a constant. */
   readonly defaults?: { readonly file: string; readonly name: string };
   /** The reference of all keys, for people. */
@@ -31,7 +31,7 @@ const SCHEMAS: readonly SchemaOutputs[] = [
   {
     schema: 'schemas/study.schema.json',
     types: 'src/study/study-file.generated.ts',
-    check: { file: 'src/study/check-study-file.generated.ts', name: 'checkStudyFile' },
+    check: { file: 'src/study/check-study-file.generated.ts', name: 'checkStudyFile', verbose: true },
     defaults: { file: 'src/study/study-defaults.generated.ts', name: 'STUDY_DEFAULTS' },
     keys: {
       file: 'schemas/study-keys.md',
@@ -43,7 +43,7 @@ const SCHEMAS: readonly SchemaOutputs[] = [
   {
     schema: 'schemas/record.schema.json',
     types: 'src/record/study-record.generated.ts',
-    check: { file: 'src/record/check-study-record.generated.ts', name: 'checkStudyRecord' },
+    check: { file: 'src/record/check-study-record.generated.ts', name: 'checkStudyRecord', verbose: false },
   },
 ];
 
@@ -56,7 +56,10 @@ async function outputs(entry: SchemaOutputs): Promise<Map<string, string>> {
   const banner = `// Generated from ${entry.schema} by schemas/generate.ts. Change the schema, then: npx tsx schemas/generate.ts\n`;
   const made = new Map<string, string>();
   if (entry.types !== undefined) made.set(entry.types, await typesCode(text, schema.title ?? 'File', banner));
-  if (entry.check !== undefined) made.set(entry.check.file, banner + checkCode(schema, entry.check.name));
+  if (entry.check !== undefined) {
+    const { file, name, verbose } = entry.check;
+    made.set(file, banner + checkCode(schema, name, verbose));
+  }
   if (entry.defaults !== undefined) {
     made.set(entry.defaults.file, banner + defaultsCode(schema, entry.defaults.name));
   }

@@ -1,0 +1,297 @@
+import type { ErrorObject } from 'ajv';
+import { nearest } from '../expression/nearest.ts';
+import type { Problem, ProblemCode } from '../problem.ts';
+import { type Path, quote, showPath } from './path.ts';
+import { chooseBranches } from './schema-unions.ts';
+import type { Written } from './written.ts';
+
+/** A value or key that the schema does not allow, as a problem, and what to leave out of the further checks. */
+export interface SchemaFault {
+  readonly problem: Problem;
+  /** The value that cannot be used; null where a key is missing. */
+  readonly unusable: Path | null;
+}
+
+interface BrokenSchema {
+  readonly properties?: Readonly<Record<string, { readonly type?: unknown }>>;
+  readonly type?: string | readonly string[];
+  readonly enum?: readonly unknown[];
+  readonly minimum?: number;
+  readonly maximum?: number;
+  readonly exclusiveMinimum?: number;
+  readonly exclusiveMaximum?: number;
+  readonly minItems?: number;
+  readonly maxItems?: number;
+  readonly maxLength?: number;
+  readonly anyOf?: readonly { readonly $ref?: string }[];
+}
+
+/** Translates what the compiled schema found into sentences with places. One sentence for each broken value. */
+export function schemaFaults(errors: readonly ErrorObject[], written: Written): readonly SchemaFault[] {
+  const located = errors.map((error) => ({ error, path: pathOf(error.instancePath, written.value) }));
+  const faults: SchemaFault[] = [];
+  const said = new Set<string>();
+  for (const { error, path } of chooseBranches(located)) {
+    const fault = translate(error, path, written);
+    if (fault === null) continue;
+    // A wrong type breaks limits and lists of allowed values as well; the first sentence is enough.
+    const key = `${showPath(path)} ${error.keyword === 'required' || error.keyword === 'additionalProperties' ? fault.problem.message : ''}`;
+    if (said.has(key)) continue;
+    said.add(key);
+    faults.push(fault);
+  }
+  return faults;
+}
+
+/** The steps of a JSON pointer; a step into an array is a number. */
+function pathOf(pointer: string, top: unknown): Path {
+  let value: unknown = top;
+  return pointer
+    .split('/')
+    .slice(1)
+    .map((step) => {
+      const key = step.replaceAll('~1', '/').replaceAll('~0', '~');
+      const inList = Array.isArray(value);
+      value = (value as Record<string, unknown>)[key];
+      return inList ? Number(key) : key;
+    });
+}
+
+function translate(error: ErrorObject, path: Path, written: Written): SchemaFault | null {
+  const schema = error.parentSchema as BrokenSchema;
+  const name = path.length === 0 ? 'The study' : showPath(path);
+  const value = shown(path, error.data, written);
+  const wrong = (code: ProblemCode, message: string, hint?: string): SchemaFault => ({
+    problem: problem(code, written, path, message, hint),
+    unusable: path,
+  });
+  switch (error.keyword) {
+    case 'additionalProperties': {
+      const key = String(error.params.additionalProperty);
+      const isEmpty = (error.data as Record<string, unknown>)[key] === null;
+      return unknownKey(key, path, Object.keys(schema.properties ?? {}), isEmpty, written);
+    }
+    case 'required': {
+      const place = written.placeOf(path);
+      const message = `${name} lacks the key ${error.params.missingProperty}.`;
+      return { problem: { code: 'key_missing', severity: 'error', place, message }, unusable: null };
+    }
+    case 'propertyNames': {
+      const key = String(error.params.propertyName);
+      const at = [...path, key];
+      const message = `${quote(key)} cannot be the name of a variable.`;
+      const hint =
+        'A name has up to 100 characters, no back-quotes or line breaks, and no blanks at its ends; the header in the data goes under column.';
+      const place = written.keyPlaceOf(at);
+      return {
+        problem: { code: 'value_not_allowed', severity: 'error', place, message, hint },
+        unusable: null,
+      };
+    }
+    case 'type':
+      return wrong(
+        'value_not_allowed',
+        `${name} must be ${typeWords(schema)}, but is ${value}.`,
+        typeHint(error, path, written),
+      );
+    case 'const':
+      return wrong(
+        'value_not_allowed',
+        `${name} is ${value}, and this version of Plumbrule reads study format ${String(error.params.allowedValue)}.`,
+        `Write ${name}: ${String(error.params.allowedValue)}.`,
+      );
+    case 'enum':
+      return notOneOf(name, value, error.data, (schema.enum ?? []).map(String), wrong);
+    case 'minLength':
+      return wrong('value_not_allowed', `${name} is empty.`, 'Write something, or remove the key.');
+    case 'maxLength':
+      return error.propertyName === undefined
+        ? wrong(
+            'value_not_allowed',
+            `${name} is ${value}, but must be ${schema.maxLength === 1 ? 'one character' : `at most ${schema.maxLength} characters`}.`,
+          )
+        : null;
+    case 'minProperties':
+      return wrong('value_not_allowed', `${name} is empty.`, 'Write at least one key under it.');
+    case 'minItems':
+    case 'maxItems':
+      return wrong(
+        'limit_nonsense',
+        `${name} has ${countOf(error.data)}, but must have ${itemWords(schema)}.`,
+      );
+    case 'minimum':
+    case 'maximum':
+    case 'exclusiveMinimum':
+    case 'exclusiveMaximum':
+      return wrong('limit_nonsense', `${name} is ${value}, but must be ${rangeWords(schema)}.`);
+    case 'anyOf': {
+      const expected = EXPECTED[unionKey(schema)] ?? 'of another form';
+      const near = nearForm(error.data, expected);
+      return wrong('value_not_allowed', `${name} is ${value}, but must be ${expected}.`, near);
+    }
+    default:
+      // What follows from another fault: the pattern of a name is told under propertyNames.
+      return error.propertyName === undefined
+        ? wrong('value_not_allowed', `${name} is ${value}, which is not allowed here.`)
+        : null;
+  }
+}
+
+/** A comma inside braces ends a text, and what follows reads as a key without a value. */
+const COMMA_HINT = 'A text with a comma inside braces stands in quotes.';
+
+/** What each union of the schema takes, by the definitions among its branches. A test holds the list complete. */
+export const EXPECTED: Readonly<Record<string, string>> = {
+  scaled_response: "a variable's name or { variable: …, scale: … }",
+  box_cox: 'natural, log, sqrt, reciprocal or { box_cox: … }',
+  'interaction polynomial power bend spline':
+    "a variable's name or one of { interaction: […] }, { polynomial: …, degree: … }, { power: …, to: … }, { bend: …, at: … }, { spline: …, knots: […] }",
+  'polynomial power bend spline':
+    "a variable's name or one of { polynomial: …, degree: … }, { power: …, to: … }, { bend: …, at: … }, { spline: …, knots: […] }",
+};
+
+/** "interaction polynomial power bend spline" of the union of terms. */
+export function unionKey(schema: { readonly anyOf?: readonly { readonly $ref?: string }[] }): string {
+  const names = (schema.anyOf ?? []).flatMap(({ $ref }) => $ref?.split('/').at(-1) ?? []);
+  return names.join(' ');
+}
+
+function nearForm(data: unknown, form: string): string | undefined {
+  const names = [...form.matchAll(/\{ (\w+):/g)].map((found) => found[1]!);
+  const words = form.startsWith('natural') ? [...names, 'natural', 'log', 'sqrt', 'reciprocal'] : names;
+  const keys =
+    typeof data === 'string' ? [data] : typeof data === 'object' && data !== null ? Object.keys(data) : [];
+  for (const key of keys) {
+    const near = nearest(key, words);
+    if (near !== null) return `Did you mean ${near}?`;
+  }
+  return undefined;
+}
+
+function unknownKey(
+  key: string,
+  path: Path,
+  known: readonly string[],
+  isEmpty: boolean,
+  written: Written,
+): SchemaFault {
+  const at = [...path, key];
+  const near = nearest(key, known);
+  const otherwise = isEmpty ? COMMA_HINT : `Keys here are ${listed(known, 'and')}.`;
+  const hint = near === null ? otherwise : `Did you mean ${near}?`;
+  const place = written.keyPlaceOf(at);
+  const message = `${showPath(at)} is not a key here.`;
+  return { problem: { code: 'key_unknown', severity: 'error', place, message, hint }, unusable: at };
+}
+
+function notOneOf(
+  name: string,
+  value: string,
+  data: unknown,
+  allowed: readonly string[],
+  wrong: (code: ProblemCode, message: string, hint?: string) => SchemaFault,
+): SchemaFault {
+  const near = typeof data === 'string' ? nearest(data, allowed) : null;
+  const shownAllowed = allowed.map((word) => (/^[\w-]+$/.test(word) ? word : quote(word)));
+  return wrong(
+    'value_not_allowed',
+    `${name} is ${value}, which is not one of ${listed(shownAllowed, 'and')}.`,
+    near === null ? undefined : `Did you mean ${near}?`,
+  );
+}
+
+function problem(code: ProblemCode, written: Written, path: Path, message: string, hint?: string): Problem {
+  return {
+    code,
+    severity: 'error',
+    place: written.placeOf(path),
+    message,
+    ...(hint === undefined ? {} : { hint }),
+  };
+}
+
+/** "a, b and c" */
+export function listed(words: readonly string[], last: 'and' | 'or'): string {
+  return words.length < 2 ? words.join('') : `${words.slice(0, -1).join(', ')} ${last} ${words.at(-1)}`;
+}
+
+/** A value as a message shows it. */
+function shown(path: Path, data: unknown, written: Written): string {
+  if (data === null || data === undefined) return 'empty';
+  if (typeof data === 'string') return quote(data);
+  if (Array.isArray(data)) return 'a list';
+  if (typeof data === 'object') {
+    const keys = Object.keys(data);
+    return keys.length === 0
+      ? 'an empty mapping'
+      : `a mapping with the ${keys.length === 1 ? 'key' : 'keys'} ${listed(keys.slice(0, 4).map(plainKey), 'and')}`;
+  }
+  return written.textAt(path) ?? String(data);
+}
+
+function plainKey(key: string): string {
+  return /^\w+$/.test(key) ? key : quote(key);
+}
+
+const TYPE_WORDS: Readonly<Record<string, string>> = {
+  string: 'a text',
+  number: 'a number',
+  integer: 'a whole number',
+  boolean: 'true or false',
+  array: 'a list',
+  object: 'a mapping of keys',
+  null: 'empty',
+};
+
+function typeWords(schema: BrokenSchema): string {
+  const types = [schema.type ?? []].flat();
+  return listed(
+    types.filter((type) => type !== 'null').map((type) => TYPE_WORDS[type] ?? type),
+    'or',
+  );
+}
+
+function typeHint(error: ErrorObject, path: Path, written: Written): string | undefined {
+  const types = [(error.parentSchema as BrokenSchema).type ?? []].flat();
+  const data = error.data as unknown;
+  const text = written.textAt(path) ?? '';
+  const key = path.at(-1);
+  if (data === null) {
+    if (path[0] === 'predict' && path[1] === 'rows') return COMMA_HINT;
+    return typeof key === 'string'
+      ? 'Write something under it, or remove the key.'
+      : 'Write something, or remove the "-".';
+  }
+  if (types.includes('string') && (typeof data === 'number' || typeof data === 'boolean'))
+    return `Put it in quotes: "${text}".`;
+  if (types.includes('number') || types.includes('integer')) {
+    if (/^-?\d+,\d+$/.test(text)) return `Write ${text.replace(',', '.')}.`;
+    if (typeof data === 'string' && /^-?[\d.]+$/.test(data)) return 'Write the number without quotes.';
+  }
+  if (types.includes('boolean') && /^(yes|no|on|off)$/i.test(text)) return 'Write true or false.';
+  if (types.includes('array') && typeof data === 'string')
+    return 'Put it in brackets, also where it is only one: [ … ].';
+  return undefined;
+}
+
+function rangeWords(schema: BrokenSchema): string {
+  const words: string[] = [];
+  if (schema.exclusiveMinimum !== undefined) words.push(`above ${schema.exclusiveMinimum}`);
+  if (schema.minimum !== undefined) words.push(`at least ${schema.minimum}`);
+  if (schema.exclusiveMaximum !== undefined) words.push(`below ${schema.exclusiveMaximum}`);
+  if (schema.maximum !== undefined) words.push(`at most ${schema.maximum}`);
+  return listed(words, 'and');
+}
+
+function itemWords({ minItems, maxItems }: BrokenSchema): string {
+  if (minItems !== undefined && minItems === maxItems) return `exactly ${minItems}`;
+  const words: string[] = [];
+  if (minItems !== undefined) words.push(`at least ${minItems}`);
+  if (maxItems !== undefined) words.push(`at most ${maxItems}`);
+  return listed(words, 'and');
+}
+
+function countOf(data: unknown): string {
+  const count = Array.isArray(data) ? data.length : 0;
+  return count === 0 ? 'no items' : count === 1 ? '1 item' : `${count} items`;
+}
