@@ -1,8 +1,6 @@
 import { isUtf8 } from 'node:buffer';
 import type { DataPlan } from '../study/study.ts';
 
-/** Enough text to judge the delimiter by, however small the chunks of the file. */
-const HEAD_BYTES = 65_536;
 /** A first line longer than this is not looked for any further. */
 const LONGEST_HEAD = 1 << 24;
 
@@ -28,11 +26,13 @@ export interface DecodedText {
 
 /**
  * Bytes to text, cut after line ends: no character of UTF-8 holds the byte of a line end, so every piece can be
- * decoded by itself. A byte-order mark is dropped.
+ * decoded by itself. A byte-order mark is dropped. The first piece is gathered from at least `headSize` bytes, however
+ * small the chunks of the file.
  */
 export async function decodeText(
   bytes: AsyncGenerator<Buffer>,
   declared: DataPlan['format']['encoding'],
+  headSize: number,
 ): Promise<DecodedText> {
   const encoding = declared ?? 'utf-8';
   const decode = encoding === 'utf-8' ? decodeUtf8 : decodeLatin1;
@@ -41,7 +41,7 @@ export async function decodeText(
   let held = Buffer.alloc(0);
   let newline: '\n' | '\r' | null = null;
   let ended = false;
-  for (let wanted = HEAD_BYTES; ; wanted *= 2) {
+  for (let wanted = Math.max(4, headSize); ; wanted *= 2) {
     let length = held.length;
     while (length < wanted && !ended) {
       const next = await bytes.next();

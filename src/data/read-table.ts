@@ -24,6 +24,8 @@ export interface ReadTableOptions {
   readonly require?: 'all' | ReadonlySet<string>;
   /** Bytes read at a time; the table does not depend on it. */
   readonly chunkSize?: number;
+  /** Bytes by which the delimiter is judged where none is declared. */
+  readonly headSize?: number;
 }
 
 /**
@@ -68,13 +70,13 @@ async function readRows(
   plan: DataPlan,
   source: ByteSource,
   report: Report,
-  { limit = 20, onProgress, require = 'all' }: ReadTableOptions,
+  { limit = 20, onProgress, require = 'all', headSize = 65_536 }: ReadTableOptions,
 ): Promise<Omit<Table, 'sha256'> | null> {
   const whole = require === 'all';
   const required = whole ? new Set(plan.variables.map((variable) => variable.name)) : require;
   const optional = new Set(plan.rowId === null ? [] : [plan.rowId]);
 
-  const decoded = await decodeText(source.bytes, plan.format.encoding);
+  const decoded = await decodeText(source.bytes, plan.format.encoding, headSize);
   if (decoded.utf16) {
     report(
       fileProblem(plan, 'cell_encoding', 'begins with the byte-order mark of UTF-16.', 'Save it as UTF-8.'),
@@ -93,7 +95,6 @@ async function readRows(
   let broken: Problem | null = null;
 
   for await (const batch of splitRows(decoded.pieces, { delimiter, newline }, plan.file)) {
-    if (batch.replaced) encoding.look(batch, header?.cells ?? batch.cells[0] ?? null);
     broken = batch.fault;
     let first = 0;
     if (header === null) {
@@ -102,12 +103,14 @@ async function readRows(
       const match = matchHeader(plan, cells, batch.lines[0]!, required, optional, report);
       const fillings = startColumns(plan, match.found, faults, report);
       if (fillings === null || (fillings.length === 0 && !match.complete)) {
+        if (batch.replaced) encoding.look([cells], batch.lines, cells);
         encoding.settle(report);
         return null;
       }
       header = { cells, match, fillings };
       first = 1;
     }
+    if (batch.replaced) encoding.look(batch.cells, batch.lines, header.cells);
     const rows = takeWholeRows(batch, first, header.cells.length, faults);
     for (const { builder } of header.fillings) builder.fill(rows, rowCount);
     lines.push(rows.lines);

@@ -55,15 +55,10 @@ export async function* splitRows(
   for await (const piece of pieces) {
     rest += piece.text;
     replaced ||= piece.replaced;
-    const nul = piece.text.includes('\0');
-    if (rest.length < tryAt && !piece.last && !nul) continue;
-    const text = rest;
-    if (nul) {
-      const place = line + count(text.slice(0, text.indexOf('\0')), newline);
-      yield { cells: [], lines: [], replaced, fault: nulFault(file, place) };
-      return;
-    }
-    const { data, errors, meta } = parse(text, !piece.last);
+    const nul = piece.text.includes('\0') ? rest.indexOf('\0') : -1;
+    if (rest.length < tryAt && !piece.last && nul < 0) continue;
+    const text = nul < 0 ? rest : rest.slice(0, nul);
+    const { data, errors, meta } = parse(text, !piece.last || nul >= 0);
     // A fault in a row that is not whole yet may only be for want of the text to come.
     const broken = errors.find((error) => error.row < data.length);
     if (broken !== undefined) data.length = broken.row;
@@ -88,6 +83,8 @@ export async function* splitRows(
     if (broken !== undefined) {
       const opens = startLine + count(text.slice(0, broken.index), newline);
       fault = quoteFault(file, opens, broken.code === 'MissingQuotes');
+    } else if (nul >= 0) {
+      fault = nulFault(file, startLine + count(text, newline));
     } else if (piece.last) {
       rest = '';
     } else {

@@ -1,11 +1,14 @@
 import type { Problem, Report } from '../problem.ts';
 import type { DataPlan } from '../study/study.ts';
-import type { RowBatch } from './split-rows.ts';
 
 /** Rows in which bytes were not UTF-8: one problem for the file, with the first place and the count. */
 export interface EncodingWatch {
-  /** Looks through rows decoded with replacements. `header` names the columns once it is known. */
-  readonly look: (batch: RowBatch, header: readonly string[] | null) => void;
+  /** Looks through rows decoded with replacements, the header among them. */
+  readonly look: (
+    cells: readonly (readonly string[])[],
+    lines: readonly number[],
+    header: readonly string[],
+  ) => void;
   /** Reports what was found, and says whether all was UTF-8. */
   readonly settle: (report: Report) => boolean;
 }
@@ -14,15 +17,15 @@ export function watchEncoding(plan: DataPlan): EncodingWatch {
   let rows = 0;
   let first: { row: number; variable: string | null } | null = null;
   return {
-    look: ({ cells, lines }, header) => {
+    look: (cells, lines, header) => {
       cells.forEach((row, index) => {
         const position = row.findIndex((cell) => cell.includes('\ufffd'));
         if (position < 0) return;
         rows++;
         if (first !== null) return;
-        const column = header?.[position]?.trim();
+        const column = header[position]?.trim() || null;
         const declared = plan.variables.find((variable) => variable.column === column);
-        first = { row: lines[index]!, variable: declared?.name ?? column ?? null };
+        first = { row: lines[index]!, variable: declared?.name ?? column };
       });
     },
     settle: (report) => {

@@ -56,7 +56,7 @@ test.each([
   for (const text of [lines.join(end), `${lines.join(end)}${end}`, `${lines.join(end)}${end}${end}`]) {
     for (const chunkSize of [1, 2, 3, 7, 65_536]) {
       const own = plan([variable('a'), variable('b'), variable('v', 'text')]);
-      const { table, problems } = await read(text, own, { chunkSize });
+      const { table, problems } = await read(text, own, { chunkSize, headSize: chunkSize });
       expect(problems).toEqual([]);
       expect(values(table, 'b')).toEqual([2, 4, 6]);
       expect(values(table, 'v')).toEqual(['x', 'y', 'z']);
