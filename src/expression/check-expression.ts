@@ -77,11 +77,14 @@ function checkName(check: Check, node: Expression & { kind: 'name' }, besideWord
   return null;
 }
 
+/** A name that needs no back-quotes. */
+const PLAIN_NAME = /^(?!(?:and|or|not|true|false)$)[A-Za-z_][A-Za-z0-9_]*$/;
+
 function nameHint(check: Check, name: string): string | undefined {
   const lower = name.toLowerCase();
   if (lower === 'true' || lower === 'false') return `Write ${lower} in small letters.`;
   const near = nearest(name, check.known);
-  if (near !== null) return `Did you mean ${near}?`;
+  if (near !== null) return `Did you mean ${PLAIN_NAME.test(near) ? near : `\`${near}\``}?`;
   const called = functionNamed(name);
   if (called !== null) return `${name} is a function: write ${callPattern(called)}.`;
   return undefined;

@@ -6,10 +6,11 @@ import { applyWeights } from './apply-weights.ts';
 import { checkScales } from './check-scales.ts';
 import { baseVariables, evaluateDerived } from './derive.ts';
 import { gatherColumn, gatherLines } from './gather.ts';
+import { isMissing } from './is-missing.ts';
 import { rowCountText } from './line-list.ts';
 import { neededVariables, sampleVariables } from './needed-variables.ts';
 import { rowIds } from './row-ids.ts';
-import { eachMissing, loseMissing, loseWhere, type RowLosses, rowsLeft, startLosses } from './row-losses.ts';
+import { loseMissing, loseWhere, type RowLosses, rowsLeft, startLosses } from './row-losses.ts';
 import type { Sample } from './sample.ts';
 import { timeOrder } from './time-order.ts';
 import { warnOfUndefined } from './warn-of-undefined.ts';
@@ -25,7 +26,7 @@ export function prepareSample(study: Study, table: Table, report: Report): Sampl
   const needed = neededVariables(study);
   const rows = startLosses(table.rowCount);
 
-  if (table.badRows !== null) {
+  if (table.badRows?.includes(1)) {
     loseWhere(rows, table.badRows, { because: 'bad value', kind: 'bad_value', variable: null });
   }
   applyExclusions(study, table, derived, rows, report);
@@ -75,11 +76,8 @@ function anyAllMissing(
   if (left === 0) return false;
   const empty = new Set<string>();
   for (const variable of needed) {
-    let missing = 0;
-    eachMissing(columns.get(variable)!, (row) => {
-      if (rows.reasonOf[row] === 0) missing++;
-    });
-    if (missing < left) continue;
+    const column = columns.get(variable)!;
+    if (rows.reasonOf.some((reason, row) => reason === 0 && !isMissing(column, row))) continue;
     const bases = [...baseVariables(variable, study.derive)];
     const explained = bases.some((base) => base !== variable && empty.has(base));
     empty.add(variable);

@@ -70,7 +70,7 @@ export function loseMissing(
 }
 
 /** Calls `visit` with every row in which the column has no value. */
-export function eachMissing(column: Column, visit: (row: number) => void): void {
+function eachMissing(column: Column, visit: (row: number) => void): void {
   switch (column.kind) {
     case 'category':
       for (let row = 0; row < column.codes.length; row++) if (column.codes[row]! < 0) visit(row);

@@ -149,6 +149,11 @@ describe('faults', () => {
     expect(check('headwnd * 2 + log(headwnd)').faults).toHaveLength(2);
   });
 
+  test('a proposed name that is no plain word is given in back-quotes', () => {
+    const { faults } = checkExpression(tree('wind_speed + 1'), () => null, ['wind speed']);
+    expect(faults[0]!.hint).toBe('Did you mean `wind speed`?');
+  });
+
   test('any tree is checked without a throw, and every fault lies inside', () => {
     fc.assert(
       fc.property(anyExpression, (node) => {
