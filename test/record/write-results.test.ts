@@ -1,3 +1,4 @@
+import { spawn } from 'node:child_process';
 import { chmod, mkdir, mkdtemp, readdir, readFile, rm, symlink, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join, relative } from 'node:path';
@@ -129,5 +130,37 @@ describe('writeResults', () => {
     await symlink(join(folder, 'real'), join(folder, 'link'));
     await write(join(folder, 'link'), first);
     expect(Object.keys(await tree(join(folder, 'real')))).toHaveLength(3);
+  });
+
+  test('a run that is killed while it writes leaves the earlier results as they were', async () => {
+    const out = join(folder, 'results');
+    await write(out, first);
+    const before = await tree(out);
+    const module = new URL('../../src/record/write-results.ts', import.meta.url).href;
+    const script = `
+      const { writeResults } = await import(${JSON.stringify(module)});
+      async function* endless() {
+        for (;;) yield 'x'.repeat(1000);
+      }
+      const files = [{ name: 'report.md', content: 'report 2' }, { name: 'record.json', content: endless() }];
+      await writeResults(${JSON.stringify(out)}, files, () => {});
+    `;
+    const args = ['--import', import.meta.resolve('tsx'), '--input-type=module', '-e', script];
+    const child = spawn(process.execPath, args, { stdio: 'ignore' });
+    const ended = new Promise((resolve) => child.on('exit', resolve));
+    const begun = async () =>
+      Object.entries(await tree(out)).some(
+        ([name, text]) => name.endsWith('record.json') && text.startsWith('xx'),
+      );
+    while (child.exitCode === null && !(await begun()))
+      await new Promise((resolve) => setTimeout(resolve, 20));
+    child.kill('SIGKILL');
+    await ended;
+    expect(child.signalCode).toBe('SIGKILL');
+    const after = Object.entries(await tree(out)).filter(([name]) => !name.startsWith('.plumbrule-'));
+    expect(Object.fromEntries(after)).toEqual(before);
+    // The next run goes through as if nothing had been.
+    expect(await write(out, [{ name: 'record.json', content: 'record 3' }])).toEqual([]);
+    expect(await readFile(join(out, 'record.json'), 'utf8')).toBe('record 3');
   });
 });

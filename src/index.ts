@@ -1,0 +1,21 @@
+/**
+ * Plumbrule as a library: the same stages as the command line, as functions. Everything that can be wrong
+ * with a study or its data comes back as problems with a place; only a fault of the program throws.
+ */
+export type { Column, Table } from './data/table.ts';
+export type { Sample } from './prepare/sample.ts';
+export type { Place, Problem, ProblemCode, Report, Severity } from './problem.ts';
+export type {
+  RecordCandidate,
+  RecordCoefficient,
+  RecordExamination,
+  RecordFinding,
+  RecordModel,
+  RecordPrediction,
+  RecordTerm,
+  RecordVariable,
+  StudyRecord,
+} from './record/record.ts';
+export type { ResidualColumns } from './record/tables.ts';
+export { type CheckedStudy, checkStudy, type RunOptions, type RunResult, runStudy } from './run.ts';
+export type { Study } from './study/study.ts';

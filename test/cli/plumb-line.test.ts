@@ -1,0 +1,95 @@
+import fc from 'fast-check';
+import { describe, expect, test } from 'vitest';
+import { plumbLine, printable, tableLines, wrapped } from '../../src/cli/plumb-line.ts';
+import { collecting } from './collect.ts';
+
+describe('plumbLine', () => {
+  test('hangs labels and answers on one line, with the bob at the end', () => {
+    const { terminal } = collecting({ width: 40 });
+    const text = plumbLine(
+      [
+        { label: 'asked', paragraphs: ['How much gas does a firing take?'] },
+        {
+          label: 'careful',
+          paragraphs: [{ mark: '·', text: 'A first caution, of some length.' }, 'Another.'],
+        },
+        { label: 'written', paragraphs: [{ line: 'a  b' }, { line: 'results/x' }] },
+      ],
+      terminal,
+    );
+    expect(text).toBe(
+      [
+        '    asked │ How much gas does a firing',
+        '          │ take?',
+        '          │',
+        '  careful │ · A first caution, of some',
+        '          │   length.',
+        '          │ Another.',
+        '          │',
+        '  written │ a  b',
+        '          ▼ results/x',
+        '',
+      ].join('\n'),
+    );
+  });
+
+  test('colour codes stand only where the terminal shows them', () => {
+    const sections = [{ label: 'asked', paragraphs: ['What?'] }];
+    expect(plumbLine(sections, collecting().terminal)).not.toContain('\u001b');
+    expect(plumbLine(sections, collecting({ colour: true }).terminal)).toContain('\u001b[1masked\u001b[22m');
+  });
+
+  test('a text from the data cannot steer the terminal', () => {
+    const evil = 'a\u001b[2Jb\u0007c\u009bd\ne\u202ef';
+    const text = plumbLine(
+      [
+        {
+          label: 'data',
+          paragraphs: [
+            evil,
+            { mark: '·', text: evil },
+            ...tableLines([{ heading: 'x', align: 'left' }], [[evil]]),
+          ],
+        },
+      ],
+      collecting().terminal,
+    );
+    expect(text.replaceAll('\n', '')).not.toMatch(/[\p{Cc}\u202e]/u);
+    expect(printable(evil)).toBe('a\ufffd[2Jb\ufffdc\ufffdd e\ufffdf');
+  });
+});
+
+describe('wrapped', () => {
+  test('keeps words and no line is too long unless its one word is', () => {
+    fc.assert(
+      fc.property(fc.array(fc.stringMatching(/^[a-zé\u00a0]{1,12}$/), { minLength: 1 }), (words) => {
+        const lines = wrapped(words.join(' '), 10);
+        expect(lines.join(' ')).toBe(words.join(' '));
+        for (const line of lines) expect(line.length <= 10 || !line.includes(' ')).toBe(true);
+      }),
+    );
+  });
+
+  test('a number keeps its unit', () => {
+    expect(wrapped('takes 1\u202f234\u00a0L', 8)).toEqual(['takes', '1\u202f234\u00a0L']);
+    expect(wrapped('', 8)).toEqual(['']);
+  });
+});
+
+describe('tableLines', () => {
+  test('aligns, shortens, and takes no place for marks above letters', () => {
+    const lines = tableLines(
+      [
+        { heading: 'row', align: 'left', widest: 6 },
+        { heading: 'estimate', align: 'right' },
+      ],
+      [['cafe\u0301', '1.5'], ['a long name', '−12'], ['short']],
+    );
+    expect(lines).toEqual([
+      { line: 'row     estimate' },
+      { line: 'cafe\u0301         1.5' },
+      { line: 'a lon…       −12' },
+      { line: 'short' },
+    ]);
+  });
+});
