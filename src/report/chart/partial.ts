@@ -1,0 +1,80 @@
+import { bisectLeft } from 'd3-array';
+import { area, line } from 'd3-shape';
+import { isoDate } from '../numbers.ts';
+import type { RecordExamination, RecordTerm } from '../record-type.ts';
+import { type Lexicon, labelOf, unitOf } from '../words/lexicon.ts';
+import { axisTitle, bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import { differenceTicks, differenceTitle } from './effects.ts';
+import { dots, drawing, element, type Figure } from './svg.ts';
+
+const HEIGHT = 280;
+
+type Curve = NonNullable<RecordTerm['curve']>;
+
+/** Value of the curve at x, between its points by straight lines; NaN for an empty curve. */
+export function curveAt(curve: Pick<Curve, 'x' | 'y'>, x: number): number {
+  const { x: xs, y: ys } = curve;
+  if (xs.length < 2) return ys[0] ?? Number.NaN;
+  const right = Math.min(Math.max(bisectLeft(xs, x), 1), xs.length - 1);
+  const [x0, x1, y0, y1] = [xs[right - 1]!, xs[right]!, ys[right - 1]!, ys[right]!];
+  return x1 === x0 ? y0 : y0 + ((x - x0) / (x1 - x0)) * (y1 - y0);
+}
+
+/** The partial relationship of a numeric variable: its curve and band, with each row's component plus residual. */
+export function partialChart(
+  lexicon: Lexicon,
+  name: string,
+  curve: Curve,
+  points: RecordExamination['points'] | null,
+  caption: string,
+): Figure | null {
+  const usable = curve.x
+    .map((x, i) => ({ x, y: curve.y[i]!, lower: curve.lower[i] ?? null, upper: curve.upper[i] ?? null }))
+    .filter((p) => Number.isFinite(p.x) && Number.isFinite(p.y));
+  if (usable.length < 2) return null;
+  const numbers = points?.values.find((v) => v.variable === curve.variable)?.numbers ?? null;
+  const cloud =
+    numbers === null || points === null
+      ? []
+      : numbers
+          .map((x, i) => [x, curveAt(curve, x) + points.residual[i]!] as const)
+          .filter(([x, y]) => Number.isFinite(x) && Number.isFinite(y));
+  const plot = plotOf(HEIGHT);
+  const x = roomy(spanOf([...usable.map((p) => p.x), ...cloud.map((p) => p[0])]), [plot.left, plot.right]);
+  const y = roomy(spanOf([0, ...usable.flatMap((p) => [p.y, p.lower, p.upper]), ...cloud.map((p) => p[1])]), [
+    plot.bottom,
+    plot.top,
+  ]);
+  const banded = usable.filter((p) => p.lower !== null && p.upper !== null);
+  const band = area<(typeof usable)[number]>()
+    .x((p) => x(p.x))
+    .y0((p) => y(p.lower as number))
+    .y1((p) => y(p.upper as number))
+    .digits(1)(banded);
+  const path = line<(typeof usable)[number]>(
+    (p) => x(p.x),
+    (p) => y(p.y),
+  ).digits(1)(usable);
+  const label = labelOf(lexicon, curve.variable);
+  const dated = lexicon.variables.get(curve.variable)?.type === 'date';
+  const ticks = ticksOf(x, dated ? 4 : 6).map((t) =>
+    dated ? { value: t.value, text: isoDate(t.value) } : t,
+  );
+  return {
+    svg: drawing(
+      name,
+      { width: WIDTH, height: HEIGHT },
+      `Partial relationship with ${label}`,
+      caption,
+      leftAxis(plot, y, differenceTicks(lexicon, y, 5), `${differenceTitle(lexicon)}, the other terms held`) +
+        bottomAxis(plot, x, ticks, axisTitle(label, unitOf(lexicon, curve.variable))) +
+        dots(
+          cloud.map(([a, b]) => [x(a), y(b)] as const),
+          'dots faint',
+        ) +
+        (band === null || banded.length < 2 ? '' : element('path', { class: 'band', d: band })) +
+        element('path', { class: 'curve', d: path ?? '' }),
+    ),
+    caption,
+  };
+}

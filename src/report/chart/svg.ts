@@ -1,0 +1,84 @@
+/** SVG as text. Everything that comes from a study passes through `escaped`; no path ever holds a NaN. */
+
+/** A drawing with the sentence that it shows. */
+export interface Figure {
+  /** The drawing: one `<svg>` element with title and description, or an empty string where there is none. */
+  readonly svg: string;
+  /** The finding that it shows, as a sentence. */
+  readonly caption: string;
+}
+
+export function escaped(text: string): string {
+  return (
+    text
+      .replace(/&/g, '&amp;')
+      .replace(/</g, '&lt;')
+      .replace(/>/g, '&gt;')
+      .replace(/"/g, '&quot;')
+      .replace(/'/g, '&#39;')
+      // Characters that XML does not allow would break a drawing that is saved by itself.
+      // biome-ignore lint/suspicious/noControlCharactersInRegex: these are the characters to be taken out
+      .replace(/[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]/g, '')
+  );
+}
+
+/** A coordinate with one decimal; a number that is not finite throws, since it means a fault of ours. */
+export function at(x: number): string {
+  if (!Number.isFinite(x)) throw new Error('A drawing was given a coordinate that is not a number.');
+  const text = x.toFixed(1);
+  return text.endsWith('.0') ? text.slice(0, -2).replace(/^-0$/, '0') : text.replace(/^-0\.0$/, '0');
+}
+
+type Attributes = Readonly<Record<string, string | number | null>>;
+
+/** An element; numbers are coordinates, null leaves the attribute out. `inner` is SVG, already escaped. */
+export function element(name: string, attributes: Attributes, inner = ''): string {
+  const written = Object.entries(attributes)
+    .filter(([, value]) => value !== null)
+    .map(([key, value]) => ` ${key}="${typeof value === 'number' ? at(value) : escaped(value as string)}"`)
+    .join('');
+  return inner === '' ? `<${name}${written}/>` : `<${name}${written}>${inner}</${name}>`;
+}
+
+/** A piece of text. */
+export function label(x: number, y: number, text: string, className: string, anchor = 'start'): string {
+  return element(
+    'text',
+    { x, y, class: className, 'text-anchor': anchor === 'start' ? null : anchor },
+    escaped(text),
+  );
+}
+
+/** Cuts a text that would run out of its place; the full text stands in the page's tables. */
+export function clipped(text: string, longest: number): string {
+  const letters = [...text];
+  return letters.length <= longest
+    ? text
+    : `${letters
+        .slice(0, longest - 1)
+        .join('')
+        .trimEnd()}…`;
+}
+
+/** The whole drawing. `name` is unique on the page: it makes the ids of title and description. */
+export function drawing(
+  name: string,
+  size: { readonly width: number; readonly height: number },
+  title: string,
+  description: string,
+  inner: string,
+): string {
+  return `<svg class="chart" viewBox="0 0 ${at(size.width)} ${at(size.height)}" role="img" aria-labelledby="${name}-t ${name}-d"><title id="${name}-t">${escaped(title)}</title><desc id="${name}-d">${escaped(description)}</desc>${inner}</svg>`;
+}
+
+/**
+ * Many dots as one path of zero-length strokes with round ends: a tenth of the size of as many circles.
+ * Dots that fall on one another at a tenth of a unit are drawn once.
+ */
+export function dots(points: readonly (readonly [number, number])[], className: string): string {
+  const seen = new Set<string>();
+  for (const [x, y] of points) {
+    if (Number.isFinite(x) && Number.isFinite(y)) seen.add(`M${at(x)} ${at(y)}h0`);
+  }
+  return seen.size === 0 ? '' : `<path class="${className}" d="${[...seen].join('')}"/>`;
+}

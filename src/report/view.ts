@@ -1,0 +1,265 @@
+import type { Figure } from './chart/svg.ts';
+import type { Caution } from './words/caution.ts';
+
+/**
+ * What a template is given: everything already said in words and formatted numbers, so that a template
+ * only arranges. Every key is always there; what does not apply is null, an empty list or false. Text is
+ * plain text: the HTML templates escape it, and the Markdown view carries it escaped for Markdown.
+ */
+export interface ReportView {
+  readonly title: string;
+  /** The question as declared; null where none is. */
+  readonly question: string | null;
+  /** "plumbrule 0.1.0". */
+  readonly tool: string;
+  /** Whether a candidate was admitted and chosen. */
+  readonly hasModel: boolean;
+  /** The first screen. */
+  readonly head: HeadView;
+  readonly data: SourceView;
+  readonly tried: TriedView;
+  /** What the chosen model says; null where no candidate was admitted. */
+  readonly says: SaysView | null;
+  /** Whether it can be trusted; null with the model. */
+  readonly trust: TrustView | null;
+  /** Predictions; null where none were asked for or no model was chosen. */
+  readonly predicts: PredictsView | null;
+  readonly careful: CarefulView;
+  readonly again: AgainView;
+}
+
+export interface HeadView {
+  /** The answer: one to three sentences. */
+  readonly answer: readonly string[];
+  /** How closely the chosen model follows the data; null without a model. */
+  readonly fit: string | null;
+  /** The predictions asked for, up to six; the total last. */
+  readonly predictions: readonly HeadPrediction[];
+  /** "90 %": confidence of the intervals beside the predictions. */
+  readonly predictionConfidence: string;
+  /** How many predictions are not among those above; 0 for none. */
+  readonly predictionsMore: number;
+  /** Three to five lines to know before relying on the answer, most important first. */
+  readonly beware: readonly string[];
+  /** "All 2 acceptance criteria are met."; null where the study declares none. */
+  readonly acceptance: string | null;
+  readonly criteria: readonly CriterionView[];
+  /** Study, data and date range in one line. */
+  readonly line: string;
+}
+
+export interface HeadPrediction {
+  readonly label: string;
+  /** With its unit. */
+  readonly estimate: string;
+  /** "475 to 563 L". */
+  readonly interval: string;
+  readonly outside: boolean;
+  readonly total: boolean;
+}
+
+export interface CriterionView {
+  readonly name: string;
+  readonly value: string;
+  readonly limit: string;
+  readonly passed: boolean;
+  /** "met" or "missed". */
+  readonly word: string;
+}
+
+export interface SourceView {
+  readonly sentence: string;
+  readonly file: string;
+  readonly dates: string | null;
+  readonly rowsRead: string;
+  readonly rowsUsed: string;
+  /** Each loss between rows read and rows used. */
+  readonly losses: readonly { readonly rows: string; readonly because: string }[];
+  readonly variables: readonly VariableView[];
+  /** Other variables of the contract that the study does not use. */
+  readonly unused: string | null;
+  readonly contract: string;
+  readonly badValues: readonly {
+    readonly row: string;
+    readonly variable: string;
+    readonly text: string;
+    readonly because: string;
+  }[];
+  readonly ignored: string | null;
+}
+
+export interface VariableView {
+  readonly name: string;
+  readonly label: string;
+  /** Whether the label says more than the name. */
+  readonly labelled: boolean;
+  readonly unit: string;
+  readonly usedAs: string;
+  /** "20 to 140" with the unit, or the levels with their rows. */
+  readonly range: string;
+  /** The middle half of the values; an en dash where it has none. */
+  readonly middle: string;
+  readonly mean: string;
+  readonly missing: string;
+  readonly derivedFrom: string | null;
+}
+
+export interface TriedView {
+  readonly rule: readonly string[];
+  /** Admission rules in force, a sentence each. */
+  readonly admission: readonly string[];
+  readonly because: string;
+  /** Name of the criterion, as a column heading. */
+  readonly criterion: string;
+  /** Whether candidates carry a value of that criterion. */
+  readonly ranked: boolean;
+  readonly candidates: readonly CandidateView[];
+  readonly chart: Figure | null;
+  /** Partial F of nested pairs: those that decided, or all where there are few. */
+  readonly pairs: readonly PairView[];
+  readonly pairsNote: string | null;
+}
+
+export interface CandidateView {
+  readonly rank: string;
+  readonly name: string;
+  readonly terms: string;
+  /** Scale of its response where it differs from the study's; else null. */
+  readonly scale: string | null;
+  readonly value: string;
+  readonly difference: string;
+  readonly coefficients: string;
+  readonly adjustedRSquared: string;
+  readonly admitted: boolean;
+  readonly chosen: boolean;
+  /** "chosen", "admitted", or why it was refused. */
+  readonly verdict: string;
+  /** Columns left out because they depend on others, as sentences. */
+  readonly dropped: readonly string[];
+}
+
+export interface PairView {
+  readonly smaller: string;
+  readonly larger: string;
+  readonly statistic: string;
+  readonly freedom: string;
+  readonly pValue: string;
+  readonly decided: boolean;
+}
+
+export interface SaysView {
+  readonly candidate: string;
+  readonly fit: string;
+  /** How to read it where the scale is not natural; else null. */
+  readonly scaleNote: string | null;
+  readonly equation: {
+    readonly left: string;
+    readonly text: string;
+    readonly summands: readonly { readonly sign: string; readonly number: string; readonly factor: string }[];
+  };
+  /** Overall F in a sentence; null where it is not defined. */
+  readonly overall: string | null;
+  readonly ladder: Figure | null;
+  readonly terms: readonly TermView[];
+  readonly coefficients: readonly CoefficientView[];
+  /** "95 %". */
+  readonly confidence: string;
+  /** Quantity and unit of the coefficients: "fuel burned, L". */
+  readonly quantity: string;
+}
+
+export interface TermView {
+  readonly heading: string;
+  readonly sentences: readonly string[];
+  /** Joint test of the term; null where nothing can be tested. */
+  readonly test: string | null;
+  readonly chart: Figure | null;
+  /** Levels or slopes where there are too many for sentences. */
+  readonly rows: readonly { readonly name: string; readonly estimate: string; readonly interval: string }[];
+}
+
+export interface CoefficientView {
+  readonly name: string;
+  readonly unit: string;
+  readonly estimate: string;
+  readonly standardError: string;
+  readonly interval: string;
+  readonly pValue: string;
+  readonly vif: string;
+}
+
+export interface TrustView {
+  /** How many findings call for care, in a sentence. */
+  readonly summary: string;
+  readonly findings: readonly FindingView[];
+  readonly fitted: Figure;
+  readonly counts: readonly string[];
+  readonly rows: readonly InfluentialRowView[];
+  readonly arithmetic: string;
+}
+
+export interface FindingView {
+  readonly question: string;
+  /** "Nothing to see", "Worth a look", "Take care". */
+  readonly word: string;
+  /** 0, 1 or 2. */
+  readonly concern: number;
+  readonly verdict: string;
+  readonly evidence: string | null;
+  readonly advice: string | null;
+  readonly charts: readonly Figure[];
+}
+
+export interface InfluentialRowView {
+  readonly row: string;
+  readonly id: string;
+  readonly observed: string;
+  readonly fitted: string;
+  readonly residual: string;
+  readonly leverage: string;
+  readonly distance: string;
+}
+
+export interface PredictsView {
+  readonly rows: readonly PredictionView[];
+  /** Names of the variables that rows are predicted at. */
+  readonly chart: Figure | null;
+  readonly total: {
+    readonly rows: string;
+    readonly estimate: string;
+    readonly interval: string;
+    readonly mean: string | null;
+  } | null;
+  readonly notes: readonly string[];
+  readonly confidence: string;
+  /** Whether a mean stands beside the median. */
+  readonly hasMean: boolean;
+}
+
+export interface PredictionView {
+  readonly label: string;
+  /** "cargo 80 t, speed 9 kn". */
+  readonly values: string;
+  readonly estimate: string;
+  readonly mean: string;
+  readonly meanInterval: string;
+  readonly newInterval: string;
+  readonly inside: boolean;
+  /** "inside the data", or how it lies outside. */
+  readonly place: string;
+}
+
+export interface CarefulView {
+  readonly warnings: readonly { readonly about: string; readonly text: string }[];
+  readonly cautions: readonly Caution[];
+}
+
+export interface AgainView {
+  /** Commands to type; in Markdown not escaped, since they stand in a code block. */
+  readonly commands: readonly string[];
+  readonly files: readonly { readonly role: string; readonly name: string; readonly sha256: string }[];
+  readonly tool: string;
+  readonly format: string;
+  readonly reading: string;
+  readonly settings: readonly { readonly key: string; readonly value: string; readonly written: string }[];
+}

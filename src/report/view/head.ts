@@ -1,0 +1,51 @@
+import { percent, rangeWithUnit, rounded, withUnit } from '../numbers.ts';
+import type { StudyRecord } from '../record-type.ts';
+import type { HeadPrediction, HeadView } from '../view.ts';
+import { acceptanceSentence, acceptanceValue, criterionLabel } from '../words/acceptance.ts';
+import { answerSentences, fitSentence } from '../words/answer.ts';
+import { bewareLines } from '../words/beware.ts';
+import { studyLine } from '../words/data.ts';
+import type { Lexicon } from '../words/lexicon.ts';
+import { predictionRounding } from '../words/prediction.ts';
+
+const ROWS = 6;
+
+export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
+  const chosen = record.candidates.find((c) => c.name === record.model?.candidate);
+  return {
+    answer: answerSentences(record, lexicon),
+    fit: chosen === undefined ? null : fitSentence(lexicon, chosen, record.candidates.length),
+    predictions: headPredictions(record, lexicon),
+    predictionConfidence: percent(record.study.prediction_interval),
+    predictionsMore: Math.max(0, record.predictions.length - ROWS),
+    beware: bewareLines(record),
+    acceptance: acceptanceSentence(record.acceptance),
+    criteria: record.acceptance.map((c) => ({
+      name: criterionLabel(c.criterion),
+      value: acceptanceValue(c),
+      limit: c.limit,
+      passed: c.passed,
+      word: c.passed ? 'met' : 'missed',
+    })),
+    line: studyLine(record),
+  };
+}
+
+function headPredictions(record: StudyRecord, { response }: Lexicon): HeadPrediction[] {
+  const said = (p: {
+    estimate: number;
+    lower: number;
+    upper: number;
+  }): { estimate: string; interval: string } => {
+    const rounding = predictionRounding(p);
+    return {
+      estimate: withUnit(rounded(p.estimate, rounding), response.unit),
+      interval: rangeWithUnit(p.lower, p.upper, rounding, response.unit),
+    };
+  };
+  const rows = record.predictions
+    .slice(0, ROWS)
+    .map((p) => ({ label: p.label, ...said(p), outside: p.outside.length > 0, total: false }));
+  const total = record.prediction_total;
+  return total === null ? rows : [...rows, { label: 'Total', ...said(total), outside: false, total: true }];
+}

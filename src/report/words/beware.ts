@@ -1,0 +1,86 @@
+import { count, percent } from '../numbers.ts';
+import type { StudyRecord } from '../record-type.ts';
+import { acceptanceValue, criterionLabel } from './acceptance.ts';
+import { listed, raised, stopped } from './lexicon.ts';
+
+/** At least this many lines stand on the first screen, and at most that many. */
+const FEWEST = 3;
+const MOST = 5;
+
+/**
+ * "Before you rely on this": most important first. What was missed or found comes before what is always
+ * true; the standing cautions fill the list up to three.
+ */
+export function bewareLines(record: StudyRecord): string[] {
+  const findings = record.examination?.findings ?? [];
+  const lines = [
+    ...missedLines(record),
+    ...findings.filter((f) => f.concern === 2).map((f) => findingLine(f)),
+    ...outsideLine(record),
+    ...record.warnings.map((w) => raised(stopped(w.text))),
+    ...findings.filter((f) => f.concern === 1).map((f) => findingLine(f)),
+    ...lossLine(record),
+  ];
+  const unique = [...new Set(lines)];
+  const standing = standingLines(record);
+  const room = Math.max(0, Math.min(MOST, FEWEST) - unique.length);
+  const shown = [
+    ...unique.slice(0, MOST),
+    ...standing.slice(0, Math.max(room, unique.length < MOST ? 1 : 0)),
+  ];
+  const hidden = unique.length - Math.min(unique.length, MOST);
+  if (hidden > 0) shown[MOST - 1] = `${shown[MOST - 1]} (${hidden} more under “What to be careful about”.)`;
+  return shown;
+}
+
+function missedLines(record: StudyRecord): string[] {
+  return record.acceptance
+    .filter((c) => !c.passed)
+    .map((c) => `${criterionLabel(c.criterion)} is ${acceptanceValue(c)}; the study asks for ${c.limit}.`);
+}
+
+function findingLine(finding: { readonly verdict: string; readonly advice: string | null }): string {
+  return stopped(finding.verdict) + (finding.advice === null ? '' : ` ${stopped(finding.advice)}`);
+}
+
+function outsideLine(record: StudyRecord): string[] {
+  const outside = record.predictions.filter((p) => p.outside.length > 0);
+  if (outside.length === 0) return [];
+  const [only] = outside;
+  if (outside.length === 1 && only !== undefined) {
+    return [
+      `The prediction for ${only.label} lies outside the data: ${listed(only.outside.map((s) => s.replace(/\.$/, '')))}.`,
+    ];
+  }
+  const names = outside.slice(0, 3).map((p) => p.label);
+  const more = outside.length - names.length;
+  return [
+    `${count(outside.length)} of ${count(record.predictions.length)} predictions lie outside the data: ${more > 0 ? `${names.join(', ')} and ${more} more` : listed(names)}.`,
+  ];
+}
+
+function lossLine(record: StudyRecord): string[] {
+  const { rows_read: read, rows_used: used } = record.data;
+  const lost = read - used;
+  return read > 0 && lost / read > 0.1
+    ? [`${percent(lost / read)} of the rows read (${count(lost)} of ${count(read)}) were not used.`]
+    : [];
+}
+
+function standingLines(record: StudyRecord): string[] {
+  const n = record.candidates.length;
+  if (record.model === null) {
+    return [
+      'No model was chosen, so nothing here should be used as a prediction.',
+      'Loosening an admission rule after seeing this result is a decision to be written down and defended, not a repair.',
+      'What follows describes the data and what was tried.',
+    ];
+  }
+  return [
+    'The terms go with the response in these rows; that does not show that changing one would change the response.',
+    n > 1
+      ? `The model was chosen among ${count(n)} on these same rows, so its intervals and p-values look somewhat surer than they are.`
+      : 'The model was judged on the same rows that it was fitted on; new rows may follow it less closely.',
+    'The model speaks for conditions like those in the data and for no others.',
+  ];
+}
