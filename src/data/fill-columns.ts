@@ -7,6 +7,7 @@ import type { HeaderMatch } from './match-header.ts';
 import { datePatternReader } from './read-date.ts';
 import type { RowBatch } from './split-rows.ts';
 import type { Column } from './table.ts';
+import type { EncodingWatch } from './watch-encoding.ts';
 
 /** A variable on its way from cells to a column. */
 export interface Filling {
@@ -49,18 +50,26 @@ export function startColumns(
   return readable ? fillings : null;
 }
 
-/** The rows of a batch from `first` on that have as many cells as the header; the others are reported. */
-export function takeWholeRows(batch: RowBatch, first: number, width: number, faults: Faults): Rows {
-  const { cells, lines } = batch;
+/** The rows of a batch from `first` on that can be read and have as many cells as the header; the others are noted. */
+export function takeWholeRows(
+  batch: RowBatch,
+  first: number,
+  header: readonly string[],
+  faults: Faults,
+  encoding: EncodingWatch,
+): Rows {
+  const { cells, lines, replaced } = batch;
   let kept = 0;
   for (let i = first; i < cells.length; i++) {
     const row = cells[i]!;
-    if (row.length !== width) {
-      faults.ragged(lines[i]!, row.length, width);
+    const line = lines[i]!;
+    if (replaced && encoding.rejects(row, line, header)) continue;
+    if (row.length !== header.length) {
+      faults.ragged(line, row.length, header.length);
       continue;
     }
     cells[kept] = row;
-    lines[kept] = lines[i]!;
+    lines[kept] = line;
     kept++;
   }
   cells.length = kept;

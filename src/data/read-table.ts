@@ -87,6 +87,11 @@ async function readRows(
   const { newline, head } = decoded;
   const delimiter = plan.format.delimiter ?? findDelimiter(head, newline, new Set(expected));
 
+  if (/^$|["\r\n\ufeff]/.test(delimiter)) {
+    report(fileProblem(plan, 'data_unreadable', 'cannot be divided by a quote, a line end or nothing.'));
+    return null;
+  }
+
   const faults = gatherFaults(plan, limit);
   const encoding = watchEncoding(plan);
   const lines: (readonly number[])[] = [];
@@ -100,18 +105,17 @@ async function readRows(
     if (header === null) {
       const cells = batch.cells[0];
       if (cells === undefined) continue;
+      if (batch.replaced) encoding.rejects(cells, batch.lines[0]!, cells);
       const match = matchHeader(plan, cells, batch.lines[0]!, required, optional, report);
       const fillings = startColumns(plan, match.found, faults, report);
       if (fillings === null || (fillings.length === 0 && !match.complete)) {
-        if (batch.replaced) encoding.look([cells], batch.lines, cells);
         encoding.settle(report);
         return null;
       }
       header = { cells, match, fillings };
       first = 1;
     }
-    if (batch.replaced) encoding.look(batch.cells, batch.lines, header.cells);
-    const rows = takeWholeRows(batch, first, header.cells.length, faults);
+    const rows = takeWholeRows(batch, first, header.cells, faults, encoding);
     for (const { builder } of header.fillings) builder.fill(rows, rowCount);
     lines.push(rows.lines);
     rowCount += rows.cells.length;
@@ -132,7 +136,7 @@ async function readRows(
   const decodable = encoding.settle(report);
   const based = !whole || filled.filter((one) => !checkBaseline(plan, one, report)).length === 0;
   if (broken !== null) report(broken);
-  const noRows = broken === null && sound && rowCount === 0;
+  const noRows = broken === null && sound && decodable && rowCount === 0;
   if (noRows) report(fileProblem(plan, 'data_no_rows', 'has a header and no rows.'));
   if (!match.complete || !sound || !decodable || !based || broken !== null || noRows) return null;
 

@@ -3,12 +3,8 @@ import type { DataPlan } from '../study/study.ts';
 
 /** Rows in which bytes were not UTF-8: one problem for the file, with the first place and the count. */
 export interface EncodingWatch {
-  /** Looks through rows decoded with replacements, the header among them. */
-  readonly look: (
-    cells: readonly (readonly string[])[],
-    lines: readonly number[],
-    header: readonly string[],
-  ) => void;
+  /** Whether a row, decoded with replacements, holds one; it is counted, and nothing more can be said of it. */
+  readonly rejects: (row: readonly string[], line: number, header: readonly string[]) => boolean;
   /** Reports what was found, and says whether all was UTF-8. */
   readonly settle: (report: Report) => boolean;
 }
@@ -17,16 +13,16 @@ export function watchEncoding(plan: DataPlan): EncodingWatch {
   let rows = 0;
   let first: { row: number; variable: string | null } | null = null;
   return {
-    look: (cells, lines, header) => {
-      cells.forEach((row, index) => {
-        const position = row.findIndex((cell) => cell.includes('\ufffd'));
-        if (position < 0) return;
-        rows++;
-        if (first !== null) return;
+    rejects: (row, line, header) => {
+      const position = row.findIndex((cell) => cell.includes('\ufffd'));
+      if (position < 0) return false;
+      rows++;
+      if (first === null) {
         const column = header[position]?.trim() || null;
         const declared = plan.variables.find((variable) => variable.column === column);
-        first = { row: lines[index]!, variable: declared?.name ?? column };
-      });
+        first = { row: line, variable: declared?.name ?? column };
+      }
+      return true;
     },
     settle: (report) => {
       if (first === null) return true;

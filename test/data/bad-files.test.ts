@@ -254,6 +254,24 @@ test('bytes that are not UTF-8 in a column that is not read, or in the header', 
   expect(marks(header.problems)).toEqual(['cell_encoding 1 \ufffd']);
 });
 
+test('a cell with bytes that are not UTF-8 is not faulty in any other way', async () => {
+  const latin = Buffer.from('port,b\nMålmö,x\nOslo,2\n', 'latin1');
+  const own = plan([variable('port', 'category', { levels: ['Malmö', 'Oslo'] }), variable('b')]);
+  const { problems } = await read(latin, own);
+  expect(marks(problems)).toEqual(['cell_encoding 2 port']);
+  const all = await read(Buffer.from('port,b\né,1\n', 'latin1'), own);
+  expect(marks(all.problems)).toEqual(['cell_encoding 2 port']);
+});
+
+test.each(['"', '\n', '\r', '\ufeff', ''])('the delimiter %j', async (delimiter) => {
+  const { table, problems } = await read('a,b\n1,2\n', {
+    ...ab,
+    format: { delimiter, decimalMark: '.', encoding: null },
+  });
+  expect(table).toBeNull();
+  expect(marks(problems)).toEqual(['data_unreadable']);
+});
+
 test('Latin-1 files that were written as windows-1252', async () => {
   const own = plan([variable('t', 'text'), variable('b')], {
     format: { delimiter: ',', decimalMark: '.', encoding: 'latin-1' },

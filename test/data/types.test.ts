@@ -218,4 +218,9 @@ test('ranges', async () => {
   expect(problems[1]?.message).toBe('"17" is above 16 kn, the most that speed may be.');
   const late = await readCells(['2026-03-02'], variable('d', 'date', { atMost: 20513 }));
   expect(late.problems[0]?.message).toBe('"2026-03-02" is above 2026-03-01, the most that d may be.');
+  const within = variable('d', 'date', { atLeast: 20513, atMost: 20514 });
+  const early = await readCells(['2026-02-28', '2026-03-02'], within);
+  expect(early.problems.map((problem) => problem.message)).toEqual([
+    '"2026-02-28" is not between 2026-03-01 and 2026-03-02.',
+  ]);
 });
