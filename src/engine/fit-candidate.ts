@@ -147,13 +147,14 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
   }
 }
 
-/** −n/2 (ln 2π + ln(RSS/n) + 1) + ½ Σ ln w + J: every constant kept, so that scales and weights compare. */
-export function logLikelihood(n: number, rss: number, facts: RowFacts, response: number): number {
-  return (
-    (-n / 2) * (Math.log(2 * Math.PI) + Math.log(rss / n) + 1) +
-    facts.logWeights / 2 +
-    facts.logJacobians[response]!
-  );
+/**
+ * −n/2 (ln 2π + ln(RSS/n) + 1) + ½ Σ ln w + J: every constant kept, so that scales and weights compare. Null where
+ * the Jacobian is not finite: a response of 0 on the square-root scale has no density there.
+ */
+export function logLikelihood(n: number, rss: number, facts: RowFacts, response: number): number | null {
+  const value =
+    (-n / 2) * (Math.log(2 * Math.PI) + Math.log(rss / n) + 1) + facts.logWeights / 2 + facts.logJacobians[response]!;
+  return Number.isFinite(value) ? value : null;
 }
 
 /** The listed columns of R side by side, `height` rows each. */

@@ -31,7 +31,7 @@ export interface Fit {
   readonly degreesOfFreedom: number;
   /** RSS is no more than rounding of TSS: R² is 1 and nothing can be tested. */
   readonly exact: boolean;
-  /** Gaussian log-likelihood with every constant, weights and the response's Jacobian; null where RSS is 0. */
+  /** Gaussian log-likelihood with every constant, weights and the response's Jacobian; null where the fit is exact or the Jacobian is not finite. */
   readonly logLikelihood: number | null;
   /**
    * VIF of each kept column (1/(1 − R_j²) with the other columns of the model, centred where there is an

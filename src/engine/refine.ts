@@ -1,5 +1,5 @@
 import type { DesignRows } from '../model/design-rows.ts';
-import { addPair, multiplyPair, pair, SPLITTER, twoSum } from '../stats/double-double.ts';
+import { addPair, multiplyPair, pair, SPLITTER } from '../stats/double-double.ts';
 import type { Fit } from './fit.ts';
 import { logLikelihood, type RowFacts } from './fit-candidate.ts';
 
@@ -87,6 +87,8 @@ function residualPass(
   const order = [...columns, responseAt];
   const hi = new Float64Array(BLOCK * (p + 1));
   const lo = new Float64Array(BLOCK * (p + 1));
+  const head = new Float64Array(BLOCK);
+  const tail = new Float64Array(BLOCK);
   const sums = new Float64Array(p);
   const rests = new Float64Array(p);
   const squares = pair();
@@ -96,9 +98,13 @@ function residualPass(
     const count = Math.min(BLOCK, rows.rowCount - from);
     rows.fill(order, from, from + count, BLOCK, hi, lo);
     for (let j = 0; j < p; j++) subtractMultiple(hi, lo, j * BLOCK, y, count, bh[j]!, bl[j]!);
-    for (let j = 0; j < p; j++) {
-      dotInto(hi, lo, j * BLOCK, y, count, sums, rests, j);
+    for (let i = 0; i < count; i++) {
+      const r = hi[y + i]!;
+      const c = SPLITTER * r;
+      head[i] = c - (c - r);
+      tail[i] = r - head[i]!;
     }
+    for (let j = 0; j < p; j++) dotInto(hi, lo, j * BLOCK, y, count, head, tail, sums, rests, j);
     for (let i = y; i < y + count; i++) {
       multiplyPair(hi[i]!, lo[i]!, hi[i]!, lo[i]!, square);
       addPair(squares[0]!, squares[1]!, square[0]!, square[1]!, squares);
@@ -122,7 +128,6 @@ function subtractMultiple(
   const bhl = bh - bhh;
   for (let i = 0; i < count; i++) {
     const a = hi[x + i]!;
-    if (a === 0) continue;
     const p = a * bh;
     const d = SPLITTER * a;
     const ah = d - (d - a);
@@ -138,37 +143,72 @@ function subtractMultiple(
   }
 }
 
-/** sums[j] + rests[j] += Σ x · r over a block, in twice the working precision. */
+/**
+ * sums[j] + rests[j] += Σ x · r over a block, in twice the working precision. `head` and `tail` are the halves of
+ * r, split once for all columns; two running sums keep the processor's pipeline full.
+ */
 function dotInto(
   hi: Float64Array,
   lo: Float64Array,
   x: number,
   r: number,
   count: number,
+  head: Float64Array,
+  tail: Float64Array,
   sums: Float64Array,
   rests: Float64Array,
   j: number,
 ): void {
-  let sum = sums[j]!;
-  let rest = rests[j]!;
-  for (let i = 0; i < count; i++) {
+  let sum = 0;
+  let rest = 0;
+  let sum2 = 0;
+  let rest2 = 0;
+  const even = count & ~1;
+  for (let i = 0; i < even; i += 2) {
     const a = hi[x + i]!;
-    if (a === 0) continue;
     const b = hi[r + i]!;
     const p = a * b;
-    let c = SPLITTER * a;
+    const c = SPLITTER * a;
     const ah = c - (c - a);
     const al = a - ah;
-    c = SPLITTER * b;
-    const bh = c - (c - b);
-    const bl = b - bh;
-    const error = al * bl - (p - ah * bh - al * bh - ah * bl) + (a * lo[r + i]! + lo[x + i]! * b);
+    const bh = head[i]!;
+    const bl = tail[i]!;
     const s = sum + p;
     const part = s - sum;
-    rest += sum - (s - part) + (p - part) + error;
+    rest +=
+      sum -
+      (s - part) +
+      (p - part) +
+      (al * bl - (p - ah * bh - al * bh - ah * bl)) +
+      (a * lo[r + i]! + lo[x + i]! * b);
     sum = s;
+
+    const a2 = hi[x + i + 1]!;
+    const b2 = hi[r + i + 1]!;
+    const p2 = a2 * b2;
+    const c2 = SPLITTER * a2;
+    const ah2 = c2 - (c2 - a2);
+    const al2 = a2 - ah2;
+    const bh2 = head[i + 1]!;
+    const bl2 = tail[i + 1]!;
+    const s2 = sum2 + p2;
+    const part2 = s2 - sum2;
+    rest2 +=
+      sum2 -
+      (s2 - part2) +
+      (p2 - part2) +
+      (al2 * bl2 - (p2 - ah2 * bh2 - al2 * bh2 - ah2 * bl2)) +
+      (a2 * lo[r + i + 1]! + lo[x + i + 1]! * b2);
+    sum2 = s2;
   }
-  twoSum(sum, rest, carried);
+  if (even < count) {
+    multiplyPair(hi[x + even]!, lo[x + even]!, hi[r + even]!, lo[r + even]!, carried);
+    addPair(sum, rest, carried[0]!, carried[1]!, carried);
+    sum = carried[0]!;
+    rest = carried[1]!;
+  }
+  addPair(sum, rest, sum2, rest2, carried);
+  addPair(sums[j]!, rests[j]!, carried[0]!, carried[1]!, carried);
   sums[j] = carried[0]!;
   rests[j] = carried[1]!;
 }

@@ -285,21 +285,21 @@ function boundCache(source: DesignSource): (column: DesignColumn) => number {
     }
     return size;
   };
-  return (column) =>
-    column.pieces.reduce((bound, piece) => {
-      switch (piece.kind) {
-        case 'level':
-          return bound;
-        case 'variable':
-          return bound * sizeOf(piece.variable);
-        case 'power':
-          return bound * (piece.to > 0 ? sizeOf(piece.variable) ** piece.to : 1);
-        case 'bend':
-          return bound * (sizeOf(piece.variable) + Math.abs(piece.at));
-        case 'spline':
-          return bound * (sizeOf(piece.variable) + Math.max(...piece.knots.map(Math.abs))) ** 2;
-      }
-    }, 1);
+  const boundOf = (piece: Piece): number => {
+    switch (piece.kind) {
+      case 'level':
+        return 1;
+      case 'variable':
+        return sizeOf(piece.variable);
+      case 'power':
+        return piece.to > 0 ? sizeOf(piece.variable) ** piece.to : 1;
+      case 'bend':
+        return sizeOf(piece.variable) + Math.abs(piece.at);
+      case 'spline':
+        return (sizeOf(piece.variable) + Math.max(...piece.knots.map(Math.abs))) ** 2;
+    }
+  };
+  return (column) => column.pieces.reduce((bound, piece) => bound * boundOf(piece), 1);
 }
 
 /** 1 for ordinary magnitudes, else the power of two that brings the bound near 1. */

@@ -1,0 +1,181 @@
+import { formatDate } from '../data/format-date.ts';
+import type { Table } from '../data/table.ts';
+import type { FittedAll } from '../engine/fit-all.ts';
+import type { Fit } from '../engine/fit.ts';
+import type { Chosen } from '../examine/chosen.ts';
+import { examine } from '../examine/examine.ts';
+import type { Design } from '../model/design.ts';
+import type { DesignRows } from '../model/design-rows.ts';
+import { scaleName } from '../model/response-scale.ts';
+import { type Predicted, smearingResiduals } from '../predict/predict.ts';
+import type { Sample } from '../prepare/sample.ts';
+import type { Place, Problem } from '../problem.ts';
+import type { Choice } from '../select/choose.ts';
+import { coefficientFigures } from '../select/coefficients.ts';
+import { summarise } from '../select/summarise.ts';
+import type { Study } from '../study/study.ts';
+import { packageVersion } from '../version.ts';
+import { acceptanceOf } from './acceptance.ts';
+import { rowSummaries } from './chart-points.ts';
+import { describeModel } from './describe-model.ts';
+import { describeVariables } from './describe-variables.ts';
+import type { RecordCandidate, StudyRecord } from './record.ts';
+
+/** Everything a run found, from which the record is put together. */
+export interface Run {
+  readonly study: Study;
+  readonly table: Table;
+  readonly sample: Sample;
+  readonly design: Design;
+  readonly rows: DesignRows;
+  readonly fitted: FittedAll;
+  readonly choice: Choice;
+  readonly chosen: Chosen | null;
+  readonly predicted: Predicted | null;
+  /** Warnings found on the way; the record keeps them. */
+  readonly problems: readonly Problem[];
+}
+
+/**
+ * The record: everything a report may say, with full-precision numbers and nothing of the clock, the machine
+ * or where files lie, so that the same study, data and version give the same bytes.
+ */
+export function buildRecord(run: Run): StudyRecord {
+  const { study, table, sample, choice, chosen, predicted } = run;
+  const candidates = candidatesOf(run);
+  const winner = choice.chosen === null ? null : candidates[choice.chosen]!;
+  const variables = describeVariables(study, table, sample);
+  const response = variables.find((variable) => variable.name === study.response.variable)!;
+  return {
+    format: 'plumbrule-record/1',
+    tool: { name: 'plumbrule', version: packageVersion() },
+    study: {
+      title: study.title,
+      question: study.question,
+      file: study.file,
+      sha256: study.sha256,
+      settings: study.settings.map((setting) => ({ ...setting })),
+      caution: study.report.caution,
+      confidence: study.inference.confidence,
+      prediction_interval: study.predict.interval,
+      report: { formats: [...study.report.formats], templates: { ...study.report.templates } },
+    },
+    data: {
+      file: table.file,
+      sha256: table.sha256,
+      delimiter: table.format.delimiter,
+      encoding: table.format.encoding,
+      rows_read: table.rowCount,
+      rows_used: sample.rowCount,
+      left_out: sample.losses.map((loss) => ({
+        because: loss.because,
+        kind: loss.kind,
+        rows: loss.rows,
+        variable: loss.variable,
+        missing_any: loss.missingAny,
+      })),
+      columns_ignored: [...table.ignored],
+      bad_values: table.badValues.map((bad) => ({ ...bad })),
+      bad_value_count: table.badValueCount,
+      time: timeSpan(study, sample),
+      variables,
+    },
+    response: {
+      variable: study.response.variable,
+      scale: scaleName(study.response.scale),
+      unit: response.unit,
+      label: response.label,
+    },
+    candidates,
+    partial_f: choice.partialF.map((row) => ({
+      ...row,
+      smaller: candidates[row.smaller]!.name,
+      larger: candidates[row.larger]!.name,
+    })),
+    partial_f_omitted: choice.partialFOmitted,
+    selection: {
+      rank_by: study.selection.rankBy,
+      prefer_smaller_within: study.selection.preferSmallerWithin,
+      significance: study.selection.significance,
+      admission: [...choice.rules],
+      ranking: choice.ranking.map(({ rank, candidate, value, difference }) => ({
+        rank,
+        candidate: candidates[candidate]!.name,
+        value,
+        difference,
+      })),
+      chosen: winner?.name ?? null,
+      because: choice.because,
+    },
+    model: chosen === null ? null : describeModel(chosen, run.rows, smearingResiduals(chosen)),
+    examination: chosen === null ? null : { findings: examine(chosen), ...rowSummaries(chosen) },
+    predictions: (predicted?.predictions ?? []).map((one) => ({
+      ...one,
+      values: one.values.map((value) => ({ ...value })),
+    })),
+    prediction_total: predicted?.total ?? null,
+    acceptance: acceptanceOf(study.acceptance, winner, sample.rowCount),
+    warnings: warningsOf(run),
+  };
+}
+
+function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCandidate[] {
+  // The chosen model may have been refined after the ranking; the record shows the refined figures.
+  const fits = fitted.fits.map((fit, index): Fit => (index === choice.chosen && chosen !== null ? chosen.fit : fit));
+  const context = { ...fitted, fits };
+  return fits.map((fit, index) => {
+    const { admitted, refusedBecause } = choice.admissions[index]!;
+    return {
+      name: fit.candidate.name,
+      terms: fit.candidate.terms.map((term) => term.name),
+      scale: scaleName(fit.candidate.response.scale),
+      intercept: fit.candidate.intercept,
+      ...summarise(index, context),
+      coefficients: coefficientFigures(fit, context.columnNames, study.inference.confidence),
+      dropped: fit.dropped.map(({ column, sentence }) => ({ column: design.columns[column]!.name, sentence })),
+      arithmetic: fit.arithmetic,
+      admitted,
+      refused_because: [...refusedBecause],
+    };
+  });
+}
+
+function timeSpan(study: Study, sample: Sample): StudyRecord['data']['time'] {
+  const variable = study.data.time;
+  const column = variable === null ? undefined : sample.columns.get(variable);
+  if (variable === null || column === undefined || column.kind === 'category' || column.kind === 'text') return null;
+  const order = sample.timeOrder!;
+  const show = (value: number) => (column.kind === 'date' ? formatDate(value) : String(value));
+  return { variable, first: show(column.values[order[0]!]!), last: show(column.values[order.at(-1)!]!) };
+}
+
+function warningsOf({ problems, fitted, chosen, study, predicted }: Run): StudyRecord['warnings'] {
+  const warnings = problems
+    .filter((problem) => problem.severity === 'warning')
+    .map(({ place, message, hint }) => ({ about: placeText(place), text: hint === undefined ? message : `${message} ${hint}` }));
+  if (fitted.pressOmitted !== null) warnings.push({ about: 'PRESS', text: `PRESS was ${fitted.pressOmitted}.` });
+  if (study.predict.total && chosen !== null && predicted !== null && predicted.total === null && predicted.predictions.length > 0) {
+    warnings.push({
+      about: 'predictions',
+      text: `No total is given: its interval is known on the natural scale only, and the chosen model’s response is on the ${scaleName(chosen.fit.candidate.response.scale)} scale.`,
+    });
+  }
+  return warnings;
+}
+
+function placeText(place: Place): string {
+  switch (place.kind) {
+    case 'source':
+      return `${place.file}, line ${place.line}`;
+    case 'cell':
+      return [
+        place.file,
+        ...(place.row === undefined ? [] : [`row ${place.row}`]),
+        ...(place.variable === undefined ? [] : [place.variable]),
+      ].join(', ');
+    case 'file':
+      return place.file;
+    case 'command':
+      return 'command line';
+  }
+}
