@@ -1,0 +1,92 @@
+import type { FitContext } from '../engine/fit.ts';
+import type { SelectionPlan } from '../study/study.ts';
+import type { Admission } from './admission.ts';
+import type { Criterion } from './criterion.ts';
+import { costOf, type Ranked, sameValue, slackOf } from './rank.ts';
+import { counted, limitText, significant } from './words.ts';
+
+export interface ValuePick {
+  readonly chosen: number;
+  /** Sentences: which rule, how close the others. */
+  readonly because: readonly string[];
+}
+
+/**
+ * The choice by a criterion's value. Among the admitted candidates within `prefer_smaller_within` of the best
+ * admitted one: the fewest coefficients, then the better value, then the order of declaration.
+ * @param admitted indexes in the order of declaration, at least one, each with a value
+ */
+export function chooseByValue(
+  plan: SelectionPlan,
+  criterion: Criterion,
+  context: FitContext,
+  ranking: readonly Ranked[],
+  admissions: readonly Admission[],
+  admitted: readonly number[],
+): ValuePick {
+  const values = new Map(ranking.map(({ candidate, value }) => [candidate, value]));
+  const cost = (index: number) => costOf(criterion, values.get(index)!);
+  const size = (index: number) => context.fits[index]!.columns.length;
+  const least = (indexes: readonly number[], of: (index: number) => number) =>
+    indexes.reduce((smallest, index) => Math.min(smallest, of(index)), Number.POSITIVE_INFINITY);
+
+  const best = least(admitted, cost);
+  const near = admitted.filter((index) => cost(index) - best <= plan.preferSmallerWithin + slackOf(best));
+  const fewest = least(near, size);
+  const smallest = near.filter((index) => size(index) === fewest);
+  const lowest = least(smallest, cost);
+  const chosen = smallest.find((index) => sameValue(lowest, cost(index)))!;
+
+  const name = (index: number) => context.fits[index]!.candidate.name;
+  const order = ranking.map(({ candidate }) => candidate).filter((index) => admissions[index]!.admitted);
+  return { chosen, because: [mainSentence(), ...refusedAhead()] };
+
+  function mainSentence(): string {
+    const leader = order[0]!;
+    const extreme = criterion.better === 'lower' ? 'lowest' : 'highest';
+    if (admitted.length === 1) {
+      const only =
+        ranking.length === 1 ? 'the only candidate' : `the only one admitted of ${ranking.length} candidates`;
+      return `${name(chosen)} is ${only}.`;
+    }
+    const leads = `has the ${extreme} ${criterion.title} (${significant(values.get(leader)!, 5)}) of ${counted(admitted.length, 'admitted candidate')}`;
+    if (!sameValue(best, cost(chosen))) {
+      const others = near.length - 2;
+      const also = others > 0 ? `, as ${others === 1 ? 'does one other' : `do ${others} others`},` : '';
+      const why =
+        size(chosen) < size(leader)
+          ? `with ${counted(size(chosen), 'coefficient')} instead of ${size(leader)}, the fewest`
+          : `with ${counted(size(chosen), 'coefficient')}`;
+      return `${name(leader)} ${leads}, but ${name(chosen)} lies within ${limitText(plan.preferSmallerWithin)} of it${also} (${behind(leader, chosen)}) ${why}; the study prefers the smaller.`;
+    }
+    const next = order.find((index) => index !== chosen)!;
+    return `${name(chosen)} ${leads}; ${runnerUp(next)}.`;
+  }
+
+  function runnerUp(next: number): string {
+    if (!sameValue(cost(chosen), cost(next))) return `${name(next)} comes next, ${behind(chosen, next)}`;
+    const why = size(next) > size(chosen) ? 'has more coefficients' : 'is declared later';
+    return `${name(next)} has the same value but ${why}`;
+  }
+
+  function behind(leader: number, other: number): string {
+    return `${significant(Math.abs(cost(other) - cost(leader)), 2)} behind`;
+  }
+
+  /** Candidates that would have led had they been admitted. */
+  function refusedAhead(): string[] {
+    const ahead = ranking.filter(
+      ({ candidate, value }) =>
+        value !== null && !admissions[candidate]!.admitted && costOf(criterion, value) < best - slackOf(best),
+    );
+    if (ahead.length === 0) return [];
+    const first = ahead[0]!.candidate;
+    const others =
+      ahead.length === 1
+        ? ''
+        : `, and so ${ahead.length === 2 ? 'does one other' : `do ${ahead.length - 1} others`} that ${ahead.length === 2 ? 'was' : 'were'} not admitted`;
+    return [
+      `${name(first)} has a better value but was not admitted${others}. The reason for ${name(first)}: ${admissions[first]!.refusedBecause.join(' ')}`,
+    ];
+  }
+}
