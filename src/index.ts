@@ -17,5 +17,6 @@ export type {
   StudyRecord,
 } from './record/record.ts';
 export type { ResidualColumns } from './record/tables.ts';
+export { type Rendered, type RenderOptions, type ReportFormat, render } from './report/render.ts';
 export { type CheckedStudy, checkStudy, type RunOptions, type RunResult, runStudy } from './run.ts';
 export type { Study } from './study/study.ts';

@@ -21,7 +21,7 @@ export async function checkCommand(
   } finally {
     progress.clear();
   }
-  await showProblems(checked.problems, await sourceTexts(path, checked.problems), options.problems, terminal);
+  await showProblems(checked.problems, await sourceTexts(checked.problems), options.problems, terminal);
   if (options.quiet !== true && options.problems === 'text') terminal.out(contractSummary(checked, terminal));
   return hasError(checked.problems) ? UNUSABLE : DONE;
 }

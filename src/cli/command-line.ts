@@ -3,6 +3,7 @@ import { Command, CommanderError, Option } from 'commander';
 import type { Problem } from '../problem.ts';
 import type { CommonOptions } from './common-options.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
+import type { RenderCommandOptions } from './render.ts';
 import { showProblems } from './show-problems.ts';
 import type { Terminal } from './terminal.ts';
 
@@ -84,14 +85,13 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
         'markdown',
       ]),
     )
+    .option('--template <file>', 'a template of your own for that format')
     .addOption(quiet())
     .addOption(problems())
-    .action(
-      async (record: string, options: CommonOptions & { out?: string; format?: 'html' | 'markdown' }) => {
-        const { renderCommand } = await import('./render.ts');
-        ended(await renderCommand(record, options, terminal));
-      },
-    );
+    .action(async (record: string, options: RenderCommandOptions) => {
+      const { renderCommand } = await import('./render.ts');
+      ended(await renderCommand(record, options, terminal));
+    });
 
   program.addHelpText(
     'after',

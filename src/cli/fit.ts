@@ -10,7 +10,7 @@ import type { CommonOptions } from './common-options.ts';
 import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
 import { progressOn } from './progress.ts';
-import { reportFiles } from './report-files.ts';
+import { reportFiles, templatesOf } from './report-files.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import { summary } from './summary.ts';
@@ -24,12 +24,14 @@ export async function fitCommand(
 ): Promise<number> {
   const progress = progressOn(terminal, options.quiet === true);
   const problems: Problem[] = [];
+  let templates: ReadonlyMap<string, string> = new Map();
   let written: { readonly record: StudyRecord; readonly out: string; readonly names: string[] } | null = null;
   try {
     const result = await runStudy(path, { onProgress: progress.show });
     problems.push(...result.problems);
     if (result.record !== null && !hasError(problems)) {
       const out = options.out ?? defaultFolder(path);
+      templates = templatePlaces(result.record, dirname(path));
       const files = await resultFiles(result.record, result, dirname(path), (problem) =>
         problems.push(problem),
       );
@@ -43,7 +45,7 @@ export async function fitCommand(
     progress.clear();
   }
 
-  await showProblems(problems, await sourceTexts(path, problems), options.problems, terminal);
+  await showProblems(problems, await sourceTexts(problems, templates), options.problems, terminal);
   if (written === null) return UNUSABLE;
   if (options.quiet !== true && options.problems === 'text') {
     terminal.out(summary(written.record, places(written.out, written.names), terminal));
@@ -62,7 +64,7 @@ async function resultFiles(
     throw new Error(`The record is not as its schema says: ${faults.slice(0, 3).join(' ')}`);
   return [
     { name: 'record.json', content: recordText(record) },
-    ...(await reportFiles(record, record.study.report.formats, folder, report)),
+    ...(await reportFiles(record, record.study.report.formats, templatesOf(record, folder), report)),
     { name: 'tables/candidates.csv', content: candidatesTable(record) },
     { name: 'tables/coefficients.csv', content: coefficientsTable(record) },
     ...(result.residuals === null
@@ -72,6 +74,12 @@ async function resultFiles(
       ? []
       : [{ name: 'tables/predictions.csv', content: predictionsTable(record) }]),
   ];
+}
+
+/** Where the templates that a study names lie, by the names under which problems know them. */
+function templatePlaces(record: StudyRecord, folder: string): Map<string, string> {
+  const named = Object.values(record.study.report.templates).filter((name) => name !== null);
+  return new Map(named.map((name) => [name, resolve(folder, name)]));
 }
 
 /** 0, or 1 where no candidate was admitted or an acceptance criterion was missed. */

@@ -1,3 +1,4 @@
+import { safeText } from './excerpt.ts';
 import { bold, faint, type Terminal } from './terminal.ts';
 
 /** One question that a reader asks, with its answer as lines or paragraphs. */
@@ -61,11 +62,9 @@ export function wrapped(text: string, width: number): string[] {
   return [...lines, line];
 }
 
-/** A text without control characters: names from a data file must not be able to steer the terminal. */
+/** A text on one line without characters that steer a terminal: names come from files of others. */
 export function printable(text: string): string {
-  return text.replace(/[\p{Cc}\u2028\u2029\u202a-\u202e\u2066-\u2069]/gu, (character) =>
-    /\s/.test(character) ? ' ' : '\ufffd',
-  );
+  return safeText(text.replace(/[\n\r\t]+/g, ' '));
 }
 
 export interface TableColumn {

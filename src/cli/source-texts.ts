@@ -2,18 +2,23 @@ import { readFile } from 'node:fs/promises';
 import type { Problem } from '../problem.ts';
 
 /**
- * The text of the file at `path`, by the names under which problems point into it. Problems name a file
- * as reports show it; all places in a source text that a command can meet are in the one file it was given.
+ * The texts of the files that problems point into, for excerpts. `paths` says where a file lies that problems
+ * name otherwise; all others are named by their path. One that cannot be read is left out.
  */
-export async function sourceTexts(path: string, problems: readonly Problem[]): Promise<Map<string, string>> {
+export async function sourceTexts(
+  problems: readonly Problem[],
+  paths: ReadonlyMap<string, string> = new Map(),
+): Promise<Map<string, string>> {
   const names = new Set(
     problems.flatMap((problem) => (problem.place.kind === 'source' ? [problem.place.file] : [])),
   );
-  if (names.size === 0) return new Map();
-  try {
-    const text = await readFile(path, 'utf8');
-    return new Map([...names].map((name) => [name, text]));
-  } catch {
-    return new Map();
+  const texts = new Map<string, string>();
+  for (const name of names) {
+    try {
+      texts.set(name, await readFile(paths.get(name) ?? name, 'utf8'));
+    } catch {
+      // The problem is shown without its line.
+    }
   }
+  return texts;
 }

@@ -55,7 +55,7 @@ describe('plumbLine', () => {
       collecting().terminal,
     );
     expect(text.replaceAll('\n', '')).not.toMatch(/[\p{Cc}\u202e]/u);
-    expect(printable(evil)).toBe('a\ufffd[2Jb\ufffdc\ufffdd e\ufffdf');
+    expect(printable(evil)).toBe('a<U+001B>[2Jb<U+0007>c<U+009B>d e<U+202E>f');
   });
 });
 
