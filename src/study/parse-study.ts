@@ -28,12 +28,12 @@ export function parseStudy(
   };
   // An editor shows no byte-order mark, so columns are counted without it.
   const source = text.startsWith('\ufeff') ? text.slice(1) : text;
-  if (source.trim() === '') {
+  const written = readYaml(source, shownFile, counting);
+  if (written === null) return null;
+  if (written.value === null) {
     counting(unreadable(shownFile, 'The study file is empty.'));
     return null;
   }
-  const written = readYaml(source, shownFile, counting);
-  if (written === null) return null;
   if (!isMapping(written.value)) {
     counting(notMapping(written));
     return null;

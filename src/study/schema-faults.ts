@@ -31,16 +31,37 @@ export function schemaFaults(errors: readonly ErrorObject[], written: Written): 
   const located = errors.map((error) => ({ error, path: pathOf(error.instancePath, written.value) }));
   const faults: SchemaFault[] = [];
   const said = new Set<string>();
-  for (const { error, path } of chooseBranches(located)) {
+  for (const { error, path } of withoutMisspelt(chooseBranches(located))) {
     const fault = translate(error, path, written);
     if (fault === null) continue;
     // A wrong type breaks limits and lists of allowed values as well; the first sentence is enough.
-    const key = `${showPath(path)} ${error.keyword === 'required' || error.keyword === 'additionalProperties' ? fault.problem.message : ''}`;
+    const ofKeys = error.keyword === 'required' || error.keyword === 'additionalProperties';
+    const key = `${showPath(path)} ${ofKeys ? fault.problem.message : ''}`;
     if (said.has(key)) continue;
     said.add(key);
     faults.push(fault);
   }
   return faults;
+}
+
+interface Located {
+  readonly error: ErrorObject;
+  readonly path: Path;
+}
+
+/** Leaves out that a required key is missing where it only is misspelt, which is told as such. */
+function withoutMisspelt(errors: readonly Located[]): readonly Located[] {
+  const meant = new Set<string>();
+  for (const { error } of errors) {
+    if (error.keyword !== 'additionalProperties') continue;
+    const known = Object.keys((error.parentSchema as BrokenSchema).properties ?? {});
+    meant.add(`${error.instancePath} ${nearest(String(error.params.additionalProperty), known)}`);
+  }
+  return errors.filter(
+    ({ error }) =>
+      error.keyword !== 'required' ||
+      !meant.has(`${error.instancePath} ${String(error.params.missingProperty)}`),
+  );
 }
 
 /** The steps of a JSON pointer; a step into an array is a number. */
