@@ -152,7 +152,7 @@ export function pValue(p: number | null | undefined): string {
 
 /** "p = 0.043", "p below 10⁻³⁰⁰". */
 export function pPhrase(p: number): string {
-  return p < 1e-300 ? `p ${pValue(p)}` : `p = ${pValue(p)}`;
+  return p < 1e-300 ? `p${NBSP}${pValue(p)}` : `p${NBSP}=${NBSP}${pValue(p)}`;
 }
 
 /** Puts the unit to a formatted number: behind it, or in front for the usual currency signs. */
@@ -203,5 +203,6 @@ export function longDate(iso: string): string {
 
 /** ISO date of a number of days since 1970-01-01. */
 export function isoDate(days: number): string {
+  if (!(Math.abs(days) < 1e8)) return NONE;
   return new Date(Math.floor(days) * 86_400_000).toISOString().slice(0, 10);
 }

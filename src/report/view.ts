@@ -33,12 +33,12 @@ export interface HeadView {
   readonly answer: readonly string[];
   /** How closely the chosen model follows the data; null without a model. */
   readonly fit: string | null;
-  /** The predictions asked for, up to six; the total last. */
+  /** The predictions asked for, up to eight; the total last. */
   readonly predictions: readonly HeadPrediction[];
   /** "90 %": confidence of the intervals beside the predictions. */
   readonly predictionConfidence: string;
-  /** How many predictions are not among those above; 0 for none. */
-  readonly predictionsMore: number;
+  /** Says how many predictions are not among those above; null where all are. */
+  readonly predictionsMore: string | null;
   /** Three to five lines to know before relying on the answer, most important first. */
   readonly beware: readonly string[];
   /** "All 2 acceptance criteria are met."; null where the study declares none. */

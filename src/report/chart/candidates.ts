@@ -1,5 +1,5 @@
 import { scaleSymlog } from 'd3-scale';
-import { count, fixed } from '../numbers.ts';
+import { count, fixed, value } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import { criterionName, criterionRounding, distanceCaption } from '../words/selection.ts';
 import { bottomAxis, leftAxis, type Plot, plotOf, roomy, spanOf, type Tick, WIDTH } from './axes.ts';
@@ -90,7 +90,11 @@ export function candidatesChart(record: StudyRecord): Figure | null {
           plot,
         ),
     ),
-    caption: distanceCaption(selection, record.candidates),
+    caption: [
+      distanceCaption(selection, record.candidates),
+      ...(marks.some((m) => !m.admitted) ? ['Hollow: not admitted.'] : []),
+      ...(within === '' ? [] : [`Shaded: within ${value(selection.prefer_smaller_within)} of the best.`]),
+    ].join(' '),
   };
 }
 

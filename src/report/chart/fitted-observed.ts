@@ -1,7 +1,7 @@
-import { rounded, roundingFor, withUnit } from '../numbers.ts';
 import type { RecordExamination, RecordModel } from '../record-type.ts';
 import { type Lexicon, raised } from '../words/lexicon.ts';
-import { fittedQuantity, fittedUnit, percentOfLog, scaleKind } from '../words/scale.ts';
+import { typicalMiss } from '../words/miss.ts';
+import { fittedQuantity, fittedUnit } from '../words/scale.ts';
 import { axisTitle, bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
 import { dots, drawing, element, type Figure } from './svg.ts';
 
@@ -40,10 +40,7 @@ export function fittedObservedChart(
 }
 
 function agreement(lexicon: Lexicon, model: RecordModel): string {
-  const s = model.residual_standard_error;
-  if (s === null) return 'On the line, observed and fitted values agree.';
-  const log = scaleKind(lexicon.response.scale) === 'log';
-  const size = log ? percentOfLog(s) : s;
-  const miss = withUnit(rounded(size, roundingFor(size, size)), log ? '%' : fittedUnit(lexicon.response));
+  const miss = typicalMiss(lexicon, model.residual_standard_error);
+  if (miss === null) return 'On the line, observed and fitted values agree.';
   return `${raised(fittedQuantity(lexicon.response))} as observed lies typically ${miss} from what the model says; on the line they agree.`;
 }

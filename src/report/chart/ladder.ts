@@ -1,5 +1,5 @@
 import type { RecordTerm } from '../record-type.ts';
-import { shortEffect } from '../words/effect.ts';
+import { effectOf, shortEffect } from '../words/effect.ts';
 import { type Lexicon, labelOf, raised } from '../words/lexicon.ts';
 import { stepRange } from '../words/term.ts';
 import { bottomAxis, plumbLine, roomy, spanOf, WIDTH } from './axes.ts';
@@ -48,7 +48,7 @@ export function ladderChart(lexicon: Lexicon, terms: readonly RecordTerm[]): Fig
     })
     .join('');
   const [first] = rows;
-  const caption = `${raised(first!.name)} (${first!.where}) makes the largest typical difference: ${shortEffect(lexicon, first!)} ${lexicon.response.label}.${all.length > rows.length ? ` The ${all.length - rows.length} smallest steps are left out of the drawing.` : ''}`;
+  const caption = `${raised(first!.name)} (${first!.where}) makes the largest typical difference: ${effectOf(lexicon, first!)}.${all.length > rows.length ? ` The ${all.length - rows.length} smallest steps are left out of the drawing.` : ''}`;
   const height = plot.bottom + 44;
   return {
     svg: drawing(

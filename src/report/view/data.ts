@@ -37,7 +37,7 @@ function variableView(v: RecordVariable): VariableView {
   return {
     name: v.name,
     label: v.label,
-    labelled: v.label !== '' && v.label !== v.name,
+    labelled: plainWords(v.label) !== plainWords(v.name) && v.label !== '',
     unit: v.unit ?? NONE,
     usedAs: v.used_as.join(', ') || NONE,
     range: v.levels === null ? span(v.smallest, v.largest) : levelList(v.levels),
@@ -46,6 +46,14 @@ function variableView(v: RecordVariable): VariableView {
     missing: count(v.missing),
     derivedFrom: v.derived_from,
   };
+}
+
+/** A label that only spells the name differently says nothing new. */
+function plainWords(text: string): string {
+  return text
+    .toLowerCase()
+    .replace(/[\s_-]+/g, ' ')
+    .trim();
 }
 
 function levelList(levels: NonNullable<RecordVariable['levels']>): string {

@@ -1,14 +1,15 @@
-import { percent, rangeWithUnit, rounded, withUnit } from '../numbers.ts';
+import { count, percent, rangeWithUnit, rounded, withUnit } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import type { HeadPrediction, HeadView } from '../view.ts';
 import { acceptanceSentence, acceptanceValue, criterionLabel } from '../words/acceptance.ts';
 import { answerSentences, fitSentence } from '../words/answer.ts';
 import { bewareLines } from '../words/beware.ts';
 import { studyLine } from '../words/data.ts';
-import type { Lexicon } from '../words/lexicon.ts';
+import { counted, type Lexicon } from '../words/lexicon.ts';
 import { predictionRounding } from '../words/prediction.ts';
+import { fittedUnit } from '../words/scale.ts';
 
-const ROWS = 6;
+const ROWS = 8;
 
 export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
   const chosen = record.candidates.find((c) => c.name === record.model?.candidate);
@@ -17,18 +18,23 @@ export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
     fit: chosen === undefined ? null : fitSentence(lexicon, chosen, record.candidates.length),
     predictions: headPredictions(record, lexicon),
     predictionConfidence: percent(record.study.prediction_interval),
-    predictionsMore: Math.max(0, record.predictions.length - ROWS),
-    beware: bewareLines(record),
+    predictionsMore: furtherRows(record.predictions.length - ROWS),
+    beware: bewareLines(record, lexicon),
     acceptance: acceptanceSentence(record.acceptance),
     criteria: record.acceptance.map((c) => ({
       name: criterionLabel(c.criterion),
-      value: acceptanceValue(c),
+      value: acceptanceValue(c, fittedUnit(lexicon.response)),
       limit: c.limit,
       passed: c.passed,
       word: c.passed ? 'met' : 'missed',
     })),
     line: studyLine(record),
   };
+}
+
+function furtherRows(more: number): string | null {
+  if (more <= 0) return null;
+  return `${counted(more, 'further row is', 'further rows are', count)} under “What does it predict?”.`;
 }
 
 function headPredictions(record: StudyRecord, { response }: Lexicon): HeadPrediction[] {

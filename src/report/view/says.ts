@@ -34,7 +34,7 @@ export function saysView(record: StudyRecord, lexicon: Lexicon): SaysView | null
 function overallSentence({ overall_f: f, intercept }: RecordCandidate): string | null {
   if (f === null || f.statistic === null || f.p_value === null) return null;
   const against = intercept ? 'the mean alone' : 'a model that says zero';
-  return `All terms together against ${against}: F = ${value(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
+  return `All terms together against ${against}: F\u00a0=\u00a0${value(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
 }
 
 function coefficientView(c: RecordCoefficient, unit: string | null): CoefficientView {

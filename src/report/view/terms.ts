@@ -5,10 +5,10 @@ import type { Figure } from '../chart/svg.ts';
 import { count, pPhrase, range, rounded, roundingOfInterval, value } from '../numbers.ts';
 import type { RecordCoefficient, RecordExamination, RecordModel, RecordTerm } from '../record-type.ts';
 import type { TermView } from '../view.ts';
-import { shortEffect } from '../words/effect.ts';
-import { type Lexicon, labelOf, raised, termLabel } from '../words/lexicon.ts';
+import { effectOf, shortEffect } from '../words/effect.ts';
+import { type Lexicon, labelOf, raised, termLabel, unitOf } from '../words/lexicon.ts';
 import { fittedUnit, scaleKind } from '../words/scale.ts';
-import { partners, slopeSubject, stepRange, termSentences } from '../words/term.ts';
+import { partners, partnersHeld, placeText, slopeSubject, stepRange, termSentences } from '../words/term.ts';
 
 type Points = RecordExamination['points'] | null;
 
@@ -43,7 +43,7 @@ function testSentence({ joint_f: f }: RecordTerm): string | null {
     f.df1 === 1
       ? 'With against without this term'
       : `With against without this term’s ${count(f.df1)}\u00a0columns`;
-  return `${columns}: F = ${value(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
+  return `${columns}: F\u00a0=\u00a0${value(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
 }
 
 function termChart(
@@ -60,21 +60,21 @@ function termChart(
     const sorted = [...term.slopes].sort((a, b) => a.estimate - b.estimate);
     const low = sorted[0]!;
     const high = sorted.at(-1)!;
-    const caption = `${raised(slopeSubject(lexicon, first))} goes with ${shortEffect(lexicon, low)} at ${low.at}, ${shortEffect(lexicon, high)} at ${high.at}.`;
+    const caption = `${raised(slopeSubject(lexicon, first))} goes with ${shortEffect(lexicon, low)} at ${placeText(lexicon, low.at)}, ${shortEffect(lexicon, high)} at ${placeText(lexicon, high.at)}.`;
     return levelsChart(
       lexicon,
       name,
       `${heading}: ${slopeSubject(lexicon, first)}`,
-      term.slopes.map((s) => ({ name: s.at, difference: s })),
+      term.slopes.map((s) => ({ name: placeText(lexicon, s.at), difference: s })),
       caption,
-      `${differenceTitle(lexicon)}${first.per === null ? '' : ` per ${first.per}`}`,
+      slopeAxis(lexicon, first),
     );
   }
   if (term.kind === 'category' || term.kind === 'flag') {
     const [first] = term.typical_steps;
     if (first === undefined) return null;
     const largest = [...term.typical_steps].sort((a, b) => Math.abs(b.estimate) - Math.abs(a.estimate))[0]!;
-    const caption = `Against ${first.from} (hollow, at the plumb line), ${largest.to} differs most: ${shortEffect(lexicon, largest)} ${lexicon.response.label}.`;
+    const caption = `Against ${first.from} (hollow, at the plumb line), ${largest.to} differs most: ${effectOf(lexicon, largest)}.`;
     const marks = [
       { name: first.from, difference: null },
       ...term.typical_steps.map((s) => ({ name: s.to, difference: s })),
@@ -91,19 +91,19 @@ function curveCaption(lexicon: Lexicon, term: RecordTerm, model: RecordModel): s
   const others = partners(term, model);
   const label = raised(labelOf(lexicon, variable));
   if (others.length > 0) {
-    return `${label} where ${others.map((name) => labelOf(lexicon, name)).join(' and ')} is at its baseline or zero; the slopes below tell the rest. Dots: the line plus each row’s residual.`;
+    return `${label}, ${partnersHeld(lexicon, others)}; the interaction tells the rest. Dots: the line plus each row’s residual.`;
   }
   const finding =
     step === undefined
       ? `${label} and ${lexicon.response.label}`
-      : `${label} ${stepRange(lexicon, variable, step)}: ${shortEffect(lexicon, step)} ${lexicon.response.label}`;
+      : `${label} ${stepRange(lexicon, variable, step)}: ${effectOf(lexicon, step)}`;
   return `${finding}. Dots: the line plus each row’s residual.`;
 }
 
 function termRows(lexicon: Lexicon, term: RecordTerm): TermView['rows'] {
   const rows =
     term.kind === 'interaction'
-      ? term.slopes.map((s) => ({ ...s, name: s.at }))
+      ? term.slopes.map((s) => ({ ...s, name: placeText(lexicon, s.at) }))
       : term.kind === 'category'
         ? term.typical_steps.map((s) => ({ ...s, name: s.to }))
         : [];
@@ -123,4 +123,10 @@ function termRows(lexicon: Lexicon, term: RecordTerm): TermView['rows'] {
       interval: range(lower, upper, rounding) + mark,
     };
   });
+}
+
+/** "difference in fuel burned, L per t". */
+function slopeAxis(lexicon: Lexicon, slope: RecordTerm['slopes'][number]): string {
+  const unit = slope.per === null ? null : unitOf(lexicon, slope.of);
+  return `${differenceTitle(lexicon)}${slope.per === null ? '' : ` per ${unit ?? '1'}`}`;
 }

@@ -1,4 +1,4 @@
-import { NONE, share, value } from '../numbers.ts';
+import { NONE, share, value, withUnit } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import { counted } from './lexicon.ts';
 
@@ -19,10 +19,11 @@ export function criterionLabel(criterion: string): string {
   return Object.hasOwn(NAMES, criterion) ? NAMES[criterion]! : criterion;
 }
 
-export function acceptanceValue({ criterion, value: figure }: Criterion): string {
+export function acceptanceValue({ criterion, value: figure }: Criterion, unit: string | null): string {
   if (figure === null) return NONE;
   if (typeof figure === 'string') return figure;
-  return criterion.endsWith('r_squared') ? share(figure) : value(figure);
+  if (criterion.endsWith('r_squared')) return share(figure);
+  return withUnit(value(figure), criterion === 'residual_standard_error' ? unit : null);
 }
 
 /** "Both acceptance criteria are met." and the like; null where the study declares none. */

@@ -1,10 +1,11 @@
-import { count, percent, rounded, roundingFor, share, withUnit } from '../numbers.ts';
+import { count, percent, share } from '../numbers.ts';
 import type { RecordCandidate, RecordTerm, StudyRecord } from '../record-type.ts';
 import { briefEffect } from './effect.ts';
 import { counted, type Lexicon, labelOf, listed, raised } from './lexicon.ts';
+import { typicalMiss } from './miss.ts';
 import { predictionSentence } from './prediction.ts';
-import { fittedQuantity, fittedUnit, percentOfLog, scaleKind } from './scale.ts';
-import { stepRange } from './term.ts';
+import { fittedQuantity } from './scale.ts';
+import { stepPhrase } from './term.ts';
 
 /** A typical step of a term with the term that it belongs to. */
 export interface Rung {
@@ -39,10 +40,7 @@ function driverSentence(lexicon: Lexicon, terms: readonly RecordTerm[]): string[
   const rungs = largestRungs(terms).slice(0, 2);
   const said = rungs.map(({ term, step }) => {
     const variable = term.variables[0] ?? term.name;
-    const where =
-      step.from_value === null
-        ? stepRange(lexicon, variable, step)
-        : `from ${stepRange(lexicon, variable, step)}`;
+    const where = stepPhrase(lexicon, variable, step);
     return `${labelOf(lexicon, variable)} (${where}: ${briefEffect(lexicon, step)})`;
   });
   const [first, second] = said;
@@ -81,10 +79,6 @@ export function fitSentence(lexicon: Lexicon, candidate: RecordCandidate, candid
 }
 
 function missPhrase(lexicon: Lexicon, candidate: RecordCandidate): string {
-  const s = candidate.residual_standard_error;
-  if (s === null) return '';
-  if (scaleKind(lexicon.response.scale) === 'log') {
-    return `; its typical miss is ${withUnit(rounded(percentOfLog(s), roundingFor(1, percentOfLog(s))), '%')}`;
-  }
-  return `; its typical miss is ${withUnit(rounded(s, roundingFor(s, s)), fittedUnit(lexicon.response))}`;
+  const miss = typicalMiss(lexicon, candidate.residual_standard_error);
+  return miss === null ? '' : `; it typically misses by ${miss}`;
 }

@@ -1,7 +1,8 @@
 import { count, percent } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import { acceptanceValue, criterionLabel } from './acceptance.ts';
-import { listed, raised, stopped } from './lexicon.ts';
+import { type Lexicon, listed, raised, stopped } from './lexicon.ts';
+import { fittedUnit } from './scale.ts';
 
 /** At least this many lines stand on the first screen, and at most that many. */
 const FEWEST = 3;
@@ -11,10 +12,10 @@ const MOST = 5;
  * "Before you rely on this": most important first. What was missed or found comes before what is always
  * true; the standing cautions fill the list up to three.
  */
-export function bewareLines(record: StudyRecord): string[] {
+export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
   const findings = record.examination?.findings ?? [];
   const lines = [
-    ...missedLines(record),
+    ...missedLines(record, fittedUnit(lexicon.response)),
     ...findings.filter((f) => f.concern === 2).map((f) => findingLine(f)),
     ...outsideLine(record),
     ...record.warnings.map((w) => raised(stopped(w.text))),
@@ -33,10 +34,12 @@ export function bewareLines(record: StudyRecord): string[] {
   return shown;
 }
 
-function missedLines(record: StudyRecord): string[] {
+function missedLines(record: StudyRecord, unit: string | null): string[] {
   return record.acceptance
     .filter((c) => !c.passed)
-    .map((c) => `${criterionLabel(c.criterion)} is ${acceptanceValue(c)}; the study asks for ${c.limit}.`);
+    .map(
+      (c) => `${criterionLabel(c.criterion)} is ${acceptanceValue(c, unit)}; the study asks for ${c.limit}.`,
+    );
 }
 
 function findingLine(finding: { readonly verdict: string; readonly advice: string | null }): string {

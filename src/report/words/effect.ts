@@ -16,90 +16,91 @@ interface Manner {
   readonly upper: number | null;
   readonly rounding: Rounding;
   readonly unit: string | null;
-  /** What stands behind "more": "fuel burned", "in the square root of fuel burned". */
+  /** "more", "less", or null for a multiple, which needs neither. */
+  readonly direction: 'more' | 'less' | null;
+  /** What stands behind it: "fuel burned", "in the square root of fuel burned", "the fuel burned". */
   readonly of: string;
-}
-
-function mannerOf(lexicon: Lexicon, difference: Difference): Manner {
-  const { estimate, lower, upper } = difference;
-  const kind = scaleKind(lexicon.response.scale);
-  if (kind === 'log') {
-    const b = percentOfLog(estimate);
-    const low = lower === null ? null : percentOfLog(lower);
-    const high = upper === null ? null : percentOfLog(upper);
-    return {
-      estimate: b,
-      lower: low,
-      upper: high,
-      rounding: roundingOfInterval(b, low, high),
-      unit: '%',
-      of: lexicon.response.label,
-    };
-  }
-  return {
-    estimate,
-    lower,
-    upper,
-    rounding: roundingOfInterval(estimate, lower, upper),
-    unit: fittedUnit(lexicon.response),
-    of: kind === 'natural' ? lexicon.response.label : `in ${fittedQuantity(lexicon.response)}`,
-  };
 }
 
 /** Beyond a fourfold change, per cent are hard to take in and a multiple says it better. */
 const MULTIPLE_FROM = Math.log(4);
 
-/** "1.93 L more fuel burned (95 % interval 1.64 to 2.22 L)": a difference in words, with its interval. */
-export function effectPhrase(lexicon: Lexicon, difference: Difference): string {
-  const { estimate, lower, upper } = difference;
-  if (scaleKind(lexicon.response.scale) === 'log' && Math.abs(estimate) > MULTIPLE_FROM) {
-    return multiplePhrase(lexicon, difference);
+function mannerOf({ response }: Lexicon, difference: Difference): Manner {
+  const kind = scaleKind(response.scale);
+  const direction = difference.estimate < 0 ? 'less' : 'more';
+  if (kind === 'log') {
+    return Math.abs(difference.estimate) > MULTIPLE_FROM
+      ? manner(difference, Math.exp, 'times', null, `the ${response.label}`)
+      : manner(difference, percentOfLog, '%', direction, response.label);
   }
-  const manner = mannerOf(lexicon, difference);
-  const size = withUnit(rounded(Math.abs(manner.estimate), manner.rounding), manner.unit);
-  const direction = estimate < 0 ? 'less' : 'more';
-  const main = `${size} ${direction} ${manner.of}`;
-  if (lower === null || upper === null) return main;
-  return `${main} (${intervalPhrase(lexicon, manner)})`;
+  const of = kind === 'natural' ? response.label : `in ${fittedQuantity(response)}`;
+  return manner(difference, (x) => x, fittedUnit(response), direction, of);
 }
 
-/** "112 L more": the difference alone, for labels and captions. */
+function manner(
+  { estimate, lower, upper }: Difference,
+  say: (x: number) => number,
+  unit: string | null,
+  direction: Manner['direction'],
+  of: string,
+): Manner {
+  const b = say(estimate);
+  const low = lower === null ? null : say(lower);
+  const high = upper === null ? null : say(upper);
+  return {
+    estimate: b,
+    lower: low,
+    upper: high,
+    rounding: roundingOfInterval(b, low, high),
+    unit,
+    direction,
+    of,
+  };
+}
+
+/** "1.93 L more", "6.9 times". */
+function sizePhrase({ estimate, rounding, unit, direction }: Manner): string {
+  const size = withUnit(rounded(Math.abs(estimate), rounding), unit);
+  return direction === null ? size : `${size} ${direction}`;
+}
+
+/** "1.93 L more fuel burned (95 % interval 1.64 to 2.22 L)": a difference in words, with its interval. */
+export function effectPhrase(lexicon: Lexicon, difference: Difference): string {
+  const said = mannerOf(lexicon, difference);
+  const main = `${sizePhrase(said)} ${said.of}`;
+  const interval = intervalPhrase(lexicon, said);
+  return interval === null ? main : `${main} (${interval})`;
+}
+
+/** "112 L more": the difference alone, where the response is named beside it. */
 export function shortEffect(lexicon: Lexicon, difference: Difference): string {
-  const manner = mannerOf(lexicon, difference);
-  const size = withUnit(rounded(Math.abs(manner.estimate), manner.rounding), manner.unit);
-  return `${size} ${difference.estimate < 0 ? 'less' : 'more'}`;
+  return sizePhrase(mannerOf(lexicon, difference));
+}
+
+/** "112 L more fuel burned", without the interval. */
+export function effectOf(lexicon: Lexicon, difference: Difference): string {
+  const said = mannerOf(lexicon, difference);
+  return `${sizePhrase(said)} ${said.of}`;
 }
 
 /** "111.9 L more, 95 % interval 104.9 to 118.8 L": where the response has just been named. */
 export function briefEffect(lexicon: Lexicon, difference: Difference): string {
-  const { lower, upper } = difference;
-  const main = shortEffect(lexicon, difference);
-  return lower === null || upper === null
-    ? main
-    : `${main}, ${intervalPhrase(lexicon, mannerOf(lexicon, difference))}`;
+  const said = mannerOf(lexicon, difference);
+  const interval = intervalPhrase(lexicon, said);
+  return interval === null ? sizePhrase(said) : `${sizePhrase(said)}, ${interval}`;
 }
 
-function intervalPhrase(lexicon: Lexicon, manner: Manner): string {
+function intervalPhrase(
+  lexicon: Lexicon,
+  { estimate, lower, upper, rounding, unit, direction }: Manner,
+): string | null {
+  if (lower === null || upper === null) return null;
   const name = `${percent(lexicon.confidence)} interval`;
-  const low = manner.lower as number;
-  const high = manner.upper as number;
-  if (low < 0 && high > 0) {
-    const less = withUnit(rounded(-low, manner.rounding), manner.unit);
-    const more = withUnit(rounded(high, manner.rounding), manner.unit);
-    return `${name} ${less} less to ${more} more`;
+  if (direction !== null && lower < 0 && upper > 0) {
+    return `${name} ${withUnit(rounded(-lower, rounding), unit)} less to ${withUnit(rounded(upper, rounding), unit)} more`;
   }
-  const [from, to] = manner.estimate < 0 ? [-high, -low] : [low, high];
-  return `${name} ${rangeWithUnit(from, to, manner.rounding, manner.unit)}`;
-}
-
-function multiplePhrase(lexicon: Lexicon, { estimate, lower, upper }: Difference): string {
-  const times = Math.exp(estimate);
-  const low = lower === null ? null : Math.exp(lower);
-  const high = upper === null ? null : Math.exp(upper);
-  const rounding = roundingOfInterval(times, low, high);
-  const main = `${rounded(times, rounding)} times the ${lexicon.response.label}`;
-  if (low === null || high === null) return main;
-  return `${main} (${percent(lexicon.confidence)} interval ${rangeWithUnit(low, high, rounding, null)} times)`;
+  const [from, to] = direction !== null && estimate < 0 ? [-upper, -lower] : [lower, upper];
+  return `${name} ${rangeWithUnit(from, to, rounding, unit)}`;
 }
 
 /** Whether the interval leaves the direction open; false where there is no interval. */

@@ -1,4 +1,4 @@
-import { value, withUnit } from '../numbers.ts';
+import { decimalExponent, isoDate, value, withUnit } from '../numbers.ts';
 import type { RecordCoefficient, RecordModel, RecordTerm } from '../record-type.ts';
 import { effectPhrase, openSentence, shortEffect } from './effect.ts';
 import { type Lexicon, labelOf, listed, raised, unitOf, variableNamed } from './lexicon.ts';
@@ -60,11 +60,25 @@ function hasCompanion(term: RecordTerm, model: RecordModel): boolean {
   );
 }
 
+/**
+ * Where the record holds the other members of an interaction while one moves: categories at their baseline,
+ * flags at the value coded 0, numbers at their mean.
+ */
+export function partnersHeld(lexicon: Lexicon, others: readonly string[]): string {
+  const places = others.map((name) => {
+    const variable = variableNamed(lexicon, name);
+    const label = labelOf(lexicon, name);
+    const [baseline] = variable?.levels ?? [];
+    if (baseline !== undefined) return `${label} is ${baseline.level}`;
+    if (variable === null || variable.mean === null) return `${label} is at its mean`;
+    return `${label} is at its mean of ${withUnit(value(variable.mean, 3), variable.unit)}`;
+  });
+  return `where ${listed(places)}`;
+}
+
 function heldPhrase(lexicon: Lexicon, term: RecordTerm, model: RecordModel): string {
   const others = partners(term, model);
-  if (others.length > 0) {
-    return `, averaged over the rows’ ${listed(others.map((name) => labelOf(lexicon, name)))}, the other terms held`;
-  }
+  if (others.length > 0) return `, ${partnersHeld(lexicon, others)}, the other terms held`;
   return model.terms.length > 1 ? ', the other terms held' : '';
 }
 
@@ -111,20 +125,53 @@ function doublingSentence(
 
 /** "From 48 to 112 t" for a numeric step. */
 export function stepRange(lexicon: Lexicon, variable: string, step: Step): string {
-  const unit = unitOf(lexicon, variable);
   const { from_value: from, to_value: to } = step;
-  if (from === null || to === null) return `${step.to} rather than ${step.from}`;
-  return `${value(from, 3)} to ${withUnit(value(to, 3), unit)}`;
+  if (from === null || to === null || isJump(lexicon, variable, step))
+    return `${step.to} rather than ${step.from}`;
+  if (variableNamed(lexicon, variable)?.type === 'date') return `${isoDate(from)} to ${isoDate(to)}`;
+  const [low, high] = twoValues(from, to);
+  return `${low} to ${withUnit(high, unitOf(lexicon, variable))}`;
+}
+
+/** "from 48 to 112 t", "Tern rather than Skerry". */
+export function stepPhrase(lexicon: Lexicon, variable: string, step: Step): string {
+  const text = stepRange(lexicon, variable, step);
+  return isJump(lexicon, variable, step) ? text : `from ${text}`;
+}
+
+/** Whether the step goes from one level or value of a flag to another. */
+function isJump(lexicon: Lexicon, variable: string, step: Step): boolean {
+  return (
+    step.from_value === null || step.to_value === null || variableNamed(lexicon, variable)?.type === 'flag'
+  );
+}
+
+/** Two values with as few digits as tell them apart well. */
+function twoValues(from: number, to: number): [string, string] {
+  const digits = Math.max(
+    3,
+    decimalExponent(Math.max(Math.abs(from), Math.abs(to)), 3) - decimalExponent(to - from, 3) + 2,
+  );
+  return [value(from, digits), value(to, digits)];
+}
+
+/** "the middle half of its values", or the whole range where the record had to take that. */
+function stepName(lexicon: Lexicon, variable: string): string {
+  const described = variableNamed(lexicon, variable);
+  return described !== null &&
+    described.lower_quartile !== null &&
+    described.lower_quartile === described.upper_quartile
+    ? 'the whole range of its values'
+    : 'the middle half of its values';
 }
 
 function stepSentences(lexicon: Lexicon, term: RecordTerm, model: RecordModel): string[] {
   const [step] = term.typical_steps;
   const variable = term.variables[0];
   if (step === undefined || variable === undefined) return [];
-  const span =
-    step.from_value === null
-      ? stepRange(lexicon, variable, step)
-      : `from ${stepRange(lexicon, variable, step)}, the middle half of its values,`;
+  const span = isJump(lexicon, variable, step)
+    ? stepRange(lexicon, variable, step)
+    : `from ${stepRange(lexicon, variable, step)}, ${stepName(lexicon, variable)},`;
   const alone = term.kind === 'number' && partners(term, model).length === 0 && !hasCompanion(term, model);
   return [
     alone
@@ -201,11 +248,11 @@ function interactionSentences(lexicon: Lexicon, term: RecordTerm): string[] {
     const low = sorted[0]!;
     const high = sorted.at(-1)!;
     return [
-      `What ${slopeSubject(lexicon, low)} goes with lies between ${shortEffect(lexicon, low)} (${low.at}) and ${shortEffect(lexicon, high)} (${high.at}), the other terms held.`,
+      `What ${slopeSubject(lexicon, low)} goes with lies between ${shortEffect(lexicon, low)} (${placeText(lexicon, low.at)}) and ${shortEffect(lexicon, high)} (${placeText(lexicon, high.at)}), the other terms held.`,
     ];
   }
   return term.slopes.map((slope) => {
-    return `At ${slope.at}, ${slopeSubject(lexicon, slope)} goes with ${effectPhrase(lexicon, slope)}.${openSentence(slope)}`;
+    return `At ${placeText(lexicon, slope.at)}, ${slopeSubject(lexicon, slope)} goes with ${effectPhrase(lexicon, slope)}.${openSentence(slope)}`;
   });
 }
 
@@ -213,5 +260,21 @@ function interactionSentences(lexicon: Lexicon, term: RecordTerm): string[] {
 export function slopeSubject(lexicon: Lexicon, slope: Slope): string {
   const variable = variableNamed(lexicon, slope.of);
   if (variable === null || variable.type === 'category' || variable.type === 'flag') return slope.of;
-  return oneMore(labelOf(lexicon, variable.name), slope.per);
+  return oneMore(labelOf(lexicon, variable.name), variable.unit);
+}
+
+/** Where a slope is told, for people: names become labels, numbers are rounded and carry their unit. */
+export function placeText(lexicon: Lexicon, at: string): string {
+  const names = [...lexicon.variables.keys()].sort((a, b) => b.length - a.length);
+  return at
+    .split(', ')
+    .map((part) => {
+      const name = names.find((candidate) => part.startsWith(`${candidate} `));
+      if (name === undefined) return part;
+      const rest = part.slice(name.length + 1);
+      const number = rest.trim() === '' ? Number.NaN : Number(rest);
+      const numeric = variableNamed(lexicon, name)?.levels === null && Number.isFinite(number);
+      return `${labelOf(lexicon, name)} ${numeric ? withUnit(value(number, 3), unitOf(lexicon, name)) : rest}`;
+    })
+    .join(', ');
 }
