@@ -23,8 +23,8 @@ export function nestedTooDeep(text: string): number | null {
       continue;
     }
     const indicator = (character === '-' || character === '?' || character === ':') && isBlank(text[at + 1]);
-    if (inIndent && !indicator && !isBlank(character)) {
-      inIndent = false;
+    if (inIndent && !isBlank(character)) {
+      inIndent = indicator;
       if (at - lineStart > WIDEST_INDENT) return at;
     }
     if (character === '[' || character === '{') brackets++;
