@@ -1,6 +1,6 @@
-import { readFileSync } from 'node:fs';
 import { Command, CommanderError, Option } from 'commander';
 import type { Problem } from '../problem.ts';
+import { packageVersion } from '../version.ts';
 import type { CommonOptions } from './common-options.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
 import type { RenderCommandOptions } from './render.ts';
@@ -147,9 +147,4 @@ function ownFault(fault: unknown, terminal: Terminal): number {
     terminal.err('Set PLUMBRULE_DEBUG=1 to see where it happened.\n');
   }
   return OWN_FAULT;
-}
-
-function packageVersion(): string {
-  const text = readFileSync(new URL('../../package.json', import.meta.url), 'utf8');
-  return (JSON.parse(text) as { version: string }).version;
 }

@@ -4,7 +4,7 @@ import { count, isoDate, value } from '../report/numbers.ts';
 import { counted, listed } from '../report/words/lexicon.ts';
 import type { CheckedStudy } from '../run.ts';
 import type { Study } from '../study/study.ts';
-import { type Paragraph, plumbLine, type Section, tableLines } from './plumb-line.ts';
+import { type Paragraph, plumbLine, type Section } from './plumb-line.ts';
 import type { Terminal } from './terminal.ts';
 
 /** What `check` found: what is declared, the state of the data's contract, and the rows that would be fitted. Empty where the study could not be read. */
@@ -50,15 +50,15 @@ function dataFound(table: Table): Paragraph[] {
   return [
     `${table.file}: ${counted(table.rowCount, 'row', 'rows', count)} read; ${table.badValueCount === 0 ? 'every cell keeps the contract.' : `${counted(table.badValueCount, 'cell breaks', 'cells break', count)} the contract.`}`,
     ...(table.ignored.length > 0 ? [`Not used by the study: ${listed(table.ignored)}.`] : []),
-    ...tableLines(
-      [
-        { heading: 'variable', align: 'left', widest: 24 },
+    {
+      columns: [
+        { heading: 'variable', align: 'left' },
         { heading: 'type', align: 'left' },
         { heading: 'missing', align: 'right' },
-        { heading: 'found', align: 'left', widest: 40 },
+        { heading: 'found', align: 'left', shrinks: true },
       ],
       rows,
-    ),
+    },
   ];
 }
 
@@ -74,7 +74,9 @@ function found(summary: Table['summaries'][number]): string {
 function rowsLeft(sample: Sample, table: Table): Paragraph[] {
   return [
     `${count(sample.rowCount)} of ${counted(table.rowCount, 'row', 'rows', count)} would be fitted.`,
-    ...sample.losses.map((loss) => ({ mark: count(loss.rows).padStart(6), text: loss.because })),
+    ...sample.losses
+      .filter((loss) => loss.rows > 0)
+      .map((loss) => ({ mark: count(loss.rows).padStart(6), text: loss.because })),
   ];
 }
 

@@ -8,8 +8,12 @@ export interface Section {
   readonly paragraphs: readonly Paragraph[];
 }
 
-/** A text to be wrapped; or one with a first line mark ("1.", "·"); or a line to be kept as it is. */
-export type Paragraph = string | { readonly mark: string; readonly text: string } | { readonly line: string };
+/** A text to be wrapped; one with a mark before its first line ("12", "·"); a line to be kept; or a table. */
+export type Paragraph =
+  | string
+  | { readonly mark: string; readonly text: string }
+  | { readonly line: string }
+  | { readonly columns: readonly TableColumn[]; readonly rows: readonly (readonly string[])[] };
 
 const LABEL = 9;
 
@@ -40,7 +44,8 @@ export function plumbLine(sections: readonly Section[], terminal: Terminal): str
 
 function laidOut(paragraph: Paragraph, width: number): string[] {
   if (typeof paragraph === 'string') return wrapped(printable(paragraph), width);
-  if ('line' in paragraph) return [paragraph.line];
+  if ('line' in paragraph) return [printable(paragraph.line)];
+  if ('rows' in paragraph) return tableLines(paragraph.columns, paragraph.rows, width);
   const indent = paragraph.mark.length + 1;
   return wrapped(printable(paragraph.text), width - indent).map(
     (line, index) => (index === 0 ? `${paragraph.mark} ` : ' '.repeat(indent)) + line,
@@ -70,28 +75,40 @@ export function printable(text: string): string {
 export interface TableColumn {
   readonly heading: string;
   readonly align: 'left' | 'right';
-  /** Longest that a cell is shown; the rest becomes an ellipsis. */
-  readonly widest?: number;
+  /** Whether its cells are shortened, with an ellipsis, where the table would be too wide. */
+  readonly shrinks?: boolean;
 }
 
-/** A table as lines to be kept: headings, then rows, columns two spaces apart. */
-export function tableLines(
+/** Columns that shrink keep at least so many characters. */
+const FEWEST = 12;
+
+/** Headings, then rows, columns two spaces apart, as wide as they need or as `width` allows. */
+function tableLines(
   columns: readonly TableColumn[],
   rows: readonly (readonly string[])[],
-): Paragraph[] {
-  const shown = [columns.map((column) => column.heading), ...rows].map((row) =>
-    columns.map((column, j) => shortened(printable(row[j] ?? ''), column.widest ?? Number.MAX_SAFE_INTEGER)),
+  width: number,
+): string[] {
+  const cells = [columns.map((column) => column.heading), ...rows].map((row) =>
+    columns.map((_, j) => printable(row[j] ?? '')),
   );
-  const widths = columns.map((_, j) => Math.max(...shown.map((row) => shownLength(row[j] ?? ''))));
-  return shown.map((row) => ({
-    line: row
+  const widths = columns.map((_, j) => Math.max(...cells.map((row) => shownLength(row[j] ?? ''))));
+  let excess = widths.reduce((sum, each) => sum + each, 2 * (columns.length - 1)) - width;
+  columns.forEach((column, j) => {
+    if (!column.shrinks || excess <= 0) return;
+    const narrower = Math.max(FEWEST, (widths[j] ?? 0) - excess);
+    excess -= (widths[j] ?? 0) - narrower;
+    widths[j] = narrower;
+  });
+  return cells.map((row) =>
+    row
       .map((cell, j) => {
-        const gap = ' '.repeat((widths[j] ?? 0) - shownLength(cell));
-        return columns[j]?.align === 'right' ? gap + cell : cell + gap;
+        const shown = columns[j]?.shrinks ? shortened(cell, widths[j] ?? 0) : cell;
+        const gap = ' '.repeat(Math.max(0, (widths[j] ?? 0) - shownLength(shown)));
+        return columns[j]?.align === 'right' ? gap + shown : shown + gap;
       })
       .join('  ')
       .trimEnd(),
-  }));
+  );
 }
 
 function shortened(text: string, widest: number): string {

@@ -1,15 +1,15 @@
-import type { RecordCandidate, StudyRecord } from '../record/record.ts';
+import type { RecordCandidate, RecordModel, RecordTerm, StudyRecord } from '../record/record.ts';
 import { count, fixed, percent, rangeWithUnit, rounded, withUnit } from '../report/numbers.ts';
-import { acceptanceSentence, acceptanceValue, criterionLabel } from '../report/words/acceptance.ts';
+import { acceptanceSentence } from '../report/words/acceptance.ts';
 import { answerSentences, fitSentence } from '../report/words/answer.ts';
 import { bewareLines } from '../report/words/beware.ts';
 import { contractSentence, dateRange, lossReason, rowsSentence } from '../report/words/data.ts';
 import { concernWord } from '../report/words/finding.ts';
-import { type Lexicon, lexiconOf } from '../report/words/lexicon.ts';
+import { counted, type Lexicon, lexiconOf } from '../report/words/lexicon.ts';
 import { predictionRounding, totalSentence } from '../report/words/prediction.ts';
 import { criterionName, criterionRounding, ruleSentences } from '../report/words/selection.ts';
 import { termSentences } from '../report/words/term.ts';
-import { type Paragraph, plumbLine, type Section, tableLines } from './plumb-line.ts';
+import { type Paragraph, plumbLine, type Section } from './plumb-line.ts';
 import type { Terminal } from './terminal.ts';
 
 /** Longest lists of candidates, terms and predictions; the report and the tables have all. */
@@ -25,8 +25,8 @@ export function summary(record: StudyRecord, places: readonly string[], terminal
     { label: 'says', paragraphs: says(record, lexicon) },
     { label: 'trust', paragraphs: trust(record) },
     { label: 'predicts', paragraphs: predicts(record, lexicon) },
-    { label: 'careful', paragraphs: bewareLines(record).map((text) => ({ mark: '·', text })) },
-    { label: 'accepted', paragraphs: accepted(record) },
+    { label: 'careful', paragraphs: bewareLines(record, lexicon).map((text) => ({ mark: '·', text })) },
+    { label: 'accepted', paragraphs: present(acceptanceSentence(record.acceptance)) },
     { label: 'written', paragraphs: places.map((line) => ({ line })) },
   ];
   return plumbLine(
@@ -44,7 +44,9 @@ function data(record: StudyRecord): Paragraph[] {
   const dates = dateRange(record.data);
   return [
     `${record.data.file}${dates === null ? '' : `, ${dates}`}. ${rowsSentence(record.data)}`,
-    ...losses.map((loss) => ({ mark: count(loss.rows).padStart(6), text: lossReason(loss) })),
+    ...losses
+      .filter((loss) => loss.rows > 0)
+      .map((loss) => ({ mark: count(loss.rows).padStart(6), text: lossReason(loss) })),
     ...(bad > 0 ? [contractSentence(record.data)] : []),
   ];
 }
@@ -66,16 +68,16 @@ function tried(record: StudyRecord): Paragraph[] {
   const more = candidates.length - rows.length;
   return [
     ruleSentences(selection, candidates.length).join(' '),
-    ...tableLines(
-      [
+    {
+      columns: [
         { heading: 'rank', align: 'right' },
-        { heading: 'candidate', align: 'left', widest: 32 },
+        { heading: 'candidate', align: 'left', shrinks: true },
         { heading: `${criterionName(selection.rank_by)}, from the best`, align: 'right' },
         { heading: 'coefficients', align: 'right' },
         { heading: '', align: 'left' },
       ],
       rows,
-    ),
+    },
     ...(more > 0 ? [`${count(more)} more are in tables/candidates.csv.`] : []),
     selection.because,
   ];
@@ -90,28 +92,50 @@ function says(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
     fitSentence(lexicon, candidate, record.candidates.length),
     ...model.terms
       .slice(0, MOST)
-      .map((term) => termSentences(lexicon, term, model, candidate.coefficients).join(' '))
+      .map((term) => termInBrief(lexicon, term, model, candidate))
       .filter((text) => text !== '')
       .map((text) => ({ mark: '·', text })),
     ...(more > 0 ? [`${count(more)} more terms are in the report.`] : []),
   ];
 }
 
+/** A category's levels and an interaction's places each have a sentence; of the rest the first says most. */
+function termInBrief(
+  lexicon: Lexicon,
+  term: RecordTerm,
+  model: RecordModel,
+  candidate: RecordCandidate,
+): string {
+  const sentences = termSentences(lexicon, term, model, candidate.coefficients);
+  return sentences.slice(0, term.kind === 'category' || term.kind === 'interaction' ? 4 : 1).join(' ');
+}
+
 function chosenCandidate(record: StudyRecord): RecordCandidate | undefined {
   return record.candidates.find((candidate) => candidate.name === record.selection.chosen);
 }
 
-/** One line per question; what to do about them stands under "careful". */
+/** The questions that found something; what to do about them stands under "careful". */
 function trust(record: StudyRecord): Paragraph[] {
   const findings = record.examination?.findings ?? [];
+  const found = findings.filter((finding) => finding.concern > 0);
   if (findings.length === 0) return [];
-  return tableLines(
-    [
-      { heading: 'question', align: 'left', widest: 62 },
-      { heading: 'finding', align: 'left' },
-    ],
-    findings.map((finding) => [finding.question, concernWord(finding.concern).toLowerCase()]),
-  );
+  const quiet = findings.length - found.length;
+  return [
+    ...(found.length === 0
+      ? []
+      : [
+          {
+            columns: [
+              { heading: 'question', align: 'left' as const, shrinks: true },
+              { heading: 'finding', align: 'left' as const },
+            ],
+            rows: found.map((finding) => [finding.question, concernWord(finding.concern).toLowerCase()]),
+          },
+        ]),
+    found.length === 0
+      ? `${counted(quiet, 'question was', 'questions were')} put to it, with nothing to see.`
+      : `${counted(quiet, 'more question was', 'more questions were')} put to it, with nothing to see.`,
+  ];
 }
 
 function predicts(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
@@ -129,28 +153,16 @@ function predicts(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
   });
   const more = predictions.length - rows.length;
   return [
-    ...tableLines(
-      [
-        { heading: 'row', align: 'left', widest: 28 },
+    {
+      columns: [
+        { heading: 'row', align: 'left', shrinks: true },
         { heading: 'estimate', align: 'right' },
         { heading: `${percent(record.study.prediction_interval)} interval, new row`, align: 'right' },
         { heading: '', align: 'left' },
       ],
       rows,
-    ),
+    },
     ...(more > 0 ? [`${count(more)} more are in tables/predictions.csv.`] : []),
     ...(total === null ? [] : [totalSentence(lexicon, total)]),
-  ];
-}
-
-function accepted(record: StudyRecord): Paragraph[] {
-  const sentence = acceptanceSentence(record.acceptance);
-  if (sentence === null) return [];
-  return [
-    sentence,
-    ...record.acceptance.map((criterion) => ({
-      mark: criterion.passed ? 'met   ' : 'missed',
-      text: `${criterionLabel(criterion.criterion)} ${acceptanceValue(criterion)}, asked for ${criterion.limit}`,
-    })),
   ];
 }

@@ -132,7 +132,7 @@ describe('check', () => {
     const { path } = await study('selektion: {}\n', DATA, STUDY.replace('[x, z]', '[x, zz]'));
     const { status, err } = await plumbrule('check', path);
     expect(status).toBe(2);
-    expect(err).toContain(`${path}:14:`);
+    expect(err).toContain(`${path}:15:16 `);
     expect(err).toContain('selektion');
     expect(err).toContain('Did you mean selection?');
     const json = await plumbrule('check', path, '--problems', 'json');
@@ -151,7 +151,9 @@ describe('check', () => {
 
 describe('fit', () => {
   test('writes its files and tells what it found in the order in which a reader asks', async () => {
-    const { path, out: folderOut } = await study('predict: { rows: [{ label: One, x: 4 }], total: true }\n');
+    const { path, out: folderOut } = await study(
+      'predict: { rows: [{ label: One, x: 4, z: 1 }], total: true }\n',
+    );
     const { status, out, err } = await plumbrule('fit', path, '--out', folderOut);
     expect(status, err).toBe(0);
     const labels = [...out.matchAll(/^ *([a-z]+) [│▼]/gm)].map((match) => match[1]);

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { plumbLine, printable, tableLines, wrapped } from '../../src/cli/plumb-line.ts';
+import { plumbLine, printable, wrapped } from '../../src/cli/plumb-line.ts';
 import { collecting } from './collect.ts';
 
 describe('plumbLine', () => {
@@ -48,7 +48,8 @@ describe('plumbLine', () => {
           paragraphs: [
             evil,
             { mark: '·', text: evil },
-            ...tableLines([{ heading: 'x', align: 'left' }], [[evil]]),
+            { columns: [{ heading: 'x', align: 'left' }], rows: [[evil]] },
+            { line: evil },
           ],
         },
       ],
@@ -76,20 +77,27 @@ describe('wrapped', () => {
   });
 });
 
-describe('tableLines', () => {
-  test('aligns, shortens, and takes no place for marks above letters', () => {
-    const lines = tableLines(
-      [
-        { heading: 'row', align: 'left', widest: 6 },
-        { heading: 'estimate', align: 'right' },
-      ],
-      [['cafe\u0301', '1.5'], ['a long name', '−12'], ['short']],
+test('a table aligns, shortens what may shrink, and gives no place to marks above letters', () => {
+  const { terminal } = collecting({ width: 48 });
+  const columns = [
+    { heading: 'row', align: 'left' as const, shrinks: true },
+    { heading: 'estimate', align: 'right' as const },
+  ];
+  const text = (name: string) =>
+    plumbLine(
+      [{ label: 'predicts', paragraphs: [{ columns, rows: [['cafe\u0301', '1.5'], [name, '−12'], ['c']] }] }],
+      terminal,
     );
-    expect(lines).toEqual([
-      { line: 'row     estimate' },
-      { line: 'cafe\u0301         1.5' },
-      { line: 'a lon…       −12' },
-      { line: 'short' },
-    ]);
-  });
+  expect(text('a name')).toBe(
+    [
+      ' predicts │ row     estimate',
+      '          │ cafe\u0301         1.5',
+      '          │ a name       −12',
+      '          ▼ c',
+      '',
+    ].join('\n'),
+  );
+  const long = text('a name that goes on and on and on and on').split('\n');
+  expect(long[2]).toBe('          │ a name that goes on and o…       −12');
+  for (const line of long) expect([...line].length).toBeLessThanOrEqual(49);
 });
