@@ -20,3 +20,8 @@ export function quote(text: string): string {
 function shorten(text: string): string {
   return text.length <= 60 ? text : `${text.slice(0, 57)}…`;
 }
+
+/** "a, b and c" */
+export function listed(words: readonly string[], last: 'and' | 'or'): string {
+  return words.length < 2 ? words.join('') : `${words.slice(0, -1).join(', ')} ${last} ${words.at(-1)}`;
+}

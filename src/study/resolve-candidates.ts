@@ -1,32 +1,10 @@
-import { lookUpOfType, type Names } from './names.ts';
+import type { Names } from './names.ts';
 import { type Path, quote, showPath } from './path.ts';
 import { fault, type Loose, type Reading, warning } from './reading.ts';
+import { resolveScale } from './resolve-scale.ts';
 import { resolveTerm, termKey, termPowers, termVariables } from './resolve-terms.ts';
-import type { CandidatePlan, ResponsePlan, Scale, TermPlan } from './study.ts';
-import type { CandidateInFile, ScaleInFile } from './study-file.generated.ts';
-
-export function resolveResponse(reading: Reading, names: Names): ResponsePlan | null {
-  const written = reading.file.response;
-  if (written === undefined) return null;
-  const isName = typeof written === 'string';
-  const name = isName ? written : written.variable;
-  if (name === undefined) return null;
-  const path = isName ? ['response'] : ['response', 'variable'];
-  const named = lookUpOfType(reading, names, name, path, ['number', 'integer'], 'a response is a number');
-  if (named === null) return null;
-  return { variable: name, scale: resolveScale(isName ? undefined : written.scale) ?? { kind: 'natural' } };
-}
-
-function resolveScale(written: Loose<ScaleInFile> | undefined): Scale | null {
-  if (written === undefined) return null;
-  if (typeof written === 'string') return { kind: written };
-  return written.box_cox === undefined ? null : { kind: 'box_cox', lambda: written.box_cox };
-}
-
-/** "log", "box_cox 0.5" */
-export function scaleText(scale: Scale): string {
-  return scale.kind === 'box_cox' ? `box_cox ${scale.lambda}` : scale.kind;
-}
+import type { CandidatePlan, ResponsePlan, TermPlan } from './study.ts';
+import type { CandidateInFile } from './study-file.generated.ts';
 
 /**
  * The candidates. `response` is null where it could not be resolved; `derivedFrom` gives the declared variables
@@ -134,50 +112,5 @@ function checkResponse(
       const hint = 'It is not known where the response is to be predicted, and the fit flatters itself.';
       warning(reading, 'type_unsuited', reading.written.placeOf(path), message, hint);
     }
-  }
-}
-
-/** A weight is a number. */
-export function resolveWeights(reading: Reading, names: Names): string | null {
-  const name = reading.file.weights;
-  if (name === undefined || name === null) return null;
-  const purpose = 'a weight is a number';
-  return lookUpOfType(reading, names, name, ['weights'], ['number', 'integer'], purpose)?.name ?? null;
-}
-
-/** Row identity and time order. */
-export function resolveRowRoles(
-  reading: Reading,
-  names: Names,
-): { readonly rowId: string | null; readonly time: string | null } {
-  const { row_id: rowId = null, time = null } = reading.file.data ?? {};
-  if (rowId !== null) {
-    const path = ['data', 'row_id'];
-    const purpose = 'rows are identified by an identifier, a text or an integer';
-    const suited = ['identifier', 'text', 'integer'] as const;
-    const named = lookUpOfType(reading, names, rowId, path, suited, purpose);
-    if (named?.derived === true) {
-      fault(
-        reading,
-        'type_unsuited',
-        path,
-        `data.row_id names ${rowId}, which is derived; ${purpose} in the data.`,
-      );
-    }
-  }
-  if (time !== null) {
-    const purpose = 'rows are put in order by a date or a number';
-    lookUpOfType(reading, names, time, ['data', 'time'], ['date', 'number', 'integer'], purpose);
-  }
-  return { rowId, time };
-}
-
-/** Reports names of derived variables that nothing uses. */
-export function warnOfUnused(reading: Reading, derived: readonly string[], used: ReadonlySet<string>): void {
-  for (const name of derived) {
-    if (used.has(name)) continue;
-    const place = reading.written.keyPlaceOf(['derive', name]);
-    const message = `${showPath(['derive', name])} is derived, but nothing uses it.`;
-    warning(reading, 'name_unused', place, message, 'Remove it, or add it to a candidate.');
   }
 }

@@ -1,8 +1,7 @@
 import { isoDays } from '../expression/iso-date.ts';
 import { didYouMean, type Named, type Names, TYPE_WORDS } from './names.ts';
-import { type Path, quote, showPath } from './path.ts';
+import { listed, type Path, quote, showPath } from './path.ts';
 import { cellText, fault, keyFault, type Reading, warning } from './reading.ts';
-import { listed } from './schema-faults.ts';
 import type { PredictPlan, PredictRowPlan, VariablePlan } from './study.ts';
 import { STUDY_DEFAULTS } from './study-defaults.generated.ts';
 

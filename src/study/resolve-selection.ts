@@ -1,9 +1,8 @@
 import { didYouMean } from './names.ts';
-import { quote, showPath } from './path.ts';
+import { listed, quote, showPath } from './path.ts';
 import { fault, type Loose, type Reading } from './reading.ts';
-import { scaleText } from './resolve-candidates.ts';
+import { scaleText } from './resolve-scale.ts';
 import { checkRange } from './resolve-variables.ts';
-import { listed } from './schema-faults.ts';
 import type {
   AcceptanceFigure,
   AcceptancePlan,

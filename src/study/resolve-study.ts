@@ -2,16 +2,11 @@ import { isAbsolute } from 'node:path';
 import { type Names, TYPE_WORDS } from './names.ts';
 import { type Path, quote, showPath } from './path.ts';
 import { entriesInOrder, fault, type Reading, warning } from './reading.ts';
-import {
-  resolveCandidates,
-  resolveResponse,
-  resolveRowRoles,
-  resolveWeights,
-  warnOfUnused,
-} from './resolve-candidates.ts';
+import { resolveCandidates } from './resolve-candidates.ts';
 import { resolveDerivations } from './resolve-derivations.ts';
 import { checkText, parseText, untypedUses } from './resolve-expression.ts';
 import { resolvePredict } from './resolve-predict.ts';
+import { resolveResponse, resolveRowRoles, resolveWeights } from './resolve-roles.ts';
 import { resolveAcceptance, resolveSelection } from './resolve-selection.ts';
 import { termVariables } from './resolve-terms.ts';
 import { dataMissing, resolveVariables } from './resolve-variables.ts';
@@ -221,5 +216,15 @@ function checkFileNames(reading: Reading): void {
   if (format?.delimiter !== undefined && format.delimiter === (format.decimal_mark ?? '.')) {
     const message = `data.format.delimiter and the decimal mark are both ${quote(format.delimiter ?? '')}.`;
     fault(reading, 'limit_nonsense', ['data', 'format', 'delimiter'], message);
+  }
+}
+
+/** Reports names of derived variables that nothing uses. */
+function warnOfUnused(reading: Reading, derived: readonly string[], used: ReadonlySet<string>): void {
+  for (const name of derived) {
+    if (used.has(name)) continue;
+    const place = reading.written.keyPlaceOf(['derive', name]);
+    const message = `${showPath(['derive', name])} is derived, but nothing uses it.`;
+    warning(reading, 'name_unused', place, message, 'Remove it, or add it to a candidate.');
   }
 }

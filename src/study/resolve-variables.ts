@@ -1,7 +1,6 @@
 import { didYouMean, type Named, TYPE_WORDS } from './names.ts';
-import { type Path, quote, showPath } from './path.ts';
+import { listed, type Path, quote, showPath } from './path.ts';
 import { cellText, cellTexts, entriesInOrder, fault, keyFault, type Loose, type Reading } from './reading.ts';
-import { listed } from './schema-faults.ts';
 import type { VariablePlan, VariableType } from './study.ts';
 import { STUDY_DEFAULTS } from './study-defaults.generated.ts';
 import type { VariableInFile } from './study-file.generated.ts';

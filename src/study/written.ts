@@ -1,22 +1,9 @@
-import {
-  type Alias,
-  type Document,
-  isAlias,
-  isCollection,
-  isMap,
-  isScalar,
-  isSeq,
-  LineCounter,
-  type Node,
-  type Pair,
-  parseDocument,
-  type Scalar,
-  visit,
-} from 'yaml';
+import { type Document, isCollection, isScalar, LineCounter, parseDocument, visit } from 'yaml';
 import type { Report, SourcePlace } from '../problem.ts';
 import { nestedTooDeep } from './nesting.ts';
-import { type Path, quote, showPath } from './path.ts';
+import type { Path } from './path.ts';
 import { offsetsInSource } from './scalar-offsets.ts';
+import { type PlaceAt, rangeOf, type Spot, spelt, walkDocument } from './walk-yaml.ts';
 import { yamlFault } from './yaml-fault.ts';
 
 /** A YAML text as plain data in which every value still knows where it stands. */
@@ -34,16 +21,6 @@ export interface Written {
   /** A scalar as it is spelt ("007" of 007), or null where there is none. */
   readonly textAt: (path: Path) => string | null;
 }
-
-interface Spot {
-  readonly node: Node | null;
-  readonly key: Node | null;
-  readonly children: ReadonlyMap<string | number, Spot>;
-}
-
-/** Values that aliases may repeat, all together. */
-const MOST_REPEATED = 10_000;
-const DEEPEST = 100;
 
 /**
  * Reads YAML 1.2 (core schema, one document). Gives null where the text cannot be taken as data at all;
@@ -85,18 +62,8 @@ export function readYaml(text: string, file: string, report: Report): Written | 
   }
   if (faults.length > 0) return null;
 
-  const walk: Walk = {
-    text,
-    placeAt,
-    report,
-    anchors: new Map(),
-    open: new Set(),
-    repeated: 0,
-    aliasDepth: 0,
-    failed: false,
-  };
-  const { value, spot } = walkNode(walk, document.contents, null, []);
-  return walk.failed ? null : { value, ...lookUps(spot, text, placeAt) };
+  const walked = walkDocument(document.contents, placeAt, report);
+  return walked === null ? null : { value: walked.value, ...lookUps(walked.spot, text, placeAt) };
 }
 
 /** Offset of the quotation mark that opens the text which ends unclosed at `end`, or null. */
@@ -110,8 +77,6 @@ function openedAt(document: Document, end: number): number | null {
   });
   return opened;
 }
-
-type PlaceAt = (start: number, end: number) => SourcePlace;
 
 function placer(text: string, lines: LineCounter, file: string): PlaceAt {
   return (start, end) => {
@@ -133,145 +98,6 @@ function placer(text: string, lines: LineCounter, file: string): PlaceAt {
 function lineStarts(text: string, lines: LineCounter): void {
   lines.addNewLine(0);
   for (let at = text.indexOf('\n'); at >= 0; at = text.indexOf('\n', at + 1)) lines.addNewLine(at + 1);
-}
-
-interface Walk {
-  readonly text: string;
-  readonly placeAt: PlaceAt;
-  readonly report: Report;
-  readonly anchors: Map<string, Node>;
-  /** Nodes being walked, to see an alias inside the value that it stands for. */
-  readonly open: Set<Node>;
-  repeated: number;
-  aliasDepth: number;
-  failed: boolean;
-}
-
-interface Walked {
-  readonly value: unknown;
-  readonly spot: Spot;
-}
-
-function walkNode(walk: Walk, node: Node | null, key: Node | null, path: Path): Walked {
-  if (walk.failed || node === null) return { value: null, spot: { node, key, children: new Map() } };
-  if (isAlias(node)) return walkAlias(walk, node, key, path);
-  if (walk.aliasDepth > 0 && ++walk.repeated > MOST_REPEATED) {
-    fail(walk, node, 'yaml_alias_limit', 'Aliases repeat more values than any study needs.');
-  }
-  if (path.length > DEEPEST) fail(walk, node, 'yaml_alias_limit', 'Aliases nest too deeply for a study.');
-  if (isScalar(node)) {
-    if (node.anchor !== undefined) walk.anchors.set(node.anchor, node);
-    return { value: node.value, spot: { node, key, children: new Map() } };
-  }
-  if (!isCollection(node)) return { value: null, spot: { node, key, children: new Map() } };
-  if (node.anchor !== undefined) walk.anchors.set(node.anchor, node);
-  walk.open.add(node);
-  const walked = isMap(node)
-    ? walkMap(walk, node, node.items, key, path)
-    : isSeq(node)
-      ? walkSeq(walk, node, node.items as Node[], key, path)
-      : { value: null, spot: { node, key, children: new Map() } };
-  walk.open.delete(node);
-  return walked;
-}
-
-function walkSeq(walk: Walk, node: Node, items: readonly Node[], key: Node | null, path: Path): Walked {
-  const children = new Map<number, Spot>();
-  const value = items.map((item, index) => {
-    const walked = walkNode(walk, item, null, [...path, index]);
-    children.set(index, walked.spot);
-    return walked.value;
-  });
-  return { value, spot: { node, key, children } };
-}
-
-function walkMap(walk: Walk, node: Node, pairs: readonly Pair[], key: Node | null, path: Path): Walked {
-  const children = new Map<string, Spot>();
-  const value: Record<string, unknown> = Object.create(null);
-  for (const pair of pairs) {
-    const keyNode = pair.key as Node | null;
-    const name = keyText(walk, keyNode);
-    if (name === null) continue;
-    const first = children.get(name);
-    if (first !== undefined) {
-      reportTwice(walk, name, keyNode, first, path);
-      continue;
-    }
-    const walked = walkNode(walk, pair.value as Node | null, keyNode, [...path, name]);
-    children.set(name, walked.spot);
-    value[name] = walked.value;
-  }
-  return { value, spot: { node, key, children } };
-}
-
-function walkAlias(walk: Walk, alias: Alias, key: Node | null, path: Path): Walked {
-  const target = walk.anchors.get(alias.source);
-  if (target === undefined)
-    fail(walk, alias, 'yaml_syntax', `*${alias.source} stands for no earlier anchor &${alias.source}.`);
-  else if (walk.open.has(target))
-    fail(walk, alias, 'yaml_alias_limit', `*${alias.source} stands inside the value that it repeats.`);
-  if (target === undefined || walk.failed)
-    return { value: null, spot: { node: alias, key, children: new Map() } };
-  walk.aliasDepth++;
-  const walked = walkNode(walk, target, key, path);
-  walk.aliasDepth--;
-  return walked;
-}
-
-/** The text of a key, or null (reported) where it is none. */
-function keyText(walk: Walk, key: Node | null): string | null {
-  if (isAlias(key)) {
-    fail(walk, key, 'yaml_syntax', 'A key cannot be an alias.', 'Write the key itself.');
-    return null;
-  }
-  const node = key;
-  if (isScalar(node)) {
-    if (node.anchor !== undefined) walk.anchors.set(node.anchor, node);
-    return spelt(node);
-  }
-  if (node === null) return '';
-  fail(
-    walk,
-    key ?? node,
-    'yaml_syntax',
-    'A key here is a text, not a list or a mapping.',
-    'Put a text with brackets in quotes.',
-  );
-  return null;
-}
-
-function reportTwice(walk: Walk, name: string, key: Node | null, first: Spot, path: Path): void {
-  const firstLine = walk.placeAt(...rangeOf(first.key)).line;
-  const under = path.length === 0 ? 'at the top' : `under ${showPath(path)}`;
-  walk.report({
-    code: 'yaml_duplicate_key',
-    severity: 'error',
-    place: walk.placeAt(...rangeOf(key)),
-    message: `The key ${quote(name)} stands twice ${under}; first on line ${firstLine}.`,
-    hint: 'Keep one of them.',
-  });
-}
-
-function fail(
-  walk: Walk,
-  node: Node,
-  code: 'yaml_syntax' | 'yaml_alias_limit',
-  message: string,
-  hint?: string,
-): void {
-  if (walk.failed) return;
-  walk.failed = true;
-  const place = walk.placeAt(...rangeOf(node));
-  walk.report({ code, severity: 'error', place, message, ...(hint === undefined ? {} : { hint }) });
-}
-
-function rangeOf(node: Node | null): [number, number] {
-  const range = node?.range;
-  return range === null || range === undefined ? [0, 1] : [range[0], range[1]];
-}
-
-function spelt(node: Scalar): string {
-  return node.source ?? String(node.value);
 }
 
 function lookUps(top: Spot, text: string, placeAt: PlaceAt): Omit<Written, 'value'> {
