@@ -14,7 +14,7 @@ import type { Choice } from '../select/choose.ts';
 import { coefficientFigures } from '../select/coefficients.ts';
 import { summarise } from '../select/summarise.ts';
 import type { Study } from '../study/study.ts';
-import { packageVersion } from '../version.ts';
+import { packageVersion } from '../package-file.ts';
 import { acceptanceOf } from './acceptance.ts';
 import { rowSummaries } from './chart-points.ts';
 import { describeModel } from './describe-model.ts';

@@ -1,0 +1,14 @@
+import { readFileSync } from 'node:fs';
+
+/**
+ * The text of a file of the package itself, named from its root. This module lies one folder below the root
+ * both in the sources and in the built files, where all modules are bundled into few.
+ */
+export function packageFile(name: string): string {
+  return readFileSync(new URL(`../${name}`, import.meta.url), 'utf8');
+}
+
+/** The version in package.json. */
+export function packageVersion(): string {
+  return (JSON.parse(packageFile('package.json')) as { version: string }).version;
+}

@@ -1,7 +1,0 @@
-import { readFileSync } from 'node:fs';
-
-/** The version in package.json, which lies beside the sources and beside the built files alike. */
-export function packageVersion(): string {
-  const text = readFileSync(new URL('../package.json', import.meta.url), 'utf8');
-  return (JSON.parse(text) as { version: string }).version;
-}
