@@ -58,7 +58,7 @@ const rows = Array.from({ length: count }, (_, index) => {
     years: comma(years, 1),
     age: String(age),
     parts: String(parts),
-    urgent: urgent ? 'ja' : 'nein',
+    urgency: urgent ? 'urgent' : 'planned',
     // Time is booked in quarters of an hour.
     hours: comma(Math.max(0.25, Math.round(hours * 4) / 4), 2),
     remark: '',
@@ -89,7 +89,7 @@ writeCsv(
     'technician_years',
     'machine_age',
     'parts',
-    'urgent',
+    'urgency',
     'hours',
     'remark',
   ],

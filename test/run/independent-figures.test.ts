@@ -5,7 +5,7 @@
  */
 import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
-import { join } from 'node:path';
+import { join, relative } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { afterAll, describe, expect, test } from 'vitest';
 import { parseDocument } from 'yaml';
@@ -177,12 +177,20 @@ async function recordOf(study: string): Promise<StudyRecord> {
   return record!;
 }
 
-/** The study with one candidate only, beside its data by an absolute name. */
+/**
+ * The study with one candidate only, on the rows that all its candidates share: a row with any value missing
+ * is left out by a rule, since a single candidate would need fewer of them.
+ */
 function alone(study: string, dataFile: string, position: number): string {
   const document = parseDocument(readFileSync(study, 'utf8'));
   const candidates = document.toJS().candidates as unknown[];
   document.set('candidates', [candidates[position]]);
-  document.setIn(['data', 'file'], dataFile);
+  document.setIn(['data', 'file'], relative(scratch, dataFile));
+  const variables = Object.keys(document.toJS().data.variables as object);
+  document.set(
+    'leave_out',
+    variables.map((name) => ({ where: `is_missing(${name})`, because: `No ${name}` })),
+  );
   const file = join(scratch, 'alone.study.yaml');
   writeFileSync(file, document.toString());
   return file;
