@@ -5,7 +5,7 @@ import { isNested, partialFTest } from './nesting.ts';
 import type { NestedPair } from './partial-f.ts';
 import { adjustedRSquared } from './r-squared.ts';
 import type { Ranked } from './rank.ts';
-import { counted, limitText, probability, significant } from './words.ts';
+import { counted, limitText, named, probability, significant } from './words.ts';
 
 export interface PartialFPick {
   /** Null where none is admitted. */
@@ -124,7 +124,7 @@ export function chooseByPartialF(
   }
 
   function name(index: number): string {
-    return fits[index]!.candidate.name;
+    return named(fits[index]!.candidate.name);
   }
 }
 

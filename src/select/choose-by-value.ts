@@ -3,7 +3,7 @@ import type { SelectionPlan } from '../study/study.ts';
 import type { Admission } from './admission.ts';
 import type { Criterion } from './criterion.ts';
 import { costOf, type Ranked, sameValue, slackOf } from './rank.ts';
-import { counted, limitText, significant } from './words.ts';
+import { counted, limitText, named, significant } from './words.ts';
 
 export interface ValuePick {
   readonly chosen: number;
@@ -37,7 +37,7 @@ export function chooseByValue(
   const lowest = least(smallest, cost);
   const chosen = smallest.find((index) => sameValue(lowest, cost(index)))!;
 
-  const name = (index: number) => context.fits[index]!.candidate.name;
+  const name = (index: number) => named(context.fits[index]!.candidate.name);
   const order = ranking.map(({ candidate }) => candidate).filter((index) => admissions[index]!.admitted);
   return { chosen, because: [mainSentence(), ...refusedAhead()] };
 
@@ -51,13 +51,7 @@ export function chooseByValue(
     }
     const leads = `has the ${extreme} ${criterion.title} (${significant(values.get(leader)!, 5)}) of ${counted(admitted.length, 'admitted candidate')}`;
     if (!sameValue(best, cost(chosen))) {
-      const others = near.length - 2;
-      const also = others > 0 ? `, as ${others === 1 ? 'does one other' : `do ${others} others`},` : '';
-      const why =
-        size(chosen) < size(leader)
-          ? `with ${counted(size(chosen), 'coefficient')} instead of ${size(leader)}, the fewest`
-          : `with ${counted(size(chosen), 'coefficient')}`;
-      return `${name(leader)} ${leads}, but ${name(chosen)} lies within ${limitText(plan.preferSmallerWithin)} of it${also} (${behind(leader, chosen)}) ${why}; the study prefers the smaller.`;
+      return `${name(leader)} ${leads}, but ${name(chosen)}, ${behind(leader, chosen)}, has ${counted(size(chosen), 'coefficient')} instead of ${size(leader)}; of the ${near.length} candidates within ${limitText(plan.preferSmallerWithin)} of the best the study prefers the smallest.`;
     }
     const next = order.find((index) => index !== chosen)!;
     return `${name(chosen)} ${leads}; ${runnerUp(next)}.`;

@@ -9,7 +9,7 @@ import { CRITERIA, criterionNamed } from './criteria.ts';
 import type { Criterion } from './criterion.ts';
 import { type NestedPair, type PartialFRow, partialFTable } from './partial-f.ts';
 import { type Ranked, rank } from './rank.ts';
-import { listed } from './words.ts';
+import { listed, named } from './words.ts';
 
 /** What the declared rule made of the fits. Candidates are meant by index, in the order of declaration. */
 export interface Choice {
@@ -88,7 +88,7 @@ const MOST_TOLD = 3;
 function noneAdmitted({ fits }: FitContext, admissions: readonly Admission[]): string[] {
   const told = fits
     .slice(0, MOST_TOLD)
-    .map((fit, index) => `${fit.candidate.name}: ${admissions[index]!.refusedBecause.join(' ')}`);
+    .map((fit, index) => `${named(fit.candidate.name)}: ${admissions[index]!.refusedBecause.join(' ')}`);
   if (fits.length === 1) return ['The only candidate was not admitted.', ...told];
   const rest = fits.length - told.length;
   const more =
@@ -121,7 +121,7 @@ function checkDefined(study: Study, criterion: Criterion, context: FitContext, r
   const others = CRITERIA.filter((each) => isDefined(each) && (each.acrossScales || !across)).map(
     ({ name }) => name,
   );
-  const first = context.fits[0]!.candidate.name;
+  const first = named(context.fits[0]!.candidate.name);
   report({
     code: 'criterion_undefined',
     severity: 'error',

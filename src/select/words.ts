@@ -11,6 +11,11 @@ export function listedUpTo(items: readonly string[], most: number): string {
   return listed([...items.slice(0, most), `${items.length - most} more`]);
 }
 
+/** A candidate's name inside a sentence; in quotation marks where its own punctuation could be taken for the sentence's. */
+export function named(name: string): string {
+  return /[.,;:()]/.test(name) ? `“${name}”` : name;
+}
+
 /** "1 row", "12 rows". */
 export function counted(n: number, one: string, many = `${one}s`): string {
   return `${n} ${n === 1 ? one : many}`;
