@@ -88,7 +88,10 @@ export function chooseByPartialF(
   }
 
   function against(winner: number): string[] {
-    if (containing.length === 0) return admitted.length === 1 ? [] : ['No admitted candidate contains it.'];
+    if (containing.length === 0)
+      return admitted.length === 1
+        ? []
+        : ['No admitted candidate contains it, so none was tested against it.'];
     const tests = containing
       .map((larger) => ({ larger, test: partialFTest(fits[winner]!, fits[larger]!) }))
       .sort((a, b) => (a.test.p_value ?? 1) - (b.test.p_value ?? 1));

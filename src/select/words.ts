@@ -21,12 +21,13 @@ export function counted(n: number, one: string, many = `${one}s`): string {
   return `${n} ${n === 1 ? one : many}`;
 }
 
-/** A number to so many significant digits: "14.2", "0.00071", "−3.2", "3.1 × 10⁻⁸". */
+/** A number to so many significant digits, whole digits never replaced by zeros: "1234567", "14.2", "0.00071", "−3.2", "3.1 × 10⁻⁸". */
 export function significant(value: number, digits: number): string {
   if (value === 0) return '0';
   const [mantissa, power] = value.toExponential(digits - 1).split('e') as [string, string];
   const exponent = Number(power);
   if (exponent < -4 || exponent > 8) return `${signed(mantissa)} × 10${raisedDigits(exponent)}`;
+  if (exponent >= digits) return signed(value.toFixed(0));
   return signed(Number(`${mantissa}e${exponent}`).toFixed(Math.max(0, digits - 1 - exponent)));
 }
 

@@ -23,7 +23,7 @@ export function anyProblem(): fc.Arbitrary<AnyProblem> {
 }
 
 /** Numbers in [0, 1) by a multiplicative congruence (Park, Miller & Stockmeyer 1993). */
-function uniform(seed: number): () => number {
+export function uniform(seed: number): () => number {
   let state = seed % 2147483647;
   return () => {
     state = (state * 48271) % 2147483647;

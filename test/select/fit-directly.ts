@@ -21,8 +21,10 @@ export interface Candidate {
   readonly response?: number;
 }
 
-const dot = (a: readonly number[], b: readonly number[]) => a.reduce((sum, value, i) => sum + value * b[i]!, 0);
-const minus = (a: readonly number[], b: readonly number[], times: number) => a.map((value, i) => value - times * b[i]!);
+const dot = (a: readonly number[], b: readonly number[]) =>
+  a.reduce((sum, value, i) => sum + value * b[i]!, 0);
+const minus = (a: readonly number[], b: readonly number[], times: number) =>
+  a.map((value, i) => value - times * b[i]!);
 const norm = (a: readonly number[]) => Math.sqrt(dot(a, a));
 
 /** What is left of `x` beside the orthonormal `basis`; twice, for full orthogonality. */
@@ -40,7 +42,11 @@ export function fitsOf(problem: Problem): FitContext {
   const models = problem.candidates.map((candidate): CandidateModel => {
     const terms = candidate.terms.map((term): ModelTerm => {
       const { name, columns } = typeof term === 'string' ? { name: term, columns: [term] } : term;
-      return { name, plan: { kind: 'variable', variable: name }, columns: columns.map((each) => names.indexOf(each)) };
+      return {
+        name,
+        plan: { kind: 'variable', variable: name },
+        columns: columns.map((each) => names.indexOf(each)),
+      };
     });
     const intercept = candidate.intercept ?? true;
     return {
@@ -103,7 +109,8 @@ export function fitDirectly(
     }
   }
   const estimates = new Float64Array(p);
-  for (let i = 0; i < p; i++) for (let k = 0; k < p; k++) estimates[i]! += rootInverse[k * p + i]! * dot(basis[k]!, y);
+  for (let i = 0; i < p; i++)
+    for (let k = 0; k < p; k++) estimates[i]! += rootInverse[k * p + i]! * dot(basis[k]!, y);
   const e = residual(y, basis);
   const rss = dot(e, e);
   const mean = candidate.intercept ? y.reduce((sum, value) => sum + value, 0) / n : 0;
@@ -132,18 +139,25 @@ export function fitDirectly(
     degreesOfFreedom: n - p,
     exact,
     logLikelihood: exact ? null : (-n / 2) * (Math.log(2 * Math.PI) + Math.log(rss / n) + 1),
-    vif: Float64Array.from(columns, (column) => (column === 0 ? Number.NaN : vifBySweep(union, columns, column))),
+    vif: Float64Array.from(columns, (column) =>
+      column === 0 ? Number.NaN : vifBySweep(union, columns, column),
+    ),
     conditionNumber: 1,
     span,
     own,
     arithmetic: 'plain',
   };
-  const press = full || n - p < 1 ? null : e.reduce((sum, value, i) => sum + (value / (1 - leverages[i]!)) ** 2, 0);
+  const press =
+    full || n - p < 1 ? null : e.reduce((sum, value, i) => sum + (value / (1 - leverages[i]!)) ** 2, 0);
   return { fit, press };
 }
 
 /** 1/(1 − R_j²), by regressing the column on the others (Marquardt 1970). */
-function vifBySweep(union: readonly (readonly number[])[], columns: readonly number[], column: number): number {
+function vifBySweep(
+  union: readonly (readonly number[])[],
+  columns: readonly number[],
+  column: number,
+): number {
   const others: number[][] = [];
   for (const other of columns) {
     if (other === column) continue;

@@ -28,7 +28,10 @@ function chosenBy(change: SelectionChange): { readonly name: string | null; read
   const { problems, report } = collector();
   const choice = choose(studyWith(change), context, report);
   expect(problems).toEqual([]);
-  return { name: choice.chosen === null ? null : context.fits[choice.chosen]!.candidate.name, because: choice.because };
+  return {
+    name: choice.chosen === null ? null : context.fits[choice.chosen]!.candidate.name,
+    because: choice.because,
+  };
 }
 
 describe('the full model, as published', () => {
@@ -108,7 +111,7 @@ describe('each criterion picks its own winner', () => {
     const { name, because } = chosenBy({ rankBy: 'aic', preferSmallerWithin: 0.45 });
     expect(name).toBe('x1 x2');
     expect(because).toBe(
-'x1 x2 x4 has the lowest AIC (63.866) of 15 admitted candidates, but x1 x2, 0.45 behind, has 3 coefficients instead of 4; of the 3 candidates within 0.45 of the best the study prefers the smallest.',
+      'x1 x2 x4 has the lowest AIC (63.866) of 15 admitted candidates, but x1 x2, 0.45 behind, has 3 coefficients instead of 4; of the 3 candidates within 0.45 of the best the study prefers the smallest.',
     );
   });
 
@@ -150,5 +153,9 @@ test('every criterion says where it was published and what it is', () => {
     expect(source).not.toBe('');
     expect(title).not.toBe('');
   }
-  expect(CRITERIA.filter(({ acrossScales }) => acrossScales).map(({ name }) => name)).toEqual(['aic', 'aicc', 'bic']);
+  expect(CRITERIA.filter(({ acrossScales }) => acrossScales).map(({ name }) => name)).toEqual([
+    'aic',
+    'aicc',
+    'bic',
+  ]);
 });

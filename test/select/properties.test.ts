@@ -13,7 +13,15 @@ import { anyProblem, NAMES } from './any-problem.ts';
 import { type Candidate, fitsOf } from './fit-directly.ts';
 import { collector, studyWith } from './study-with.ts';
 
-const RANK_BY: readonly RankBy[] = ['adjusted_r_squared', 'aic', 'aicc', 'bic', 'mallows_cp', 'press', 'partial_f'];
+const RANK_BY: readonly RankBy[] = [
+  'adjusted_r_squared',
+  'aic',
+  'aicc',
+  'bic',
+  'mallows_cp',
+  'press',
+  'partial_f',
+];
 
 /** Distinct subsets of the four predictors. */
 const anySubsets = (minLength = 2) =>
@@ -24,7 +32,11 @@ const candidatesOf = (subsets: readonly (readonly string[])[]): Candidate[] =>
 test('adding a column never lowers R², and raises adjusted R² exactly when its |t| is above 1', () => {
   fc.assert(
     fc.property(anyProblem(), fc.shuffledSubarray(NAMES, { minLength: 1 }), ({ columns, y }, terms) => {
-      const { fits, columnNames } = fitsOf({ columns, y, candidates: candidatesOf([terms.slice(0, -1), terms]) });
+      const { fits, columnNames } = fitsOf({
+        columns,
+        y,
+        candidates: candidatesOf([terms.slice(0, -1), terms]),
+      });
       const [without, with_] = fits;
       const { t } = coefficientFigures(with_!, columnNames, 0.95).at(-1)!;
       expect(rSquared(with_!)!).toBeGreaterThanOrEqual(rSquared(without!)! - 1e-12);
@@ -120,8 +132,12 @@ test('choice and ranking do not depend on the order in which candidates are decl
           return {
             chosen: choice.chosen === null ? null : name(choice.chosen),
             ranking: choice.ranking.map(({ candidate }) => name(candidate)),
-            refused: choice.admissions.flatMap(({ admitted }, index) => (admitted ? [] : [name(index)])).sort(),
-            partialF: choice.partialF.map((row) => `${name(row.smaller)}<${name(row.larger)} ${row.decided}`).sort(),
+            refused: choice.admissions
+              .flatMap(({ admitted }, index) => (admitted ? [] : [name(index)]))
+              .sort(),
+            partialF: choice.partialF
+              .map((row) => `${name(row.smaller)}<${name(row.larger)} ${row.decided}`)
+              .sort(),
           };
         };
         expect(named(shuffled)).toEqual(named(subsets));
@@ -139,7 +155,11 @@ test('the choice is the one that the definition describes, found by looking at e
       fc.constantFrom(0, 1, 3, 20),
       ({ columns, y }, subsets, rankBy, within) => {
         const context = fitsOf({ columns, y, candidates: candidatesOf(subsets) });
-        const choice = choose(studyWith({ rankBy, preferSmallerWithin: within }), context, collector().report);
+        const choice = choose(
+          studyWith({ rankBy, preferSmallerWithin: within }),
+          context,
+          collector().report,
+        );
         const value = (index: number) => choice.ranking.find(({ candidate }) => candidate === index)!.value!;
         const size = (index: number) => context.fits[index]!.columns.length;
         const won = choice.chosen!;
@@ -157,19 +177,26 @@ test('the choice is the one that the definition describes, found by looking at e
 
 test('by partial F no smaller candidate stands, and none that contains the chosen one improves on it', () => {
   fc.assert(
-    fc.property(anyProblem(), anySubsets(), fc.constantFrom(0.01, 0.05, 0.3), ({ columns, y }, subsets, significance) => {
-      const context: FitContext = fitsOf({ columns, y, candidates: candidatesOf(subsets) });
-      const choice = choose(studyWith({ rankBy: 'partial_f', significance }), context, collector().report);
-      const won = choice.chosen!;
-      const improved = new Set(choice.partialF.filter((row) => row.p_value! <= significance).map((row) => row.smaller));
-      expect(improved.has(won)).toBe(false);
-      for (const [index, fit] of context.fits.entries()) {
-        if (fit.columns.length < context.fits[won]!.columns.length) expect(improved.has(index)).toBe(true);
-      }
-      for (const row of choice.partialF.filter(({ decided }) => decided)) {
-        expect(row.smaller === won ? row.p_value! > significance : row.p_value! <= significance).toBe(true);
-      }
-    }),
+    fc.property(
+      anyProblem(),
+      anySubsets(),
+      fc.constantFrom(0.01, 0.05, 0.3),
+      ({ columns, y }, subsets, significance) => {
+        const context: FitContext = fitsOf({ columns, y, candidates: candidatesOf(subsets) });
+        const choice = choose(studyWith({ rankBy: 'partial_f', significance }), context, collector().report);
+        const won = choice.chosen!;
+        const improved = new Set(
+          choice.partialF.filter((row) => row.p_value! <= significance).map((row) => row.smaller),
+        );
+        expect(improved.has(won)).toBe(false);
+        for (const [index, fit] of context.fits.entries()) {
+          if (fit.columns.length < context.fits[won]!.columns.length) expect(improved.has(index)).toBe(true);
+        }
+        for (const row of choice.partialF.filter(({ decided }) => decided)) {
+          expect(row.smaller === won ? row.p_value! > significance : row.p_value! <= significance).toBe(true);
+        }
+      },
+    ),
   );
 });
 

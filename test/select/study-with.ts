@@ -47,7 +47,13 @@ export function studyWith(change: SelectionChange): Study {
     report: { formats: [], templates: { html: null, markdown: null }, caution: null },
     settings: [],
     // The path's last step gives the line, so that a test can tell places apart.
-    placeOf: (path) => ({ kind: 'source', file: 'study.yaml', line: path.length, column: 1, length: String(path.at(-1)).length }),
+    placeOf: (path) => ({
+      kind: 'source',
+      file: 'study.yaml',
+      line: path.length,
+      column: 1,
+      length: String(path.at(-1)).length,
+    }),
   };
 }
 
