@@ -12,6 +12,7 @@ import { type Predicted, predict, smearingResiduals } from './predict/predict.ts
 import { fileRows, statedRows } from './predict/prediction-rows.ts';
 import { prepareSample } from './prepare/prepare-sample.ts';
 import type { Sample } from './prepare/sample.ts';
+import { type Spread, spreadsOf } from './prepare/spread.ts';
 import type { Problem, Report } from './problem.ts';
 import { buildRecord } from './record/build-record.ts';
 import type { StudyRecord } from './record/record.ts';
@@ -87,8 +88,11 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   const choice = choose(study, fitted, report);
   if (hasError(problems)) return stopped();
 
+  const spreads = spreadsOf(sample);
   const chosen =
-    choice.chosen === null ? null : examineChosen(study, sample, design, rows, fitted, choice.chosen);
+    choice.chosen === null
+      ? null
+      : examineChosen(study, sample, spreads, design, rows, fitted, choice.chosen);
   const predicted = chosen === null ? null : await predictAll(chosen, report);
   if (hasError(problems)) return stopped();
 
@@ -96,6 +100,7 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     study,
     table,
     sample,
+    spreads,
     design,
     rows,
     fitted,
@@ -118,13 +123,14 @@ function rowsOf(study: Study, sample: Sample, design: Design, own: Float64Array)
 function examineChosen(
   study: Study,
   sample: Sample,
+  spreads: ReadonlyMap<string, Spread>,
   design: Design,
   rows: DesignRows,
   fitted: FittedAll,
   index: number,
 ): Chosen {
   const fit = refineFit(fitted.fits[index]!, rows, fitted.facts);
-  return examineRows(study, sample, design.columns, fit, rows);
+  return examineRows(study, sample, spreads, design.columns, fit, rows);
 }
 
 /** Rows stated in the study, then those of its file. */

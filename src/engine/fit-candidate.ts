@@ -153,7 +153,9 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
  */
 export function logLikelihood(n: number, rss: number, facts: RowFacts, response: number): number | null {
   const value =
-    (-n / 2) * (Math.log(2 * Math.PI) + Math.log(rss / n) + 1) + facts.logWeights / 2 + facts.logJacobians[response]!;
+    (-n / 2) * (Math.log(2 * Math.PI) + Math.log(rss / n) + 1) +
+    facts.logWeights / 2 +
+    facts.logJacobians[response]!;
   return Number.isFinite(value) ? value : null;
 }
 

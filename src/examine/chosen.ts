@@ -3,12 +3,15 @@ import { FULL_LEVERAGE, visitRows } from '../engine/row-figures.ts';
 import type { DesignColumn } from '../model/design.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 import type { Sample } from '../prepare/sample.ts';
+import type { Spread } from '../prepare/spread.ts';
 import type { Study } from '../study/study.ts';
 
 /** The chosen model with the figures of each row: what every diagnostic reads. Arrays have length n, in file order. */
 export interface Chosen {
   readonly study: Study;
   readonly sample: Sample;
+  /** By variable, over the rows used. */
+  readonly spreads: ReadonlyMap<string, Spread>;
   /** The union's columns; `fit.columns` are indexes into them. */
   readonly columns: readonly DesignColumn[];
   readonly fit: Fit;
@@ -27,6 +30,7 @@ export interface Chosen {
 export function examineRows(
   study: Study,
   sample: Sample,
+  spreads: ReadonlyMap<string, Spread>,
   columns: readonly DesignColumn[],
   fit: Fit,
   rows: DesignRows,
@@ -43,7 +47,7 @@ export function examineRows(
   const fitted = observed.map((y, i) => y - residuals[i]! / (rootWeights === null ? 1 : rootWeights[i]!));
   const s =
     fit.degreesOfFreedom < 1 || fit.exact ? null : Math.sqrt(fit.residualSumOfSquares / fit.degreesOfFreedom);
-  return { study, sample, columns, fit, s, residuals, leverages, fitted, observed };
+  return { study, sample, spreads, columns, fit, s, residuals, leverages, fitted, observed };
 }
 
 /** e_i/(s √(1 − h_i)); null where s is undefined or the leverage is 1. */

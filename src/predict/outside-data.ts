@@ -1,11 +1,7 @@
 import type { Column } from '../data/table.ts';
 import type { Chosen } from '../examine/chosen.ts';
 import { presentLevels } from '../model/build-design.ts';
-
-export interface Range {
-  readonly smallest: number;
-  readonly largest: number;
-}
+import type { Spread } from '../prepare/spread.ts';
 
 /**
  * Each way in which a row lies outside the sample, as a sentence: a value beyond the range of its variable, or
@@ -16,11 +12,11 @@ export function outsideData(
   given: readonly { variable: string; value: number | string | boolean }[],
   columns: ReadonlyMap<string, Column>,
   row: number,
-  ranges: ReadonlyMap<string, Range>,
+  spreads: ReadonlyMap<string, Spread>,
   remote: boolean,
 ): string[] {
   const beyond = (name: string, value: number): string[] => {
-    const range = ranges.get(name);
+    const range = spreads.get(name);
     if (range === undefined || !Number.isFinite(value)) return [];
     if (value < range.smallest)
       return [`${name} ${value} is below ${range.smallest}, the smallest in the data`];
@@ -32,7 +28,7 @@ export function outsideData(
     typeof value === 'number' ? beyond(variable, value) : [],
   );
   if (named.length > 0) return named;
-  const derived = [...ranges.keys()].flatMap((name) => {
+  const derived = [...spreads.keys()].flatMap((name) => {
     const column = columns.get(name);
     return column === undefined || column.kind === 'category' || column.kind === 'text'
       ? []
@@ -40,22 +36,6 @@ export function outsideData(
   });
   if (derived.length > 0) return derived;
   return remote ? ['its combination of values is more remote than any row in the data'] : [];
-}
-
-/** Smallest and largest value in the sample of every column of numbers. */
-export function rangesOf(sample: Chosen['sample']): Map<string, Range> {
-  const ranges = new Map<string, Range>();
-  for (const [name, column] of sample.columns) {
-    if (column.kind !== 'number') continue;
-    let smallest = Number.POSITIVE_INFINITY;
-    let largest = Number.NEGATIVE_INFINITY;
-    for (const value of column.values) {
-      if (value < smallest) smallest = value;
-      if (value > largest) largest = value;
-    }
-    ranges.set(name, { smallest, largest });
-  }
-  return ranges;
 }
 
 /** Levels of the model's categories at a row that no row of the sample has: such a row cannot be predicted. */

@@ -5,7 +5,7 @@ import { designRows } from '../model/design-rows.ts';
 import { fromScale, isDecreasing } from '../model/response-scale.ts';
 import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { Scale } from '../study/study.ts';
-import { outsideData, rangesOf } from './outside-data.ts';
+import { outsideData } from './outside-data.ts';
 
 /** Rows to be predicted: every variable of the model, declared and derived. */
 export interface PredictionRows {
@@ -68,7 +68,6 @@ export function predict(
   const { scale } = fit.candidate.response;
   const s = chosen.s ?? 0;
   const t = tTwoSidedQuantile(1 - study.predict.interval, fit.degreesOfFreedom);
-  const ranges = rangesOf(chosen.sample);
   const largestLeverage = chosen.leverages.reduce((most, h) => Math.max(most, h), 0);
   const sum = new Float64Array(p);
   let centres = 0;
@@ -98,7 +97,7 @@ export function predict(
         mean_upper: meanUpper,
         mean: smearing === null ? null : smearedMean(centre, smearing, scale),
         leverage,
-        outside: outsideData(rows.given[i]!, rows.columns, i, ranges, remote),
+        outside: outsideData(rows.given[i]!, rows.columns, i, chosen.spreads, remote),
       };
     });
   });

@@ -1,20 +1,21 @@
 import { formatDate } from '../data/format-date.ts';
 import type { Table } from '../data/table.ts';
-import type { FittedAll } from '../engine/fit-all.ts';
 import type { Fit } from '../engine/fit.ts';
+import type { FittedAll } from '../engine/fit-all.ts';
 import type { Chosen } from '../examine/chosen.ts';
 import { examine } from '../examine/examine.ts';
 import type { Design } from '../model/design.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 import { scaleName } from '../model/response-scale.ts';
+import { packageVersion } from '../package-file.ts';
 import { type Predicted, smearingResiduals } from '../predict/predict.ts';
 import type { Sample } from '../prepare/sample.ts';
+import type { Spread } from '../prepare/spread.ts';
 import type { Place, Problem } from '../problem.ts';
 import type { Choice } from '../select/choose.ts';
 import { coefficientFigures } from '../select/coefficients.ts';
 import { summarise } from '../select/summarise.ts';
 import type { Study } from '../study/study.ts';
-import { packageVersion } from '../package-file.ts';
 import { acceptanceOf } from './acceptance.ts';
 import { rowSummaries } from './chart-points.ts';
 import { describeModel } from './describe-model.ts';
@@ -26,6 +27,7 @@ export interface Run {
   readonly study: Study;
   readonly table: Table;
   readonly sample: Sample;
+  readonly spreads: ReadonlyMap<string, Spread>;
   readonly design: Design;
   readonly rows: DesignRows;
   readonly fitted: FittedAll;
@@ -44,7 +46,7 @@ export function buildRecord(run: Run): StudyRecord {
   const { study, table, sample, choice, chosen, predicted } = run;
   const candidates = candidatesOf(run);
   const winner = choice.chosen === null ? null : candidates[choice.chosen]!;
-  const variables = describeVariables(study, table, sample);
+  const variables = describeVariables(study, table, sample, run.spreads);
   const response = variables.find((variable) => variable.name === study.response.variable)!;
   return {
     format: 'plumbrule-record/1',
@@ -121,7 +123,9 @@ export function buildRecord(run: Run): StudyRecord {
 
 function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCandidate[] {
   // The chosen model may have been refined after the ranking; the record shows the refined figures.
-  const fits = fitted.fits.map((fit, index): Fit => (index === choice.chosen && chosen !== null ? chosen.fit : fit));
+  const fits = fitted.fits.map(
+    (fit, index): Fit => (index === choice.chosen && chosen !== null ? chosen.fit : fit),
+  );
   const context = { ...fitted, fits };
   return fits.map((fit, index) => {
     const { admitted, refusedBecause } = choice.admissions[index]!;
@@ -132,7 +136,10 @@ function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCan
       intercept: fit.candidate.intercept,
       ...summarise(index, context),
       coefficients: coefficientFigures(fit, context.columnNames, study.inference.confidence),
-      dropped: fit.dropped.map(({ column, sentence }) => ({ column: design.columns[column]!.name, sentence })),
+      dropped: fit.dropped.map(({ column, sentence }) => ({
+        column: design.columns[column]!.name,
+        sentence,
+      })),
       arithmetic: fit.arithmetic,
       admitted,
       refused_because: [...refusedBecause],
@@ -143,7 +150,8 @@ function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCan
 function timeSpan(study: Study, sample: Sample): StudyRecord['data']['time'] {
   const variable = study.data.time;
   const column = variable === null ? undefined : sample.columns.get(variable);
-  if (variable === null || column === undefined || column.kind === 'category' || column.kind === 'text') return null;
+  if (variable === null || column === undefined || column.kind === 'category' || column.kind === 'text')
+    return null;
   const order = sample.timeOrder!;
   const show = (value: number) => (column.kind === 'date' ? formatDate(value) : String(value));
   return { variable, first: show(column.values[order[0]!]!), last: show(column.values[order.at(-1)!]!) };
@@ -152,9 +160,19 @@ function timeSpan(study: Study, sample: Sample): StudyRecord['data']['time'] {
 function warningsOf({ problems, fitted, chosen, study, predicted }: Run): StudyRecord['warnings'] {
   const warnings = problems
     .filter((problem) => problem.severity === 'warning')
-    .map(({ place, message, hint }) => ({ about: placeText(place), text: hint === undefined ? message : `${message} ${hint}` }));
-  if (fitted.pressOmitted !== null) warnings.push({ about: 'PRESS', text: `PRESS was ${fitted.pressOmitted}.` });
-  if (study.predict.total && chosen !== null && predicted !== null && predicted.total === null && predicted.predictions.length > 0) {
+    .map(({ place, message, hint }) => ({
+      about: placeText(place),
+      text: hint === undefined ? message : `${message} ${hint}`,
+    }));
+  if (fitted.pressOmitted !== null)
+    warnings.push({ about: 'PRESS', text: `PRESS was ${fitted.pressOmitted}.` });
+  if (
+    study.predict.total &&
+    chosen !== null &&
+    predicted !== null &&
+    predicted.total === null &&
+    predicted.predictions.length > 0
+  ) {
     warnings.push({
       about: 'predictions',
       text: `No total is given: its interval is known on the natural scale only, and the chosen model’s response is on the ${scaleName(chosen.fit.candidate.response.scale)} scale.`,

@@ -1,14 +1,19 @@
-import type { Column, Table } from '../data/table.ts';
+import type { Column, NumberColumn, Table } from '../data/table.ts';
 import { namesIn } from '../expression/names-in.ts';
 import { isMissing } from '../prepare/is-missing.ts';
 import { termVariables } from '../prepare/needed-variables.ts';
 import type { Sample } from '../prepare/sample.ts';
-import { quartilesOf } from '../stats/quartiles.ts';
+import type { Spread } from '../prepare/spread.ts';
 import type { Study } from '../study/study.ts';
 import type { RecordVariable } from './record.ts';
 
 /** Every declared and derived variable: how it is used, what is missing, and its spread over the rows used. */
-export function describeVariables(study: Study, table: Table, sample: Sample): RecordVariable[] {
+export function describeVariables(
+  study: Study,
+  table: Table,
+  sample: Sample,
+  spreads: ReadonlyMap<string, Spread>,
+): RecordVariable[] {
   const uses = usesOf(study);
   const summaries = new Map(table.summaries.map((summary) => [summary.name, summary]));
   const declared = study.data.variables.map(
@@ -20,7 +25,7 @@ export function describeVariables(study: Study, table: Table, sample: Sample): R
       derived_from: null,
       used_as: uses(plan.name),
       missing: summaries.get(plan.name)?.missing ?? 0,
-      ...spreadOf(sample.columns.get(plan.name)),
+      ...spreadOf(sample.columns.get(plan.name), spreads.get(plan.name)),
     }),
   );
   const derived = study.derive.map((plan): RecordVariable => {
@@ -33,7 +38,7 @@ export function describeVariables(study: Study, table: Table, sample: Sample): R
       derived_from: plan.text,
       used_as: uses(plan.name),
       missing: column === undefined ? 0 : countMissing(column, sample.rowCount),
-      ...spreadOf(column),
+      ...spreadOf(column, spreads.get(plan.name)),
     };
   });
   return [...declared, ...derived];
@@ -45,7 +50,7 @@ function countMissing(column: Column, rows: number): number {
   return count;
 }
 
-type Spread = Pick<
+type RecordSpread = Pick<
   RecordVariable,
   | 'smallest'
   | 'lower_quartile'
@@ -57,7 +62,7 @@ type Spread = Pick<
   | 'levels'
 >;
 
-const NO_SPREAD: Spread = {
+const NO_SPREAD: RecordSpread = {
   smallest: null,
   lower_quartile: null,
   median: null,
@@ -68,38 +73,33 @@ const NO_SPREAD: Spread = {
   levels: null,
 };
 
-function spreadOf(column: Column | undefined): Spread {
+function spreadOf(column: Column | undefined, spread: Spread | undefined): RecordSpread {
   if (column === undefined || column.kind === 'text') return NO_SPREAD;
-  if (column.kind === 'category')
+  if (column.kind === 'category') {
     return { ...NO_SPREAD, levels: levelRows(column.levels, column.baseline, column.codes) };
-  // A variable that no candidate needs may be missing in rows that are used.
-  const values = column.values.some(Number.isNaN)
-    ? column.values.filter((value) => !Number.isNaN(value))
-    : column.values;
-  if (values.length === 0) return NO_SPREAD;
-  if (column.kind === 'flag') {
-    const ones = values.reduce((sum, value) => sum + value, 0);
-    const [no, yes] = column.flagTexts ?? ['no', 'yes'];
-    return {
-      ...NO_SPREAD,
-      levels: [
-        { level: no, rows: values.length - ones },
-        { level: yes, rows: ones },
-      ],
-    };
   }
-  const quartiles = quartilesOf(values);
-  const { mean, deviation } = meanAndDeviation(values);
+  if (spread === undefined) return NO_SPREAD;
+  if (column.kind === 'flag') return { ...NO_SPREAD, levels: flagRows(column) };
   return {
-    smallest: quartiles.smallest,
-    lower_quartile: quartiles.lowerQuartile,
-    median: quartiles.median,
-    mean,
-    upper_quartile: quartiles.upperQuartile,
-    largest: quartiles.largest,
-    standard_deviation: deviation,
+    smallest: spread.smallest,
+    lower_quartile: spread.lowerQuartile,
+    median: spread.median,
+    mean: spread.mean,
+    upper_quartile: spread.upperQuartile,
+    largest: spread.largest,
+    standard_deviation: spread.standardDeviation,
     levels: null,
   };
+}
+
+function flagRows({ values, flagTexts }: NumberColumn): { level: string; rows: number }[] {
+  const [no, yes] = flagTexts ?? ['no', 'yes'];
+  const rowsOf = (wanted: number) =>
+    values.reduce((count, value) => (value === wanted ? count + 1 : count), 0);
+  return [
+    { level: no, rows: rowsOf(0) },
+    { level: yes, rows: rowsOf(1) },
+  ];
 }
 
 function levelRows(
@@ -114,16 +114,6 @@ function levelRows(
     ...rows.filter(({ level }) => level === baseline),
     ...rows.filter(({ level }) => level !== baseline),
   ];
-}
-
-/** In two passes, so that a large offset costs no digits; the deviation is null for one value. */
-function meanAndDeviation(values: Float64Array): { mean: number; deviation: number | null } {
-  let sum = 0;
-  for (const value of values) sum += value;
-  const mean = sum / values.length;
-  let squares = 0;
-  for (const value of values) squares += (value - mean) ** 2;
-  return { mean, deviation: values.length < 2 ? null : Math.sqrt(squares / (values.length - 1)) };
 }
 
 function usesOf(study: Study): (name: string) => string[] {

@@ -1,8 +1,8 @@
 import type { CategoryColumn, Column } from '../../data/table.ts';
 import { baselineOf, presentLevels } from '../../model/build-design.ts';
 import { designRows } from '../../model/design-rows.ts';
+import type { Spread } from '../../prepare/spread.ts';
 import { tTwoSidedQuantile } from '../../stats/distributions.ts';
-import { quartilesOf } from '../../stats/quartiles.ts';
 import type { Chosen } from '../chosen.ts';
 
 /** A value of every variable of the chosen model: a number, or a level of a category. */
@@ -23,16 +23,7 @@ export interface Reference {
 }
 
 export type ReferenceVariable =
-  | {
-      readonly kind: 'number' | 'flag';
-      readonly smallest: number;
-      readonly lowerQuartile: number;
-      readonly median: number;
-      readonly upperQuartile: number;
-      readonly largest: number;
-      readonly mean: number;
-      readonly texts: readonly [string, string] | null;
-    }
+  | (Spread & { readonly kind: 'number' | 'flag'; readonly texts: readonly [string, string] | null })
   | { readonly kind: 'category'; readonly levels: readonly string[]; readonly baseline: string };
 
 /** Numbers at their mean, flags at 0, categories at their baseline. */
@@ -45,7 +36,7 @@ export function referenceOf(chosen: Chosen): Reference {
   const setting = new Map<string, number | string>();
   const variables = new Map<string, ReferenceVariable>();
   for (const name of names) {
-    const described = describe(chosen.sample.columns.get(name)!);
+    const described = describe(chosen.sample.columns.get(name)!, chosen.spreads.get(name));
     variables.set(name, described);
     setting.set(
       name,
@@ -55,27 +46,16 @@ export function referenceOf(chosen: Chosen): Reference {
   return { setting, variables };
 }
 
-function describe(column: Column): ReferenceVariable {
+function describe(column: Column, spread: Spread | undefined): ReferenceVariable {
   if (column.kind === 'category') {
     const levels = presentLevels(column);
     return { kind: 'category', levels, baseline: baselineOf(column, levels)! };
   }
-  if (column.kind === 'text') throw new TypeError(`${column.name} is a text and cannot be in a model`);
-  const { smallest, lowerQuartile, median, upperQuartile, largest } = quartilesOf(column.values);
-  let mean = 0;
-  for (const value of column.values) mean += value;
-  mean /= column.values.length;
+  if (column.kind === 'text' || spread === undefined) {
+    throw new TypeError(`${column.name} cannot be in a model`);
+  }
   const kind = column.kind === 'flag' ? 'flag' : 'number';
-  return {
-    kind,
-    smallest,
-    lowerQuartile,
-    median,
-    upperQuartile,
-    largest,
-    mean,
-    texts: column.flagTexts ?? null,
-  };
+  return { kind, ...spread, texts: column.flagTexts ?? null };
 }
 
 /** The setting with some variables moved. */
