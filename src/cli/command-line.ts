@@ -1,6 +1,6 @@
 import { Command, CommanderError, Option } from 'commander';
-import type { Problem } from '../problem.ts';
 import { packageVersion } from '../package-file.ts';
+import type { Problem } from '../problem.ts';
 import type { CommonOptions } from './common-options.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
 import type { RenderCommandOptions } from './render.ts';
