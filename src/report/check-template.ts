@@ -19,24 +19,27 @@ export function templateFaults(
   program: ReturnType<typeof HandlebarsNamespace.parse>,
   partials: ReadonlySet<string>,
 ): TemplateFault[] {
-  const inline = new Set(partials);
-  const faults: TemplateFault[] = [];
-  const visit = (value: unknown): void => {
-    if (Array.isArray(value)) {
-      for (const part of value) visit(part);
-      return;
-    }
-    if (!isNode(value)) return;
-    if (value.type === 'DecoratorBlock') {
-      const [name] = value.params as Node[];
-      if (name?.type === 'StringLiteral') inline.add(name.value as string);
-    }
-    const fault = faultOf(value, inline);
-    if (fault !== null) faults.push(fault);
-    for (const [key, part] of Object.entries(value)) if (key !== 'loc') visit(part);
-  };
-  visit(program);
-  return faults;
+  const nodes = [...nodesOf(program)];
+  const known = new Set([...partials, ...nodes.flatMap(inlineName)]);
+  return nodes.flatMap((node) => {
+    const fault = faultOf(node, known);
+    return fault === null ? [] : [fault];
+  });
+}
+
+/** Every node of the tree, in the order of the text. */
+function* nodesOf(value: unknown): Generator<Node> {
+  if (Array.isArray(value)) for (const part of value) yield* nodesOf(part);
+  if (!isNode(value)) return;
+  yield value;
+  for (const [key, part] of Object.entries(value)) if (key !== 'loc') yield* nodesOf(part);
+}
+
+/** The name that an inline partial is declared under. */
+function inlineName(node: Node): string[] {
+  if (node.type !== 'DecoratorBlock') return [];
+  const [name] = node.params as Node[];
+  return name?.type === 'StringLiteral' ? [String(name.value)] : [];
 }
 
 function isNode(value: unknown): value is Node {
@@ -69,4 +72,48 @@ function faultOf(node: Node, partials: ReadonlySet<string>): TemplateFault | nul
   // {{#section}} without parameters walks a part of the view and needs no helper.
   if (plainBlock || HELPER_NAMES.has(name)) return null;
   return { message: `There is no helper named "${name}".`, ...place };
+}
+
+/** What Handlebars threw, with the line where it can be told. */
+export function faultThrown(fault: unknown, program: unknown): TemplateFault {
+  const text = fault instanceof Error ? fault.message : String(fault);
+  if (fault instanceof RangeError)
+    return { message: 'The template calls itself without end.', line: 1, column: 1 };
+  const parse = /^Parse error on line (\d+):\n([\s\S]*)$/.exec(text);
+  if (parse !== null) {
+    const expectation = parse[2]!.split('\n').at(-1)!.replace(/'/g, '"');
+    return {
+      message: `The template cannot be read: ${ended(expectation)}`,
+      line: Number(parse[1]),
+      column: 1,
+    };
+  }
+  // A path that goes on below something that is not there is a plain TypeError without a place.
+  const read = /^Cannot read properties of (?:undefined|null) \(reading '(.+)'\)$/.exec(text)?.[1];
+  if (read !== undefined) return pathFault(read, program);
+  const { lineNumber, column: col } = fault as { lineNumber?: unknown; column?: unknown };
+  const line = typeof lineNumber === 'number' ? lineNumber : Number(/ - (\d+):(\d+)$/.exec(text)?.[1] ?? 1);
+  const column = typeof col === 'number' ? col + 1 : 1;
+  const missing = /^"([^"]+)" not defined in/.exec(text);
+  if (missing !== null) return { message: absent(missing[1]!), line, column };
+  return { message: `The template cannot be used: ${ended(text.replace(/ - \d+:\d+$/, ''))}`, line, column };
+}
+
+function absent(path: string): string {
+  return `The template asks for "${path}", which the view does not hold there.`;
+}
+
+function ended(text: string): string {
+  return text.replace(/\.?$/, '.');
+}
+
+/** The first path of the template that goes through this name below another. */
+function pathFault(name: string, program: unknown): TemplateFault {
+  for (const node of nodesOf(program)) {
+    const parts = node.type === 'PathExpression' ? (node.parts as unknown[]) : [];
+    if (!parts.slice(1).includes(name)) continue;
+    const start = node.loc?.start ?? { line: 1, column: 0 };
+    return { message: absent(String(node.original)), line: start.line, column: start.column + 1 };
+  }
+  return { message: absent(name), line: 1, column: 1 };
 }

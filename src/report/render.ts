@@ -1,7 +1,7 @@
 import { createRequire } from 'node:module';
 import type Handlebars from 'handlebars';
 import type { Report } from '../problem.ts';
-import { type TemplateFault, templateFaults } from './check-template.ts';
+import { faultThrown, type TemplateFault, templateFaults } from './check-template.ts';
 import { HELPER_NAMES, helpers } from './helpers.ts';
 import { markdownView } from './markdown.ts';
 import type { StudyRecord } from './record-type.ts';
@@ -80,15 +80,17 @@ function userTemplate(
     });
     return null;
   };
+  let program: ReturnType<typeof Handlebars.parse> | null = null;
   try {
-    const faults = templateFaults(handlebars.parse(text), new Set(Object.keys(PARTIALS)));
+    program = handlebars.parse(text);
+    const faults = templateFaults(program, new Set(Object.keys(PARTIALS)));
     if (faults.length > 0) {
       for (const fault of faults) broken(fault);
       return null;
     }
     return handlebars.compile(text, { strict: true, noEscape: format === 'markdown' })(view, WALLS);
   } catch (fault) {
-    return broken(faultOf(fault));
+    return broken(faultThrown(fault, program));
   }
 }
 
@@ -108,38 +110,6 @@ function environment(base: typeof Handlebars): typeof Handlebars {
     handlebars.registerPartial(name, handlebars.template(partial as TemplateSpecification));
   }
   return handlebars;
-}
-
-/** What Handlebars threw, with the line where it names one. */
-function faultOf(fault: unknown): TemplateFault {
-  const text = fault instanceof Error ? fault.message : String(fault);
-  if (fault instanceof RangeError)
-    return { message: 'The template calls itself without end.', line: 1, column: 1 };
-  const parse = /^Parse error on line (\d+):\n([\s\S]*)$/.exec(text);
-  if (parse !== null) {
-    const expectation = parse[2]!.split('\n').at(-1)!.replace(/'/g, '"');
-    return {
-      message: `The template cannot be read: ${expectation.replace(/\.?$/, '.')}`,
-      line: Number(parse[1]),
-      column: 1,
-    };
-  }
-  const place = fault as { lineNumber?: unknown; column?: unknown };
-  const line =
-    typeof place.lineNumber === 'number' ? place.lineNumber : Number(/ - (\d+):(\d+)$/.exec(text)?.[1] ?? 1);
-  const column = typeof place.column === 'number' ? place.column + 1 : 1;
-  const missing = /^"([^"]+)" not defined in/.exec(text);
-  if (missing !== null)
-    return {
-      message: `The template asks for "${missing[1]}", which the view does not hold there.`,
-      line,
-      column,
-    };
-  return {
-    message: `The template cannot be used: ${text.replace(/ - \d+:\d+$/, '').replace(/\.?$/, '.')}`,
-    line,
-    column,
-  };
 }
 
 /** At most one empty line in a row, none at the ends: what an `{{#if}}` leaves behind. */

@@ -996,18 +996,19 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias3(alias2(alias1(lookupProperty(lookupProperty(depth0,"says"),"equation"), "left", {"start":{"line":9,"column":20},"end":{"line":9,"column":38}} ), depth0))
     + " =</div>\n<ul>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"equation"),"summands"),{"name":"each","hash":{},"fn":container.program(2, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":13,"column":9}}})) != null ? stack1 : "")
-    + "</ul>\n</div>\n<p class=\"small\">[…] is 1 where it holds and 0 elsewhere."
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"overall"),{"name":"if","hash":{},"fn":container.program(4, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":57},"end":{"line":16,"column":101}}})) != null ? stack1 : "")
+    + "</ul>\n</div>\n<p class=\"small\">"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"equation"),"note"),{"name":"if","hash":{},"fn":container.program(4, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":17},"end":{"line":16,"column":73}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"overall"),{"name":"if","hash":{},"fn":container.program(5, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":73},"end":{"line":16,"column":116}}})) != null ? stack1 : "")
     + "</p>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"ladder"),{"name":"if","hash":{},"fn":container.program(5, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":21,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"ladder"),{"name":"if","hash":{},"fn":container.program(6, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":21,"column":7}}})) != null ? stack1 : "")
     + "<h3>Term by term</h3>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"terms"),{"name":"each","hash":{},"fn":container.program(6, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":51,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"terms"),{"name":"each","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":51,"column":9}}})) != null ? stack1 : "")
     + "<h3>All coefficients</h3>\n<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients\">\n<table>\n<caption>Coefficients for "
     + alias3(alias2(alias1(lookupProperty(depth0,"says"), "quantity", {"start":{"line":55,"column":28},"end":{"line":55,"column":41}} ), depth0))
     + "; the p-value compares each with zero, the other terms held</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\">unit of its column</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">standard error</th><th scope=\"col\" class=\"n\">"
     + alias3(alias2(alias1(lookupProperty(depth0,"says"), "confidence", {"start":{"line":56,"column":194},"end":{"line":56,"column":209}} ), depth0))
     + " interval</th><th scope=\"col\" class=\"n\">p-value</th><th scope=\"col\" class=\"n\">variance inflation</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"coefficients"),{"name":"each","hash":{},"fn":container.program(13, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":58,"column":0},"end":{"line":60,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"coefficients"),{"name":"each","hash":{},"fn":container.program(14, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":58,"column":0},"end":{"line":60,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n";
 },"1":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1054,9 +1055,18 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return " "
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"says"), "overall", {"start":{"line":16,"column":80},"end":{"line":16,"column":92}} ), depth0));
+  return container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"says"),"equation"), "note", {"start":{"line":16,"column":45},"end":{"line":16,"column":63}} ), depth0))
+    + " ";
 },"5":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"says"), "overall", {"start":{"line":16,"column":95},"end":{"line":16,"column":107}} ), depth0));
+},"6":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1066,7 +1076,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
 
   return "<h3>Which term makes the most difference?</h3>\n<p>Terms in different units are compared by a typical step of each: from the lower to the upper quartile of its values, or from the baseline to a level.</p>\n"
     + ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(depth0,"says"),"ladder"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
-},"6":function(container,depth0,helpers,partials,data,blockParams,depths) {
+},"7":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, helper, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1075,23 +1085,23 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<article class=\"term"
-    + ((stack1 = lookupProperty(helpers,"unless").call(alias1,lookupProperty(depth0,"chart"),{"name":"unless","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":20},"end":{"line":24,"column":54}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"unless").call(alias1,lookupProperty(depth0,"chart"),{"name":"unless","hash":{},"fn":container.program(8, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":20},"end":{"line":24,"column":54}}})) != null ? stack1 : "")
     + "\">\n<div>\n<h4>"
     + container.escapeExpression((((helper = lookupProperty(helpers,"heading") || container.strict(depth0, "heading", {"start":{"line":26,"column":6},"end":{"line":26,"column":13}} ))),(typeof helper === "function" ? helper.call(alias1,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":26,"column":4},"end":{"line":26,"column":15}}}) : helper)))
     + "</h4>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(depth0,"sentences"),{"name":"each","hash":{},"fn":container.program(8, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":0},"end":{"line":29,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"test"),{"name":"if","hash":{},"fn":container.program(9, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":30,"column":0},"end":{"line":32,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(depth0,"sentences"),{"name":"each","hash":{},"fn":container.program(9, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":0},"end":{"line":29,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"test"),{"name":"if","hash":{},"fn":container.program(10, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":30,"column":0},"end":{"line":32,"column":7}}})) != null ? stack1 : "")
     + "</div>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(10, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":34,"column":0},"end":{"line":36,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"rows"),{"name":"if","hash":{},"fn":container.program(11, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":37,"column":0},"end":{"line":49,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(11, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":34,"column":0},"end":{"line":36,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"rows"),{"name":"if","hash":{},"fn":container.program(12, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":37,"column":0},"end":{"line":49,"column":7}}})) != null ? stack1 : "")
     + "</article>\n";
-},"7":function(container,depth0,helpers,partials,data) {
-    return " plain";
 },"8":function(container,depth0,helpers,partials,data) {
+    return " plain";
+},"9":function(container,depth0,helpers,partials,data) {
     return "<p>"
     + container.escapeExpression(container.lambda(depth0, depth0))
     + "</p>\n";
-},"9":function(container,depth0,helpers,partials,data) {
+},"10":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1102,7 +1112,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "<p class=\"small\">"
     + container.escapeExpression((((helper = lookupProperty(helpers,"test") || container.strict(depth0, "test", {"start":{"line":31,"column":19},"end":{"line":31,"column":23}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"test","hash":{},"data":data,"loc":{"start":{"line":31,"column":17},"end":{"line":31,"column":25}}}) : helper)))
     + "</p>\n";
-},"10":function(container,depth0,helpers,partials,data) {
+},"11":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1111,7 +1121,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(depth0,"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
-},"11":function(container,depth0,helpers,partials,data,blockParams,depths) {
+},"12":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, alias5=container.lambda, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1128,9 +1138,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + " interval</caption>\n<thead><tr><th scope=\"col\">at</th><th scope=\"col\" class=\"n\">difference</th><th scope=\"col\" class=\"n\">"
     + alias4(alias5(alias1(lookupProperty(depths[1],"says"), "confidence", {"start":{"line":41,"column":103},"end":{"line":41,"column":121}} ), depth0))
     + " interval</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"rows"),{"name":"each","hash":{},"fn":container.program(12, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":43,"column":0},"end":{"line":45,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"rows"),{"name":"each","hash":{},"fn":container.program(13, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":43,"column":0},"end":{"line":45,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n";
-},"12":function(container,depth0,helpers,partials,data) {
+},"13":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1145,7 +1155,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":44,"column":80},"end":{"line":44,"column":88}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":44,"column":78},"end":{"line":44,"column":90}}}) : helper)))
     + "</td></tr>\n";
-},"13":function(container,depth0,helpers,partials,data) {
+},"14":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1168,7 +1178,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"vif") || alias1(depth0, "vif", {"start":{"line":59,"column":193},"end":{"line":59,"column":196}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"vif","hash":{},"data":data,"loc":{"start":{"line":59,"column":191},"end":{"line":59,"column":198}}}) : helper)))
     + "</td></tr>\n";
-},"14":function(container,depth0,helpers,partials,data) {
+},"15":function(container,depth0,helpers,partials,data) {
     return "<p>No candidate was admitted, so there is no chosen model to read. The table above gives each candidate’s reason. Three ways on: bring in the variables or rows that the reasons point at; declare a candidate that keeps the rules; or decide, in writing and before looking further, that a rule was the wrong one.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1179,7 +1189,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<section id=\"says\" aria-labelledby=\"says-heading\">\n<h2 id=\"says-heading\"><span class=\"no\">3</span> What does it say?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(14, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":66,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(15, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":66,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true,"useDepths":true},
   'style': {"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
@@ -1311,18 +1321,22 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(depth0,"tried"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
-},"13":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+},"13":function(container,depth0,helpers,partials,data,blockParams,depths) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Partial F of nested pairs\">\n<table>\n<caption>Does the larger of two nested candidates improve on the smaller?</caption>\n<thead><tr><th scope=\"col\">smaller</th><th scope=\"col\">larger</th><th scope=\"col\" class=\"n\">partial F</th><th scope=\"col\" class=\"n\">degrees of freedom</th><th scope=\"col\" class=\"n\">p-value</th><th scope=\"col\">part in the choice</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"tried"),"pairs"),{"name":"each","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":35,"column":0},"end":{"line":37,"column":9}}})) != null ? stack1 : "")
+  return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Partial F of nested pairs\">\n<table>\n<caption>Does the larger of two nested candidates improve on the smaller?</caption>\n<thead><tr><th scope=\"col\">smaller</th><th scope=\"col\">larger</th><th scope=\"col\" class=\"n\">partial F</th><th scope=\"col\" class=\"n\">degrees of freedom</th><th scope=\"col\" class=\"n\">p-value</th>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairsDecided"),{"name":"if","hash":{},"fn":container.program(14, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":193},"end":{"line":33,"column":265}}})) != null ? stack1 : "")
+    + "</tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairs"),{"name":"each","hash":{},"fn":container.program(15, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":35,"column":0},"end":{"line":37,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n";
 },"14":function(container,depth0,helpers,partials,data) {
+    return "<th scope=\"col\">part in the choice</th>";
+},"15":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1340,14 +1354,25 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias4((((helper = lookupProperty(helpers,"freedom") || alias1(depth0, "freedom", {"start":{"line":36,"column":103},"end":{"line":36,"column":110}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"freedom","hash":{},"data":data,"loc":{"start":{"line":36,"column":101},"end":{"line":36,"column":112}}}) : helper)))
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"pValue") || alias1(depth0, "pValue", {"start":{"line":36,"column":133},"end":{"line":36,"column":139}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"pValue","hash":{},"data":data,"loc":{"start":{"line":36,"column":131},"end":{"line":36,"column":141}}}) : helper)))
-    + "</td><td>"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"decided"),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.program(16, data, 0),"data":data,"loc":{"start":{"line":36,"column":150},"end":{"line":36,"column":191}}})) != null ? stack1 : "")
-    + "</td></tr>\n";
-},"15":function(container,depth0,helpers,partials,data) {
-    return "decided";
+    + "</td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depths[1],"tried"),"pairsDecided"),{"name":"if","hash":{},"fn":container.program(16, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":36,"column":146},"end":{"line":36,"column":232}}})) != null ? stack1 : "")
+    + "</tr>\n";
 },"16":function(container,depth0,helpers,partials,data) {
-    return "none";
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"decided"),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.program(18, data, 0),"data":data,"loc":{"start":{"line":36,"column":179},"end":{"line":36,"column":220}}})) != null ? stack1 : "")
+    + "</td>";
 },"17":function(container,depth0,helpers,partials,data) {
+    return "decided";
+},"18":function(container,depth0,helpers,partials,data) {
+    return "none";
+},"19":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1380,7 +1405,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + "</tbody>\n</table>\n</div>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"chart"),{"name":"if","hash":{},"fn":container.program(12, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":28,"column":7}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairs"),{"name":"if","hash":{},"fn":container.program(13, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":0},"end":{"line":41,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairsNote"),{"name":"if","hash":{},"fn":container.program(17, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":42,"column":0},"end":{"line":44,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairsNote"),{"name":"if","hash":{},"fn":container.program(19, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":42,"column":0},"end":{"line":44,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true,"useDepths":true},
   'trust': {"0":function(container,depth0,helpers,partials,data) {

@@ -115,8 +115,10 @@ export interface TriedView {
   readonly ranked: boolean;
   readonly candidates: readonly CandidateView[];
   readonly chart: Figure | null;
-  /** Partial F of nested pairs: those that decided, or all where there are few. */
+  /** Partial F of nested pairs: those that decided, then those that the chosen candidate is part of. */
   readonly pairs: readonly PairView[];
+  /** Whether any of them decided the choice. */
+  readonly pairsDecided: boolean;
   readonly pairsNote: string | null;
 }
 
@@ -155,6 +157,7 @@ export interface SaysView {
   readonly equation: {
     readonly left: string;
     readonly text: string;
+    readonly note: string | null;
     readonly summands: readonly { readonly sign: string; readonly number: string; readonly factor: string }[];
   };
   /** Overall F in a sentence; null where it is not defined. */

@@ -21,12 +21,14 @@ export function plotOf(height: number): Plot {
   return { left: 54, right: WIDTH - 12, top: 26, bottom: height - 42 };
 }
 
-/** Smallest and largest finite number; [0, 1] where there is none; widened where they are equal. */
+/** Smallest and largest number; [0, 1] where there is none; widened where they are equal. Beyond 1e300 counts as without end. */
 export function spanOf(values: Iterable<number | null>): [number, number] {
-  const [low, high] = extent([...values].filter((v): v is number => v !== null && Number.isFinite(v)));
+  const [low, high] = extent([...values].filter((v): v is number => v !== null && Math.abs(v) < 1e300));
   if (low === undefined || high === undefined) return [0, 1];
-  if (low < high) return [low, high];
-  const half = Math.abs(low) * 0.05 || 1;
+  // A span of a few last bits, or of subnormal numbers, has no ticks.
+  if (high - low > Math.max(1e-290, 1e-13 * Math.max(Math.abs(low), Math.abs(high)))) return [low, high];
+  const size = Math.max(Math.abs(low), Math.abs(high)) * 0.05;
+  const half = size > 1e-290 ? size : 1;
   return [low - half, high + half];
 }
 

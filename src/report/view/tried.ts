@@ -2,10 +2,11 @@ import { candidatesChart } from '../chart/candidates.ts';
 import { count, fixed, NONE, pValue, rounded, share, value } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import type { CandidateView, PairView, TriedView } from '../view.ts';
-import { stopped } from '../words/lexicon.ts';
+import { counted, stopped } from '../words/lexicon.ts';
+import { scaleName } from '../words/scale.ts';
 import { criterionName, criterionRounding, ruleSentences } from '../words/selection.ts';
 
-/** More pairs than this are shown only where they decided. */
+/** At most so many nested pairs are shown. */
 const PAIRS = 12;
 /** More candidates than this are cut in the table; the machine-readable table has them all. */
 const CANDIDATES = 60;
@@ -41,7 +42,7 @@ function candidateViews(record: StudyRecord): CandidateView[] {
         rank: count(r.rank),
         name: c.name,
         terms: c.terms.length === 0 ? 'no terms: the mean alone' : c.terms.join(', '),
-        scale: c.scale === record.response.scale ? null : c.scale,
+        scale: c.scale === record.response.scale ? null : scaleName(c.scale),
         value: rounded(r.value, rounding),
         difference: r.difference === null ? NONE : fixed(r.difference, rounding.decimals),
         coefficients: count(c.coefficient_count),
@@ -59,12 +60,19 @@ function candidateViews(record: StudyRecord): CandidateView[] {
   });
 }
 
-function pairs(record: StudyRecord): { pairs: PairView[]; pairsNote: string | null } {
+function pairs(record: StudyRecord): { pairs: PairView[]; pairsDecided: boolean; pairsNote: string | null } {
   const all = record.partial_f;
-  const shown = all.length <= PAIRS ? all : all.filter((pair) => pair.decided).slice(0, PAIRS);
+  const { chosen } = record.selection;
+  // Those that decided come first, then those that hold the chosen model against its neighbours.
+  const shown = [
+    ...all.filter((pair) => pair.decided),
+    ...all.filter((pair) => !pair.decided && (pair.smaller === chosen || pair.larger === chosen)),
+  ].slice(0, PAIRS);
   const hidden = all.length - shown.length;
   const notes = [
-    ...(hidden > 0 ? [`${count(hidden)} further pairs are in the record.`] : []),
+    ...(hidden > 0 && shown.length > 0
+      ? [`${counted(hidden, 'further nested pair is', 'further nested pairs are', count)} in the record.`]
+      : []),
     ...(record.partial_f_omitted === null ? [] : [stopped(record.partial_f_omitted)]),
   ];
   return {
@@ -76,6 +84,7 @@ function pairs(record: StudyRecord): { pairs: PairView[]; pairsNote: string | nu
       pValue: pValue(pair.p_value),
       decided: pair.decided,
     })),
+    pairsDecided: shown.some((pair) => pair.decided),
     pairsNote: notes.length === 0 ? null : notes.join(' '),
   };
 }

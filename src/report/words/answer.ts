@@ -1,7 +1,7 @@
 import { count, percent, share } from '../numbers.ts';
 import type { RecordCandidate, RecordTerm, StudyRecord } from '../record-type.ts';
 import { briefEffect } from './effect.ts';
-import { counted, type Lexicon, labelOf, listed, raised } from './lexicon.ts';
+import { counted, type Lexicon, labelOf, listed, lowered, raised } from './lexicon.ts';
 import { typicalMiss } from './miss.ts';
 import { predictionSentence } from './prediction.ts';
 import { fittedQuantity } from './scale.ts';
@@ -62,7 +62,7 @@ function noneAdmitted(record: StudyRecord): string[] {
   const nearest =
     best === undefined || reasons.length === 0
       ? ''
-      : ` The best ranked, ${best.candidate}, was refused: ${listed(reasons.map((r) => r.replace(/\.$/, '')))}.`;
+      : ` The best ranked, ${best.candidate}, was refused: ${listed(reasons.map((r) => lowered(r.replace(/\.$/, ''))))}.`;
   return [`${which} under the rules that the study declares, so there is no model to answer with.${nearest}`];
 }
 

@@ -22,8 +22,9 @@ export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
     ...findings.filter((f) => f.concern === 1).map((f) => findingLine(f)),
     ...lossLine(record),
   ];
-  const unique = [...new Set(lines)];
   const standing = standingLines(record);
+  // Without a model that is what a reader has to know before anything else.
+  const unique = [...new Set(record.model === null ? [...standing.splice(0, 1), ...lines] : lines)];
   const room = Math.max(0, Math.min(MOST, FEWEST) - unique.length);
   const shown = [
     ...unique.slice(0, MOST),

@@ -1,6 +1,6 @@
-import { rounded, roundingFor, withUnit } from '../numbers.ts';
+import { rounded, roundingFor, value, withUnit } from '../numbers.ts';
 import type { RecordCoefficient, RecordModel } from '../record-type.ts';
-import { type Lexicon, unitOf } from './lexicon.ts';
+import { type Lexicon, unitOf, variableNamed } from './lexicon.ts';
 import { scaleKind } from './scale.ts';
 
 /** The chosen model's equation, taken apart so that a page can set one summand to a line. */
@@ -11,6 +11,8 @@ export interface Equation {
   readonly summands: readonly { readonly sign: string; readonly number: string; readonly factor: string }[];
   /** All of it on one line. */
   readonly text: string;
+  /** How to read the marks in it; null where there are none. */
+  readonly note: string | null;
 }
 
 export function equationOf(
@@ -36,7 +38,7 @@ export function equationOf(
       return j === 0 ? `${sign}${body}` : ` ${sign} ${body}`;
     })
     .join('');
-  return { left, summands, text: `${left} = ${right}` };
+  return { left, summands, text: `${left} = ${right}`, note: noteOn(right) };
 }
 
 function leftSide({ response }: Lexicon): string {
@@ -66,17 +68,34 @@ function pieceText(lexicon: Lexicon, piece: RecordModel['columns'][number]['piec
         ? `(${piece.variable} in ${unit})${exponent(piece.to ?? 1)}`
         : `${piece.variable}${exponent(piece.to ?? 1)}`;
     case 'bend': {
-      const at = withUnit(String(piece.at).replace('-', '−'), unit);
-      return `(${piece.variable} ${piece.side} ${at})`;
+      const at = withUnit(value(piece.at ?? 0, 6), unit);
+      return piece.side === 'below'
+        ? `max(0, ${at} − ${piece.variable})`
+        : `max(0, ${piece.variable} − ${at})`;
     }
     case 'spline':
       return `curve ${piece.index} of ${name}`;
     default:
-      return name;
+      return flagText(lexicon, piece.variable) ?? name;
   }
+}
+
+/** "[urgent is yes]" for a flag, whose second level is coded 1; null for a number. */
+function flagText(lexicon: Lexicon, name: string): string | null {
+  const variable = variableNamed(lexicon, name);
+  if (variable?.type !== 'flag') return null;
+  return `[${name} is ${variable.levels?.[1]?.level ?? 'yes'}]`;
 }
 
 function exponent(to: number): string {
   if (!Number.isInteger(to)) return `^${to}`;
   return [...String(to)].map((c) => (c === '-' ? '⁻' : '⁰¹²³⁴⁵⁶⁷⁸⁹'[Number(c)]!)).join('');
+}
+
+function noteOn(right: string): string | null {
+  const notes = [
+    ...(right.includes('[') ? ['[…] is 1 where it holds and 0 elsewhere.'] : []),
+    ...(right.includes('max(0, ') ? ['max(0, …) is 0 where the difference is negative.'] : []),
+  ];
+  return notes.length === 0 ? null : notes.join(' ');
 }

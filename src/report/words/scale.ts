@@ -9,6 +9,18 @@ export function scaleKind(scale: string): 'natural' | 'log' | 'sqrt' | 'reciproc
   return 'natural';
 }
 
+/** The name of a scale: "square root". */
+export function scaleName(scale: string): string {
+  switch (scaleKind(scale)) {
+    case 'sqrt':
+      return 'square-root';
+    case 'box_cox':
+      return 'Box–Cox';
+    default:
+      return scaleKind(scale);
+  }
+}
+
 /** What was fitted, in words: "fuel burned", "the logarithm of fuel burned" … */
 export function fittedQuantity(response: Lexicon['response']): string {
   switch (scaleKind(response.scale)) {
