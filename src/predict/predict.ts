@@ -5,7 +5,7 @@ import { designRows } from '../model/design-rows.ts';
 import { fromScale, isDecreasing } from '../model/response-scale.ts';
 import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { Scale } from '../study/study.ts';
-import { outsideData } from './outside-data.ts';
+import { outsideData, rangedVariables } from './outside-data.ts';
 
 /** Rows to be predicted: every variable of the model, declared and derived. */
 export interface PredictionRows {
@@ -69,6 +69,7 @@ export function predict(
   const s = chosen.s ?? 0;
   const t = tTwoSidedQuantile(1 - study.predict.interval, fit.degreesOfFreedom);
   const largestLeverage = chosen.leverages.reduce((most, h) => Math.max(most, h), 0);
+  const ranged = rangedVariables(chosen);
   const sum = new Float64Array(p);
   let centres = 0;
   let newRows = 0;
@@ -97,7 +98,7 @@ export function predict(
         mean_upper: meanUpper,
         mean: smearing === null ? null : smearedMean(centre, smearing, scale),
         leverage,
-        outside: outsideData(rows.given[i]!, rows.columns, i, chosen.spreads, remote),
+        outside: outsideData(rows.columns, i, ranged, chosen.spreads, remote),
       };
     });
   });
