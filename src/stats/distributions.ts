@@ -7,6 +7,9 @@
  */
 import cephes from 'cephes';
 
+// Node itself gets the library compiled; loaders that take the package's other form must wait for it.
+await cephes.compiled;
+
 /** P(F > f) for f ≥ 0 on d1 and d2 degrees of freedom. Abramowitz & Stegun 26.6.2. */
 export function fUpper(f: number, d1: number, d2: number): number {
   if (!(d1 > 0) || !(d2 > 0) || Number.isNaN(f)) return Number.NaN;
@@ -25,17 +28,20 @@ export function tTwoSided(t: number, df: number): number {
 /** P(χ² > x) on df degrees of freedom. Abramowitz & Stegun 26.4.2. */
 export function chiSquaredUpper(x: number, df: number): number {
   if (!(df > 0) || Number.isNaN(x)) return Number.NaN;
-  return x <= 0 ? 1 : cephes.igamc(df / 2, x / 2);
+  return x <= 0 ? 1 : gammaTail(df / 2, x / 2);
 }
 
 /** P(Z > z), through the incomplete gamma function, which keeps the far tail. */
 export function normalUpper(z: number): number {
-  const tail = cephes.igamc(0.5, (z * z) / 2) / 2;
+  if (Number.isNaN(z)) return Number.NaN;
+  const tail = gammaTail(0.5, (z * z) / 2) / 2;
   return z >= 0 ? tail : 1 - tail;
 }
 
-/** The z below which a standard normal variable falls with probability p. */
+/** The z below which a standard normal variable falls with probability p; −∞ and ∞ for 0 and 1. */
 export function normalQuantile(p: number): number {
+  if (!(p >= 0) || !(p <= 1)) return Number.NaN;
+  if (p === 0 || p === 1) return p === 0 ? Number.NEGATIVE_INFINITY : Number.POSITIVE_INFINITY;
   return cephes.ndtri(p);
 }
 
@@ -45,8 +51,8 @@ export function normalQuantile(p: number): number {
  */
 export function tTwoSidedQuantile(p: number, df: number): number {
   if (!(df > 0) || !(p > 0) || !(p < 1)) return Number.NaN;
-  let t = df > 200 ? nearNormal(p, df) : fromBeta(cephes.incbi(df / 2, 0.5, p), df);
   const logConstant = cephes.lgam((df + 1) / 2) - cephes.lgam(df / 2) - 0.5 * Math.log(df * Math.PI);
+  let t = df > 200 ? nearNormal(p, df) : fromBeta(p, df, logConstant);
   for (let step = 0; step < 4; step++) {
     const density = Math.exp(logConstant - ((df + 1) / 2) * Math.log1p((t * t) / df));
     const change = (tTwoSided(t, df) - p) / (2 * density);
@@ -63,11 +69,26 @@ function nearNormal(p: number, df: number): number {
   return z + (z ** 3 + z) / (4 * df);
 }
 
-function fromBeta(x: number, df: number): number {
-  return Math.sqrt((df * (1 - x)) / x);
+/** Through the inverse incomplete beta, or the power law of the far tail where the library's cannot be held. */
+function fromBeta(p: number, df: number, logConstant: number): number {
+  try {
+    const x = cephes.incbi(df / 2, 0.5, p);
+    if (x > 0) return Math.sqrt((df * (1 - x)) / x);
+  } catch {}
+  return Math.exp((Math.LN2 + logConstant + ((df - 1) / 2) * Math.log(df) - Math.log(p)) / df);
 }
 
 /** Incomplete beta tail; kept apart so that one place guards the end points. */
 function betaTail(a: number, b: number, x: number): number {
   return x >= 1 ? 1 : cephes.incbet(a, b, x);
+}
+
+/** Upper incomplete gamma, regularised. The library throws where a tail is too small to be held. */
+function gammaTail(a: number, x: number): number {
+  if (x === Number.POSITIVE_INFINITY) return 0;
+  try {
+    return cephes.igamc(a, x);
+  } catch {
+    return x < a ? 1 : 0;
+  }
 }
