@@ -107,6 +107,18 @@ describe('residualsTable', () => {
     );
   });
 
+  test('all figures finite: the same digits as one by one', () => {
+    const numbers = fc.array(fc.double({ noNaN: true, noDefaultInfinity: true }), { minLength: 1 });
+    fc.assert(
+      fc.property(numbers, (values) => {
+        const [, ...found] = cells(
+          [...residualsTable(residuals(values.map((value) => ['r', value])))].join(''),
+        );
+        expect(found.map((row) => row[2])).toEqual(values.map(String));
+      }),
+    );
+  });
+
   test('blocks join without a seam, without identities where there are none', () => {
     const n = 10_000;
     const zeros = new Float64Array(n);
