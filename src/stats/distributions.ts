@@ -5,10 +5,11 @@
  *
  * Arguments out of the domain (NaN, degrees of freedom ≤ 0) give NaN.
  */
-import cephes from 'cephes';
+import { createRequire } from 'node:module';
 
-// Node itself gets the library compiled; loaders that take the package's other form must wait for it.
-await cephes.compiled;
+// The package has a form that is ready at once and, for bundlers, one that compiles later and fails until then.
+// Loaders differ in which of them an import gets; requiring it gets the first.
+const cephes = createRequire(import.meta.url)('cephes') as typeof import('cephes').default;
 
 /** P(F > f) for f ≥ 0 on d1 and d2 degrees of freedom. Abramowitz & Stegun 26.6.2. */
 export function fUpper(f: number, d1: number, d2: number): number {
