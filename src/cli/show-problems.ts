@@ -1,6 +1,9 @@
 import type { Problem } from '../problem.ts';
 import type { Terminal } from './terminal.ts';
 
+/** A terminal shows so many; more than that come from a file that is no study, or from one slip. */
+const MOST = 50;
+
 /**
  * Prints problems once, sorted: as text on standard error, or as JSON on standard output, where then
  * nothing else is printed. `sources` holds the text of each file that a problem may point into.
@@ -15,8 +18,10 @@ export async function showProblems(
     const { problemsAsJson } = await import('./format-problems.ts');
     terminal.out(withLineEnd(problemsAsJson(problems)));
   } else if (problems.length > 0) {
-    const { formatProblems } = await import('./format-problems.ts');
-    terminal.err(withLineEnd(formatProblems(problems, sources)));
+    const { formatProblems, sortProblems } = await import('./format-problems.ts');
+    terminal.err(withLineEnd(formatProblems(sortProblems(problems).slice(0, MOST), sources)));
+    const more = problems.length - MOST;
+    if (more > 0) terminal.err(`${more} more problems are not shown; --problems json lists them all.\n`);
   }
 }
 

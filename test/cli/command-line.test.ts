@@ -141,6 +141,16 @@ describe('check', () => {
     expect(json.err).toBe('');
   });
 
+  test('a terminal shows fifty problems and says how many more there are; JSON has all', async () => {
+    const keys = Array.from({ length: 60 }, (_, i) => `unknown_key_${i}: 1\n`).join('');
+    const { path } = await study(keys);
+    const { status, err } = await plumbrule('check', path);
+    expect(status).toBe(2);
+    expect(err.match(/is not a key here/g)).toHaveLength(50);
+    expect(err).toContain('10 more problems are not shown; --problems json lists them all.');
+    expect(JSON.parse((await plumbrule('check', path, '--problems', 'json')).out).problems).toHaveLength(60);
+  });
+
   test('--quiet and JSON print no summary', async () => {
     const { path } = await study();
     expect(await plumbrule('check', path, '--quiet')).toEqual({ status: 0, out: '', err: '' });
