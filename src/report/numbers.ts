@@ -126,6 +126,13 @@ export function value(x: number | null | undefined, digits = 4): string {
   return text.includes('.') ? text.replace(/\.?0+$/, '') : text;
 }
 
+/** So many significant digits, zeros kept: for statistics. */
+export function significant(x: number | null | undefined, digits: number): string {
+  if (x === null || x === undefined || !Number.isFinite(x)) return fixed(x, 0);
+  const size = decimalExponent(x, digits);
+  return size >= 6 || size < -4 ? scientific(x, digits) : fixed(x, digits - 1 - size);
+}
+
 /** A count of rows, columns, candidates. */
 export function count(n: number): string {
   return fixed(n, 0);

@@ -14,13 +14,7 @@ import {
   residualsPredictorChart,
   residualsTimeChart,
 } from '../../src/report/chart/residuals.ts';
-import {
-  correlation,
-  rankCorrelation,
-  ranks,
-  shareBetween,
-  spreadAlong,
-} from '../../src/report/chart/summary.ts';
+import { correlation, ranks, shareBetween, spreadAlong, twoThirds } from '../../src/report/chart/summary.ts';
 import { at, clipped, dots, escaped, type Figure } from '../../src/report/chart/svg.ts';
 import type { RecordExamination, StudyRecord } from '../../src/report/record-type.ts';
 import { lexiconOf } from '../../src/report/words/lexicon.ts';
@@ -295,12 +289,15 @@ describe('drawing helpers', () => {
     expect(curveAt({ x: [], y: [] }, 0)).toBeNaN();
   });
   it('summarise', () => {
+    expect(twoThirds([-3, 1, 2, 3])).toBe(3);
+    expect(twoThirds([0, -3, 6, 1000])).toBe(6);
+    expect(twoThirds([])).toBeNull();
     expect(correlation([1, 2, 3], [2, 4, 6])).toBeCloseTo(1, 14);
     expect(correlation([1, 1, 1], [1, 2, 3])).toBeNull();
     expect(correlation([1], [1])).toBeNull();
     // Ties share their mean rank: by hand.
     expect(ranks([10, 20, 20, 5])).toEqual([2, 3.5, 3.5, 1]);
-    expect(rankCorrelation([1, 2, 3, 4], [1, 4, 9, 16])).toBeCloseTo(1, 14);
+    expect(correlation(ranks([1, 2, 3, 4]), ranks([1, 4, 9, 16]))).toBeCloseTo(1, 14);
     expect(shareBetween([1, 1, 3, 3], ['a', 'a', 'b', 'b'])).toBe(1);
     expect(shareBetween([1, 1], ['a', 'b'])).toBeNull();
     expect(spreadAlong([3, 1, 2, 4, 5, 6], [3, 3, 3, 4, 4, 4], 2)).toEqual([

@@ -19,6 +19,7 @@ import {
   roundingOfInterval,
   scientific,
   share,
+  significant,
   THIN,
   value,
   withUnit,
@@ -142,6 +143,13 @@ describe('other numbers', () => {
     expect(plain(value(1e-9))).toBe('1 × 10⁻⁹');
     expect(value(0)).toBe('0');
     expect(value(undefined)).toBe(NONE);
+  });
+  it('keeps the zeros of statistics', () => {
+    expect(significant(2, 3)).toBe('2.00');
+    expect(significant(0.06, 2)).toBe('0.060');
+    expect(plain(significant(1.2e-7, 2))).toBe('1.2 × 10⁻⁷');
+    expect(significant(427.3, 3)).toBe('427');
+    expect(significant(null, 3)).toBe(NONE);
   });
   it('knows R², counts and per cent', () => {
     expect(share(0.9317)).toBe('0.932');

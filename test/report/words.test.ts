@@ -480,7 +480,7 @@ describe('selection, predictions and findings in words', () => {
       'Koenker’s form of the Breusch–Pagan statistic: 9.37 on 8 degrees of freedom, p = 0.31.',
     );
     expect(plain(evidence({ ...finding, statistic: 4, df: [1, 20], p_value: null, mark: 'about 2' })!)).toBe(
-      'Koenker’s form of the Breusch–Pagan statistic: 4 on 1 and 20 degrees of freedom; customary mark: about 2.',
+      'Koenker’s form of the Breusch–Pagan statistic: 4.00 on 1 and 20 degrees of freedom; customary mark: about 2.',
     );
     expect(evidence({ ...finding, statistic: null })).toBeNull();
   });

@@ -30,7 +30,7 @@ export function candidatesChart(record: StudyRecord): Figure | null {
   // Small distances are what the choice turns on, large ones only have to be seen as large.
   const y = scaleSymlog()
     .constant(unit)
-    .domain([0, largest * 1.15 || 1])
+    .domain([0, largest * 1.5 || 1])
     .range([plot.bottom - 12, plot.top]);
   const name = criterionName(selection.rank_by);
   const within =
@@ -39,9 +39,9 @@ export function candidatesChart(record: StudyRecord): Figure | null {
           class: 'zone',
           x: plot.left,
           width: plot.right - plot.left,
-          y: Math.max(plot.top, y(Math.min(selection.prefer_smaller_within, largest * 1.15))),
+          y: Math.max(plot.top, y(Math.min(selection.prefer_smaller_within, largest * 1.5))),
           height:
-            plot.bottom - Math.max(plot.top, y(Math.min(selection.prefer_smaller_within, largest * 1.15))),
+            plot.bottom - Math.max(plot.top, y(Math.min(selection.prefer_smaller_within, largest * 1.5))),
         })
       : '';
   const circles = marks
@@ -105,7 +105,7 @@ function distanceTicks(y: (v: number) => number, unit: number, largest: number, 
   for (let e = Math.floor(Math.log10(unit)); e <= Math.ceil(Math.log10(largest || 1)); e++) {
     for (const m of [1, 2, 5]) {
       const value = m * 10 ** e;
-      if (value > largest * 1.15 || last - y(value) < 24) continue;
+      if (value > largest * 1.5 || last - y(value) < 24) continue;
       ticks.push({ value, text: fixed(value, Math.max(0, Math.min(-e, decimals + 2))) });
       last = y(value);
     }
@@ -142,7 +142,7 @@ function placedNames(names: readonly Name[], plot: Plot): string {
         const free =
           box.x1 >= plot.left &&
           box.x2 <= plot.right + 8 &&
-          box.y > plot.top - 8 &&
+          box.y > plot.top + 2 &&
           box.y < plot.bottom &&
           taken.every((t) => box.x2 < t.x1 || box.x1 > t.x2 || Math.abs(box.y - t.y) > 13) &&
           dots.every(

@@ -1,4 +1,4 @@
-import { value } from '../numbers.ts';
+import { significant } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
 import { at, clipped, drawing, element, type Figure, label } from './svg.ts';
@@ -47,7 +47,7 @@ export function influenceChart(examination: RecordExamination): Figure | null {
     })
     .join('');
   const [first, second] = top;
-  const caption = `${rowTitle(first!.row, first!.id)} moves the coefficients most: Cook’s distance ${value(first!.d, 2)}${second === undefined ? '' : `, the next ${value(second.d, 2)} (${rowTitle(second.row, second.id)})`}.`;
+  const caption = `${rowTitle(first!.row, first!.id)} moves the coefficients most: Cook’s distance ${significant(first!.d, 2)}${second === undefined ? '' : `, the next ${significant(second.d, 2)} (${rowTitle(second.row, second.id)})`}.`;
   const opening = caption[0] === 'r' && first!.id === null ? `R${caption.slice(1)}` : caption;
   return {
     svg: drawing(

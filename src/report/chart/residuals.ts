@@ -5,7 +5,7 @@ import { type Lexicon, labelOf, raised, unitOf } from '../words/lexicon.ts';
 import { fittedQuantity, fittedUnit } from '../words/scale.ts';
 import { axisTitle, bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
 import { levelPositions, strips } from './strips.ts';
-import { correlation, rankCorrelation, rootMeanSquare, shareBetween, spreadAlong } from './summary.ts';
+import { correlation, ranks, shareBetween, spreadAlong, twoThirds } from './summary.ts';
 import { at, dots, drawing, element, type Figure } from './svg.ts';
 
 type Points = RecordExamination['points'];
@@ -20,7 +20,7 @@ function size(lexicon: Lexicon, x: number): string {
   return withUnit(rounded(x, roundingFor(x, x)), fittedUnit(lexicon.response));
 }
 
-/** Residuals against fitted values, with the local spread on both sides of zero. */
+/** Residuals against fitted values, with lines between which two thirds of them lie. */
 export function residualsFittedChart(lexicon: Lexicon, points: Points): Figure {
   const quantity = fittedQuantity(lexicon.response);
   const caption = spreadCaption(lexicon, points);
@@ -45,13 +45,13 @@ function spreadCaption(lexicon: Lexicon, points: Points): string {
   if (low === undefined || high === undefined || low === 0 || high === 0 || points.thinned) {
     return 'Residuals against fitted values; an even spread looks like a level band.';
   }
-  const sizes = `${size(lexicon, low)} in the lowest third of fitted values, ${size(lexicon, high)} in the highest`;
+  const sizes = `two thirds of the residuals lie within ${size(lexicon, low)} in the lowest third of fitted values, ${size(lexicon, high)} in the highest`;
   if (high / low > 1.5) return `The spread grows with the fitted value: ${sizes}.`;
   if (low / high > 1.5) return `The spread shrinks as the fitted value grows: ${sizes}.`;
   return `The spread is much the same along the fitted values: ${sizes}.`;
 }
 
-/** Dots, the zero line and a line at ± the local root mean square. */
+/** Dots, the zero line and a line at ± the size that two thirds do not exceed. */
 function againstNumber(
   lexicon: Lexicon,
   points: Points,
@@ -148,6 +148,7 @@ function neighbourCaption(ordered: readonly number[], thinned: boolean): string 
 /** Residuals against the model's variable that their size goes with most; null where there is none. */
 export function residualsPredictorChart(lexicon: Lexicon, points: Points): Figure | null {
   const sizes = points.residual.map(Math.abs);
+  const sizeRanks = ranks(sizes);
   let best: {
     variable: string;
     strength: number;
@@ -158,7 +159,7 @@ export function residualsPredictorChart(lexicon: Lexicon, points: Points): Figur
   for (const { variable, numbers, texts } of points.values) {
     const signed =
       numbers !== null
-        ? rankCorrelation(numbers, sizes)
+        ? correlation(ranks(numbers), sizeRanks)
         : texts !== null
           ? Math.sqrt(shareBetween(sizes, texts) ?? 0)
           : null;
@@ -188,7 +189,7 @@ function againstLevels(lexicon: Lexicon, points: Points, variable: string, texts
   const spreads = levels
     .map((level) => ({
       level,
-      spread: rootMeanSquare(points.residual.filter((_, i) => texts[i] === level)) ?? 0,
+      spread: twoThirds(points.residual.filter((_, i) => texts[i] === level)) ?? 0,
     }))
     .sort((a, b) => a.spread - b.spread);
   const low = spreads[0];

@@ -1,9 +1,17 @@
 import { quantileSorted } from 'd3-array';
 
-/** Root mean square; null for no values. */
-export function rootMeanSquare(values: readonly number[]): number | null {
+/**
+ * The size that two thirds of the values do not exceed, signs apart; null for no values. About one standard
+ * deviation of normal values (0.97 of it), and a single wild value does not move it.
+ */
+export function twoThirds(values: readonly number[]): number | null {
   if (values.length === 0) return null;
-  return Math.sqrt(values.reduce((sum, v) => sum + v * v, 0) / values.length);
+  return (
+    quantileSorted(
+      values.map(Math.abs).sort((a, b) => a - b),
+      2 / 3,
+    ) ?? null
+  );
 }
 
 /** Product-moment correlation; null where either side does not vary or there are fewer than three pairs. */
@@ -23,7 +31,7 @@ export function correlation(a: readonly number[], b: readonly number[]): number 
   return aa > 0 && bb > 0 ? ab / Math.sqrt(aa * bb) : null;
 }
 
-/** Ranks from 1, ties sharing their mean rank. */
+/** Ranks from 1, ties sharing their mean rank; their correlation is the rank correlation (Spearman 1904). */
 export function ranks(values: readonly number[]): number[] {
   const order = values.map((_, i) => i).sort((i, j) => values[i]! - values[j]!);
   const result = new Array<number>(values.length).fill(0);
@@ -34,11 +42,6 @@ export function ranks(values: readonly number[]): number[] {
     start = end;
   }
   return result;
-}
-
-/** Rank correlation (Spearman 1904). */
-export function rankCorrelation(a: readonly number[], b: readonly number[]): number | null {
-  return correlation(ranks(a), ranks(b));
 }
 
 /** Share of the variation of `values` between the groups named by `texts`; null where nothing varies. */
@@ -55,7 +58,7 @@ export function shareBetween(values: readonly number[], texts: readonly string[]
   return between / total;
 }
 
-/** Rows in order of x, cut into bins of about equal count; each with its middle and the spread of y in it. */
+/** Rows in order of x, cut into bins of about equal count; each with its middle and how far two thirds of y reach. */
 export function spreadAlong(
   x: readonly number[],
   y: readonly number[],
@@ -77,7 +80,7 @@ export function spreadAlong(
         rows.map((i) => x[i]!),
         0.5,
       ) as number,
-      spread: rootMeanSquare(rows.map((i) => y[i]!)) as number,
+      spread: twoThirds(rows.map((i) => y[i]!)) as number,
     });
   }
   return result;

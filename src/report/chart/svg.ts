@@ -25,8 +25,8 @@ export function escaped(text: string): string {
 /** A coordinate with one decimal; a number that is not finite throws, since it means a fault of ours. */
 export function at(x: number): string {
   if (!Number.isFinite(x)) throw new Error('A drawing was given a coordinate that is not a number.');
-  const text = x.toFixed(1);
-  return text.endsWith('.0') ? text.slice(0, -2).replace(/^-0$/, '0') : text.replace(/^-0\.0$/, '0');
+  // Adding 0 takes the sign off −0; this is called for every dot and is several times quicker than toFixed.
+  return String(Math.round(x * 10) / 10 + 0);
 }
 
 type Attributes = Readonly<Record<string, string | number | null>>;

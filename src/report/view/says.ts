@@ -1,5 +1,15 @@
 import { ladderChart } from '../chart/ladder.ts';
-import { count, NONE, percent, pPhrase, pValue, range, rounded, roundingFor, value } from '../numbers.ts';
+import {
+  count,
+  NONE,
+  percent,
+  pPhrase,
+  pValue,
+  range,
+  rounded,
+  roundingFor,
+  significant,
+} from '../numbers.ts';
 import type { RecordCandidate, RecordCoefficient, StudyRecord } from '../record-type.ts';
 import type { CoefficientView, SaysView } from '../view.ts';
 import { fitSentence } from '../words/answer.ts';
@@ -34,7 +44,7 @@ export function saysView(record: StudyRecord, lexicon: Lexicon): SaysView | null
 function overallSentence({ overall_f: f, intercept }: RecordCandidate): string | null {
   if (f === null || f.statistic === null || f.p_value === null) return null;
   const against = intercept ? 'the mean alone' : 'a model that says zero';
-  return `All terms together against ${against}: F\u00a0=\u00a0${value(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
+  return `All terms together against ${against}: F\u00a0=\u00a0${significant(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
 }
 
 function coefficientView(c: RecordCoefficient, unit: string | null): CoefficientView {
@@ -46,6 +56,6 @@ function coefficientView(c: RecordCoefficient, unit: string | null): Coefficient
     standardError: rounded(c.standard_error, rounding),
     interval: range(c.lower, c.upper, rounding),
     pValue: pValue(c.p_value),
-    vif: c.vif === null ? NONE : value(c.vif, 3),
+    vif: c.vif === null ? NONE : significant(c.vif, 3),
   };
 }

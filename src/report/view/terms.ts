@@ -2,7 +2,7 @@ import { differenceTitle } from '../chart/effects.ts';
 import { levelsChart } from '../chart/levels.ts';
 import { partialChart } from '../chart/partial.ts';
 import type { Figure } from '../chart/svg.ts';
-import { count, pPhrase, range, rounded, roundingOfInterval, value } from '../numbers.ts';
+import { count, pPhrase, range, rounded, roundingOfInterval, significant } from '../numbers.ts';
 import type { RecordCoefficient, RecordExamination, RecordModel, RecordTerm } from '../record-type.ts';
 import type { TermView } from '../view.ts';
 import { effectOf, shortEffect } from '../words/effect.ts';
@@ -43,7 +43,7 @@ function testSentence({ joint_f: f }: RecordTerm): string | null {
     f.df1 === 1
       ? 'With against without this term'
       : `With against without this term’s ${count(f.df1)}\u00a0columns`;
-  return `${columns}: F\u00a0=\u00a0${value(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
+  return `${columns}: F\u00a0=\u00a0${significant(f.statistic, 3)} on ${count(f.df1)} and ${count(f.df2)}\u00a0degrees of freedom, ${pPhrase(f.p_value)}.`;
 }
 
 function termChart(

@@ -1,5 +1,5 @@
 import { candidatesChart } from '../chart/candidates.ts';
-import { count, fixed, NONE, pValue, rounded, share, value } from '../numbers.ts';
+import { count, fixed, NONE, pValue, rounded, share, significant } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import type { CandidateView, PairView, TriedView } from '../view.ts';
 import { counted, stopped } from '../words/lexicon.ts';
@@ -79,7 +79,7 @@ function pairs(record: StudyRecord): { pairs: PairView[]; pairsDecided: boolean;
     pairs: shown.map((pair) => ({
       smaller: pair.smaller,
       larger: pair.larger,
-      statistic: value(pair.statistic, 3),
+      statistic: significant(pair.statistic, 3),
       freedom: `${count(pair.df1)} and ${count(pair.df2)}`,
       pValue: pValue(pair.p_value),
       decided: pair.decided,

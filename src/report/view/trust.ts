@@ -2,7 +2,7 @@ import { fittedObservedChart } from '../chart/fitted-observed.ts';
 import { influenceChart } from '../chart/influence.ts';
 import { residualsFittedChart, residualsPredictorChart, residualsTimeChart } from '../chart/residuals.ts';
 import type { Figure } from '../chart/svg.ts';
-import { count, NONE, rounded, roundingFor, value } from '../numbers.ts';
+import { count, fixed, NONE, rounded, roundingFor, significant, value } from '../numbers.ts';
 import type { RecordExamination, StudyRecord } from '../record-type.ts';
 import type { FindingView, TrustView } from '../view.ts';
 import { concernWord, evidence } from '../words/finding.ts';
@@ -91,9 +91,9 @@ function rowViews({ influential_rows: rows }: RecordExamination, s: number | nul
       id: row.id ?? NONE,
       observed: rounded(row.observed, rounding),
       fitted: rounded(row.fitted, rounding),
-      residual: value(row.standardised_residual, 3),
-      leverage: value(row.leverage, 2),
-      distance: value(row.cooks_distance, 2),
+      residual: fixed(row.standardised_residual, 2),
+      leverage: significant(row.leverage, 2),
+      distance: significant(row.cooks_distance, 2),
     };
   });
 }

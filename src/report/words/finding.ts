@@ -1,4 +1,4 @@
-import { NONE, pPhrase, value } from '../numbers.ts';
+import { NONE, pPhrase, significant, value } from '../numbers.ts';
 import type { RecordFinding } from '../record-type.ts';
 
 const CONCERN = ['Nothing to see', 'Worth a look', 'Take care'] as const;
@@ -21,5 +21,5 @@ export function evidence(finding: RecordFinding): string | null {
   const p = finding.p_value === null ? '' : `, ${pPhrase(finding.p_value)}`;
   const mark = finding.mark === null ? '' : `; customary mark: ${finding.mark}`;
   const name = finding.statistic_name || NONE;
-  return `${name[0]!.toUpperCase()}${name.slice(1)}: ${value(finding.statistic, 3)}${freedom}${p}${mark}.`;
+  return `${name[0]!.toUpperCase()}${name.slice(1)}: ${significant(finding.statistic, 3)}${freedom}${p}${mark}.`;
 }
