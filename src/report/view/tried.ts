@@ -41,7 +41,7 @@ function candidateViews(record: StudyRecord): CandidateView[] {
       {
         rank: count(r.rank),
         name: c.name,
-        terms: c.terms.length === 0 ? 'no terms: the mean alone' : c.terms.join(', '),
+        terms: c.terms.length === 0 ? 'no terms: the mean alone' : c.terms.join('; '),
         scale: c.scale === record.response.scale ? null : scaleName(c.scale),
         value: rounded(r.value, rounding),
         difference: r.difference === null ? NONE : fixed(r.difference, rounding.decimals),
