@@ -47,10 +47,12 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
   const keptAt: number[] = [];
   const dropped: DependentColumn[] = [];
   const nearlyDependent: DependentColumn[] = [];
+  // Rows below the last column taken so far are still zero, in whatever order the candidate has its columns.
+  let end = 0;
   for (let j = 0; j < own.length; j++) {
     const column = own[j]!;
     const rank = kept.length;
-    const end = column + 1;
+    end = Math.max(end, column + 1);
     const left = columnNorm(work, j, rank, end);
     const length = columnNorm(work, j, 0, end);
     if (left <= DEPENDENT * length) {

@@ -46,7 +46,7 @@ export function buildDesign(study: Study, sample: Sample, report: Report): Desig
       const products = expand(term, sample, oneLevel);
       return { name: termName(term), plan: term, columns: unique(products.map(columnIndex)) };
     });
-    const own = unique(terms.flatMap((term) => term.columns)).sort((a, b) => a - b);
+    const own = unique(terms.flatMap((term) => term.columns));
     return {
       name: plan.name,
       response: { variable: study.response.variable, scale: plan.scale },

@@ -44,7 +44,7 @@ export interface CandidateModel {
   readonly response: ResponsePlan;
   readonly intercept: boolean;
   readonly terms: readonly ModelTerm[];
-  /** All columns in order, the intercept (union column 0) first where there is one. */
+  /** All columns, the intercept (union column 0) first where there is one, then term by term as declared. */
   readonly columns: readonly number[];
   /** Which column of the response block this candidate's response is. */
   readonly responseColumn: number;

@@ -108,6 +108,29 @@ describe('the factor', () => {
     );
   });
 
+  test('columns come in the order in which the candidate declares them, with the same fit', () => {
+    fc.assert(
+      fc.property(tables, fc.shuffledSubarray([1, 2, 3], { minLength: 2 }), (data, own) => {
+        const model = testModel(data, columns, [
+          [0, ...own],
+          [0, ...own.toSorted((a, b) => a - b)],
+        ]);
+        const factor = factorExtended(model.rows);
+        const [declared, ascending] = model.design.candidates.map((one) =>
+          fitCandidate(factor, one, model.facts),
+        );
+        expect(declared!.columns).toEqual([0, ...own]);
+        const sorted = ascending!.columns.map(
+          (column) => declared!.estimates[declared!.columns.indexOf(column)]!,
+        );
+        close(sorted, ascending!.estimates, 14);
+        close([declared!.residualSumOfSquares], [ascending!.residualSumOfSquares], 14);
+        close([press(declared!, model.rows)!], [press(ascending!, model.rows)!], 11);
+      }),
+      { numRuns: 30 },
+    );
+  });
+
   test('residuals are orthogonal to every column; with an intercept they sum to zero (common practice, no source)', () => {
     fc.assert(
       fc.property(tables, (data) => {
