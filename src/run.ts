@@ -1,6 +1,7 @@
 import { readTable } from './data/read-table.ts';
 import type { Table } from './data/table.ts';
-import { checkFinite, checkFits } from './engine/check-fits.ts';
+import { checkFits } from './engine/check-fits.ts';
+import { checkMagnitudes } from './engine/check-magnitudes.ts';
 import { type FittedAll, fitAll } from './engine/fit-all.ts';
 import { refineFit } from './engine/refine.ts';
 import { type Chosen, examineRows } from './examine/chosen.ts';
@@ -76,7 +77,7 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   const own = numbersOf(sample, study.response.variable);
   const rows = rowsOf(study, sample, design, own);
 
-  if (!checkFinite(sample, design, rows, table.file, report)) return stopped();
+  if (!checkMagnitudes(study, sample, design, rows, table.file, report)) return stopped();
 
   const fitted = fitAll(design, rows, own, {
     pressRanks: study.selection.rankBy === 'press',

@@ -1,5 +1,4 @@
 import type { Design } from '../model/design.ts';
-import type { DesignRows } from '../model/design-rows.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
 import type { Study } from '../study/study.ts';
@@ -7,8 +6,8 @@ import type { DependentColumn, Fit } from './fit.ts';
 
 /**
  * What the fits say about the declaration: responses and predictors that do not vary, columns that depend on
- * one another, fewer rows than coefficients, numbers too large to compute with. Each is said once, with the
- * candidates it touches, at the term that brings it in.
+ * one another, fewer rows than coefficients. Each is said once, with the candidates it touches, at the term that
+ * brings it in.
  */
 export function checkFits(
   study: Study,
@@ -29,45 +28,6 @@ export function checkFits(
   }
   reportTooFewRows(study, fits, report);
   reportDependencies(study, design, fits, report);
-}
-
-/**
- * Looks for design values that are not finite (a power that overflows, 0 to a negative power) or so large that
- * their squares overflow together; true where all is well.
- */
-export function checkFinite(
-  sample: Sample,
-  design: Design,
-  rows: DesignRows,
-  dataFile: string,
-  report: Report,
-): boolean {
-  const block = 1024;
-  const values = new Float64Array(block);
-  let sound = true;
-  for (let column = 0; column < rows.width; column++) {
-    // A column that is a variable itself holds what the contract let in, which is finite.
-    const pieces = design.columns[column]?.pieces ?? [];
-    if (pieces.every((piece) => piece.kind === 'variable' || piece.kind === 'level') && pieces.length < 2)
-      continue;
-    for (let from = 0; from < rows.rowCount; from += block) {
-      const count = Math.min(block, rows.rowCount - from);
-      rows.fill([column], from, from + count, block, values, null);
-      const at = values.subarray(0, count).findIndex((value) => !Number.isFinite(value));
-      if (at < 0) continue;
-      sound = false;
-      const name = design.columns[column]!.name;
-      report({
-        code: 'value_not_finite',
-        severity: 'error',
-        place: { kind: 'cell', file: dataFile, row: sample.lines[from + at]!, variable: pieces[0]!.variable },
-        message: `${name} is not a finite number there.`,
-        hint: 'Leave such rows out for a stated reason, or choose a term that is defined in all rows.',
-      });
-      break;
-    }
-  }
-  return sound;
 }
 
 function isConstant(sample: Sample, variable: string): boolean {

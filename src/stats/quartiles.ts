@@ -29,7 +29,11 @@ export function quartilesOf(values: Float64Array): Quartiles {
     if (rest === 0) return work[position]!;
     let next = Number.POSITIVE_INFINITY;
     for (let i = position + 1; i <= last; i++) if (work[i]! < next) next = work[i]!;
-    return work[position]! + rest * (next - work[position]!);
+    const gap = next - work[position]!;
+    // Between the ends of the range of numbers the gap itself cannot be held.
+    return gap < Number.POSITIVE_INFINITY
+      ? work[position]! + rest * gap
+      : (1 - rest) * work[position]! + rest * next;
   };
   let smallest = Number.POSITIVE_INFINITY;
   let largest = Number.NEGATIVE_INFINITY;

@@ -42,10 +42,13 @@ export function koenker(chosen: Chosen): { statistic: number; df: number } | nul
   const { columns, fit, sample, residuals } = chosen;
   const own = fit.columns.filter((column) => column !== 0);
   if (own.length === 0) return null;
+  // R² does not depend on the unit of the residuals, and in this one their fourth powers can be held.
+  const largest = residuals.reduce((most, e) => Math.max(most, Math.abs(e)), 0);
+  if (largest === 0) return { statistic: 0, df: own.length };
   const rows = designRows(
     [columns[0]!, ...own.map((column) => columns[column]!)],
     sample,
-    [residuals.map((e) => e * e)],
+    [residuals.map((e) => (e / largest) ** 2)],
     null,
   );
   const factor = rows.rowCount * rows.width ** 2 <= EXTENDED_BUDGET ? factorExtended(rows) : factorRows(rows);
