@@ -99,6 +99,9 @@ function says(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
   ];
 }
 
+/** Sentences of one term that a terminal shows. */
+const MOST_OF_A_TERM = 4;
+
 /** A category's levels and an interaction's places each have a sentence; of the rest the first says most. */
 function termInBrief(
   lexicon: Lexicon,
@@ -107,7 +110,11 @@ function termInBrief(
   candidate: RecordCandidate,
 ): string {
   const sentences = termSentences(lexicon, term, model, candidate.coefficients);
-  return sentences.slice(0, term.kind === 'category' || term.kind === 'interaction' ? 4 : 1).join(' ');
+  if (term.kind !== 'category' && term.kind !== 'interaction') return sentences[0] ?? '';
+  const more = sentences.length - MOST_OF_A_TERM;
+  const rest =
+    more > 0 ? [`${counted(more, 'more of these is', 'more of these are', count)} in the report.`] : [];
+  return [...sentences.slice(0, MOST_OF_A_TERM), ...rest].join(' ');
 }
 
 function chosenCandidate(record: StudyRecord): RecordCandidate | undefined {

@@ -50,6 +50,7 @@ export function describeModel(chosen: Chosen, rows: DesignRows, smearing: Float6
     largest_leverage: chosen.leverages.reduce((most, h) => Math.max(most, h), 0),
     terms: fit.candidate.terms.map((term): RecordTerm => {
       const vif = generalisedVif(fit, term);
+      const { slopes, omitted } = slopesOf(chosen, term, reference);
       return {
         name: term.name,
         kind: kindOf(chosen, term),
@@ -62,7 +63,8 @@ export function describeModel(chosen: Chosen, rows: DesignRows, smearing: Float6
         generalised_vif_per_column: vif?.perColumn ?? null,
         typical_steps: typicalSteps(chosen, term, reference),
         curve: curveOf(chosen, term, reference),
-        slopes: slopesOf(chosen, term, reference),
+        slopes,
+        slopes_omitted: omitted,
       };
     }),
   };

@@ -925,6 +925,10 @@ export interface RecordTerm {
      */
     upper: number | null;
   }[];
+  /**
+   * How many further slopes there are where an interaction has more than forty; else 0.
+   */
+  slopes_omitted: number;
 }
 /**
  * What was found on examining the chosen model.

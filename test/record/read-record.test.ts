@@ -148,6 +148,7 @@ describe('readRecord', () => {
           typical_steps: [],
           curve: { variable: 'x', x: [1], y: [1, 2], lower: [], upper: [] },
           slopes: [],
+          slopes_omitted: 0,
         }),
       'The curve of term "x" has lists of unequal length.',
     ],

@@ -497,6 +497,7 @@ function termOf(t: Term, f: Fitted, data: SampleData): RecordTerm {
             upper: curve.map((c) => c.upper),
           },
     slopes,
+    slopes_omitted: 0,
   };
 }
 

@@ -144,6 +144,7 @@ function term(patch: Partial<RecordTerm>): RecordTerm {
     typical_steps: [],
     curve: null,
     slopes: [],
+    slopes_omitted: 0,
     ...patch,
   };
 }
@@ -222,10 +223,56 @@ describe('terms in words', () => {
       /^Vessel Tern rather than Skerry goes with 45\.0 L more fuel burned .*where cargo is at its mean of 78 t, the other terms held\.$/,
     );
     expect(plain(termSentences(lexicon, interaction, model, [])[0]!)).toBe(
-      'At vessel Tern, one more tonne of cargo goes with 2.20 L more fuel burned (95 % interval 2.00 to 2.40 L).',
+      'Where vessel is Tern, one more tonne of cargo goes with 2.20 L more fuel burned (95 % interval 2.00 to 2.40 L).',
     );
     // With the interaction in the model the single coefficient is not told as if it held everywhere.
     expect(termSentences(lexicon, term({}), model, [coefficient('cargo', 1.9)])).toEqual([]);
+  });
+  it('gathers many slopes into their extremes, says what moves, and how many were not worked out', () => {
+    const slopes = ['Skerry', 'Holm', 'Sund'].flatMap((place) =>
+      ['Tern', 'Auk', 'Gull'].map((to, k) => ({
+        at: `port ${place}`,
+        of: `vessel ${to} rather than Skerry`,
+        per: null,
+        estimate: k - place.length / 10,
+        lower: -4,
+        upper: 4,
+      })),
+    );
+    const interaction = term({
+      name: 'vessel × port',
+      kind: 'interaction',
+      variables: ['vessel', 'port'],
+      slopes,
+      slopes_omitted: 14,
+    });
+    expect(termSentences(lexicon, interaction, modelOf([interaction]), []).map(plain)).toEqual([
+      'The 9 differences from Skerry lie between 0.6 L less (Tern at port Skerry) and 1.6 L more (Gull at port Sund), the other terms held. A further 14 are not worked out.',
+    ]);
+  });
+  it('sets the values of a flag that moves in brackets', () => {
+    const variables = new Map(lexicon.variables);
+    const levels = [
+      { level: 'no', rows: 5 },
+      { level: 'yes', rows: 3 },
+    ];
+    variables.set('towed', {
+      ...variables.get('vessel')!,
+      name: 'towed',
+      type: 'flag',
+      label: 'Under tow',
+      levels,
+    });
+    const flagged = { ...lexicon, variables };
+    const interaction = term({
+      name: 'towed × vessel',
+      kind: 'interaction',
+      variables: ['towed', 'vessel'],
+      slopes: [{ at: 'vessel Tern', of: 'towed yes', per: null, estimate: 3, lower: 2, upper: 4 }],
+    });
+    expect(plain(termSentences(flagged, interaction, modelOf([interaction]), [])[0]!)).toMatch(
+      /^Where vessel is Tern, under tow \(yes rather than no\) goes with 3\.00 L more/,
+    );
   });
   it('gathers many levels into their extremes', () => {
     const steps = Array.from({ length: 9 }, (_, i) => ({
@@ -256,7 +303,7 @@ describe('terms in words', () => {
     });
     const own = { ...lexicon, variables };
     expect(plain(termSentences(own, flag, modelOf([flag]), [])[0]!)).toBe(
-      'Night yes rather than no goes with 12.0 L more fuel burned (95 % interval 8.0 to 16.0 L).',
+      'Night (yes rather than no) goes with 12.0 L more fuel burned (95 % interval 8.0 to 16.0 L).',
     );
     const answer = answerSentences(
       { ...record, model: modelOf([flag]), predictions: [], prediction_total: null },

@@ -36,7 +36,8 @@ export interface Slope extends Effect {
 }
 
 const CURVE_POINTS = 61;
-const MOST_SLOPES = 24;
+/** More than these are past reading, and past drawing on one chart. */
+const MOST_SLOPES = 40;
 
 /** Lower to upper quartile of a number; baseline to each other level of a category; 0 to 1 of a flag. */
 export function typicalSteps(chosen: Chosen, term: ModelTerm, reference: Reference): TypicalStep[] {
@@ -117,13 +118,17 @@ export function curveOf(chosen: Chosen, term: ModelTerm, reference: Reference): 
 
 /**
  * The slope (number) or difference (flag, category) of an interaction's first variable at each level, or at
- * the quartiles, of the others; at most two dozen.
+ * the quartiles, of the others; at most forty, and how many more there are.
  */
-export function slopesOf(chosen: Chosen, term: ModelTerm, reference: Reference): Slope[] {
-  if (term.plan.kind !== 'interaction') return [];
+export function slopesOf(
+  chosen: Chosen,
+  term: ModelTerm,
+  reference: Reference,
+): { readonly slopes: Slope[]; readonly omitted: number } {
+  if (term.plan.kind !== 'interaction') return { slopes: [], omitted: 0 };
   const [first, ...others] = termVariables(term.plan);
   const described = first === undefined ? undefined : reference.variables.get(first);
-  if (first === undefined || described === undefined) return [];
+  if (first === undefined || described === undefined) return { slopes: [], omitted: 0 };
   const places = others
     .map((name) => placesOf(name, reference.variables.get(name)!))
     .reduce<{ at: string; changes: Record<string, number | string> }[]>(
@@ -136,9 +141,8 @@ export function slopesOf(chosen: Chosen, term: ModelTerm, reference: Reference):
         ),
       [{ at: '', changes: {} }],
     );
-  const wanted = places
-    .flatMap((place) => movesOf(first, described).map((move) => ({ place, move })))
-    .slice(0, MOST_SLOPES);
+  const all = places.flatMap((place) => movesOf(first, described).map((move) => ({ place, move })));
+  const wanted = all.slice(0, MOST_SLOPES);
   const effects = effectsBetween(
     chosen,
     wanted.map(({ place, move }): [Setting, Setting] => {
@@ -146,7 +150,15 @@ export function slopesOf(chosen: Chosen, term: ModelTerm, reference: Reference):
       return [moved(there, { [first]: move.from }), moved(there, { [first]: move.to })];
     }),
   );
-  return wanted.map(({ place, move }, k) => ({ at: place.at, of: move.of, per: move.per, ...effects[k]! }));
+  return {
+    slopes: wanted.map(({ place, move }, k) => ({
+      at: place.at,
+      of: move.of,
+      per: move.per,
+      ...effects[k]!,
+    })),
+    omitted: all.length - wanted.length,
+  };
 }
 
 function placesOf(

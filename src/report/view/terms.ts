@@ -8,7 +8,17 @@ import type { TermView } from '../view.ts';
 import { effectOf, shortEffect } from '../words/effect.ts';
 import { type Lexicon, labelOf, raised, termLabel, unitOf } from '../words/lexicon.ts';
 import { fittedUnit, scaleKind } from '../words/scale.ts';
-import { partners, partnersHeld, placeText, slopeSubject, stepRange, termSentences } from '../words/term.ts';
+import {
+  baselineMoved,
+  movesSeveral,
+  partners,
+  partnersHeld,
+  placeText,
+  slopeName,
+  slopeSubject,
+  stepRange,
+  termSentences,
+} from '../words/term.ts';
 
 type Points = RecordExamination['points'] | null;
 
@@ -60,12 +70,18 @@ function termChart(
     const sorted = [...term.slopes].sort((a, b) => a.estimate - b.estimate);
     const low = sorted[0]!;
     const high = sorted.at(-1)!;
-    const caption = `${raised(slopeSubject(lexicon, first))} goes with ${shortEffect(lexicon, low)} at ${placeText(lexicon, low.at)}, ${shortEffect(lexicon, high)} at ${placeText(lexicon, high.at)}.`;
+    const several = movesSeveral(term);
+    const subject = several
+      ? `differences from ${baselineMoved(lexicon, first)}`
+      : slopeSubject(lexicon, first);
+    const caption = several
+      ? `${raised(subject)}: from ${shortEffect(lexicon, low)} (${slopeName(lexicon, low, term)}) to ${shortEffect(lexicon, high)} (${slopeName(lexicon, high, term)}).`
+      : `${raised(subject)} goes with ${shortEffect(lexicon, low)} at ${placeText(lexicon, low.at)}, ${shortEffect(lexicon, high)} at ${placeText(lexicon, high.at)}.`;
     return levelsChart(
       lexicon,
       name,
-      `${heading}: ${slopeSubject(lexicon, first)}`,
-      term.slopes.map((s) => ({ name: placeText(lexicon, s.at), difference: s })),
+      `${heading}: ${subject}`,
+      term.slopes.map((s) => ({ name: slopeName(lexicon, s, term), difference: s })),
       caption,
       slopeAxis(lexicon, first),
     );
@@ -103,7 +119,7 @@ function curveCaption(lexicon: Lexicon, term: RecordTerm, model: RecordModel): s
 function termRows(lexicon: Lexicon, term: RecordTerm): TermView['rows'] {
   const rows =
     term.kind === 'interaction'
-      ? term.slopes.map((s) => ({ ...s, name: placeText(lexicon, s.at) }))
+      ? term.slopes.map((s) => ({ ...s, name: slopeName(lexicon, s, term) }))
       : term.kind === 'category'
         ? term.typical_steps.map((s) => ({ ...s, name: s.to }))
         : [];

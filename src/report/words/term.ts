@@ -1,4 +1,4 @@
-import { decimalExponent, isoDate, value, withUnit } from '../numbers.ts';
+import { count, decimalExponent, isoDate, value, withUnit } from '../numbers.ts';
 import type { RecordCoefficient, RecordModel, RecordTerm } from '../record-type.ts';
 import { effectPhrase, openSentence, shortEffect } from './effect.ts';
 import { type Lexicon, labelOf, listed, raised, unitOf, variableNamed } from './lexicon.ts';
@@ -226,7 +226,8 @@ function bendSentence(
 
 function levelSentence(lexicon: Lexicon, term: RecordTerm, step: Step, model: RecordModel): string {
   const label = raised(labelOf(lexicon, term.variables[0] ?? term.name));
-  return `${label} ${step.to} rather than ${step.from} goes with ${effectPhrase(lexicon, step)}${heldPhrase(lexicon, term, model)}.${openSentence(step)}`;
+  const change = `${step.to} rather than ${step.from}`;
+  return `${label} ${term.kind === 'flag' ? `(${change})` : change} goes with ${effectPhrase(lexicon, step)}${heldPhrase(lexicon, term, model)}.${openSentence(step)}`;
 }
 
 function categorySentences(lexicon: Lexicon, term: RecordTerm, model: RecordModel): string[] {
@@ -241,40 +242,95 @@ function categorySentences(lexicon: Lexicon, term: RecordTerm, model: RecordMode
   ];
 }
 
-/** "At vessel Tern, one more tonne of cargo goes with 2.2 L more fuel burned (…)." */
+/** "Where vessel is Tern, one more tonne of cargo goes with 2.2 L more fuel burned (…)." */
 function interactionSentences(lexicon: Lexicon, term: RecordTerm): string[] {
-  if (term.slopes.length > LEVELS_IN_WORDS + 2) {
-    const sorted = [...term.slopes].sort((a, b) => a.estimate - b.estimate);
-    const low = sorted[0]!;
-    const high = sorted.at(-1)!;
-    return [
-      `What ${slopeSubject(lexicon, low)} goes with lies between ${shortEffect(lexicon, low)} (${placeText(lexicon, low.at)}) and ${shortEffect(lexicon, high)} (${placeText(lexicon, high.at)}), the other terms held.`,
-    ];
+  const { slopes } = term;
+  if (slopes.length <= LEVELS_IN_WORDS + 2) {
+    return slopes.map((slope) => {
+      return `Where ${placeClause(lexicon, slope.at)}, ${slopeSubject(lexicon, slope)} goes with ${effectPhrase(lexicon, slope)}.${openSentence(slope)}`;
+    });
   }
-  return term.slopes.map((slope) => {
-    return `At ${placeText(lexicon, slope.at)}, ${slopeSubject(lexicon, slope)} goes with ${effectPhrase(lexicon, slope)}.${openSentence(slope)}`;
-  });
+  const sorted = [...slopes].sort((a, b) => a.estimate - b.estimate);
+  const low = sorted[0]!;
+  const high = sorted.at(-1)!;
+  const omitted = omittedSlopes(term);
+  const [lowName, highName] = [slopeName(lexicon, low, term), slopeName(lexicon, high, term)];
+  const ends = `${shortEffect(lexicon, low)} (${lowName}) and ${shortEffect(lexicon, high)} (${highName}), the other terms held`;
+  return [
+    movesSeveral(term)
+      ? `The ${slopes.length}\u00a0differences from ${baselineMoved(lexicon, low)} lie between ${ends}.${omitted}`
+      : `What ${slopeSubject(lexicon, low)} goes with lies between ${ends}.${omitted}`,
+  ];
 }
 
-/** What moves in a slope: "one more tonne of cargo"; for a level its name as the record gives it. */
+/** That not every slope was worked out, behind a full stop; else an empty string. */
+function omittedSlopes({ slopes_omitted: omitted }: RecordTerm): string {
+  return omitted === 0 ? '' : ` A further ${count(omitted)} ${omitted === 1 ? 'is' : 'are'} not worked out.`;
+}
+
+/** Whether the slopes are differences of more than one level of the interaction's first member. */
+export function movesSeveral({ slopes }: RecordTerm): boolean {
+  return slopes.some((slope) => slope.of !== slopes[0]?.of);
+}
+
+/** The level that a difference between levels starts from. */
+export function baselineMoved(lexicon: Lexicon, slope: Slope): string {
+  const { name } = nameAndRest(lexicon, slope.of);
+  return (name === null ? undefined : lexicon.variables.get(name)?.levels?.[0]?.level) ?? 'the baseline';
+}
+
+/** One slope among those of its term: "vessel Tern"; where the level that moves varies, "Duluth at year 1931". */
+export function slopeName(lexicon: Lexicon, slope: Slope, term: RecordTerm): string {
+  const place = placeText(lexicon, slope.at);
+  if (!movesSeveral(term)) return place;
+  const { rest } = nameAndRest(lexicon, slope.of);
+  const from = ` rather than ${baselineMoved(lexicon, slope)}`;
+  return `${rest.endsWith(from) ? rest.slice(0, -from.length) : rest} at ${place}`;
+}
+
+/** What moves in a slope: "one more tonne of cargo", "vessel Tern rather than Skerry". */
 export function slopeSubject(lexicon: Lexicon, slope: Slope): string {
   const variable = variableNamed(lexicon, slope.of);
-  if (variable === null || variable.type === 'category' || variable.type === 'flag') return slope.of;
-  return oneMore(labelOf(lexicon, variable.name), variable.unit);
+  if (variable !== null) return oneMore(labelOf(lexicon, variable.name), variable.unit);
+  const { name, rest } = nameAndRest(lexicon, slope.of);
+  if (name === null) return rest;
+  const described = variableNamed(lexicon, name);
+  if (described?.type !== 'flag') return `${labelOf(lexicon, name)} ${rest}`;
+  const from = described.levels?.[0]?.level;
+  return `${labelOf(lexicon, name)} (${rest}${from === undefined ? '' : ` rather than ${from}`})`;
 }
 
 /** Where a slope is told, for people: names become labels, numbers are rounded and carry their unit. */
 export function placeText(lexicon: Lexicon, at: string): string {
-  const names = [...lexicon.variables.keys()].sort((a, b) => b.length - a.length);
-  return at
-    .split(', ')
-    .map((part) => {
-      const name = names.find((candidate) => part.startsWith(`${candidate} `));
-      if (name === undefined) return part;
-      const rest = part.slice(name.length + 1);
-      const number = rest.trim() === '' ? Number.NaN : Number(rest);
-      const numeric = variableNamed(lexicon, name)?.levels === null && Number.isFinite(number);
-      return `${labelOf(lexicon, name)} ${numeric ? withUnit(value(number, 3), unitOf(lexicon, name)) : rest}`;
-    })
+  return placeParts(lexicon, at)
+    .map(([name, rest]) => (name === null ? rest : `${name} ${rest}`))
     .join(', ');
+}
+
+/** The same inside a sentence: "vessel is Tern and headwind is 4 m/s". */
+function placeClause(lexicon: Lexicon, at: string): string {
+  return listed(placeParts(lexicon, at).map(([name, rest]) => (name === null ? rest : `${name} is ${rest}`)));
+}
+
+/** Label and value of each member of a place; a null label where the text names no variable. */
+function placeParts(lexicon: Lexicon, at: string): (readonly [string | null, string])[] {
+  return at.split(', ').map((part) => {
+    const { name, rest } = nameAndRest(lexicon, part);
+    if (name === null) return [null, rest];
+    const number = rest.trim() === '' ? Number.NaN : Number(rest);
+    const numeric = variableNamed(lexicon, name)?.levels === null && Number.isFinite(number);
+    return [labelOf(lexicon, name), numeric ? withUnit(value(number, 3), unitOf(lexicon, name)) : rest];
+  });
+}
+
+/** The variable that a text begins with, the longest such name, and what stands behind it. */
+function nameAndRest(
+  lexicon: Lexicon,
+  text: string,
+): { readonly name: string | null; readonly rest: string } {
+  let name: string | null = null;
+  for (const candidate of lexicon.variables.keys()) {
+    if (text.startsWith(`${candidate} `) && candidate.length > (name?.length ?? 0)) name = candidate;
+  }
+  return name === null ? { name, rest: text } : { name, rest: text.slice(name.length + 1) };
 }
