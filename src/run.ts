@@ -32,6 +32,8 @@ export interface CheckedStudy {
   readonly study: Study | null;
   readonly table: Table | null;
   readonly sample: Sample | null;
+  /** False where the study itself kept its data from being looked at. */
+  readonly dataRead: boolean;
   /** Everything found, in the order found. */
   readonly problems: readonly Problem[];
 }
@@ -39,6 +41,8 @@ export interface CheckedStudy {
 export interface RunResult {
   /** Null where an error stopped the run; the problems say which. */
   readonly record: StudyRecord | null;
+  /** False where the study itself kept its data from being looked at. */
+  readonly dataRead: boolean;
   readonly problems: readonly Problem[];
   /** Row figures of the chosen model, for a table; null where none was chosen. */
   readonly residuals: ResidualColumns | null;
@@ -49,13 +53,15 @@ export async function checkStudy(path: string, options: RunOptions = {}): Promis
   const problems: Problem[] = [];
   const report: Report = (problem) => problems.push(problem);
   const study = await readStudy(path, report);
-  if (study === null || hasError(problems)) return { study, table: null, sample: null, problems };
+  if (study === null || hasError(problems)) {
+    return { study, table: null, sample: null, dataRead: false, problems };
+  }
   const table = await readTable(study.data, study.folder, report, {
     onProgress: (rows) => options.onProgress?.('reading rows', rows, null),
   });
-  if (table === null) return { study, table, sample: null, problems };
+  if (table === null) return { study, table, sample: null, dataRead: true, problems };
   const sample = prepareSample(study, table, report);
-  return { study, table, sample, problems };
+  return { study, table, sample, dataRead: true, problems };
 }
 
 /**
@@ -66,10 +72,10 @@ export async function checkStudy(path: string, options: RunOptions = {}): Promis
  * Every candidate is fitted on the same rows; where an error is found the stages after it are left out.
  */
 export async function runStudy(path: string, options: RunOptions = {}): Promise<RunResult> {
-  const { study, table, sample, problems: found } = await checkStudy(path, options);
+  const { study, table, sample, dataRead, problems: found } = await checkStudy(path, options);
   const problems = [...found];
   const report: Report = (problem) => problems.push(problem);
-  const stopped: () => RunResult = () => ({ record: null, problems, residuals: null });
+  const stopped: () => RunResult = () => ({ record: null, dataRead, problems, residuals: null });
   if (study === null || table === null || sample === null || hasError(problems)) return stopped();
 
   const design = buildDesign(study, sample, report);
@@ -110,7 +116,7 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     predicted,
     problems,
   });
-  return { record, problems, residuals: chosen === null ? null : residualColumns(chosen) };
+  return { record, dataRead, problems, residuals: chosen === null ? null : residualColumns(chosen) };
 }
 
 function rowsOf(study: Study, sample: Sample, design: Design, own: Float64Array): DesignRows {

@@ -4,7 +4,7 @@ import { contractSummary } from './contract-summary.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
 import { progressOn } from './progress.ts';
-import { showProblems } from './show-problems.ts';
+import { showDataNotRead, showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
 
@@ -22,6 +22,9 @@ export async function checkCommand(
     progress.clear();
   }
   await showProblems(checked.problems, await sourceTexts(checked.problems), options.problems, terminal);
-  if (options.quiet !== true && options.problems === 'text') terminal.out(contractSummary(checked, terminal));
+  if (options.quiet !== true && options.problems === 'text') {
+    if (!checked.dataRead) showDataNotRead(checked.problems, terminal);
+    terminal.out(contractSummary(checked, terminal));
+  }
   return hasError(checked.problems) ? UNUSABLE : DONE;
 }

@@ -11,7 +11,7 @@ import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
 import { progressOn } from './progress.ts';
 import { reportFiles, templatesOf } from './report-files.ts';
-import { showProblems } from './show-problems.ts';
+import { showDataNotRead, showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import { summary } from './summary.ts';
 import type { Terminal } from './terminal.ts';
@@ -24,11 +24,13 @@ export async function fitCommand(
 ): Promise<number> {
   const progress = progressOn(terminal, options.quiet === true);
   const problems: Problem[] = [];
+  let dataRead = false;
   let templates: ReadonlyMap<string, string> = new Map();
   let written: { readonly record: StudyRecord; readonly out: string; readonly names: string[] } | null = null;
   try {
     const result = await runStudy(path, { onProgress: progress.show });
     problems.push(...result.problems);
+    dataRead = result.dataRead;
     if (result.record !== null && !hasError(problems)) {
       const out = options.out ?? defaultFolder(path);
       templates = templatePlaces(result.record, dirname(path));
@@ -46,6 +48,7 @@ export async function fitCommand(
   }
 
   await showProblems(problems, await sourceTexts(problems, templates), options.problems, terminal);
+  if (!dataRead && options.quiet !== true && options.problems === 'text') showDataNotRead(problems, terminal);
   if (written === null) return UNUSABLE;
   if (options.quiet !== true && options.problems === 'text') {
     terminal.out(summary(written.record, places(written.out, written.names), terminal));

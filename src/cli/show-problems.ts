@@ -25,6 +25,12 @@ export async function showProblems(
   }
 }
 
+/** Says, below errors in a study, that its data has not been looked at yet: there may be more to come. */
+export function showDataNotRead(problems: readonly Problem[], terminal: Terminal): void {
+  const inStudy = problems.some(({ severity, place }) => severity === 'error' && place.kind === 'source');
+  if (inStudy) terminal.err('The data has not been read yet: that comes once the study has no error.\n');
+}
+
 function withLineEnd(text: string): string {
   return text.endsWith('\n') ? text : `${text}\n`;
 }

@@ -1,12 +1,13 @@
 import type { RecordCandidate, RecordModel, RecordTerm, StudyRecord } from '../record/record.ts';
 import { count, fixed, percent, rangeWithUnit, rounded, withUnit } from '../report/numbers.ts';
-import { acceptanceSentence } from '../report/words/acceptance.ts';
+import { acceptanceSentence, missedSentences } from '../report/words/acceptance.ts';
 import { answerSentences, fitSentence } from '../report/words/answer.ts';
 import { bewareLines } from '../report/words/beware.ts';
 import { contractSentence, dateRange, lossReason, rowsSentence } from '../report/words/data.ts';
 import { concernWord } from '../report/words/finding.ts';
 import { counted, type Lexicon, lexiconOf } from '../report/words/lexicon.ts';
 import { predictionRounding, totalSentence } from '../report/words/prediction.ts';
+import { fittedUnit } from '../report/words/scale.ts';
 import { criterionName, criterionRounding, ruleSentences } from '../report/words/selection.ts';
 import { termSentences } from '../report/words/term.ts';
 import { type Paragraph, plumbLine, type Section } from './plumb-line.ts';
@@ -26,7 +27,7 @@ export function summary(record: StudyRecord, places: readonly string[], terminal
     { label: 'trust', paragraphs: trust(record) },
     { label: 'predicts', paragraphs: predicts(record, lexicon) },
     { label: 'careful', paragraphs: bewareLines(record, lexicon).map((text) => ({ mark: '·', text })) },
-    { label: 'accepted', paragraphs: present(acceptanceSentence(record.acceptance)) },
+    { label: 'accepted', paragraphs: accepted(record, lexicon) },
     { label: 'written', paragraphs: places.map((line) => ({ line })) },
   ];
   return plumbLine(
@@ -80,7 +81,20 @@ function tried(record: StudyRecord): Paragraph[] {
     },
     ...(more > 0 ? [`${count(more)} more are in tables/candidates.csv.`] : []),
     selection.because,
+    ...refusals(record),
   ];
+}
+
+/** Each refused candidate of the table with its first reason, those apart that the choice itself has told. */
+function refusals({ selection, candidates }: StudyRecord): Paragraph[] {
+  return selection.ranking.slice(0, MOST).flatMap(({ candidate: name }) => {
+    const reasons = candidates.find((candidate) => candidate.name === name)?.refused_because ?? [];
+    const [first] = reasons;
+    if (first === undefined || selection.because.includes(first)) return [];
+    const more = reasons.length - 1;
+    const further = more === 0 ? '' : ` (and ${counted(more, 'more reason', 'more reasons', count)})`;
+    return [{ mark: '·', text: `${name} was refused. ${first}${further}` }];
+  });
 }
 
 function says(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
@@ -142,6 +156,13 @@ function trust(record: StudyRecord): Paragraph[] {
     found.length === 0
       ? `${counted(quiet, 'question was', 'questions were')} put to it, with nothing to see.`
       : `${counted(quiet, 'more question was', 'more questions were')} put to it, with nothing to see.`,
+  ];
+}
+
+function accepted({ acceptance }: StudyRecord, { response }: Lexicon): Paragraph[] {
+  return [
+    ...present(acceptanceSentence(acceptance)),
+    ...missedSentences(acceptance, fittedUnit(response)).map((text) => ({ mark: '·', text })),
   ];
 }
 

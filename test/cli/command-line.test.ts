@@ -135,6 +135,7 @@ describe('check', () => {
     expect(err).toContain(`${path}:15:16 `);
     expect(err).toContain('selektion');
     expect(err).toContain('Did you mean selection?');
+    expect(err).toMatch(/\nThe data has not been read yet: that comes once the study has no error\.\n$/);
     const json = await plumbrule('check', path, '--problems', 'json');
     expect(json.status).toBe(2);
     expect(JSON.parse(json.out).errors).toBeGreaterThan(0);
@@ -202,7 +203,8 @@ describe('fit', () => {
     );
     const { status, out } = await plumbrule('fit', path, '--out', folderOut);
     expect(status).toBe(1);
-    expect(out).toMatch(/accepted │ .*missed/);
+    expect(out).toMatch(/accepted │ The acceptance criterion is missed: residual standard error\./);
+    expect(out).toMatch(/│ · Residual standard error is 0\.0\d+.L; the study asks for at most 0\.001\./);
     expect(await readdir(folderOut)).toContain('record.json');
   });
 
@@ -211,9 +213,28 @@ describe('fit', () => {
     const { status, out, err } = await plumbrule('fit', path, '--out', folderOut);
     expect(status, err).toBe(1);
     expect(out).toContain('refused');
+    // Told once, where the choice says that none was admitted.
+    expect(out.match(/Straight: The coefficient/g)).toHaveLength(1);
     const record = JSON.parse(await readFile(join(folderOut, 'record.json'), 'utf8'));
     expect(record).toMatchObject({ model: null, examination: null, selection: { chosen: null } });
     expect(await readdir(join(folderOut, 'tables'))).not.toContain('residuals.csv');
+  });
+
+  test('a refused candidate below the winner has its reason too', async () => {
+    const { path, out: folderOut } = await study('selection: { admit: { p_value: { at_most: 0.05 } } }\n');
+    const { out } = await plumbrule('fit', path, '--out', folderOut);
+    expect(out).toMatch(/2 {2}Both .* refused\n/);
+    expect(out).toMatch(/│ · Both was refused\. The p-value of z is 0\.\d+, above 0\.05\./);
+  });
+
+  test('data that is missing is no fault of the study', async () => {
+    const { path, home } = await study();
+    await rm(join(home, 'small.csv'));
+    const { status, err } = await plumbrule('fit', path);
+    expect(status).toBe(2);
+    expect(err).toContain('small.csv');
+    expect(err).not.toContain('not been read yet');
+    expect((await plumbrule('fit', join(home, 'none.yaml'))).err).not.toContain('not been read yet');
   });
 
   test('status 2 leaves earlier results untouched', async () => {

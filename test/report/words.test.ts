@@ -5,7 +5,7 @@ import type {
   RecordTerm,
   StudyRecord,
 } from '../../src/report/record-type.ts';
-import { acceptanceSentence, acceptanceValue } from '../../src/report/words/acceptance.ts';
+import { acceptanceSentence, acceptanceValue, missedSentences } from '../../src/report/words/acceptance.ts';
 import { answerSentences, fitSentence, largestRungs } from '../../src/report/words/answer.ts';
 import { bewareLines } from '../../src/report/words/beware.ts';
 import { cautions } from '../../src/report/words/caution.ts';
@@ -450,14 +450,28 @@ describe('the first screen', () => {
     expect(acceptanceSentence([])).toBeNull();
     expect(acceptanceSentence([met])).toBe('The acceptance criterion is met.');
     expect(acceptanceSentence([met, met])).toBe('All 2 acceptance criteria are met.');
-    expect(plain(acceptanceSentence([met, { ...met, passed: false }])!)).toBe(
-      '1 of 2 acceptance criteria is missed.',
+    const missed = { ...met, passed: false };
+    expect(acceptanceSentence([missed])).toBe('The acceptance criterion is missed: adjusted R².');
+    expect(acceptanceSentence([missed, { ...missed, criterion: 'rows_used' }])).toBe(
+      'All 2 acceptance criteria are missed: adjusted R² and number of rows used.',
+    );
+    expect(missedSentences([met, missed, { ...missed, criterion: 'chosen', value: null }], null)).toEqual([
+      `Adjusted R² is 0.823; the study asks for ${met.limit}.`,
+      `Candidate chosen is none; the study asks for ${met.limit}.`,
+    ]);
+    expect(plain(acceptanceSentence([met, missed])!)).toBe(
+      '1 of 2 acceptance criteria is missed: adjusted R².',
     );
     expect(acceptanceValue(met, 'L')).toBe('0.823');
     expect(plain(acceptanceValue({ ...met, criterion: 'residual_standard_error', value: 44.5 }, 'L'))).toBe(
       '44.5 L',
     );
     expect(acceptanceValue({ ...met, value: null }, null)).toBe('–');
+    // A figure is never rounded onto the limit that it misses.
+    expect(acceptanceValue({ ...met, value: 0.74998, passed: false }, null)).toBe('0.74998');
+    expect(
+      acceptanceValue({ criterion: 'largest_vif', limit: 'at most 5', value: 5.00003, passed: false }, null),
+    ).toBe('5.00003');
   });
   it('gives study, data and dates in one line', () => {
     expect(plain(studyLine(record))).toBe(

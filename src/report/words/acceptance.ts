@@ -1,6 +1,6 @@
-import { NONE, share, value, withUnit } from '../numbers.ts';
+import { fixed, NONE, value, withUnit } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
-import { counted } from './lexicon.ts';
+import { counted, listed, lowered } from './lexicon.ts';
 
 type Criterion = StudyRecord['acceptance'][number];
 
@@ -11,7 +11,7 @@ const NAMES: Readonly<Record<string, string>> = {
   residual_standard_error: 'Residual standard error',
   largest_vif: 'Largest variance inflation factor',
   condition_number: 'Condition number',
-  rows_used: 'Rows used',
+  rows_used: 'Number of rows used',
   chosen: 'Candidate chosen',
 };
 
@@ -19,21 +19,45 @@ export function criterionLabel(criterion: string): string {
   return Object.hasOwn(NAMES, criterion) ? NAMES[criterion]! : criterion;
 }
 
-export function acceptanceValue({ criterion, value: figure }: Criterion, unit: string | null): string {
+/** The figure that was held against the limit, with as many digits as it takes to tell the two apart. */
+export function acceptanceValue({ criterion, limit, value: figure }: Criterion, unit: string | null): string {
   if (figure === null) return NONE;
   if (typeof figure === 'string') return figure;
-  if (criterion.endsWith('r_squared')) return share(figure);
-  return withUnit(value(figure), criterion === 'residual_standard_error' ? unit : null);
+  const limits = limit.split(' ').map(Number);
+  const apart = (rounded: number): boolean => rounded === figure || !limits.includes(rounded);
+  if (criterion.endsWith('r_squared')) {
+    let decimals = 3;
+    while (decimals < 17 && !apart(Number(figure.toFixed(decimals)))) decimals++;
+    return fixed(figure, decimals);
+  }
+  let digits = 4;
+  while (digits < 17 && !apart(Number(figure.toPrecision(digits)))) digits++;
+  return withUnit(value(figure, digits), criterion === 'residual_standard_error' ? unit : null);
 }
 
-/** "Both acceptance criteria are met." and the like; null where the study declares none. */
+/** "2 of 5 acceptance criteria are missed: adjusted R² and rows used." Null where the study declares none. */
 export function acceptanceSentence(acceptance: readonly Criterion[]): string | null {
   const all = acceptance.length;
   if (all === 0) return null;
-  const missed = acceptance.filter((c) => !c.passed).length;
-  if (missed === 0)
+  const missed = acceptance.filter((c) => !c.passed);
+  if (missed.length === 0)
     return all === 1 ? 'The acceptance criterion is met.' : `All ${all} acceptance criteria are met.`;
-  if (missed === all)
-    return all === 1 ? 'The acceptance criterion is missed.' : `All ${all} acceptance criteria are missed.`;
-  return `${missed} of ${counted(all, 'acceptance criterion', 'acceptance criteria')} ${missed === 1 ? 'is' : 'are'} missed.`;
+  const which = listed(missed.map((c) => lowered(criterionLabel(c.criterion))));
+  if (missed.length === all && all > 1) return `All ${all} acceptance criteria are missed: ${which}.`;
+  const what =
+    all === 1
+      ? 'The acceptance criterion is'
+      : `${missed.length} of ${counted(all, 'acceptance criterion', 'acceptance criteria')} ${missed.length === 1 ? 'is' : 'are'}`;
+  return `${what} missed: ${which}.`;
+}
+
+/** What was missed by how much, one sentence each: "R² is 0.754; the study asks for at least 0.99." */
+export function missedSentences(acceptance: readonly Criterion[], unit: string | null): string[] {
+  return acceptance
+    .filter((c) => !c.passed)
+    .map((c) => {
+      const undefinedAs = c.criterion === 'chosen' ? 'none' : 'not defined';
+      const is = c.value === null ? undefinedAs : acceptanceValue(c, unit);
+      return `${criterionLabel(c.criterion)} is ${is}; the study asks for ${c.limit}.`;
+    });
 }

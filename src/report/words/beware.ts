@@ -1,6 +1,6 @@
 import { count, percent } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
-import { acceptanceValue, criterionLabel } from './acceptance.ts';
+import { missedSentences } from './acceptance.ts';
 import { type Lexicon, listed, raised, stopped } from './lexicon.ts';
 import { fittedUnit } from './scale.ts';
 
@@ -15,7 +15,7 @@ const MOST = 5;
 export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
   const findings = record.examination?.findings ?? [];
   const lines = [
-    ...missedLines(record, fittedUnit(lexicon.response)),
+    ...missedSentences(record.acceptance, fittedUnit(lexicon.response)),
     ...findings.filter((f) => f.concern === 2).map((f) => findingLine(f)),
     ...outsideLine(record),
     ...record.warnings.map((w) => raised(stopped(w.text))),
@@ -33,14 +33,6 @@ export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
   const hidden = unique.length - Math.min(unique.length, MOST);
   if (hidden > 0) shown[MOST - 1] = `${shown[MOST - 1]} (${hidden} more under “What to be careful about”.)`;
   return shown;
-}
-
-function missedLines(record: StudyRecord, unit: string | null): string[] {
-  return record.acceptance
-    .filter((c) => !c.passed)
-    .map(
-      (c) => `${criterionLabel(c.criterion)} is ${acceptanceValue(c, unit)}; the study asks for ${c.limit}.`,
-    );
 }
 
 function findingLine(finding: { readonly verdict: string; readonly advice: string | null }): string {
