@@ -88,12 +88,18 @@ export const PROBLEM_CODES = [
   'columns_dependent',
   'columns_nearly_dependent',
   'response_constant',
+  'fit_exact',
   'scale_undefined',
   'rows_too_few',
   'value_not_finite',
+  'clusters_too_few',
+  'lags_too_many',
+  'standard_errors_costly',
   // select/
   'sign_name_unknown',
   'criterion_undefined',
+  // examine/
+  'hypothesis_name_unknown',
   // predict/
   'prediction_value_missing',
   'prediction_level_unknown',

@@ -27,6 +27,8 @@ export function checkFits(
     return;
   }
   reportTooFewRows(study, fits, report);
+  reportNothingLeft(study, fits, report);
+  reportExactFits(study, fits, report);
   reportDependencies(study, design, fits, report);
 }
 
@@ -58,6 +60,45 @@ function isCrowded(fit: Fit): boolean {
   return fit.candidate.columns.length >= fit.rowCount;
 }
 
+/** Without an intercept, terms that are 0 in every row leave no column at all. */
+function reportNothingLeft(study: Study, fits: readonly Fit[], report: Report): void {
+  fits.forEach(({ candidate, columns, rowCount }, index) => {
+    if (columns.length > 0) return;
+    report({
+      code: 'predictor_constant',
+      severity: 'error',
+      place: study.placeOf(['candidates', index]),
+      message: `${candidate.name} has no intercept, and its terms are 0 in all ${rowCount} rows used, so there is nothing to fit.`,
+      hint: 'Take the candidate out.',
+    });
+  });
+}
+
+function reportExactFits(study: Study, fits: readonly Fit[], report: Report): void {
+  const exact = fits.flatMap((fit, index) =>
+    fit.exact && !isCrowded(fit) && fit.columns.length > 0 ? [index] : [],
+  );
+  const [first] = exact;
+  if (first === undefined) return;
+  const response = study.response.variable;
+  report({
+    code: 'fit_exact',
+    severity: 'warning',
+    place: study.placeOf(['candidates', first]),
+    message: `But for rounding, ${response} is fitted exactly in all ${fits[first]!.rowCount} rows used by ${namesOf(exact, fits)}: nothing can be tested there, and there are no intervals.`,
+    hint: `Is ${response} worked out from these terms? Measurements hardly ever fit so.`,
+  });
+}
+
+/** The first three, and how many more. */
+function namesOf(indexes: readonly number[], fits: readonly Fit[]): string {
+  const names = indexes
+    .slice(0, 3)
+    .map((index) => fits[index]!.candidate.name)
+    .join(', ');
+  return indexes.length > 3 ? `${names} and ${indexes.length - 3} more` : names;
+}
+
 function reportDependencies(study: Study, design: Design, fits: readonly Fit[], report: Report): void {
   const told = new Map<string, { dependent: DependentColumn; near: boolean; candidates: number[] }>();
   fits.forEach((fit, index) => {
@@ -74,17 +115,13 @@ function reportDependencies(study: Study, design: Design, fits: readonly Fit[], 
     const [first] = candidates;
     const term = fits[first!]!.candidate.terms.findIndex((one) => one.columns.includes(dependent.column));
     const place = study.placeOf(['candidates', first!, 'terms', Math.max(0, term)]);
-    const names = candidates
-      .slice(0, 3)
-      .map((index) => fits[index]!.candidate.name)
-      .join(', ');
-    const more = candidates.length > 3 ? ` and ${candidates.length - 3} more` : '';
+    const names = namesOf(candidates, fits);
     if (near) {
       report({
         code: 'columns_nearly_dependent',
         severity: 'warning',
         place,
-        message: `${dependent.sentence}: their coefficients can hardly be told apart in ${names}${more}.`,
+        message: `${dependent.sentence}: their coefficients can hardly be told apart in ${names}.`,
       });
       continue;
     }
@@ -94,7 +131,7 @@ function reportDependencies(study: Study, design: Design, fits: readonly Fit[], 
       code: constant ? 'predictor_constant' : 'columns_dependent',
       severity: stop ? 'error' : 'warning',
       place,
-      message: `${dependent.sentence}${stop ? '' : `, so ${design.columns[dependent.column]!.name} is left out of ${names}${more}`}.`,
+      message: `${dependent.sentence}${stop ? '' : `, so ${design.columns[dependent.column]!.name} is left out of ${names}`}.`,
       hint: stop
         ? 'Take it out, or let the fit go on without it by inference.dependent_columns: drop.'
         : 'Take it out of the candidate: it can say nothing of its own in these rows.',

@@ -344,13 +344,13 @@ export interface StudyRecord {
      */
     estimate: number;
     /**
-     * Lower end of its interval.
+     * Lower end of its interval; null where the model fits exactly.
      */
-    lower: number;
+    lower: number | null;
     /**
-     * Upper end of its interval.
+     * Upper end of its interval; null likewise.
      */
-    upper: number;
+    upper: number | null;
     /**
      * The total of their means where the scale is not natural, else null.
      */
@@ -1136,21 +1136,21 @@ export interface RecordPrediction {
    */
   estimate: number;
   /**
-   * Lower end of the interval for a new row at the study's prediction confidence.
+   * Lower end of the interval for a new row at the study's prediction confidence; null where the model fits exactly.
    */
-  lower: number;
+  lower: number | null;
   /**
-   * Upper end of the interval for a new row.
+   * Upper end of the interval for a new row; null where the model fits exactly, or where it has no end.
    */
-  upper: number;
+  upper: number | null;
   /**
-   * Lower end of the interval for the mean (the median on another scale).
+   * Lower end of the interval for the mean (the median on another scale); null as for a new row.
    */
-  mean_lower: number;
+  mean_lower: number | null;
   /**
-   * Upper end of the interval for the mean (the median on another scale).
+   * Upper end of the interval for the mean (the median on another scale); null as for a new row.
    */
-  mean_upper: number;
+  mean_upper: number | null;
   /**
    * The mean on the own scale by smearing (Duan 1983) where the scale is not natural, else null.
    */

@@ -102,8 +102,12 @@ export function rounded(x: number | null | undefined, rounding: Rounding): strin
   return `${mantissa(x, rounding)}${behind(rounding)}`;
 }
 
-/** "1.6 to 2.2"; the power of ten, where there is one, is written once: "(1.6 to 2.2) × 10⁻⁷". */
+/**
+ * "1.6 to 2.2"; the power of ten, where there is one, is written once: "(1.6 to 2.2) × 10⁻⁷". Without an upper end
+ * "1.6 or more".
+ */
 export function range(lower: number | null, upper: number | null, rounding: Rounding): string {
+  if (lower !== null && upper === null) return `${rounded(lower, rounding)} or more`;
   if (lower === null || upper === null || Number.isNaN(lower) || Number.isNaN(upper)) return NONE;
   const inner = `${mantissa(lower, rounding)} to ${mantissa(upper, rounding)}`;
   return rounding.exponent === 0 ? inner : `(${inner})${behind(rounding)}`;
@@ -178,6 +182,7 @@ export function rangeWithUnit(
   rounding: Rounding,
   unit: string | null | undefined,
 ): string {
+  if (lower !== null && upper === null) return `${withUnit(rounded(lower, rounding), unit)} or more`;
   if (unit && /^[$£€¥]$/.test(unit) && lower !== null && upper !== null) {
     return `${withUnit(rounded(lower, rounding), unit)} to ${withUnit(rounded(upper, rounding), unit)}`;
   }

@@ -45,16 +45,16 @@ describe('predictions', () => {
       const h = 1 / 12 + (at - mean) ** 2 / sxx;
       const one = predictions[k]!;
       expect(one.leverage).toBeCloseTo(h, 12);
-      expect(one.upper - one.lower).toBeCloseTo(2 * t * s * Math.sqrt(1 + h), 10);
-      expect(one.mean_upper - one.mean_lower).toBeCloseTo(2 * t * s * Math.sqrt(h), 10);
+      expect(one.upper! - one.lower!).toBeCloseTo(2 * t * s * Math.sqrt(1 + h), 10);
+      expect(one.mean_upper! - one.mean_lower!).toBeCloseTo(2 * t * s * Math.sqrt(h), 10);
     }
   });
 
   test('an interval for a new row is wider than the mean’s, and both are narrowest at the centre (common practice, no source)', async () => {
     const places = [1, 3, 5, 6.5, 8, 10, 12];
     const { predictions } = await predictionsAt(places);
-    const widths = predictions.map((one) => one.upper - one.lower);
-    const means = predictions.map((one) => one.mean_upper - one.mean_lower);
+    const widths = predictions.map((one) => one.upper! - one.lower!);
+    const means = predictions.map((one) => one.mean_upper! - one.mean_lower!);
     places.forEach((_, k) => {
       expect(widths[k]!).toBeGreaterThan(means[k]!);
     });
@@ -74,7 +74,7 @@ describe('predictions', () => {
     const sxx = x.reduce((sum, v) => sum + (v - mean) ** 2, 0);
     let variance = 3;
     for (const a of places) for (const b of places) variance += 1 / 12 + ((a - mean) * (b - mean)) / sxx;
-    expect(total!.upper - total!.lower).toBeCloseTo(
+    expect(total!.upper! - total!.lower!).toBeCloseTo(
       2 * tTwoSidedQuantile(0.1, 10) * s * Math.sqrt(variance),
       10,
     );
@@ -95,7 +95,7 @@ describe('predictions', () => {
     const [b0, b1] = model!.columns.map((column) => column.estimate);
     const centre = b0! + 4 * b1!;
     expect(one.estimate).toBeCloseTo(Math.exp(centre), 10);
-    expect(Math.sqrt(one.lower * one.upper)).toBeCloseTo(one.estimate, 10);
+    expect(Math.sqrt(one.lower! * one.upper!)).toBeCloseTo(one.estimate, 10);
     const residuals = x.map((v, i) => Math.log(y[i]!) - b0! - b1! * v);
     const smeared = residuals.reduce((sum, e) => sum + Math.exp(centre + e), 0) / 12;
     expect(one.mean).toBeCloseTo(smeared, 10);

@@ -9,9 +9,7 @@ const ROWS = 24;
 
 /** Each prediction with the interval for the mean (thick) and for a new row (thin); null for none. */
 export function predictionsChart(lexicon: Lexicon, predictions: readonly RecordPrediction[]): Figure | null {
-  const rows = predictions
-    .filter((p) => [p.estimate, p.lower, p.upper].every(Number.isFinite))
-    .slice(0, ROWS);
+  const rows = predictions.filter((p) => Math.abs(p.estimate) < 1e300).slice(0, ROWS);
   if (rows.length === 0) return null;
   const plot = { left: 14, right: WIDTH - 14, top: 8, bottom: 16 + rows.length * ROW };
   const height = plot.bottom + 44;
@@ -20,14 +18,21 @@ export function predictionsChart(lexicon: Lexicon, predictions: readonly RecordP
     .map((p, i) => {
       const top = plot.top + i * ROW;
       const y = top + 27;
-      const mean =
-        Number.isFinite(p.mean_lower) && Number.isFinite(p.mean_upper)
-          ? element('line', { class: 'rung thick', x1: x(p.mean_lower), x2: x(p.mean_upper), y1: y, y2: y })
-          : '';
+      // An interval without an upper end goes on to the edge.
+      const rung = (form: string, lower: number | null, upper: number | null) =>
+        lower === null
+          ? ''
+          : element('line', {
+              class: form,
+              x1: x(lower),
+              x2: upper === null ? plot.right : x(upper),
+              y1: y,
+              y2: y,
+            });
       return (
         label(plot.left, top + 14, clipped(p.label, 60), 'name') +
-        element('line', { class: 'rung', x1: x(p.lower), x2: x(p.upper), y1: y, y2: y }) +
-        mean +
+        rung('rung', p.lower, p.upper) +
+        rung('rung thick', p.mean_lower, p.mean_upper) +
         element('circle', {
           class: p.outside.length > 0 ? 'mark refused' : 'mark chosen',
           cx: x(p.estimate),

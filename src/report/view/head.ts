@@ -40,8 +40,8 @@ function furtherRows(more: number): string | null {
 function headPredictions(record: StudyRecord, { response }: Lexicon): HeadPrediction[] {
   const said = (p: {
     estimate: number;
-    lower: number;
-    upper: number;
+    lower: number | null;
+    upper: number | null;
   }): { estimate: string; interval: string } => {
     const rounding = predictionRounding(p);
     return {

@@ -79,6 +79,9 @@ export function fitSentence(lexicon: Lexicon, candidate: RecordCandidate, candid
 }
 
 function missPhrase(lexicon: Lexicon, candidate: RecordCandidate): string {
+  // A fit without standard errors is exact: what it misses by is rounding.
+  if (candidate.coefficients.every(({ standard_error: error }) => error === null))
+    return '; it fits these rows exactly';
   const miss = typicalMiss(lexicon, candidate.residual_standard_error);
   return miss === null ? '' : `; it typically misses by ${miss}`;
 }

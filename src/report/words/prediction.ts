@@ -5,19 +5,26 @@ import { scaleKind } from './scale.ts';
 
 type Total = NonNullable<StudyRecord['prediction_total']>;
 
+type Interval = Pick<RecordPrediction, 'estimate' | 'lower' | 'upper'>;
+
 /** Rounding for a prediction: the new-row interval spans about three to four of its standard errors. */
-export function predictionRounding(p: Pick<RecordPrediction, 'estimate' | 'lower' | 'upper'>): Rounding {
-  return roundingFor(p.estimate, (p.upper - p.lower) / 4);
+export function predictionRounding(p: Interval): Rounding {
+  const half = p.lower === null ? null : (p.upper ?? 2 * p.estimate - p.lower) - p.lower;
+  return roundingFor(p.estimate, half === null ? null : half / 4);
 }
 
-/** "519 L (90 % interval 475 to 563 L)". */
-export function predictionPhrase(
-  lexicon: Lexicon,
-  p: Pick<RecordPrediction, 'estimate' | 'lower' | 'upper'>,
-): string {
+/** Infinite where the interval has no upper end, 0 where there is none. */
+function widthOf(p: Interval): number {
+  return p.lower === null ? 0 : (p.upper ?? Number.POSITIVE_INFINITY) - p.lower;
+}
+
+/** "519 L (90 % interval 475 to 563 L)"; the estimate alone where the model fits exactly. */
+export function predictionPhrase(lexicon: Lexicon, p: Interval): string {
   const rounding = predictionRounding(p);
   const { unit } = lexicon.response;
-  return `${withUnit(rounded(p.estimate, rounding), unit)} (${percent(lexicon.predictionInterval)} interval ${rangeWithUnit(p.lower, p.upper, rounding, unit)})`;
+  const estimate = withUnit(rounded(p.estimate, rounding), unit);
+  if (p.lower === null) return estimate;
+  return `${estimate} (${percent(lexicon.predictionInterval)} interval ${rangeWithUnit(p.lower, p.upper, rounding, unit)})`;
 }
 
 /** "The 3 rows asked for come to 1 874 L in total (90 % interval 1 795 to 1 953 L)." */
@@ -58,16 +65,23 @@ export function predictionNotes(lexicon: Lexicon): string[] {
 /** How much wider the new-row intervals are than those for the mean: the caption of the predictions' chart. */
 export function intervalCaption(lexicon: Lexicon, predictions: readonly RecordPrediction[]): string {
   const outside = predictions.filter((p) => p.outside.length > 0);
-  const widest = [...predictions].sort((a, b) => b.upper - b.lower - (a.upper - a.lower))[0];
+  const widest = predictions.reduce<RecordPrediction | undefined>(
+    (most, p) => (most === undefined || widthOf(p) > widthOf(most) ? p : most),
+    undefined,
+  );
   if (widest === undefined) return '';
   const rounding = predictionRounding(widest);
   const main =
-    predictions.length === 1
-      ? `A new row is expected between ${range(widest.lower, widest.upper, rounding)}`.replace(
-          ' to ',
-          ' and ',
-        ) + (lexicon.response.unit ? `\u00a0${lexicon.response.unit}` : '')
-      : `The least certain is ${widest.label}: a new row may lie anywhere from ${rangeWithUnit(widest.lower, widest.upper, rounding, lexicon.response.unit)}`;
+    widest.lower === null
+      ? 'The model fits exactly, so there is no interval'
+      : widest.upper === null
+        ? `The least certain is ${widest.label}: the interval for a new row has no upper end`
+        : predictions.length === 1
+          ? `A new row is expected between ${range(widest.lower, widest.upper, rounding)}`.replace(
+              ' to ',
+              ' and ',
+            ) + (lexicon.response.unit ? `\u00a0${lexicon.response.unit}` : '')
+          : `The least certain is ${widest.label}: a new row may lie anywhere from ${rangeWithUnit(widest.lower, widest.upper, rounding, lexicon.response.unit)}`;
   const beyond =
     outside.length === 0
       ? ''
