@@ -54,6 +54,7 @@ export const PROBLEM_CODES = [
   'type_unsuited',
   'derivation_cycle',
   'candidate_twice',
+  'term_without_parts',
   'criterion_across_scales',
   'limit_nonsense',
   'expression_syntax',

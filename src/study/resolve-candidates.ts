@@ -5,6 +5,7 @@ import { resolveScale } from './resolve-scale.ts';
 import { resolveTerm, termKey, termPowers, termVariables } from './resolve-terms.ts';
 import type { CandidatePlan, ResponsePlan, TermPlan } from './study.ts';
 import type { CandidateInFile } from './study-file.generated.ts';
+import { warnOfMissingParts } from './warn-of-missing-parts.ts';
 
 /**
  * The candidates. `response` is null where it could not be resolved; `derivedFrom` gives the declared variables
@@ -26,6 +27,7 @@ export function resolveCandidates(
     for (const [at, term] of terms.entries()) {
       if (term !== null) checkResponse(reading, term, [...path, 'terms', at], response, derivedFrom);
     }
+    if (!terms.includes(null)) warnOfMissingParts(reading, names, terms, [...path, 'terms']);
     const name = written.name;
     if (name === undefined) return;
     const earlier = byName.get(name);

@@ -763,6 +763,53 @@ describe('faults at the edges', () => {
     expect(outcome.study).not.toBeNull();
   });
 
+  it.each([
+    [
+      'a number',
+      '[k, «{ interaction: [x, k] }»]',
+      'the interaction x × k, but x is no term of its own. It is then held to make no difference where k is at its baseline.',
+    ],
+    [
+      'a category',
+      '[x, «{ interaction: [x, k] }»]',
+      'but k is no term of its own. It is then held to make no difference where x is 0, which is one common intercept for all its levels.',
+    ],
+    [
+      'a flag beside a bend',
+      '[x, «{ interaction: [{ bend: x, at: 3 }, f] }»]',
+      'f is no term of its own. It is then held to make no difference where x is at most 3, which is one common intercept',
+    ],
+    [
+      'both',
+      '[«{ interaction: [x, f] }»]',
+      'x and f are no terms of their own. Each is then held to make no difference where the other is 0 or at its baseline.',
+    ],
+    [
+      'a pair',
+      '[x, k, f, { interaction: [x, k] }, { interaction: [k, f] }, «{ interaction: [x, k, f] }»]',
+      'but x × f is no term of its own. It is then held to make no difference where k is at its baseline.',
+    ],
+  ])('warns of an interaction without its parts, and goes on: %s', (_, terms, says) => {
+    const { text, places } = marked(changed(SMALL, '[x]', terms));
+    const outcome = read(text);
+    expect(outcome.places).toEqual(places.map((place) => `${place} term_without_parts`));
+    expect(outcome.problems[0]).toMatchObject({
+      severity: 'warning',
+      message: expect.stringContaining(says),
+      hint: expect.stringContaining('This is allowed; add'),
+    });
+    expect(outcome.study).not.toBeNull();
+  });
+
+  it.each([
+    '[{ polynomial: x, degree: 2 }, k, { interaction: [x, k] }]',
+    '[{ power: x, to: 3 }, k, { interaction: [{ bend: x, at: 3 }, k] }]',
+    '[{ spline: x, knots: [1, 2, 3] }, k, { interaction: [k, x] }]',
+    '[{ bend: x, at: 5 }, { polynomial: x, degree: 3 }]',
+  ])('takes any form of a variable for its part, and asks nothing of curves: %s', (terms) => {
+    expect(read(changed(SMALL, '[x]', terms)).places).toEqual([]);
+  });
+
   it('knows a comma inside braces that cuts a text short', () => {
     const text = changed(SMALL, 'response: y', 'derive:\n  z: { expression: min(x, 2) }\nresponse: y');
     const { problems, places } = read(text);
@@ -827,7 +874,7 @@ describe('faults at the edges', () => {
 
 describe('the codes of the study group', () => {
   it('are each provoked here or in read-study.test.ts', () => {
-    const here = new Set([...CASES.map(({ code }) => code), 'name_unused']);
+    const here = new Set([...CASES.map(({ code }) => code), 'name_unused', 'term_without_parts']);
     const elsewhere = ['study_unreadable', 'study_not_utf8'];
     expect(STUDY_CODES.filter((code) => !here.has(code) && !elsewhere.includes(code))).toEqual([]);
   });
