@@ -57,9 +57,12 @@ export const PROBLEM_CODES = [
   'term_without_parts',
   'criterion_across_scales',
   'limit_nonsense',
+  'rules_contradict',
   'expression_syntax',
   'expression_name',
   'expression_type',
+  'parameter_unknown',
+  'parameter_value',
   // data/
   'data_unreadable',
   'data_changed',
@@ -75,6 +78,7 @@ export const PROBLEM_CODES = [
   'cell_not_flag',
   'cell_out_of_range',
   'cell_level_undeclared',
+  'levels_alike',
   'cell_encoding',
   'row_id_twice',
   'row_id_missing',
@@ -82,6 +86,8 @@ export const PROBLEM_CODES = [
   // prepare/
   'column_all_missing',
   'nothing_left',
+  'hold_out_nothing',
+  'split_too_small',
   'weight_negative',
   // model/ and engine/
   'category_one_level',
@@ -99,6 +105,9 @@ export const PROBLEM_CODES = [
   // select/
   'sign_name_unknown',
   'criterion_undefined',
+  'folds_too_many',
+  'origin_too_late',
+  'fold_unpredictable',
   // examine/
   'hypothesis_name_unknown',
   // predict/
@@ -107,6 +116,9 @@ export const PROBLEM_CODES = [
   'prediction_outside',
   // record/, report/ and cli/
   'record_unreadable',
+  'record_differs',
+  'record_other_version',
+  'study_not_found',
   'template_unreadable',
   'template_broken',
   'output_unwritable',

@@ -10,6 +10,7 @@ import { type ByteSource, brokenOff, isReadingError, openBytes } from './read-by
 import { splitRows } from './split-rows.ts';
 import { summarise } from './summarise.ts';
 import type { Table } from './table.ts';
+import { warnOfLikeLevels } from './warn-of-like-levels.ts';
 import { watchEncoding } from './watch-encoding.ts';
 
 export interface ReadTableOptions {
@@ -135,6 +136,7 @@ async function readRows(
   const sound = faults.settle(report);
   const decodable = encoding.settle(report);
   const based = !whole || filled.filter((one) => !checkBaseline(plan, one, report)).length === 0;
+  if (whole) for (const one of filled) warnOfLikeLevels(plan, one, report);
   if (broken !== null) report(broken);
   const noRows = broken === null && sound && decodable && rowCount === 0;
   if (noRows) report(fileProblem(plan, 'data_no_rows', 'has a header and no rows.'));
