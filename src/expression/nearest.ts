@@ -5,7 +5,9 @@ const LONGEST_COMPARED = 100;
  * The name in `among` that `word` was most likely meant to be, or null where none is near. Nearness is the
  * number of letters to insert, delete, replace or swap with their neighbour, letter case apart; at most a
  * third of the longer word's letters (one for words of three to five) may differ. Of equally near names the
- * one that also agrees in letter case comes first, then the one that stands first in `among`.
+ * one that also agrees in letter case comes first, then the one that stands first in `among`. Where none is
+ * near, the shortest name that begins with the word, if that has three letters or more: "precip" of
+ * "precipitation", also "Beak_Length" of "Beak Length (mm)".
  */
 export function nearest(word: string, among: Iterable<string>): string | null {
   const lower = word.toLowerCase();
@@ -21,7 +23,22 @@ export function nearest(word: string, among: Iterable<string>): string | null {
     bestDistance = distance;
     bestExact = exact;
   }
+  return best ?? beginningWith(word, among);
+}
+
+function beginningWith(word: string, among: Iterable<string>): string | null {
+  const beginning = bare(word);
+  if (beginning.length < 3 || word.length > LONGEST_COMPARED) return null;
+  let best: string | null = null;
+  for (const name of among) {
+    if (bare(name).startsWith(beginning) && (best === null || name.length < best.length)) best = name;
+  }
   return best;
+}
+
+/** Letter case and the marks between words apart. */
+function bare(text: string): string {
+  return text.toLowerCase().replace(/[\s_.-]/g, '');
 }
 
 function allowance(word: string, name: string): number {

@@ -11,7 +11,7 @@ const FORMAT: StudyRecord['format'] = 'plumbrule-record/1';
 
 /**
  * Reads a record from a file, or reports why it cannot be used (`record_unreadable`) and gives null:
- * no such file, not UTF-8, not JSON (with line and column), another format or version, or not as the
+ * no such file, not UTF-8, a study, not JSON (with line and column), another format or version, or not as the
  * schema says (each fault, up to ten).
  */
 export async function readRecord(path: string, report: Report): Promise<StudyRecord | null> {
@@ -45,6 +45,10 @@ export async function readRecord(path: string, report: Report): Promise<StudyRec
   try {
     value = JSON.parse(text);
   } catch {
+    if (/^plumbrule\s*:/m.test(text)) {
+      refuse('This is a study, not a record.', 'plumbrule fit runs it and writes a record, record.json.');
+      return null;
+    }
     const fault = findJsonFault(text);
     const place: Place =
       fault === null

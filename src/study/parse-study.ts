@@ -26,6 +26,10 @@ export function parseStudy(
     if (problem.severity === 'error') errors++;
     report(problem);
   };
+  if (isRecord(text)) {
+    counting(recordGiven(shownFile));
+    return null;
+  }
   // An editor shows no byte-order mark, so columns are counted without it.
   const source = text.startsWith('\ufeff') ? text.slice(1) : text;
   const written = readYaml(source, shownFile, counting);
@@ -46,6 +50,16 @@ export function parseStudy(
   const origin = { file: basename(shownFile), folder, sha256 };
   const study = resolveStudy({ file, written, report: counting }, origin);
   return errors === 0 ? study : null;
+}
+
+/** Whether a text, or its beginning, is that of a record, which `fit` has written from a study. */
+export function isRecord(text: string): boolean {
+  return /^\ufeff?\s*\{\s*"format"\s*:\s*"plumbrule-record\//.test(text);
+}
+
+export function recordGiven(file: string): Problem {
+  const hint = 'plumbrule render writes its reports again; plumbrule fit needs the study file.';
+  return unreadable(file, 'This is a record, not a study.', hint);
 }
 
 export function unreadable(file: string, message: string, hint?: string): Problem {

@@ -1,8 +1,8 @@
 import { createHash } from 'node:crypto';
-import { readFile, stat } from 'node:fs/promises';
+import { open, readFile, stat } from 'node:fs/promises';
 import { dirname, resolve } from 'node:path';
 import type { Report } from '../problem.ts';
-import { parseStudy, unreadable } from './parse-study.ts';
+import { isRecord, parseStudy, recordGiven, unreadable } from './parse-study.ts';
 import type { Study } from './study.ts';
 
 /** No study that a person reviews is larger; a file that is will be something else. */
@@ -29,6 +29,10 @@ async function readBytes(path: string, report: Report): Promise<Uint8Array | nul
       return null;
     }
     if (about.size > MOST_BYTES) {
+      if (isRecord(await beginning(path))) {
+        report(recordGiven(path));
+        return null;
+      }
       const size = (about.size / 1_000_000).toFixed(1);
       report(unreadable(path, `The study file has ${size} MB; the most is 2 MB.`, 'Is this the data file?'));
       return null;
@@ -40,6 +44,17 @@ async function readBytes(path: string, report: Report): Promise<Uint8Array | nul
     else if (code === 'EACCES') report(unreadable(path, 'The study file may not be read.'));
     else report(unreadable(path, `The study file cannot be read (${code ?? String(error)}).`));
     return null;
+  }
+}
+
+/** The first kilobyte of a file, as far as it is text. */
+async function beginning(path: string): Promise<string> {
+  const file = await open(path);
+  try {
+    const { buffer, bytesRead } = await file.read(Buffer.alloc(1024), 0, 1024, 0);
+    return buffer.toString('utf8', 0, bytesRead);
+  } finally {
+    await file.close();
   }
 }
 

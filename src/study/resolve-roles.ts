@@ -24,6 +24,14 @@ export function resolveWeights(reading: Reading, names: Names): string | null {
   return lookUpOfType(reading, names, name, ['weights'], ['number', 'integer'], purpose)?.name ?? null;
 }
 
+/** One column may be declared twice: once for what it measures, once for its texts as identities. */
+function secondVariable(reading: Reading, name: string): string | undefined {
+  const declared = reading.file.data?.variables?.[name];
+  if (declared === undefined) return undefined;
+  const column = JSON.stringify(declared.column ?? name);
+  return `Declare a second variable on the same column and name that: { column: ${column}, type: identifier }.`;
+}
+
 /** Row identity and time order. */
 export function resolveRowRoles(
   reading: Reading,
@@ -34,7 +42,7 @@ export function resolveRowRoles(
     const path = ['data', 'row_id'];
     const purpose = 'rows are identified by an identifier, a text or an integer';
     const suited = ['identifier', 'text', 'integer'] as const;
-    const named = lookUpOfType(reading, names, rowId, path, suited, purpose);
+    const named = lookUpOfType(reading, names, rowId, path, suited, purpose, secondVariable(reading, rowId));
     if (named?.derived === true) {
       fault(
         reading,

@@ -127,7 +127,7 @@ export interface StudyFile {
      */
     admit?: {
       /**
-       * Limit on the variance inflation factor of every coefficient.
+       * Limit on the variance inflation factor of every term. Of a term with several columns the generalised factor to the power 1/columns is held against it, which is comparable; that of one column is its VIF.
        */
       vif?: {
         /**

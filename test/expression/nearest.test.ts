@@ -14,6 +14,12 @@ describe('nearest', () => {
     ['', ['x', 'ab'], null],
     ['teh', ['ten', 'the'], 'ten'],
     ['x', [], null],
+    ['precip', ['date', 'precipitation'], 'precipitation'],
+    ['Temp', ['temperature_inside', 'temp_max', 'temp_min'], 'temp_max'],
+    ['Beak_Length', ['Beak Depth (mm)', 'Beak Length (mm)'], 'Beak Length (mm)'],
+    ['pr', ['precipitation'], null],
+    ['___', ['precipitation'], null],
+    ['rain', ['terrain'], null],
   ])('of %s among %j is %s', (word, among, expected) => {
     expect(nearest(word, among)).toBe(expected);
   });

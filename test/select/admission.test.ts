@@ -222,7 +222,7 @@ test('the declared rules are told one by one, in a fixed order', () => {
       adjustedRSquared: { atLeast: 0.75 },
     }),
   ).toEqual([
-    'Every VIF must be at most 10.',
+    'The VIF of every term must be at most 10; of a term with several columns, the generalised VIF to the power 1/columns.',
     'The p-value of every term must be at most 0.1.',
     'The coefficient of cargo must be positive where a candidate has it.',
     'The coefficient of slope must be negative where a candidate has it.',

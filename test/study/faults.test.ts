@@ -701,6 +701,19 @@ function position(shown: string): number {
 }
 
 describe('faults at the edges', () => {
+  it('tells how a date can be the identity of rows', () => {
+    const text = changed(SMALL, '  file: a.csv\n', '  file: a.csv\n  row_id: d\n').replace(
+      'd: { type: date }',
+      'd: { type: date, column: Day of week }',
+    );
+    expect(read(text).problems).toMatchObject([
+      {
+        code: 'type_unsuited',
+        hint: 'Declare a second variable on the same column and name that: { column: "Day of week", type: identifier }.',
+      },
+    ]);
+  });
+
   it('tells of a missing key where its mapping begins', () => {
     expect(read(changed(SMALL, '  file: a.csv\n', '')).places).toEqual(['3:1+4 key_missing']);
     expect(read(changed(SMALL, 'title: Small\n', '')).places).toEqual(['1:1+12 key_missing']);

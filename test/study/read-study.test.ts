@@ -57,6 +57,18 @@ describe('readStudy', () => {
     ]);
   });
 
+  it('knows a record, however large', async () => {
+    for (const padding of [0, 2_100_000]) {
+      const record = `{\n  "format": "plumbrule-record/1",\n  "filler": "${'x'.repeat(padding)}"\n}\n`;
+      const { study, problems } = await readBytes(record);
+      expect(study).toBeNull();
+      expect(problems).toMatchObject([
+        { code: 'study_unreadable', message: 'This is a record, not a study.' },
+      ]);
+      expect(problems[0]!.hint).toContain('plumbrule render');
+    }
+  });
+
   it('says where a file stops being UTF-8', async () => {
     const latin = Buffer.from('plumbrule: 1\ntitle: Für alle é\n', 'latin1');
     const { path, study, problems } = await readBytes(latin);

@@ -10,7 +10,11 @@ import { beside, limitText, listedUpTo } from '../words.ts';
 export const vif: AdmissionRule = {
   name: 'vif',
   sentences: ({ vif: limit }) =>
-    limit === null ? [] : [`Every VIF must be at most ${limitText(limit.atMost)}.`],
+    limit === null
+      ? []
+      : [
+          `The VIF of every term must be at most ${limitText(limit.atMost)}; of a term with several columns, the generalised VIF to the power 1/columns.`,
+        ],
   refusals: ({ vif: limit }, index, { fits }) => {
     if (limit === null) return [];
     const fit = fits[index]!;
