@@ -1,4 +1,5 @@
 import type { Design } from '../model/design.ts';
+import { wholeNumber } from '../numerals.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
 import type { Study } from '../study/study.ts';
@@ -22,7 +23,7 @@ export function checkFits(
       code: 'response_constant',
       severity: 'error',
       place,
-      message: `${study.response.variable} has the same value in all ${sample.rowCount} rows used, so there is nothing to explain.`,
+      message: `${study.response.variable} has the same value in all ${wholeNumber(sample.rowCount)} rows used, so there is nothing to explain.`,
     });
     return;
   }
@@ -48,7 +49,7 @@ function reportTooFewRows(study: Study, fits: readonly Fit[], report: Report): v
       code: 'rows_too_few',
       severity: none ? 'error' : 'warning',
       place: study.placeOf(['candidates', index]),
-      message: `${candidate.name} has ${wanted} coefficients for ${rowCount} ${rowCount === 1 ? 'row' : 'rows'}: ${
+      message: `${candidate.name} has ${wanted} coefficients for ${wholeNumber(rowCount)} ${rowCount === 1 ? 'row' : 'rows'}: ${
         wanted === rowCount ? 'it fits them exactly, whatever they are' : 'there is no one answer'
       }, and nothing can be tested.`,
       hint: 'Take terms out, or wait for more rows.',
@@ -56,8 +57,9 @@ function reportTooFewRows(study: Study, fits: readonly Fit[], report: Report): v
   }
 }
 
+/** Columns that depend on others are left out first; what is left may yet be fewer than the rows. */
 function isCrowded(fit: Fit): boolean {
-  return fit.candidate.columns.length >= fit.rowCount;
+  return fit.degreesOfFreedom < 1;
 }
 
 /** Without an intercept, terms that are 0 in every row leave no column at all. */
@@ -68,7 +70,7 @@ function reportNothingLeft(study: Study, fits: readonly Fit[], report: Report): 
       code: 'predictor_constant',
       severity: 'error',
       place: study.placeOf(['candidates', index]),
-      message: `${candidate.name} has no intercept, and its terms are 0 in all ${rowCount} rows used, so there is nothing to fit.`,
+      message: `${candidate.name} has no intercept, and its terms are 0 in all ${wholeNumber(rowCount)} rows used, so there is nothing to fit.`,
       hint: 'Take the candidate out.',
     });
   });
