@@ -24,6 +24,8 @@ import { readStudy } from './study/read-study.ts';
 import type { Study } from './study/study.ts';
 
 export interface RunOptions {
+  /** Values for the study's parameters, by name, as text; the defaults where left out. */
+  readonly parameters?: ReadonlyMap<string, string>;
   /** Told of long work: the stage in words, how much is done, and of how much where that is known. */
   readonly onProgress?: (stage: string, done: number, total: number | null) => void;
 }
@@ -52,7 +54,7 @@ export interface RunResult {
 export async function checkStudy(path: string, options: RunOptions = {}): Promise<CheckedStudy> {
   const problems: Problem[] = [];
   const report: Report = (problem) => problems.push(problem);
-  const study = await readStudy(path, report);
+  const study = await readStudy(path, report, options.parameters);
   if (study === null || hasError(problems)) {
     return { study, table: null, sample: null, dataRead: false, problems };
   }

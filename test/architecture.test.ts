@@ -23,6 +23,7 @@ const ROOMS = [
   'record',
   'report',
   'run.ts',
+  'verify.ts',
   'cli',
   'index.ts',
 ];

@@ -1,7 +1,9 @@
+import type { Problem } from '../problem.ts';
 import { type CheckedStudy, checkStudy } from '../run.ts';
-import type { CommonOptions } from './common-options.ts';
+import type { StudyOptions } from './common-options.ts';
 import { contractSummary } from './contract-summary.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
+import { givenParameters } from './given-parameters.ts';
 import { hasError } from './has-error.ts';
 import { progressOn } from './progress.ts';
 import { showDataNotRead, showProblems } from './show-problems.ts';
@@ -9,15 +11,17 @@ import { sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
 
 /** `plumbrule check STUDY`: declaration and data contract, no fit. */
-export async function checkCommand(
-  path: string,
-  options: CommonOptions,
-  terminal: Terminal,
-): Promise<number> {
+export async function checkCommand(path: string, options: StudyOptions, terminal: Terminal): Promise<number> {
+  const misuse: Problem[] = [];
+  const parameters = givenParameters(options.with ?? [], (problem) => misuse.push(problem));
+  if (misuse.length > 0) {
+    await showProblems(misuse, new Map(), options.problems, terminal);
+    return UNUSABLE;
+  }
   const progress = progressOn(terminal, options.quiet === true);
   let checked: CheckedStudy;
   try {
-    checked = await checkStudy(path, { onProgress: progress.show });
+    checked = await checkStudy(path, { onProgress: progress.show, parameters });
   } finally {
     progress.clear();
   }

@@ -1,11 +1,12 @@
 import { Command, CommanderError, Option } from 'commander';
 import { packageVersion } from '../package-file.ts';
 import type { Problem } from '../problem.ts';
-import type { CommonOptions } from './common-options.ts';
+import type { StudyOptions } from './common-options.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
 import type { RenderCommandOptions } from './render.ts';
 import { showProblems } from './show-problems.ts';
 import type { Terminal } from './terminal.ts';
+import type { VerifyCommandOptions } from './verify.ts';
 
 /**
  * Runs one command line (without the program's own name) and gives its exit status. Commands are loaded
@@ -49,15 +50,20 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
     )
       .choices(['text', 'json'])
       .default('text');
+  const given = () =>
+    new Option('--with <name=value>', 'a value for a parameter of the study; may be repeated')
+      .argParser((text: string, before: string[]) => [...before, text])
+      .default([], 'the defaults that the study declares');
   const quiet = () => new Option('--quiet', 'print problems only');
 
   program
     .command('check')
     .description('check a study and its data, and fit nothing')
     .argument('<study>', 'the study file')
+    .addOption(given())
     .addOption(quiet())
     .addOption(problems())
-    .action(async (study: string, options: CommonOptions) => {
+    .action(async (study: string, options: StudyOptions) => {
       const { checkCommand } = await import('./check.ts');
       ended(await checkCommand(study, options, terminal));
     });
@@ -67,11 +73,28 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
     .description('run the whole study and write its record, reports and tables')
     .argument('<study>', 'the study file')
     .option('--out <folder>', 'where to write (default: results/ and the name of the study)')
+    .addOption(given())
     .addOption(quiet())
     .addOption(problems())
-    .action(async (study: string, options: CommonOptions & { out?: string }) => {
+    .action(async (study: string, options: StudyOptions & { out?: string }) => {
       const { fitCommand } = await import('./fit.ts');
       ended(await fitCommand(study, options, terminal));
+    });
+
+  program
+    .command('verify')
+    .description('run the study of a record again; every number must come back')
+    .argument('<record>', 'the record file, record.json')
+    .option(
+      '--study <file>',
+      'the study file or its folder (default: looked for beside the record, above it and here)',
+    )
+    .option('--tolerance <relative>', 'relative difference passed over (default: 0, to the last bit)')
+    .addOption(quiet())
+    .addOption(problems())
+    .action(async (record: string, options: VerifyCommandOptions) => {
+      const { verifyCommand } = await import('./verify.ts');
+      ended(await verifyCommand(record, options, terminal));
     });
 
   program
@@ -95,7 +118,7 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
 
   program.addHelpText(
     'after',
-    '\nExit status: 0 done; 1 done, but an acceptance criterion was missed or no candidate was admitted;\n2 the study, the data or the command line cannot be used; 3 a fault of the program.\n',
+    '\nExit status: 0 done; 1 done, but an acceptance criterion was missed, no candidate was admitted or a\nrecord did not come back; 2 the study, the data or the command line cannot be used;\n3 a fault of the program.\n',
   );
   return program;
 }

@@ -6,8 +6,9 @@ import { recordText } from '../record/record-text.ts';
 import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
 import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
 import { type RunResult, runStudy } from '../run.ts';
-import type { CommonOptions } from './common-options.ts';
+import type { StudyOptions } from './common-options.ts';
 import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
+import { givenParameters } from './given-parameters.ts';
 import { hasError } from './has-error.ts';
 import { progressOn } from './progress.ts';
 import { reportFiles, templatesOf } from './report-files.ts';
@@ -19,16 +20,21 @@ import type { Terminal } from './terminal.ts';
 /** `plumbrule fit STUDY`: the whole study, down to record, reports and tables in the output folder. */
 export async function fitCommand(
   path: string,
-  options: CommonOptions & { readonly out?: string },
+  options: StudyOptions & { readonly out?: string },
   terminal: Terminal,
 ): Promise<number> {
-  const progress = progressOn(terminal, options.quiet === true);
   const problems: Problem[] = [];
+  const parameters = givenParameters(options.with ?? [], (problem) => problems.push(problem));
+  if (hasError(problems)) {
+    await showProblems(problems, new Map(), options.problems, terminal);
+    return UNUSABLE;
+  }
+  const progress = progressOn(terminal, options.quiet === true);
   let dataRead = false;
   let templates: ReadonlyMap<string, string> = new Map();
   let written: { readonly record: StudyRecord; readonly out: string; readonly names: string[] } | null = null;
   try {
-    const result = await runStudy(path, { onProgress: progress.show });
+    const result = await runStudy(path, { onProgress: progress.show, parameters });
     problems.push(...result.problems);
     dataRead = result.dataRead;
     if (result.record !== null && !hasError(problems)) {

@@ -57,6 +57,9 @@ export function buildRecord(run: Run): StudyRecord {
       file: study.file,
       sha256: study.sha256,
       settings: study.settings.map((setting) => ({ ...setting })),
+      ...(study.parameters.length === 0
+        ? {}
+        : { parameters: study.parameters.map((parameter) => ({ ...parameter })) }),
       caution: study.report.caution,
       confidence: study.inference.confidence,
       prediction_interval: study.predict.interval,

@@ -61,6 +61,29 @@ export interface StudyRecord {
       written: boolean;
     }[];
     /**
+     * The study's parameters with the values of this run, in order of declaration; left out where it declares none.
+     *
+     * Items: One parameter.
+     */
+    parameters?: {
+      /**
+       * Its name.
+       */
+      name: string;
+      /**
+       * The value in force.
+       */
+      value: string | number | boolean;
+      /**
+       * Its default in the study file.
+       */
+      default: string | number | boolean;
+      /**
+       * Whether the run was given the value; otherwise it is the default.
+       */
+      given: boolean;
+    }[];
+    /**
      * The analyst's own sentence for the cautions.
      */
     caution: string | null;

@@ -1,6 +1,7 @@
 import { basename } from 'node:path';
 import type { Problem, Report } from '../problem.ts';
 import { checkStudyFile } from './check-study-file.generated.ts';
+import { type GivenParameters, putParameters } from './parameters.ts';
 import type { Path } from './path.ts';
 import type { Loose } from './reading.ts';
 import { resolveStudy } from './resolve-study.ts';
@@ -12,7 +13,7 @@ import { readYaml, type Written } from './written.ts';
 /**
  * Reads a study from the text of its file: YAML, then the schema, then the meaning. Everything that is wrong is
  * reported in one go, with its place in `shownFile`; the result is null where any of it is an error. `folder` is
- * where relative file names start; `sha256` is of the file's bytes.
+ * where relative file names start; `sha256` is of the file's bytes; `given` are values for its parameters.
  */
 export function parseStudy(
   text: string,
@@ -20,6 +21,7 @@ export function parseStudy(
   folder: string,
   sha256: string,
   report: Report,
+  given: GivenParameters = new Map(),
 ): Study | null {
   let errors = 0;
   const counting = (problem: Problem) => {
@@ -32,8 +34,9 @@ export function parseStudy(
   }
   // An editor shows no byte-order mark, so columns are counted without it.
   const source = text.startsWith('\ufeff') ? text.slice(1) : text;
-  const written = readYaml(source, shownFile, counting);
-  if (written === null) return null;
+  const asWritten = readYaml(source, shownFile, counting);
+  if (asWritten === null) return null;
+  const { written, parameters } = putParameters(asWritten, given, counting);
   if (written.value === null) {
     counting(unreadable(shownFile, 'The study file is empty.'));
     return null;
@@ -47,7 +50,7 @@ export function parseStudy(
   for (const { problem } of faults) counting(problem);
   const unusable = faults.flatMap((each) => (each.unusable === null ? [] : [each.unusable]));
   const file = without(written.value, unusable) as Loose<StudyFile>;
-  const origin = { file: basename(shownFile), folder, sha256 };
+  const origin = { file: basename(shownFile), folder, sha256, parameters };
   const study = resolveStudy({ file, written, report: counting }, origin);
   return errors === 0 ? study : null;
 }

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { open, readFile, stat } from 'node:fs/promises';
 import { dirname, resolve } from 'node:path';
 import type { Report } from '../problem.ts';
+import type { GivenParameters } from './parameters.ts';
 import { isRecord, parseStudy, recordGiven, unreadable } from './parse-study.ts';
 import type { Study } from './study.ts';
 
@@ -10,15 +11,19 @@ const MOST_BYTES = 2_000_000;
 
 /**
  * Reads and checks a study file. Places name the file as `path` does. Null where the file cannot be read or anything
- * in it is an error; all of it is reported.
+ * in it is an error; all of it is reported. `given` are values for the study's parameters, by name.
  */
-export async function readStudy(path: string, report: Report): Promise<Study | null> {
+export async function readStudy(
+  path: string,
+  report: Report,
+  given: GivenParameters = new Map(),
+): Promise<Study | null> {
   const bytes = await readBytes(path, report);
   if (bytes === null) return null;
   const text = decode(bytes, path, report);
   if (text === null) return null;
   const sha256 = createHash('sha256').update(bytes).digest('hex');
-  return parseStudy(text, path, resolve(dirname(path)), sha256, report);
+  return parseStudy(text, path, resolve(dirname(path)), sha256, report, given);
 }
 
 async function readBytes(path: string, report: Report): Promise<Uint8Array | null> {

@@ -19,6 +19,7 @@ export interface StudyOrigin {
   readonly file: string;
   readonly folder: string;
   readonly sha256: string;
+  readonly parameters: Study['parameters'];
 }
 
 /**

@@ -35,6 +35,15 @@ export interface StudyFile {
    */
   question?: string;
   /**
+   * Values that a run may be given, by name, with their defaults. ${NAME} in a value of the study stands for the parameter's value; a value that is nothing but ${NAME} takes its type as well. $${ stands for ${ itself. Inside braces or brackets, write it in quotes.
+   */
+  parameters?: {
+    /**
+     * The default. Whoever runs the study gives another value of the same type with --with NAME=VALUE.
+     */
+    [k: string]: string | number | boolean;
+  };
+  /**
    * The data file and its contract: what each column must hold.
    */
   data: {

@@ -26,6 +26,8 @@ export interface Study {
   readonly predict: PredictPlan;
   readonly acceptance: readonly AcceptancePlan[];
   readonly report: ReportPlan;
+  /** Declared parameters with the values in force, in order of declaration. */
+  readonly parameters: readonly ParameterPlan[];
   /** Every setting that has a default, in schema order, with whether the analyst wrote it. */
   readonly settings: readonly Setting[];
   /** The place of a value in the study file, by its path of keys and indexes; the nearest parent if absent. */
@@ -38,6 +40,15 @@ export interface Setting {
   /** The value in force, as text. */
   readonly value: string;
   readonly written: boolean;
+}
+
+export interface ParameterPlan {
+  readonly name: string;
+  /** The value in force. */
+  readonly value: string | number | boolean;
+  readonly default: string | number | boolean;
+  /** Whether the run was given the value; otherwise it is the default. */
+  readonly given: boolean;
 }
 
 export interface DataPlan {

@@ -79,6 +79,7 @@ export function makeStudy(columns: readonly Column[], written: Written): Study {
     predict: { rows: [], file: null, interval: 0.95, total: false },
     acceptance: [],
     report: { formats: [], templates: { html: null, markdown: null }, caution: null },
+    parameters: [],
     settings: [],
     placeOf: () => place,
   };

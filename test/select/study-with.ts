@@ -45,6 +45,7 @@ export function studyWith(change: SelectionChange): Study {
     predict: { rows: [], file: null, interval: 0.9, total: false },
     acceptance: [],
     report: { formats: [], templates: { html: null, markdown: null }, caution: null },
+    parameters: [],
     settings: [],
     // The path's last step gives the line, so that a test can tell places apart.
     placeOf: (path) => ({

@@ -31,9 +31,9 @@ const CASES: readonly Case[] = [
   },
   {
     from: 'response: y',
-    to: 'response: y\n«parameters»: 3',
+    to: 'response: y\n«owner»: 3',
     code: 'key_unknown',
-    says: ['parameters is not a key here. Keys here are plumbrule, title,'],
+    says: ['owner is not a key here. Keys here are plumbrule, title,'],
   },
   {
     from: 'response: y',
@@ -888,7 +888,7 @@ describe('faults at the edges', () => {
 describe('the codes of the study group', () => {
   it('are each provoked here or in read-study.test.ts', () => {
     const here = new Set([...CASES.map(({ code }) => code), 'name_unused', 'term_without_parts']);
-    const elsewhere = ['study_unreadable', 'study_not_utf8'];
+    const elsewhere = ['study_unreadable', 'study_not_utf8', 'parameter_unknown', 'parameter_value'];
     expect(STUDY_CODES.filter((code) => !here.has(code) && !elsewhere.includes(code))).toEqual([]);
   });
 });
