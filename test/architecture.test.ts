@@ -10,6 +10,7 @@ import { describe, expect, test } from 'vitest';
 const ROOMS = [
   'problem.ts',
   'package-file.ts',
+  'numerals.ts',
   'stats',
   'expression',
   'study',
@@ -32,10 +33,11 @@ const ROOMS = [
 const NARROW: { readonly [room: string]: readonly string[] } = {
   'problem.ts': [],
   'package-file.ts': [],
+  'numerals.ts': [],
   stats: [],
   expression: ['problem.ts'],
   // A report is made from a record and nothing else.
-  report: ['problem.ts', 'record'],
+  report: ['problem.ts', 'numerals.ts', 'record'],
 };
 
 /**

@@ -1,3 +1,4 @@
+import { wholeNumber } from '../numerals.ts';
 import type { Problem, Report } from '../problem.ts';
 import type { DataPlan, VariablePlan } from '../study/study.ts';
 import { type CellFault, FAULT_KINDS, faultSentence, showText } from './fault-sentence.ts';
@@ -173,7 +174,7 @@ function andMore(file: string, count: number): Problem {
   const message =
     count === 1
       ? 'One more row or cell is faulty and is not listed.'
-      : `${count} more rows or cells are faulty and are not listed.`;
+      : `${wholeNumber(count)} more rows or cells are faulty and are not listed.`;
   return { code: 'problems_more', severity: 'error', place: { kind: 'file', file }, message };
 }
 
@@ -196,6 +197,6 @@ function borneWarning(plan: DataPlan, variable: VariablePlan, kind: KindCount): 
   const message =
     count === 1
       ? `One cell of ${variable.name} ${isWrong} (${text} in line ${kind.firstLine}) and ${setMissing ? 'was set to missing' : 'its row is left out'}.`
-      : `${count} cells of ${variable.name} ${areWrong} (the first is ${text} in line ${kind.firstLine}) and ${setMissing ? 'were set to missing' : 'their rows are left out'}.`;
+      : `${wholeNumber(count)} cells of ${variable.name} ${areWrong} (the first is ${text} in line ${kind.firstLine}) and ${setMissing ? 'were set to missing' : 'their rows are left out'}.`;
   return { code, severity: 'warning', place, message };
 }

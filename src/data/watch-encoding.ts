@@ -1,3 +1,4 @@
+import { wholeNumber } from '../numerals.ts';
 import type { Problem, Report } from '../problem.ts';
 import type { DataPlan } from '../study/study.ts';
 
@@ -34,7 +35,7 @@ export function watchEncoding(plan: DataPlan): EncodingWatch {
 
 function notUtf8(file: string, first: { row: number; variable: string | null }, rows: number): Problem {
   const { row, variable } = first;
-  const count = rows === 1 ? 'One row holds' : `${rows} rows hold`;
+  const count = rows === 1 ? 'One row holds' : `${wholeNumber(rows)} rows hold`;
   return {
     code: 'cell_encoding',
     severity: 'error',

@@ -1,6 +1,7 @@
 import type { Design } from '../model/design.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 import { logJacobian } from '../model/response-scale.ts';
+import { wholeNumber } from '../numerals.ts';
 import { EXTENDED_BUDGET, type Factor, factorExtended, factorRows } from './factor.ts';
 import type { Fit, FitContext } from './fit.ts';
 import { fitCandidate, type RowFacts } from './fit-candidate.ts';
@@ -90,7 +91,7 @@ function pressByBudget(
   if (!options.pressRanks && cost > PRESS_BUDGET) {
     return {
       press: fits.map(() => null),
-      pressOmitted: `not worked out: it needs another pass over ${rows.rowCount} rows for each of ${fits.length} candidates, and does not rank them`,
+      pressOmitted: `not worked out: it needs another pass over ${wholeNumber(rows.rowCount)} rows for each of ${wholeNumber(fits.length)} candidates, and does not rank them`,
     };
   }
   return {

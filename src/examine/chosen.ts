@@ -80,3 +80,8 @@ export function deletedResidual(chosen: Chosen, row: number): number | null {
 export function rowName(sample: Sample, row: number): string {
   return sample.ids?.[row] ?? `line ${sample.lines[row]}`;
 }
+
+/** The same at the start of a sentence; an identity keeps its letters as they are. */
+export function rowNameFirst(sample: Sample, row: number): string {
+  return sample.ids?.[row] ?? `Line ${sample.lines[row]}`;
+}

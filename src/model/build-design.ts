@@ -1,4 +1,5 @@
 import type { CategoryColumn } from '../data/table.ts';
+import { wholeNumber } from '../numerals.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
 import type { ResponsePlan, Study, TermPlan } from '../study/study.ts';
@@ -39,7 +40,7 @@ export function buildDesign(study: Study, sample: Sample, report: Report): Desig
           code: 'category_one_level',
           severity: 'error',
           place: study.placeOf(['candidates', position, 'terms', termPosition]),
-          message: `${column.name} has ${level === null ? 'no level' : `only the level "${level}"`} in the ${sample.rowCount} rows used, so it cannot be a term.`,
+          message: `${column.name} has ${level === null ? 'no level' : `only the level "${level}"`} in the ${wholeNumber(sample.rowCount)} rows used, so it cannot be a term.`,
           hint: 'Look at what leave_out and missing values take away, or take the term out.',
         });
       };

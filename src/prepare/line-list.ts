@@ -1,15 +1,17 @@
+import { wholeNumber } from '../numerals.ts';
+
 const MOST_NAMED = 5;
 
 /** "line 4", "lines 4, 9 and 12" or "lines 4, 9, 12, 17, 20 and 7 more". */
 export function lineList(lines: readonly number[]): string {
   const named = lines.slice(0, MOST_NAMED);
   const more = lines.length - named.length;
-  const parts = more > 0 ? [...named.map(String), `${more} more`] : named.map(String);
+  const parts = more > 0 ? [...named.map(String), `${wholeNumber(more)} more`] : named.map(String);
   if (parts.length < 2) return `line ${parts.join('')}`;
   return `lines ${parts.slice(0, -1).join(', ')} and ${parts.at(-1)}`;
 }
 
-/** "1 row", "12 rows". */
+/** "1 row", "1 461 rows". */
 export function rowCountText(rows: number): string {
-  return `${rows} ${rows === 1 ? 'row' : 'rows'}`;
+  return `${wholeNumber(rows)} ${rows === 1 ? 'row' : 'rows'}`;
 }

@@ -1,13 +1,14 @@
+import { dressed, MINUS, THIN } from '../numerals.ts';
+
 /**
  * Numbers for people. Nothing here depends on the machine's locale, so that the same record gives the
  * same bytes everywhere. A missing number (null, NaN) reads as an en dash.
  */
 
-/** Narrow no-break space: between thousands and before a percent sign. */
-export const THIN = '\u202f';
+export { THIN };
+
 /** No-break space: between a number and its unit. */
 export const NBSP = '\u00a0';
-const MINUS = '−';
 export const NONE = '–';
 
 const SUPERSCRIPT = '⁰¹²³⁴⁵⁶⁷⁸⁹';
@@ -36,30 +37,20 @@ export function decimalExponent(x: number, digits: number): number {
   );
 }
 
-/** Groups the whole part by thousands and puts a true minus. `text` is plain decimal notation. */
-function dress(text: string): string {
-  const negative = text.startsWith('-');
-  const [whole, fraction] = (negative ? text.slice(1) : text).split('.') as [string, string?];
-  const grouped = whole.replace(/\B(?=(\d{3})+$)/g, THIN);
-  const body = fraction === undefined ? grouped : `${grouped}.${fraction}`;
-  // "−0.0" says nothing that "0.0" does not.
-  return negative && /[1-9]/.test(body) ? MINUS + body : body;
-}
-
 /** Rounded to a number of decimals; a negative number of decimals rounds to tens, hundreds … */
 export function fixed(x: number | null | undefined, decimals: number): string {
   if (x === null || x === undefined || Number.isNaN(x)) return NONE;
   if (!Number.isFinite(x)) return x > 0 ? '∞' : `${MINUS}∞`;
   if (Math.abs(x) >= 1e21) return scientific(x, 3);
-  if (decimals >= 0) return dress(x.toFixed(Math.min(decimals, 20)));
+  if (decimals >= 0) return dressed(x.toFixed(Math.min(decimals, 20)));
   const step = 10 ** -decimals;
-  return dress((Math.round(x / step) * step).toFixed(0));
+  return dressed((Math.round(x / step) * step).toFixed(0));
 }
 
 /** "1.23 × 10⁻⁷" with so many significant digits. */
 export function scientific(x: number, digits: number): string {
   const [mantissa, exponent] = x.toExponential(digits - 1).split('e') as [string, string];
-  return `${dress(mantissa)}${NBSP}×${NBSP}${powerOfTen(Number(exponent))}`;
+  return `${dressed(mantissa)}${NBSP}×${NBSP}${powerOfTen(Number(exponent))}`;
 }
 
 /**

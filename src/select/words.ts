@@ -1,3 +1,5 @@
+import { dressed, wholeNumber } from '../numerals.ts';
+
 /** Numbers and lists inside the sentences of this room. The report has its own, richer forms. */
 
 /** "a", "a and b", "a, b and c". */
@@ -16,24 +18,24 @@ export function named(name: string): string {
   return /[.,;:()]/.test(name) ? `“${name}”` : name;
 }
 
-/** "1 row", "12 rows". */
+/** "1 row", "1 461 rows". */
 export function counted(n: number, one: string, many = `${one}s`): string {
-  return `${n} ${n === 1 ? one : many}`;
+  return `${wholeNumber(n)} ${n === 1 ? one : many}`;
 }
 
-/** A number to so many significant digits, whole digits never replaced by zeros: "1234567", "14.2", "0.00071", "−3.2", "3.1 × 10⁻⁸". */
+/** A number to so many significant digits, whole digits never replaced by zeros: "1 234 567", "14.2", "0.00071", "−3.2", "3.1 × 10⁻⁸". */
 export function significant(value: number, digits: number): string {
   if (value === 0) return '0';
   const [mantissa, power] = value.toExponential(digits - 1).split('e') as [string, string];
   const exponent = Number(power);
-  if (exponent < -4 || exponent > 8) return `${signed(mantissa)} × 10${raisedDigits(exponent)}`;
-  if (exponent >= digits) return signed(value.toFixed(0));
-  return signed(Number(`${mantissa}e${exponent}`).toFixed(Math.max(0, digits - 1 - exponent)));
+  if (exponent < -4 || exponent > 8) return `${dressed(mantissa)} × 10${raisedDigits(exponent)}`;
+  if (exponent >= digits) return dressed(value.toFixed(0));
+  return dressed(Number(`${mantissa}e${exponent}`).toFixed(Math.max(0, digits - 1 - exponent)));
 }
 
 /** A declared limit as it was written, with a true minus sign. */
 export function limitText(limit: number): string {
-  return signed(String(limit));
+  return String(limit).replace('-', '−');
 }
 
 /**
@@ -63,8 +65,4 @@ const SUPERSCRIPT = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 function raisedDigits(exponent: number): string {
   const digits = [...String(Math.abs(exponent))].map((digit) => SUPERSCRIPT[Number(digit)]).join('');
   return exponent < 0 ? `⁻${digits}` : digits;
-}
-
-function signed(text: string): string {
-  return text.replace('-', '−');
 }

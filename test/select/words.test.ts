@@ -16,7 +16,7 @@ test.each([
   [14.2331, 3, '14.2'],
   [9.999, 3, '10.0'],
   [-0.14406, 3, '−0.144'],
-  [1234567, 3, '1234567'],
+  [1234567, 3, '1\u202f234\u202f567'],
   [1.25e12, 3, '1.25 × 10¹²'],
   [3.14e-8, 2, '3.1 × 10⁻⁸'],
   [9.96e-5, 2, '0.00010'],
@@ -43,6 +43,7 @@ test('lists and counts', () => {
   expect(listedUpTo(['a', 'b', 'c', 'd', 'e'], 3)).toBe('a, b, c and 2 more');
   expect(counted(1, 'row')).toBe('1 row');
   expect(counted(2, 'row')).toBe('2 rows');
+  expect(counted(1461, 'row')).toBe('1\u202f461 rows');
   expect(named('By vessel')).toBe('By vessel');
   expect(named('By vessel, booked')).toBe('“By vessel, booked”');
 });

@@ -1,3 +1,4 @@
+import type { DesignColumn } from '../../model/design.ts';
 import { type Diagnostic, notPossible } from '../diagnostic.ts';
 
 /** The largest VIF among the columns, with the condition number beside it. */
@@ -17,15 +18,8 @@ export const collinearity: Diagnostic = {
     }
     const largest = fit.vif[at]!;
     const name = columns[fit.columns[at]!]!.name;
-    // Powers of one variable, and a product beside its parts, inflate each other by construction.
-    const built = columns[fit.columns[at]!]!.pieces.some((piece) =>
-      fit.columns.some(
-        (other) =>
-          other !== fit.columns[at] &&
-          columns[other]!.pieces.some(
-            (another) => another.variable === piece.variable && another.kind !== 'level',
-          ),
-      ),
+    const built = fit.columns.some(
+      (other) => other !== fit.columns[at] && inflate(columns[other]!, columns[fit.columns[at]!]!),
     );
     const concern = built ? (largest > 1e4 ? 1 : 0) : largest > 10 ? 2 : largest > 5 ? 1 : 0;
     const condition = `condition number ${fit.conditionNumber.toPrecision(3)}`;
@@ -38,7 +32,7 @@ export const collinearity: Diagnostic = {
         ? `The largest factor is that of ${name}, which shares a variable with other columns and is inflated by construction (${condition}); read the curve or the slopes, not the single coefficient.`
         : concern === 0
           ? `No coefficient’s uncertainty is inflated much by the others; ${name} most (${condition}).`
-          : `${name} can largely be predicted from the other columns (${condition}): its coefficient has ${Math.sqrt(largest).toPrecision(2)} times the standard error it would have alone, and may change much when they do.`,
+          : `The column ${name} can largely be predicted from the other columns (${condition}): its coefficient has ${Math.sqrt(largest).toPrecision(2)} times the standard error it would have alone, and may change much when they do.`,
       concern,
       advice:
         concern === 0
@@ -47,3 +41,16 @@ export const collinearity: Diagnostic = {
     };
   },
 };
+
+/**
+ * Whether two columns inflate each other by construction: powers of one variable, and a product beside its parts or
+ * another product of them. Levels of one category alone do not count.
+ */
+function inflate(one: DesignColumn, other: DesignColumn): boolean {
+  const product = one.pieces.length > 1 || other.pieces.length > 1;
+  return one.pieces.some((piece) =>
+    other.pieces.some(
+      (another) => another.variable === piece.variable && (product || another.kind !== 'level'),
+    ),
+  );
+}

@@ -1,3 +1,4 @@
+import { wholeNumber } from '../../numerals.ts';
 import type { Diagnostic } from '../diagnostic.ts';
 
 /** Rows per coefficient. */
@@ -16,7 +17,7 @@ export const enoughRows: Diagnostic = {
       df: [],
       p_value: null,
       mark: 'ten to twenty (common practice)',
-      verdict: `${n} rows carry ${p} coefficients${concern === 0 ? '.' : ': R² flatters the model, and the coefficients may not come back on new rows.'}`,
+      verdict: `${wholeNumber(n)} rows carry ${wholeNumber(p)} coefficients${concern === 0 ? '.' : ': R² flatters the model, and the coefficients may not come back on new rows.'}`,
       concern,
       advice:
         concern === 0

@@ -29,13 +29,22 @@ export const equalSpread: Diagnostic = {
           ? 'The squared residuals do not visibly depend on the model’s variables.'
           : 'The size of the residuals depends on the model’s variables: standard errors and intervals are too narrow in some places and too wide in others.',
       concern,
-      advice:
-        concern === 0
-          ? null
-          : 'Try the response on a log or square-root scale, or declare weights; do not lean on intervals at the edge of the data.',
+      advice: concern === 0 ? null : `${remedy(chosen)}; do not lean on intervals at the edge of the data.`,
     };
   },
 };
+
+/** What may even the spread out: only a scale that is defined for every value of the response. */
+function remedy({ study, spreads, fit }: Chosen): string {
+  if (fit.candidate.response.scale.kind !== 'natural') {
+    return 'Try the response on another scale, or declare weights';
+  }
+  const smallest = spreads.get(study.response.variable)?.smallest ?? Number.NEGATIVE_INFINITY;
+  if (smallest > 0) return 'Try the response on a log or square-root scale, or declare weights';
+  return smallest === 0
+    ? 'Try the response on a square-root scale (it has zeros, so it has no logarithm), or declare weights'
+    : 'Declare weights, or bring what the spread depends on into the model (the response has values below zero, so a log or square-root scale is not open to it)';
+}
 
 /** The statistic and its degrees of freedom; null where the model has no column beside the intercept. */
 export function koenker(chosen: Chosen): { statistic: number; df: number } | null {

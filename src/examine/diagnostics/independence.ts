@@ -1,3 +1,4 @@
+import { decimalNumber, wholeNumber } from '../../numerals.ts';
 import type { Chosen } from '../chosen.ts';
 import { type Diagnostic, notPossible } from '../diagnostic.ts';
 
@@ -16,7 +17,7 @@ export const independence: Diagnostic = {
     const away = Math.abs(statistic - 2);
     const concern = away > 1 ? 2 : away > 0.5 ? 1 : 0;
     const repeated = repeatedTimes(chosen);
-    const correlation = `about ${(1 - statistic / 2).toFixed(2).replace('-', '−')}`;
+    const correlation = `about ${decimalNumber(1 - statistic / 2, 2)}`;
     return {
       statistic,
       df: [],
@@ -29,7 +30,7 @@ export const independence: Diagnostic = {
             ? `A row’s residual resembles the one before it (correlation ${correlation}): there is less information in the rows than their number says, and the intervals are too narrow.`
             : `A row’s residual tends to oppose the one before it (correlation ${correlation}), as where one period’s excess is booked in the next.`) +
         (repeated > 0
-          ? ` ${repeated} rows share their time with the row before; they are taken in file order.`
+          ? ` ${wholeNumber(repeated)} rows share their time with the row before; they are taken in file order.`
           : ''),
       concern,
       advice:

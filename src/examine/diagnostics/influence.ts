@@ -1,4 +1,4 @@
-import { cooksDistance, rowName } from '../chosen.ts';
+import { cooksDistance, rowName, rowNameFirst } from '../chosen.ts';
 import { type Diagnostic, notPossible } from '../diagnostic.ts';
 
 /** The largest Cook’s distance. */
@@ -27,7 +27,7 @@ export const influence: Diagnostic = {
         ? ''
         : ` ${full
             .slice(0, 5)
-            .map((i) => rowName(chosen.sample, i))
+            .map((i, k) => (k === 0 ? rowNameFirst : rowName)(chosen.sample, i))
             .join(
               ', ',
             )}${full.length > 5 ? ` and ${full.length - 5} more` : ''}: fitted by a coefficient of its own (leverage 1), so nothing checks it.`;
@@ -39,7 +39,7 @@ export const influence: Diagnostic = {
       mark: 'worth a look above 0.5, a result that hangs on one row above 1 (common practice)',
       verdict:
         (largest >= 0.5
-          ? `${name} moves the coefficients noticeably: without it the model would say something else.`
+          ? `${rowNameFirst(chosen.sample, row)} moves the coefficients noticeably: without it the model would say something else.`
           : `No single row moves the coefficients much; ${name} moves them most.`) + alone,
       concern,
       advice:

@@ -1,5 +1,6 @@
+import { wholeNumber } from '../../numerals.ts';
 import { tTwoSided } from '../../stats/distributions.ts';
-import { deletedResidual, rowName } from '../chosen.ts';
+import { deletedResidual, rowName, rowNameFirst } from '../chosen.ts';
 import { type Diagnostic, notPossible } from '../diagnostic.ts';
 
 /** The largest deleted residual, its p-value multiplied by the number of rows looked at (Bonferroni). */
@@ -31,8 +32,8 @@ export const outlyingRows: Diagnostic = {
       mark: null,
       verdict:
         concern === 0
-          ? `The row farthest from the model, ${name}, is no farther than the farthest of ${chosen.sample.rowCount} rows may well be.`
-          : `${name} lies farther ${direction} the model than chance among ${chosen.sample.rowCount} rows explains.`,
+          ? `The row farthest from the model, ${name}, is no farther than the farthest of ${wholeNumber(chosen.sample.rowCount)} rows may well be.`
+          : `${rowNameFirst(chosen.sample, row)} lies farther ${direction} the model than chance among ${wholeNumber(chosen.sample.rowCount)} rows explains.`,
       concern,
       advice:
         concern === 0
