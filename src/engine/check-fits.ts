@@ -1,5 +1,5 @@
 import type { Design } from '../model/design.ts';
-import { wholeNumber, wholeNumber } from '../numerals.ts';
+import { wholeNumber } from '../numerals.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
 import type { Study } from '../study/study.ts';
