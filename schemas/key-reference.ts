@@ -8,7 +8,10 @@ interface Row {
 }
 
 /** Definitions that several keys share; each gets a section of its own instead of being repeated. */
-const SHARED = ['term', 'member', 'scale', 'limits'];
+const SHARED = ['term', 'member', 'scale', 'hypothesis', 'limits'];
+
+/** Of these every form is shown with its keys. */
+const SHOWN_BY_FORM = ['term', 'scale', 'hypothesis'];
 
 /**
  * The reference of all keys of a schema, as Markdown for people: one section for each key at the top with a
@@ -48,7 +51,7 @@ function sharedSection(name: string, definition: JsonSchema, root: JsonSchema): 
     const form = resolved(branch, root);
     const below = [...rowsBelow(form, root, '')];
     if (below.length === 0) continue;
-    if (branch !== definition && name !== 'term' && name !== 'scale') continue;
+    if (branch !== definition && !SHOWN_BY_FORM.includes(name)) continue;
     rows.push(...below.map((each, index) => (index === 0 ? withForm(each, form, definition) : each)));
   }
   if (rows.length > 0) parts.push(table(rows));
@@ -164,7 +167,13 @@ function isPlain(schema: JsonSchema): boolean {
 
 function headingOf(name: string): string {
   return (
-    { term: 'Terms', member: 'Members of an interaction', scale: 'Scales', limits: 'Limits' }[name] ?? name
+    {
+      term: 'Terms',
+      member: 'Members of an interaction',
+      scale: 'Scales',
+      hypothesis: 'Hypotheses',
+      limits: 'Limits',
+    }[name] ?? name
   );
 }
 

@@ -1,9 +1,12 @@
 import { readTable } from './data/read-table.ts';
 import type { Table } from './data/table.ts';
+import { candidateCovariances } from './engine/candidate-covariances.ts';
 import { checkFits } from './engine/check-fits.ts';
 import { checkMagnitudes } from './engine/check-magnitudes.ts';
+import { checkStandardErrors } from './engine/check-standard-errors.ts';
 import { type FittedAll, fitAll } from './engine/fit-all.ts';
 import { refineFit } from './engine/refine.ts';
+import { checkHypotheses } from './examine/check-hypotheses.ts';
 import { type Chosen, examineRows } from './examine/chosen.ts';
 import { buildDesign } from './model/build-design.ts';
 import type { Design } from './model/design.ts';
@@ -66,6 +69,7 @@ export async function checkStudy(path: string, options: RunOptions = {}): Promis
   return { study, table, sample, dataRead: true, problems };
 }
 
+  if (sample !== null) checkStandardErrors(study, sample, report);
 /**
  * The whole study, stage by stage:
  *
@@ -85,18 +89,20 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   const own = numbersOf(sample, study.response.variable);
   const rows = rowsOf(study, sample, design, own);
 
+  checkHypotheses(study, design, report);
   if (!checkMagnitudes(study, sample, design, rows, table.file, report)) return stopped();
 
-  const fitted = fitAll(design, rows, own, {
+  const fits = fitAll(design, rows, own, {
     pressRanks: study.selection.rankBy === 'press',
     onProgress: (done, total) => options.onProgress?.('fitting candidates', done, total),
   });
-  checkFits(study, sample, design, fitted.fits, report);
+  checkFits(study, sample, design, fits.fits, report);
   if (hasError(problems)) return stopped();
 
   const choice = choose(study, fitted, report);
   if (hasError(problems)) return stopped();
 
+  const fitted = { ...fits, covariances: candidateCovariances(study, sample, fits.fits, rows, report) };
   const spreads = spreadsOf(sample);
   const chosen =
     choice.chosen === null

@@ -1,4 +1,5 @@
 import type { CandidateModel } from '../model/design.ts';
+import type { Covariance } from './covariance.ts';
 
 /** How the numbers of a fit were computed. See DEVELOPERS.md, "Precision". */
 export type Arithmetic = 'extended' | 'refined' | 'plain';
@@ -66,4 +67,6 @@ export interface FitContext {
   /** s² of the union of all terms, by response column; null with a reason where it leaves no degrees of freedom. */
   readonly fullModelVariance: readonly (number | null)[];
   readonly columnNames: readonly string[];
+  /** The declared covariance of each fit's estimates, null where it has none; absent: the classical one. */
+  readonly covariances?: readonly (Covariance | null)[];
 }

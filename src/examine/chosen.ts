@@ -1,3 +1,4 @@
+import { type Covariance, declaredCovariance } from '../engine/covariance.ts';
 import type { Fit } from '../engine/fit.ts';
 import { FULL_LEVERAGE, visitRows } from '../engine/row-figures.ts';
 import type { DesignColumn } from '../model/design.ts';
@@ -17,6 +18,8 @@ export interface Chosen {
   readonly fit: Fit;
   /** s = √(RSS/(n − p)); null where there are no degrees of freedom or the fit is exact. */
   readonly s: number | null;
+  /** The declared covariance of the estimates; null as for s. */
+  readonly covariance: Covariance | null;
   /** √w (y − Xb), on the fitted scale. */
   readonly residuals: Float64Array;
   readonly leverages: Float64Array;
@@ -26,7 +29,10 @@ export interface Chosen {
   readonly observed: Float64Array;
 }
 
-/** One pass over the rows: residuals, leverages and fitted values of the chosen model. */
+/**
+ * One pass over the rows: residuals, leverages and fitted values of the chosen model; and a second one where its
+ * declared covariance is not the classical one.
+ */
 export function examineRows(
   study: Study,
   sample: Sample,
@@ -47,7 +53,8 @@ export function examineRows(
   const fitted = observed.map((y, i) => y - residuals[i]! / (rootWeights === null ? 1 : rootWeights[i]!));
   const s =
     fit.degreesOfFreedom < 1 || fit.exact ? null : Math.sqrt(fit.residualSumOfSquares / fit.degreesOfFreedom);
-  return { study, sample, spreads, columns, fit, s, residuals, leverages, fitted, observed };
+  const covariance = declaredCovariance(study.inference.standardErrors, fit, rows, sample);
+  return { study, sample, spreads, columns, fit, s, covariance, residuals, leverages, fitted, observed };
 }
 
 /** e_i/(s √(1 − h_i)); null where s is undefined or the leverage is 1. */
@@ -74,6 +81,35 @@ export function deletedResidual(chosen: Chosen, row: number): number | null {
   const df = chosen.fit.degreesOfFreedom;
   if (z === null || df < 2) return null;
   return z * Math.sqrt((df - 1) / Math.max(0, df - z * z));
+}
+
+/**
+ * s_(i), the residual standard error without the row: s²_(i) = (s²(n − p) − e²/(1 − h))/(n − p − 1) (Belsley, Kuh &
+ * Welsch 1980); null as for the deleted residual, 0 where the row alone spoils an otherwise exact fit.
+ */
+export function deletedDeviation(chosen: Chosen, row: number): number | null {
+  const z = standardisedResidual(chosen, row);
+  const df = chosen.fit.degreesOfFreedom;
+  if (z === null || df < 2) return null;
+  return chosen.s! * Math.sqrt(Math.max(0, df - z * z) / (df - 1));
+}
+
+/** DFFITS = t_i √(h/(1 − h)) (Belsley, Kuh & Welsch 1980); null where undefined. */
+export function fittedShift(chosen: Chosen, row: number): number | null {
+  const t = deletedResidual(chosen, row);
+  const h = chosen.leverages[row]!;
+  return t === null || !Number.isFinite(t) ? null : t * Math.sqrt(h / (1 - h));
+}
+
+/**
+ * COVRATIO = (s²_(i)/s²)^p/(1 − h), the determinant of the coefficients' covariance without the row over that with it
+ * (Belsley, Kuh & Welsch 1980); null where undefined.
+ */
+export function covarianceRatio(chosen: Chosen, row: number): number | null {
+  const spread = deletedDeviation(chosen, row);
+  if (spread === null) return null;
+  const ratio = (spread / chosen.s!) ** (2 * chosen.fit.columns.length) / (1 - chosen.leverages[row]!);
+  return Number.isFinite(ratio) ? ratio : null;
 }
 
 /** How a row is named to a person: its identity where the study declares one, else its line in the file. */

@@ -33,6 +33,24 @@ export function fromScale(z: number, scale: Scale): number {
   }
 }
 
+/** The derivative of g⁻¹ at z; NaN where z is outside the image of g. */
+export function scaleDerivative(z: number, scale: Scale): number {
+  switch (scale.kind) {
+    case 'natural':
+      return 1;
+    case 'log':
+      return Math.exp(z);
+    case 'sqrt':
+      return z < 0 ? Number.NaN : 2 * z;
+    case 'reciprocal':
+      return z <= 0 ? Number.NaN : -1 / (z * z);
+    case 'box_cox': {
+      const y = fromScale(z, scale);
+      return y ** (1 - scale.lambda);
+    }
+  }
+}
+
 /** Whether g⁻¹ falls as z rises: only the reciprocal. */
 export function isDecreasing(scale: Scale): boolean {
   return scale.kind === 'reciprocal';

@@ -3,7 +3,7 @@ import { baseVariables } from './derive.ts';
 
 /**
  * The variables that a row must have to be fitted, in order of declaration, derived ones last: those of every
- * candidate's terms, the response, the weights and the time. A derived variable stands for what it is made of.
+ * candidate's terms, the response, the weights, the time, the clusters and the groups. A derived variable stands for what it is made of.
  */
 export function neededVariables(study: Study): readonly string[] {
   const needed = new Set<string>([study.response.variable]);
@@ -14,6 +14,12 @@ export function neededVariables(study: Study): readonly string[] {
   }
   if (study.weights !== null) needed.add(study.weights);
   if (study.data.time !== null) needed.add(study.data.time);
+  const { standardErrors } = study.inference;
+  if (standardErrors.kind === 'clustered') needed.add(standardErrors.by);
+  const { validation, honestError, stability } = study.selection;
+  for (const plan of [validation, honestError, stability]) {
+    if (plan !== null && plan.group !== null) needed.add(plan.group);
+  }
   return inOrder(study, needed);
 }
 

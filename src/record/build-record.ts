@@ -1,9 +1,12 @@
 import { formatDate } from '../data/format-date.ts';
 import type { Table } from '../data/table.ts';
+import { classicalCovariance } from '../engine/covariance.ts';
 import type { Fit } from '../engine/fit.ts';
 import type { FittedAll } from '../engine/fit-all.ts';
 import type { Chosen } from '../examine/chosen.ts';
 import { examine } from '../examine/examine.ts';
+import { findDependencies } from '../examine/find-dependencies.ts';
+import { standardErrorsOf } from '../examine/infer.ts';
 import type { Design } from '../model/design.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 import { scaleName } from '../model/response-scale.ts';
@@ -112,8 +115,16 @@ export function buildRecord(run: Run): StudyRecord {
       chosen: winner?.name ?? null,
       because: choice.because,
     },
-    model: chosen === null ? null : describeModel(chosen, run.rows, smearingResiduals(chosen)),
-    examination: chosen === null ? null : { findings: examine(chosen), ...rowSummaries(chosen) },
+    model:
+      chosen === null ? null : describeModel(chosen, run.rows, run.fitted.factor, smearingResiduals(chosen)),
+    examination:
+      chosen === null
+        ? null
+        : {
+            findings: examine(chosen),
+            collinearity: findDependencies(chosen, run.fitted),
+            ...rowSummaries(chosen),
+          },
     predictions: (predicted?.predictions ?? []).map((one) => ({
       ...one,
       values: one.values.map((value) => ({ ...value })),
@@ -134,11 +145,23 @@ function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCan
     const { admitted, refusedBecause } = choice.admissions[index]!;
     return {
       name: fit.candidate.name,
+  const covariances = fits.map((fit, index) =>
+    index === choice.chosen && chosen !== null
+      ? chosen.covariance
+      : fitted.covariances === undefined
+        ? classicalCovariance(fit)
+        : fitted.covariances[index]!,
+  );
       terms: fit.candidate.terms.map((term) => term.name),
       scale: scaleName(fit.candidate.response.scale),
       intercept: fit.candidate.intercept,
       ...summarise(index, context),
-      coefficients: coefficientFigures(fit, context.columnNames, study.inference.confidence),
+      coefficients: coefficientFigures(
+        fit,
+        context.columnNames,
+        study.inference.confidence,
+        covariances[index],
+      ),
       dropped: fit.dropped.map(({ column, sentence }) => ({
         column: design.columns[column]!.name,
         sentence,
@@ -173,6 +196,18 @@ function warningsOf({ problems, fitted, chosen, study, predicted }: Run): StudyR
     study.predict.total &&
     chosen !== null &&
     predicted !== null &&
+  if (chosen !== null) {
+    for (const text of standardErrorsOf(chosen).cautions) warnings.push({ about: 'standard errors', text });
+    if (
+      fitted.covariances?.some(
+        (each, index) => each === null && classicalCovariance(fitted.fits[index]!) !== null,
+      )
+    )
+      warnings.push({
+        about: 'standard errors',
+        text: 'The declared standard errors were worked out for the chosen candidate only: for each of the others they need one more pass over the rows.',
+      });
+  }
     predicted.total === null &&
     predicted.predictions.length > 0
   ) {

@@ -1,6 +1,8 @@
+import type { Factor } from '../engine/factor.ts';
 import type { Chosen } from '../examine/chosen.ts';
 import { referenceOf } from '../examine/effects/settings.ts';
 import { curveOf, slopesOf, typicalSteps } from '../examine/effects/term-effects.ts';
+import { infer } from '../examine/infer.ts';
 import type { ModelTerm } from '../model/design.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 import { scaleName } from '../model/response-scale.ts';
@@ -9,7 +11,12 @@ import { generalisedVif, jointF } from '../select/terms.ts';
 import type { RecordModel, RecordTerm } from './record.ts';
 
 /** The chosen model, complete enough to predict from without the data. */
-export function describeModel(chosen: Chosen, rows: DesignRows, smearing: Float64Array | null): RecordModel {
+export function describeModel(
+  chosen: Chosen,
+  rows: DesignRows,
+  factor: Factor,
+  smearing: Float64Array | null,
+): RecordModel {
   const { fit, study, columns } = chosen;
   const p = fit.columns.length;
   const plan = fit.candidate.response;
@@ -21,6 +28,7 @@ export function describeModel(chosen: Chosen, rows: DesignRows, smearing: Float6
   );
   const means = columnMeans(chosen, rows);
   const reference = referenceOf(chosen);
+  const inference = infer(chosen, factor);
   return {
     candidate: fit.candidate.name,
     response: {
@@ -46,6 +54,13 @@ export function describeModel(chosen: Chosen, rows: DesignRows, smearing: Float6
       mean: means[j]!,
     })),
     inverse: Array.from({ length: p }, (_, j) => Array.from(fit.inverse.subarray(j * p, (j + 1) * p))),
+    covariance: inference.covariance,
+    standard_errors: inference.standardErrors,
+    inference: {
+      coefficients: inference.coefficients,
+      simultaneous: inference.simultaneous,
+      hypotheses: inference.hypotheses,
+    },
     smearing: smearing === null ? null : Array.from(smearing),
     largest_leverage: chosen.leverages.reduce((most, h) => Math.max(most, h), 0),
     terms: fit.candidate.terms.map((term): RecordTerm => {
@@ -58,13 +73,14 @@ export function describeModel(chosen: Chosen, rows: DesignRows, smearing: Float6
         columns: term.columns
           .filter((column) => fit.columns.includes(column))
           .map((column) => columns[column]!.name),
-        joint_f: jointF(fit, term),
+        joint_f: jointF(fit, term, chosen.covariance),
         generalised_vif: vif?.value ?? null,
         generalised_vif_per_column: vif?.perColumn ?? null,
         typical_steps: typicalSteps(chosen, term, reference),
         curve: curveOf(chosen, term, reference),
         slopes,
         slopes_omitted: omitted,
+        ...inference.ofTerm(term, reference),
       };
     }),
   };

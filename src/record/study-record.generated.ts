@@ -159,7 +159,7 @@ export interface StudyRecord {
       /**
        * Its kind.
        */
-      kind: 'bad_value' | 'left_out' | 'missing' | 'undefined';
+      kind: 'bad_value' | 'left_out' | 'missing' | 'undefined' | 'held_out';
       /**
        * Rows counted under it.
        */
@@ -220,6 +220,19 @@ export interface StudyRecord {
        * ISO date of the last row used.
        */
       last: string;
+    } | null;
+    /**
+     * The rows used, kept in a file beside the record: one row a line in file order, with its line in the data file, its identity where the study declares one, and the declared variables that the study fits with; dates as days since 1970-01-01, flags as 0 and 1. Null where the study declines it; records of earlier versions have no such key.
+     */
+    sample?: {
+      /**
+       * The file's name.
+       */
+      file: string;
+      /**
+       * SHA-256 of its text, uncompressed: compression may differ between machines.
+       */
+      sha256: string;
     } | null;
     /**
      * Declared and derived variables, in order.
@@ -297,7 +310,15 @@ export interface StudyRecord {
     /**
      * The criterion that ranks.
      */
-    rank_by: 'adjusted_r_squared' | 'aic' | 'aicc' | 'bic' | 'mallows_cp' | 'press' | 'partial_f';
+    rank_by:
+      | 'adjusted_r_squared'
+      | 'aic'
+      | 'aicc'
+      | 'bic'
+      | 'mallows_cp'
+      | 'press'
+      | 'cross_validation'
+      | 'partial_f';
     /**
      * Candidates within this much of the best count as equal; the fewest coefficients win.
      */
@@ -648,7 +669,7 @@ export interface RecordCoefficient {
    */
   estimate: number;
   /**
-   * Its standard error; null where there are no degrees of freedom or the fit is exact; so for the five figures that depend on it.
+   * Its standard error, by the declared covariance; null where there are no degrees of freedom, the fit is exact or it was not worked out for a candidate not chosen; so for the four figures that depend on it.
    */
   standard_error: number | null;
   /**
@@ -656,7 +677,7 @@ export interface RecordCoefficient {
    */
   t: number | null;
   /**
-   * Two-sided p-value of t on the residual degrees of freedom.
+   * Two-sided p-value of t, on the degrees of freedom of the declared standard errors.
    */
   p_value: number | null;
   /**
@@ -796,6 +817,167 @@ export interface RecordModel {
    */
   inverse: number[][];
   /**
+   * The covariance of the estimates by the declared standard errors, p × p and symmetric, row by row in the order of `columns`; null where there is none. Absent from records of versions before it.
+   */
+  covariance?: number[][] | null;
+  /**
+   * Which standard errors the model's coefficients, tests, intervals and predictions rest on. Absent from records of versions before it.
+   */
+  standard_errors?: {
+    /**
+     * Which covariance of the estimates.
+     */
+    kind: 'classical' | 'hc0' | 'hc1' | 'hc2' | 'hc3' | 'hc4' | 'clustered' | 'hac';
+    /**
+     * Its name for people, for example "HC3" or "clustered by vessel".
+     */
+    name: string;
+    /**
+     * What it allows for, where it was published, and which t it goes with.
+     */
+    sentence: string;
+    /**
+     * Degrees of freedom of t and of the denominator of F; null where there are no standard errors.
+     */
+    df: number | null;
+    /**
+     * Number of clusters; null for the other kinds.
+     */
+    clusters: number | null;
+    /**
+     * Number of lags of a HAC covariance; null for the other kinds.
+     */
+    lags: number | null;
+    /**
+     * What to be careful about, as sentences.
+     */
+    cautions: string[];
+  };
+  /**
+   * What the model says exactly, beside estimates and errors. Absent from records of versions before it.
+   */
+  inference?: {
+    /**
+     * One entry for each of `columns`, in their order.
+     *
+     * Items: Measures of one coefficient.
+     */
+    coefficients: {
+      /**
+       * The column's name.
+       */
+      name: string;
+      /**
+       * Coefficient times the column's standard deviation over the response's, on the fitted scale; null for the intercept.
+       */
+      standardised: number | null;
+      /**
+       * Correlation of the column and the response, both without what the other columns explain; null for the intercept and where nothing can be tested.
+       */
+      partial_correlation: number | null;
+      /**
+       * The same with the response as it is: its square is what R² would lose without the column.
+       */
+      semi_partial_correlation: number | null;
+      /**
+       * Lower end of an interval that holds for all coefficients together; null where not asked for.
+       */
+      simultaneous_lower: number | null;
+      /**
+       * Upper end of it.
+       */
+      simultaneous_upper: number | null;
+    }[];
+    /**
+     * How the simultaneous intervals are made; null where not asked for.
+     */
+    simultaneous: {
+      /**
+       * The method.
+       */
+      method: 'bonferroni' | 'scheffe';
+      /**
+       * What each standard error is multiplied by.
+       */
+      multiplier: number;
+      /**
+       * What the intervals hold for.
+       */
+      sentence: string;
+    } | null;
+    /**
+     * Each declared hypothesis, in the order declared.
+     *
+     * Items: One hypothesis.
+     */
+    hypotheses: {
+      /**
+       * The statement as the study words it.
+       */
+      name: string;
+      /**
+       * Its equalities.
+       *
+       * Items: One equality.
+       */
+      equalities: {
+        /**
+         * The sum of multiples of coefficients, for people.
+         */
+        combination: string;
+        /**
+         * The value that it is to have.
+         */
+        equals: number;
+        /**
+         * What the model estimates it at; null where the chosen model lacks one of its coefficients.
+         */
+        estimate: number | null;
+        /**
+         * Its standard error.
+         */
+        standard_error: number | null;
+        /**
+         * Lower end of its interval at the study's confidence.
+         */
+        lower: number | null;
+        /**
+         * Upper end of its interval.
+         */
+        upper: number | null;
+      }[];
+      /**
+       * Estimate less value over standard error, for a single equality; null for several.
+       */
+      t: number | null;
+      /**
+       * F test (Wald) of all its equalities together; null where they cannot be tested.
+       */
+      test: {
+        /**
+         * The F statistic; null where it is not defined.
+         */
+        statistic: number | null;
+        /**
+         * Degrees of freedom of the numerator.
+         */
+        df1: number;
+        /**
+         * Degrees of freedom of the denominator.
+         */
+        df2: number;
+        /**
+         * Upper tail probability of the statistic; null with it.
+         */
+        p_value: number | null;
+      } | null;
+      /**
+       * What the data say of it, as a sentence.
+       */
+      verdict: string;
+    }[];
+  };
+  /**
    * Residuals (sorted; evenly spaced quantiles of them where there are very many) for the mean on the response's own scale (Duan 1983); null on the natural scale.
    */
   smearing: number[] | null;
@@ -932,6 +1114,23 @@ export interface RecordTerm {
      */
     of: string;
     /**
+     * The same in per cent of the response, where it is fitted as a logarithm; null on other scales, or where it is too large.
+     */
+    percent?: {
+      /**
+       * Per cent.
+       */
+      estimate: number;
+      /**
+       * Lower end of its interval at the study's confidence; null where there is no standard error.
+       */
+      lower: number | null;
+      /**
+       * Upper end of its interval.
+       */
+      upper: number | null;
+    } | null;
+    /**
      * Unit of the step; null for a level or where there is none.
      */
     per: string | null;
@@ -948,6 +1147,208 @@ export interface RecordTerm {
      */
     upper: number | null;
   }[];
+  /**
+   * For a category: what the model expects at each level with everything else at its mean, and how levels differ pair by pair, on the fitted scale; null for other terms. Absent from records of versions before it.
+   */
+  level_means?: {
+    /**
+     * The category.
+     */
+    variable: string;
+    /**
+     * Where everything else is held, as a sentence.
+     */
+    held: string;
+    /**
+     * One entry for each level that rows used have, in the category's order.
+     *
+     * Items: One level.
+     */
+    means: {
+      /**
+       * The level.
+       */
+      level: string;
+      /**
+       * Rows used that have it.
+       */
+      rows: number;
+      /**
+       * What the model expects.
+       */
+      estimate: number;
+      /**
+       * Lower end of its interval at the study's confidence; null where there is no standard error.
+       */
+      lower: number | null;
+      /**
+       * Upper end of its interval.
+       */
+      upper: number | null;
+      /**
+       * The same taken back to the response's own scale; null on the natural scale.
+       */
+      own: {
+        /**
+         * Estimate; null beyond the scale.
+         */
+        estimate: number | null;
+        /**
+         * Lower end.
+         */
+        lower: number | null;
+        /**
+         * Upper end.
+         */
+        upper: number | null;
+      } | null;
+    }[];
+    /**
+     * Pairs of levels; null where they are not to be compared or nothing can be tested.
+     */
+    comparisons: {
+      /**
+       * How p-values are adjusted for the number of pairs.
+       */
+      method: 'holm' | 'tukey_kramer';
+      /**
+       * What the p-values and intervals hold for.
+       */
+      sentence: string;
+      /**
+       * Every pair.
+       *
+       * Items: One pair.
+       */
+      pairs: {
+        /**
+         * The level.
+         */
+        level: string;
+        /**
+         * The level that it is compared with.
+         */
+        other: string;
+        /**
+         * Mean of the level less that of the other.
+         */
+        estimate: number;
+        /**
+         * Its standard error.
+         */
+        standard_error: number;
+        /**
+         * Lower end of its interval at the study's confidence.
+         */
+        lower: number;
+        /**
+         * Upper end of its interval.
+         */
+        upper: number;
+        /**
+         * Two-sided p-value of this pair alone.
+         */
+        p_value: number;
+        /**
+         * p-value adjusted for the number of pairs.
+         */
+        adjusted_p_value: number;
+      }[];
+      /**
+       * Why pairs are not listed, as a sentence; null where all are.
+       */
+      omitted: string | null;
+    } | null;
+  } | null;
+  /**
+   * For a term that bends (a polynomial, power, bend or spline): how steep the relationship with its variable is at some places; null for other terms. Absent from records of versions before it.
+   */
+  slopes_along?: {
+    /**
+     * The variable.
+     */
+    variable: string;
+    /**
+     * Whether the study declares the places; else they are the quartiles.
+     */
+    declared: boolean;
+    /**
+     * One entry for each place, ascending.
+     *
+     * Items: One place.
+     */
+    places: {
+      /**
+       * Value of the variable.
+       */
+      at: number;
+      /**
+       * Slope there, on the fitted scale, the other variables at their reference.
+       */
+      estimate: number;
+      /**
+       * Lower end of its interval at the study's confidence; null where there is no standard error.
+       */
+      lower: number | null;
+      /**
+       * Upper end of its interval.
+       */
+      upper: number | null;
+      /**
+       * The same in per cent of the response, where it is fitted as a logarithm; null on other scales, or where it is too large.
+       */
+      percent: {
+        /**
+         * Per cent.
+         */
+        estimate: number;
+        /**
+         * Lower end of its interval at the study's confidence; null where there is no standard error.
+         */
+        lower: number | null;
+        /**
+         * Upper end of its interval.
+         */
+        upper: number | null;
+      } | null;
+    }[];
+  } | null;
+  /**
+   * What the term says of the response on its own scale, where the coefficient does not say it: per cent, an elasticity, a difference per doubling, or the difference that typical steps make; null for the rest. Absent from records of versions before it.
+   */
+  own_scale?: {
+    /**
+     * What the figures are.
+     */
+    kind: 'percent' | 'elasticity' | 'per_doubling' | 'difference';
+    /**
+     * What they are and where they hold, as a sentence.
+     */
+    sentence: string;
+    /**
+     * One entry for each step.
+     *
+     * Items: One effect.
+     */
+    effects: {
+      /**
+       * The step, for people.
+       */
+      of: string;
+      /**
+       * The effect.
+       */
+      estimate: number;
+      /**
+       * Lower end of its interval at the study's confidence; null where there is no standard error.
+       */
+      lower: number | null;
+      /**
+       * Upper end of its interval.
+       */
+      upper: number | null;
+    }[];
+  } | null;
   /**
    * How many further slopes there are where an interaction has more than forty; else 0.
    */
@@ -996,6 +1397,99 @@ export interface RecordExamination {
      */
     cooks_distance: number | null;
   }[];
+  /**
+   * How far the columns of the chosen model can be told apart (Belsley, Kuh & Welsch 1980). Absent from records of versions before it.
+   */
+  collinearity?: {
+    /**
+     * Names of the columns, in the order of each row of proportions.
+     */
+    columns: string[];
+    /**
+     * Condition indices, ascending: columns scaled to unit length, not centred; the largest singular value over each.
+     */
+    indices: number[];
+    /**
+     * For each index, the share of each coefficient's variance that goes with it; the shares of a coefficient add up to 1.
+     */
+    proportions: number[][];
+    /**
+     * Indices above 30 with two or more proportions above 0.5, most serious first.
+     *
+     * Items: One near dependency.
+     */
+    dependencies: {
+      /**
+       * Its condition index.
+       */
+      index: number;
+      /**
+       * The columns that carry it.
+       *
+       * Items: One column.
+       */
+      columns: {
+        /**
+         * Its name.
+         */
+        name: string;
+        /**
+         * Its proportion.
+         */
+        proportion: number;
+      }[];
+      /**
+       * Whether they are made of one variable and so go together.
+       */
+      by_construction: boolean;
+      /**
+       * Which columns carry it and what that means.
+       */
+      sentence: string;
+      /**
+       * What the other coefficients become when one of the columns is left out of the model.
+       *
+       * Items: The model without one column.
+       */
+      without: {
+        /**
+         * The column left out.
+         */
+        left_out: string;
+        /**
+         * Residual standard error without it.
+         */
+        residual_standard_error: number | null;
+        /**
+         * The columns that carry the dependency with it.
+         *
+         * Items: One coefficient.
+         */
+        coefficients: {
+          /**
+           * Its column.
+           */
+          name: string;
+          /**
+           * Its estimate in the chosen model.
+           */
+          estimate: number;
+          /**
+           * Its classical standard error there.
+           */
+          standard_error: number | null;
+          /**
+           * Its estimate without the column left out.
+           */
+          estimate_without: number;
+          /**
+           * Its classical standard error then.
+           */
+          standard_error_without: number | null;
+        }[];
+      }[];
+    }[];
+  };
   /**
    * Counts over all rows used.
    */

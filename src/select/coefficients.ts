@@ -1,6 +1,6 @@
+import { type Covariance, classicalCovariance, coefficientError } from '../engine/covariance.ts';
 import type { Fit } from '../engine/fit.ts';
 import { tTwoSided, tTwoSidedQuantile } from '../stats/distributions.ts';
-import { testable } from './f-test.ts';
 import { predictorCount } from './terms.ts';
 
 /** One coefficient, spelled as the record has it. */
@@ -20,21 +20,20 @@ export interface CoefficientFigures {
 }
 
 /**
- * Estimates with classical standard errors √(s² (X′WX)⁻¹_jj), t on n − p, two-sided p-values and intervals, in
- * the order of the kept columns.
+ * Estimates with standard errors √V_jj, t on the covariance's degrees of freedom (n − p for the classical one),
+ * two-sided p-values and intervals, in the order of the kept columns.
  * @param columnNames by union column
  * @param confidence of the intervals, between 0 and 1
+ * @param covariance null where there is none: nothing is then said of the errors
  */
 export function coefficientFigures(
   fit: Fit,
   columnNames: readonly string[],
   confidence: number,
+  covariance: Covariance | null = classicalCovariance(fit),
 ): CoefficientFigures[] {
-  const p = fit.columns.length;
-  const df = fit.degreesOfFreedom;
-  const canTest = testable(fit);
-  const variance = canTest ? fit.residualSumOfSquares / df : 0;
-  const reach = canTest ? tTwoSidedQuantile(1 - confidence, df) : 0;
+  const df = covariance?.df ?? 0;
+  const reach = covariance === null ? 0 : tTwoSidedQuantile(1 - confidence, df);
   const inflated = predictorCount(fit) >= 2;
   return fit.columns.map((column, j) => {
     const estimate = fit.estimates[j]!;
@@ -45,7 +44,7 @@ export function coefficientFigures(
       estimate,
       vif: inflated && Number.isFinite(vif) ? vif : null,
     };
-    const error = Math.sqrt(fit.inverse[j * p + j]! * variance);
+    const error = covariance === null ? 0 : coefficientError(covariance, j);
     // An error of 0 is one too small to be held: nothing can be said of it either.
     if (!(error > 0) || !Number.isFinite(error))
       return { ...known, standard_error: null, t: null, p_value: null, lower: null, upper: null };

@@ -1,7 +1,9 @@
 import { Matrix, QrDecomposition } from 'ml-matrix';
+import { type Covariance, classicalCovariance } from '../engine/covariance.ts';
 import type { Fit } from '../engine/fit.ts';
 import type { ModelTerm } from '../model/design.ts';
-import { type FTest, fTest, testable } from './f-test.ts';
+import type { FTest } from './f-test.ts';
+import { waldTest } from './wald-test.ts';
 
 type TermColumns = Pick<ModelTerm, 'columns'>;
 
@@ -22,32 +24,24 @@ export function keptPositions(fit: Fit, term: TermColumns): number[] {
 }
 
 /**
- * F test of all kept columns of a term together, in Wald's form b₁′ V₁₁⁻¹ b₁/(q s²), which for least squares
- * equals the partial F against the model without them (Wald 1943). Null where
- * nothing can be tested: no column kept, no degrees of freedom, an exact fit.
+ * F test of all kept columns of a term together, in Wald's form b₁′ V₁₁⁻¹ b₁/q, which for least squares with
+ * the classical covariance equals the partial F against the model without them (Wald 1943). Null where
+ * nothing can be tested: no column kept, no degrees of freedom, an exact fit, or more columns than the covariance
+ * can tell apart (as many clusters, or more).
  */
-export function jointF(fit: Fit, term: TermColumns): FTest | null {
+export function jointF(
+  fit: Fit,
+  term: TermColumns,
+  covariance: Covariance | null = classicalCovariance(fit),
+): FTest | null {
   const at = keptPositions(fit, term);
-  const q = at.length;
-  if (q === 0 || !testable(fit)) return null;
-  const variance = fit.residualSumOfSquares / fit.degreesOfFreedom;
-  if (q === 1) {
-    const j = at[0]!;
-    const ratio = fit.estimates[j]! / Math.sqrt(fit.inverse[j * fit.columns.length + j]! * variance);
-    return fTest(ratio * ratio, 1, fit.degreesOfFreedom);
-  }
-  // V₁₁ = M M′ with M the term's rows of R⁻¹, so M′ = Q T gives V₁₁ = T′T, and V₁₁ itself is never formed.
-  const { rows, lengths } = inverseRows(fit, at);
-  const triangle = new QrDecomposition(rows).upperTriangularMatrix;
-  const z = new Float64Array(q);
-  let sum = 0;
-  for (let i = 0; i < q; i++) {
-    let value = fit.estimates[at[i]!]! / lengths[i]!;
-    for (let k = 0; k < i; k++) value -= triangle.get(k, i) * z[k]!;
-    z[i] = value / triangle.get(i, i);
-    sum += z[i]! * z[i]!;
-  }
-  return fTest(sum / (q * variance), q, fit.degreesOfFreedom);
+  if (at.length === 0 || covariance === null) return null;
+  const p = fit.columns.length;
+  return waldTest(
+    covariance,
+    at.map((j) => Float64Array.from({ length: p }, (_, k) => (k === j ? 1 : 0))),
+    at.map((j) => fit.estimates[j]!),
+  );
 }
 
 /**

@@ -7,6 +7,7 @@ import { resolveDerivations } from './resolve-derivations.ts';
 import { checkText, parseText, untypedUses } from './resolve-expression.ts';
 import { resolvePredict } from './resolve-predict.ts';
 import { resolveResponse, resolveRowRoles, resolveWeights } from './resolve-roles.ts';
+import { resolveInference } from './resolve-inference.ts';
 import { resolveAcceptance, resolveSelection } from './resolve-selection.ts';
 import { termVariables } from './resolve-terms.ts';
 import { dataMissing, resolveVariables } from './resolve-variables.ts';
@@ -45,6 +46,7 @@ export function resolveStudy(reading: Reading, origin: StudyOrigin): Study | nul
   const predict = resolvePredict(reading, {
     variables,
     names,
+  const inference = resolveInference(reading, names, roles.time, inTerms);
     needed: variables.map(({ name }) => name).filter((name) => rests.has(name)),
     allowed: weights === null ? new Set() : derivedFrom(weights),
     derivedFrom,
@@ -70,7 +72,8 @@ export function resolveStudy(reading: Reading, origin: StudyOrigin): Study | nul
     weights,
     candidates,
     selection,
-    inference: inferencePlan(reading),
+    inference,
+    examination,
     predict,
     acceptance,
     report,
@@ -116,7 +119,14 @@ function usedNames(
   const start = [...inConditions, file.weights, file.data?.time, file.data?.row_id].filter(
     (name) => typeof name === 'string',
   );
-  for (const value of [file.response, ...(file.candidates ?? []).map((candidate) => candidate?.terms)]) {
+  for (const value of [
+    file.response,
+    file.inference?.standard_errors,
+    file.selection?.validation?.group,
+    file.selection?.honest_error?.group,
+    file.selection?.stability?.group,
+    ...(file.candidates ?? []).map((candidate) => candidate?.terms),
+  ]) {
     start.push(...textsIn(value));
   }
   return withEverythingRead(start, reads);
@@ -166,14 +176,6 @@ function dataPlan(
     time: roles.time,
     variables,
     onBadValue: reading.file.data?.on_bad_value ?? STUDY_DEFAULTS['data.on_bad_value'],
-  };
-}
-
-function inferencePlan(reading: Reading): InferencePlan {
-  const written = reading.file.inference;
-  return {
-    confidence: written?.confidence ?? STUDY_DEFAULTS['inference.confidence'],
-    dependentColumns: written?.dependent_columns ?? STUDY_DEFAULTS['inference.dependent_columns'],
   };
 }
 

@@ -158,6 +158,8 @@ function translate(error: ErrorObject, path: Path, written: Written): SchemaFaul
 export const EXPECTED: Readonly<Record<string, string>> = {
   scaled_response: "a variable's name or { variable: …, scale: … }",
   box_cox: 'natural, log, sqrt, reciprocal or { box_cox: … }',
+  'clustered hac': 'classical, hc0, hc1, hc2, hc3, hc4, { clustered_by: … } or { hac_lags: … }',
+  'single_hypothesis joint_hypothesis': '{ name: …, combination: …, equals: … } or { name: …, all_of: […] }',
   'interaction polynomial power bend spline':
     "a variable's name or one of { interaction: […] }, { polynomial: …, degree: … }, { power: …, to: … }, { bend: …, at: … }, { spline: …, knots: […] }",
   'polynomial power bend spline':
@@ -172,7 +174,9 @@ export function unionKey(schema: { readonly anyOf?: readonly { readonly $ref?: s
 
 function nearForm(data: unknown, form: string): string | undefined {
   const names = [...form.matchAll(/\{ (\w+):/g)].map((found) => found[1]!);
-  const words = form.startsWith('natural') ? [...names, 'natural', 'log', 'sqrt', 'reciprocal'] : names;
+  // Words that stand for themselves come first in such a form: "natural, log, sqrt, reciprocal or { … }".
+  const plain = form.startsWith('a ') ? [] : (form.split(/ or |\{/)[0]!.match(/\w+/g) ?? []);
+  const words = [...names, ...plain];
   const keys =
     typeof data === 'string' ? [data] : typeof data === 'object' && data !== null ? Object.keys(data) : [];
   for (const key of keys) {

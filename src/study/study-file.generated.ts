@@ -17,6 +17,15 @@ export type TermInFile =
  * A member of an interaction: a variable's name or a term form other than an interaction.
  */
 export type MemberInFile = string | PolynomialInFile | PowerInFile | BendInFile | SplineInFile;
+/**
+ * The name of a covariance of the estimates, or one of the forms with a setting of its own.
+ */
+export type StandardErrorsInFile =
+  ('classical' | 'hc0' | 'hc1' | 'hc2' | 'hc3' | 'hc4') | ClusteredInFile | HacInFile;
+/**
+ * One equality, or several at once, under a name.
+ */
+export type HypothesisInFile = SingleHypothesisInFile | JointHypothesisInFile;
 
 /**
  * A declared multiple-regression study: the question, the data and its contract, the candidates, the rule that chooses among them, and what is expected of the chosen model.
@@ -120,9 +129,17 @@ export interface StudyFile {
    */
   selection?: {
     /**
-     * The criterion that ranks the candidates. Where candidates have different response scales, only aic, aicc and bic can rank them.
+     * The criterion that ranks the candidates. Where candidates have different response scales, only aic, aicc, bic and cross_validation can rank them.
      */
-    rank_by?: 'adjusted_r_squared' | 'aic' | 'aicc' | 'bic' | 'mallows_cp' | 'press' | 'partial_f';
+    rank_by?:
+      | 'adjusted_r_squared'
+      | 'aic'
+      | 'aicc'
+      | 'bic'
+      | 'mallows_cp'
+      | 'press'
+      | 'cross_validation'
+      | 'partial_f';
     /**
      * Among admitted candidates whose value is this close to the best, the one with the fewest coefficients is chosen. In units of the criterion.
      */
@@ -131,6 +148,139 @@ export interface StudyFile {
      * The level at which a partial F-test counts as an improvement when rank_by is partial_f.
      */
     significance?: number;
+    /**
+     * Among admitted candidates whose cross-validated error is within one standard error of the best, the one with the fewest coefficients is chosen. Only where rank_by is cross_validation, in place of prefer_smaller_within.
+     */
+    one_standard_error?: boolean;
+    /**
+     * How every candidate is held against rows that it was not fitted on (cross-validation). Null: not at all, but where rank_by is cross_validation with everything left out.
+     */
+    validation?: {
+      /**
+       * What is held out: rows drawn at random; groups of rows that belong together; the rows of the times that follow, predicted from all before them (a rolling origin); or one row at a time. Rows where left out.
+       */
+      by?: 'rows' | 'group' | 'time' | 'leave_one_out';
+      /**
+       * How many parts the rows or the groups are drawn into; each part is held out in turn. Where left out: 10, or one for each row or group where there are fewer.
+       */
+      folds?: number;
+      /**
+       * How often the parts are drawn anew; the figures are averaged over all. 1 where left out.
+       */
+      repeats?: number;
+      /**
+       * Where the random numbers start: the same seed draws the same parts on every machine; 1 where left out.
+       */
+      seed?: number;
+      /**
+       * The variable whose values are the groups, where by is group: rows of one group are held out together.
+       */
+      group?: string;
+      /**
+       * How many of the earliest times are never held out, where by is time, counted in distinct values of data.time; half of them where left out.
+       */
+      start?: number;
+      /**
+       * How many times ahead are predicted from each origin, where by is time, counted in distinct values of data.time; 1 where left out. The next origin lies as many times later.
+       */
+      horizon?: number;
+    } | null;
+    /**
+     * The error of the whole procedure: the choice is made again without each part of the rows, and what it chooses is held against that part (nested cross-validation). Null: not worked out.
+     */
+    honest_error?: {
+      /**
+       * What is held out: rows drawn at random; groups of rows that belong together; or the rows of the times that follow, predicted from all before them. Rows where left out.
+       */
+      by?: 'rows' | 'group' | 'time';
+      /**
+       * How many parts the rows or the groups are drawn into; each part is held out in turn. Where left out: 10, or one for each row or group where there are fewer.
+       */
+      folds?: number;
+      /**
+       * How often the parts are drawn anew; the figures are averaged over all. 1 where left out.
+       */
+      repeats?: number;
+      /**
+       * Where the random numbers start: the same seed draws the same parts on every machine; 1 where left out.
+       */
+      seed?: number;
+      /**
+       * The variable whose values are the groups, where by is group: rows of one group are held out together.
+       */
+      group?: string;
+      /**
+       * How many of the earliest times are never held out, where by is time, counted in distinct values of data.time; half of them where left out.
+       */
+      start?: number;
+      /**
+       * How many times ahead are predicted from each origin, where by is time, counted in distinct values of data.time; 1 where left out. The next origin lies as many times later.
+       */
+      horizon?: number;
+    } | null;
+    /**
+     * Rows set aside before anything is fitted, on which the chosen model is tried once. One of share, last and where. Null: none.
+     */
+    hold_out?: {
+      /**
+       * The share of the rows that is drawn at random and set aside.
+       */
+      share?: number;
+      /**
+       * Where the random numbers start: the same seed draws the same rows on every machine; 1 where left out.
+       */
+      seed?: number;
+      /**
+       * How many of the latest rows are set aside, in the order of data.time.
+       */
+      last?: number;
+      /**
+       * A condition: the rows for which it holds are set aside.
+       */
+      where?: string;
+    } | null;
+    /**
+     * Choosing on one part of the rows and estimating the chosen model on the other, so that its p-values and intervals owe nothing to the choice. Null: not split.
+     */
+    split_sample?: {
+      /**
+       * The share of the rows that the choice is made on; the others are for estimating. 0.5 where left out.
+       */
+      share?: number;
+      /**
+       * Where the random numbers start: the same seed draws the same rows on every machine; 1 where left out.
+       */
+      seed?: number;
+    } | null;
+    /**
+     * How often the same candidate would be chosen from rows drawn anew with replacement (bootstrap). Null: not worked out.
+     */
+    stability?: {
+      /**
+       * How often the rows are drawn and the choice is made again; 500 where left out.
+       */
+      repetitions?: number;
+      /**
+       * Where the random numbers start: the same seed draws the same rows on every machine; 1 where left out.
+       */
+      seed?: number;
+      /**
+       * What is drawn: rows; groups of rows that belong together; or blocks of rows that follow one another in time. Rows where left out.
+       */
+      by?: 'rows' | 'group' | 'blocks';
+      /**
+       * The variable whose values are the groups, where by is group.
+       */
+      group?: string;
+      /**
+       * Rows in a block, where blocks are drawn; the cube root of the number of rows, rounded up, where left out.
+       */
+      block_length?: number;
+    } | null;
+    /**
+     * Whether coefficients and predictions are also averaged over all admitted candidates, each by its weight of evidence. Only where rank_by is aic, aicc or bic, on one response scale.
+     */
+    average?: boolean;
     /**
      * Rules that a candidate must keep to be chosen. One that breaks a rule is shown with the reason. No rule applies unless it is written.
      */
@@ -194,6 +344,74 @@ export interface StudyFile {
      * What happens when a column of a candidate depends exactly on earlier ones: drop it with a warning, or stop.
      */
     dependent_columns?: 'drop' | 'stop';
+    standard_errors?: StandardErrorsInFile;
+    /**
+     * Statements about the chosen model's coefficients to be tested: a sum of multiples of named coefficients equals a value, or several such equalities hold at once.
+     */
+    hypotheses?: HypothesisInFile[];
+    /**
+     * How the levels of a category are compared pair by pair: with p-values adjusted for the number of pairs by Holm's steps, by the studentised range (Tukey–Kramer), or not at all.
+     */
+    level_comparisons?: 'holm' | 'tukey_kramer' | 'none';
+    /**
+     * Whether to give, beside each coefficient's own interval, one that holds for all coefficients together, and by which method.
+     */
+    simultaneous?: 'none' | 'bonferroni' | 'scheffe';
+    /**
+     * Values of a variable at which the slopes of its curve, and of interactions with it, are given. Left out: its quartiles.
+     */
+    slopes_at?: {
+      /**
+       * The values.
+       *
+       * @minItems 1
+       * @maxItems 50
+       */
+      [k: string]: number[];
+    };
+  };
+  /**
+   * How closely the chosen model is examined, beyond what every examination does.
+   */
+  examination?: {
+    /**
+     * How many rows back the test for related neighbours in time looks. Null: 12 where the times are months, 4 where quarters, 7 where days, else 1; 1 where there are too few rows for more.
+     */
+    lags?: number | null;
+    /**
+     * Where the rows are split in two to see whether one set of coefficients holds for both. Null: not split.
+     */
+    split_at?: {
+      /**
+       * The variable that splits the rows: a number, an integer, a date or a flag, declared or derived.
+       */
+      variable: string;
+      /**
+       * Rows with this value or a greater one form the second part. Of a flag it is true.
+       */
+      value: number | string | boolean;
+    } | null;
+    /**
+     * Intervals for coefficients and stated predictions by drawing from the rows themselves, which need no assumption on how the errors are distributed. Null: none.
+     */
+    bootstrap?: {
+      /**
+       * How often the rows are drawn and the model fitted again; 999 where left out.
+       */
+      repetitions?: number;
+      /**
+       * Where the random numbers start: the same seed gives the same intervals on every machine; 1 where left out.
+       */
+      seed?: number;
+      /**
+       * What is drawn: whole rows; residuals, with the rows' predictors as they are; or blocks of rows that follow one another in time. Rows where left out.
+       */
+      by?: 'rows' | 'residuals' | 'blocks';
+      /**
+       * Rows in a block, where blocks are drawn; the cube root of the number of rows, rounded up, where left out.
+       */
+      block_length?: number;
+    } | null;
   };
   /**
    * What the chosen model is to predict.
@@ -255,6 +473,10 @@ export interface StudyFile {
        */
       markdown?: string | null;
     };
+    /**
+     * Whether the rows used are kept beside the record (sample.csv.gz), so that a later run can be compared with this one row by row.
+     */
+    keep_sample?: boolean;
     /**
      * A sentence of your own among the cautions of the report: the local code, or who must review. Null: none.
      */
@@ -448,6 +670,73 @@ export interface SplineInFile {
    * @maxItems 50
    */
   knots: number[];
+}
+/**
+ * Rows of one cluster may have errors that go together; clusters are independent of each other.
+ */
+export interface ClusteredInFile {
+  /**
+   * The variable that names the cluster of a row: a category, an identifier, a text, an integer, a date or a derived number. A row without a value is not used.
+   */
+  clustered_by: string;
+}
+/**
+ * Consistent under unequal spread and under errors that go together over a number of rows in time order; needs data.time.
+ */
+export interface HacInFile {
+  /**
+   * The number of lags, or auto for the whole part of 4 (n/100)^(2/9).
+   */
+  hac_lags: number | string;
+}
+/**
+ * One equality.
+ */
+export interface SingleHypothesisInFile {
+  /**
+   * The statement in words, as reports show it.
+   */
+  name: string;
+  combination: CombinationInFile;
+  /**
+   * The value that their sum is to have.
+   */
+  equals?: number;
+}
+/**
+ * Multipliers by the names of coefficients, as the report lists them; the sum of multiplier times coefficient is meant.
+ */
+export interface CombinationInFile {
+  /**
+   * The multiplier of the coefficient.
+   */
+  [k: string]: number;
+}
+/**
+ * Several equalities that hold at once.
+ */
+export interface JointHypothesisInFile {
+  /**
+   * The statement in words, as reports show it.
+   */
+  name: string;
+  /**
+   * The equalities.
+   *
+   * @minItems 1
+   * @maxItems 100
+   */
+  all_of: EqualityInFile[];
+}
+/**
+ * One equality of a joint hypothesis.
+ */
+export interface EqualityInFile {
+  combination: CombinationInFile;
+  /**
+   * The value that their sum is to have.
+   */
+  equals?: number;
 }
 /**
  * One row to predict: its label, and a value for every variable that a candidate needs.

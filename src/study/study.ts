@@ -208,3 +208,59 @@ export interface ReportPlan {
   /** A sentence of the analyst's own for the cautions (the local code, who must review), or null. */
   readonly caution: string | null;
 }
+  readonly standardErrors: StandardErrorsPlan;
+  readonly hypotheses: readonly HypothesisPlan[];
+  /** How levels of a category are compared pair by pair. */
+  readonly levelComparisons: 'holm' | 'tukey_kramer' | 'none';
+  /** Intervals that hold for all coefficients together, beside each one's own. */
+  readonly simultaneous: 'none' | 'bonferroni' | 'scheffe';
+  /** Values at which slopes are given, by variable, ascending, each once; quartiles for the rest. */
+  readonly slopesAt: ReadonlyMap<string, readonly number[]>;
+}
+
+/** Which covariance of the estimates is meant. */
+export type StandardErrorsPlan =
+  | { readonly kind: 'classical' | HeteroscedasticKind }
+  | { readonly kind: 'clustered'; readonly by: string }
+  | { readonly kind: 'hac'; readonly lags: number | 'auto' };
+
+export type HeteroscedasticKind = 'hc0' | 'hc1' | 'hc2' | 'hc3' | 'hc4';
+
+/** Equalities about coefficients of the chosen model that are tested at once. */
+export interface HypothesisPlan {
+  readonly name: string;
+  /** One or more; more than one are tested jointly. */
+  readonly equalities: readonly EqualityPlan[];
+}
+
+/** Σ multiplier · coefficient = value. */
+export interface EqualityPlan {
+  /** Multipliers by name of coefficient, in the order written; not all zero. */
+  readonly combination: ReadonlyMap<string, number>;
+  readonly equals: number;
+  /** Path in the study file, for places of problems. */
+  readonly path: readonly (string | number)[];
+}
+
+export interface ExaminationPlan {
+  /** How many rows back in time neighbours are compared; null: found from the times. */
+  readonly lags: number | null;
+  /** Rows whose value is this or greater form the second part; null: not split. */
+  readonly splitAt: SplitPlan | null;
+  readonly bootstrap: BootstrapPlan | null;
+}
+
+export interface SplitPlan {
+  readonly variable: string;
+  /** As the column holds it: a number, days of a date, 1 of a flag. */
+  readonly value: number;
+  /** As it was written. */
+  readonly text: string;
+}
+
+export interface BootstrapPlan {
+  readonly repetitions: number;
+  readonly seed: number;
+  readonly by: 'rows' | 'residuals' | 'blocks';
+  /** Rows in a block; null: from the number of rows, or where blocks are not drawn. */
+  readonly blockLength: number | null;

@@ -82,7 +82,50 @@ describe('a sound study', () => {
         adjustedRSquared: { atLeast: 0.5 },
       },
     });
-    expect(study!.inference).toEqual({ confidence: 0.9, dependentColumns: 'stop' });
+    expect(study!.inference).toEqual({
+      confidence: 0.9,
+      dependentColumns: 'stop',
+      standardErrors: { kind: 'clustered', by: 'vessel' },
+      hypotheses: [
+        {
+          name: 'Tern carries as cheaply',
+          equalities: [
+            {
+              combination: new Map([['cargo × vessel Tern', 1]]),
+              equals: 0,
+              path: ['inference', 'hypotheses', 0],
+            },
+          ],
+        },
+        {
+          name: 'Ships alike',
+          equalities: [
+            {
+              combination: new Map([
+                ['vessel Skerry', 1],
+                ['vessel Holm', -1],
+              ]),
+              equals: 2.5,
+              path: ['inference', 'hypotheses', 1, 'all_of', 0],
+            },
+            {
+              combination: new Map([['vessel Holm', 1]]),
+              equals: 0,
+              path: ['inference', 'hypotheses', 1, 'all_of', 1],
+            },
+          ],
+        },
+      ],
+      levelComparisons: 'tukey_kramer',
+      simultaneous: 'scheffe',
+      slopesAt: new Map([['headwind', [-5, 0, 5]]]),
+    });
+    expect(study!.examination).toEqual({
+      lags: 3,
+      // Days from 1970-01-01 to 2024-03-01.
+      splitAt: { variable: 'departed', value: 19783, text: '2024-03-01' },
+      bootstrap: { repetitions: 499, seed: 7, by: 'blocks', blockLength: 12 },
+    });
     expect(study!.predict).toMatchObject({ file: 'timetable.csv', interval: 0.8, total: true });
     expect([...study!.predict.rows[0]!.values]).toEqual([
       ['cargo', 80],
@@ -137,6 +180,12 @@ describe('settings', () => {
           ['selection.significance', '0.05'],
           ['inference.confidence', '0.95'],
           ['inference.dependent_columns', 'drop'],
+          ['inference.standard_errors', 'classical'],
+          ['inference.level_comparisons', 'holm'],
+          ['inference.simultaneous', 'none'],
+          ['examination.lags', 'found from the data'],
+          ['examination.split_at', 'none'],
+          ['examination.bootstrap', 'none'],
           ['predict.file', 'none'],
           ['predict.interval', '0.9'],
           ['predict.total', 'false'],
@@ -174,7 +223,16 @@ describe('settings', () => {
     });
     expect(study.data.format).toEqual({ delimiter: null, decimalMark: '.', encoding: null });
     expect(study.selection).toMatchObject({ rankBy: 'aicc', preferSmallerWithin: 0, significance: 0.05 });
-    expect(study.inference).toEqual({ confidence: 0.95, dependentColumns: 'drop' });
+    expect(study.inference).toEqual({
+      confidence: 0.95,
+      dependentColumns: 'drop',
+      standardErrors: { kind: 'classical' },
+      hypotheses: [],
+      levelComparisons: 'holm',
+      simultaneous: 'none',
+      slopesAt: new Map(),
+    });
+    expect(study.examination).toEqual({ lags: null, splitAt: null, bootstrap: null });
     expect(study.predict).toEqual({ rows: [], file: null, interval: 0.9, total: false });
     expect(study.report.formats).toEqual(['html', 'markdown']);
   });

@@ -58,7 +58,24 @@ selection:
     signs: { cargo: positive }
     rows_per_coefficient: { at_least: 10 }
     adjusted_r_squared: { at_least: 0.5 }
-inference: { confidence: 0.9, dependent_columns: stop }
+inference:
+  confidence: 0.9
+  dependent_columns: stop
+  standard_errors: { clustered_by: vessel }
+  hypotheses:
+    - name: Tern carries as cheaply
+      combination: { "cargo × vessel Tern": 1 }
+    - name: Ships alike
+      all_of:
+        - { combination: { vessel Skerry: 1, vessel Holm: -1 }, equals: 2.5 }
+        - { combination: { vessel Holm: 1 } }
+  level_comparisons: tukey_kramer
+  simultaneous: scheffe
+  slopes_at: { headwind: [5, -5, 0, 5] }
+examination:
+  lags: 3
+  split_at: { variable: departed, value: 2024-03-01 }
+  bootstrap: { repetitions: 499, seed: 7, by: blocks, block_length: 12 }
 predict:
   rows:
     - { label: "Loaded, slow", cargo: 80, speed: 9, headwind: 4, hull_days: 30, vessel: Tern, night: day }

@@ -1,4 +1,5 @@
 import type { CategoryColumn, Column } from '../../data/table.ts';
+import { type Covariance, errorOf } from '../../engine/covariance.ts';
 import { baselineOf, presentLevels } from '../../model/build-design.ts';
 import { designRows } from '../../model/design-rows.ts';
 import type { Spread } from '../../prepare/spread.ts';
@@ -65,24 +66,35 @@ export function moved(setting: Setting, changes: Readonly<Record<string, number 
 
 /**
  * The effect of moving from one setting to another, for each pair: c′b with c the difference of the two rows
- * of the design, and its confidence interval from s² c′(X′WX)⁻¹c on n − p.
+ * of the design, and its confidence interval.
  */
 export function effectsBetween(chosen: Chosen, pairs: readonly (readonly [Setting, Setting])[]): Effect[] {
-  const { fit, s } = chosen;
-  const p = fit.columns.length;
+  const p = chosen.fit.columns.length;
   const at = designAt(chosen, pairs.flat());
-  const t = s === null ? 0 : tTwoSidedQuantile(1 - chosen.study.inference.confidence, fit.degreesOfFreedom);
+  const effectOf = effects(chosen);
   const contrast = new Float64Array(p);
   return pairs.map((_, k) => {
-    let estimate = 0;
-    for (let j = 0; j < p; j++) {
+    for (let j = 0; j < p; j++)
       contrast[j] = at[j * pairs.length * 2 + 2 * k + 1]! - at[j * pairs.length * 2 + 2 * k]!;
-      estimate += contrast[j]! * fit.estimates[j]!;
-    }
-    if (s === null) return { estimate, lower: null, upper: null };
-    const half = t * s * rootForm(fit.rootInverse, p, contrast);
-    return { estimate, lower: estimate - half, upper: estimate + half };
+    return effectOf(contrast);
   });
+}
+
+/** The effect c′b of a contrast c with its confidence interval c′b ± t √(c′Vc), V the declared covariance. */
+export function effects(chosen: Chosen): (contrast: Float64Array) => Effect {
+  const { fit, covariance } = chosen;
+  const t = reachOf(chosen, covariance);
+  return (contrast) => {
+    let estimate = 0;
+    for (let j = 0; j < contrast.length; j++) estimate += contrast[j]! * fit.estimates[j]!;
+    if (covariance === null) return { estimate, lower: null, upper: null };
+    const half = t * errorOf(covariance, contrast);
+    return { estimate, lower: estimate - half, upper: estimate + half };
+  };
+}
+
+function reachOf(chosen: Chosen, covariance: Covariance | null): number {
+  return covariance === null ? 0 : tTwoSidedQuantile(1 - chosen.study.inference.confidence, covariance.df);
 }
 
 /** √(c′(X′WX)⁻¹c) = ‖c′R⁻¹‖. */
@@ -97,7 +109,7 @@ export function rootForm(rootInverse: Float64Array, p: number, c: Float64Array):
 }
 
 /** The chosen model's design columns at the settings: settings × p, column-major. */
-function designAt(chosen: Chosen, settings: readonly Setting[]): Float64Array {
+export function designAt(chosen: Chosen, settings: readonly Setting[]): Float64Array {
   const { fit, columns, sample } = chosen;
   const source = new Map<string, Column>();
   for (const name of settings[0]?.keys() ?? []) {

@@ -1,8 +1,12 @@
 import type { ModelTerm } from '../../model/design.ts';
 import { termVariables } from '../../prepare/needed-variables.ts';
+import type { Spread } from '../../prepare/spread.ts';
 import type { Chosen } from '../chosen.ts';
+import { derivativeAt } from './derivative.ts';
+import { percentOf, responseLogarithm } from './logarithms.ts';
 import {
   type Effect,
+  effects,
   effectsBetween,
   moved,
   type Reference,
@@ -33,6 +37,8 @@ export interface Slope extends Effect {
   readonly of: string;
   /** The step of a number ("1"), null for a difference between levels. */
   readonly per: string | null;
+  /** The same in per cent of the response, where it is fitted as a logarithm; else null. */
+  readonly percent: Effect | null;
 }
 
 const CURVE_POINTS = 61;
@@ -46,7 +52,7 @@ export function typicalSteps(chosen: Chosen, term: ModelTerm, reference: Referen
   const described = reference.variables.get(variable);
   if (described === undefined) return [];
   const steps = stepsOf(described);
-  const effects = effectsBetween(
+  const found = effectsBetween(
     chosen,
     steps.map((step): [Setting, Setting] => [
       moved(reference.setting, { [variable]: step.from }),
@@ -58,7 +64,7 @@ export function typicalSteps(chosen: Chosen, term: ModelTerm, reference: Referen
     to: step.toText,
     from_value: typeof step.from === 'number' ? step.from : null,
     to_value: typeof step.to === 'number' ? step.to : null,
-    ...effects[k]!,
+    ...found[k]!,
   }));
 }
 
@@ -69,7 +75,8 @@ interface Step {
   readonly toText: string;
 }
 
-function stepsOf(variable: ReferenceVariable): Step[] {
+/** The steps that are typical of a variable. */
+export function stepsOf(variable: ReferenceVariable): Step[] {
   switch (variable.kind) {
     case 'number': {
       // Where half the rows or more share one value, the quartiles tell nothing: use the whole range.
@@ -100,7 +107,7 @@ export function curveOf(chosen: Chosen, term: ModelTerm, reference: Reference): 
     { length: CURVE_POINTS },
     (_, i) => smallest + ((largest - smallest) * i) / (CURVE_POINTS - 1),
   );
-  const effects = effectsBetween(
+  const found = effectsBetween(
     chosen,
     x.map((value): [Setting, Setting] => [
       reference.setting,
@@ -110,15 +117,15 @@ export function curveOf(chosen: Chosen, term: ModelTerm, reference: Reference): 
   return {
     variable,
     x,
-    y: effects.map((effect) => effect.estimate),
-    lower: effects.map((effect) => effect.lower),
-    upper: effects.map((effect) => effect.upper),
+    y: found.map((effect) => effect.estimate),
+    lower: found.map((effect) => effect.lower),
+    upper: found.map((effect) => effect.upper),
   };
 }
 
 /**
- * The slope (number) or difference (flag, category) of an interaction's first variable at each level, or at
- * the quartiles, of the others; at most forty, and how many more there are.
+ * The slope (number, at its median where it bends) or difference (flag, category) of an interaction's first variable at
+ * each level of the others, or at the declared places or quartiles of a number; at most forty, and how many more there are.
  */
 export function slopesOf(
   chosen: Chosen,
@@ -130,7 +137,7 @@ export function slopesOf(
   const described = first === undefined ? undefined : reference.variables.get(first);
   if (first === undefined || described === undefined) return { slopes: [], omitted: 0 };
   const places = others
-    .map((name) => placesOf(name, reference.variables.get(name)!))
+    .map((name) => placesOf(name, reference.variables.get(name)!, chosen.study.inference.slopesAt.get(name)))
     .reduce<{ at: string; changes: Record<string, number | string> }[]>(
       (soFar, more) =>
         soFar.flatMap((left) =>
@@ -143,19 +150,23 @@ export function slopesOf(
     );
   const all = places.flatMap((place) => movesOf(first, described).map((move) => ({ place, move })));
   const wanted = all.slice(0, MOST_SLOPES);
-  const effects = effectsBetween(
-    chosen,
-    wanted.map(({ place, move }): [Setting, Setting] => {
-      const there = moved(reference.setting, place.changes);
-      return [moved(there, { [first]: move.from }), moved(there, { [first]: move.to })];
-    }),
-  );
+  const settings = wanted.map(({ place, move }): [Setting, Setting] => {
+    const there = moved(reference.setting, place.changes);
+    return [moved(there, { [first]: move.from }), moved(there, { [first]: move.to })];
+  });
+  const effectOf = effects(chosen);
+  const found =
+    described.kind === 'number'
+      ? settings.map(([there]) => effectOf(derivativeAt(chosen, there, first)))
+      : effectsBetween(chosen, settings);
+  const logarithm = responseLogarithm(chosen);
   return {
     slopes: wanted.map(({ place, move }, k) => ({
       at: place.at,
       of: move.of,
       per: move.per,
-      ...effects[k]!,
+      ...found[k]!,
+      percent: logarithm === null ? null : percentOf(found[k]!, logarithm.lnBase),
     })),
     omitted: all.length - wanted.length,
   };
@@ -164,6 +175,7 @@ export function slopesOf(
 function placesOf(
   name: string,
   variable: ReferenceVariable,
+  declared: readonly number[] | undefined,
 ): { at: string; changes: Record<string, number | string> }[] {
   switch (variable.kind) {
     case 'category':
@@ -174,11 +186,16 @@ function placesOf(
         changes: { [name]: value },
       }));
     case 'number':
-      return [...new Set([variable.lowerQuartile, variable.median, variable.upperQuartile])].map((value) => ({
+      return slopePlaces(variable, declared).map((value) => ({
         at: `${name} ${value}`,
         changes: { [name]: value },
       }));
   }
+}
+
+/** Where slopes are given: at the declared values of a number, else at its quartiles. */
+export function slopePlaces(variable: Spread, declared: readonly number[] | undefined): readonly number[] {
+  return declared ?? [...new Set([variable.lowerQuartile, variable.median, variable.upperQuartile])];
 }
 
 function movesOf(
@@ -187,8 +204,7 @@ function movesOf(
 ): { of: string; per: string | null; from: number | string; to: number | string }[] {
   switch (variable.kind) {
     case 'number':
-      // The slope at the median; exact for a straight line, a chord of one unit for a curve.
-      return [{ of: name, per: '1', from: variable.median, to: variable.median + 1 }];
+      return [{ of: name, per: '1', from: variable.median, to: variable.median }];
     case 'flag':
       return [{ of: `${name} ${variable.texts?.[1] ?? 'yes'}`, per: null, from: 0, to: 1 }];
     case 'category':
