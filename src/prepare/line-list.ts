@@ -7,8 +7,12 @@ export function lineList(lines: readonly number[]): string {
   const named = lines.slice(0, MOST_NAMED);
   const more = lines.length - named.length;
   const parts = more > 0 ? [...named.map(String), `${wholeNumber(more)} more`] : named.map(String);
-  if (parts.length < 2) return `line ${parts.join('')}`;
-  return `lines ${parts.slice(0, -1).join(', ')} and ${parts.at(-1)}`;
+  return `${parts.length < 2 ? 'line' : 'lines'} ${listed(parts)}`;
+}
+
+/** "a", "a and b", "a, b and c". */
+export function listed(items: readonly string[]): string {
+  return items.length < 2 ? items.join('') : `${items.slice(0, -1).join(', ')} and ${items.at(-1)}`;
 }
 
 /** "1 row", "1 461 rows". */

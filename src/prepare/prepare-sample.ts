@@ -33,7 +33,7 @@ export function prepareSample(study: Study, table: Table, report: Report): Sampl
   warnOfUndefined(study, table, derived, rows, report);
   if (study.weights !== null && !applyWeights(study.weights, columns, table, rows, report)) return null;
   if (anyAllMissing(study, needed, columns, table, rows, report)) return null;
-  loseMissing(rows, needed, columns, undefinedRows);
+  loseMissing(rows, needed, columns, undefinedRows, (name) => baseVariables(name, study.derive));
 
   const kept = keptRows(rows);
   if (kept.length === 0) {

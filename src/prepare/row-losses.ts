@@ -1,5 +1,8 @@
 import type { Column } from '../data/table.ts';
+import { wholeNumber } from '../numerals.ts';
 import type { UndefinedRows } from './evaluate-expression.ts';
+import { isMissing } from './is-missing.ts';
+import { listed } from './line-list.ts';
 import type { Loss } from './sample.ts';
 
 /** Which rows are still in, and under which reason each other one went. Reasons are applied one after the other. */
@@ -36,13 +39,15 @@ export function loseWhere(
 
 /**
  * Takes out the rows in which any of the variables is missing or undefined, each under the first such variable.
- * A variable is listed where it lacks any value among the rows in at the start.
+ * A variable is listed where it lacks any value among the rows in at the start. Of a derived one the reason says
+ * which of the columns under it are empty in the rows that it takes; `basesOf` gives those.
  */
 export function loseMissing(
   rows: RowLosses,
   variables: readonly string[],
   columns: ReadonlyMap<string, Column>,
   undefinedRows: ReadonlyMap<string, UndefinedRows>,
+  basesOf: (variable: string) => Iterable<string>,
 ): void {
   const { reasonOf, losses } = rows;
   const earlier = losses.length;
@@ -52,7 +57,7 @@ export function loseMissing(
       if (kind === 'undefined' && flags === null) continue;
       const code = losses.length + 1;
       let any = 0;
-      let count = 0;
+      const taken: number[] = [];
       eachMissing(columns.get(variable)!, (row) => {
         const reason = reasonOf[row]!;
         if (reason !== 0 && reason <= earlier) return;
@@ -60,13 +65,35 @@ export function loseMissing(
         any++;
         if (reason !== 0) return;
         reasonOf[row] = code;
-        count++;
+        taken.push(row);
       });
-      if (any > 0) {
-        losses.push({ because: `${kind} ${variable}`, kind, rows: count, variable, missingAny: any });
-      }
+      if (any === 0) continue;
+      const bases = kind === 'missing' ? [...basesOf(variable)].filter((base) => base !== variable) : [];
+      const because = `${kind} ${variable}${emptyBases(bases, columns, taken)}`;
+      losses.push({ because, kind, rows: taken.length, variable, missingAny: any });
     }
   }
+}
+
+/** ", as kwh is empty"; ", as kwh is empty in 3 and days in 1 of these" where neither is empty in all rows. */
+function emptyBases(
+  bases: readonly string[],
+  columns: ReadonlyMap<string, Column>,
+  taken: readonly number[],
+): string {
+  const empty = bases.flatMap((base) => {
+    const column = columns.get(base)!;
+    const rows = taken.reduce((sum, row) => sum + (isMissing(column, row) ? 1 : 0), 0);
+    return rows === 0 ? [] : [{ base, rows }];
+  });
+  const everywhere = empty.filter(({ rows }) => rows === taken.length).map(({ base }) => base);
+  if (everywhere.length > 0) {
+    return `, as ${listed(everywhere)} ${everywhere.length === 1 ? 'is' : 'are'} empty`;
+  }
+  if (empty.length === 0) return '';
+  const [first, ...rest] = empty.map(({ base, rows }) => ({ base, rows: wholeNumber(rows) }));
+  const others = rest.map(({ base, rows }) => `${base} in ${rows}`);
+  return `, as ${listed([`${first!.base} is empty in ${first!.rows}`, ...others])} of these`;
 }
 
 /** Calls `visit` with every row in which the column has no value. */

@@ -133,15 +133,24 @@ export function count(n: number): string {
   return fixed(n, 0);
 }
 
-/** R² and its kin: three decimals. */
+/** R² and its kin: three decimals, up to six where it would read as 1 and is not. */
 export function share(x: number | null | undefined): string {
-  return fixed(x, 3);
+  if (x === null || x === undefined || !(x < 1)) return fixed(x, 3);
+  let decimals = 3;
+  while (decimals < 6 && Number(x.toFixed(decimals)) === 1) decimals++;
+  return fixed(x, decimals);
 }
 
-/** A proportion as "95 %", with as many decimals as it has, at most one. */
+/**
+ * A proportion as "95 %", with as many decimals as it has, at most one; a second where it would read as none or all
+ * and is neither, then "under 0.01 %" and "over 99.99 %".
+ */
 export function percent(proportion: number): string {
   const hundred = Math.round(proportion * 1000) / 10;
-  return `${fixed(hundred, Number.isInteger(hundred) ? 0 : 1)}${THIN}%`;
+  const misread = (x: number): boolean => (x === 0 || x === 100) && x !== proportion * 100;
+  if (!misread(hundred)) return `${fixed(hundred, Number.isInteger(hundred) ? 0 : 1)}${THIN}%`;
+  if (!misread(Number((proportion * 100).toFixed(2)))) return `${fixed(proportion * 100, 2)}${THIN}%`;
+  return hundred === 0 ? `under 0.01${THIN}%` : `over 99.99${THIN}%`;
 }
 
 /** A p-value to two significant digits: "0.043", "3.1 × 10⁻⁸", "below 10⁻³⁰⁰"; never 0. */

@@ -122,10 +122,29 @@ describe('losses', () => {
     });
     expect(sample!.losses.map((loss) => [loss.because, loss.rows])).toEqual([
       ['missing when', 1],
-      ['missing square', 1],
+      ['missing square, as x is empty', 1],
     ]);
     expect([...sample!.columns.keys()].sort()).toEqual(['square', 'when', 'x', 'y']);
     expect([...sample!.timeOrder!]).toEqual([1, 0]);
+  });
+
+  test('a derived variable is missing for what is empty under it', () => {
+    const columns = [
+      numbers('y', [1, 2, 3, 4, 5, 6]),
+      numbers('kwh', [null, null, 3, 4, 5, 6]),
+      numbers('days', [30, 30, null, 28, 31, 30]),
+      numbers('bill', [null, 2, 3, 4, null, 6]),
+    ];
+    const { sample } = prepare(columns, {
+      derive: { per_day: 'kwh / days', cost: 'bill * 2', at_odds: 'per_day * 0' },
+      response: 'y',
+      candidates: [{ terms: ['per_day', 'cost', 'at_odds'] }],
+    });
+    expect(sample!.losses.map((loss) => [loss.because, loss.rows, loss.missingAny])).toEqual([
+      ['missing per_day, as kwh is empty in 2 and days in 1 of these', 3, 3],
+      ['missing cost, as bill is empty', 1, 2],
+      ['missing at_odds', 0, 3],
+    ]);
   });
 
   test('with all rows in use the columns are shared, not copied', () => {

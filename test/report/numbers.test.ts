@@ -156,6 +156,16 @@ describe('other numbers', () => {
     expect(count(1500)).toBe(`1${THIN}500`);
     expect(percent(0.95)).toBe(`95${THIN}%`);
     expect(percent(0.999)).toBe(`99.9${THIN}%`);
+    // Nearly all is not all, and nearly none is not none.
+    expect(percent(1)).toBe(`100${THIN}%`);
+    expect(percent(0)).toBe(`0${THIN}%`);
+    expect(percent(0.99981)).toBe(`99.98${THIN}%`);
+    expect(percent(0.999999)).toBe(`over 99.99${THIN}%`);
+    expect(percent(0.0003)).toBe(`0.03${THIN}%`);
+    expect(percent(1e-9)).toBe(`under 0.01${THIN}%`);
+    expect(share(0.99981)).toBe('0.9998');
+    expect(share(1)).toBe('1.000');
+    expect(share(1 - 1e-12)).toBe('1.000000');
   });
   it('puts units behind numbers and the usual currency signs before', () => {
     expect(withUnit('5', 'L')).toBe(`5${NBSP}L`);

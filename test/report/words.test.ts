@@ -483,7 +483,10 @@ describe('the first screen', () => {
 describe('data in words', () => {
   it('counts rows and reasons', () => {
     expect(rowsSentence({ ...record.data, rows_read: 240 })).toMatch(/^All 240.rows read were used\.$/);
-    expect(plain(rowsSentence(record.data))).toContain('the other 19 (7.3 %)');
+    expect(plain(rowsSentence(record.data))).toContain('the other 19 (7.3 %) are counted below');
+    expect(plain(rowsSentence({ ...record.data, rows_read: 36, rows_used: 35 }))).toBe(
+      '35 of the 36 rows read were used; the other one (2.8 %) is counted below, under its reason.',
+    );
     expect(lossReason(record.data.left_out[1]!)).toContain('missing in 9');
     expect(contractSentence({ ...record.data, bad_value_count: 0, bad_values: [] })).toBe(
       'No value broke the declared contract.',

@@ -8,7 +8,12 @@ type Data = StudyRecord['data'];
 export function rowsSentence(data: Data): string {
   const lost = data.rows_read - data.rows_used;
   if (lost === 0) return `All ${counted(data.rows_read, 'row', 'rows', count)} read were used.`;
-  return `${count(data.rows_used)} of the ${counted(data.rows_read, 'row', 'rows', count)} read were used; the other ${count(lost)} (${percent(lost / Math.max(1, data.rows_read))}) are counted below, each under one reason.`;
+  const share = percent(lost / Math.max(1, data.rows_read));
+  const others =
+    lost === 1
+      ? `the other one (${share}) is counted below, under its reason`
+      : `the other ${count(lost)} (${share}) are counted below, each under one reason`;
+  return `${count(data.rows_used)} of the ${counted(data.rows_read, 'row', 'rows', count)} read ${data.rows_used === 1 ? 'was' : 'were'} used; ${others}.`;
 }
 
 /** What one loss says: its reason, with how often the variable is missing in all where that is more. */
