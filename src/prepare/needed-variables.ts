@@ -23,9 +23,13 @@ export function neededVariables(study: Study): readonly string[] {
   return inOrder(study, needed);
 }
 
-/** The needed variables and those that the derived ones among them rest on, in order of declaration. */
+/**
+ * The needed variables, those that the derived ones among them rest on, and the one that splits the rows, which may
+ * be missing in a row that is fitted; in order of declaration.
+ */
 export function sampleVariables(study: Study, needed: readonly string[]): readonly string[] {
   const all = new Set(needed);
+  if (study.examination.splitAt !== null) all.add(study.examination.splitAt.variable);
   for (const name of needed) {
     for (const base of baseVariables(name, study.derive)) all.add(base);
   }

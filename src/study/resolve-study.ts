@@ -5,6 +5,7 @@ import { entriesInOrder, fault, type Reading, warning } from './reading.ts';
 import { resolveCandidates } from './resolve-candidates.ts';
 import { resolveDerivations } from './resolve-derivations.ts';
 import { checkText, parseText, untypedUses } from './resolve-expression.ts';
+import { resolveExamination } from './resolve-examination.ts';
 import { resolvePredict } from './resolve-predict.ts';
 import { resolveResponse, resolveRowRoles, resolveWeights } from './resolve-roles.ts';
 import { resolveInference } from './resolve-inference.ts';
@@ -43,6 +44,7 @@ export function resolveStudy(reading: Reading, origin: StudyOrigin): Study | nul
   const selection = resolveSelection(reading, candidates);
   const acceptance = resolveAcceptance(reading, named);
   const rests = new Set(inTerms.flatMap((name) => [...derivedFrom(name)]));
+  const examination = resolveExamination(reading, names);
   const predict = resolvePredict(reading, {
     variables,
     names,
@@ -116,7 +118,8 @@ function usedNames(
   reads: ReadonlyMap<string, readonly string[]>,
 ): ReadonlySet<string> {
   const { file } = reading;
-  const start = [...inConditions, file.weights, file.data?.time, file.data?.row_id].filter(
+  const split = file.examination?.split_at?.variable;
+  const start = [...inConditions, file.weights, file.data?.time, file.data?.row_id, split].filter(
     (name) => typeof name === 'string',
   );
   for (const value of [

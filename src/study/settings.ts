@@ -4,7 +4,7 @@ import type { Setting } from './study.ts';
 import { STUDY_DEFAULTS } from './study-defaults.generated.ts';
 
 /** Settings that are found from the data where they are null; every other null means "none". */
-const FOUND = ['data.format.delimiter', 'data.format.encoding'];
+const FOUND = ['data.format.delimiter', 'data.format.encoding', 'examination.lags'];
 
 /** Every setting that has a default, in the order of the schema, as it is in force. */
 export function settingsOf(reading: Reading): readonly Setting[] {

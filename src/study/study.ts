@@ -23,6 +23,7 @@ export interface Study {
   readonly candidates: readonly CandidatePlan[];
   readonly selection: SelectionPlan;
   readonly inference: InferencePlan;
+  readonly examination: ExaminationPlan;
   readonly predict: PredictPlan;
   readonly acceptance: readonly AcceptancePlan[];
   readonly report: ReportPlan;

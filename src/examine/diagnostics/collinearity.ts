@@ -4,6 +4,7 @@ import { type Diagnostic, notPossible } from '../diagnostic.ts';
 /** The largest VIF among the columns, with the condition number beside it. */
 export const collinearity: Diagnostic = {
   name: 'collinearity',
+  topic: 'collinearity',
   question: 'Can the terms be told apart?',
   statisticName: 'largest variance inflation factor',
   source: 'Marquardt 1970; Belsley, Kuh & Welsch 1980',

@@ -4,6 +4,7 @@ import type { Diagnostic } from '../diagnostic.ts';
 /** Rows per coefficient. */
 export const enoughRows: Diagnostic = {
   name: 'enough_rows',
+  topic: 'rows',
   question: 'Are there enough rows for this many coefficients?',
   statisticName: 'rows per coefficient',
   source: 'common practice, no source',

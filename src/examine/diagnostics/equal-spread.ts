@@ -8,12 +8,13 @@ import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
 /** n R² of the squared residuals on the model's columns, χ² on their number without the intercept. */
 export const equalSpread: Diagnostic = {
   name: 'equal_spread',
+  topic: 'spread',
   question: 'Is the spread even?',
   statisticName: 'Breusch–Pagan statistic, Koenker’s form',
   source: 'Breusch & Pagan 1979; Koenker 1981',
   find(chosen) {
     if (chosen.s === null)
-      return notPossible('Without residual degrees of freedom the spread cannot be judged.');
+      return notPossible('The model fits these rows exactly, so there is no spread to judge.');
     const found = koenker(chosen);
     if (found === null) return notPossible('The model has no column that the spread could depend on.');
     const { statistic, df } = found;

@@ -1,66 +1,90 @@
 import { decimalNumber, wholeNumber } from '../../numerals.ts';
 import type { Chosen } from '../chosen.ts';
-import { type Diagnostic, notPossible } from '../diagnostic.ts';
+import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
+import { durbinWatson, exactTails, normalTails, type Tails } from '../durbin-watson.ts';
+import { orthonormalRows } from '../orthonormal-design.ts';
+import type { SecondPass } from '../second-pass.ts';
 
-/** Σ (e_t − e_{t−1})²/Σ e_t² in time order. */
+/** Rows up to which the p-value is exact, and n p² up to which that is quick. */
+const EXACT_ROWS = 2000;
+const EXACT_WORK = 2e6;
+/** Correlation of neighbours that hardly widens an interval. */
+const SLIGHT = 0.1;
+
+/** Σ (e_t − e_{t−1})²/Σ e_t² in time order, with a two-sided p-value. */
 export const independence: Diagnostic = {
   name: 'independence',
+  topic: 'independence',
   question: 'Do neighbours in time resemble each other?',
   statisticName: 'Durbin–Watson statistic',
-  source: 'Durbin & Watson 1950, 1951',
-  find(chosen) {
+  source: 'Durbin & Watson 1950, 1951; Imhof 1961; Helstrom 1983; Rice 1980',
+  find(chosen, second) {
     const order = chosen.sample.timeOrder;
     if (order === null) return null;
-    if (chosen.s === null || order.length < 3)
-      return notPossible('Too few rows or degrees of freedom to judge neighbours in time.');
+    if (chosen.s === null || second === null)
+      return notPossible('The model fits these rows exactly, so there are no residuals to compare.');
+    if (order.length < 3) return notPossible('There are too few rows to judge neighbours in time.');
     const statistic = durbinWatson(chosen.residuals, order);
-    const away = Math.abs(statistic - 2);
-    const concern = away > 1 ? 2 : away > 0.5 ? 1 : 0;
-    const repeated = repeatedTimes(chosen);
-    const correlation = `about ${decimalNumber(1 - statistic / 2, 2)}`;
+    const { tails, exact } = tailsOf(chosen, second, statistic);
+    const p = Math.min(1, 2 * Math.min(tails.lower, tails.upper));
+    const related = 1 - statistic / 2;
+    const concern = concernOf(p, Math.abs(related) < SLIGHT);
+    const how = exact ? 'exact' : 'approximate';
+    const correlation = `about ${decimalNumber(related, 2)}`;
+    const told =
+      concern === 0
+        ? `Neighbours in time are not visibly related (correlation ${correlation}).`
+        : statistic < 2
+          ? `A row’s residual resembles the one before it (correlation ${correlation}): there is less information in the rows than their number says, and the intervals are too narrow.`
+          : `A row’s residual tends to oppose the one before it (correlation ${correlation}), as where one period’s excess is booked in the next.`;
     return {
       statistic,
       df: [],
-      p_value: null,
-      mark: 'near 2 for unrelated neighbours; below 1.5 or above 2.5 is worth a look (common practice)',
-      verdict:
-        (concern === 0
-          ? `Neighbours in time are not visibly related (correlation ${correlation}).`
-          : statistic < 2
-            ? `A row’s residual resembles the one before it (correlation ${correlation}): there is less information in the rows than their number says, and the intervals are too narrow.`
-            : `A row’s residual tends to oppose the one before it (correlation ${correlation}), as where one period’s excess is booked in the next.`) +
-        (repeated > 0
-          ? ` ${wholeNumber(repeated)} rows share their time with the row before; they are taken in file order.`
-          : ''),
+      p_value: p,
+      mark: null,
+      verdict: told + aboutTheOrder(chosen),
       concern,
       advice:
         concern === 0
           ? null
           : 'Look at the residuals in time order for a season, a drift or a step, and bring what causes it into the model.',
+      figures: [
+        { name: `${how} p-value against neighbours that resemble each other`, value: tails.lower },
+        { name: `${how} p-value against neighbours that oppose each other`, value: tails.upper },
+      ],
     };
   },
 };
 
-/** The statistic over residuals taken in the given order; between 0 and 4. */
-export function durbinWatson(residuals: Float64Array, order: Int32Array): number {
-  let differences = 0;
-  let squares = 0;
-  let before = 0;
-  for (let t = 0; t < order.length; t++) {
-    const e = residuals[order[t]!]!;
-    if (t > 0) differences += (e - before) ** 2;
-    squares += e * e;
-    before = e;
+function tailsOf(chosen: Chosen, second: SecondPass, statistic: number): { tails: Tails; exact: boolean } {
+  const n = chosen.sample.rowCount;
+  const p = chosen.fit.columns.length;
+  if (n <= EXACT_ROWS && n * p * p <= EXACT_WORK) {
+    return { tails: exactTails(statistic, orthonormalRows(chosen), n, p), exact: true };
   }
-  return differences / squares;
+  return { tails: normalTails(statistic, n, p, second.neighbours!), exact: false };
 }
 
-function repeatedTimes(chosen: Chosen): number {
+/** What a reader should know of how the rows were put in order. */
+function aboutTheOrder(chosen: Chosen): string {
   const { study, sample } = chosen;
   const time = study.data.time === null ? undefined : sample.columns.get(study.data.time);
-  if (time === undefined || time.kind === 'category' || time.kind === 'text') return 0;
-  let count = 0;
+  if (time === undefined || time.kind === 'category' || time.kind === 'text') return '';
   const order = sample.timeOrder!;
-  for (let t = 1; t < order.length; t++) if (time.values[order[t]!] === time.values[order[t - 1]!]) count++;
-  return count;
+  let repeated = 0;
+  let moved = 0;
+  for (let t = 1; t < order.length; t++) {
+    if (time.values[order[t]!] === time.values[order[t - 1]!]) repeated++;
+    if (time.values[t]! < time.values[t - 1]!) moved++;
+  }
+  const rows = (count: number, one: string, many: string) =>
+    count === 1 ? `1 row ${one}` : `${wholeNumber(count)} rows ${many}`;
+  return (
+    (repeated > 0
+      ? ` ${rows(repeated, 'shares its time', 'share their time')} with the row before; they are taken in file order.`
+      : '') +
+    (moved > 0
+      ? ` In the file ${rows(moved, 'stands', 'stand')} below a later one; they are taken in time order.`
+      : '')
+  );
 }

@@ -6,6 +6,7 @@ import { type Diagnostic, notPossible } from '../diagnostic.ts';
 /** The largest deleted residual, its p-value multiplied by the number of rows looked at (Bonferroni). */
 export const outlyingRows: Diagnostic = {
   name: 'outlying_rows',
+  topic: 'outliers',
   question: 'Does any row not belong with the rest?',
   statisticName: 'largest deleted residual',
   source: 'Belsley, Kuh & Welsch 1980; Bonferroni’s inequality',
@@ -19,7 +20,8 @@ export const outlyingRows: Diagnostic = {
         row = i;
       }
     }
-    if (row < 0) return notPossible('Too few degrees of freedom to judge single rows.');
+    if (chosen.s === null) return notPossible('The model fits these rows exactly, so no row stands out.');
+    if (row < 0) return notPossible('There are too few degrees of freedom to judge single rows.');
     const df = chosen.fit.degreesOfFreedom - 1;
     const p = Math.min(1, chosen.sample.rowCount * tTwoSided(largest, df));
     const name = rowName(chosen.sample, row);

@@ -1,0 +1,87 @@
+import { EXTENDED_BUDGET, type Factor, factorExtended, factorRows } from '../engine/factor.ts';
+import { fitCandidate } from '../engine/fit-candidate.ts';
+import type { DesignRows } from '../model/design-rows.ts';
+
+/** Writes rows from…to−1 of a column that is computed, not read, at `at`. */
+export type ColumnWriter = (from: number, to: number, out: Float64Array, at: number) => void;
+
+/**
+ * Rows with computed columns behind those of `rows`, then computed responses. What is written is taken as it is: a column
+ * that is to be weighted brings its weights. Values are of ordinary magnitude.
+ */
+export function rowsWith(
+  rows: DesignRows,
+  columns: readonly ColumnWriter[],
+  responses: readonly ColumnWriter[],
+): DesignRows {
+  const own = rows.predictorCount;
+  const writers = [...columns, ...responses];
+  const width = own + writers.length;
+  return {
+    ...rows,
+    width,
+    predictorCount: own + columns.length,
+    scales: Float64Array.from({ length: width }, (_, j) => (j < own ? rows.scales[j]! : 1)),
+    responses: [],
+    fill(wanted, from, to, stride, hi, lo) {
+      const one = [0];
+      for (let c = 0; c < wanted.length; c++) {
+        const column = wanted[c]!;
+        const at = c * stride;
+        if (column < own) {
+          one[0] = column;
+          rows.fill(one, from, to, stride, hi.subarray(at), lo === null ? null : lo.subarray(at));
+        } else {
+          if (lo !== null) lo.fill(0, at, at + to - from);
+          writers[column - own]!(from, to, hi, at);
+        }
+      }
+    },
+  };
+}
+
+/** The factor of all rows, in double-double where that costs next to nothing. */
+export function factorOf(rows: DesignRows): Factor {
+  return rows.rowCount * rows.width ** 2 <= EXTENDED_BUDGET ? factorExtended(rows) : factorRows(rows);
+}
+
+/** An auxiliary regression, for its sums of squares. */
+export interface Auxiliary {
+  /** Columns that were not dependent on earlier ones. */
+  readonly rank: number;
+  readonly residualSumOfSquares: number;
+  /** About the mean where the regression has column 0, which is then the intercept; else about zero. */
+  readonly totalSumOfSquares: number;
+  /** Positions among the columns asked for that were kept. */
+  readonly kept: readonly number[];
+  readonly estimates: Float64Array;
+}
+
+/** Regresses response column `response` on some columns of a factor; exactly dependent ones join the earlier ones. */
+export function regress(factor: Factor, columns: readonly number[], response = 0): Auxiliary {
+  const union = factor.predictorCount;
+  const fit = fitCandidate(
+    factor,
+    {
+      name: '',
+      response: { variable: '', scale: { kind: 'natural' } },
+      intercept: columns[0] === 0,
+      terms: [],
+      columns,
+      responseColumn: response,
+    },
+    {
+      logWeights: 0,
+      logJacobians: new Array<number>(response + 1).fill(0),
+      columnNames: new Array<string>(union).fill(''),
+      columnVariables: new Array<string[]>(union).fill([]),
+    },
+  );
+  return {
+    rank: fit.columns.length,
+    residualSumOfSquares: fit.residualSumOfSquares,
+    totalSumOfSquares: fit.totalSumOfSquares,
+    kept: fit.columns.map((column) => columns.indexOf(column)),
+    estimates: fit.estimates,
+  };
+}
