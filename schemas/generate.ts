@@ -45,6 +45,7 @@ const SCHEMAS: readonly SchemaOutputs[] = [
     types: 'src/record/study-record.generated.ts',
     check: { file: 'src/record/check-study-record.generated.ts', name: 'checkStudyRecord', verbose: false },
   },
+  { schema: 'schemas/comparison.schema.json', types: 'src/compare/comparison-file.generated.ts' },
 ];
 
 const ROOT = new URL('../', import.meta.url);

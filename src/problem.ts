@@ -116,6 +116,8 @@ export const PROBLEM_CODES = [
   'prediction_outside',
   // record/, report/ and cli/
   'record_unreadable',
+  'sample_unreadable',
+  'records_unlike',
   'record_differs',
   'record_other_version',
   'study_not_found',

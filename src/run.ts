@@ -6,19 +6,23 @@ import { checkMagnitudes } from './engine/check-magnitudes.ts';
 import { checkStandardErrors } from './engine/check-standard-errors.ts';
 import { type FittedAll, fitAll } from './engine/fit-all.ts';
 import { refineFit } from './engine/refine.ts';
+import { bootstrap } from './examine/bootstrap.ts';
 import { checkHypotheses } from './examine/check-hypotheses.ts';
 import { type Chosen, examineRows } from './examine/chosen.ts';
 import { buildDesign } from './model/build-design.ts';
 import type { Design } from './model/design.ts';
 import { type DesignRows, designRows, numbersOf } from './model/design-rows.ts';
 import { toScale } from './model/response-scale.ts';
-import { type Predicted, predict, smearingResiduals } from './predict/predict.ts';
+import { bootstrapPredictions } from './predict/bootstrap-predictions.ts';
+import { type Predicted, type PredictionRows, predict, smearingResiduals } from './predict/predict.ts';
 import { fileRows, statedRows } from './predict/prediction-rows.ts';
 import { prepareSample } from './prepare/prepare-sample.ts';
 import type { Sample } from './prepare/sample.ts';
 import { type Spread, spreadsOf } from './prepare/spread.ts';
 import type { Problem, Report } from './problem.ts';
 import { buildRecord } from './record/build-record.ts';
+import type { Bootstrapped } from './record/describe-bootstrap.ts';
+import { type KeptSample, keepSample } from './record/keep-sample.ts';
 import type { StudyRecord } from './record/record.ts';
 import { residualColumns } from './record/residual-columns.ts';
 import type { ResidualColumns } from './record/tables.ts';
@@ -51,6 +55,8 @@ export interface RunResult {
   readonly problems: readonly Problem[];
   /** Row figures of the chosen model, for a table; null where none was chosen. */
   readonly residuals: ResidualColumns | null;
+  /** The rows used, to be kept beside the record; null where the study declines it or nothing was fitted. */
+  readonly kept: KeptSample | null;
 }
 
 /** Reads and checks a study and its data, down to the rows that would be fitted, and fits nothing. */
@@ -66,10 +72,10 @@ export async function checkStudy(path: string, options: RunOptions = {}): Promis
   });
   if (table === null) return { study, table, sample: null, dataRead: true, problems };
   const sample = prepareSample(study, table, report);
+  if (sample !== null) checkStandardErrors(study, sample, report);
   return { study, table, sample, dataRead: true, problems };
 }
 
-  if (sample !== null) checkStandardErrors(study, sample, report);
 /**
  * The whole study, stage by stage:
  *
@@ -81,15 +87,15 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   const { study, table, sample, dataRead, problems: found } = await checkStudy(path, options);
   const problems = [...found];
   const report: Report = (problem) => problems.push(problem);
-  const stopped: () => RunResult = () => ({ record: null, dataRead, problems, residuals: null });
+  const stopped: () => RunResult = () => ({ record: null, dataRead, problems, residuals: null, kept: null });
   if (study === null || table === null || sample === null || hasError(problems)) return stopped();
 
   const design = buildDesign(study, sample, report);
   if (design === null) return stopped();
+  checkHypotheses(study, design, report);
   const own = numbersOf(sample, study.response.variable);
   const rows = rowsOf(study, sample, design, own);
 
-  checkHypotheses(study, design, report);
   if (!checkMagnitudes(study, sample, design, rows, table.file, report)) return stopped();
 
   const fits = fitAll(design, rows, own, {
@@ -99,18 +105,20 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   checkFits(study, sample, design, fits.fits, report);
   if (hasError(problems)) return stopped();
 
+  const fitted = { ...fits, covariances: candidateCovariances(study, sample, fits.fits, rows, report) };
   const choice = choose(study, fitted, report);
   if (hasError(problems)) return stopped();
 
-  const fitted = { ...fits, covariances: candidateCovariances(study, sample, fits.fits, rows, report) };
   const spreads = spreadsOf(sample);
   const chosen =
     choice.chosen === null
       ? null
       : examineChosen(study, sample, spreads, design, rows, fitted, choice.chosen);
-  const predicted = chosen === null ? null : await predictAll(chosen, report);
+  const ahead = chosen === null ? null : await predictAll(chosen, report);
   if (hasError(problems)) return stopped();
+  const bootstrapped = chosen === null ? null : bootstrapAll(chosen, ahead!.sources, options);
 
+  const kept = study.report.keepSample ? await keepSample(study, sample) : null;
   const record = buildRecord({
     study,
     table,
@@ -121,10 +129,12 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     fitted,
     choice,
     chosen,
-    predicted,
+    predicted: ahead?.predicted ?? null,
+    bootstrapped,
+    kept,
     problems,
   });
-  return { record, dataRead, problems, residuals: chosen === null ? null : residualColumns(chosen) };
+  return { record, dataRead, problems, residuals: chosen === null ? null : residualColumns(chosen), kept };
 }
 
 function rowsOf(study: Study, sample: Sample, design: Design, own: Float64Array): DesignRows {
@@ -149,11 +159,29 @@ function examineChosen(
 }
 
 /** Rows stated in the study, then those of its file. */
-async function predictAll(chosen: Chosen, report: Report): Promise<Predicted> {
+async function predictAll(
+  chosen: Chosen,
+  report: Report,
+): Promise<{ predicted: Predicted; sources: readonly PredictionRows[] }> {
   const smearing = smearingResiduals(chosen);
   const stated = statedRows(chosen, report);
   const fromFile = await fileRows(chosen, report);
-  return predict(chosen, fromFile === null ? [stated] : [stated, fromFile], smearing);
+  const sources = fromFile === null ? [stated] : [stated, fromFile];
+  return { predicted: predict(chosen, sources, smearing, report), sources };
+}
+
+/** Draws the rows again and again where the study asks for it. */
+function bootstrapAll(
+  chosen: Chosen,
+  sources: readonly PredictionRows[],
+  options: RunOptions,
+): Bootstrapped | null {
+  const plan = chosen.study.examination.bootstrap;
+  if (plan === null) return null;
+  const draws = bootstrap(chosen, plan, (done, total) =>
+    options.onProgress?.('drawing rows again', done, total),
+  );
+  return draws === null ? null : { draws, predictions: bootstrapPredictions(chosen, sources, draws) };
 }
 
 function hasError(problems: readonly Problem[]): boolean {

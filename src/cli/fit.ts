@@ -79,6 +79,7 @@ async function resultFiles(
     ...(result.residuals === null
       ? []
       : [{ name: 'tables/residuals.csv', content: residualsTable(result.residuals) }]),
+    ...(result.kept === null ? [] : [{ name: result.kept.file, content: result.kept.content }]),
     ...(record.predictions.length === 0
       ? []
       : [{ name: 'tables/predictions.csv', content: predictionsTable(record) }]),

@@ -3,10 +3,12 @@ import type { Table } from '../data/table.ts';
 import { classicalCovariance } from '../engine/covariance.ts';
 import type { Fit } from '../engine/fit.ts';
 import type { FittedAll } from '../engine/fit-all.ts';
+import { beforeYouRely } from '../examine/before-you-rely.ts';
 import type { Chosen } from '../examine/chosen.ts';
 import { examine } from '../examine/examine.ts';
 import { findDependencies } from '../examine/find-dependencies.ts';
 import { standardErrorsOf } from '../examine/infer.ts';
+import { withoutRows } from '../examine/without-row.ts';
 import type { Design } from '../model/design.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 import { scaleName } from '../model/response-scale.ts';
@@ -21,9 +23,11 @@ import { summarise } from '../select/summarise.ts';
 import type { Study } from '../study/study.ts';
 import { acceptanceOf } from './acceptance.ts';
 import { rowSummaries } from './chart-points.ts';
+import { type Bootstrapped, describeBootstrap } from './describe-bootstrap.ts';
 import { describeModel } from './describe-model.ts';
 import { describeVariables } from './describe-variables.ts';
-import type { RecordCandidate, StudyRecord } from './record.ts';
+import type { KeptSample } from './keep-sample.ts';
+import type { RecordCandidate, RecordExamination, StudyRecord } from './record.ts';
 
 /** Everything a run found, from which the record is put together. */
 export interface Run {
@@ -37,6 +41,10 @@ export interface Run {
   readonly choice: Choice;
   readonly chosen: Chosen | null;
   readonly predicted: Predicted | null;
+  /** Null where the study asks for no bootstrap, or the chosen model leaves nothing to draw. */
+  readonly bootstrapped: Bootstrapped | null;
+  /** The rows used, to be kept beside the record; null where the study declines it. */
+  readonly kept: KeptSample | null;
   /** Warnings found on the way; the record keeps them. */
   readonly problems: readonly Problem[];
 }
@@ -86,6 +94,7 @@ export function buildRecord(run: Run): StudyRecord {
       bad_values: table.badValues.map((bad) => ({ ...bad })),
       bad_value_count: table.badValueCount,
       time: timeSpan(study, sample),
+      sample: run.kept === null ? null : { file: run.kept.file, sha256: run.kept.sha256 },
       variables,
     },
     response: {
@@ -117,14 +126,7 @@ export function buildRecord(run: Run): StudyRecord {
     },
     model:
       chosen === null ? null : describeModel(chosen, run.rows, run.fitted.factor, smearingResiduals(chosen)),
-    examination:
-      chosen === null
-        ? null
-        : {
-            findings: examine(chosen),
-            collinearity: findDependencies(chosen, run.fitted),
-            ...rowSummaries(chosen),
-          },
+    examination: chosen === null ? null : examinationOf(chosen, run),
     predictions: (predicted?.predictions ?? []).map((one) => ({
       ...one,
       values: one.values.map((value) => ({ ...value })),
@@ -135,16 +137,24 @@ export function buildRecord(run: Run): StudyRecord {
   };
 }
 
+function examinationOf(chosen: Chosen, run: Run): RecordExamination {
+  const without = withoutRows(chosen, run);
+  const findings = examine(chosen, without);
+  return {
+    findings,
+    before_you_rely: beforeYouRely(findings, run.predicted?.predictions ?? []),
+    collinearity: findDependencies(chosen, run.fitted),
+    bootstrap: describeBootstrap(chosen, run.bootstrapped),
+    ...rowSummaries(chosen, without),
+  };
+}
+
 function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCandidate[] {
   // The chosen model may have been refined after the ranking; the record shows the refined figures.
   const fits = fitted.fits.map(
     (fit, index): Fit => (index === choice.chosen && chosen !== null ? chosen.fit : fit),
   );
   const context = { ...fitted, fits };
-  return fits.map((fit, index) => {
-    const { admitted, refusedBecause } = choice.admissions[index]!;
-    return {
-      name: fit.candidate.name,
   const covariances = fits.map((fit, index) =>
     index === choice.chosen && chosen !== null
       ? chosen.covariance
@@ -152,6 +162,10 @@ function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCan
         ? classicalCovariance(fit)
         : fitted.covariances[index]!,
   );
+  return fits.map((fit, index) => {
+    const { admitted, refusedBecause } = choice.admissions[index]!;
+    return {
+      name: fit.candidate.name,
       terms: fit.candidate.terms.map((term) => term.name),
       scale: scaleName(fit.candidate.response.scale),
       intercept: fit.candidate.intercept,
@@ -192,10 +206,6 @@ function warningsOf({ problems, fitted, chosen, study, predicted }: Run): StudyR
     }));
   if (fitted.pressOmitted !== null)
     warnings.push({ about: 'PRESS', text: `PRESS was ${fitted.pressOmitted}.` });
-  if (
-    study.predict.total &&
-    chosen !== null &&
-    predicted !== null &&
   if (chosen !== null) {
     for (const text of standardErrorsOf(chosen).cautions) warnings.push({ about: 'standard errors', text });
     if (
@@ -208,6 +218,10 @@ function warningsOf({ problems, fitted, chosen, study, predicted }: Run): StudyR
         text: 'The declared standard errors were worked out for the chosen candidate only: for each of the others they need one more pass over the rows.',
       });
   }
+  if (
+    study.predict.total &&
+    chosen !== null &&
+    predicted !== null &&
     predicted.total === null &&
     predicted.predictions.length > 0
   ) {

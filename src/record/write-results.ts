@@ -5,10 +5,10 @@ import { dirname, join, resolve } from 'node:path';
 import { pipeline } from 'node:stream/promises';
 import type { Report } from '../problem.ts';
 
-/** One file of the results: its name relative to the output folder ("tables/candidates.csv") and its text. */
+/** One file of the results: its name relative to the output folder ("tables/candidates.csv") and its text or bytes. */
 export interface ResultFile {
   readonly name: string;
-  readonly content: string | Iterable<string> | AsyncIterable<string>;
+  readonly content: string | Iterable<string | Uint8Array> | AsyncIterable<string | Uint8Array>;
 }
 
 /**
@@ -70,6 +70,10 @@ export const RESULT_FILES = [
   'tables/coefficients.csv',
   'tables/residuals.csv',
   'tables/predictions.csv',
+  'comparison.html',
+  'comparison.md',
+  'comparison.json',
+  'sample.csv.gz',
   'record.json',
 ] as const;
 
