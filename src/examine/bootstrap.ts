@@ -159,8 +159,7 @@ function fromResiduals(fit: Fit, rows: DesignRows, errors: Float64Array, random:
   for (let j = 0; j < p; j++)
     for (let i = 0; i <= j; i++) half[j]! += (fit.rootInverse[j * p + i]! * g[i]!) / rows.scales[i]!;
   const b = fit.estimates.slice();
-  for (let j = 0; j < p; j++)
-    for (let i = 0; i <= j; i++) b[i]! += fit.rootInverse[j * p + i]! * half[j]!;
+  for (let j = 0; j < p; j++) for (let i = 0; i <= j; i++) b[i]! += fit.rootInverse[j * p + i]! * half[j]!;
   return b;
 }
 

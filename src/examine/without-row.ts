@@ -75,7 +75,8 @@ export function withoutRows(chosen: Chosen, around: Around, extendedWork = EXTEN
   );
   const rows = largest(distances, MOST_ROWS);
   const omitted = rows.length === 0 ? null : whyNoChoice(chosen, around, rows.length);
-  const choices = omitted !== null || rows.length === 0 ? null : choicesWithout(chosen, around, rows, extendedWork);
+  const choices =
+    omitted !== null || rows.length === 0 ? null : choicesWithout(chosen, around, rows, extendedWork);
   return {
     rows: rows.map((row, k) => ({
       row,

@@ -1,5 +1,14 @@
 import type { Column } from '../data/table.ts';
-import { type Chosen, cooksDistance, standardisedResidual } from '../examine/chosen.ts';
+import {
+  type Chosen,
+  cooksDistance,
+  covarianceRatio,
+  deletedResidual,
+  fittedShift,
+  standardisedResidual,
+} from '../examine/chosen.ts';
+import { largest } from '../examine/largest.ts';
+import type { WithoutRows } from '../examine/without-row.ts';
 import { modelVariables } from '../predict/outside-data.ts';
 import type { RecordExamination } from './record.ts';
 
@@ -7,12 +16,12 @@ import type { RecordExamination } from './record.ts';
 const MOST_POINTS = 2000;
 /** Of the most extreme rows by each measure, how many a thinning keeps. */
 const MOST_EXTREME = 50;
-const MOST_INFLUENTIAL = 10;
 
 /** Rows for the charts, the most influential rows, and counts over all rows. */
 export function rowSummaries(
   chosen: Chosen,
-): Pick<RecordExamination, 'influential_rows' | 'counts' | 'points'> {
+  without: WithoutRows,
+): Pick<RecordExamination, 'influential_rows' | 'choice_omitted' | 'counts' | 'points'> {
   const { sample } = chosen;
   const n = sample.rowCount;
   const standardised = new Float64Array(n);
@@ -21,9 +30,9 @@ export function rowSummaries(
     standardised[i] = standardisedResidual(chosen, i) ?? Number.NaN;
     cook[i] = cooksDistance(chosen, i) ?? Number.NaN;
   }
-  const influential = largest(cook, MOST_INFLUENTIAL);
+  const names = chosen.fit.columns.map((column) => chosen.columns[column]!.name);
   return {
-    influential_rows: influential.map((i) => ({
+    influential_rows: without.rows.map(({ row: i, coefficients, chosen: instead }) => ({
       row: sample.lines[i]!,
       id: sample.ids?.[i] ?? null,
       fitted: chosen.fitted[i]!,
@@ -31,13 +40,30 @@ export function rowSummaries(
       standardised_residual: orNull(standardised[i]!),
       leverage: chosen.leverages[i]!,
       cooks_distance: orNull(cook[i]!),
+      deleted_residual: orNull(deletedResidual(chosen, i) ?? Number.NaN),
+      dffits: fittedShift(chosen, i),
+      covratio: covarianceRatio(chosen, i),
+      without: {
+        coefficients: coefficients.map(({ estimate, standardError, shift }, j) => ({
+          name: names[j]!,
+          estimate,
+          standard_error: standardError,
+          dfbetas: shift,
+        })),
+        chosen: instead === null || instead === undefined ? null : without.candidates[instead]!,
+      },
     })),
-    counts: countsOf(chosen, standardised),
+    choice_omitted: without.choiceOmitted,
+    counts: countsOf(chosen, standardised, cook),
     points: pointsOf(chosen, standardised, cook),
   };
 }
 
-function countsOf(chosen: Chosen, standardised: Float64Array): RecordExamination['counts'] {
+function countsOf(
+  chosen: Chosen,
+  standardised: Float64Array,
+  cook: Float64Array,
+): RecordExamination['counts'] {
   const n = chosen.sample.rowCount;
   const share = chosen.fit.columns.length / n;
   const counts = {
@@ -46,6 +72,9 @@ function countsOf(chosen: Chosen, standardised: Float64Array): RecordExamination
     beyond_3: 0,
     leverage_beyond_2p_over_n: 0,
     leverage_beyond_3p_over_n: 0,
+    cook_beyond_half: 0,
+    dffits_beyond_mark: 0,
+    covratio_beyond_mark: 0,
   };
   for (let i = 0; i < n; i++) {
     const size = Math.abs(standardised[i]!);
@@ -53,6 +82,9 @@ function countsOf(chosen: Chosen, standardised: Float64Array): RecordExamination
     if (size > 3) counts.beyond_3++;
     if (chosen.leverages[i]! > 2 * share) counts.leverage_beyond_2p_over_n++;
     if (chosen.leverages[i]! > 3 * share) counts.leverage_beyond_3p_over_n++;
+    if (cook[i]! >= 0.5) counts.cook_beyond_half++;
+    if (Math.abs(fittedShift(chosen, i) ?? 0) > 2 * Math.sqrt(share)) counts.dffits_beyond_mark++;
+    if (Math.abs((covarianceRatio(chosen, i) ?? 1) - 1) > 3 * share) counts.covratio_beyond_mark++;
   }
   return counts;
 }
@@ -96,22 +128,6 @@ function keptRows(chosen: Chosen, standardised: Float64Array, cook: Float64Array
   const evenly = MOST_POINTS - kept.size;
   for (let k = 0; k < evenly; k++) kept.add(Math.floor(((k + 0.5) * n) / evenly));
   return [...kept].sort((a, b) => a - b);
-}
-
-/** Indexes of the largest values, largest first, NaN left out; earlier rows first among equals. */
-function largest(values: Float64Array, count: number): number[] {
-  const found: number[] = [];
-  let least = Number.NEGATIVE_INFINITY;
-  for (let i = 0; i < values.length; i++) {
-    const value = values[i]!;
-    if (Number.isNaN(value) || (found.length === count && value <= least)) continue;
-    let at = found.length;
-    while (at > 0 && values[found[at - 1]!]! < value) at--;
-    found.splice(at, 0, i);
-    if (found.length > count) found.pop();
-    least = values[found.at(-1)!]!;
-  }
-  return found;
 }
 
 function timePlaces(order: Int32Array | null): Int32Array | null {

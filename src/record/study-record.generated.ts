@@ -353,6 +353,10 @@ export interface StudyRecord {
        * Distance from the best value; null with it.
        */
       difference: number | null;
+      /**
+       * Weight of evidence among all candidates with a value, under an information criterion; null under others.
+       */
+      evidence?: number | null;
     }[];
     /**
      * Name of the candidate chosen; null where none was admitted.
@@ -362,6 +366,484 @@ export interface StudyRecord {
      * Why that one, or none, in sentences.
      */
     because: string;
+    /**
+     * Whether the fewest coefficients within one standard error of the best cross-validated error win; absent where not.
+     */
+    one_standard_error?: boolean;
+    /**
+     * How candidates were cross-validated; absent where they are not.
+     */
+    validation?: {
+      /**
+       * What was held out.
+       */
+      by: 'rows' | 'group' | 'time' | 'leave_one_out';
+      /**
+       * Parts held out in turn; rows where they were held out one at a time.
+       */
+      folds: number;
+      /**
+       * How often the parts were drawn.
+       */
+      repeats: number;
+      /**
+       * Seed of the draw; null where nothing was drawn.
+       */
+      seed: number | null;
+      /**
+       * The variable that groups rows; null where none does.
+       */
+      group: string | null;
+      /**
+       * Distinct times that were never held out; null where by is not time.
+       */
+      start: number | null;
+      /**
+       * Distinct times predicted from each origin; null where by is not time.
+       */
+      horizon: number | null;
+      /**
+       * Held-out rows that a candidate could not predict from the others and that count in no candidate's figures, each repeat counted.
+       */
+      rows_left_out: number;
+      /**
+       * Mean of the response over the held-out rows.
+       */
+      mean_response: number;
+      /**
+       * Coefficients that could not be estimated without a fold.
+       *
+       * Items: One.
+       */
+      losses: {
+        /**
+         * Its name; null where a row is fitted by itself alone.
+         */
+        coefficient: string | null;
+        /**
+         * Names of the folds.
+         */
+        folds: string[];
+        /**
+         * Held-out rows that could therefore not be predicted.
+         */
+        rows: number;
+        /**
+         * Names of the candidates that have it.
+         */
+        candidates: string[];
+      }[];
+    };
+    /**
+     * The error of the whole procedure: the choice made again without each fold, what it chose held against the fold. Absent where not asked for.
+     */
+    honest_error?: {
+      /**
+       * What was held out.
+       */
+      by: 'rows' | 'group' | 'time' | 'leave_one_out';
+      /**
+       * Parts held out in turn; rows where they were held out one at a time.
+       */
+      folds: number;
+      /**
+       * How often the parts were drawn.
+       */
+      repeats: number;
+      /**
+       * Seed of the draw; null where nothing was drawn.
+       */
+      seed: number | null;
+      /**
+       * The variable that groups rows; null where none does.
+       */
+      group: string | null;
+      /**
+       * Distinct times that were never held out; null where by is not time.
+       */
+      start: number | null;
+      /**
+       * Distinct times predicted from each origin; null where by is not time.
+       */
+      horizon: number | null;
+      /**
+       * Held-out rows predicted, each repeat counted.
+       */
+      rows: number;
+      /**
+       * Held-out rows that could not be predicted from the others, and are in none of the figures.
+       */
+      rows_left_out: number;
+      /**
+       * Of choosing and fitting.
+       */
+      procedure: {
+        /**
+         * Σ w (y − ŷ)²/Σ w over the held-out rows.
+         */
+        mean_squared_error: number;
+        /**
+         * Its root, in units of the response.
+         */
+        root_mean_squared_error: number;
+        /**
+         * Standard error of the mean squared error over the folds; null with fewer than two.
+         */
+        standard_error: number | null;
+      };
+      /**
+       * Of predicting the mean of the other rows.
+       */
+      mean: {
+        /**
+         * Σ w (y − ŷ)²/Σ w over the held-out rows.
+         */
+        mean_squared_error: number;
+        /**
+         * Its root, in units of the response.
+         */
+        root_mean_squared_error: number;
+        /**
+         * Standard error of the mean squared error over the folds; null with fewer than two.
+         */
+        standard_error: number | null;
+      };
+      /**
+       * Of the candidate chosen from all rows, in the same folds: flattered by its choice. Null where none was chosen.
+       */
+      winner: {
+        /**
+         * Σ w (y − ŷ)²/Σ w over the held-out rows.
+         */
+        mean_squared_error: number;
+        /**
+         * Its root, in units of the response.
+         */
+        root_mean_squared_error: number;
+        /**
+         * Standard error of the mean squared error over the folds; null with fewer than two.
+         */
+        standard_error: number | null;
+      } | null;
+      /**
+       * Mean squared error of the mean less that of the procedure, fold by fold.
+       */
+      gain: {
+        /**
+         * The difference.
+         */
+        value: number;
+        /**
+         * Its standard error over the folds; null with fewer than two.
+         */
+        standard_error: number | null;
+      };
+      /**
+       * How often each candidate was chosen, most often first.
+       *
+       * Items: One.
+       */
+      choices: {
+        /**
+         * Its name; null where none was admitted and the mean was predicted.
+         */
+        candidate: string | null;
+        /**
+         * Folds without which it was chosen.
+         */
+        folds: number;
+      }[];
+      /**
+       * What the figures say.
+       */
+      sentence: string;
+    };
+    /**
+     * How often what was chosen from rows drawn anew with replacement. Absent where not asked for.
+     */
+    stability?: {
+      /**
+       * Times that rows were drawn.
+       */
+      repetitions: number;
+      /**
+       * Seed of the draws.
+       */
+      seed: number;
+      /**
+       * What was drawn.
+       */
+      by: 'rows' | 'group' | 'blocks';
+      /**
+       * The variable that groups rows; null where none does.
+       */
+      group: string | null;
+      /**
+       * Rows in a block; null where blocks were not drawn.
+       */
+      block_length: number | null;
+      /**
+       * Rows, groups or blocks drawn from.
+       */
+      units: number;
+      /**
+       * Repetitions in which no candidate was admitted.
+       */
+      none_admitted: number;
+      /**
+       * Every candidate that was chosen, most often first.
+       *
+       * Items: One.
+       */
+      candidates: {
+        /**
+         * Its name.
+         */
+        candidate: string;
+        /**
+         * Repetitions in which it was chosen.
+         */
+        chosen: number;
+        /**
+         * As a share of all repetitions.
+         */
+        share: number;
+      }[];
+      /**
+       * Every term of a chosen candidate, most often first.
+       *
+       * Items: One.
+       */
+      terms: {
+        /**
+         * Its name.
+         */
+        term: string;
+        /**
+         * Repetitions in which the chosen candidate has it.
+         */
+        chosen: number;
+        /**
+         * As a share of all repetitions.
+         */
+        share: number;
+      }[];
+      /**
+       * Spread of each coefficient over the repetitions in which the chosen candidate has it.
+       *
+       * Items: One.
+       */
+      coefficients: {
+        /**
+         * Its name.
+         */
+        name: string;
+        /**
+         * The response's scale that it belongs to.
+         */
+        scale: string;
+        /**
+         * Repetitions in which the chosen candidate has it.
+         */
+        chosen: number;
+        /**
+         * Of these, those in which it is above zero.
+         */
+        positive: number;
+        /**
+         * Quantile at 0.05.
+         */
+        q05: number;
+        /**
+         * Lower quartile.
+         */
+        q25: number;
+        /**
+         * Median.
+         */
+        median: number;
+        /**
+         * Upper quartile.
+         */
+        q75: number;
+        /**
+         * Quantile at 0.95.
+         */
+        q95: number;
+      }[];
+    };
+    /**
+     * Inference averaged over the admitted candidates by their weights of evidence (Burnham & Anderson 2002). Absent where not asked for or none is admitted.
+     */
+    averaged?: {
+      /**
+       * What is averaged, best first.
+       *
+       * Items: One.
+       */
+      candidates: {
+        /**
+         * Its name.
+         */
+        candidate: string;
+        /**
+         * Weight of evidence among the admitted ones.
+         */
+        weight: number;
+      }[];
+      /**
+       * Confidence of the coefficients' intervals.
+       */
+      confidence: number;
+      /**
+       * Every coefficient of one of them.
+       *
+       * Items: One.
+       */
+      coefficients: {
+        /**
+         * Its name.
+         */
+        name: string;
+        /**
+         * Weight of the candidates that have it.
+         */
+        weight: number;
+        /**
+         * Over all candidates, 0 in those without it.
+         */
+        estimate: number;
+        /**
+         * Unconditional standard error: Σ w √(variance + (estimate − average)²).
+         */
+        standard_error: number;
+        /**
+         * Lower end of its interval.
+         */
+        lower: number;
+        /**
+         * Upper end.
+         */
+        upper: number;
+        /**
+         * Over the candidates that have it.
+         */
+        estimate_where_included: number;
+        /**
+         * Its unconditional standard error.
+         */
+        standard_error_where_included: number;
+      }[];
+      /**
+       * Confidence of the predictions' intervals.
+       */
+      prediction_interval: number;
+      /**
+       * The mean at each row that the study states (the median where the scale is not natural).
+       *
+       * Items: One.
+       */
+      predictions: {
+        /**
+         * The row's label.
+         */
+        label: string;
+        /**
+         * On the response's own scale.
+         */
+        estimate: number;
+        /**
+         * Lower end of its interval; null where it has none.
+         */
+        lower: number | null;
+        /**
+         * Upper end; null where it has none.
+         */
+        upper: number | null;
+      }[];
+    };
+    /**
+     * The chosen model tried once on the rows that were set aside. Absent where none were; null figures where none could be predicted or none was chosen.
+     */
+    hold_out?: {
+      /**
+       * How the rows were set aside.
+       */
+      rule: string;
+      /**
+       * Rows set aside.
+       */
+      rows: number;
+      /**
+       * Of these, rows that the chosen model cannot predict; null where none was chosen.
+       */
+      rows_not_predicted: number | null;
+      /**
+       * Σ w (y − ŷ)/Σ w: positive where the model predicts too little.
+       */
+      mean_error: number | null;
+      /**
+       * Σ w (y − ŷ)²/Σ w.
+       */
+      mean_squared_error: number | null;
+      /**
+       * Its root, in units of the response.
+       */
+      root_mean_squared_error: number | null;
+      /**
+       * CV(RMSE): 100 × root mean squared error/mean response, in per cent; null where the response is not positive throughout.
+       */
+      cv_rmse_percent: number | null;
+      /**
+       * Normalised mean bias error: 100 × mean error/mean response, in per cent; null likewise.
+       */
+      mean_bias_percent: number | null;
+      /**
+       * Confidence of the prediction intervals.
+       */
+      interval: number;
+      /**
+       * Rows that have a prediction interval; null where none was chosen.
+       */
+      with_interval: number | null;
+      /**
+       * Of these, rows whose response lies inside; null likewise.
+       */
+      inside: number | null;
+      /**
+       * 95 % interval for the share inside, lower end (Clopper & Pearson 1934); null likewise.
+       */
+      inside_lower: number | null;
+      /**
+       * Upper end.
+       */
+      inside_upper: number | null;
+    };
+    /**
+     * Where the choice is made on one part of the rows and the chosen model estimated on the other: candidates and ranking are of the first part, model, examination and predictions of the second. Absent where not.
+     */
+    split_sample?: {
+      /**
+       * Share of the rows for choosing.
+       */
+      share: number;
+      /**
+       * Seed of the draw.
+       */
+      seed: number;
+      /**
+       * Rows that the choice was made on.
+       */
+      rows_choosing: number;
+      /**
+       * Rows that the chosen model is estimated from.
+       */
+      rows_estimating: number;
+      /**
+       * The chosen candidate as estimated on the second part; null where none was chosen.
+       */
+      estimated: RecordCandidate | null;
+    };
   };
   /**
    * The chosen model; null where no candidate was admitted.
@@ -651,6 +1133,43 @@ export interface RecordCandidate {
    * Each rule that it broke, as a sentence; empty where admitted.
    */
   refused_because: string[];
+  /**
+   * Errors on rows that were held out, on the response's own scale; absent where candidates are not cross-validated, null where it has none.
+   */
+  validation?: {
+    /**
+     * Held-out rows predicted, each repeat counted.
+     */
+    rows: number;
+    /**
+     * Σ w (y − ŷ)²/Σ w.
+     */
+    mean_squared_error: number;
+    /**
+     * Its root, in units of the response.
+     */
+    root_mean_squared_error: number;
+    /**
+     * Standard error of the mean squared error over the folds; null with fewer than two.
+     */
+    standard_error: number | null;
+    /**
+     * Σ w (y − ŷ)/Σ w: positive where the candidate predicts too little.
+     */
+    mean_error: number;
+    /**
+     * CV(RMSE): 100 × root mean squared error/mean response, in per cent; null where the response is not positive throughout.
+     */
+    cv_rmse_percent: number | null;
+    /**
+     * Normalised mean bias error: 100 × mean error/mean response, in per cent; null likewise.
+     */
+    mean_bias_percent: number | null;
+  } | null;
+  /**
+   * Why it has no cross-validated error, as a sentence; null where it has, absent where candidates are not cross-validated.
+   */
+  validation_omitted?: string | null;
 }
 /**
  * One column of a candidate's design with its estimate, on the candidate's response scale.
@@ -1363,6 +1882,41 @@ export interface RecordExamination {
    */
   findings: RecordFinding[];
   /**
+   * What to know before relying on the model, weightiest for the declared question first. Absent from records of versions before it.
+   *
+   * Items: One thing to know.
+   */
+  before_you_rely?: {
+    /**
+     * What was found and what to do about it, as sentences.
+     */
+    text: string;
+    /**
+     * What it is about: rows, collinearity, shape, spread, independence, normality, constancy, outliers, influence or outside (predictions outside the data).
+     */
+    about: string;
+    /**
+     * Name of the finding that it comes from; null where it comes from the predictions.
+     */
+    finding: string | null;
+    /**
+     * 1 worth a look, 2 take care.
+     */
+    concern: 1 | 2;
+    /**
+     * How much it matters for the declared question.
+     */
+    weight: number;
+  }[];
+  /**
+   * Intervals from drawing the rows again; null where the study asks for none. Absent from records of versions before it.
+   */
+  bootstrap?: RecordBootstrap | null;
+  /**
+   * Why the choice was not made again without each influential row, as a sentence; null where it was. Absent from records of versions before it.
+   */
+  choice_omitted?: string | null;
+  /**
    * The most influential rows, most influential first, at most 10.
    *
    * Items: One row.
@@ -1396,6 +1950,50 @@ export interface RecordExamination {
      * Cook's distance; null with the standardised residual.
      */
     cooks_distance: number | null;
+    /**
+     * Its distance from the model fitted without it, in standard errors; null where undefined. This and what follows: absent from records of versions before it.
+     */
+    deleted_residual?: number | null;
+    /**
+     * How far it moves its own fitted value, in standard errors; null where undefined.
+     */
+    dffits?: number | null;
+    /**
+     * The determinant of the coefficients' covariance without it over that with it; null where undefined.
+     */
+    covratio?: number | null;
+    /**
+     * What the study would say without it.
+     */
+    without?: {
+      /**
+       * The chosen model's coefficients without the row.
+       *
+       * Items: One coefficient.
+       */
+      coefficients: {
+        /**
+         * Name of the coefficient.
+         */
+        name: string;
+        /**
+         * Its estimate without the row.
+         */
+        estimate: number;
+        /**
+         * Its classical standard error without the row; null where undefined.
+         */
+        standard_error: number | null;
+        /**
+         * How far the row moves it, in standard errors; null where undefined.
+         */
+        dfbetas: number | null;
+      }[];
+      /**
+       * Name of the candidate that the declared rule would choose; null where none would be admitted, or where the choice was not made again (choice_omitted).
+       */
+      chosen: string | null;
+    };
   }[];
   /**
    * How far the columns of the chosen model can be told apart (Belsley, Kuh & Welsch 1980). Absent from records of versions before it.
@@ -1514,6 +2112,18 @@ export interface RecordExamination {
      * Rows whose leverage is above 3p/n.
      */
     leverage_beyond_3p_over_n: number;
+    /**
+     * Rows whose Cook's distance is at least 0.5. This and what follows: absent from records of versions before it.
+     */
+    cook_beyond_half?: number;
+    /**
+     * Rows whose DFFITS is beyond 2√(p/n).
+     */
+    dffits_beyond_mark?: number;
+    /**
+     * Rows whose COVRATIO is beyond 1 ± 3p/n.
+     */
+    covratio_beyond_mark?: number;
   };
   /**
    * Rows for the charts: all rows up to 2,000, beyond that a fixed thinning that keeps the most extreme. Lists of equal length, in file order.
@@ -1624,6 +2234,124 @@ export interface RecordFinding {
    * What to do about it, as a sentence; null where nothing is to be done.
    */
   advice: string | null;
+  /**
+   * Further figures, where the one statistic does not say all. Absent where there are none, and from records of versions before it.
+   *
+   * Items: One figure.
+   */
+  figures?: {
+    /**
+     * What it is, in words.
+     */
+    name: string;
+    /**
+     * The figure; null where it is not defined.
+     */
+    value: number | null;
+  }[];
+}
+/**
+ * Intervals from drawing the rows, residuals or blocks of rows again and again.
+ */
+export interface RecordBootstrap {
+  /**
+   * What was drawn.
+   */
+  by: 'rows' | 'residuals' | 'blocks';
+  /**
+   * Repetitions asked for.
+   */
+  repetitions: number;
+  /**
+   * Repetitions in which every coefficient could be estimated.
+   */
+  used: number;
+  /**
+   * Where the random numbers started.
+   */
+  seed: number;
+  /**
+   * Rows in a block; null where blocks were not drawn.
+   */
+  block_length: number | null;
+  /**
+   * Confidence of the intervals for coefficients.
+   */
+  confidence: number;
+  /**
+   * What a reader has to know of how it went, as sentences; null where there is nothing.
+   */
+  note: string | null;
+  /**
+   * The chosen model's coefficients in order; empty where too few repetitions could be used.
+   *
+   * Items: One coefficient.
+   */
+  coefficients: {
+    /**
+     * Its name.
+     */
+    name: string;
+    /**
+     * The estimate from all rows.
+     */
+    estimate: number;
+    /**
+     * Mean of the repetitions less the estimate.
+     */
+    bias: number;
+    /**
+     * Standard deviation of the repetitions.
+     */
+    standard_error: number;
+    /**
+     * Lower quantile of the repetitions.
+     */
+    lower: number;
+    /**
+     * Upper quantile of the repetitions.
+     */
+    upper: number;
+    /**
+     * Twice the estimate less the upper quantile.
+     */
+    basic_lower: number;
+    /**
+     * Twice the estimate less the lower quantile.
+     */
+    basic_upper: number;
+  }[];
+  /**
+   * Confidence of the prediction intervals.
+   */
+  prediction_interval: number;
+  /**
+   * Intervals of the predictions, in order, on the response's own scale; empty where there are none or they are too many.
+   *
+   * Items: One prediction.
+   */
+  predictions: {
+    /**
+     * What the row is called.
+     */
+    label: string;
+    /**
+     * Lower end for a new row; null where there is none.
+     */
+    lower: number | null;
+    /**
+     * Upper end for a new row; null where there is none.
+     */
+    upper: number | null;
+    /**
+     * Lower end for the mean at this place (the median where the scale is not natural); null where there is none.
+     */
+    mean_lower: number | null;
+    /**
+     * Upper end for the mean; null where there is none.
+     */
+    mean_upper: number | null;
+  }[];
 }
 /**
  * One predicted row, on the response's own scale.

@@ -28,7 +28,10 @@ function anyColumns(): fc.Arbitrary<readonly Column[]> {
         numbers('a', a),
         numbers('b', b),
         category('k', kinds),
-        numbers('w', draw().map((v) => 1.5 + v)),
+        numbers(
+          'w',
+          draw().map((v) => 1.5 + v),
+        ),
       ];
     });
 }
@@ -112,12 +115,15 @@ describe('without each influential row', () => {
         const largest = new Float64Array(p);
         for (let row = 0; row < chosen.sample.rowCount; row++) {
           const { chosen: less } = chosenFrom(dropRow(columns, row), wanted);
-          const moved = Array.from({ length: p }, (_, j) => chosen.fit.estimates[j]! - less.fit.estimates[j]!);
+          const moved = Array.from(
+            { length: p },
+            (_, j) => chosen.fit.estimates[j]! - less.fit.estimates[j]!,
+          );
           moved.forEach((change, j) => {
             const shift = change / (less.s! * Math.sqrt(chosen.fit.inverse[j * p + j]!));
             if (Math.abs(shift) > Math.abs(largest[j]!)) largest[j] = shift;
           });
-          const x = [1, valueOf(columns, 'a', row), valueOf(columns, 'b', row)];
+          const x = [1, cellOf(columns, 'a', row), cellOf(columns, 'b', row)];
           const change = x.reduce((sum, value, j) => sum + value * moved[j]!, 0);
           near(fittedShift(chosen, row)!, change / (less.s! * Math.sqrt(chosen.leverages[row]!)));
           // det(s²_(i)(X′X)_(i)⁻¹)/det(s²(X′X)⁻¹), with det (X′X)_(i) = (1 − h) det X′X.
@@ -153,7 +159,8 @@ describe('without each influential row', () => {
 
   test('a rule that the factor does not tell, robust p-values and a single candidate step aside with a sentence', () => {
     const columns = fc.sample(anyColumns(), { numRuns: 1, seed: 3 })[0]!;
-    const change = (to: (study: Study) => Study): Fitted => chosenFrom(columns, { ...wantedBy('aicc', false), change: to });
+    const change = (to: (study: Study) => Study): Fitted =>
+      chosenFrom(columns, { ...wantedBy('aicc', false), change: to });
     const omitted = (fitted: Fitted) => withoutRows(fitted.chosen, fitted).choiceOmitted;
     const robust = change((study) => ({
       ...study,
@@ -161,7 +168,10 @@ describe('without each influential row', () => {
       inference: { ...study.inference, standardErrors: { kind: 'hc3' } },
     }));
     expect(omitted(robust)).toContain('declared standard errors');
-    const folds = change((study) => ({ ...study, selection: { ...study.selection, rankBy: 'cross_validation' } }));
+    const folds = change((study) => ({
+      ...study,
+      selection: { ...study.selection, rankBy: 'cross_validation' },
+    }));
     expect(omitted(folds)).toContain('cross_validation');
     expect(omitted(chosenFrom(columns, { terms: ['a'] }))).toBe('There is only one candidate to choose.');
   });
@@ -174,9 +184,8 @@ describe('without each influential row', () => {
   });
 });
 
-function valueOf(columns: readonly Column[], name: string, row: number): number {
+function cellOf(columns: readonly Column[], name: string, row: number): number {
   const column = columns.find((each) => each.name === name);
   if (column === undefined || column.kind === 'category' || column.kind === 'text') throw new Error(name);
   return column.values[row]!;
 }
-

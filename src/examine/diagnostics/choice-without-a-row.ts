@@ -42,8 +42,7 @@ export const choiceWithoutARow: Diagnostic = {
           ? `The same candidate would be chosen without ${looked}.`
           : `The choice hangs on single rows: ${told}${more}.`,
       // That the choice hangs on the most influential row, or on many, weighs more than a tie that any row tips.
-      concern:
-        others.length === 0 ? 0 : rows[0]!.chosen !== own || others.length * 2 >= rows.length ? 2 : 1,
+      concern: others.length === 0 ? 0 : rows[0]!.chosen !== own || others.length * 2 >= rows.length ? 2 : 1,
       advice:
         others.length === 0
           ? null

@@ -16,7 +16,7 @@ export const equalSpread: Diagnostic = {
     if (chosen.s === null)
       return notPossible('The model fits these rows exactly, so there is no spread to judge.');
     const found = koenker(chosen);
-    if (found === null) return notPossible('The model has no column that the spread could depend on.');
+    if (found === null) return notPossible('The model has no column that varies, so the spread can depend on none.');
     const { statistic, df } = found;
     const p = chiSquaredUpper(statistic, df);
     const concern = concernOf(p);
@@ -47,7 +47,7 @@ function remedy({ study, spreads, fit }: Chosen): string {
     : 'Declare weights, or bring what the spread depends on into the model (the response has values below zero, so a log or square-root scale is not open to it)';
 }
 
-/** The statistic and its degrees of freedom; null where the model has no column beside the intercept. */
+/** The statistic and its degrees of freedom; null where no column of the model varies. */
 export function koenker(chosen: Chosen): { statistic: number; df: number } | null {
   const { columns, fit, sample, residuals } = chosen;
   const own = fit.columns.filter((column) => column !== 0);
@@ -81,5 +81,6 @@ export function koenker(chosen: Chosen): { statistic: number; df: number } | nul
   );
   const share =
     auxiliary.totalSumOfSquares > 0 ? 1 - auxiliary.residualSumOfSquares / auxiliary.totalSumOfSquares : 0;
-  return { statistic: sample.rowCount * Math.max(0, share), df: auxiliary.columns.length - 1 };
+  const df = auxiliary.columns.length - 1;
+  return df < 1 ? null : { statistic: sample.rowCount * Math.max(0, share), df };
 }

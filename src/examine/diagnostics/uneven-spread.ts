@@ -26,7 +26,8 @@ export const unevenSpread: Diagnostic = {
     const s = chosen.s!;
     const n = sample.rowCount;
     const own = fit.columns.filter((column) => column !== 0).map((column) => columns[column]!);
-    if (own.length === 0) return notPossible('The model has no column that the spread could depend on.');
+    const constant = notPossible('The model has no column that varies, so the spread can depend on none.');
+    if (own.length === 0) return constant;
     const design = [columns[0]!, ...own, ...squaresAndProducts(own)];
     if (n * design.length ** 2 > WORK)
       return notPossible(
@@ -46,6 +47,7 @@ export const unevenSpread: Diagnostic = {
       design.map((_, j) => j),
     );
     const df = auxiliary.rank - 1;
+    if (df < 1) return constant;
     if (auxiliary.rank >= n)
       return notPossible(
         `With the squares and products of its columns the model has ${design.length} columns for ${n} rows, too many for the test.`,

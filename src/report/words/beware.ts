@@ -1,25 +1,26 @@
 import { count, percent } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import { missedSentences } from './acceptance.ts';
-import { type Lexicon, listed, raised, stopped } from './lexicon.ts';
+import { type Lexicon, raised, stopped } from './lexicon.ts';
 import { fittedUnit } from './scale.ts';
 
 /** At least this many lines stand on the first screen, and at most that many. */
 const FEWEST = 3;
 const MOST = 5;
+/** From this weight on, what the examination found comes before the warnings; concern alone weighs less. */
+const GRAVE = 0.55;
 
 /**
  * "Before you rely on this": most important first. What was missed or found comes before what is always
  * true; the standing cautions fill the list up to three.
  */
 export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
-  const findings = record.examination?.findings ?? [];
+  const found = toKnow(record);
   const lines = [
     ...missedSentences(record.acceptance, fittedUnit(lexicon.response)),
-    ...findings.filter((f) => f.concern === 2).map((f) => findingLine(f)),
-    ...outsideLine(record),
+    ...found.filter(({ weight }) => weight >= GRAVE).map(({ text }) => text),
     ...record.warnings.map((w) => raised(stopped(w.text))),
-    ...findings.filter((f) => f.concern === 1).map((f) => findingLine(f)),
+    ...found.filter(({ weight }) => weight < GRAVE).map(({ text }) => text),
     ...lossLine(record),
   ];
   const standing = standingLines(record);
@@ -35,24 +36,20 @@ export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
   return shown;
 }
 
-function findingLine(finding: { readonly verdict: string; readonly advice: string | null }): string {
-  return stopped(finding.verdict) + (finding.advice === null ? '' : ` ${stopped(finding.advice)}`);
-}
-
-function outsideLine(record: StudyRecord): string[] {
-  const outside = record.predictions.filter((p) => p.outside.length > 0);
-  if (outside.length === 0) return [];
-  const [only] = outside;
-  if (outside.length === 1 && only !== undefined) {
-    return [
-      `The prediction for ${only.label} lies outside the data: ${listed(only.outside.map((s) => s.replace(/\.$/, '')))}.`,
-    ];
-  }
-  const names = outside.slice(0, 3).map((p) => p.label);
-  const more = outside.length - names.length;
-  return [
-    `${count(outside.length)} of ${count(record.predictions.length)} predictions lie outside the data: ${more > 0 ? `${names.join(', ')} and ${more} more` : listed(names)}.`,
-  ];
+/** What the examination lists, weightiest first; from a record without that list, the findings by concern. */
+function toKnow({ examination }: StudyRecord): readonly { readonly text: string; readonly weight: number }[] {
+  if (examination === null) return [];
+  return (
+    examination.before_you_rely ??
+    [2, 1].flatMap((concern) =>
+      examination.findings
+        .filter((finding) => finding.concern === concern)
+        .map(({ verdict, advice }) => ({
+          text: stopped(verdict) + (advice === null ? '' : ` ${stopped(advice)}`),
+          weight: concern === 2 ? 1 : 0,
+        })),
+    )
+  );
 }
 
 function lossLine(record: StudyRecord): string[] {
