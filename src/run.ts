@@ -7,6 +7,7 @@ import { checkStandardErrors } from './engine/check-standard-errors.ts';
 import { type FittedAll, fitAll } from './engine/fit-all.ts';
 import { refineFit } from './engine/refine.ts';
 import { bootstrap } from './examine/bootstrap.ts';
+import { checkFindingNames } from './examine/check-finding-names.ts';
 import { checkHypotheses } from './examine/check-hypotheses.ts';
 import { type Chosen, examineRows } from './examine/chosen.ts';
 import { buildDesign } from './model/build-design.ts';
@@ -16,6 +17,15 @@ import { toScale } from './model/response-scale.ts';
 import { bootstrapPredictions } from './predict/bootstrap-predictions.ts';
 import { type Predicted, type PredictionRows, predict, smearingResiduals } from './predict/predict.ts';
 import { fileRows, statedRows } from './predict/prediction-rows.ts';
+import { type AveragedPrediction, averagePredictions } from './predict/average-predictions.ts';
+import { tryHoldOut } from './predict/hold-out.ts';
+import { splitSample } from './prepare/set-aside.ts';
+import { subSample } from './prepare/sub-sample.ts';
+import type { SelectionFindings } from './record/describe-selection.ts';
+import type { Choice } from './select/choose.ts';
+import type { Ground } from './select/material.ts';
+import { type Validated, validateCandidates } from './select/validate-candidates.ts';
+import type { ChoiceTrust } from './select/question-choice.ts';
 import { prepareSample } from './prepare/prepare-sample.ts';
 import type { Sample } from './prepare/sample.ts';
 import { type Spread, spreadsOf } from './prepare/spread.ts';
@@ -70,6 +80,7 @@ export async function checkStudy(path: string, options: RunOptions = {}): Promis
   const table = await readTable(study.data, study.folder, report, {
     onProgress: (rows) => options.onProgress?.('reading rows', rows, null),
   });
+  checkFindingNames(study, report);
   if (table === null) return { study, table, sample: null, dataRead: true, problems };
   const sample = prepareSample(study, table, report);
   if (sample !== null) checkStandardErrors(study, sample, report);
@@ -93,27 +104,35 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   const design = buildDesign(study, sample, report);
   if (design === null) return stopped();
   checkHypotheses(study, design, report);
-  const own = numbersOf(sample, study.response.variable);
-  const rows = rowsOf(study, sample, design, own);
+  const whole = groundOf(study, sample, design);
+  if (!checkMagnitudes(study, sample, design, whole.rows, table.file, report)) return stopped();
 
-  if (!checkMagnitudes(study, sample, design, rows, table.file, report)) return stopped();
+  // All rows serve for choosing and for estimating, unless the study splits them.
+  const split = splitGround(study, sample, design, report);
+  if (hasError(problems)) return stopped();
+  const choosing = split?.choosing ?? whole;
+  const estimating = split?.estimating ?? whole;
 
-  const fits = fitAll(design, rows, own, {
-    pressRanks: study.selection.rankBy === 'press',
-    onProgress: (done, total) => options.onProgress?.('fitting candidates', done, total),
-  });
-  checkFits(study, sample, design, fits.fits, report);
+  const fits = fitGround(study, choosing, options, report);
+  checkFits(study, choosing.sample, design, fits.fits, report);
   if (hasError(problems)) return stopped();
 
-  const fitted = { ...fits, covariances: candidateCovariances(study, sample, fits.fits, rows, report) };
-  const choice = choose(study, fitted, report);
+  const validated = validateCandidates(study, { ...choosing, facts: fits.facts }, fits, report, options.onProgress);
+  if (hasError(problems)) return stopped();
+  const ranked = { ...fits, validation: validated?.validation };
+  const choice = choose(study, ranked, report);
   if (hasError(problems)) return stopped();
 
-  const spreads = spreadsOf(sample);
+  const trust = await questionAll(study, choosing, ranked, choice, validated, report, options);
+  if (hasError(problems)) return stopped();
+
+  const fitted = split === null ? ranked : fitGround(study, estimating, options, report);
+  const { rows } = estimating;
+  const spreads = spreadsOf(estimating.sample);
   const chosen =
     choice.chosen === null
       ? null
-      : examineChosen(study, sample, spreads, design, rows, fitted, choice.chosen);
+      : examineChosen(study, estimating.sample, spreads, design, rows, fitted, choice.chosen);
   const ahead = chosen === null ? null : await predictAll(chosen, report);
   if (hasError(problems)) return stopped();
   const bootstrapped = chosen === null ? null : bootstrapAll(chosen, ahead!.sources, options);
@@ -127,7 +146,18 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     design,
     rows,
     fitted,
+    ranked,
     choice,
+    findings: {
+      validated,
+      trust,
+      averagedPredictions: averageAhead(chosen, ranked, trust, ahead?.sources ?? []),
+      holdOut: tryHeldOut(chosen, sample),
+      split:
+        split === null
+          ? null
+          : { choosing: split.choosing.rows.rowCount, estimating: split.estimating.rows.rowCount },
+    },
     chosen,
     predicted: ahead?.predicted ?? null,
     bootstrapped,
@@ -135,6 +165,84 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     problems,
   });
   return { record, dataRead, problems, residuals: chosen === null ? null : residualColumns(chosen), kept };
+}
+
+/** Rows that something is done with: all of the sample, or a part of it. */
+type Part = Omit<Ground, 'folds' | 'facts'>;
+
+function groundOf(study: Study, sample: Sample, design: Design): Part {
+  const own = numbersOf(sample, study.response.variable);
+  return { sample, design, own, rows: rowsOf(study, sample, design, own) };
+}
+
+/** The part that the choice is made on and the one that the chosen model is estimated from; null where all rows serve for both. */
+function splitGround(
+  study: Study,
+  sample: Sample,
+  design: Design,
+  report: Report,
+): { readonly choosing: Part; readonly estimating: Part } | null {
+  const plan = study.selection.splitSample;
+  const parts = plan === null ? null : splitSample(plan, study, sample, report);
+  if (parts === null) return null;
+  return {
+    choosing: groundOf(study, subSample(sample, parts.choosing), design),
+    estimating: groundOf(study, subSample(sample, parts.estimating), design),
+  };
+}
+
+function fitGround(study: Study, { sample, design, rows, own }: Part, options: RunOptions, report: Report) {
+  const fits = fitAll(design, rows, own, {
+    pressRanks: study.selection.rankBy === 'press',
+    onProgress: (done, total) => options.onProgress?.('fitting candidates', done, total),
+  });
+  return { ...fits, covariances: candidateCovariances(study, sample, fits.fits, rows, report) };
+}
+
+/** Makes the choice again from other rows where the study asks how far it can be trusted. */
+async function questionAll(
+  study: Study,
+  part: Part,
+  fitted: FittedAll,
+  choice: Choice,
+  validated: Validated | null,
+  report: Report,
+  options: RunOptions,
+): Promise<ChoiceTrust | null> {
+  const { honestError, stability, average } = study.selection;
+  if (honestError === null && stability === null && !average) return null;
+  const { questionChoice } = await import('./select/question-choice.ts');
+  const folds = study.selection.rankBy === 'cross_validation' ? (validated?.folds ?? null) : null;
+  return questionChoice(
+    study,
+    { ...part, facts: fitted.facts, folds },
+    fitted,
+    choice,
+    null,
+    report,
+    options.onProgress,
+  );
+}
+
+/** The chosen model on the rows that were set aside, once. */
+function tryHeldOut(chosen: Chosen | null, sample: Sample): SelectionFindings['holdOut'] {
+  const { heldOut } = sample;
+  if (heldOut === undefined) return null;
+  return {
+    rows: heldOut.rowCount,
+    trial: chosen === null ? null : tryHoldOut(chosen, heldOut, smearingResiduals(chosen)),
+  };
+}
+
+/** The rows stated in the study, predicted by all admitted candidates together where it asks for that. */
+function averageAhead(
+  chosen: Chosen | null,
+  fitted: FittedAll,
+  trust: ChoiceTrust | null,
+  [stated]: readonly PredictionRows[],
+): AveragedPrediction[] {
+  if (chosen === null || trust?.averaged == null || stated === undefined) return [];
+  return averagePredictions(chosen, fitted, trust.averaged, stated);
 }
 
 function rowsOf(study: Study, sample: Sample, design: Design, own: Float64Array): DesignRows {

@@ -1,5 +1,5 @@
 import { execFile } from 'node:child_process';
-import { mkdtemp, readFile, rm, writeFile } from 'node:fs/promises';
+import { mkdir, mkdtemp, readFile, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
@@ -41,7 +41,9 @@ function node(...args: string[]) {
 describe('README', () => {
   test('every block is of a kind that is run here', () => {
     expect(blocks.length).toBeGreaterThan(5);
-    expect(blocks.filter(({ language }) => !['sh', 'csv', 'yaml', 'ts'].includes(language))).toEqual([]);
+    expect(blocks.filter(({ language }) => !['sh', 'bash', 'csv', 'yaml', 'ts'].includes(language))).toEqual(
+      [],
+    );
     expect(blocks.filter(({ language }) => language === 'csv').map(({ file }) => file)).toEqual([
       'firings.csv',
     ]);
@@ -85,6 +87,23 @@ describe('README', () => {
       const place = name.endsWith('.csv') ? join(results, 'tables', name) : join(results, name);
       expect((await readFile(place, 'utf8')).length, name).toBeGreaterThan(50);
     }
+  });
+
+  test('the job for continuous integration runs, and writes what it says', { timeout: 60_000 }, async () => {
+    const bin = join(folder, 'bin');
+    await mkdir(bin);
+    const main = `"${process.execPath}" --import "${import.meta.resolve('tsx')}" "${path('src/cli/main.ts')}"`;
+    await writeFile(join(bin, 'npx'), `#!/bin/sh\nshift\nexec ${main} "$@"\n`, { mode: 0o755 });
+    const [job, ...more] = blocks.filter(({ language }) => language === 'bash');
+    expect(more).toEqual([]);
+    await writeFile(join(folder, 'job.sh'), job?.text ?? '');
+    const env = { ...process.env, PATH: `${bin}:${process.env.PATH}` };
+    const { stderr } = await run('/bin/sh', ['job.sh'], { cwd: folder, env });
+    expect(stderr).toBe('');
+    expect(await readFile(join(folder, 'ci/junit.xml'), 'utf8')).toContain(
+      'name="Adjusted R²: at least 0.75"/>',
+    );
+    expect((await readFile(join(folder, 'ci/summary.md'), 'utf8')).length).toBeLessThan(65_536);
   });
 
   test('the library example runs', { timeout: 60_000 }, async () => {

@@ -2,7 +2,9 @@ import { Command, CommanderError, Option } from 'commander';
 import { packageVersion } from '../package-file.ts';
 import type { Problem } from '../problem.ts';
 import type { StudyOptions } from './common-options.ts';
+import type { CompareCommandOptions } from './compare.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
+import type { FitCommandOptions } from './fit.ts';
 import type { RenderCommandOptions } from './render.ts';
 import { showProblems } from './show-problems.ts';
 import type { Terminal } from './terminal.ts';
@@ -73,12 +75,33 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
     .description('run the whole study and write its record, reports and tables')
     .argument('<study>', 'the study file')
     .option('--out <folder>', 'where to write (default: results/ and the name of the study)')
+    .option('--against <earlier>', 'an earlier record, or the folder of its results, to compare with')
     .addOption(given())
+    .option('--junit <file>', 'write the acceptance criteria as tests for continuous integration (JUnit XML)')
     .addOption(quiet())
     .addOption(problems())
-    .action(async (study: string, options: StudyOptions & { out?: string }) => {
+    .action(async (study: string, options: FitCommandOptions) => {
       const { fitCommand } = await import('./fit.ts');
       ended(await fitCommand(study, options, terminal));
+    });
+
+  program
+    .command('compare')
+    .description('say what is different between two records, and what moved each coefficient')
+    .argument('<earlier>', 'the earlier record, or the folder of its results')
+    .argument('<later>', 'the later one')
+    .option('--out <folder>', 'where to write (default: nothing is written)')
+    .addOption(
+      new Option(
+        '--format <format>',
+        'one format only; without --out it is printed (default: all three are written)',
+      ).choices(['html', 'markdown', 'json']),
+    )
+    .addOption(quiet())
+    .addOption(problems())
+    .action(async (earlier: string, later: string, options: CompareCommandOptions) => {
+      const { compareCommand } = await import('./compare.ts');
+      ended(await compareCommand(earlier, later, options, terminal));
     });
 
   program

@@ -1,5 +1,7 @@
 import { basename, dirname, join, relative, resolve } from 'node:path';
-import type { Problem } from '../problem.ts';
+import type { ComparedSide } from '../compare/compare.ts';
+import type { Comparison } from '../compare/comparison.ts';
+import type { Problem, Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
 import { recordFaults } from '../record/record-faults.ts';
 import { recordText } from '../record/record-text.ts';
@@ -17,10 +19,19 @@ import { sourceTexts } from './source-texts.ts';
 import { summary } from './summary.ts';
 import type { Terminal } from './terminal.ts';
 
-/** `plumbrule fit STUDY`: the whole study, down to record, reports and tables in the output folder. */
+export interface FitCommandOptions extends StudyOptions {
+  readonly out?: string;
+  /** An earlier record, or the folder of its results, to compare with. */
+  readonly against?: string;
+}
+
+/**
+ * `plumbrule fit STUDY`: the whole study, down to record, reports and tables in the output folder; with an earlier
+ * record also what is different from it, written together with the rest.
+ */
 export async function fitCommand(
   path: string,
-  options: StudyOptions & { readonly out?: string },
+  options: FitCommandOptions,
   terminal: Terminal,
 ): Promise<number> {
   const problems: Problem[] = [];
@@ -29,8 +40,16 @@ export async function fitCommand(
     await showProblems(problems, new Map(), options.problems, terminal);
     return UNUSABLE;
   }
+  const report: Report = (problem) => problems.push(problem);
+  // The earlier record may lie where the new one is going to be written.
+  const earlier = options.against === undefined ? null : await readEarlier(options.against, report);
+  if (hasError(problems)) {
+    await showProblems(problems, await sourceTexts(problems), options.problems, terminal);
+    return UNUSABLE;
+  }
   const progress = progressOn(terminal, options.quiet === true);
   let dataRead = false;
+  let comparison: Comparison | null = null;
   let templates: ReadonlyMap<string, string> = new Map();
   let written: { readonly record: StudyRecord; readonly out: string; readonly names: string[] } | null = null;
   try {
@@ -40,12 +59,14 @@ export async function fitCommand(
     if (result.record !== null && !hasError(problems)) {
       const out = options.out ?? defaultFolder(path);
       templates = templatePlaces(result.record, dirname(path));
-      const files = await resultFiles(result.record, result, dirname(path), (problem) =>
-        problems.push(problem),
-      );
+      const files = await resultFiles(result.record, result, dirname(path), report);
+      if (earlier !== null) {
+        comparison = await compareWith(earlier, result.record, result, out, report);
+        if (comparison !== null) files.push(...(await filesOf(comparison, result.record)));
+      }
       if (!hasError(problems)) {
         progress.show('writing results', 0, null);
-        const done = await writeResults(out, files, (problem) => problems.push(problem), RESULT_FILES);
+        const done = await writeResults(out, files, report, RESULT_FILES);
         if (done) written = { record: result.record, out, names: files.map((file) => file.name) };
       }
     }
@@ -58,8 +79,35 @@ export async function fitCommand(
   if (written === null) return UNUSABLE;
   if (options.quiet !== true && options.problems === 'text') {
     terminal.out(summary(written.record, places(written.out, written.names), terminal));
+    if (comparison !== null) {
+      const { comparisonSummary } = await import('./comparison-summary.ts');
+      const shown = places(written.out, written.names).filter((place) => place.includes('comparison.'));
+      terminal.out(`\n${comparisonSummary(comparison, written.record, shown, terminal)}`);
+    }
   }
   return statusOf(written.record);
+}
+
+async function readEarlier(path: string, report: Report): Promise<ComparedSide | null> {
+  const { readCompared } = await import('../compare/read-compared.ts');
+  return readCompared(path, report);
+}
+
+async function compareWith(
+  earlier: ComparedSide,
+  record: StudyRecord,
+  { kept }: RunResult,
+  out: string,
+  report: Report,
+): Promise<Comparison | null> {
+  const { compareRecords } = await import('../compare/compare.ts');
+  const later = { record, rows: kept?.rows ?? null, file: join(out, 'record.json') };
+  return compareRecords(earlier, later, report);
+}
+
+async function filesOf(comparison: Comparison, record: StudyRecord): Promise<ResultFile[]> {
+  const { comparisonFiles } = await import('./comparison-files.ts');
+  return comparisonFiles(comparison, record);
 }
 
 async function resultFiles(
@@ -108,6 +156,8 @@ export function defaultFolder(path: string): string {
 function places(out: string, names: readonly string[]): string[] {
   const near = relative('.', out);
   const shown = near.startsWith('..') ? resolve(out) : near;
-  const reports = names.filter((name) => name.startsWith('report.')).sort();
+  const reports = names
+    .filter((name) => /^(?:report|comparison)\./.test(name) && !name.endsWith('.json'))
+    .sort();
   return [...reports, 'record.json', 'tables'].map((name) => join(shown, name));
 }

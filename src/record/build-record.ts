@@ -37,7 +37,11 @@ export interface Run {
   readonly spreads: ReadonlyMap<string, Spread>;
   readonly design: Design;
   readonly rows: DesignRows;
+  /** The candidates fitted on the rows that the chosen model is estimated from. */
   readonly fitted: FittedAll;
+  /** The candidates fitted on the rows that the choice was made on: the same, unless the study splits them. */
+  readonly ranked: FittedAll;
+  readonly findings: SelectionFindings;
   readonly choice: Choice;
   readonly chosen: Chosen | null;
   readonly predicted: Predicted | null;
@@ -59,6 +63,11 @@ export function buildRecord(run: Run): StudyRecord {
   const winner = choice.chosen === null ? null : candidates[choice.chosen]!;
   const variables = describeVariables(study, table, sample, run.spreads);
   const response = variables.find((variable) => variable.name === study.response.variable)!;
+  const examination = chosen === null ? null : examinationOf(chosen, run);
+  const predictions = (predicted?.predictions ?? []).map((one) => ({
+    ...one,
+    values: one.values.map((value) => ({ ...value })),
+  }));
   return {
     format: 'plumbrule-record/1',
     tool: { name: 'plumbrule', version: packageVersion() },
@@ -126,13 +135,19 @@ export function buildRecord(run: Run): StudyRecord {
     },
     model:
       chosen === null ? null : describeModel(chosen, run.rows, run.fitted.factor, smearingResiduals(chosen)),
-    examination: chosen === null ? null : examinationOf(chosen, run),
-    predictions: (predicted?.predictions ?? []).map((one) => ({
-      ...one,
-      values: one.values.map((value) => ({ ...value })),
-    })),
+    examination,
+    predictions,
     prediction_total: predicted?.total ?? null,
-    acceptance: acceptanceOf(study.acceptance, winner, sample.rowCount),
+    acceptance: acceptanceOf(study.acceptance, {
+      candidate: winner,
+      chosen,
+      findings: examination?.findings ?? [],
+      predictions,
+      rowsRead: table.rowCount,
+      rowsUsed: sample.rowCount,
+      rowsLost: sample.losses.reduce((sum, loss) => (loss.kind === 'left_out' ? sum : sum + loss.rows), 0),
+      newest: newestDay(study, sample),
+    }),
     warnings: warningsOf(run),
   };
 }
@@ -195,6 +210,12 @@ function timeSpan(study: Study, sample: Sample): StudyRecord['data']['time'] {
   const order = sample.timeOrder!;
   const show = (value: number) => (column.kind === 'date' ? formatDate(value) : String(value));
   return { variable, first: show(column.values[order[0]!]!), last: show(column.values[order.at(-1)!]!) };
+}
+
+/** The latest date among the rows used; null where the study's time is not a date. */
+function newestDay(study: Study, sample: Sample): number | null {
+  const column = study.data.time === null ? undefined : sample.columns.get(study.data.time);
+  return column?.kind === 'date' ? column.values[sample.timeOrder!.at(-1)!]! : null;
 }
 
 function warningsOf({ problems, fitted, chosen, study, predicted }: Run): StudyRecord['warnings'] {

@@ -893,6 +893,10 @@ export interface StudyRecord {
      */
     criterion: string;
     /**
+     * What it is a figure of: the coefficient, or the question put to the model; left out for figures of the model as a whole.
+     */
+    of?: string;
+    /**
      * The limit, for people.
      */
     limit: string;

@@ -1,19 +1,21 @@
 import { isAbsolute } from 'node:path';
+import { namesIn } from '../expression/names-in.ts';
 import { type Names, TYPE_WORDS } from './names.ts';
 import { type Path, quote, showPath } from './path.ts';
 import { entriesInOrder, fault, type Reading, warning } from './reading.ts';
+import { resolveAcceptance } from './resolve-acceptance.ts';
 import { resolveCandidates } from './resolve-candidates.ts';
 import { resolveDerivations } from './resolve-derivations.ts';
-import { checkText, parseText, untypedUses } from './resolve-expression.ts';
 import { resolveExamination } from './resolve-examination.ts';
+import { checkText, parseText, untypedUses } from './resolve-expression.ts';
+import { resolveInference } from './resolve-inference.ts';
 import { resolvePredict } from './resolve-predict.ts';
 import { resolveResponse, resolveRowRoles, resolveWeights } from './resolve-roles.ts';
-import { resolveInference } from './resolve-inference.ts';
-import { resolveAcceptance, resolveSelection } from './resolve-selection.ts';
+import { resolveSelection } from './resolve-selection.ts';
 import { termVariables } from './resolve-terms.ts';
 import { dataMissing, resolveVariables } from './resolve-variables.ts';
 import { settingsOf } from './settings.ts';
-import type { DataPlan, InferencePlan, LeaveOutPlan, ReportPlan, Study, VariablePlan } from './study.ts';
+import type { DataPlan, LeaveOutPlan, ReportPlan, Study, VariablePlan } from './study.ts';
 import { STUDY_DEFAULTS } from './study-defaults.generated.ts';
 
 /** Where a study comes from: what cannot be read in its text. */
@@ -41,19 +43,27 @@ export function resolveStudy(reading: Reading, origin: StudyOrigin): Study | nul
   const inTerms = [...new Set(candidates.flatMap(({ terms }) => terms.flatMap(termVariables)))];
 
   const named = file.candidates?.flatMap((candidate) => candidate?.name ?? []) ?? [];
-  const selection = resolveSelection(reading, candidates);
-  const acceptance = resolveAcceptance(reading, named);
-  const rests = new Set(inTerms.flatMap((name) => [...derivedFrom(name)]));
+  const selection = resolveSelection(reading, names, candidates);
+  const acceptance = resolveAcceptance(reading, { candidates: named, names, time: roles.time });
   const examination = resolveExamination(reading, names);
+  const rests = new Set(inTerms.flatMap((name) => [...derivedFrom(name)]));
+  const inference = resolveInference(reading, names, roles.time, inTerms);
   const predict = resolvePredict(reading, {
     variables,
     names,
-  const inference = resolveInference(reading, names, roles.time, inTerms);
     needed: variables.map(({ name }) => name).filter((name) => rests.has(name)),
     allowed: weights === null ? new Set() : derivedFrom(weights),
+    unsure:
+      candidates.length < (file.candidates?.length ?? 0) ||
+      [...names.values()].some(({ type }) => type === null),
     derivedFrom,
   });
-  const used = usedNames(reading, [...leaveOut.flatMap((rule) => rule.names)], reads);
+  const { holdOut } = selection;
+  const inConditions = [
+    ...leaveOut.flatMap((rule) => rule.names),
+    ...(holdOut?.kind === 'where' ? namesIn(holdOut.where) : []),
+  ];
+  const used = usedNames(reading, inConditions, reads);
   warnOfUnused(
     reading,
     entriesInOrder(reading, file.derive, ['derive']).map(([name]) => name),
@@ -200,7 +210,12 @@ function resolveReport(reading: Reading): ReportPlan {
     const message = `${showPath(path)} is given, but report.formats does not have ${format}.`;
     warning(reading, 'name_unused', reading.written.keyPlaceOf(path), message);
   }
-  return { formats, templates, caution: written?.caution ?? STUDY_DEFAULTS['report.caution'] };
+  return {
+    formats,
+    templates,
+    keepSample: written?.keep_sample ?? STUDY_DEFAULTS['report.keep_sample'],
+    caution: written?.caution ?? STUDY_DEFAULTS['report.caution'],
+  };
 }
 
 /** File names are relative, so that the record of a study says the same on every machine. */

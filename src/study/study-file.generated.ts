@@ -445,6 +445,46 @@ export interface StudyFile {
     largest_vif?: LimitsInFile;
     condition_number?: LimitsInFile;
     rows_used?: LimitsInFile;
+    rows_lost_share?: LimitsInFile;
+    rows_per_coefficient?: LimitsInFile;
+    cv_rmse?: LimitsInFile;
+    bias?: LimitsInFile;
+    prediction_interval_width?: LimitsInFile;
+    relative_interval_width?: LimitsInFile;
+    /**
+     * Limits on the p-value of a question put to the chosen model, by the name that the record's examination gives it.
+     */
+    p_value?: {
+      [k: string]: LimitsInFile;
+    };
+    /**
+     * Limits on coefficients of the chosen model, by the name of a coefficient or of a term with one column. One that the chosen model does not have misses them.
+     */
+    coefficients?: {
+      [k: string]: LimitsInFile;
+    };
+    /**
+     * The sign expected of a coefficient of the chosen model, by the name of a coefficient or of a term with one column. One that the chosen model does not have misses it.
+     */
+    signs?: {
+      /**
+       * The sign.
+       */
+      [k: string]: 'positive' | 'negative';
+    };
+    /**
+     * Limit on the days from the newest row used, by data.time, to a stated day. The day is best a parameter, so that whoever runs the study gives it and the record states it.
+     */
+    age_of_newest_row?: {
+      /**
+       * The day, as 2026-03-31.
+       */
+      on: string;
+      /**
+       * Upper limit in days.
+       */
+      at_most: number;
+    };
     /**
      * Names of the candidates of which one must be chosen.
      *

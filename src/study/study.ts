@@ -143,13 +143,71 @@ export interface CandidatePlan {
   readonly intercept: boolean;
 }
 
-export type RankBy = 'adjusted_r_squared' | 'aic' | 'aicc' | 'bic' | 'mallows_cp' | 'press' | 'partial_f';
+export type RankBy =
+  | 'adjusted_r_squared'
+  | 'aic'
+  | 'aicc'
+  | 'bic'
+  | 'mallows_cp'
+  | 'press'
+  | 'cross_validation'
+  | 'partial_f';
 
 export interface SelectionPlan {
   readonly rankBy: RankBy;
   readonly preferSmallerWithin: number;
   readonly significance: number;
+  /** The fewest coefficients within one standard error of the best cross-validated error. */
+  readonly oneStandardError: boolean;
+  /** How candidates are cross-validated; null where they are not. Never null where that ranks them. */
+  readonly validation: FoldPlan | null;
+  /** Parts of the rows without which the whole choice is made again. */
+  readonly honestError: FoldPlan | null;
+  readonly holdOut: HoldOutPlan | null;
+  readonly splitSample: SplitSamplePlan | null;
+  readonly stability: StabilityPlan | null;
+  /** Whether inference is also averaged over the admitted candidates. */
+  readonly average: boolean;
   readonly admit: AdmitPlan;
+}
+
+/** Which rows are held out together, and what predicts them. */
+export interface FoldPlan {
+  readonly by: 'rows' | 'group' | 'time' | 'leave_one_out';
+  /** Null: 10, or one for each group where there are fewer. */
+  readonly folds: number | null;
+  readonly repeats: number;
+  readonly seed: number;
+  /** The variable that groups rows where `by` is group, else null. */
+  readonly group: string | null;
+  /** Times that are never held out where `by` is time; null: half of them. */
+  readonly start: number | null;
+  /** Times predicted from each origin. */
+  readonly horizon: number;
+  /** Path in the study file, for places of problems. */
+  readonly path: readonly (string | number)[];
+}
+
+/** Rows set aside before anything is fitted. */
+export type HoldOutPlan =
+  | { readonly kind: 'share'; readonly share: number; readonly seed: number }
+  | { readonly kind: 'last'; readonly rows: number }
+  | { readonly kind: 'where'; readonly where: Expression; readonly text: string };
+
+export interface SplitSamplePlan {
+  /** Of the rows that the choice is made on. */
+  readonly share: number;
+  readonly seed: number;
+}
+
+export interface StabilityPlan {
+  readonly repetitions: number;
+  readonly seed: number;
+  readonly by: 'rows' | 'group' | 'blocks';
+  /** The variable that groups rows where `by` is group, else null. */
+  readonly group: string | null;
+  /** Rows in a block; null: from the number of rows, or where blocks are not drawn. */
+  readonly blockLength: number | null;
 }
 
 export interface AdmitPlan {
@@ -166,49 +224,6 @@ export interface InferencePlan {
   readonly confidence: number;
   /** What to do with a column that depends exactly on earlier ones: go on without it, or stop. */
   readonly dependentColumns: 'drop' | 'stop';
-}
-
-export interface PredictPlan {
-  readonly rows: readonly PredictRowPlan[];
-  /** A CSV file of rows with the same contract as the data, relative to the study file, or null. */
-  readonly file: string | null;
-  /** Confidence of prediction intervals, between 0 and 1. */
-  readonly interval: number;
-  /** Whether to predict the total of all rows as well. */
-  readonly total: boolean;
-}
-
-export interface PredictRowPlan {
-  readonly label: string;
-  readonly values: ReadonlyMap<string, number | string | boolean>;
-  readonly place: SourcePlace;
-}
-
-/** A limit on a figure of the chosen model, or (`chosen`) on which candidate wins. */
-export type AcceptancePlan =
-  | {
-      readonly criterion: AcceptanceFigure;
-      readonly atLeast: number | null;
-      readonly atMost: number | null;
-    }
-  | { readonly criterion: 'chosen'; readonly names: readonly string[] };
-
-export type AcceptanceFigure =
-  | 'r_squared'
-  | 'adjusted_r_squared'
-  | 'predicted_r_squared'
-  | 'residual_standard_error'
-  | 'largest_vif'
-  | 'condition_number'
-  | 'rows_used';
-
-export interface ReportPlan {
-  readonly formats: readonly ('html' | 'markdown')[];
-  /** The user's own templates, relative to the study file, by format. */
-  readonly templates: { readonly html: string | null; readonly markdown: string | null };
-  /** A sentence of the analyst's own for the cautions (the local code, who must review), or null. */
-  readonly caution: string | null;
-}
   readonly standardErrors: StandardErrorsPlan;
   readonly hypotheses: readonly HypothesisPlan[];
   /** How levels of a category are compared pair by pair. */
@@ -265,3 +280,69 @@ export interface BootstrapPlan {
   readonly by: 'rows' | 'residuals' | 'blocks';
   /** Rows in a block; null: from the number of rows, or where blocks are not drawn. */
   readonly blockLength: number | null;
+}
+
+export interface PredictPlan {
+  readonly rows: readonly PredictRowPlan[];
+  /** A CSV file of rows with the same contract as the data, relative to the study file, or null. */
+  readonly file: string | null;
+  /** Confidence of prediction intervals, between 0 and 1. */
+  readonly interval: number;
+  /** Whether to predict the total of all rows as well. */
+  readonly total: boolean;
+}
+
+export interface PredictRowPlan {
+  readonly label: string;
+  readonly values: ReadonlyMap<string, number | string | boolean>;
+  readonly place: SourcePlace;
+}
+
+/** A limit on a figure of the chosen model, or (`chosen`) on which candidate wins. */
+export type AcceptancePlan =
+  | {
+      readonly criterion: AcceptanceFigure;
+      readonly atLeast: number | null;
+      readonly atMost: number | null;
+    }
+  | {
+      /** The p-value of a diagnostic, or a coefficient of the chosen model. */
+      readonly criterion: 'p_value' | 'coefficient';
+      readonly of: string;
+      readonly atLeast: number | null;
+      readonly atMost: number | null;
+    }
+  | { readonly criterion: 'sign'; readonly of: string; readonly sign: 'positive' | 'negative' }
+  /** Days from the newest row used to `on`, which is in days since 1970-01-01. */
+  | {
+      readonly criterion: 'age_of_newest_row';
+      readonly on: number;
+      readonly onText: string;
+      readonly atMost: number;
+    }
+  | { readonly criterion: 'chosen'; readonly names: readonly string[] };
+
+export type AcceptanceFigure =
+  | 'r_squared'
+  | 'adjusted_r_squared'
+  | 'predicted_r_squared'
+  | 'residual_standard_error'
+  | 'largest_vif'
+  | 'condition_number'
+  | 'rows_used'
+  | 'rows_lost_share'
+  | 'rows_per_coefficient'
+  | 'cv_rmse'
+  | 'bias'
+  | 'prediction_interval_width'
+  | 'relative_interval_width';
+
+export interface ReportPlan {
+  readonly formats: readonly ('html' | 'markdown')[];
+  /** The user's own templates, relative to the study file, by format. */
+  readonly templates: { readonly html: string | null; readonly markdown: string | null };
+  /** Whether the rows used are kept beside the record. */
+  readonly keepSample: boolean;
+  /** A sentence of the analyst's own for the cautions (the local code, who must review), or null. */
+  readonly caution: string | null;
+}

@@ -22,7 +22,7 @@ export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
     beware: bewareLines(record, lexicon),
     acceptance: acceptanceSentence(record.acceptance),
     criteria: record.acceptance.map((c) => ({
-      name: criterionLabel(c.criterion),
+      name: criterionLabel(c),
       value: acceptanceValue(c, fittedUnit(lexicon.response)),
       limit: c.limit,
       passed: c.passed,

@@ -12,17 +12,31 @@ const NAMES: Readonly<Record<string, string>> = {
   largest_vif: 'Largest variance inflation factor',
   condition_number: 'Condition number',
   rows_used: 'Number of rows used',
+  rows_lost_share: 'Share of rows lost',
+  rows_per_coefficient: 'Rows per coefficient',
+  cv_rmse: 'Error relative to the mean, CV(RMSE)',
+  bias: 'Bias relative to the mean',
+  prediction_interval_width: 'Widest prediction interval',
+  relative_interval_width: 'Widest prediction interval, relative',
+  p_value: 'P-value',
+  coefficient: 'Coefficient',
+  sign: 'Sign',
+  age_of_newest_row: 'Age of the newest row',
   chosen: 'Candidate chosen',
 };
 
-export function criterionLabel(criterion: string): string {
-  return Object.hasOwn(NAMES, criterion) ? NAMES[criterion]! : criterion;
+/** "Adjusted R²", "Coefficient of cargo" */
+export function criterionLabel({ criterion, of }: Pick<Criterion, 'criterion' | 'of'>): string {
+  const name = Object.hasOwn(NAMES, criterion) ? NAMES[criterion]! : criterion;
+  if (of === undefined) return name;
+  return criterion === 'p_value' ? `${name} of ${of.replaceAll('_', ' ')}` : `${name} of ${of}`;
 }
 
 /** The figure that was held against the limit, with as many digits as it takes to tell the two apart. */
 export function acceptanceValue({ criterion, limit, value: figure }: Criterion, unit: string | null): string {
   if (figure === null) return NONE;
   if (typeof figure === 'string') return figure;
+  if (criterion === 'age_of_newest_row') return counted(figure, 'day', 'days', (days) => value(days, 6));
   const limits = limit.split(' ').map(Number);
   const apart = (rounded: number): boolean => rounded === figure || !limits.includes(rounded);
   if (criterion.endsWith('r_squared')) {
@@ -42,7 +56,7 @@ export function acceptanceSentence(acceptance: readonly Criterion[]): string | n
   const missed = acceptance.filter((c) => !c.passed);
   if (missed.length === 0)
     return all === 1 ? 'The acceptance criterion is met.' : `All ${all} acceptance criteria are met.`;
-  const which = listed(missed.map((c) => lowered(criterionLabel(c.criterion))));
+  const which = listed(missed.map((c) => lowered(criterionLabel(c))));
   if (missed.length === all && all > 1) return `All ${all} acceptance criteria are missed: ${which}.`;
   const what =
     all === 1
@@ -58,6 +72,6 @@ export function missedSentences(acceptance: readonly Criterion[], unit: string |
     .map((c) => {
       const undefinedAs = c.criterion === 'chosen' ? 'none' : 'not defined';
       const is = c.value === null ? undefinedAs : acceptanceValue(c, unit);
-      return `${criterionLabel(c.criterion)} is ${is}; the study asks for ${c.limit}.`;
+      return `${criterionLabel(c)} is ${is}; the study asks for ${c.limit}.`;
     });
 }

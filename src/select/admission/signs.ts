@@ -28,19 +28,26 @@ export const signs: AdmissionRule = {
   },
 };
 
-/** Reports the names under `selection.admit.signs` that no candidate has. */
+/** Reports the names of coefficients, in rules of admission and acceptance, that no candidate has. */
 export function checkSignNames(study: Study, { fits, columnNames }: FitContext, report: Report): void {
-  for (const name of study.selection.admit.signs.keys()) {
+  const named = [...study.selection.admit.signs.keys()].map((name) => ['selection', 'admit', 'signs', name]);
+  for (const plan of study.acceptance) {
+    if (plan.criterion === 'sign') named.push(['acceptance', 'signs', plan.of]);
+    if (plan.criterion === 'coefficient') named.push(['acceptance', 'coefficients', plan.of]);
+  }
+  for (const path of named) {
+    const name = path.at(-1)!;
+    const rule = path.slice(0, -1).join('.');
     if (fits.some((fit) => columnNamed(name, fit, columnNames) !== null)) continue;
     const term = fits.flatMap((fit) => fit.candidate.terms).find((each) => each.name === name);
-    const place = study.placeOf(['selection', 'admit', 'signs', name]);
+    const place = study.placeOf(path);
     if (term !== undefined) {
       const columns = term.columns.map((column) => `"${columnNames[column]}"`);
       report({
         code: 'sign_name_unknown',
         severity: 'error',
         place,
-        message: `selection.admit.signs names "${name}", a term of ${term.columns.length} columns, which has no one sign.`,
+        message: `${rule} names "${name}", a term of ${term.columns.length} columns, which has no one ${rule.endsWith('signs') ? 'sign' : 'value'}.`,
         hint: `Name a single coefficient of it: ${listedUpTo(columns, 5)}.`,
       });
       continue;
@@ -51,7 +58,7 @@ export function checkSignNames(study: Study, { fits, columnNames }: FitContext, 
       code: 'sign_name_unknown',
       severity: 'error',
       place,
-      message: `selection.admit.signs names "${name}", which is neither a coefficient nor a term of one column in any candidate.`,
+      message: `${rule} names "${name}", which is neither a coefficient nor a term of one column in any candidate.`,
       hint:
         meant === null
           ? `The names are ${listedUpTo(

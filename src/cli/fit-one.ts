@@ -1,0 +1,94 @@
+import { basename, dirname, join, resolve } from 'node:path';
+import type { Problem } from '../problem.ts';
+import type { StudyRecord } from '../record/record.ts';
+import { recordFaults } from '../record/record-faults.ts';
+import { recordText } from '../record/record-text.ts';
+import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
+import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
+import { type RunOptions, type RunResult, runStudy } from '../run.ts';
+import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
+import { hasError } from './has-error.ts';
+import { reportFiles, templatesOf } from './report-files.ts';
+
+/** What came of one study. */
+export interface FittedStudy {
+  /** The study file as it was named. */
+  readonly path: string;
+  readonly problems: readonly Problem[];
+  readonly dataRead: boolean;
+  /** Where templates lie, by the names under which problems know them. */
+  readonly templates: ReadonlyMap<string, string>;
+  /** Null where nothing was written. */
+  readonly written: Written | null;
+}
+
+export interface Written {
+  readonly record: StudyRecord;
+  readonly out: string;
+  /** Files in the output folder. */
+  readonly names: readonly string[];
+}
+
+/** Runs one study, down to record, reports and tables in the output folder. */
+export async function fitOne(path: string, out: string, options: RunOptions): Promise<FittedStudy> {
+  const problems: Problem[] = [];
+  const report = (problem: Problem) => problems.push(problem);
+  const result = await runStudy(path, options);
+  problems.push(...result.problems);
+  const { dataRead } = result;
+  if (result.record === null || hasError(problems)) {
+    return { path, problems, dataRead, templates: new Map(), written: null };
+  }
+  const templates = templatePlaces(result.record, dirname(path));
+  const files = await resultFiles(result.record, result, dirname(path), report);
+  let written: Written | null = null;
+  if (!hasError(problems)) {
+    options.onProgress?.('writing results', 0, null);
+    const done = await writeResults(out, files, report, RESULT_FILES);
+    if (done) written = { record: result.record, out, names: files.map((file) => file.name) };
+  }
+  return { path, problems, dataRead, templates, written };
+}
+
+/** 2 where nothing was written; 1 where no candidate was admitted or an acceptance criterion was missed; else 0. */
+export function statusOf({ written }: FittedStudy): number {
+  if (written === null) return UNUSABLE;
+  const accepted = written.record.acceptance.every((criterion) => criterion.passed);
+  return written.record.selection.chosen !== null && accepted ? DONE : NOT_ACCEPTED;
+}
+
+/** results/ and the study's name: its file's, or its folder's where the file is called study.yaml. */
+export function defaultFolder(path: string): string {
+  const name = basename(path).replace(/(?:\.study)?\.ya?ml$/i, '');
+  return join('results', name === 'study' ? basename(dirname(resolve(path))) || name : name);
+}
+
+async function resultFiles(
+  record: StudyRecord,
+  result: RunResult,
+  folder: string,
+  report: (problem: Problem) => void,
+): Promise<ResultFile[]> {
+  const faults = recordFaults(record);
+  if (faults.length > 0)
+    throw new Error(`The record is not as its schema says: ${faults.slice(0, 3).join(' ')}`);
+  return [
+    { name: 'record.json', content: recordText(record) },
+    ...(await reportFiles(record, record.study.report.formats, templatesOf(record, folder), report)),
+    { name: 'tables/candidates.csv', content: candidatesTable(record) },
+    { name: 'tables/coefficients.csv', content: coefficientsTable(record) },
+    ...(result.residuals === null
+      ? []
+      : [{ name: 'tables/residuals.csv', content: residualsTable(result.residuals) }]),
+    ...(result.kept === null ? [] : [{ name: result.kept.file, content: result.kept.content }]),
+    ...(record.predictions.length === 0
+      ? []
+      : [{ name: 'tables/predictions.csv', content: predictionsTable(record) }]),
+  ];
+}
+
+/** Where the templates that a study names lie, by the names under which problems know them. */
+function templatePlaces(record: StudyRecord, folder: string): Map<string, string> {
+  const named = Object.values(record.study.report.templates).filter((name) => name !== null);
+  return new Map(named.map((name) => [name, resolve(folder, name)]));
+}

@@ -1,0 +1,121 @@
+import type { Problem } from '../problem.ts';
+import type { StudyRecord } from './record-type.ts';
+import { acceptanceValue, criterionLabel } from './words/acceptance.ts';
+import { lexiconOf } from './words/lexicon.ts';
+import { fittedUnit } from './words/scale.ts';
+
+/** One run of a study, for `junitText`. */
+export interface JunitRun {
+  /** The study file as it was named. */
+  readonly study: string;
+  /** Null where the run stopped on an error. */
+  readonly record: StudyRecord | null;
+  readonly problems: readonly Problem[];
+}
+
+interface TestCase {
+  readonly name: string;
+  readonly outcome: 'passed' | 'failure' | 'error';
+  readonly type: string;
+  readonly message: string;
+}
+
+/**
+ * Runs as JUnit XML, in the form that continuous-integration servers read (common practice, after the report format of
+ * Apache Ant's junit task): a suite for each study, in it one test for the run itself, one for the choice, and one for
+ * each acceptance criterion. A problem that stopped the run is an error, a criterion missed a failure. No clock time.
+ */
+export function junitText(runs: readonly JunitRun[]): string {
+  const suites = runs.map((run) => ({ run, cases: casesOf(run) }));
+  const all = suites.flatMap(({ cases }) => cases);
+  const lines = [
+    '<?xml version="1.0" encoding="UTF-8"?>',
+    `<testsuites name="plumbrule" ${counts(all)}>`,
+    ...suites.flatMap(({ run, cases }) => [
+      `  <testsuite name="${escaped(run.record?.study.title ?? run.study)}" ${counts(cases)}>`,
+      ...cases.flatMap((one) => caseLines(one, run.study)),
+      '  </testsuite>',
+    ]),
+    '</testsuites>',
+  ];
+  return `${lines.join('\n')}\n`;
+}
+
+function casesOf({ record, problems }: JunitRun): TestCase[] {
+  const errors = problems.filter(({ severity }) => severity === 'error');
+  const ran: TestCase =
+    errors.length === 0 && record !== null
+      ? passed('The study runs')
+      : {
+          name: 'The study runs',
+          outcome: 'error',
+          type: errors[0]?.code ?? 'stopped',
+          message: errors.map(said).join('\n') || 'The run stopped.',
+        };
+  if (record === null) return [ran];
+  const { chosen, because } = record.selection;
+  const choice = 'A candidate is admitted';
+  const unit = fittedUnit(lexiconOf(record).response);
+  return [
+    ran,
+    chosen === null
+      ? { name: choice, outcome: 'failure', type: 'selection', message: because }
+      : passed(choice),
+    ...record.acceptance.map((criterion): TestCase => {
+      const label = criterionLabel(criterion);
+      const name = `${label}: ${criterion.limit}`;
+      if (criterion.passed) return passed(name);
+      const value = criterion.value === null ? 'not defined' : acceptanceValue(criterion, unit);
+      const message = `${label} is ${value}; the study asks for ${criterion.limit}.`;
+      return { name, outcome: 'failure', type: criterion.criterion, message };
+    }),
+  ];
+}
+
+function passed(name: string): TestCase {
+  return { name, outcome: 'passed', type: '', message: '' };
+}
+
+function said({ place, message, hint }: Problem): string {
+  const at =
+    place.kind === 'command'
+      ? ''
+      : place.kind === 'source'
+        ? `${place.file}:${place.line}:${place.column}  `
+        : place.kind === 'cell'
+          ? `${place.file}${place.row === undefined ? '' : `, row ${place.row}`}: `
+          : `${place.file}: `;
+  return `${at}${message}${hint === undefined ? '' : ` ${hint}`}`;
+}
+
+function counts(cases: readonly TestCase[]): string {
+  const count = (outcome: TestCase['outcome']) => cases.filter((one) => one.outcome === outcome).length;
+  return `tests="${cases.length}" failures="${count('failure')}" errors="${count('error')}" skipped="0"`;
+}
+
+function caseLines({ name, outcome, type, message }: TestCase, study: string): string[] {
+  const open = `    <testcase classname="${escaped(study)}" name="${escaped(name)}"`;
+  if (outcome === 'passed') return [`${open}/>`];
+  const [first = ''] = message.split('\n');
+  return [
+    `${open}>`,
+    `      <${outcome} message="${escaped(first)}" type="${escaped(type)}">${escaped(message)}</${outcome}>`,
+    '    </testcase>',
+  ];
+}
+
+/** Characters that XML 1.0 (2.2) has no place for, not even as references. */
+// biome-ignore lint/suspicious/noControlCharactersInRegex: these are what is looked for.
+const NOT_XML = /[^\t\n\r\u0020-\ud7ff\ue000-\ufffd\u{10000}-\u{10ffff}]/gu;
+
+function escaped(text: string): string {
+  return text
+    .replace(NOT_XML, '\ufffd')
+    .replaceAll('&', '&amp;')
+    .replaceAll('<', '&lt;')
+    .replaceAll('>', '&gt;')
+    .replaceAll('"', '&quot;')
+    .replaceAll('\n', '&#10;')
+    .replaceAll('\r', '&#13;')
+    .replaceAll('\t', '&#9;');
+}
