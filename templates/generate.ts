@@ -29,6 +29,8 @@ export function compiledTemplates(): string {
     '// @ts-nocheck',
     `export const HTML: unknown = ${compiled('report.html.hbs', false)};`,
     `export const MARKDOWN: unknown = ${compiled('report.md.hbs', true)};`,
+    `export const COMPARISON_HTML: unknown = ${compiled('comparison.html.hbs', false)};`,
+    `export const COMPARISON_MARKDOWN: unknown = ${compiled('comparison.md.hbs', true)};`,
     'export const PARTIALS: Readonly<Record<string, unknown>> = {',
     ...entries,
     '};',

@@ -4,6 +4,7 @@ import type { Column } from '../data/table.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Study } from '../study/study.ts';
 import { quotedCell } from './quoted-cell.ts';
+import type { KeptRows } from './read-sample.ts';
 
 /** The rows used, ready to be written beside a record. */
 export interface KeptSample {
@@ -12,6 +13,8 @@ export interface KeptSample {
   readonly sha256: string;
   /** The compressed bytes, in order. */
   readonly content: readonly Uint8Array[];
+  /** The same rows as they would be read back. */
+  readonly rows: KeptRows;
 }
 
 export const SAMPLE_FILE = 'sample.csv.gz';
@@ -30,7 +33,8 @@ const WIDEST_NUMBER = 32;
  * apostrophe. One block of rows is held at a time, and the compressed whole.
  */
 export async function keepSample(study: Study, sample: Sample): Promise<KeptSample> {
-  const columns = study.data.variables.flatMap(({ name }) => sample.columns.get(name) ?? []);
+  const rows = keptRows(study, sample);
+  const columns = [...rows.columns.values()];
   const header = [
     'row',
     ...(sample.ids === null ? [] : ['id']),
@@ -59,7 +63,18 @@ export async function keepSample(study: Study, sample: Sample): Promise<KeptSamp
   }
   gzip.end();
   await ended;
-  return { file: SAMPLE_FILE, sha256: hash.digest('hex'), content };
+  return { file: SAMPLE_FILE, sha256: hash.digest('hex'), content, rows };
+}
+
+/** What of a sample is kept: the declared variables that the study fits with. */
+function keptRows(study: Study, sample: Sample): KeptRows {
+  const columns = study.data.variables.flatMap(({ name }) => sample.columns.get(name) ?? []);
+  return {
+    rowCount: sample.rowCount,
+    lines: sample.lines,
+    ids: sample.ids,
+    columns: new Map(columns.map((column) => [column.name, column])),
+  };
 }
 
 /** Writes the cell of a row at `at` in `bytes` and gives the place after it; `room` says what a row may take at most. */

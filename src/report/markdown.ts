@@ -28,7 +28,8 @@ export function markdownView(view: ReportView): ReportView {
   };
 }
 
-function mapped(value: unknown): unknown {
+/** Every text in a value escaped for Markdown; drawings are left out. */
+export function mapped(value: unknown): unknown {
   if (typeof value === 'string') return escapeMarkdown(value);
   if (Array.isArray(value)) return value.map(mapped);
   if (typeof value !== 'object' || value === null) return value;

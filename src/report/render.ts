@@ -23,10 +23,10 @@ export interface Rendered {
   readonly markdown?: string;
 }
 
-const require = createRequire(import.meta.url);
+export const require = createRequire(import.meta.url);
 
 /** Access to anything but a value's own keys is off, also for the user's own templates. */
-const WALLS = {
+export const WALLS = {
   allowProtoPropertiesByDefault: false,
   allowProtoMethodsByDefault: false,
 } as const;
@@ -94,10 +94,10 @@ function userTemplate(
   }
 }
 
-type TemplateSpecification = Parameters<typeof Handlebars.template>[0];
+export type TemplateSpecification = Parameters<typeof Handlebars.template>[0];
 
 /** A Handlebars of its own with our helpers and partials and nothing else. */
-function environment(base: typeof Handlebars): typeof Handlebars {
+export function environment(base: typeof Handlebars): typeof Handlebars {
   const handlebars = base.create();
   // `log` writes to the console, the two hooks are for calls that a template must not make.
   for (const name of Object.keys(handlebars.helpers)) {
@@ -113,7 +113,7 @@ function environment(base: typeof Handlebars): typeof Handlebars {
 }
 
 /** At most one empty line in a row, none at the ends: what an `{{#if}}` leaves behind. */
-function tidied(markdown: string): string {
+export function tidied(markdown: string): string {
   return `${markdown
     .replace(/[ \t]+$/gm, '')
     .replace(/\n{3,}/g, '\n\n')
