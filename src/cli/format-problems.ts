@@ -44,10 +44,7 @@ export function sortProblems(problems: readonly Problem[]): readonly Problem[] {
   const files = [...new Set(problems.map(({ place }) => fileOf(place)))];
   const keyed = problems.map((problem) => ({
     problem,
-    key: [
-      fileOf(problem.place) === '' ? -1 : files.indexOf(fileOf(problem.place)),
-      ...position(problem.place),
-    ],
+    key: [fileOf(problem.place) === '' ? -1 : files.indexOf(fileOf(problem.place)), ...position(problem)],
   }));
   keyed.sort((a, b) => a.key.map((part, index) => part - b.key[index]!).find((part) => part !== 0) ?? 0);
   return keyed.map(({ problem }) => problem);
@@ -57,7 +54,9 @@ function fileOf(place: Place): string {
   return place.kind === 'command' ? '' : place.file;
 }
 
-function position(place: Place): readonly [number, number] {
+/** That there are more stands behind those that are listed. */
+function position({ code, place }: Problem): readonly [number, number] {
+  if (code === 'problems_more') return [Number.MAX_SAFE_INTEGER, 0];
   if (place.kind === 'source') return [place.line, place.column];
   return place.kind === 'cell' ? [place.row ?? 0, 0] : [0, 0];
 }

@@ -92,7 +92,8 @@ function refusals({ selection, candidates }: StudyRecord): Paragraph[] {
     const [first] = reasons;
     if (first === undefined || selection.because.includes(first)) return [];
     const more = reasons.length - 1;
-    const further = more === 0 ? '' : ` (and ${counted(more, 'more reason', 'more reasons', count)})`;
+    const further =
+      more === 0 ? '' : ` ${counted(more, 'more reason stands', 'more reasons stand', count)} in the report.`;
     return [{ mark: '·', text: `${name} was refused. ${first}${further}` }];
   });
 }

@@ -41,6 +41,8 @@ interface Listed {
   readonly position: number;
   readonly problem: Problem;
   readonly text: string;
+  /** How many more cells of the column have the same undeclared level; absent for a row. */
+  readonly again?: () => number;
 }
 
 interface KindCount {
@@ -57,6 +59,8 @@ interface Gathered {
   readonly stopping: Listed[];
   readonly borne: Listed[];
   readonly kinds: Map<CellFault, KindCount>;
+  /** Of the listed undeclared levels, how many more cells have each. */
+  readonly again: Map<string, number>;
   stoppingCount: number;
   borneCount: number;
 }
@@ -87,12 +91,18 @@ export function gatherFaults(plan: DataPlan, limit: number): Faults {
       stopping: [],
       borne: [],
       kinds: new Map(),
+      again: new Map(),
       stoppingCount: 0,
       borneCount: 0,
     };
     columns.push(own);
     const add: ColumnFaults['add'] = (code, row, line, text, earlierLine) => {
       const stopping = stops(code);
+      const told = stopping && code === 'cell_level_undeclared' ? own.again.get(text) : undefined;
+      if (told !== undefined) {
+        own.again.set(text, told + 1);
+        return;
+      }
       if (stopping) {
         own.stoppingCount++;
       } else {
@@ -113,7 +123,14 @@ export function gatherFaults(plan: DataPlan, limit: number): Faults {
         message,
         ...(hint === null ? {} : { hint }),
       };
-      list.push({ line, position, problem, text: text.slice(0, LONGEST_LISTED_TEXT) });
+      if (stopping && code === 'cell_level_undeclared') own.again.set(text, 0);
+      list.push({
+        line,
+        position,
+        problem,
+        text: text.slice(0, LONGEST_LISTED_TEXT),
+        again: () => own.again.get(text) ?? 0,
+      });
     };
     return { variable, position, add, count: () => own.stoppingCount + own.borneCount };
   };
@@ -122,7 +139,7 @@ export function gatherFaults(plan: DataPlan, limit: number): Faults {
     const errors = [...ragged, ...columns.flatMap((column) => column.stopping)].sort(inFileOrder);
     const count = columns.reduce((sum, column) => sum + column.stoppingCount, raggedCount);
     const listed = errors.slice(0, limit);
-    for (const { problem } of listed) report(problem);
+    for (const each of listed) report(withRepeats(each));
     if (count > listed.length) report(andMore(plan.file, count - listed.length));
     for (const column of columns) {
       for (const kind of column.kinds.values()) report(borneWarning(plan, column.variable, kind));
@@ -168,6 +185,14 @@ export function gatherFaults(plan: DataPlan, limit: number): Faults {
 
 function inFileOrder(a: Listed, b: Listed): number {
   return a.line - b.line || a.position - b.position;
+}
+
+function withRepeats({ problem, again }: Listed): Problem {
+  const more = again?.() ?? 0;
+  if (more === 0) return problem;
+  const cells = more === 1 ? '1 more cell has it' : `${wholeNumber(more)} more cells have it`;
+  const message = `${problem.message.replace(/\.$/, '')}; ${cells}.`;
+  return { ...problem, message };
 }
 
 function andMore(file: string, count: number): Problem {

@@ -47,8 +47,9 @@ export function matchHeader(
     if (position !== undefined) {
       found.push({ variable, position });
     } else if (must) {
+      // Of a header that is one column every other one is missing: the first tells it.
+      if (complete || !onlyOne) report(columnMissing(plan, line, variable, free, onlyOne));
       complete = false;
-      report(columnMissing(plan, line, variable, free, onlyOne));
     }
   }
   found.sort((a, b) => a.position - b.position);
@@ -77,12 +78,13 @@ function columnMissing(
   free: readonly string[],
   onlyOne: boolean,
 ): Problem {
-  const near = nearest(variable.column, free);
+  const near = onlyOne ? null : nearest(variable.column, free);
+  const { delimiter } = plan.format;
   const hint =
     near !== null
       ? `Did you mean ${near}?`
       : onlyOne
-        ? 'The header was read as a single column; declare data.format.delimiter.'
+        ? `The header was read as a single column; ${delimiter === null ? 'declare data.format.delimiter' : `data.format.delimiter is ${showText(delimiter)}`}.`
         : null;
   const wanted = variable.column === variable.name ? '' : ` of the variable ${variable.name}`;
   return {

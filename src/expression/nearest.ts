@@ -7,7 +7,8 @@ const LONGEST_COMPARED = 100;
  * third of the longer word's letters (one for words of three to five) may differ. Of equally near names the
  * one that also agrees in letter case comes first, then the one that stands first in `among`. Where none is
  * near, the shortest name that begins with the word, if that has three letters or more: "precip" of
- * "precipitation", also "Beak_Length" of "Beak Length (mm)".
+ * "precipitation", also "Beak_Length" of "Beak Length (mm)"; else one of whose parts it is one: "vif" of
+ * "largest_vif"; else the longest that begins the word: "logarithm" for "log".
  */
 export function nearest(word: string, among: Iterable<string>): string | null {
   const lower = word.toLowerCase();
@@ -23,17 +24,25 @@ export function nearest(word: string, among: Iterable<string>): string | null {
     bestDistance = distance;
     bestExact = exact;
   }
-  return best ?? beginningWith(word, among);
+  return best ?? partly(word, [...among]);
 }
 
-function beginningWith(word: string, among: Iterable<string>): string | null {
-  const beginning = bare(word);
-  if (beginning.length < 3 || word.length > LONGEST_COMPARED) return null;
-  let best: string | null = null;
-  for (const name of among) {
-    if (bare(name).startsWith(beginning) && (best === null || name.length < best.length)) best = name;
-  }
-  return best;
+/** A name that begins with the word, has it as a part, or begins it. */
+function partly(word: string, among: readonly string[]): string | null {
+  const letters = bare(word);
+  if (letters.length < 3 || word.length > LONGEST_COMPARED) return null;
+  const byLength = [...among].sort((a, b) => a.length - b.length);
+  return (
+    byLength.find((name) => bare(name).startsWith(letters)) ??
+    byLength.find((name) =>
+      name
+        .toLowerCase()
+        .split(/[^\p{L}\p{N}]+/u)
+        .includes(word.toLowerCase()),
+    ) ??
+    byLength.findLast((name) => bare(name).length >= 3 && letters.startsWith(bare(name))) ??
+    null
+  );
 }
 
 /** Letter case and the marks between words apart. */

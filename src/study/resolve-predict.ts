@@ -13,6 +13,8 @@ export interface PredictNeeds {
   readonly needed: readonly string[];
   /** Variables that a row may give as well: what the weights rest on. */
   readonly allowed: ReadonlySet<string>;
+  /** Whether a fault elsewhere leaves it open what the candidates need. */
+  readonly unsure: boolean;
   /** Declared variables that a derived one rests on. */
   readonly derivedFrom: (name: string) => ReadonlySet<string>;
 }
@@ -78,7 +80,7 @@ function resolveRow(
     if (value === undefined || variable === undefined) continue;
     const read = readValue(reading, value, variable, named, at);
     if (read !== null) values.set(name, read);
-    if (!needs.needed.includes(name) && !needs.allowed.has(name)) {
+    if (!needs.unsure && !needs.needed.includes(name) && !needs.allowed.has(name)) {
       const message = `${showPath(path)} gives a value for ${name}, which no candidate uses.`;
       warning(reading, 'name_unused', reading.written.keyPlaceOf(at), message, 'Remove it.');
     }

@@ -1,5 +1,5 @@
 import { lookUp, lookUpOfType, type Names, TYPE_WORDS } from './names.ts';
-import { type Path, showPath } from './path.ts';
+import { type Path, quote, showPath } from './path.ts';
 import { fault, type Loose, type Reading } from './reading.ts';
 import type { TermPlan, VariableType } from './study.ts';
 import type { MemberInFile, TermInFile } from './study-file.generated.ts';
@@ -34,6 +34,11 @@ export function resolveTerm(
 }
 
 function variableTerm(reading: Reading, names: Names, name: string, path: Path): TermPlan | null {
+  const hint = names.has(name) ? undefined : calculationHint(name, names);
+  if (hint !== undefined) {
+    fault(reading, 'name_unknown', path, `${showPath(path)} is ${quote(name)}; a term is one name.`, hint);
+    return null;
+  }
   const named = lookUp(reading, names, name, path);
   if (named === null || named.type === null) return null;
   const { type } = named;
@@ -49,6 +54,24 @@ function variableTerm(reading: Reading, names: Names, name: string, path: Path):
     return null;
   }
   return { kind: 'variable', variable: name };
+}
+
+/** How to write a term that is a calculation with known names; undefined where it is none. */
+function calculationHint(text: string, names: Names): string | undefined {
+  const parts = text.split(/\s*[-+*/:×^()]+\s*/).filter((part) => part !== '');
+  const known = (part: string) => names.has(part);
+  const calculated = (part: string) => known(part) || /^[\d.]+$/.test(part) || text.includes(`${part}(`);
+  if (parts.length < 2 || !parts.some(known) || !parts.every(calculated)) return undefined;
+  const allKnown = parts.every(known);
+  if (allKnown && /^[^-+/^()]+$/.test(text)) {
+    return `An interaction is written { interaction: [${parts.join(', ')}] }, beside its parts as terms of their own.`;
+  }
+  if (allKnown && /^[^-*/:×^()]+$/.test(text)) return `Terms stand in a list: [${parts.join(', ')}].`;
+  const [base, to] = parts;
+  if (parts.length === 2 && names.has(base!) && /^\d+(\.\d+)?$/.test(to!) && /\^|\*\*/.test(text)) {
+    return `A power is written { power: ${base}, to: ${to} }.`;
+  }
+  return 'What is worked out from variables is given a name under derive, and that is the term.';
 }
 
 function numeric(

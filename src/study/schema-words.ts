@@ -74,6 +74,14 @@ export function typeHint(error: ErrorObject, path: Path, written: Written): stri
     if (typeof data === 'string' && /^-?[\d.]+$/.test(data)) return 'Write the number without quotes.';
   }
   if (types.includes('boolean') && /^(yes|no|on|off)$/i.test(text)) return 'Write true or false.';
+  const limits = ['at_least', 'at_most'].filter((limit) =>
+    Object.hasOwn((error.parentSchema as BrokenSchema).properties ?? {}, limit),
+  );
+  if (limits.length > 0 && typeof data === 'number')
+    return `Write ${listed(
+      limits.map((limit) => `{ ${limit}: ${text} }`),
+      'or',
+    )}.`;
   if (types.includes('array') && typeof data === 'string')
     return 'Put it in brackets, also where it is only one: [ … ].';
   return undefined;

@@ -24,6 +24,17 @@ describe('formatProblems', () => {
     );
   });
 
+  it('puts that there are more behind those that are listed', () => {
+    const more = problem({ kind: 'file', file: 'a.csv' }, 'More.', { code: 'problems_more' });
+    const cell = problem({ kind: 'cell', file: 'a.csv', row: 9 }, 'A cell.');
+    const whole = problem({ kind: 'file', file: 'a.csv' }, 'The file.');
+    expect(sortProblems([more, cell, whole]).map(({ message }) => message)).toEqual([
+      'The file.',
+      'A cell.',
+      'More.',
+    ]);
+  });
+
   it('has nothing to say of no problems', () => {
     expect(formatProblems([], new Map())).toBe('');
   });

@@ -336,8 +336,13 @@ test('a declared column that is missing', async () => {
 test('a header that is one column for want of the right delimiter', async () => {
   const { table, problems } = await read('a:b\n1:2\n', ab);
   expect(table).toBeNull();
-  expect(marks(problems)).toEqual(['column_missing 1 a', 'column_missing 1 b']);
-  expect(problems[0]?.hint).toContain('data.format.delimiter');
+  // Told once: of such a header every column is missing.
+  expect(marks(problems)).toEqual(['column_missing 1 a']);
+  expect(problems[0]?.hint).toBe('The header was read as a single column; declare data.format.delimiter.');
+  const declared = { ...ab, format: { ...ab.format, delimiter: ';' } };
+  expect((await read('a,b\n1,2\n', declared)).problems).toMatchObject([
+    { hint: 'The header was read as a single column; data.format.delimiter is ";".' },
+  ]);
 });
 
 test('columns named as members of objects', async () => {

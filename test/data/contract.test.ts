@@ -22,6 +22,21 @@ test('stop: every bad value is an error, in file order, and there is no table', 
   ]);
 });
 
+test('an undeclared level is told once, with how many more cells have it', async () => {
+  const texts = ['Tirn', 'Tern', 'Skerry', 'Tirn', 'Tirn', 'Skerry', 'Auk', 'Auk'];
+  const text = `id,vessel,fuel\n${texts.map((level, i) => `K${i},${level},1\n`).join('')}`;
+  const { problems } = await read(text, fuel, { limit: 2 });
+  expect(problems.map(({ message }) => message)).toEqual([
+    '"Tirn" is not a declared level of vessel; 2 more cells have it.',
+    '"Skerry" is not a declared level of vessel; 1 more cell has it.',
+    '2 more rows or cells are faulty and are not listed.',
+  ]);
+  expect(marks(problems).slice(0, 2)).toEqual([
+    'cell_level_undeclared 2 vessel',
+    'cell_level_undeclared 4 vessel',
+  ]);
+});
+
 test('beyond the limit the rest is counted, wherever the chunks are cut', async () => {
   const rows = Array.from({ length: 30 }, (_, i) => `K${i},Tern,${i % 2 === 0 ? 'x' : 1}`);
   rows[7] = 'K7,Tern';

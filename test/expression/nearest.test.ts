@@ -20,6 +20,9 @@ describe('nearest', () => {
     ['pr', ['precipitation'], null],
     ['___', ['precipitation'], null],
     ['rain', ['terrain'], null],
+    ['vif', ['adjusted_r_squared', 'largest_vif'], 'largest_vif'],
+    ['logarithm', ['natural', 'log', 'sqrt'], 'log'],
+    ['speed_total', ['spe', 'speed', 'x'], 'speed'],
   ])('of %s among %j is %s', (word, among, expected) => {
     expect(nearest(word, among)).toBe(expected);
   });

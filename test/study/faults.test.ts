@@ -780,6 +780,50 @@ function position(shown: string): number {
 }
 
 describe('faults at the edges', () => {
+  it.each([
+    ['x * k', 'An interaction is written { interaction: [x, k] }, beside its parts as terms of their own.'],
+    ['x:k', 'An interaction is written { interaction: [x, k] }, beside its parts as terms of their own.'],
+    ['x + k', 'Terms stand in a list: [x, k].'],
+    ['x ^ 2', 'A power is written { power: x, to: 2 }.'],
+    ['log(x)', 'What is worked out from variables is given a name under derive, and that is the term.'],
+    ['x / 2', 'What is worked out from variables is given a name under derive, and that is the term.'],
+  ])('tells how a calculation becomes a term: %s', (term, hint) => {
+    const text = changed(SMALL, '[x]', `["${term}"]`);
+    expect(read(text).problems).toMatchObject([{ code: 'name_unknown', hint }]);
+  });
+
+  it('leaves a name alone that only looks like a calculation', () => {
+    expect(read(changed(SMALL, '[x]', '["x-ray"]')).problems).toMatchObject([
+      { message: 'candidates[0].terms[0] names "x-ray", which is neither a variable nor derived.' },
+    ]);
+    const known = changed(SMALL, 'x: { type: number }', 'x: { type: number }\n    x*f: { type: number }');
+    expect(read(changed(known, '[x]', '[x*f]')).problems).toEqual([]);
+  });
+
+  it('tells how a bare number becomes a limit', () => {
+    const text = changed(
+      SMALL,
+      'response: y',
+      'response: y\nacceptance: { largest_vif: 5 }\nselection: { admit: { p_value: 0.05 } }',
+    );
+    expect(
+      read(text)
+        .problems.map(({ hint }) => hint)
+        .sort(),
+    ).toEqual(['Write { at_least: 5 } or { at_most: 5 }.', 'Write { at_most: 0.05 }.']);
+  });
+
+  it('does not call a value unused where it is open what the candidates need', () => {
+    const text = changed(
+      SMALL,
+      'response: y',
+      'derive: { z: { expression: x / xx } }\nresponse: y\npredict: { rows: [{ label: A, x: 1 }] }',
+    );
+    expect(read(changed(text, '[x]', '[z]')).problems.map(({ code }) => code)).toEqual(['expression_name']);
+    const term = changed(SMALL, 'response: y', 'response: y\npredict: { rows: [{ label: A, x: 1 }] }');
+    expect(read(changed(term, '[x]', '[xx]')).problems.map(({ code }) => code)).toEqual(['name_unknown']);
+  });
+
   it('tells how a date can be the identity of rows', () => {
     const text = changed(SMALL, '  file: a.csv\n', '  file: a.csv\n  row_id: d\n').replace(
       'd: { type: date }',
