@@ -56,9 +56,6 @@ export function resolveStudy(reading: Reading, origin: StudyOrigin): Study | nul
     unsure:
       candidates.length < (file.candidates?.length ?? 0) ||
       [...names.values()].some(({ type }) => type === null),
-    unsure:
-      candidates.length < (file.candidates?.length ?? 0) ||
-      [...names.values()].some(({ type }) => type === null),
     derivedFrom,
   });
   const { holdOut } = selection;
