@@ -1,5 +1,7 @@
 import { basename, dirname, join, resolve } from 'node:path';
-import type { Problem } from '../problem.ts';
+import type { ComparedSide } from '../compare/compare.ts';
+import type { Comparison } from '../compare/comparison.ts';
+import type { Problem, Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
 import { recordFaults } from '../record/record-faults.ts';
 import { recordText } from '../record/record-text.ts';
@@ -20,6 +22,13 @@ export interface FittedStudy {
   readonly templates: ReadonlyMap<string, string>;
   /** Null where nothing was written. */
   readonly written: Written | null;
+  /** What is different from an earlier record; null where none was given. */
+  readonly comparison: Comparison | null;
+}
+
+export interface FitOptions extends RunOptions {
+  /** An earlier record to compare with; what is different is written together with the rest. */
+  readonly earlier?: ComparedSide | null;
 }
 
 export interface Written {
@@ -30,24 +39,29 @@ export interface Written {
 }
 
 /** Runs one study, down to record, reports and tables in the output folder. */
-export async function fitOne(path: string, out: string, options: RunOptions): Promise<FittedStudy> {
+export async function fitOne(path: string, out: string, options: FitOptions): Promise<FittedStudy> {
   const problems: Problem[] = [];
   const report = (problem: Problem) => problems.push(problem);
   const result = await runStudy(path, options);
   problems.push(...result.problems);
   const { dataRead } = result;
   if (result.record === null || hasError(problems)) {
-    return { path, problems, dataRead, templates: new Map(), written: null };
+    return { path, problems, dataRead, templates: new Map(), written: null, comparison: null };
   }
   const templates = templatePlaces(result.record, dirname(path));
   const files = await resultFiles(result.record, result, dirname(path), report);
+  let comparison: Comparison | null = null;
+  if (options.earlier) {
+    comparison = await compareWith(options.earlier, result.record, result, out, report);
+    if (comparison !== null) files.push(...(await filesOf(comparison, result.record)));
+  }
   let written: Written | null = null;
   if (!hasError(problems)) {
     options.onProgress?.('writing results', 0, null);
     const done = await writeResults(out, files, report, RESULT_FILES);
     if (done) written = { record: result.record, out, names: files.map((file) => file.name) };
   }
-  return { path, problems, dataRead, templates, written };
+  return { path, problems, dataRead, templates, written, comparison };
 }
 
 /** 2 where nothing was written; 1 where no candidate was admitted or an acceptance criterion was missed; else 0. */
@@ -61,6 +75,23 @@ export function statusOf({ written }: FittedStudy): number {
 export function defaultFolder(path: string): string {
   const name = basename(path).replace(/(?:\.study)?\.ya?ml$/i, '');
   return join('results', name === 'study' ? basename(dirname(resolve(path))) || name : name);
+}
+
+async function compareWith(
+  earlier: ComparedSide,
+  record: StudyRecord,
+  { kept }: RunResult,
+  out: string,
+  report: Report,
+): Promise<Comparison | null> {
+  const { compareRecords } = await import('../compare/compare.ts');
+  const later = { record, rows: kept?.rows ?? null, file: join(out, 'record.json') };
+  return compareRecords(earlier, later, report);
+}
+
+async function filesOf(comparison: Comparison, record: StudyRecord): Promise<ResultFile[]> {
+  const { comparisonFiles } = await import('./comparison-files.ts');
+  return comparisonFiles(comparison, record);
 }
 
 async function resultFiles(
