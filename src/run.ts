@@ -14,29 +14,29 @@ import { buildDesign } from './model/build-design.ts';
 import type { Design } from './model/design.ts';
 import { type DesignRows, designRows, numbersOf } from './model/design-rows.ts';
 import { toScale } from './model/response-scale.ts';
+import { type AveragedPrediction, averagePredictions } from './predict/average-predictions.ts';
 import { bootstrapPredictions } from './predict/bootstrap-predictions.ts';
+import { tryHoldOut } from './predict/hold-out.ts';
 import { type Predicted, type PredictionRows, predict, smearingResiduals } from './predict/predict.ts';
 import { fileRows, statedRows } from './predict/prediction-rows.ts';
-import { type AveragedPrediction, averagePredictions } from './predict/average-predictions.ts';
-import { tryHoldOut } from './predict/hold-out.ts';
-import { splitSample } from './prepare/set-aside.ts';
-import { subSample } from './prepare/sub-sample.ts';
-import type { SelectionFindings } from './record/describe-selection.ts';
-import type { Choice } from './select/choose.ts';
-import type { Ground } from './select/material.ts';
-import { type Validated, validateCandidates } from './select/validate-candidates.ts';
-import type { ChoiceTrust } from './select/question-choice.ts';
 import { prepareSample } from './prepare/prepare-sample.ts';
 import type { Sample } from './prepare/sample.ts';
+import { splitSample } from './prepare/set-aside.ts';
 import { type Spread, spreadsOf } from './prepare/spread.ts';
+import { subSample } from './prepare/sub-sample.ts';
 import type { Problem, Report } from './problem.ts';
 import { buildRecord } from './record/build-record.ts';
 import type { Bootstrapped } from './record/describe-bootstrap.ts';
+import type { SelectionFindings } from './record/describe-selection.ts';
 import { type KeptSample, keepSample } from './record/keep-sample.ts';
 import type { StudyRecord } from './record/record.ts';
 import { residualColumns } from './record/residual-columns.ts';
 import type { ResidualColumns } from './record/tables.ts';
+import type { Choice } from './select/choose.ts';
 import { choose } from './select/choose.ts';
+import type { Ground } from './select/material.ts';
+import type { ChoiceTrust } from './select/question-choice.ts';
+import { type Validated, validateCandidates } from './select/validate-candidates.ts';
 import { readStudy } from './study/read-study.ts';
 import type { Study } from './study/study.ts';
 
@@ -117,7 +117,13 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   checkFits(study, choosing.sample, design, fits.fits, report);
   if (hasError(problems)) return stopped();
 
-  const validated = validateCandidates(study, { ...choosing, facts: fits.facts }, fits, report, options.onProgress);
+  const validated = validateCandidates(
+    study,
+    { ...choosing, facts: fits.facts },
+    fits,
+    report,
+    options.onProgress,
+  );
   if (hasError(problems)) return stopped();
   const ranked = { ...fits, validation: validated?.validation };
   const choice = choose(study, ranked, report);
@@ -142,7 +148,7 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     study,
     table,
     sample,
-    spreads,
+    spreads: split === null ? spreads : spreadsOf(sample),
     design,
     rows,
     fitted,
@@ -151,7 +157,7 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     findings: {
       validated,
       trust,
-      averagedPredictions: averageAhead(chosen, ranked, trust, ahead?.sources ?? []),
+      averagedPredictions: averageAhead(chosen, ranked, trust, report),
       holdOut: tryHeldOut(chosen, sample),
       split:
         split === null
@@ -239,10 +245,10 @@ function averageAhead(
   chosen: Chosen | null,
   fitted: FittedAll,
   trust: ChoiceTrust | null,
-  [stated]: readonly PredictionRows[],
+  report: Report,
 ): AveragedPrediction[] {
-  if (chosen === null || trust?.averaged == null || stated === undefined) return [];
-  return averagePredictions(chosen, fitted, trust.averaged, stated);
+  if (chosen === null || trust?.averaged == null) return [];
+  return averagePredictions(chosen, fitted, trust.averaged, report);
 }
 
 function rowsOf(study: Study, sample: Sample, design: Design, own: Float64Array): DesignRows {

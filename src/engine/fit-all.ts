@@ -104,7 +104,7 @@ function pressByBudget(
 }
 
 /** s² of the model with all columns of all candidates on each response; null without degrees of freedom. */
-function fullVariance(factor: Factor, design: Design, facts: RowFacts): (number | null)[] {
+export function fullVariance(factor: Factor, design: Design, facts: RowFacts): (number | null)[] {
   const used = [...new Set(design.candidates.flatMap((candidate) => candidate.columns))].sort(
     (a, b) => a - b,
   );

@@ -85,8 +85,7 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
   const rss = (residual / responseScale) ** 2;
   const tss = (responseNorm(factor, responseAt, candidate.intercept) / responseScale) ** 2;
   const size = (responseNorm(factor, responseAt, false) / responseScale) ** 2;
-  // Not even the rounding of the response's own decimals: the fit is exact.
-  const exact = rss <= 1e-27 * size;
+  const exact = isExact(rss, size);
   const n = factor.rowCount;
 
   const span = new Uint32Array((union + 31) >> 5);
@@ -159,6 +158,11 @@ export function logLikelihood(n: number, rss: number, facts: RowFacts, response:
     facts.logWeights / 2 +
     facts.logJacobians[response]!;
   return Number.isFinite(value) ? value : null;
+}
+
+/** Whether RSS is not even the rounding of the response's own decimals, Σ w y² being its size. */
+export function isExact(rss: number, size: number): boolean {
+  return rss <= 1e-27 * size;
 }
 
 /** The listed columns of R side by side, `height` rows each. */

@@ -58,14 +58,46 @@ export interface DependentColumn {
   readonly sentence: string;
 }
 
-/** What the ranking needs beside the fits; from the factor or from one more pass over the rows. */
-export interface FitContext {
-  readonly fits: readonly Fit[];
+/** What a criterion reads of a fit: no inverse, no spans. */
+export type LeanFit = Pick<
+  Fit,
+  | 'candidate'
+  | 'rowCount'
+  | 'columns'
+  | 'residualSumOfSquares'
+  | 'totalSumOfSquares'
+  | 'degreesOfFreedom'
+  | 'exact'
+  | 'logLikelihood'
+>;
+
+/** Errors on rows that a fit did not see, as cross-validation found them. */
+export interface HeldOutErrors {
+  /** By fit; null where it has none. */
+  readonly figures: readonly ({
+    readonly meanSquaredError: number;
+    /** Null with fewer than two folds. */
+    readonly standardError: number | null;
+  } | null)[];
+  /** By fit: why it has none, as a clause. */
+  readonly whyNot: readonly (string | null)[];
+}
+
+/** What the criteria read. */
+export interface CriterionContext {
+  readonly fits: readonly LeanFit[];
   /** Σ (e_i/(1 − h_i))² per fit; null with a reason where it was not worked out or a leverage is 1. */
   readonly press: readonly (number | null)[];
   readonly pressOmitted: string | null;
   /** s² of the union of all terms, by response column; null with a reason where it leaves no degrees of freedom. */
   readonly fullModelVariance: readonly (number | null)[];
+  /** Absent where candidates are not cross-validated. */
+  readonly validation?: HeldOutErrors | undefined;
+}
+
+/** What the ranking needs beside the fits; from the factor or from one more pass over the rows. */
+export interface FitContext extends CriterionContext {
+  readonly fits: readonly Fit[];
   readonly columnNames: readonly string[];
   /** The declared covariance of each fit's estimates, null where it has none; absent: the classical one. */
   readonly covariances?: readonly (Covariance | null)[];

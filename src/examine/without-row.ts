@@ -117,6 +117,7 @@ function whyNoChoice({ study, sample }: Chosen, { rows, fitted }: Around, count:
   const { rankBy, admit } = study.selection;
   const candidates = fitted.fits.length;
   if (candidates === 1) return 'There is only one candidate to choose.';
+  if (study.selection.splitSample !== null) return 'The choice was made on other rows than these.';
   if (!FROM_FACTOR.includes(rankBy)) return `The choice by ${rankBy} is not made again without single rows.`;
   if (admit.pValue !== null && study.inference.standardErrors.kind !== 'classical')
     return 'The choice is not made again without single rows: p-values with the declared standard errors would need all rows for each candidate.';

@@ -12,13 +12,14 @@ import { neededVariables, sampleVariables } from './needed-variables.ts';
 import { rowIds } from './row-ids.ts';
 import { loseMissing, loseWhere, type RowLosses, rowsLeft, startLosses } from './row-losses.ts';
 import type { Sample } from './sample.ts';
+import { setAside } from './set-aside.ts';
 import { timeOrder } from './time-order.ts';
 import { warnOfUndefined } from './warn-of-undefined.ts';
 
 /**
  * From the table to the rows that every candidate is fitted on. A row goes under the first reason that
- * applies: a bad value, the study's own exclusions in order, a weight of zero, then the first needed variable
- * that is missing or undefined. Null, with at least one error reported, where nothing can be fitted.
+ * applies: a bad value, the study's own exclusions in order, a weight of zero, the first needed variable
+ * that is missing or undefined, then the rule that holds rows out. Null, with at least one error reported, where nothing can be fitted.
  */
 export function prepareSample(study: Study, table: Table, report: Report): Sample | null {
   const derived = evaluateDerived(study.derive, table.columns, table.rowCount);
@@ -49,7 +50,7 @@ export function prepareSample(study: Study, table: Table, report: Report): Sampl
   if (!checkScales(study, gathered.get(study.response.variable)!, lines, table.file, report)) return null;
 
   const { time, rowId } = study.data;
-  return {
+  const all: Sample = {
     rowCount: kept.length,
     rows: kept,
     lines,
@@ -58,6 +59,7 @@ export function prepareSample(study: Study, table: Table, report: Report): Sampl
     timeOrder: time === null ? null : timeOrder(gathered.get(time)!, kept.length),
     losses: rows.losses,
   };
+  return setAside(study, table, derived, all, report);
 }
 
 /**

@@ -19,12 +19,14 @@ export interface Sample {
   readonly timeOrder: Int32Array | null;
   /** Every row read but not used, under exactly one reason, in the order in which reasons were applied. */
   readonly losses: readonly Loss[];
+  /** Rows set aside to try the chosen model on, where the study declares it; counted among the losses. */
+  readonly heldOut?: Sample;
 }
 
 export interface Loss {
   /** For a person: the study's own reason, "bad value", or "missing cargo". */
   readonly because: string;
-  readonly kind: 'bad_value' | 'left_out' | 'missing' | 'undefined';
+  readonly kind: 'bad_value' | 'left_out' | 'missing' | 'undefined' | 'held_out';
   readonly rows: number;
   /**
    * For missing values: rows counted under this reason are those whose first missing variable (in order of

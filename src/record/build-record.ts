@@ -10,7 +10,7 @@ import { findDependencies } from '../examine/find-dependencies.ts';
 import { standardErrorsOf } from '../examine/infer.ts';
 import { withoutRows } from '../examine/without-row.ts';
 import type { Design } from '../model/design.ts';
-import type { DesignRows } from '../model/design-rows.ts';
+import { type DesignRows, numbersOf } from '../model/design-rows.ts';
 import { scaleName } from '../model/response-scale.ts';
 import { packageVersion } from '../package-file.ts';
 import { type Predicted, smearingResiduals } from '../predict/predict.ts';
@@ -25,6 +25,7 @@ import { acceptanceOf } from './acceptance.ts';
 import { rowSummaries } from './chart-points.ts';
 import { type Bootstrapped, describeBootstrap } from './describe-bootstrap.ts';
 import { describeModel } from './describe-model.ts';
+import { describeSelection, type SelectionFindings, validationFigures } from './describe-selection.ts';
 import { describeVariables } from './describe-variables.ts';
 import type { KeptSample } from './keep-sample.ts';
 import type { RecordCandidate, RecordExamination, StudyRecord } from './record.ts';
@@ -59,8 +60,16 @@ export interface Run {
  */
 export function buildRecord(run: Run): StudyRecord {
   const { study, table, sample, choice, chosen, predicted } = run;
-  const candidates = candidatesOf(run);
-  const winner = choice.chosen === null ? null : candidates[choice.chosen]!;
+  const { findings } = run;
+  const positive = isPositive(run);
+  const candidates = candidatesOf(run, run.ranked, findings.split === null).map((candidate, index) => ({
+    ...candidate,
+    ...validationFigures(findings.validated, index, positive),
+  }));
+  const chosenOf = (list: readonly RecordCandidate[]) =>
+    choice.chosen === null ? null : list[choice.chosen]!;
+  const estimated = findings.split === null ? null : chosenOf(candidatesOf(run, run.fitted, true));
+  const winner = estimated ?? chosenOf(candidates);
   const variables = describeVariables(study, table, sample, run.spreads);
   const response = variables.find((variable) => variable.name === study.response.variable)!;
   const examination = chosen === null ? null : examinationOf(chosen, run);
@@ -124,14 +133,13 @@ export function buildRecord(run: Run): StudyRecord {
       prefer_smaller_within: study.selection.preferSmallerWithin,
       significance: study.selection.significance,
       admission: [...choice.rules],
-      ranking: choice.ranking.map(({ rank, candidate, value, difference }) => ({
-        rank,
+      ranking: choice.ranking.map(({ candidate, ...place }) => ({
+        ...place,
         candidate: candidates[candidate]!.name,
-        value,
-        difference,
       })),
       chosen: winner?.name ?? null,
       because: choice.because,
+      ...describeSelection(findings, { study, design: run.design, candidates, positive }, estimated),
     },
     model:
       chosen === null ? null : describeModel(chosen, run.rows, run.fitted.factor, smearingResiduals(chosen)),
@@ -164,15 +172,23 @@ function examinationOf(chosen: Chosen, run: Run): RecordExamination {
   };
 }
 
-function candidatesOf({ study, design, fitted, choice, chosen }: Run): RecordCandidate[] {
+function isPositive({ sample, study }: Run): boolean {
+  return numbersOf(sample, study.response.variable).every((y) => y > 0);
+}
+
+/** @param refined whether the chosen model is estimated from these fits' rows */
+function candidatesOf(
+  { study, design, choice, chosen }: Run,
+  fitted: FittedAll,
+  refined: boolean,
+): RecordCandidate[] {
   // The chosen model may have been refined after the ranking; the record shows the refined figures.
-  const fits = fitted.fits.map(
-    (fit, index): Fit => (index === choice.chosen && chosen !== null ? chosen.fit : fit),
-  );
+  const isRefined = (index: number) => refined && index === choice.chosen && chosen !== null;
+  const fits = fitted.fits.map((fit, index): Fit => (isRefined(index) ? chosen!.fit : fit));
   const context = { ...fitted, fits };
   const covariances = fits.map((fit, index) =>
-    index === choice.chosen && chosen !== null
-      ? chosen.covariance
+    isRefined(index)
+      ? chosen!.covariance
       : fitted.covariances === undefined
         ? classicalCovariance(fit)
         : fitted.covariances[index]!,

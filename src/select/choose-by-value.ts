@@ -2,6 +2,7 @@ import type { FitContext } from '../engine/fit.ts';
 import type { SelectionPlan } from '../study/study.ts';
 import type { Admission } from './admission.ts';
 import type { Criterion } from './criterion.ts';
+import { pickByCost, tolerance } from './pick-by-cost.ts';
 import { costOf, type Ranked, sameValue, slackOf } from './rank.ts';
 import { counted, limitText, named, significant } from './words.ts';
 
@@ -27,15 +28,9 @@ export function chooseByValue(
   const values = new Map(ranking.map(({ candidate, value }) => [candidate, value]));
   const cost = (index: number) => costOf(criterion, values.get(index)!);
   const size = (index: number) => context.fits[index]!.columns.length;
-  const least = (indexes: readonly number[], of: (index: number) => number) =>
-    indexes.reduce((smallest, index) => Math.min(smallest, of(index)), Number.POSITIVE_INFINITY);
-
-  const best = least(admitted, cost);
-  const near = admitted.filter((index) => cost(index) - best <= plan.preferSmallerWithin + slackOf(best));
-  const fewest = least(near, size);
-  const smallest = near.filter((index) => size(index) === fewest);
-  const lowest = least(smallest, cost);
-  const chosen = smallest.find((index) => sameValue(lowest, cost(index)))!;
+  const pick = pickByCost(admitted, cost, size, (best) => tolerance(plan, best, context))!;
+  const { chosen, near } = pick;
+  const best = cost(pick.best);
 
   const name = (index: number) => named(context.fits[index]!.candidate.name);
   const order = ranking.map(({ candidate }) => candidate).filter((index) => admissions[index]!.admitted);
@@ -51,7 +46,7 @@ export function chooseByValue(
     }
     const leads = `has the ${extreme} ${criterion.title} (${significant(values.get(leader)!, 5)}) of ${counted(admitted.length, 'admitted candidate')}`;
     if (!sameValue(best, cost(chosen))) {
-      return `${name(leader)} ${leads}, but ${name(chosen)}, ${behind(leader, chosen)}, has ${counted(size(chosen), 'coefficient')} instead of ${size(leader)}; of the ${near.length} candidates within ${limitText(plan.preferSmallerWithin)} of the best the study prefers the smallest.`;
+      return `${name(leader)} ${leads}, but ${name(chosen)}, ${behind(leader, chosen)}, has ${counted(size(chosen), 'coefficient')} instead of ${size(leader)}; of the ${near} candidates within ${margin()} of the best the study prefers the smallest.`;
     }
     const next = order.find((index) => index !== chosen)!;
     return `${name(chosen)} ${leads}; ${runnerUp(next)}.`;
@@ -61,6 +56,12 @@ export function chooseByValue(
     if (!sameValue(cost(chosen), cost(next))) return `${name(next)} comes next, ${behind(chosen, next)}`;
     const why = size(next) > size(chosen) ? 'has more coefficients' : 'is declared later';
     return `${name(next)} has the same value but ${why}`;
+  }
+
+  function margin(): string {
+    return plan.oneStandardError
+      ? `one standard error (${significant(tolerance(plan, pick.best, context), 2)})`
+      : limitText(plan.preferSmallerWithin);
   }
 
   function behind(leader: number, other: number): string {

@@ -3,6 +3,7 @@ import { adjustedRSquaredCriterion } from './criteria/adjusted-r-squared.ts';
 import { aic } from './criteria/aic.ts';
 import { aicc } from './criteria/aicc.ts';
 import { bic } from './criteria/bic.ts';
+import { crossValidation } from './criteria/cross-validation.ts';
 import { mallowsCp } from './criteria/mallows-cp.ts';
 import { partialF } from './criteria/partial-f.ts';
 import { press } from './criteria/press.ts';
@@ -16,6 +17,7 @@ export const CRITERIA: readonly Criterion[] = [
   bic,
   mallowsCp,
   press,
+  crossValidation,
   partialF,
 ];
 

@@ -1,4 +1,4 @@
-import type { FitContext } from '../engine/fit.ts';
+import type { CriterionContext } from '../engine/fit.ts';
 import type { RankBy } from '../study/study.ts';
 
 /** A figure of a fit that candidates can be ranked by. */
@@ -15,9 +15,9 @@ export interface Criterion {
   /** Where it was published. */
   readonly source: string;
   /** Of the fit `context.fits[index]`; null where it is not defined, never NaN or infinite. */
-  readonly value: (index: number, context: FitContext) => number | null;
+  readonly value: (index: number, context: CriterionContext) => number | null;
   /** Why the value is null, as a clause without a full stop. Asked only where it is. */
-  readonly whyUndefined: (index: number, context: FitContext) => string;
+  readonly whyUndefined: (index: number, context: CriterionContext) => string;
 }
 
 export function finiteOrNull(value: number): number | null {

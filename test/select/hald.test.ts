@@ -146,6 +146,7 @@ test('every criterion says where it was published and what it is', () => {
     'bic',
     'mallows_cp',
     'press',
+    'cross_validation',
     'partial_f',
   ]);
   for (const { description, source, title } of CRITERIA) {
@@ -157,5 +158,6 @@ test('every criterion says where it was published and what it is', () => {
     'aic',
     'aicc',
     'bic',
+    'cross_validation',
   ]);
 });

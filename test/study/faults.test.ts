@@ -110,6 +110,14 @@ const CASES: readonly Case[] = [
   },
   {
     from: 'response: y',
+    to: 'response: y\ninference: { hypotheses: [{ name: A, all_of: [{ combination: { x: 1, z: 2 } }, { combination: { z: 1 } }, «{ combination: { x: -3 }, equals: 1 }»] }] }',
+    code: 'limit_nonsense',
+    says: [
+      'inference.hypotheses[0].all_of[2] says of the coefficients what the equalities before it say, or contradicts them.',
+    ],
+  },
+  {
+    from: 'response: y',
     to: 'response: y\ninference: { slopes_at: { «xx»: [1] } }',
     code: 'name_unknown',
     says: ['inference.slopes_at.xx is neither a variable nor derived.'],
@@ -127,6 +135,62 @@ const CASES: readonly Case[] = [
     says: ['candidates[0].terms[0].degre is not a key here. Did you mean degree?'],
   },
   { from: '  file: a.csv\n', to: '', code: 'key_missing', says: [] },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { «split_at»: { variable: x } }',
+    code: 'key_missing',
+    says: ['examination.split_at lacks the key value.'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { split_at: { variable: «z», value: 1 } }',
+    code: 'name_unknown',
+    says: ['examination.split_at.variable names "z", which is neither a variable nor derived.'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { split_at: { variable: «k», value: low } }',
+    code: 'type_unsuited',
+    says: [
+      'examination.split_at.variable names k, which is a category; rows are split at a value of a number, a date or a flag.',
+    ],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { split_at: { variable: d, value: «March» } }',
+    code: 'value_not_allowed',
+    says: ['examination.split_at.value is "March", but d is a date. A date here is written as 2024-03-01.'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { split_at: { variable: f, value: «false» } }',
+    code: 'value_not_allowed',
+    says: ['examination.split_at.value is "false", but f is a flag. Write true:'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { split_at: { variable: x, value: «high» } }',
+    code: 'value_not_allowed',
+    says: ['examination.split_at.value is "high", but x is a number.'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { bootstrap: { by: «blocks» } }',
+    code: 'value_not_allowed',
+    says: ['examination.bootstrap.by is blocks, but data.time names no variable that orders the rows.'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { bootstrap: { block_length: «4» } }',
+    code: 'value_not_allowed',
+    says: ['examination.bootstrap.block_length is given, but by is rows. Write by: blocks, or remove it.'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nexamination: { bootstrap: { repetitions: «10» } }',
+    code: 'limit_nonsense',
+    says: ['examination.bootstrap.repetitions is 10, but must be'],
+  },
   {
     from: 'terms: [x]',
     to: 'terms: [x, «{ power: x }»]',
@@ -173,9 +237,9 @@ const CASES: readonly Case[] = [
   },
   {
     from: 'response: y',
-    to: 'response: y\nselection: { rank_by: «cross_validation» }',
+    to: 'response: y\nselection: { rank_by: «split_half» }',
     code: 'value_not_allowed',
-    says: ['selection.rank_by is "cross_validation", which is not one of adjusted_r_squared, aic,'],
+    says: ['selection.rank_by is "split_half", which is not one of adjusted_r_squared, aic,'],
   },
   {
     from: 'response: y',
@@ -555,10 +619,121 @@ const CASES: readonly Case[] = [
       to: `    terms: [x]\n  - name: B\n    terms: [x]\n    scale: log\nselection: { rank_by: «${criterion}» }`,
       code: 'criterion_across_scales',
       says: [
-        `selection.rank_by is ${criterion}, which cannot rank candidates across response scales (natural and log). Rank by aic, aicc or bic`,
+        `selection.rank_by is ${criterion}, which cannot rank candidates across response scales (natural and log). Rank by aic, aicc, bic or cross_validation`,
       ],
     }),
   ),
+  // How far the choice can be trusted
+  ...(
+    [
+      [
+        'validation: { by: rows, group: «k» }',
+        ['selection.validation.group is given, but by is rows. Write by: group'],
+      ],
+      ['validation: { start: «3» }', ['selection.validation.start is given, but by is rows. Write by: time']],
+      [
+        'validation: { by: leave_one_out, folds: «3» }',
+        ['selection.validation.folds is given, but by is leave_one_out.'],
+      ],
+      [
+        'honest_error: { by: rows, horizon: «2» }',
+        ['selection.honest_error.horizon is given, but by is rows.'],
+      ],
+      [
+        'one_standard_error: «true»',
+        ['selection.one_standard_error needs a cross-validated error, but rank_by is aicc.'],
+      ],
+      [
+        'rank_by: cross_validation, prefer_smaller_within: 2, one_standard_error: «true»',
+        ['selection.one_standard_error and prefer_smaller_within are two rules for the same thing. Keep one'],
+      ],
+      [
+        'rank_by: press, average: «true»',
+        ['selection.average needs weights of evidence, but rank_by is press.'],
+      ],
+      ['stability: { block_length: «3» }', ['selection.stability.block_length is given, but by is rows.']],
+      [
+        '«hold_out»: { share: 0.2, last: 3 }',
+        ['selection.hold_out has share and last, but rows are set aside in one'],
+      ],
+      [
+        '«hold_out»: {}',
+        ['selection.hold_out does not say which rows to set aside. Write one of share, last and where.'],
+      ],
+      [
+        "hold_out: { where: 'x > 3', seed: «2» }",
+        ['selection.hold_out.seed is given, but nothing is drawn.'],
+      ],
+    ] as const
+  ).map(
+    ([selection, says]): Case => ({
+      from: '    terms: [x]',
+      to: `    terms: [x]\n  - name: B\n    terms: []\nselection: { ${selection} }`,
+      code: 'rules_contradict',
+      says,
+    }),
+  ),
+  ...(
+    [
+      ['«honest_error»: {}', 'Of one candidate, selection.validation gives the honest error.'],
+      ['«stability»: {}', 'Declare another candidate'],
+      ['«split_sample»: {}', 'Declare another candidate'],
+      ['average: «true»', 'Declare another candidate'],
+    ] as const
+  ).map(
+    ([selection, hint]): Case => ({
+      from: 'response: y',
+      to: `response: y\nselection: { ${selection} }`,
+      code: 'rules_contradict',
+      says: [`is about the choice among candidates, but there is only one. ${hint}`],
+    }),
+  ),
+  ...(
+    [
+      [
+        'validation: { by: «time» }',
+        'selection.validation.by is time, but a rolling origin needs rows in time order',
+      ],
+      ['honest_error: { by: «time» }', 'selection.honest_error.by is time, but a rolling origin needs'],
+      [
+        'stability: { by: «blocks» }',
+        'selection.stability.by is blocks, but blocks are of rows in time order',
+      ],
+      ['hold_out: { last: «3» }', 'selection.hold_out.last is 3, but the latest rows can be told only'],
+      ['validation: { by: «group» }', 'selection.validation.by is group, but no group is named.'],
+    ] as const
+  ).map(
+    ([selection, says]): Case => ({
+      from: '    terms: [x]',
+      to: `    terms: [x]\n  - name: B\n    terms: []\nselection: { ${selection} }`,
+      code: 'key_missing',
+      says: [says],
+    }),
+  ),
+  {
+    from: 'response: y',
+    to: 'response: y\nselection: { validation: { by: group, group: «kk» } }',
+    code: 'name_unknown',
+    says: ['selection.validation.group names "kk", which is neither a variable nor derived.'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nselection: { validation: { by: group, group: «x» } }',
+    code: 'type_unsuited',
+    says: ['selection.validation.group names x, which is a number; rows are grouped by'],
+  },
+  {
+    from: 'response: y',
+    to: 'response: y\nselection: { hold_out: { where: «x + 1» } }',
+    code: 'expression_type',
+    says: ['selection.hold_out.where yields a number, but must be a condition.'],
+  },
+  {
+    from: '    terms: [x]',
+    to: '    terms: [x]\n  - name: B\n    terms: [x]\n    scale: log\nselection: { average: «true» }',
+    code: 'criterion_across_scales',
+    says: ['selection.average cannot be had where candidates are on different response scales'],
+  },
   // Limits
   {
     from: 'y: { type: number }',
@@ -868,6 +1043,22 @@ describe('faults at the edges', () => {
     const outcome = read(text);
     expect(outcome.places).toEqual(places.map((place) => `${place} name_unused`));
     expect(outcome.problems.every(({ severity }) => severity === 'warning')).toBe(true);
+    expect(outcome.study).not.toBeNull();
+  });
+
+  it('warns of slopes along a variable that no candidate uses', () => {
+    const { text, places } = marked(
+      changed(
+        SMALL,
+        'response: y',
+        'derive: { z: { expression: x + 1 } }\nleave_out: [{ where: z > 9, because: Large }]\nresponse: y\ninference: { slopes_at: { «z»: [1] } }',
+      ),
+    );
+    const outcome = read(text);
+    expect(outcome.places).toEqual(places.map((place) => `${place} name_unused`));
+    expect(outcome.problems[0]!.message).toBe(
+      'inference.slopes_at.z gives places for the slopes of z, which no candidate uses.',
+    );
     expect(outcome.study).not.toBeNull();
   });
 

@@ -31,6 +31,11 @@ const CRITERIA: Readonly<Record<StudyRecord['selection']['rank_by'], Criterion>>
     better: 'lower',
     meaning: 'the sum of squared errors of predicting each row from the others',
   },
+  cross_validation: {
+    name: 'cross-validated error',
+    better: 'lower',
+    meaning: 'the mean squared error of predicting rows that were held out',
+  },
   partial_f: { name: 'partial F', better: 'lower', meaning: 'tests between nested candidates' },
 };
 
