@@ -48,6 +48,9 @@ export function seeded(seed: number): Random {
   };
 }
 
+/** Whether the later file is to be made, by --later: the rows of the first as they stand some months on, and new ones. */
+export const later = process.argv.includes('--later');
+
 /**
  * Writes a CSV, to the file named on the command line where there is one. A cell that holds the delimiter or
  * a quote is quoted.
@@ -61,7 +64,10 @@ export function writeCsv(
   const cell = (text: string) =>
     text.includes(delimiter) || text.includes('"') ? `"${text.replaceAll('"', '""')}"` : text;
   const lines = [header, ...rows].map((row) => row.map(cell).join(delimiter));
-  writeFileSync(process.argv[2] ?? file, `${lines.join('\n')}\n`);
+  writeFileSync(
+    process.argv.slice(2).find((each) => !each.startsWith('--')) ?? file,
+    `${lines.join('\n')}\n`,
+  );
 }
 
 /** 2025-03-09 or, with the time, 2025-03-09T07:40. */

@@ -1,9 +1,10 @@
 /**
- * Makes months.csv. The cold store and every figure are invented.
+ * Makes months.csv, and months-later.csv. The cold store and every figure are invented.
  *
  *     npx tsx pipelines/cold-store-electricity/make-data.ts
+ *     npx tsx pipelines/cold-store-electricity/make-data.ts --later
  */
-import { seeded, writeCsv } from '../invented.ts';
+import { later, type Random, seeded, writeCsv } from '../invented.ts';
 
 const random = seeded(15);
 
@@ -14,7 +15,7 @@ const INTAKE = [610, 560, 600, 640, 700, 790, 960, 1240, 1380, 1050, 820, 900];
 
 const rows: string[][] = [];
 let carried = 0;
-for (let index = 0; index < 36; index++) {
+const addMonth = (index: number, random: Random) => {
   const year = 2022 + Math.floor(index / 12);
   const month = index % 12;
   const days = new Date(Date.UTC(year, month + 1, 0)).getUTCDate();
@@ -37,15 +38,27 @@ for (let index = 0; index < 36; index++) {
     overhauled ? 'yes' : 'no',
     '',
   ]);
-}
+};
+for (let index = 0; index < 36; index++) addMonth(index, random);
 
+const measured = rows[14]![2]!;
 // The meter was out for most of a month; the supplier's estimate is no measurement.
 rows[14]![2] = 'est.';
 rows[14]![7] = 'meter exchanged';
 rows[19]![7] = 'compressor 2 overhauled';
 
+if (later) {
+  // The supplier read the old meter on its bench, and put a reading right that two digits had changed places in.
+  rows[14]![2] = measured;
+  rows[14]![7] = 'old meter read on the bench';
+  rows[25]![2] = String(Number(rows[25]![2]) + 5400);
+  rows[25]![7] = 'reading revised by the supplier';
+  const nextYear = seeded(2026);
+  for (let index = 36; index < 48; index++) addMonth(index, nextYear);
+}
+
 writeCsv(
-  new URL('months.csv', import.meta.url),
+  new URL(later ? 'months-later.csv' : 'months.csv', import.meta.url),
   ['month', 'days', 'kwh', 'outdoor_c', 'intake_t', 'door_openings', 'overhauled', 'notes'],
   rows,
 );

@@ -1,9 +1,10 @@
 /**
- * Makes crossings.csv. The vessels, the places and every figure are invented.
+ * Makes crossings.csv, and crossings-later.csv. The vessels, the places and every figure are invented.
  *
  *     npx tsx pipelines/ferry-fuel/make-data.ts
+ *     npx tsx pipelines/ferry-fuel/make-data.ts --later
  */
-import { dayOf, isoDate, seeded, writeCsv } from '../invented.ts';
+import { dayOf, isoDate, later, type Random, seeded, writeCsv } from '../invented.ts';
 
 const random = seeded(20250313);
 
@@ -18,7 +19,7 @@ type Vessel = keyof typeof VESSELS;
 /** The last time each hull was cleaned before the first crossing, and the cleaning in between. */
 const CLEANED: Record<Vessel, readonly string[]> = {
   Skerry: ['2024-05-12', '2024-11-20'],
-  Tern: ['2024-08-02'],
+  Tern: ['2024-08-02', '2025-03-01'],
   Holm: ['2024-03-30', '2025-01-08'],
 };
 
@@ -42,8 +43,8 @@ const first = dayOf('2024-09-02');
 const last = dayOf('2025-02-27');
 const count = 264;
 
-const rows = Array.from({ length: count }, (_, index) => {
-  const day = Math.floor(first + ((last - first) * index) / count);
+/** One voyage; `saved` is what a vessel burns less since its refit. */
+const voyage = (index: number, day: number, random: Random, saved: Partial<Record<Vessel, number>>) => {
   const vessel = random.pick<Vessel>([
     ['Skerry', 5],
     ['Tern', 4],
@@ -83,7 +84,8 @@ const rows = Array.from({ length: count }, (_, index) => {
         1.72 * deck +
         5.4 * headwind +
         0.62 * headwind * headwind +
-        0.33 * hullDays) +
+        0.33 * hullDays -
+        (saved[vessel] ?? 0)) +
     random.normal(0, 33);
 
   return {
@@ -101,7 +103,13 @@ const rows = Array.from({ length: count }, (_, index) => {
     hullDays: hullDays.toString(),
     remarks: trial ? 'measured mile' : '',
   };
-});
+};
+
+const rows = Array.from({ length: count }, (_, index) =>
+  voyage(index, Math.floor(first + ((last - first) * index) / count), random, {}),
+);
+
+const burned = new Map(rows.map((row) => [row.crossing, row.fuel]));
 
 // What goes wrong on board.
 const revenue = rows.filter((row) => row.status === 'revenue');
@@ -123,8 +131,31 @@ spoil(163, (row) =>
 );
 spoil(201, (row) => Object.assign(row, { passengers: '' }));
 
+if (later) {
+  // The office went through the log: readings put right, one crossing that had been entered twice taken out.
+  const correct = (crossing: string, by: number, remarks: string) =>
+    Object.assign(rows.find((row) => row.crossing === crossing)!, {
+      fuel: String(Number(burned.get(crossing)) + by),
+      remarks,
+    });
+  correct('X0126', 0, 'meter difference, not the total');
+  correct('X0171', 0, 'the other crossing is X0172');
+  correct('X0052', -45, 'meter read again from the photograph');
+  correct('X0209', 30, 'meter read again from the photograph');
+  const twice = rows.findIndex((row) => row.crossing === 'X0088');
+  rows.splice(twice, 1);
+  // Tern came back from the yard on 3 March with new engines.
+  const spring = seeded(20250303);
+  const start = dayOf('2025-03-03');
+  const end = dayOf('2025-05-11');
+  for (let k = 0; k < 96; k++) {
+    const day = Math.floor(start + ((end - start) * k) / 96);
+    rows.push(voyage(count + k, day, spring, { Tern: 105 }));
+  }
+}
+
 writeCsv(
-  new URL('crossings.csv', import.meta.url),
+  new URL(later ? 'crossings-later.csv' : 'crossings.csv', import.meta.url),
   HEADER,
   rows.map((row) => Object.values(row)),
 );

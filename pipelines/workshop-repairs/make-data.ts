@@ -1,12 +1,13 @@
 /**
- * Makes repairs.csv. The workshops, the machines and every figure are invented.
+ * Makes repairs.csv, and repairs-later.csv. The workshops, the machines and every figure are invented.
  *
  *     npx tsx pipelines/workshop-repairs/make-data.ts
+ *     npx tsx pipelines/workshop-repairs/make-data.ts --later
  *
  * The file is as an office program in much of Europe writes it: semicolons between cells, decimal commas,
  * dates as day.month.year.
  */
-import { dayOf, isoDate, seeded, writeCsv } from '../invented.ts';
+import { dayOf, isoDate, later, type Random, seeded, writeCsv } from '../invented.ts';
 
 const random = seeded(11);
 
@@ -34,11 +35,19 @@ const first = dayOf('2023-01-09');
 const last = dayOf('2024-12-13');
 const count = 424;
 
-const rows = Array.from({ length: count }, (_, index) => {
-  const day = Math.floor(first + ((last - first) * index) / count);
+/** The grade that years of work bring; `specialist` is one that the workshops took on later. */
+const gradeAfter = (years: number) => (years < 3 ? 'apprentice' : years < 10 ? 'mechanic' : 'master');
+
+interface Technician {
+  readonly name: string;
+  readonly years: number;
+  readonly grade?: string;
+}
+
+const repair = (index: number, day: number, random: Random, technicians: readonly Technician[]) => {
   const job = random.pick(JOBS.map((each) => [each, each[1]] as const));
   const [kind, , median, meanParts] = job;
-  const technician = random.pick(TECHNICIANS.map((each) => [each, 1] as const));
+  const technician = random.pick(technicians.map((each) => [each, 1] as const));
   const years = technician.years + (day - first) / 365.25;
   const age = Math.min(24, Math.max(0, Math.round(random.normal(8.5, 5))));
   const parts = random.poisson(meanParts);
@@ -55,6 +64,7 @@ const rows = Array.from({ length: count }, (_, index) => {
     closed: isoDate(day).split('-').reverse().join('.'),
     kind,
     technician: technician.name,
+    grade: technician.grade ?? gradeAfter(years),
     years: comma(years, 1),
     age: String(age),
     parts: String(parts),
@@ -63,7 +73,11 @@ const rows = Array.from({ length: count }, (_, index) => {
     hours: comma(Math.max(0.25, Math.round(hours * 4) / 4), 2),
     remark: '',
   };
-});
+};
+
+const rows = Array.from({ length: count }, (_, index) =>
+  repair(index, Math.floor(first + ((last - first) * index) / count), random, TECHNICIANS),
+);
 
 const spoil = (index: number, change: (row: (typeof rows)[number]) => void) => change(rows[index]!);
 // Minutes written where hours belong: beyond the contract, so listed and left out.
@@ -79,13 +93,26 @@ spoil(268, (row) => Object.assign(row, { hours: '0,25', remark: 'found nothing; 
 for (const index of [22, 23, 24, 171, 390]) spoil(index, (row) => Object.assign(row, { age: '' }));
 for (const index of [88, 352]) spoil(index, (row) => Object.assign(row, { parts: '?' }));
 
+if (later) {
+  // Specialists for transmissions were taken on in 2025, and then gearboxes were called transmissions throughout.
+  const nextYear = seeded(25);
+  const staff = [...TECHNICIANS, { name: 'H', years: 14, grade: 'specialist' }];
+  const start = dayOf('2025-01-06');
+  const end = dayOf('2025-06-27');
+  for (let k = 0; k < 110; k++) {
+    rows.push(repair(count + k, Math.floor(start + ((end - start) * k) / 110), nextYear, staff));
+  }
+  for (const row of rows) if (/^gear ?box$/.test(row.kind)) row.kind = 'transmission';
+}
+
 writeCsv(
-  new URL('repairs.csv', import.meta.url),
+  new URL(later ? 'repairs-later.csv' : 'repairs.csv', import.meta.url),
   [
     'job',
     'closed',
     'kind',
     'technician',
+    'grade',
     'technician_years',
     'machine_age',
     'parts',

@@ -218,9 +218,9 @@ export interface ContractChange {
    */
   likely: string | null;
   /**
-   * Why that is likely: every row that had it and is still there has the other now (rows), or it is spelt almost so (spelling).
+   * Why that is likely: every row that had it and is still there has the other now (rows), most cells that break the contract of its variable say so (contract), or it is spelt almost so (spelling).
    */
-  because: 'rows' | 'spelling' | null;
+  because: 'rows' | 'contract' | 'spelling' | null;
   /**
    * Before: smallest and largest value, one median, one share, a count of rows, or a text; null where there is nothing to say.
    */

@@ -113,7 +113,7 @@ function levelChanges(
   ];
 }
 
-/** The new name of a level: what every kept row that had it has now, else the nearest in spelling. */
+/** The new name of a level: what every kept row that had it has now, what breaks the contract in its place, or the nearest in spelling. */
 function likelyName(
   variable: string,
   level: string,
@@ -123,8 +123,21 @@ function likelyName(
 ): Pick<Change, 'likely' | 'because'> {
   const moved = pairs === null ? null : movedTo(variable, level, pairs);
   if (moved !== null && fresh.includes(moved)) return { likely: moved, because: 'rows' };
+  const inPlace = mostOf(broken);
+  if (inPlace !== null) return { likely: inPlace, because: 'contract' };
   const near = nearest(level, [...new Set([...fresh, ...broken])]);
   return { likely: near, because: near === null ? null : 'spelling' };
+}
+
+/** Cells that say the same against the contract this often are no slips. */
+const NO_SLIP = 3;
+
+/** The text that more than half of the cells have, where they are no mere slips. */
+function mostOf(texts: readonly string[]): string | null {
+  const counts = new Map<string, number>();
+  for (const text of texts) counts.set(text, (counts.get(text) ?? 0) + 1);
+  const [most] = [...counts].sort((a, b) => b[1] - a[1]);
+  return most !== undefined && most[1] >= NO_SLIP && most[1] > texts.length / 2 ? most[0] : null;
 }
 
 function movedTo(variable: string, level: string, { earlier, later, matched }: RowPairs): string | null {

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { createWriteStream } from 'node:fs';
-import { mkdir, readdir, rename, rm, rmdir, stat } from 'node:fs/promises';
+import { mkdir, open, readdir, rename, rm, rmdir, stat } from 'node:fs/promises';
 import { dirname, join, resolve } from 'node:path';
 import { pipeline } from 'node:stream/promises';
 import type { Report } from '../problem.ts';
@@ -23,7 +23,8 @@ export interface ResultFile {
  * writes therefore leaves the earlier results as they were, and a hidden folder `.plumbrule-…` that can be
  * deleted. Only a kill within the few milliseconds of the last renames can leave new files among earlier
  * ones: file systems offer no way to replace several files at once. The record is moved in last, so a folder
- * whose record.json is new is complete.
+ * whose record.json is new is complete. Two runs into one folder move their files in one after the other, so that
+ * what stays is the whole of the one that came last.
  *
  * Any failure is reported as `output_unwritable`, with the earlier results untouched.
  */
@@ -43,8 +44,14 @@ export async function writeResults(
     staging = join(parent, `.plumbrule-${randomUUID()}`);
     await mkdir(staging);
     for (const file of files) await writeFile(join(staging, 'new', file.name), file.content);
-    if (existed) await moveIn(folder, staging, files, obsolete);
-    else await rename(join(staging, 'new'), folder);
+    if (existed || !(await appear(join(staging, 'new'), folder))) {
+      const unlock = await lock(folder);
+      try {
+        await moveIn(folder, staging, files, obsolete);
+      } finally {
+        await unlock();
+      }
+    }
     await remove(staging);
     return true;
   } catch (fault) {
@@ -59,6 +66,48 @@ export async function writeResults(
       hint: 'Name another folder with --out.',
     });
     return false;
+  }
+}
+
+/** Makes the finished folder appear in its place; false where another run has made one there meanwhile. */
+async function appear(finished: string, folder: string): Promise<boolean> {
+  try {
+    await rename(finished, folder);
+    return true;
+  } catch (fault) {
+    if (isSystemFault(fault) && (fault.code === 'ENOTEMPTY' || fault.code === 'EEXIST')) return false;
+    throw fault;
+  }
+}
+
+const LOCK = '.plumbrule-lock';
+/** Moving files in takes milliseconds: a lock as old as this, in milliseconds, was left by a run that was killed. */
+const STALE = 5000;
+const PAUSE = 10;
+
+/** Waits until no other run is moving files into the folder; gives what ends its own turn. */
+async function lock(folder: string): Promise<() => Promise<void>> {
+  const path = join(folder, LOCK);
+  for (;;) {
+    try {
+      await (await open(path, 'wx')).close();
+      return () => remove(path);
+    } catch (fault) {
+      if (!isSystemFault(fault) || fault.code !== 'EEXIST') throw fault;
+    }
+    const age = await ageOf(path);
+    if (age !== null && age > STALE) await remove(path);
+    else await new Promise((resolve) => setTimeout(resolve, PAUSE));
+  }
+}
+
+/** Milliseconds since a file was made; null where it is gone. */
+async function ageOf(path: string): Promise<number | null> {
+  try {
+    return Date.now() - (await stat(path)).mtimeMs;
+  } catch (fault) {
+    if (isSystemFault(fault) && fault.code === 'ENOENT') return null;
+    throw fault;
   }
 }
 

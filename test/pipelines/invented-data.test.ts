@@ -10,15 +10,29 @@ const pipelines = join(root, 'pipelines');
 const folders = readdirSync(pipelines, { withFileTypes: true }).filter((each) => each.isDirectory());
 
 describe('the data of the shipped studies', () => {
-  test.each(folders.map((each) => each.name))('%s: the kept script makes the kept data', (name) => {
+  const files = folders.flatMap(({ name }) =>
+    readdirSync(join(pipelines, name))
+      .filter((file) => file.endsWith('.csv'))
+      .map((file) => [name, file] as const),
+  );
+
+  test('there is a first and a later file of each', () => {
+    expect(files).toHaveLength(2 * folders.length);
+  });
+
+  test.each(files)('%s: the kept script makes the kept %s', (name, kept) => {
     const folder = join(pipelines, name);
-    const kept = readdirSync(folder).find((file) => file.endsWith('.csv'))!;
     const scratch = mkdtempSync(join(tmpdir(), 'invented-'));
     try {
       const made = join(scratch, kept);
       execFileSync(
         process.execPath,
-        [join(root, 'node_modules/tsx/dist/cli.mjs'), join(folder, 'make-data.ts'), made],
+        [
+          join(root, 'node_modules/tsx/dist/cli.mjs'),
+          join(folder, 'make-data.ts'),
+          ...(kept.endsWith('-later.csv') ? ['--later'] : []),
+          made,
+        ],
         { cwd: root },
       );
       expect(readFileSync(made, 'utf8')).toBe(readFileSync(join(folder, kept), 'utf8'));

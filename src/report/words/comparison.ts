@@ -96,7 +96,9 @@ function likelySentence({ likely, because, name }: ContractChange): string {
   if (likely === null) return '';
   return because === 'rows'
     ? ` It is called “${likely}” now: every row that had “${name}” and is still there has that.`
-    : ` Is it spelt “${likely}” now?`;
+    : because === 'contract'
+      ? ` In its variable most cells that break the contract say “${likely}”: is that its new name? Then declare it.`
+      : ` Is it spelt “${likely}” now?`;
 }
 
 /** One change of the study as a sentence. */
@@ -259,6 +261,7 @@ export function attentionLines(
   const renamed = contract.filter(({ kind }) => kind === 'level_gone' || kind === 'variable_gone');
   const worse = contract.filter(({ kind }) => ['bad_values', 'rows_lost', 'missing'].includes(kind));
   const fresh = contract.filter(({ kind }) => kind === 'level_new' || kind === 'unit');
+  const studyChanges = comparison.declaration.changes.filter(({ kind }) => kind !== 'parameter').length;
   return [
     ...(choice.changed ? [choiceSentences(comparison, selection)[0]!] : []),
     ...renamed.map((change) => contractChangeSentence(lexicon, change)),
@@ -271,9 +274,7 @@ export function attentionLines(
       : []),
     ...worse.map((change) => contractChangeSentence(lexicon, change)),
     ...fresh.map((change) => contractChangeSentence(lexicon, change)),
-    ...(comparison.declaration.changes.length > 0
-      ? [`The study itself changed in ${counted(comparison.declaration.changes.length, 'place')}.`]
-      : []),
+    ...(studyChanges > 0 ? [`The study itself changed in ${counted(studyChanges, 'place')}.`] : []),
     ...comparison.cannot_tell,
   ].map(raised);
 }
@@ -281,7 +282,7 @@ export function attentionLines(
 /** Whether the study is the same file, or how it differs, in a sentence. */
 export function studySentence({ declaration }: Comparison): string {
   if (!declaration.study_changed) return 'The study file is the same, to the byte.';
-  return declaration.changes.length === 0
+  return declaration.changes.every(({ kind }) => kind === 'parameter')
     ? 'The study file is another, but in nothing that a record tells of: perhaps in labels, comments or conditions.'
     : 'The study file is another:';
 }
