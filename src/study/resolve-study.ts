@@ -30,7 +30,15 @@ export interface StudyOrigin {
  * The meaning check: looks up every name, fills every default, and reports all that cannot be meant. The result is
  * sound only where nothing was reported as an error; null where too little is there to form one.
  */
-export function resolveStudy(reading: Reading, origin: StudyOrigin): Study | null {
+export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null {
+  let errors = 0;
+  const reading: Reading = {
+    ...given,
+    report: (problem) => {
+      if (problem.severity === 'error') errors++;
+      given.report(problem);
+    },
+  };
   const { file } = reading;
   const { variables, names: declared } = resolveVariables(reading);
   const { derive, names, reads } = resolveDerivations(reading, declared);
@@ -53,9 +61,7 @@ export function resolveStudy(reading: Reading, origin: StudyOrigin): Study | nul
     names,
     needed: variables.map(({ name }) => name).filter((name) => rests.has(name)),
     allowed: weights === null ? new Set() : derivedFrom(weights),
-    unsure:
-      candidates.length < (file.candidates?.length ?? 0) ||
-      [...names.values()].some(({ type }) => type === null),
+    unsure: errors > 0 || candidates.length < (file.candidates?.length ?? 0),
     derivedFrom,
   });
   const { holdOut } = selection;
