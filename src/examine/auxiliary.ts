@@ -1,5 +1,6 @@
 import { EXTENDED_BUDGET, type Factor, factorExtended, factorRows } from '../engine/factor.ts';
-import { fitCandidate } from '../engine/fit-candidate.ts';
+import { DEPENDENT } from '../engine/fit-candidate.ts';
+import { columnNorm, eliminate, matrix } from '../engine/kernel.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 
 /** Writes rows from…to−1 of a column that is computed, not read, at `at`. */
@@ -52,36 +53,35 @@ export interface Auxiliary {
   readonly residualSumOfSquares: number;
   /** About the mean where the regression has column 0, which is then the intercept; else about zero. */
   readonly totalSumOfSquares: number;
-  /** Positions among the columns asked for that were kept. */
-  readonly kept: readonly number[];
-  readonly estimates: Float64Array;
 }
 
-/** Regresses response column `response` on some columns of a factor; exactly dependent ones join the earlier ones. */
+/**
+ * Regresses response column `response` on some columns of a factor, in ascending order; exactly dependent ones join the
+ * earlier ones. A candidate's fit without all that is not asked of an auxiliary regression.
+ */
 export function regress(factor: Factor, columns: readonly number[], response = 0): Auxiliary {
-  const union = factor.predictorCount;
-  const fit = fitCandidate(
-    factor,
-    {
-      name: '',
-      response: { variable: '', scale: { kind: 'natural' } },
-      intercept: columns[0] === 0,
-      terms: [],
-      columns,
-      responseColumn: response,
-    },
-    {
-      logWeights: 0,
-      logJacobians: new Array<number>(response + 1).fill(0),
-      columnNames: new Array<string>(union).fill(''),
-      columnVariables: new Array<string[]>(union).fill([]),
-    },
-  );
+  const { triangle, predictorCount, scales } = factor;
+  const at = predictorCount + response;
+  const height = at + 1;
+  const order = [...columns, at];
+  const work = matrix(height, order.length, triangle.lo !== null);
+  order.forEach((column, j) => {
+    const from = column * triangle.stride;
+    const to = from + column + 1;
+    work.hi.set(triangle.hi.subarray(from, to), j * height);
+    if (triangle.lo !== null) work.lo!.set(triangle.lo.subarray(from, to), j * height);
+  });
+  let rank = 0;
+  columns.forEach((column, j) => {
+    const end = column + 1;
+    if (columnNorm(work, j, rank, end) <= DEPENDENT * columnNorm(work, j, 0, end)) return;
+    eliminate(work, j, rank, end, order.length);
+    rank++;
+  });
+  const scale = scales[at]!;
   return {
-    rank: fit.columns.length,
-    residualSumOfSquares: fit.residualSumOfSquares,
-    totalSumOfSquares: fit.totalSumOfSquares,
-    kept: fit.columns.map((column) => columns.indexOf(column)),
-    estimates: fit.estimates,
+    rank,
+    residualSumOfSquares: (columnNorm(work, columns.length, rank, height) / scale) ** 2,
+    totalSumOfSquares: (columnNorm(triangle, at, columns[0] === 0 ? 1 : 0, height) / scale) ** 2,
   };
 }

@@ -9,15 +9,12 @@ import type { Chosen } from './chosen.ts';
 
 /** Powers of the response tried at once, as response columns of one factor. */
 const POWERS = 21;
-/** Powers tried inside each bracket of a later pass. */
-const INNER = 6;
-/** The first are tried from −WIDEST to WIDEST, later ones where the profile has not come down. */
+/** They are tried from −WIDEST to WIDEST. */
 const WIDEST = 2;
+/** Then three about where each figure is expected, this far apart: parabolas through them settle it to 1e-8 or so. */
+const FINER = [0.03, 5e-4];
 /** n m² up to which a pass is quick. */
 const WORK = 3e8;
-const MOST_PASSES = 5;
-/** The interval's ends and the best power are settled to this. */
-const SETTLED = 1e-9;
 
 /** The profile of the likelihood over λ, by where it is highest and where it has come down by half a χ² quantile. */
 export interface BoxCoxProfile {
@@ -90,7 +87,7 @@ function profileAt(fit: Fit, base: DesignRows, logs: Float64Array, powers: reado
   }));
 }
 
-/** A grid, then finer ones about the best power and about each crossing, as many powers in each pass. */
+/** A grid, then finer points about the best power and about each crossing. */
 function search(
   profile: (powers: readonly number[]) => Point[],
   widest: number,
@@ -100,32 +97,16 @@ function search(
   let points = profile(spaced(-widest, widest, POWERS));
   if (points.some((point) => !Number.isFinite(point.height)))
     return 'Some power of the response is fitted exactly, so powers cannot be compared.';
-  let found = read(points, drop);
-  for (let pass = 1; pass < MOST_PASSES; pass++) {
-    const targets = [found.lambda, found.lower, found.upper].flatMap(({ from, to }) =>
-      to - from > SETTLED ? spaced(from, to, INNER + 2).slice(1, -1) : [],
+  for (const step of FINER) {
+    const { lambda, lower, upper } = read(points, drop);
+    const wanted = [lambda, lower, upper].flatMap((at) =>
+      Math.abs(at) < widest ? [at - step, at, at + step] : [],
     );
-    if (targets.length === 0) break;
-    points.push(...profile(targets));
-    points.sort((a, b) => a.lambda - b.lambda);
-    // Brackets may overlap, and a power tried twice tells nothing of the slope.
-    points = points.filter((point, k) => k === 0 || point.lambda - points[k - 1]!.lambda > SETTLED);
-    found = read(points, drop);
+    points = [...points, ...profile(wanted)].sort((a, b) => a.lambda - b.lambda);
+    // A power tried twice tells nothing of the slope.
+    points = points.filter((point, k) => k === 0 || point.lambda - points[k - 1]!.lambda > step * 1e-3);
   }
-  return {
-    lambda: found.lambda.at,
-    lower: found.lower.at,
-    upper: found.upper.at,
-    current,
-    atEdge: found.atEdge,
-  };
-}
-
-interface Bracket {
-  readonly from: number;
-  readonly to: number;
-  /** Interpolated. */
-  readonly at: number;
+  return { ...read(points, drop), current };
 }
 
 function read(points: readonly Point[], drop: number) {
@@ -140,48 +121,60 @@ function read(points: readonly Point[], drop: number) {
   while (left > 0 && points[left]!.height >= target) left--;
   let right = best;
   while (right < last && points[right]!.height >= target) right++;
-  const low = points[left]!.height < target ? crossing(points, left, left + 1, target) : edge(points[0]!);
-  const high =
-    points[right]!.height < target ? crossing(points, right - 1, right, target) : edge(points[last]!);
+  const low = points[left]!.height < target;
+  const high = points[right]!.height < target;
   return {
-    lambda: peak.bracket,
-    lower: low,
-    upper: high,
-    atEdge: best === 0 || best === last || low.from === low.to || high.from === high.to,
+    lambda: peak.lambda,
+    lower: low ? crossing(points, left, left + 1, target) : points[0]!.lambda,
+    upper: high ? crossing(points, right, right - 1, target) : points[last]!.lambda,
+    atEdge: best === 0 || best === last || !low || !high,
   };
 }
 
 /** The top of the parabola through the best point and its neighbours. */
-function peakAbout(points: readonly Point[], best: number): { bracket: Bracket; height: number } {
+function peakAbout(points: readonly Point[], best: number): Point {
   const here = points[best]!;
   const before = points[best - 1];
   const after = points[best + 1];
-  if (before === undefined || after === undefined) return { bracket: edge(here), height: here.height };
-  const a = before.lambda - here.lambda;
-  const b = after.lambda - here.lambda;
-  const f = (before.height - here.height) / a;
-  const g = (after.height - here.height) / b;
+  if (before === undefined || after === undefined) return here;
+  const { slope, curvature } = parabola(here, before, after);
+  if (!(curvature < 0)) return here;
+  const shift = Math.min(
+    after.lambda - here.lambda,
+    Math.max(before.lambda - here.lambda, -slope / (2 * curvature)),
+  );
+  return { lambda: here.lambda + shift, height: here.height + slope * shift + curvature * shift * shift };
+}
+
+/** Where the parabola through two points on either side of the target, and their nearest neighbour, meets it. */
+function crossing(points: readonly Point[], outer: number, inner: number, target: number): number {
+  const a = points[outer]!;
+  const b = points[inner]!;
+  const width = b.lambda - a.lambda;
+  const straight = ((target - a.height) / (b.height - a.height)) * width;
+  const near = [Math.min(outer, inner) - 1, Math.max(outer, inner) + 1]
+    .flatMap((k) => points[k] ?? [])
+    .sort((c, d) => Math.abs(c.lambda - a.lambda) - Math.abs(d.lambda - a.lambda))[0];
+  if (near === undefined) return a.lambda + straight;
+  const { slope, curvature } = parabola(a, b, near);
+  // Newton steps from the straight line's answer; the parabola is nearly straight between the two.
+  let shift = straight;
+  for (let k = 0; k < 20; k++) {
+    shift -=
+      (a.height - target + slope * shift + curvature * shift * shift) / (slope + 2 * curvature * shift);
+  }
+  const inside = shift / width;
+  return a.lambda + (inside >= 0 && inside <= 1 ? shift : straight);
+}
+
+/** height ≈ origin's + slope · shift + curvature · shift², through three points. */
+function parabola(origin: Point, one: Point, other: Point): { slope: number; curvature: number } {
+  const a = one.lambda - origin.lambda;
+  const b = other.lambda - origin.lambda;
+  const f = (one.height - origin.height) / a;
+  const g = (other.height - origin.height) / b;
   const curvature = (g - f) / (b - a);
-  const slope = f - curvature * a;
-  // Where rounding has flattened the top there is nothing more to find.
-  const flat =
-    here.height - Math.min(before.height, after.height) <= 1e-10 * Math.max(1, Math.abs(here.height));
-  const shift = curvature < 0 ? Math.min(b, Math.max(a, -slope / (2 * curvature))) : 0;
-  const at = here.lambda + shift;
-  const height = Math.max(here.height, here.height + slope * shift + curvature * shift * shift);
-  if (flat) return { bracket: { from: at, to: at, at }, height };
-  return { bracket: { from: before.lambda, to: after.lambda, at }, height };
-}
-
-function crossing(points: readonly Point[], left: number, right: number, target: number): Bracket {
-  const a = points[left]!;
-  const b = points[right]!;
-  const share = (target - a.height) / (b.height - a.height);
-  return { from: a.lambda, to: b.lambda, at: a.lambda + share * (b.lambda - a.lambda) };
-}
-
-function edge(point: Point): Bracket {
-  return { from: point.lambda, to: point.lambda, at: point.lambda };
+  return { slope: f - curvature * a, curvature };
 }
 
 function spaced(from: number, to: number, count: number): number[] {

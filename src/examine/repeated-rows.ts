@@ -1,8 +1,8 @@
 import type { Column } from '../data/table.ts';
 import type { Chosen } from './chosen.ts';
 
-/** Cells that are looked up at most. */
-const WORK = 4e6;
+/** Rows up to which they are grouped: each value of each variable is looked up. */
+const MOST_ROWS = 2e5;
 
 /** Which rows have the same values in every variable of the chosen model. */
 export interface RepeatedRows {
@@ -15,16 +15,14 @@ export interface RepeatedRows {
 /** Groups rows by the values of the chosen model's variables; null where no two rows share them all. */
 export function repeatedRows({ columns, fit, sample }: Chosen): RepeatedRows | null | 'too many' {
   const n = sample.rowCount;
+  if (n > MOST_ROWS) return 'too many';
   const names = new Set(
     fit.columns.flatMap((column) => columns[column]!.pieces.map((piece) => piece.variable)),
   );
   const of = new Int32Array(n);
   let count = 1;
-  let work = 0;
   // A variable splits each group by its values; when every row stands alone there is no need to go on.
   for (const name of names) {
-    work += n;
-    if (work > WORK) return 'too many';
     count = split(of, count, sample.columns.get(name)!);
     if (count === n) return null;
   }

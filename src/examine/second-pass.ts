@@ -85,26 +85,33 @@ export function secondPass(chosen: Chosen): SecondPass | null {
 function residualWriters(chosen: Chosen, inOrder: DesignRows, lags: number) {
   const { residuals, fitted, sample, fit } = chosen;
   const s = chosen.s!;
-  const n = sample.rowCount;
   const order = sample.timeOrder;
-  const at = order === null ? (t: number) => t : (t: number) => order[t]!;
-  const writer =
-    (value: (t: number) => number): ColumnWriter =>
-    (from, to, out, place) => {
-      for (let t = from; t < to; t++) out[place + t - from] = value(t);
-    };
+  const roots = inOrder.rootWeights;
   // With an intercept the powers may be taken about any centre: together with the fitted values, which the columns
   // hold, they say the same, and about the middle of their range they keep their digits.
   const { centre, reach } = middle(fitted, fit.candidate.intercept);
-  const root = (t: number) => (inOrder.rootWeights === null ? 1 : inOrder.rootWeights[t]!);
-  const level = (t: number) => (fitted[at(t)]! - centre) / reach;
+  const power = (cube: boolean): ColumnWriter => {
+    return (from, to, out, place) => {
+      for (let t = from; t < to; t++) {
+        const level = (fitted[order === null ? t : order[t]!]! - centre) / reach;
+        out[place + t - from] = cube ? level * level * level : level * level;
+      }
+      if (roots !== null) for (let t = from; t < to; t++) out[place + t - from]! *= roots[t]!;
+    };
+  };
+  const residual = (back: number, square = false): ColumnWriter => {
+    return (from, to, out, place) => {
+      for (let t = from; t < to; t++) {
+        const e = t < back ? 0 : residuals[order === null ? t - back : order[t - back]!]! / s;
+        out[place + t - from] = square ? e * e : e;
+      }
+    };
+  };
   return {
-    powers: [writer((t) => root(t) * level(t) ** 2), writer((t) => root(t) * level(t) ** 3)],
-    lagged: Array.from({ length: lags }, (_, l) =>
-      writer((t) => (t > l && t < n ? residuals[at(t - l - 1)]! / s : 0)),
-    ),
-    residual: writer((t) => residuals[at(t)]! / s),
-    square: writer((t) => (residuals[at(t)]! / s) ** 2),
+    powers: [power(false), power(true)],
+    lagged: Array.from({ length: lags }, (_, l) => residual(l + 1)),
+    residual: residual(0),
+    square: residual(0, true),
   };
 }
 
@@ -133,7 +140,7 @@ function watched(rows: DesignRows, take: Taker): DesignRows {
   };
 }
 
-/** Sums over rows of [intercept | kept columns | …], taken block by block in order. */
+/** Sums over rows of [intercept | kept columns | …], taken block by block in order, column by column within a block. */
 function rowSums(chosen: Chosen, scales: Float64Array, order: Int32Array | null) {
   const { fit, residuals, leverages } = chosen;
   const p = fit.columns.length;
@@ -142,39 +149,62 @@ function rowSums(chosen: Chosen, scales: Float64Array, order: Int32Array | null)
   // Without an intercept column 0 of the block is not the model's.
   const offset = fit.columns[0] === 0 ? 0 : 1;
   const root = fit.rootInverse.map((value, k) => value / scales[(k % p) + offset]!);
-  const unit = Float64Array.from({ length: p }, (_, j) => Math.sqrt(fit.inverse[j * p + j]!));
-  const q = new Float64Array(p);
   const largest = new Float64Array(p);
   const rows = new Int32Array(p).fill(-1);
-  let rowsBeyond = 0;
   const neighbours = order === null ? null : neighbourSums(p);
+  let rowsBeyond = 0;
+  let q = new Float64Array(0);
+  let c = new Float64Array(0);
+  let share = new Float64Array(0);
+  let beyond = new Uint8Array(0);
 
   const take: Taker = (from, to, block, stride) => {
-    for (let t = from; t < to; t++) {
-      const i = order === null ? t : order[t]!;
-      for (let j = 0; j < p; j++) {
-        let sum = 0;
-        for (let k = 0; k <= j; k++) sum += root[j * p + k]! * block[(k + offset) * stride + t - from]!;
-        q[j] = sum;
+    const count = to - from;
+    if (c.length < count) {
+      q = new Float64Array(p * count);
+      c = new Float64Array(count);
+      share = new Float64Array(count);
+      beyond = new Uint8Array(count);
+    }
+    q.fill(0);
+    for (let j = 0; j < p; j++) {
+      for (let k = 0; k <= j; k++) {
+        const r = root[j * p + k]!;
+        const at = (k + offset) * stride;
+        const into = j * count;
+        for (let i = 0; i < count; i++) q[into + i]! += r * block[at + i]!;
       }
-      neighbours?.add(q);
-      const h = leverages[i]!;
-      const spread = deletedDeviation(chosen, i);
-      if (spread === null || !(spread > 0) || h > FULL_LEVERAGE) continue;
-      const share = residuals[i]! / (spread * (1 - h));
-      let beyond = false;
-      for (let j = 0; j < p; j++) {
-        let sum = 0;
-        for (let k = j; k < p; k++) sum += fit.rootInverse[k * p + j]! * q[k]!;
-        const shift = (sum * share) / unit[j]!;
-        if (Math.abs(shift) > mark) beyond = true;
-        if (Math.abs(shift) > Math.abs(largest[j]!)) {
+    }
+    neighbours?.add(q, count);
+    // e/(s_(i)(1 − h)): what turns (X′X)⁻¹x into the change of the coefficients without the row, in units of s_(i).
+    for (let i = 0; i < count; i++) {
+      const row = order === null ? from + i : order[from + i]!;
+      const spread = deletedDeviation(chosen, row);
+      share[i] =
+        spread === null || !(spread > 0) || leverages[row]! > FULL_LEVERAGE
+          ? 0
+          : residuals[row]! / (spread * (1 - leverages[row]!));
+    }
+    beyond.fill(0);
+    for (let j = 0; j < p; j++) {
+      c.fill(0);
+      for (let k = j; k < p; k++) {
+        const r = fit.rootInverse[k * p + j]!;
+        const at = k * count;
+        for (let i = 0; i < count; i++) c[i]! += r * q[at + i]!;
+      }
+      const unit = Math.sqrt(fit.inverse[j * p + j]!);
+      for (let i = 0; i < count; i++) {
+        const shift = (c[i]! * share[i]!) / unit;
+        const size = Math.abs(shift);
+        if (size > mark) beyond[i] = 1;
+        if (size > Math.abs(largest[j]!)) {
           largest[j] = shift;
-          rows[j] = i;
+          rows[j] = order === null ? from + i : order[from + i]!;
         }
       }
-      if (beyond) rowsBeyond++;
     }
+    for (let i = 0; i < count; i++) rowsBeyond += beyond[i]!;
   };
   return {
     take,
@@ -185,31 +215,47 @@ function rowSums(chosen: Chosen, scales: Float64Array, order: Int32Array | null)
 
 function neighbourSums(p: number) {
   const products = new Float64Array(p * p);
-  // The last two rows of Q and the difference between them.
+  /** The last row of Q so far, and the difference between it and the one before. */
   const before = new Float64Array(p);
-  const step = new Float64Array(p);
-  let count = 0;
+  const last = new Float64Array(p);
+  let started = false;
   let first = 0;
   let second = 0;
+  let steps = new Float64Array(0);
   return {
-    add(q: Float64Array): void {
+    /** Takes `count` rows of Q, p columns of that length. */
+    add(q: Float64Array, count: number): void {
+      if (steps.length < p * count) steps = new Float64Array(p * count);
       for (let j = 0; j < p; j++) {
-        const change = count === 0 ? 0 : q[j]! - before[j]!;
-        // Row t − 1 of AQ: the difference to the row before it, less that to the row after.
-        if (count > 0) second += (step[j]! - change) ** 2;
-        first += change * change;
-        step[j] = change;
-        before[j] = q[j]!;
+        const at = j * count;
+        let previous = started ? before[j]! : q[at]!;
+        let step = last[j]!;
+        for (let i = at; i < at + count; i++) {
+          const change = q[i]! - previous;
+          previous = q[i]!;
+          steps[i] = change;
+          first += change * change;
+          // A row of AQ: its difference to the row before, less that of the row after to it. Before the first row
+          // both are 0.
+          second += (step - change) * (step - change);
+          step = change;
+        }
+        before[j] = previous;
+        last[j] = step;
       }
-      if (count > 0) {
-        for (let j = 0; j < p; j++) for (let k = 0; k <= j; k++) products[j * p + k]! += step[j]! * step[k]!;
+      for (let j = 0; j < p; j++) {
+        for (let k = 0; k <= j; k++) {
+          let sum = 0;
+          for (let i = 0; i < count; i++) sum += steps[j * count + i]! * steps[k * count + i]!;
+          products[j * p + k]! += sum;
+        }
       }
-      count++;
+      started = true;
     },
     finish(): NeighbourSums {
       let squared = 0;
       for (let j = 0; j < p; j++) {
-        second += step[j]! ** 2;
+        second += last[j]! ** 2;
         for (let k = 0; k <= j; k++) squared += (j === k ? 1 : 2) * products[j * p + k]! ** 2;
       }
       return { first, second, squared };

@@ -1,9 +1,12 @@
-import { EXTENDED_BUDGET, factorExtended, factorRows } from '../../engine/factor.ts';
-import { fitCandidate } from '../../engine/fit-candidate.ts';
 import { designRows } from '../../model/design-rows.ts';
 import { chiSquaredUpper } from '../../stats/distributions.ts';
+import { type Auxiliary, type ColumnWriter, factorOf, regress, rowsWith } from '../auxiliary.ts';
 import type { Chosen } from '../chosen.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
+import type { SecondPass } from '../second-pass.ts';
+
+/** Share of the squared residuals' variation below which it hardly matters. */
+const SLIGHT = 0.01;
 
 /** n R² of the squared residuals on the model's columns, χ² on their number without the intercept. */
 export const equalSpread: Diagnostic = {
@@ -12,14 +15,15 @@ export const equalSpread: Diagnostic = {
   question: 'Is the spread even?',
   statisticName: 'Breusch–Pagan statistic, Koenker’s form',
   source: 'Breusch & Pagan 1979; Koenker 1981',
-  find(chosen) {
-    if (chosen.s === null)
+  find(chosen, second) {
+    if (second === null)
       return notPossible('The model fits these rows exactly, so there is no spread to judge.');
-    const found = koenker(chosen);
-    if (found === null) return notPossible('The model has no column that varies, so the spread can depend on none.');
+    const found = koenker(chosen, second);
+    if (found === null)
+      return notPossible('The model has no column that varies, so the spread can depend on none.');
     const { statistic, df } = found;
     const p = chiSquaredUpper(statistic, df);
-    const concern = concernOf(p);
+    const concern = concernOf(p, statistic < SLIGHT * chosen.sample.rowCount);
     return {
       statistic,
       df: [df],
@@ -48,39 +52,25 @@ function remedy({ study, spreads, fit }: Chosen): string {
 }
 
 /** The statistic and its degrees of freedom; null where no column of the model varies. */
-export function koenker(chosen: Chosen): { statistic: number; df: number } | null {
-  const { columns, fit, sample, residuals } = chosen;
-  const own = fit.columns.filter((column) => column !== 0);
-  if (own.length === 0) return null;
-  // R² does not depend on the unit of the residuals, and in this one their fourth powers can be held.
-  const largest = residuals.reduce((most, e) => Math.max(most, Math.abs(e)), 0);
-  if (largest === 0) return { statistic: 0, df: own.length };
-  const rows = designRows(
-    [columns[0]!, ...own.map((column) => columns[column]!)],
-    sample,
-    [residuals.map((e) => (e / largest) ** 2)],
-    null,
-  );
-  const factor = rows.rowCount * rows.width ** 2 <= EXTENDED_BUDGET ? factorExtended(rows) : factorRows(rows);
-  const auxiliary = fitCandidate(
-    factor,
-    {
-      name: '',
-      response: { variable: '', scale: { kind: 'natural' } },
-      intercept: true,
-      terms: [],
-      columns: Array.from({ length: own.length + 1 }, (_, j) => j),
-      responseColumn: 0,
-    },
-    {
-      logWeights: 0,
-      logJacobians: [0],
-      columnNames: [],
-      columnVariables: Array.from({ length: own.length + 1 }, () => []),
-    },
-  );
+function koenker(chosen: Chosen, second: SecondPass): { statistic: number; df: number } | null {
+  const { fit, sample } = chosen;
+  if (fit.columns.every((column) => column === 0)) return null;
+  const auxiliary = second.regressSquares?.() ?? unweighted(chosen);
   const share =
     auxiliary.totalSumOfSquares > 0 ? 1 - auxiliary.residualSumOfSquares / auxiliary.totalSumOfSquares : 0;
-  const df = auxiliary.columns.length - 1;
+  const df = auxiliary.rank - 1;
   return df < 1 ? null : { statistic: sample.rowCount * Math.max(0, share), df };
+}
+
+/** Of a weighted study: w e² on the columns as they are. */
+function unweighted({ columns, fit, sample, residuals, s }: Chosen): Auxiliary {
+  const design = [columns[0]!, ...fit.columns.filter((column) => column !== 0).map((j) => columns[j]!)];
+  const rows = designRows(design, sample, [], null);
+  const squares: ColumnWriter = (from, to, out, at) => {
+    for (let i = from; i < to; i++) out[at + i - from] = (residuals[i]! / s!) ** 2;
+  };
+  return regress(
+    factorOf(rowsWith(rows, [], [squares])),
+    design.map((_, j) => j),
+  );
 }
