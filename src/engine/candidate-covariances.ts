@@ -1,4 +1,5 @@
 import type { DesignRows } from '../model/design-rows.ts';
+import { wholeNumber } from '../numerals.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
 import type { Study } from '../study/study.ts';
@@ -30,7 +31,7 @@ export function candidateCovariances(
       code: 'standard_errors_costly',
       severity: 'error',
       place: study.placeOf(['selection', 'admit', 'p_value']),
-      message: `selection.admit.p_value needs a pass over ${rows.rowCount} rows for each of ${fits.length} candidates, because inference.standard_errors is not classical: more work than a run is to take.`,
+      message: `selection.admit.p_value needs a pass over ${wholeNumber(rows.rowCount)} rows for each of ${wholeNumber(fits.length)} candidates, because inference.standard_errors is not classical: more work than a run is to take.`,
       hint: 'Admit by another rule, declare fewer candidates, or let the standard errors be classical.',
     });
   }

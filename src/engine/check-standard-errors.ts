@@ -1,3 +1,4 @@
+import { wholeNumber } from '../numerals.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
 import type { Study } from '../study/study.ts';
@@ -13,7 +14,7 @@ export function checkStandardErrors(study: Study, sample: Sample, report: Report
       code: 'clusters_too_few',
       severity: 'error',
       place: study.placeOf([...path, 'clustered_by']),
-      message: `${plan.by} has one value in all ${sample.rowCount} rows used: with a single cluster nothing can be told of how clusters differ.`,
+      message: `${plan.by} has one value in all ${wholeNumber(sample.rowCount)} rows used: with a single cluster nothing can be told of how clusters differ.`,
       hint: 'Name a variable that puts the rows into several clusters, or declare other standard errors.',
     });
   }
@@ -22,7 +23,7 @@ export function checkStandardErrors(study: Study, sample: Sample, report: Report
       code: 'lags_too_many',
       severity: 'error',
       place: study.placeOf([...path, 'hac_lags']),
-      message: `inference.standard_errors.hac_lags is ${plan.lags}, but there are only ${sample.rowCount} rows.`,
+      message: `inference.standard_errors.hac_lags is ${plan.lags}, but there are only ${wholeNumber(sample.rowCount)} rows.`,
       hint: 'Write auto, or a number that is small beside the number of rows.',
     });
   }

@@ -2,6 +2,7 @@ import { factorRows } from '../engine/factor.ts';
 import type { Fit } from '../engine/fit.ts';
 import { columnNorm } from '../engine/kernel.ts';
 import { type DesignRows, designRows, numbersOf } from '../model/design-rows.ts';
+import { wholeNumber } from '../numerals.ts';
 import { normalQuantile } from '../stats/distributions.ts';
 import type { Scale } from '../study/study.ts';
 import { type ColumnWriter, rowsWith } from './auxiliary.ts';
@@ -41,7 +42,7 @@ export function boxCoxProfile(chosen: Chosen): BoxCoxProfile | string {
   if (!fit.candidate.intercept)
     return 'Without an intercept the powers of the response depend on its unit, so they cannot be compared.';
   if (n * (fit.columns.length + POWERS) ** 2 > WORK)
-    return `Powers of the response are not compared in ${n} rows: it would take many passes over them.`;
+    return `Powers of the response are not compared in ${wholeNumber(n)} rows: it would take many passes over them.`;
   const logs = y.map(Math.log);
   const centre = logs.reduce((sum, log) => sum + log / n, 0);
   for (let i = 0; i < n; i++) logs[i]! -= centre;

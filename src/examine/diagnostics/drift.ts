@@ -1,3 +1,4 @@
+import { wholeNumber } from '../../numerals.ts';
 import { normalUpper } from '../../stats/distributions.ts';
 import { type Chosen, rowName } from '../chosen.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
@@ -22,7 +23,9 @@ export const drift: Diagnostic = {
     const n = chosen.sample.rowCount;
     const p = chosen.fit.columns.length;
     if (n * p * p > WORK)
-      return notPossible(`The model is not followed row by row through ${n} rows: it would take too long.`);
+      return notPossible(
+        `The model is not followed row by row through ${wholeNumber(n)} rows: it would take too long.`,
+      );
     const found = largestSum(chosen, order);
     if (found === null) return notPossible('There are too few rows to follow the model through time.');
     const { statistic, position, direction } = found;

@@ -1,3 +1,4 @@
+import { wholeNumber } from '../../numerals.ts';
 import { fUpper } from '../../stats/distributions.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
 import { repeatedRows } from '../repeated-rows.ts';
@@ -58,7 +59,7 @@ export const lackOfFit: Diagnostic = {
       mark: null,
       verdict:
         concern === 0
-          ? `The model misses no more than rows with the same values differ by (${groups.count} different sets of values in ${n} rows).`
+          ? `The model misses no more than rows with the same values differ by (${wholeNumber(groups.count)} different sets of values in ${wholeNumber(n)} rows).`
           : `The model misses more than rows with the same values differ by: its shape is wrong somewhere, or rows with the same values are not independent.`,
       concern,
       advice:

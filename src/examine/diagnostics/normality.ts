@@ -1,3 +1,4 @@
+import { wholeNumber } from '../../numerals.ts';
 import { SHAPIRO_WILK_ROWS, shapiroWilk } from '../../stats/shapiro-wilk.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
 
@@ -18,7 +19,7 @@ export const normality: Diagnostic = {
     const [fewest, most] = SHAPIRO_WILK_ROWS;
     if (n > most)
       return notPossible(
-        `The Shapiro–Wilk test is made for at most ${most} rows; of ${n}, skewness and tails say more.`,
+        `The Shapiro–Wilk test is made for at most ${wholeNumber(most)} rows; of ${wholeNumber(n)}, skewness and tails say more.`,
       );
     const found = n < fewest ? null : shapiroWilk(chosen.residuals);
     if (found === null)

@@ -1,4 +1,5 @@
 import { scaleName } from '../../model/response-scale.ts';
+import { decimalNumber } from '../../numerals.ts';
 import { boxCoxProfile } from '../box-cox.ts';
 import { type Diagnostic, notPossible } from '../diagnostic.ts';
 
@@ -52,5 +53,5 @@ export const responseScale: Diagnostic = {
 };
 
 function shown(lambda: number): string {
-  return lambda.toFixed(2).replace('-', '−');
+  return decimalNumber(lambda, 2);
 }

@@ -1,5 +1,6 @@
 import { rowsAt } from '../../engine/rows-at.ts';
 import { designRows } from '../../model/design-rows.ts';
+import { wholeNumber } from '../../numerals.ts';
 import { fUpper } from '../../stats/distributions.ts';
 import { factorOf, regress, rowsWith } from '../auxiliary.ts';
 import type { Chosen } from '../chosen.ts';
@@ -30,7 +31,7 @@ export const sameInBothParts: Diagnostic = {
     const { before, after } = parts;
     if (before.length === 0 || after.length === 0)
       return notPossible(
-        `${where} lies outside the data: all ${chosen.sample.rowCount} rows are ${before.length === 0 ? 'at or above' : 'below'} it.`,
+        `${where} lies outside the data: all ${wholeNumber(chosen.sample.rowCount)} rows are ${before.length === 0 ? 'at or above' : 'below'} it.`,
       );
     return compare(chosen, before, after, where);
   },
@@ -52,7 +53,7 @@ function compare(chosen: Chosen, before: Int32Array, after: Int32Array, where: s
   const total = fit.degreesOfFreedom;
   const first = leftIn(chosen, before);
   const last = leftIn(chosen, after);
-  const rows = `${before.length} rows below ${where} and ${after.length} from there on`;
+  const rows = `${wholeNumber(before.length)} rows below ${where} and ${wholeNumber(after.length)} from there on`;
   // A part without degrees of freedom of its own is fitted exactly and adds nothing, which is Chow's second test.
   const rss = first.residualSumOfSquares + last.residualSumOfSquares;
   const df2 = Math.max(0, before.length - first.rank) + Math.max(0, after.length - last.rank);

@@ -1,4 +1,5 @@
 import { designRows } from '../../model/design-rows.ts';
+import { wholeNumber } from '../../numerals.ts';
 import { chiSquaredUpper } from '../../stats/distributions.ts';
 import { factorOf, regress, rowsWith } from '../auxiliary.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
@@ -31,7 +32,7 @@ export const unevenSpread: Diagnostic = {
     const design = [columns[0]!, ...own, ...squaresAndProducts(own)];
     if (n * design.length ** 2 > WORK)
       return notPossible(
-        `The ${design.length - 1} squares and products of the columns are too many to be tested in ${n} rows in reasonable time; the first test of even spread stands for both.`,
+        `The ${design.length - 1} squares and products of the columns are too many to be tested in ${wholeNumber(n)} rows in reasonable time; the first test of even spread stands for both.`,
       );
     const rows = rowsWith(
       designRows(design, { rowCount: n, columns: sample.columns }, [], null),
@@ -50,7 +51,7 @@ export const unevenSpread: Diagnostic = {
     if (df < 1) return constant;
     if (auxiliary.rank >= n)
       return notPossible(
-        `With the squares and products of its columns the model has ${design.length} columns for ${n} rows, too many for the test.`,
+        `With the squares and products of its columns the model has ${design.length} columns for ${wholeNumber(n)} rows, too many for the test.`,
       );
     const share =
       auxiliary.totalSumOfSquares > 0
