@@ -32,6 +32,7 @@ import { type KeptSample, keepSample } from './record/keep-sample.ts';
 import type { StudyRecord } from './record/record.ts';
 import { residualColumns } from './record/residual-columns.ts';
 import type { ResidualColumns } from './record/tables.ts';
+import { checkEstimating } from './select/check-estimating.ts';
 import type { Choice } from './select/choose.ts';
 import { choose } from './select/choose.ts';
 import type { Ground } from './select/material.ts';
@@ -133,6 +134,8 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   if (hasError(problems)) return stopped();
 
   const fitted = split === null ? ranked : fitGround(study, estimating, options, report);
+  if (split !== null && choice.chosen !== null) checkEstimating(study, fitted.fits[choice.chosen]!, report);
+  if (hasError(problems)) return stopped();
   const { rows } = estimating;
   const spreads = spreadsOf(estimating.sample);
   const chosen =

@@ -89,7 +89,8 @@ export function honestError({
       table.mean[at] = mean.squares;
       table.procedure[at] = chosen === null ? mean.squares : squaresOf(rest, chosen.candidate, training);
       if (winner !== null) table.winner[at] = squaresOf(rest, winner.candidate, training);
-      onProgress?.(++done, cells);
+      done++;
+      onProgress?.(done, cells);
     });
   });
 

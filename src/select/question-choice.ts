@@ -33,19 +33,7 @@ export function questionChoice(
   const folds =
     selection.honestError === null ? null : drawFolds(selection.honestError, study, ground.sample, report);
   return {
-    honest:
-      folds === null
-        ? null
-        : {
-            folds,
-            error: honestError({
-              ground,
-              folds,
-              procedure,
-              winner,
-              onProgress: (done, total) => onProgress?.('choosing without each fold', done, total),
-            }),
-          },
+    honest: folds === null ? null : { folds, error: honest(folds) },
     stability:
       selection.stability === null
         ? null
@@ -59,4 +47,25 @@ export function questionChoice(
       ? averaged(selection, fitted, choice.ranking, choice.admissions, study.inference.confidence)
       : null,
   };
+
+  function honest(without: Folds): HonestError | null {
+    const error = honestError({
+      ground,
+      folds: without,
+      procedure,
+      winner,
+      onProgress: (done, total) => onProgress?.('choosing without each fold', done, total),
+    });
+    if (error === null) {
+      report({
+        code: 'fold_unpredictable',
+        severity: 'warning',
+        place: study.placeOf(without.plan.path),
+        message:
+          'The error of the whole procedure cannot be told: what it chooses has no finite prediction of the held-out rows.',
+        hint: 'Hold out fewer rows at a time, or declare smaller candidates.',
+      });
+    }
+    return error;
+  }
 }

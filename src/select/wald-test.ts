@@ -1,5 +1,5 @@
 import { Matrix, QrDecomposition } from 'ml-matrix';
-import type { Covariance } from '../engine/covariance.ts';
+import { type Covariance, errorOf } from '../engine/covariance.ts';
 import { type FTest, fTest } from './f-test.ts';
 
 /**
@@ -36,7 +36,7 @@ export function waldTest(
     lengths[i] = length;
     for (let j = 0; j < p; j++) m.set(j, i, length > 0 ? column[j]! / length : 0);
   });
-  if (q > p || lengths.some((length) => !(length > 0))) return null;
+  if (q > p || statements.some((statement) => !(errorOf(covariance, statement) > 0))) return null;
   const triangle = q === 1 ? Matrix.ones(1, 1) : new QrDecomposition(m).upperTriangularMatrix;
   const z = new Float64Array(q);
   let sum = 0;
