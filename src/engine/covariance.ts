@@ -15,6 +15,8 @@ export interface Covariance {
   readonly kind: StandardErrorsPlan['kind'];
   /** p × p, column-major. */
   readonly root: Float64Array;
+  /** R⁻¹, the root of the classical covariance: the measure of what is rounding. */
+  readonly classicalRoot: Float64Array;
   /** s². */
   readonly variance: number;
   /** Degrees of freedom of t, and of the denominator of F. */
@@ -35,6 +37,7 @@ export function classicalCovariance(fit: Fit): Covariance | null {
   return {
     kind: 'classical',
     root: fit.rootInverse,
+    classicalRoot: fit.rootInverse,
     variance: fit.residualSumOfSquares / fit.degreesOfFreedom,
     df: fit.degreesOfFreedom,
     lags: null,
@@ -115,26 +118,45 @@ export function automaticLags(n: number): number {
   return Math.floor(4 * (n / 100) ** (2 / 9));
 }
 
-/** √(c′Vc), for c of length p. */
+/**
+ * An error below this share of the classical one is rounding of nothing: where clusters leave no sum of residuals
+ * at all, for example.
+ */
+const NOTHING = 1e-9;
+
+/** √(c′Vc), for c of length p; 0 where it is nothing beside the classical one. */
 export function errorOf(covariance: Covariance, c: ArrayLike<number>): number {
+  const { root, classicalRoot, variance } = covariance;
+  const length = projectedLength(root, c);
+  const nothing = root !== classicalRoot && length <= NOTHING * projectedLength(classicalRoot, c);
+  return nothing ? 0 : Math.sqrt(variance) * length;
+}
+
+/** ‖root′c‖. */
+function projectedLength(root: Float64Array, c: ArrayLike<number>): number {
   const p = c.length;
-  const { root } = covariance;
   let sum = 0;
   for (let j = 0; j < p; j++) {
     let projected = 0;
     for (let k = 0; k < p; k++) projected += root[j * p + k]! * c[k]!;
     sum += projected * projected;
   }
-  return Math.sqrt(covariance.variance * sum);
+  return Math.sqrt(sum);
 }
 
-/** √V_jj. */
+/** √V_jj; 0 as for any combination. */
 export function coefficientError(covariance: Covariance, j: number): number {
-  const { root } = covariance;
+  const { root, classicalRoot, variance } = covariance;
+  const length = rowLength(root, j);
+  const nothing = root !== classicalRoot && length <= NOTHING * rowLength(classicalRoot, j);
+  return nothing ? 0 : Math.sqrt(variance) * length;
+}
+
+function rowLength(root: Float64Array, j: number): number {
   const p = Math.round(Math.sqrt(root.length));
   let sum = 0;
   for (let k = 0; k < p; k++) sum += root[k * p + j]! * root[k * p + j]!;
-  return Math.sqrt(covariance.variance * sum);
+  return Math.sqrt(sum);
 }
 
 /** V, p × p, column-major, symmetric. */

@@ -95,6 +95,12 @@ function resolveHypotheses(reading: Reading): HypothesisPlan[] {
       const message = `${showPath([...path, 'name'])} is ${quote(name)}, the name of inference.hypotheses[${earlier}] already.`;
       fault(reading, 'name_twice', [...path, 'name'], message);
     }
+    const follows = dependentEquality(equalities);
+    if (follows !== null) {
+      const at = equalities[follows]!.path;
+      const message = `${showPath(at)} says of the coefficients what the equalities before it say, or contradicts them.`;
+      fault(reading, 'limit_nonsense', at, message, 'Leave it out.');
+    }
     plans.push({ name, equalities });
   });
   return plans;
@@ -113,6 +119,28 @@ function resolveEquality(reading: Reading, written: Loose<EqualityInFile>, path:
     fault(reading, 'limit_nonsense', at, message);
   }
   return [{ combination, equals: written.equals ?? 0, path }];
+}
+
+/** The index of the first equality whose combination is one of those before it, or null; by elimination. */
+function dependentEquality(equalities: readonly EqualityPlan[]): number | null {
+  const names = [...new Set(equalities.flatMap(({ combination }) => [...combination.keys()]))];
+  const reduced: { readonly row: readonly number[]; readonly pivot: number }[] = [];
+  for (const [index, { combination }] of equalities.entries()) {
+    let row = names.map((name) => combination.get(name) ?? 0);
+    const size = largest(row);
+    if (size === 0) continue;
+    for (const { row: earlier, pivot } of reduced) {
+      const factor = row[pivot]! / earlier[pivot]!;
+      row = row.map((value, k) => (k === pivot ? 0 : value - factor * earlier[k]!));
+    }
+    if (largest(row) <= 1e-12 * size) return index;
+    reduced.push({ row, pivot: row.findIndex((value) => Math.abs(value) === largest(row)) });
+  }
+  return null;
+}
+
+function largest(values: readonly number[]): number {
+  return values.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
 }
 
 function resolveSlopes(
