@@ -86,10 +86,13 @@ function sentences({ selection }: StudyRecord): Entries {
   return new Map(selection.admission.map((sentence) => [sentence, sentence]));
 }
 
+/** Settings with a kind of change of their own. */
+const TOLD_APART = ['response.scale', 'weights'];
+
 function settings({ study }: StudyRecord): Entries {
   return new Map(
     study.settings
-      .filter(({ key }) => !key.startsWith('report.'))
+      .filter(({ key }) => !TOLD_APART.includes(key) && !key.startsWith('report.'))
       .map(({ key, value }) => [key, value] as const),
   );
 }

@@ -149,7 +149,7 @@ function numberWriter(values: ArrayLike<number>): CellWriter {
       const value = values[row]!;
       if (Number.isNaN(value)) return at;
       return decimals < 0
-        ? at + bytes.write(String(value), at, 'latin1')
+        ? at + bytes.write(Object.is(value, -0) ? '-0' : String(value), at, 'latin1')
         : writeDecimal(Math.round(value * power), decimals, bytes, at);
     },
   };
