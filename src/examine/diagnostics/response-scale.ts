@@ -1,5 +1,5 @@
 import { scaleName } from '../../model/response-scale.ts';
-import { decimalNumber } from '../../numerals.ts';
+import { decimalNumber, THIN } from '../../numerals.ts';
 import { boxCoxProfile } from '../box-cox.ts';
 import { type Diagnostic, notPossible } from '../diagnostic.ts';
 
@@ -24,7 +24,7 @@ export const responseScale: Diagnostic = {
     if (typeof found === 'string') return notPossible(found);
     const { lambda, lower, upper, current } = found;
     const inside = current >= lower && current <= upper;
-    const confidence = `${Number((100 * chosen.study.inference.confidence).toPrecision(6))} %`;
+    const confidence = `${Number((100 * chosen.study.inference.confidence).toPrecision(6))}${THIN}%`;
     const interval = `λ ${shown(lambda)}, ${confidence} interval ${shown(lower)} to ${shown(upper)}`;
     const declared = scaleName(chosen.fit.candidate.response.scale);
     const fitting = NAMED.filter(([power]) => power >= lower && power <= upper).map(([, name]) => name);

@@ -1,6 +1,7 @@
 import { rowsAt } from '../../engine/rows-at.ts';
 import { designRows } from '../../model/design-rows.ts';
 import { wholeNumber } from '../../numerals.ts';
+import { counted } from '../../select/words.ts';
 import { fUpper } from '../../stats/distributions.ts';
 import { factorOf, regress, rowsWith } from '../auxiliary.ts';
 import type { Chosen } from '../chosen.ts';
@@ -53,7 +54,7 @@ function compare(chosen: Chosen, before: Int32Array, after: Int32Array, where: s
   const total = fit.degreesOfFreedom;
   const first = leftIn(chosen, before);
   const last = leftIn(chosen, after);
-  const rows = `${wholeNumber(before.length)} rows below ${where} and ${wholeNumber(after.length)} from there on`;
+  const rows = `${counted(before.length, 'row')} below ${where} and ${wholeNumber(after.length)} from there on`;
   // A part without degrees of freedom of its own is fitted exactly and adds nothing, which is Chow's second test.
   const rss = first.residualSumOfSquares + last.residualSumOfSquares;
   const df2 = Math.max(0, before.length - first.rank) + Math.max(0, after.length - last.rank);

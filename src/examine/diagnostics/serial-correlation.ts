@@ -1,5 +1,7 @@
+import { counted } from '../../select/words.ts';
 import { chiSquaredUpper } from '../../stats/distributions.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
+import { percent } from '../percent.ts';
 
 /** Share of the residuals' squares that earlier residuals tell, below which it hardly matters. */
 const SLIGHT = 0.01;
@@ -23,7 +25,7 @@ export const serialCorrelation: Diagnostic = {
     if (lags === 0) {
       const wanted = study.examination.lags ?? 1;
       return notPossible(
-        `Looking ${rowsBack(wanted)} takes more than the ${fit.degreesOfFreedom} degrees of freedom that the model leaves.`,
+        `Looking ${rowsBack(wanted)} takes more than the ${counted(fit.degreesOfFreedom, 'degree')} of freedom that the model leaves.`,
       );
     }
     const { residualSumOfSquares, rank } = second.regressResiduals('lags');
@@ -57,8 +59,4 @@ export const serialCorrelation: Diagnostic = {
 
 function rowsBack(lags: number): string {
   return lags === 1 ? '1 row back' : `${lags} rows back`;
-}
-
-function percent(share: number): string {
-  return `${(100 * share).toPrecision(2)} %`;
 }

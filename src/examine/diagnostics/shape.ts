@@ -1,5 +1,6 @@
 import { fUpper } from '../../stats/distributions.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
+import { percent } from '../percent.ts';
 
 /** Share of the residuals' squares that a curve in the fitted values tells, below which it hardly matters. */
 const SLIGHT = 0.01;
@@ -39,7 +40,7 @@ export const shape: Diagnostic = {
       verdict:
         concern === 0
           ? 'No curve in the fitted values is visible that the model lacks.'
-          : `A curve in the fitted values tells ${(100 * share).toPrecision(2)} % of what the model leaves: its errors depend on where in the data one looks.`,
+          : `A curve in the fitted values tells ${percent(share)} of what the model leaves: its errors depend on where in the data one looks.`,
       concern,
       advice:
         concern === 0
