@@ -69,6 +69,8 @@ export function moved(setting: Setting, changes: Readonly<Record<string, number 
  * of the design, and its confidence interval.
  */
 export function effectsBetween(chosen: Chosen, pairs: readonly (readonly [Setting, Setting])[]): Effect[] {
+  // A category may have one level only in the rows that a split leaves for estimating.
+  if (pairs.length === 0) return [];
   const p = chosen.fit.columns.length;
   const at = designAt(chosen, pairs.flat());
   const effectOf = effects(chosen);
