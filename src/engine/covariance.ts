@@ -3,31 +3,11 @@ import type { Sample } from '../prepare/sample.ts';
 import type { HeteroscedasticKind, StandardErrorsPlan } from '../study/study.ts';
 import { type Clusters, clustersOf } from './clusters.ts';
 import { absorb } from './factor.ts';
-import type { Fit } from './fit.ts';
+import type { Covariance, Fit } from './fit.ts';
 import { type ProjectedBlock, visitProjected } from './projected-rows.ts';
 import { FULL_LEVERAGE } from './row-figures.ts';
 
-/**
- * The covariance of the estimates of a fit, as V = variance · root · root′, so that an error √(c′Vc) is the length of a
- * vector and keeps its digits where columns are nearly dependent.
- */
-export interface Covariance {
-  readonly kind: StandardErrorsPlan['kind'];
-  /** p × p, column-major. */
-  readonly root: Float64Array;
-  /** R⁻¹, the root of the classical covariance: the measure of what is rounding. */
-  readonly classicalRoot: Float64Array;
-  /** s². */
-  readonly variance: number;
-  /** Degrees of freedom of t, and of the denominator of F. */
-  readonly df: number;
-  /** Lags of a HAC covariance, clusters of a clustered one; null for the rest. */
-  readonly lags: number | null;
-  readonly clusters: { readonly by: string; readonly count: number } | null;
-  /** Positions in the sample of rows with a leverage of 1, for which HC2 to HC4 are not defined; at most a few. */
-  readonly undefinedRows: readonly number[];
-  readonly undefinedCount: number;
-}
+export type { Covariance };
 
 const MOST_UNDEFINED = 5;
 
@@ -61,36 +41,33 @@ export function declaredCovariance(
   fit: Fit,
   rows: DesignRows,
   sample: Pick<Sample, 'columns' | 'timeOrder'>,
+  sumsHeld = SUMS_HELD,
 ): Covariance | null {
   const classical = classicalCovariance(fit);
   if (classical === null || plan.kind === 'classical') return classical;
   const s = Math.sqrt(classical.variance);
   const n = fit.rowCount;
   const p = fit.columns.length;
-  const triangle = triangleOf(p);
+  const triangle = new Float64Array(p * p);
+  const robust = (factor: number) => rootOf(fit, triangle, factor);
   switch (plan.kind) {
     case 'clustered': {
       const clusters = clustersOf(sample.columns.get(plan.by)!);
-      sumClusters(fit, rows, clusters, s, triangle);
       const g = clusters.count;
-      const factor = (g / (g - 1)) * ((n - 1) / (n - p));
+      if (g * p <= sumsHeld) addClusters(fit, rows, clusters, s, triangle);
+      else addClustersInTurn(fit, rows, clusters, s, triangle);
       return {
         ...classical,
         kind: 'clustered',
-        root: rootOf(fit, triangle.close(), Math.sqrt(factor)),
+        root: robust(Math.sqrt((g / (g - 1)) * ((n - 1) / (n - p)))),
         df: g - 1,
         clusters: { by: plan.by, count: g },
       };
     }
     case 'hac': {
       const lags = plan.lags === 'auto' ? automaticLags(n) : plan.lags;
-      sumWindows(fit, rows, sample.timeOrder, lags, s, triangle);
-      return {
-        ...classical,
-        kind: 'hac',
-        root: rootOf(fit, triangle.close(), Math.sqrt(1 / (lags + 1))),
-        lags,
-      };
+      addWindows(fit, rows, sample.timeOrder, lags, s, triangle);
+      return { ...classical, kind: 'hac', root: robust(Math.sqrt(1 / (lags + 1))), lags };
     }
     default: {
       const { kind } = plan;
@@ -103,12 +80,13 @@ export function declaredCovariance(
             // The residual is zero whatever the row says: 0/0.
             undefinedCount++;
             if (undefinedRows.length < MOST_UNDEFINED) undefinedRows.push(block.rows[i]!);
-            continue;
-          }
-          triangle.add(block, i, (block.residuals[i]! / s) * stretch(kind, h, n, p));
+            block.residuals[i] = 0;
+          } else block.residuals[i]! *= stretch(kind, h, n, p) / s;
         }
+        scaleRows(block, p);
+        absorb(triangle, p, block.projected, block.stride, block.count);
       });
-      return { ...classical, kind, root: rootOf(fit, triangle.close(), 1), undefinedRows, undefinedCount };
+      return { ...classical, kind, root: robust(1), undefinedRows, undefinedCount };
     }
   }
 }
@@ -190,23 +168,68 @@ function stretch(kind: HeteroscedasticKind, h: number, n: number, p: number): nu
   }
 }
 
-/** Sums of q e over the rows of each cluster; rows are visited cluster by cluster. */
-function sumClusters(fit: Fit, rows: DesignRows, clusters: Clusters, s: number, triangle: Triangle): void {
+/** Each row of a block times its residual: q becomes q e. */
+function scaleRows({ projected, residuals, stride, count }: ProjectedBlock, p: number): void {
+  for (let j = 0; j < p; j++) {
+    const at = j * stride;
+    for (let i = 0; i < count; i++) projected[at + i]! *= residuals[i]!;
+  }
+}
+
+/** Numbers (clusters × columns) up to which all sums are held at once: 32 MB. */
+const SUMS_HELD = 4e6;
+
+/** Sums of q e over the rows of each cluster, all of them held. */
+function addClusters(
+  fit: Fit,
+  rows: DesignRows,
+  { count: g, codes }: Clusters,
+  s: number,
+  triangle: Float64Array,
+): void {
   const p = fit.columns.length;
-  const sum = new Float64Array(p);
-  let open = -1;
-  visitProjected(fit, rows, clusters.order, (block) => {
-    for (let i = 0; i < block.count; i++) {
-      const cluster = clusters.codes[block.rows[i]!]!;
-      if (cluster !== open) {
-        if (open >= 0) triangle.addRow(sum);
-        sum.fill(0);
-        open = cluster;
-      }
-      addScore(sum, block, i, s);
+  const sums = new Float64Array(g * p);
+  visitProjected(fit, rows, null, ({ projected, residuals, rows: positions, stride, count }) => {
+    for (let i = 0; i < count; i++) residuals[i]! /= s;
+    for (let j = 0; j < p; j++) {
+      const at = j * stride;
+      const to = j * g;
+      for (let i = 0; i < count; i++) sums[to + codes[positions[i]!]!]! += projected[at + i]! * residuals[i]!;
     }
   });
-  if (open >= 0) triangle.addRow(sum);
+  absorb(triangle, p, sums, g, g);
+}
+
+/** The same with one sum held at a time: rows are visited cluster by cluster, which is slow where they lie apart. */
+function addClustersInTurn(
+  fit: Fit,
+  rows: DesignRows,
+  { codes, order }: Clusters,
+  s: number,
+  triangle: Float64Array,
+): void {
+  const p = fit.columns.length;
+  const most = 256;
+  const sums = new Float64Array(most * p);
+  let at = -1;
+  let open = -1;
+  visitProjected(fit, rows, order, ({ projected, residuals, rows: positions, stride, count }) => {
+    for (let i = 0; i < count; i++) {
+      const cluster = codes[positions[i]!]!;
+      if (cluster !== open) {
+        open = cluster;
+        at++;
+        if (at === most) {
+          absorb(triangle, p, sums, most, most);
+          sums.fill(0);
+          at = 0;
+        }
+      }
+      const e = residuals[i]! / s;
+      for (let j = 0; j < p; j++) sums[j * most + at]! += projected[j * stride + i]! * e;
+    }
+  });
+  absorb(triangle, p, sums, most, at + 1);
 }
 
 /**
@@ -214,42 +237,52 @@ function sumClusters(fit: Fit, rows: DesignRows, clusters: Clusters, s: number, 
  * window is the one before it plus the row that enters less the row that leaves, and is added up afresh once every
  * L + 1 rows, so that rounding does not gather.
  */
-function sumWindows(
+function addWindows(
   fit: Fit,
   rows: DesignRows,
   order: Int32Array | null,
   lags: number,
   s: number,
-  triangle: Triangle,
+  triangle: Float64Array,
 ): void {
   const p = fit.columns.length;
   const length = lags + 1;
+  // The last L + 1 rows, by column.
   const ring = new Float64Array(length * p);
-  const sum = new Float64Array(p);
+  const sums = new Float64Array(p);
   let next = 0;
-  const enter = (block: ProjectedBlock | null, i: number) => {
-    const slot = next * p;
+  /** Turns rows q e of a block into windows. */
+  const enter = (block: Float64Array, stride: number, count: number) => {
+    let slot = next;
     for (let j = 0; j < p; j++) {
-      const score = block === null ? 0 : (block.projected[j * block.stride + i]! * block.residuals[i]!) / s;
-      sum[j]! += score - ring[slot + j]!;
-      ring[slot + j] = score;
+      const of = j * length;
+      let sum = sums[j]!;
+      slot = next;
+      for (let i = j * stride; i < j * stride + count; i++) {
+        const score = block[i]!;
+        sum += score - ring[of + slot]!;
+        ring[of + slot] = score;
+        slot++;
+        if (slot === length) {
+          slot = 0;
+          sum = 0;
+          for (let k = of; k < of + length; k++) sum += ring[k]!;
+        }
+        block[i] = sum;
+      }
+      sums[j] = sum;
     }
-    next = (next + 1) % length;
-    if (next === 0) {
-      sum.fill(0);
-      for (let k = 0; k < ring.length; k++) sum[k % p]! += ring[k]!;
-    }
-    triangle.addRow(sum);
+    next = slot;
+    absorb(triangle, p, block, stride, count);
   };
   visitProjected(fit, rows, order, (block) => {
-    for (let i = 0; i < block.count; i++) enter(block, i);
+    for (let i = 0; i < block.count; i++) block.residuals[i]! /= s;
+    scaleRows(block, p);
+    enter(block.projected, block.stride, block.count);
   });
-  for (let k = 0; k < lags; k++) enter(null, 0);
-}
-
-function addScore(sum: Float64Array, block: ProjectedBlock, i: number, s: number): void {
-  const e = block.residuals[i]! / s;
-  for (let j = 0; j < sum.length; j++) sum[j]! += block.projected[j * block.stride + i]! * e;
+  const rest = 256;
+  for (let done = 0; done < lags; done += rest)
+    enter(new Float64Array(rest * p), rest, Math.min(rest, lags - done));
 }
 
 /** R⁻¹ T′ times a factor, p × p. */
@@ -265,41 +298,4 @@ function rootOf(fit: Fit, t: Float64Array, factor: number): Float64Array {
     }
   }
   return root;
-}
-
-const BUFFER = 128;
-
-interface Triangle {
-  /** Takes row i of a block, times a factor. */
-  readonly add: (block: ProjectedBlock, i: number, factor: number) => void;
-  readonly addRow: (row: Float64Array) => void;
-  /** T, p × p, column-major. */
-  readonly close: () => Float64Array;
-}
-
-/** Gathers rows of length p and takes them into an upper triangle T, T′T = Σ row row′, a buffer at a time. */
-function triangleOf(p: number): Triangle {
-  const t = new Float64Array(p * p);
-  const buffer = new Float64Array(BUFFER * p);
-  let held = 0;
-  const close = () => {
-    if (held > 0) absorb(t, p, buffer, BUFFER, held);
-    held = 0;
-    return t;
-  };
-  const next = () => {
-    held++;
-    if (held === BUFFER) close();
-  };
-  return {
-    add(block, i, factor) {
-      for (let j = 0; j < p; j++) buffer[j * BUFFER + held] = factor * block.projected[j * block.stride + i]!;
-      next();
-    },
-    addRow(row) {
-      for (let j = 0; j < p; j++) buffer[j * BUFFER + held] = row[j]!;
-      next();
-    },
-    close,
-  };
 }

@@ -1,5 +1,5 @@
 import type { CandidateModel } from '../model/design.ts';
-import type { Covariance } from './covariance.ts';
+import type { StandardErrorsPlan } from '../study/study.ts';
 
 /** How the numbers of a fit were computed. See DEVELOPERS.md, "Precision". */
 export type Arithmetic = 'extended' | 'refined' | 'plain';
@@ -93,6 +93,28 @@ export interface CriterionContext {
   readonly fullModelVariance: readonly (number | null)[];
   /** Absent where candidates are not cross-validated. */
   readonly validation?: HeldOutErrors | undefined;
+}
+
+/**
+ * The covariance of the estimates of a fit, as V = variance · root · root′, so that an error √(c′Vc) is the length of a
+ * vector and keeps its digits where columns are nearly dependent.
+ */
+export interface Covariance {
+  readonly kind: StandardErrorsPlan['kind'];
+  /** p × p, column-major. */
+  readonly root: Float64Array;
+  /** R⁻¹, the root of the classical covariance: the measure of what is rounding. */
+  readonly classicalRoot: Float64Array;
+  /** s². */
+  readonly variance: number;
+  /** Degrees of freedom of t, and of the denominator of F. */
+  readonly df: number;
+  /** Lags of a HAC covariance, clusters of a clustered one; null for the rest. */
+  readonly lags: number | null;
+  readonly clusters: { readonly by: string; readonly count: number } | null;
+  /** Positions in the sample of rows with a leverage of 1, for which HC2 to HC4 are not defined; at most a few. */
+  readonly undefinedRows: readonly number[];
+  readonly undefinedCount: number;
 }
 
 /** What the ranking needs beside the fits; from the factor or from one more pass over the rows. */

@@ -215,6 +215,16 @@ describe('covariances of the estimates', () => {
       covariance({ model, fit }, plan, groups),
       covariance({ model: sorted, fit: sortedFit }, plan, pick(groups)),
     );
+    const held = covariance({ model, fit }, plan, groups);
+    const source = { columns: new Map([['g', column(groups)]]), timeOrder: null };
+    expectSame(declaredCovariance(plan, fit, model.rows, source, 0)!, held);
+    const ids = x.map((_, i) => (i * 7) % n);
+    const each = { columns: new Map([['g', column(ids)]]), timeOrder: null };
+    expectSame(
+      declaredCovariance(plan, fit, model.rows, each, 0)!,
+      covariance({ model, fit }, { kind: 'hc0' }),
+      n / (n - 3),
+    );
     // Time runs through the interleaved rows in the order of their clusters.
     expectSame(
       covariance({ model, fit }, { kind: 'hac', lags: 11 }, [], Int32Array.from(order)),
