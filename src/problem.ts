@@ -54,6 +54,8 @@ export const PROBLEM_CODES = [
   'type_unsuited',
   'derivation_cycle',
   'candidate_twice',
+  'hierarchy_impossible',
+  'subsets_too_many',
   'term_without_parts',
   'criterion_across_scales',
   'limit_nonsense',
@@ -108,6 +110,8 @@ export const PROBLEM_CODES = [
   'folds_too_many',
   'origin_too_late',
   'fold_unpredictable',
+  'search_unfinished',
+  'search_empty',
   // examine/
   'hypothesis_name_unknown',
   // predict/
@@ -120,6 +124,8 @@ export const PROBLEM_CODES = [
   'records_unlike',
   'record_differs',
   'record_other_version',
+  'record_cannot_predict',
+  'predictions_none',
   'study_not_found',
   'template_unreadable',
   'template_broken',

@@ -25,6 +25,7 @@ const ROOMS = [
   'report',
   'run.ts',
   'verify.ts',
+  'predict-record.ts',
   'cli',
   'index.ts',
 ];

@@ -46,6 +46,7 @@ describe('README', () => {
     );
     expect(blocks.filter(({ language }) => language === 'csv').map(({ file }) => file)).toEqual([
       'firings.csv',
+      'firings-next.csv',
     ]);
     expect(blocks.filter(({ language }) => language === 'yaml').map(({ file }) => file)).toEqual([
       'firings.study.yaml',
@@ -58,10 +59,12 @@ describe('README', () => {
       .flatMap(({ text }) => text.trim().split(/\n|&&/))
       .map((line) => line.trim());
     const own = commands.filter((line) => line.startsWith('npx plumbrule '));
-    expect(own).toHaveLength(3);
+    expect(own).toHaveLength(4);
     for (const line of own) {
       const { stdout, stderr } = await node(path('src/cli/main.ts'), ...line.split(' ').slice(2));
-      expect(stderr, line).toBe('');
+      // The one example with a row that cannot be predicted says so.
+      if (line.includes(' predict ')) expect(stderr).toContain('no row fitted has kiln "C"');
+      else expect(stderr, line).toBe('');
       expect(stdout.length, line).toBeGreaterThan(60);
     }
     // `npm ci` and the scripts are run by continuous integration on a fresh clone; here they must exist.
@@ -128,7 +131,7 @@ describe('README', () => {
   });
 
   test('the options and commands described are those there are', async () => {
-    for (const command of ['check', 'fit', 'verify', 'render']) {
+    for (const command of ['check', 'fit', 'predict', 'verify', 'render']) {
       const { stdout } = await node(path('src/cli/main.ts'), command, '--help');
       for (const [option] of stdout.matchAll(/--(?!help)[a-z-]+/g)) expect(readme).toContain(`\`${option}`);
       expect(readme).toContain(`\`plumbrule ${command} `);

@@ -5,6 +5,7 @@ import type { StudyOptions } from './common-options.ts';
 import type { CompareCommandOptions } from './compare.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
 import type { FitCommandOptions } from './fit.ts';
+import type { PredictCommandOptions } from './predict.ts';
 import type { RenderCommandOptions } from './render.ts';
 import { showProblems } from './show-problems.ts';
 import type { Terminal } from './terminal.ts';
@@ -102,6 +103,23 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
     .action(async (earlier: string, later: string, options: CompareCommandOptions) => {
       const { compareCommand } = await import('./compare.ts');
       ended(await compareCommand(earlier, later, options, terminal));
+    });
+
+  program
+    .command('predict')
+    .description('predict rows of a file from a record alone')
+    .argument('<record>', 'the record file, record.json')
+    .argument('<rows>', 'a CSV file of rows, or - for standard input')
+    .option('--out <file>', 'where to write (default: standard output)')
+    .addOption(new Option('--format <format>', 'how to write').choices(['csv', 'json']).default('csv'))
+    .option('--interval <confidence>', 'confidence of the intervals (default: that of the study)')
+    .option('--total', 'give the total of all rows')
+    .option('--total-by <variable>', 'give totals by a variable of the model or a column of the file')
+    .addOption(quiet())
+    .addOption(problems())
+    .action(async (record: string, rows: string, options: PredictCommandOptions) => {
+      const { predictCommand } = await import('./predict.ts');
+      ended(await predictCommand(record, rows, options, terminal));
     });
 
   program

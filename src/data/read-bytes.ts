@@ -74,6 +74,29 @@ export async function openBytes(
   };
 }
 
+/** Bytes that come from elsewhere, such as standard input. */
+export function streamedBytes(stream: AsyncIterable<Uint8Array>): ByteSource {
+  const hash = createHash('sha256');
+  async function* pass(): AsyncGenerator<Buffer> {
+    for await (const chunk of stream) {
+      hash.update(chunk);
+      yield Buffer.from(chunk.buffer, chunk.byteOffset, chunk.byteLength);
+    }
+  }
+  const bytes = pass();
+  return {
+    bytes,
+    hasChanged: async () => false,
+    finish: async () => {
+      while (!(await bytes.next()).done);
+      return hash.digest('hex');
+    },
+    close: async () => {
+      await bytes.return(undefined);
+    },
+  };
+}
+
 /** Whether an error comes from the system or from unpacking, and so from the file rather than from the program. */
 export function isReadingError(error: unknown): boolean {
   return error instanceof Error && 'code' in error && /^(?:E(?!RR_)|Z_)/.test(String(error.code));

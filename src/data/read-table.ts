@@ -6,7 +6,7 @@ import { gatherFaults } from './faults.ts';
 import { checkBaseline, type Filling, finishColumn, startColumns, takeWholeRows } from './fill-columns.ts';
 import { findDelimiter } from './find-delimiter.ts';
 import { type HeaderMatch, matchHeader } from './match-header.ts';
-import { type ByteSource, brokenOff, isReadingError, openBytes } from './read-bytes.ts';
+import { type ByteSource, brokenOff, isReadingError, openBytes, streamedBytes } from './read-bytes.ts';
 import { splitRows } from './split-rows.ts';
 import { summarise } from './summarise.ts';
 import type { Table } from './table.ts';
@@ -23,6 +23,10 @@ export interface ReadTableOptions {
    * except the row identity where it is present, which then need not be unique. Default: all that are declared.
    */
   readonly require?: 'all' | ReadonlySet<string>;
+  /** With `require`: names of variables that are read where they are present. */
+  readonly optional?: ReadonlySet<string>;
+  /** Bytes to read instead of those of the file, whose name is then only shown. */
+  readonly bytes?: AsyncIterable<Uint8Array>;
   /** Bytes read at a time; the table does not depend on it. */
   readonly chunkSize?: number;
   /** Bytes by which the delimiter is judged where none is declared. */
@@ -41,7 +45,10 @@ export async function readTable(
   report: Report,
   options: ReadTableOptions = {},
 ): Promise<Table | null> {
-  const source = await openBytes(plan.file, folder, options.chunkSize ?? 65_536, report);
+  const source =
+    options.bytes === undefined
+      ? await openBytes(plan.file, folder, options.chunkSize ?? 65_536, report)
+      : streamedBytes(options.bytes);
   if (source === null) return null;
   try {
     const read = await readRows(plan, source, report, options);
@@ -71,11 +78,11 @@ async function readRows(
   plan: DataPlan,
   source: ByteSource,
   report: Report,
-  { limit = 20, onProgress, require = 'all', headSize = 65_536 }: ReadTableOptions,
+  { limit = 20, onProgress, require = 'all', optional: wanted, headSize = 65_536 }: ReadTableOptions,
 ): Promise<Omit<Table, 'sha256'> | null> {
   const whole = require === 'all';
   const required = whole ? new Set(plan.variables.map((variable) => variable.name)) : require;
-  const optional = new Set(plan.rowId === null ? [] : [plan.rowId]);
+  const optional = new Set([...(wanted ?? []), ...(plan.rowId === null ? [] : [plan.rowId])]);
 
   const decoded = await decodeText(source.bytes, plan.format.encoding, headSize);
   if (decoded.utf16) {

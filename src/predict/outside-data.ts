@@ -1,87 +1,78 @@
 import type { Column } from '../data/table.ts';
-import type { Chosen } from '../examine/chosen.ts';
-import { presentLevels } from '../model/build-design.ts';
 import { baseVariables } from '../prepare/derive.ts';
-import type { Spread } from '../prepare/spread.ts';
+import type { Predictor, RowNeeds } from './predictor.ts';
 
-/** The variables of numbers whose range a prediction must keep to, in the order in which they are looked at. */
-export interface RangedVariables {
-  /** Declared variables that the chosen model uses or rests on. */
-  readonly declared: readonly string[];
-  /** Derived variables that it uses. */
-  readonly derived: readonly string[];
-}
+export { modelVariables } from './predictor.ts';
 
-/**
- * A date is not among them: a model uses what is derived from it (a month, a count of days), and that is looked at.
- */
-export function rangedVariables(chosen: Chosen): RangedVariables {
-  const { derive } = chosen.study;
-  const model = modelVariables(chosen);
-  const isDerived = (name: string) => derive.some((plan) => plan.name === name);
-  const isNumber = (name: string) => chosen.sample.columns.get(name)?.kind === 'number';
-  const declared = new Set(model.flatMap((name) => [...baseVariables(name, derive)]));
-  return {
-    declared: [...declared].filter(isNumber),
-    derived: model.filter((name) => isDerived(name) && isNumber(name)),
-  };
-}
+/** For each row of rows to be predicted, the ways in which it lies outside the sample. */
+export type OutsideData = (row: number, remote: boolean) => string[];
 
 /**
  * Each way in which a row lies outside the sample, as a sentence: a value beyond the range of its variable, or
- * a combination more remote than any row fitted. A derived variable is named only where no declared one is.
- * Levels are checked before (`unknownLevels`).
+ * a combination more remote than any row fitted. A derived variable is named only where no declared one is. A date is
+ * not looked at: a model uses what is derived from it (a month, a count of days). Levels are checked before
+ * (`unknownLevels`).
  */
 export function outsideData(
+  predictor: Predictor,
   columns: ReadonlyMap<string, Column>,
-  row: number,
-  variables: RangedVariables,
-  spreads: ReadonlyMap<string, Spread>,
-  remote: boolean,
-): string[] {
-  const beyond = (name: string): string[] => {
-    const range = spreads.get(name);
-    const column = columns.get(name);
-    if (range === undefined || column?.kind !== 'number') return [];
-    const value = column.values[row]!;
-    if (value < range.smallest)
-      return [`${name} ${value} is below ${range.smallest}, the smallest in the data`];
-    return value > range.largest
-      ? [`${name} ${value} is above ${range.largest}, the largest in the data`]
-      : [];
-  };
-  const declared = variables.declared.flatMap(beyond);
-  if (declared.length > 0) return declared;
-  const derived = variables.derived.flatMap(beyond);
-  if (derived.length > 0) return derived;
-  return remote ? ['its combination of values is more remote than any row in the data'] : [];
-}
-
-/** Levels of the model's categories at a row that no row of the sample has: such a row cannot be predicted. */
-export function unknownLevels(
-  chosen: Chosen,
-  columns: ReadonlyMap<string, Column>,
-  row: number,
-): { variable: string; level: string; known: string[] }[] {
-  const unknown: { variable: string; level: string; known: string[] }[] = [];
-  for (const name of modelVariables(chosen)) {
-    const here = columns.get(name);
-    const sample = chosen.sample.columns.get(name);
-    if (here?.kind !== 'category' || sample?.kind !== 'category') continue;
-    const level = here.levels[here.codes[row]!];
-    const known = presentLevels(sample);
-    if (level !== undefined && !known.includes(level)) unknown.push({ variable: name, level, known });
+  rowCount: number,
+): OutsideData {
+  const { model, derive, ranges } = predictor;
+  const isDerived = (name: string) => derive.some((plan) => plan.name === name);
+  const declared = [...new Set(model.flatMap((name) => [...baseVariables(name, derive)]))];
+  const groups = [declared, model.filter(isDerived)].map((names) =>
+    names.flatMap((name) => {
+      const range = ranges.get(name);
+      const column = columns.get(name);
+      return range === undefined || column?.kind !== 'number' ? [] : [{ name, range, values: column.values }];
+    }),
+  );
+  // Nearly every row of a long list lies inside: variable by variable that is soon seen.
+  const beyond = new Uint8Array(rowCount);
+  for (const { range, values } of groups.flat()) {
+    for (let row = 0; row < rowCount; row++) {
+      if (values[row]! < range.smallest || values[row]! > range.largest) beyond[row] = 1;
+    }
   }
-  return unknown;
+  return (row, remote) => {
+    if (beyond[row] === 1) {
+      for (const group of groups) {
+        const said = group.flatMap(({ name, range, values }) => {
+          const value = values[row]!;
+          if (value < range.smallest)
+            return [`${name} ${value} is below ${range.smallest}, the smallest in the data`];
+          return value > range.largest
+            ? [`${name} ${value} is above ${range.largest}, the largest in the data`]
+            : [];
+        });
+        if (said.length > 0) return said;
+      }
+    }
+    return remote ? ['its combination of values is more remote than any row in the data'] : [];
+  };
 }
 
-/** The variables of the chosen model's terms, each once, in order of first use. */
-export function modelVariables(chosen: Chosen): string[] {
-  return [
-    ...new Set(
-      chosen.fit.candidate.columns.flatMap((column) =>
-        chosen.columns[column]!.pieces.map((piece) => piece.variable),
-      ),
-    ),
-  ];
+export interface UnknownLevel {
+  readonly variable: string;
+  readonly level: string;
+  readonly known: readonly string[];
+}
+
+/** Per row, the levels that it has and may not have: such a row cannot be predicted. */
+export function unknownLevels(
+  needs: RowNeeds,
+  columns: ReadonlyMap<string, Column>,
+): (row: number) => UnknownLevel[] {
+  const checks = [...needs.levels].flatMap(([variable, known]) => {
+    const column = columns.get(variable);
+    if (column?.kind !== 'category') return [];
+    const strange = column.levels.map((level) => !known.includes(level));
+    return strange.includes(true) ? [{ variable, known, column, strange }] : [];
+  });
+  return (row) =>
+    checks.flatMap(({ variable, known, column, strange }) => {
+      const code = column.codes[row]!;
+      return strange[code] === true ? [{ variable, level: column.levels[code]!, known }] : [];
+    });
 }

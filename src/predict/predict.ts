@@ -2,12 +2,14 @@ import type { Column } from '../data/table.ts';
 import { errorOf } from '../engine/covariance.ts';
 import type { Chosen } from '../examine/chosen.ts';
 import { rootForm } from '../examine/effects/settings.ts';
+import type { DesignColumn } from '../model/design.ts';
 import { designRows } from '../model/design-rows.ts';
 import { fromScale, isDecreasing, scaleName } from '../model/response-scale.ts';
 import type { Place, Report, Severity } from '../problem.ts';
 import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { Scale } from '../study/study.ts';
-import { outsideData, rangedVariables } from './outside-data.ts';
+import { outsideData } from './outside-data.ts';
+import { type Predictor, predictorOf } from './predictor.ts';
 
 /** Rows to be predicted: every variable of the model, declared and derived. */
 export interface PredictionRows {
@@ -57,54 +59,82 @@ export interface Predicted {
 /** Residuals that the smearing estimate averages over: all up to this many, else evenly spaced order statistics. */
 export const SMEARING_RESIDUALS = 2000;
 
-/**
- * Predictions at stated rows. Mean: x′b ± t √(x′Vx), V the declared covariance of the estimates; new row: the
- * classical s²/w is added, w the row's weight where it gives one, else 1. The total adds the rows' covariance:
- * Σ s²/w + 1′XVX′1. Intervals are taken back to the own scale by their ends, the mean there by smearing (Duan 1983).
- *
- * A row at which the model has no answer that can be computed, or one that no response can have, is reported and
- * left out. The chosen model has degrees of freedom; an exact fit says nothing of how far rows lie from it.
- */
+/** What predictions are asked for besides each row's own. */
+export interface PredictRequest {
+  /** Confidence of the intervals, between 0 and 1. */
+  readonly interval: number;
+  /** Per source, the group of each of its rows, from 0; left out where no totals of groups are wanted. */
+  readonly groups?: { readonly count: number; readonly of: readonly Int32Array[] };
+}
+
+export interface PredictedRows {
+  readonly predictions: Prediction[];
+  /** By prediction: the row of its source. */
+  readonly sourceRows: readonly number[];
+  /** Of all rows predicted, then of each group; all null where the response's scale is not natural or no row is predicted. */
+  readonly totals: readonly (PredictionTotal | null)[];
+}
+
+/** The chosen model's predictions at the rows of a study. The chosen model has degrees of freedom. */
 export function predict(
   chosen: Chosen,
   sources: readonly PredictionRows[],
   smearing: Float64Array | null,
   report: Report,
 ): Predicted {
-  const { fit, study } = chosen;
-  const p = fit.columns.length;
-  const { scale } = fit.candidate.response;
-  const { s, covariance } = chosen;
-  const t = tTwoSidedQuantile(1 - study.predict.interval, covariance?.df ?? fit.degreesOfFreedom);
-  // x′Vx/s²: with the classical covariance, the leverage.
-  const shareOf = (x: Float64Array) =>
-    covariance === null || s === null ? 0 : (errorOf(covariance, x) / s) ** 2;
-  const largestLeverage = chosen.leverages.reduce((most, h) => Math.max(most, h), 0);
-  const ranged = rangedVariables(chosen);
-  const sum = new Float64Array(p);
-  let centres = 0;
-  let newRows = 0;
+  const { interval, total } = chosen.study.predict;
+  const { predictions, totals } = predictRows(predictorOf(chosen, smearing), sources, { interval }, report);
+  return { predictions, total: total ? totals[0]! : null };
+}
 
-  const predictions = sources.flatMap((rows) => {
-    const at = designAt(chosen, rows);
-    const weightOf = weightsOf(chosen, rows);
+/**
+ * Predictions at rows. Mean: x′b ± t √(x′Vx), V the declared covariance of the estimates; new row: the
+ * classical s²/w is added, w the row's weight where it gives one, else 1. A total adds the rows' covariance:
+ * Σ s²/w + 1′XVX′1. Intervals are taken back to the own scale by their ends, the mean there by smearing (Duan 1983).
+ *
+ * A row at which the model has no answer that can be computed, or one that no response can have, is reported and
+ * left out. An exact fit says nothing of how far rows lie from it.
+ */
+export function predictRows(
+  predictor: Predictor,
+  sources: readonly PredictionRows[],
+  { interval, groups }: PredictRequest,
+  report: Report,
+): PredictedRows {
+  const { estimates, rootInverse, s, covariance, smearing, largestLeverage } = predictor;
+  const { scale } = predictor.response;
+  const p = estimates.length;
+  const t = tTwoSidedQuantile(1 - interval, predictor.degreesOfFreedom);
+  // x′Vx/s²: with the classical covariance, the leverage.
+  const classical = covariance !== null && covariance.root === rootInverse;
+  const shareOf = (x: Float64Array, leverage: number) => {
+    if (covariance === null || s === null) return 0;
+    return classical ? leverage : (errorOf(covariance, x) / s) ** 2;
+  };
+  const sums = Array.from({ length: 1 + (groups?.count ?? 0) }, () => emptySum(p));
+  const sourceRows: number[] = [];
+
+  const predictions = sources.flatMap((rows, source) => {
+    const at = rowsOf(predictor.columns, rows);
+    const weightOf = weightsAt(predictor.weights, rows);
+    const outsideAt = outsideData(predictor, rows.columns, rows.rowCount);
     return rows.labels.flatMap((label, i): Prediction[] => {
       const row = at(i);
-      const centre = dot(row, fit.estimates);
-      const leverage = rootForm(fit.rootInverse, p, row) ** 2;
+      const centre = dot(row, estimates);
+      const leverage = rootForm(rootInverse, p, row) ** 2;
       const weight = weightOf(i);
       const estimate = fromScale(centre, scale);
       if (!(Number.isFinite(centre) && Number.isFinite(leverage) && Number.isFinite(estimate))) {
-        unpredictable(chosen, rows, i, centre, leverage, report);
+        unpredictable(predictor, rows, i, centre, leverage, report);
         return [];
       }
-      const share = shareOf(row);
-      centres += centre;
-      newRows += 1 / weight;
-      for (let j = 0; j < p; j++) sum[j]! += row[j]!;
+      const share = shareOf(row, leverage);
+      addRow(sums[0]!, row, centre, weight);
+      if (groups !== undefined) addRow(sums[1 + groups.of[source]![i]!]!, row, centre, weight);
       const [lower, upper] = ends(centre, s, t * Math.sqrt(1 / weight + share), scale);
       const [meanLower, meanUpper] = ends(centre, s, t * Math.sqrt(share), scale);
       const remote = weight * leverage > largestLeverage * (1 + 1e-9);
+      sourceRows.push(i);
       return [
         {
           label,
@@ -116,47 +146,55 @@ export function predict(
           mean_upper: meanUpper,
           mean: smearing === null ? null : smearedMean(centre, smearing, scale),
           leverage,
-          outside: outsideData(rows.columns, i, ranged, chosen.spreads, remote),
+          outside: outsideAt(i, remote),
         },
       ];
     });
   });
-  const [lower, upper] = ends(centres, s, t * Math.sqrt(newRows + shareOf(sum)), scale);
-  const wanted = study.predict.total && scale.kind === 'natural' && predictions.length > 0;
-  return {
-    predictions,
-    total: wanted
-      ? {
-          rows: predictions.length,
-          estimate: centres,
-          lower,
-          upper,
-          mean: null,
-        }
-      : null,
-  };
+  const totals = sums.map((sum): PredictionTotal | null => {
+    if (scale.kind !== 'natural' || sum.rows === 0) return null;
+    const share = shareOf(sum.columns, rootForm(rootInverse, p, sum.columns) ** 2);
+    const [lower, upper] = ends(sum.centres, s, t * Math.sqrt(sum.newRows + share), scale);
+    return { rows: sum.rows, estimate: sum.centres, lower, upper, mean: null };
+  });
+  return { predictions, sourceRows, totals };
+}
+
+/** What a total is worked out from. */
+interface Sum {
+  rows: number;
+  /** Σ x′b. */
+  centres: number;
+  /** Σ 1/w. */
+  newRows: number;
+  /** X′1. */
+  readonly columns: Float64Array;
+}
+
+function emptySum(p: number): Sum {
+  return { rows: 0, centres: 0, newRows: 0, columns: new Float64Array(p) };
+}
+
+function addRow(sum: Sum, row: Float64Array, centre: number, weight: number): void {
+  sum.rows++;
+  sum.centres += centre;
+  sum.newRows += 1 / weight;
+  for (let j = 0; j < row.length; j++) sum.columns[j]! += row[j]!;
 }
 
 /** The rows of the chosen model's design, one at a time, in an array that is used again. */
 export function designAt(chosen: Chosen, rows: PredictionRows): (row: number) => Float64Array {
-  const { fit, columns } = chosen;
+  const columns = chosen.fit.columns.map((column) => chosen.columns[column]!);
+  return rowsOf(columns, rows);
+}
+
+function rowsOf(columns: readonly DesignColumn[], rows: PredictionRows): (row: number) => Float64Array {
   const m = rows.rowCount;
-  const design = designRows(
-    fit.columns.map((column) => columns[column]!),
-    rows,
-    [],
-    null,
-  );
-  const x = new Float64Array(m * fit.columns.length);
-  design.fill(
-    fit.columns.map((_, j) => j),
-    0,
-    m,
-    m,
-    x,
-    null,
-  );
-  const row = new Float64Array(fit.columns.length);
+  const design = designRows(columns, rows, [], null);
+  const x = new Float64Array(m * columns.length);
+  const all = columns.map((_, j) => j);
+  design.fill(all, 0, m, m, x, null);
+  const row = new Float64Array(columns.length);
   return (i) => {
     for (let j = 0; j < row.length; j++) row[j] = x[j * m + i]! / design.scales[j]!;
     return row;
@@ -165,7 +203,11 @@ export function designAt(chosen: Chosen, rows: PredictionRows): (row: number) =>
 
 /** The weight of each row to be predicted: its own where it gives one, else 1. */
 export function weightsOf(chosen: Chosen, rows: PredictionRows): (row: number) => number {
-  const column = chosen.study.weights === null ? undefined : rows.columns.get(chosen.study.weights);
+  return weightsAt(chosen.study.weights, rows);
+}
+
+function weightsAt(weights: string | null, rows: PredictionRows): (row: number) => number {
+  const column = weights === null ? undefined : rows.columns.get(weights);
   return (row) => (column?.kind === 'number' && column.values[row]! > 0 ? column.values[row]! : 1);
 }
 
@@ -192,14 +234,14 @@ export function endOf(z: number, scale: Scale): number | null {
 }
 
 function unpredictable(
-  chosen: Chosen,
+  predictor: Predictor,
   rows: PredictionRows,
   row: number,
   centre: number,
   leverage: number,
   report: Report,
 ): void {
-  const { variable, scale } = chosen.fit.candidate.response;
+  const { variable, scale } = predictor.response;
   const label = `The row "${rows.labels[row]}" cannot be predicted`;
   const place = rows.placeOf(row);
   const hint = 'Predict nearer to the data.';

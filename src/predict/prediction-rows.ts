@@ -6,44 +6,32 @@ import { isoDays } from '../expression/iso-date.ts';
 import { nearest } from '../expression/nearest.ts';
 import { baseVariables, evaluateDerived } from '../prepare/derive.ts';
 import { isMissing } from '../prepare/is-missing.ts';
-import type { Place, Report } from '../problem.ts';
+import type { Report } from '../problem.ts';
 import type { VariablePlan } from '../study/study.ts';
-import { modelVariables, unknownLevels } from './outside-data.ts';
+import { unknownLevels } from './outside-data.ts';
 import type { PredictionRows } from './predict.ts';
+import { type RowNeeds, rowNeedsOf } from './predictor.ts';
 
 type Given = PredictionRows['given'][number][number];
-
-/** The declared variables that a row must give so that the chosen model can predict it, in order of declaration. */
-export function variablesToGive(chosen: Chosen): VariablePlan[] {
-  const { study } = chosen;
-  const needed = new Set(modelVariables(chosen).flatMap((name) => [...baseVariables(name, study.derive)]));
-  return study.data.variables.filter((plan) => needed.has(plan.name));
-}
 
 /** The rows written under `predict.rows`; those that cannot be predicted are reported as errors and left out. */
 export function statedRows(chosen: Chosen, report: Report): PredictionRows {
   const plans = chosen.study.predict.rows;
-  const wanted = variablesToGive(chosen);
-  const { weights } = chosen.study;
-  const weightPlan = chosen.study.data.variables.find((plan) => plan.name === weights);
+  const needs = rowNeedsOf(chosen);
   const base = new Map<string, Column>();
-  for (const variable of weightPlan === undefined ? wanted : [...wanted, weightPlan]) {
-    base.set(
-      variable.name,
-      columnOf(
-        chosen,
-        variable,
-        plans.map((plan) => plan.values.get(variable.name)),
-      ),
-    );
+  for (const variable of [...needs.inputs, ...needs.extras]) {
+    const values = plans.map((plan) => plan.values.get(variable.name));
+    base.set(variable.name, columnOf(needs, variable, values));
   }
   const rows = {
     rowCount: plans.length,
     labels: plans.map((plan) => plan.label),
     given: plans.map((plan): Given[] => [...plan.values].map(([variable, value]) => ({ variable, value }))),
     columns: base,
+    placeOf: (row: number) => plans[row]!.place,
+    severity: 'error' as const,
   };
-  return usable(chosen, rows, wanted, (row) => plans[row]!.place, 'error', report);
+  return usableRows(needs, rows, report).rows;
 }
 
 /** The rows of `predict.file`; those that cannot be predicted are reported as warnings and left out. */
@@ -51,32 +39,32 @@ export async function fileRows(chosen: Chosen, report: Report): Promise<Predicti
   const { study } = chosen;
   const file = study.predict.file;
   if (file === null) return null;
-  const wanted = variablesToGive(chosen);
+  const needs = rowNeedsOf(chosen);
   const table = await readTable({ ...study.data, file }, study.folder, report, {
-    require: new Set(wanted.map((plan) => plan.name)),
+    require: new Set(needs.inputs.map((plan) => plan.name)),
+    optional: new Set(needs.extras.map((plan) => plan.name)),
   });
   if (table === null) return null;
-  const ids = study.data.rowId === null ? undefined : table.columns.get(study.data.rowId);
-  const labels = Array.from(
-    { length: table.rowCount },
-    (_, i) => labelOf(ids, i) ?? `line ${table.lines[i]}`,
-  );
   const rows = {
-    rowCount: table.rowCount,
-    labels,
-    given: labels.map((_, i) =>
-      wanted.map(({ name }) => ({ variable: name, value: shownValue(table, name, i) })),
+    ...rowsOfTable(table, study.data.rowId),
+    given: Array.from({ length: table.rowCount }, (_, i) =>
+      needs.inputs.map(({ name }) => ({ variable: name, value: shownValue(table, name, i) })),
     ),
-    columns: table.columns,
   };
-  return usable(
-    chosen,
-    rows,
-    wanted,
-    (row) => ({ kind: 'cell', file, row: table.lines[row]! }),
-    'warning',
-    report,
-  );
+  return usableRows(needs, rows, report).rows;
+}
+
+/** The rows of a file as they are to be predicted, named by their identity where they have one, else by line. */
+export function rowsOfTable(table: Table, rowId: string | null): PredictionRows {
+  const ids = rowId === null ? undefined : table.columns.get(rowId);
+  return {
+    rowCount: table.rowCount,
+    labels: Array.from({ length: table.rowCount }, (_, i) => labelOf(ids, i) ?? `line ${table.lines[i]}`),
+    given: [],
+    columns: table.columns,
+    placeOf: (row) => ({ kind: 'cell', file: table.file, row: table.lines[row]! }),
+    severity: 'warning',
+  };
 }
 
 function labelOf(ids: Column | undefined, row: number): string | null {
@@ -95,22 +83,40 @@ function shownValue(table: Table, name: string, row: number): number | string {
   return value;
 }
 
-/** Adds the derived variables, and keeps the rows that have every value and no unknown level. */
-function usable(
-  chosen: Chosen,
+export interface UsableRows {
+  readonly rows: PredictionRows;
+  /** By row kept: the row that it was. */
+  readonly kept: readonly number[];
+}
+
+/**
+ * Adds the derived variables, and keeps the rows that have every value and no unknown level; `leaveOut` is told of each
+ * other row, with the first reason as a clause.
+ */
+export function usableRows(
+  needs: RowNeeds,
   rows: PredictionRows,
-  wanted: readonly VariablePlan[],
-  placeOf: (row: number) => Place,
-  severity: 'error' | 'warning',
   report: Report,
-): PredictionRows {
-  const { study } = chosen;
-  const { columns } = evaluateDerived(derivationsAtHand(chosen), rows.columns, rows.rowCount);
-  const names = [...new Set([...wanted.map((plan) => plan.name), ...modelVariables(chosen)])];
+  leaveOut: (row: number, because: string) => void = () => {},
+): UsableRows {
+  const { placeOf, severity, rowCount } = rows;
+  const derive = derivationsAtHand(needs, rows);
+  const { columns } = evaluateDerived(derive, rows.columns, rowCount);
+  const unknownAt = unknownLevels(needs, columns);
+  const inputs = needs.inputs.map((plan) => plan.name);
+  const names = [...new Set([...inputs, ...needs.model])];
+  const incomplete = missingAnywhere(
+    names.map((name) => columns.get(name)!),
+    rowCount,
+  );
   const kept: number[] = [];
-  for (let row = 0; row < rows.rowCount; row++) {
+  for (let row = 0; row < rowCount; row++) {
+    const unknown = unknownAt(row);
+    if (unknown.length === 0 && incomplete[row] === 0) {
+      kept.push(row);
+      continue;
+    }
     const label = `The row "${rows.labels[row]}"`;
-    const unknown = unknownLevels(chosen, columns, row);
     for (const { variable, level, known } of unknown) {
       const close = nearest(level, known);
       report({
@@ -122,31 +128,48 @@ function usable(
       });
     }
     const missing = names.filter((name) => isMissing(columns.get(name)!, row));
+    const derived = missing[0] !== undefined && !inputs.includes(missing[0]);
+    const lacks = `${missing[0]} is ${derived ? 'undefined there' : 'missing'}`;
     if (missing.length > 0) {
-      const derived = study.derive.some((plan) => plan.name === missing[0]);
       report({
         code: 'prediction_value_missing',
         severity,
         place: placeOf(row),
-        message: `${label} cannot be predicted: ${missing[0]} is ${derived ? 'undefined there' : 'missing'}.`,
+        message: `${label} cannot be predicted: ${lacks}.`,
         ...(derived ? {} : { hint: `Give a value for ${missing.join(', ')}.` }),
       });
     }
-    if (unknown.length === 0 && missing.length === 0) kept.push(row);
+    const [strange] = unknown;
+    leaveOut(row, strange === undefined ? lacks : `no row fitted has ${strange.variable} "${strange.level}"`);
   }
+  const whole = kept.length === rowCount;
   return {
-    rowCount: kept.length,
-    labels: kept.map((row) => rows.labels[row]!),
-    given: kept.map((row) => rows.given[row]!),
-    columns: new Map([...columns].map(([name, column]) => [name, pick(column, kept)])),
+    kept,
+    rows: {
+      rowCount: kept.length,
+      labels: whole ? rows.labels : kept.map((row) => rows.labels[row]!),
+      given: kept.map((row) => rows.given[row] ?? []),
+      columns: whole ? columns : new Map([...columns].map(([name, column]) => [name, pick(column, kept)])),
+      placeOf: (row) => placeOf(kept[row]!),
+      severity,
+    },
   };
 }
 
-/** The derivations whose variables are all given; those that the chosen model rests on are among them. */
-function derivationsAtHand(chosen: Chosen): Chosen['study']['derive'] {
-  const { derive } = chosen.study;
-  const given = new Set(variablesToGive(chosen).map((plan) => plan.name));
-  return derive.filter((plan) => [...baseVariables(plan.name, derive)].every((name) => given.has(name)));
+/** 1 for each row in which one of the columns has no value. */
+function missingAnywhere(columns: readonly Column[], rowCount: number): Uint8Array {
+  const missing = new Uint8Array(rowCount);
+  for (const column of columns) {
+    for (let row = 0; row < rowCount; row++) if (isMissing(column, row)) missing[row] = 1;
+  }
+  return missing;
+}
+
+/** The derivations whose variables the rows have; those that the model rests on are among them. */
+function derivationsAtHand(needs: RowNeeds, rows: PredictionRows): RowNeeds['derive'] {
+  return needs.derive.filter((plan) =>
+    [...baseVariables(plan.name, needs.derive)].every((name) => rows.columns.has(name)),
+  );
 }
 
 function pick(column: Column, rows: readonly number[]): Column {
@@ -158,21 +181,19 @@ function pick(column: Column, rows: readonly number[]): Column {
 
 /** A column of stated values, typed as the variable is. What is absent or cannot be read is missing. */
 function columnOf(
-  chosen: Chosen,
+  needs: RowNeeds,
   plan: VariablePlan,
   values: readonly (number | string | boolean | undefined)[],
 ): Column {
-  const like = chosen.sample.columns.get(plan.name);
   switch (plan.type) {
     case 'category': {
       const texts = values.map((value) => (value === undefined ? null : String(value)));
       const levels = [...new Set(texts.filter((text) => text !== null))];
-      const baseline = like?.kind === 'category' ? like.baseline : (levels[0] ?? '');
       return {
         kind: 'category',
         name: plan.name,
         levels,
-        baseline,
+        baseline: levels[0] ?? '',
         codes: Int32Array.from(texts, (text) => (text === null ? -1 : levels.indexOf(text))),
       };
     }
@@ -192,8 +213,7 @@ function columnOf(
         ),
       };
     case 'flag': {
-      const texts =
-        like !== undefined && like.kind === 'flag' ? like.flagTexts : (plan.flagValues ?? undefined);
+      const texts = needs.flagTexts.get(plan.name) ?? plan.flagValues ?? undefined;
       return {
         kind: 'flag',
         name: plan.name,

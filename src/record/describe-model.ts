@@ -8,6 +8,7 @@ import type { DesignRows } from '../model/design-rows.ts';
 import { scaleName } from '../model/response-scale.ts';
 import { termVariables } from '../prepare/needed-variables.ts';
 import { generalisedVif, jointF } from '../select/terms.ts';
+import { describePrediction } from './describe-prediction.ts';
 import type { RecordModel, RecordTerm } from './record.ts';
 
 /** The chosen model, complete enough to predict from without the data. */
@@ -63,6 +64,7 @@ export function describeModel(
     },
     smearing: smearing === null ? null : Array.from(smearing),
     largest_leverage: chosen.leverages.reduce((most, h) => Math.max(most, h), 0),
+    prediction: describePrediction(chosen, smearing),
     terms: fit.candidate.terms.map((term): RecordTerm => {
       const vif = generalisedVif(fit, term);
       const { slopes, omitted } = slopesOf(chosen, term, reference);

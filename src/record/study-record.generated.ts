@@ -1509,6 +1509,128 @@ export interface RecordModel {
    */
   largest_leverage: number;
   /**
+   * What further rows need to be predicted from the record alone. Absent from records of versions before it.
+   */
+  prediction?: {
+    /**
+     * R⁻¹, p × p and upper triangular, row by row: the leverage of a row x is the squared length of x′R⁻¹.
+     */
+    root: number[][];
+    /**
+     * s²; null where the fit is exact.
+     */
+    error_variance: number | null;
+    /**
+     * C, p × p, row by row, where the covariance of the estimates is s²CC′ and is not the classical one; null where it is, C then being `root`.
+     */
+    covariance_root: number[][] | null;
+    /**
+     * Degrees of freedom of t.
+     */
+    df: number;
+    /**
+     * The variable of weights; null where rows count alike.
+     */
+    weights: string | null;
+    /**
+     * Header of the column that names a row; null where the study declares none.
+     */
+    row_id: string | null;
+    /**
+     * The mark between whole and decimal digits.
+     */
+    decimal_mark: '.' | ',';
+    /**
+     * Cells that mean a missing value in every column.
+     */
+    missing: string[];
+    /**
+     * Declared variables that a row gives, in order of declaration, with their contract.
+     *
+     * Items: One variable.
+     */
+    variables: {
+      /**
+       * Its name.
+       */
+      name: string;
+      /**
+       * Its type.
+       */
+      type: 'number' | 'integer' | 'category' | 'flag' | 'date' | 'text' | 'identifier';
+      /**
+       * Header of its column.
+       */
+      column: string;
+      /**
+       * Whether a row must give it; otherwise only the weights rest on it.
+       */
+      needed: boolean;
+      /**
+       * Smallest value allowed.
+       */
+      at_least: number | null;
+      /**
+       * Largest value allowed.
+       */
+      at_most: number | null;
+      /**
+       * Levels that a row may have: those of the rows fitted, for a category of the model; those declared, for one that is only derived from; null for all others.
+       */
+      levels: string[] | null;
+      /**
+       * The two texts of a flag, the one coded 0 first, where the study declares them.
+       */
+      values: string[] | null;
+      /**
+       * How a date is written; null for ISO 8601.
+       */
+      pattern: string | null;
+      /**
+       * Cells that mean a missing value in its column, besides those of every column.
+       */
+      missing: string[];
+    }[];
+    /**
+     * Derived variables that the model rests on, in order.
+     *
+     * Items: One derived variable.
+     */
+    derived: {
+      /**
+       * Its name.
+       */
+      name: string;
+      /**
+       * The expression that gives it.
+       */
+      expression: string;
+      /**
+       * What it gives.
+       */
+      type: 'number' | 'flag' | 'date';
+    }[];
+    /**
+     * Range of each variable of numbers over the rows fitted.
+     *
+     * Items: One range.
+     */
+    ranges: {
+      /**
+       * The variable's name.
+       */
+      variable: string;
+      /**
+       * Its smallest value.
+       */
+      smallest: number;
+      /**
+       * Its largest value.
+       */
+      largest: number;
+    }[];
+  };
+  /**
    * What each term says, in the order declared.
    */
   terms: RecordTerm[];

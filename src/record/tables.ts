@@ -193,7 +193,7 @@ function csv(header: readonly string[], rows: readonly (readonly Cell[])[]): str
 }
 
 /** One text as a CSV cell (RFC 4180), as papaparse writes it. */
-function cell(text: string): string {
+export function cell(text: string): string {
   const safe = FORMULA.test(text) ? `'${text}` : text;
   return /[",\n\r]|^\s|\s$|^\ufeff/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
 }

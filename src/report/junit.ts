@@ -105,7 +105,6 @@ function caseLines({ name, outcome, type, message }: TestCase, study: string): s
 }
 
 /** Characters that XML 1.0 (2.2) has no place for, not even as references. */
-// biome-ignore lint/suspicious/noControlCharactersInRegex: these are what is looked for.
 const NOT_XML = /[^\t\n\r\u0020-\ud7ff\ue000-\ufffd\u{10000}-\u{10ffff}]/gu;
 
 function escaped(text: string): string {

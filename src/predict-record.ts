@@ -1,0 +1,264 @@
+import { formatDate } from './data/format-date.ts';
+import { readTable } from './data/read-table.ts';
+import type { Column, Table } from './data/table.ts';
+import { nearest } from './expression/nearest.ts';
+import { type Prediction, type PredictionTotal, predictRows } from './predict/predict.ts';
+import { rowsOfTable, usableRows } from './predict/prediction-rows.ts';
+import type { Problem, Report } from './problem.ts';
+import { readRecord } from './record/read-record.ts';
+import type { StudyRecord } from './record/record.ts';
+import { type RecordedPredictor, recordedPredictor } from './record/recorded-predictor.ts';
+import type { DataPlan, VariablePlan } from './study/study.ts';
+
+export interface PredictRecordOptions {
+  /** Confidence of the intervals, between 0 and 1; left out: the study's own. */
+  readonly interval?: number;
+  /** A variable of the model, or the header of a column of the rows, by which totals are given. */
+  readonly totalBy?: string;
+  /** Bytes of the rows instead of those of a file. */
+  readonly bytes?: AsyncIterable<Uint8Array>;
+  readonly onProgress?: (stage: string, done: number, total: number | null) => void;
+}
+
+/** A prediction as the record has them, without the values that it was made at: those stand in the file. */
+export type PredictedFigures = Omit<Prediction, 'values'>;
+
+/** One row of the file: its prediction, or why there is none. */
+export interface RowOutcome {
+  readonly label: string;
+  /** Line in the file as a person counts it. */
+  readonly line: number;
+  readonly prediction: PredictedFigures | null;
+  /** A clause such as "cargo is missing"; null where there is a prediction. */
+  readonly because: string | null;
+}
+
+export interface GroupTotal extends PredictionTotal {
+  /** The value of the grouping variable; null for the total of all rows. */
+  readonly group: string | null;
+}
+
+export interface RecordPredictions {
+  /** Null where nothing could be predicted; the problems say why. */
+  readonly record: StudyRecord | null;
+  readonly interval: number;
+  /** Every row of the file in order. */
+  readonly rows: readonly RowOutcome[];
+  /** Of all rows predicted, then of each group in the order of its first row; empty where the scale is not natural. */
+  readonly totals: readonly GroupTotal[];
+  readonly problems: readonly Problem[];
+}
+
+/** Rows that cannot be predicted are named one by one up to this many. */
+const MOST_NAMED = 20;
+
+/**
+ * Predictions at the rows of a file from a record alone: record ─ predictor ─ rows ─ predictions. Rows are read
+ * under the contract of the study; one with a value missing or not allowed, or a level that no row fitted has, is
+ * listed, and the rest predicted.
+ */
+export async function predictFromRecord(
+  recordPath: string,
+  rowsPath: string,
+  options: PredictRecordOptions = {},
+): Promise<RecordPredictions> {
+  const problems: Problem[] = [];
+  const report: Report = (problem) => problems.push(problem);
+  const failed = (): RecordPredictions => ({ record: null, interval: 0, rows: [], totals: [], problems });
+
+  const record = await readRecord(recordPath, report);
+  if (record === null) return failed();
+  const recorded = predictorIn(record, recordPath, report);
+  if (recorded === null) return failed();
+  const table = await readRows(recorded, rowsPath, options, report);
+  if (table === null) return failed();
+
+  const { predictor } = recorded;
+  const listing = limited(report, table.file);
+  const because = new Array<string | null>(table.rowCount).fill(null);
+  const all = rowsOfTable(table, recorded.rowId === null ? null : ROW_ID);
+  const { rows, kept } = usableRows(predictor, all, listing.report, (row, clause) => {
+    because[row] = clause;
+  });
+  const group =
+    options.totalBy === undefined ? null : groupsOf(table.columns.get(groupName(recorded, options.totalBy))!);
+  const interval = options.interval ?? record.study.prediction_interval;
+  const { predictions, sourceRows, totals } = predictRows(
+    predictor,
+    [rows],
+    {
+      interval,
+      ...(group === null
+        ? {}
+        : { groups: { count: group.names.length, of: [Int32Array.from(kept, (row) => group.codes[row]!)] } }),
+    },
+    listing.report,
+  );
+  listing.close();
+  if (predictions.length === 0) {
+    const message = 'None of the rows can be predicted.';
+    report({
+      code: 'predictions_none',
+      severity: 'error',
+      place: { kind: 'file', file: table.file },
+      message,
+    });
+    return failed();
+  }
+  const found = new Array<RowOutcome['prediction']>(table.rowCount).fill(null);
+  predictions.forEach((prediction, k) => {
+    found[kept[sourceRows[k]!]!] = prediction;
+  });
+  return {
+    record,
+    interval,
+    rows: found.map((prediction, row) => ({
+      label: all.labels[row]!,
+      line: table.lines[row]!,
+      prediction,
+      because: prediction === null ? (because[row] ?? 'the model has no answer there') : null,
+    })),
+    totals: totals.flatMap((total, k) =>
+      total === null ? [] : [{ group: k === 0 ? null : group!.names[k - 1]!, ...total }],
+    ),
+    problems,
+  };
+}
+
+function predictorIn(record: StudyRecord, path: string, report: Report): RecordedPredictor | null {
+  const refuse = (message: string, hint?: string) => {
+    report({
+      code: 'record_cannot_predict',
+      severity: 'error',
+      place: { kind: 'file', file: path },
+      message,
+      ...(hint === undefined ? {} : { hint }),
+    });
+    return null;
+  };
+  if (record.model === null)
+    return refuse('No candidate was admitted, so the record holds no model to predict with.');
+  if (record.model.prediction === undefined) {
+    return refuse(
+      `The record was made by version ${record.tool.version}, which kept too little to predict from it alone.`,
+      'Fit the study again.',
+    );
+  }
+  const recorded = recordedPredictor(record.model, record.model.prediction);
+  return typeof recorded === 'string' ? refuse(`The record does not hang together: ${recorded}.`) : recorded;
+}
+
+/** Names under which columns are read that are not among the model's variables; no variable can have such a name. */
+const ROW_ID = ' row identity';
+const GROUP = ' group';
+
+function groupName({ predictor }: RecordedPredictor, totalBy: string): string {
+  return predictor.inputs.some(({ name }) => name === totalBy) ? totalBy : GROUP;
+}
+
+async function readRows(
+  recorded: RecordedPredictor,
+  file: string,
+  { totalBy, bytes, onProgress }: PredictRecordOptions,
+  report: Report,
+): Promise<Table | null> {
+  const { inputs, extras } = recorded.predictor;
+  const byColumn = totalBy !== undefined && groupName(recorded, totalBy) === GROUP;
+  const variables = [
+    ...inputs,
+    ...extras,
+    ...(recorded.rowId === null ? [] : [plainVariable(ROW_ID, 'text', recorded.rowId)]),
+    ...(byColumn ? [plainVariable(GROUP, 'category', totalBy)] : []),
+  ];
+  const plan: DataPlan = {
+    file,
+    format: recorded.format,
+    missing: recorded.missing,
+    rowId: recorded.rowId === null ? null : ROW_ID,
+    time: null,
+    variables,
+    onBadValue: 'set_missing',
+  };
+  const table = await readTable(plan, '.', report, {
+    require: new Set(inputs.map(({ name }) => name)),
+    optional: new Set([...extras.map(({ name }) => name), GROUP]),
+    ...(bytes === undefined ? {} : { bytes }),
+    onProgress: (rows) => onProgress?.('reading rows', rows, null),
+  });
+  if (table === null) return null;
+  const header = [...table.ignored, ...variables.map(({ column }) => column)].filter(
+    (name) => name !== totalBy,
+  );
+  if (byColumn && !table.columns.has(GROUP)) {
+    const near = nearest(totalBy, header);
+    report({
+      code: 'command_unusable',
+      severity: 'error',
+      place: { kind: 'command' },
+      message: `--total-by names "${totalBy}", which is neither a variable of the model nor a column of ${file}.`,
+      ...(near === null ? {} : { hint: `Did you mean ${near}?` }),
+    });
+    return null;
+  }
+  return table;
+}
+
+function plainVariable(name: string, type: VariablePlan['type'], column: string): VariablePlan {
+  return {
+    name,
+    type,
+    column,
+    unit: null,
+    label: null,
+    atLeast: null,
+    atMost: null,
+    levels: null,
+    baseline: null,
+    flagValues: null,
+    pattern: null,
+    missing: [],
+  };
+}
+
+/** The groups of a column's values in the order of their first rows; missing values are a group of their own. */
+function groupsOf(column: Column): { readonly names: readonly string[]; readonly codes: Int32Array } {
+  const codeOf = new Map<string, number>();
+  const count = column.kind === 'category' ? column.codes.length : column.values.length;
+  const codes = new Int32Array(count);
+  for (let row = 0; row < count; row++) {
+    const text = textAt(column, row);
+    let code = codeOf.get(text);
+    if (code === undefined) {
+      code = codeOf.size;
+      codeOf.set(text, code);
+    }
+    codes[row] = code;
+  }
+  return { names: [...codeOf.keys()], codes };
+}
+
+function textAt(column: Column, row: number): string {
+  if (column.kind === 'category') return column.levels[column.codes[row]!] ?? '';
+  if (column.kind === 'text') return column.values[row] ?? '';
+  const value = column.values[row]!;
+  if (Number.isNaN(value)) return '';
+  if (column.kind === 'date') return formatDate(value);
+  return column.kind === 'flag' ? (column.flagTexts?.[value as 0 | 1] ?? String(value)) : String(value);
+}
+
+/** Passes on the first problems of rows and counts the rest. */
+function limited(report: Report, file: string): { readonly report: Report; readonly close: () => void } {
+  let count = 0;
+  return {
+    report: (problem) => {
+      count++;
+      if (count <= MOST_NAMED) report(problem);
+    },
+    close: () => {
+      const more = count - MOST_NAMED;
+      if (more <= 0) return;
+      const message = `${more} more reasons why rows cannot be predicted are not listed; the output has one for each row.`;
+      report({ code: 'problems_more', severity: 'warning', place: { kind: 'file', file }, message });
+    },
+  };
+}
