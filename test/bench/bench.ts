@@ -1,10 +1,15 @@
-/** Timings, printed and held to nothing: npm run bench [factor] [run] */
+/** Timings, printed and held to nothing: npm run bench [factor] [validation] [run] */
 const wanted = process.argv.slice(2);
 const asked = (name: string) => wanted.length === 0 || wanted.includes(name);
 
 if (asked('factor')) {
   const { benchFactor } = await import('./factor.ts');
   benchFactor();
+}
+if (asked('validation')) {
+  const { benchBootstrap, benchValidation } = await import('./validation.ts');
+  benchValidation();
+  benchBootstrap();
 }
 if (asked('run')) {
   const { benchWholeRun } = await import('./whole-run.ts');

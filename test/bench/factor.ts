@@ -16,7 +16,11 @@ const PREDICTORS = 19;
 function modelOf(rows: number, predictors: number, candidates: number[][]) {
   const data: Record<string, number[]> = { y: invented(rows, 1) };
   for (let j = 0; j < predictors; j++) data[`x${j}`] = invented(rows, j + 2);
-  return testModel(data, Array.from({ length: predictors }, (_, j) => variable(`x${j}`)), candidates);
+  return testModel(
+    data,
+    Array.from({ length: predictors }, (_, j) => variable(`x${j}`)),
+    candidates,
+  );
 }
 
 function python(script: string): string | null {
@@ -34,7 +38,11 @@ function python(script: string): string | null {
 export function benchFactor(): void {
   const all = [[0, ...Array.from({ length: PREDICTORS }, (_, j) => j + 1)]];
   const { rows, design, facts } = modelOf(ROWS, PREDICTORS, all);
-  const factor = time('factor of 1,000,000 × 21 in one pass (20 columns and the response)', () => factorRows(rows), 3);
+  const factor = time(
+    'factor of 1,000,000 × 21 in one pass (20 columns and the response)',
+    () => factorRows(rows),
+    3,
+  );
 
   const numpy = python(`
 import time, numpy as np
@@ -66,14 +74,22 @@ export function benchCandidates(): void {
   ]);
   const { rows, design, facts } = modelOf(100_000, predictors, candidates);
   const pass = time('one pass over 100,000 × 20', () => factorRows(rows), 3);
-  const fits = time('1,000 candidates from that factor', () => design.candidates.map((one) => fitCandidate(pass.value, one, facts)), 3);
+  const fits = time(
+    '1,000 candidates from that factor',
+    () => design.candidates.map((one) => fitCandidate(pass.value, one, facts)),
+    3,
+  );
   ratio('pass and 1,000 candidates / one pass', pass.seconds + fits.seconds, pass.seconds);
-  const each = time('10 of them, each from the rows', () => {
-    for (const one of design.candidates.slice(0, 10)) {
-      const own = modelRows(rows, one.columns);
-      factorRows(own);
-    }
-  }, 1);
+  const each = time(
+    '10 of them, each from the rows',
+    () => {
+      for (const one of design.candidates.slice(0, 10)) {
+        const own = modelRows(rows, one.columns);
+        factorRows(own);
+      }
+    },
+    1,
+  );
   ratio('pass and 1,000 candidates / each from the rows', pass.seconds + fits.seconds, each.seconds * 100);
 }
 
@@ -85,6 +101,14 @@ function modelRows(rows: ReturnType<typeof modelOf>['rows'], columns: readonly n
     width: map.length,
     predictorCount: columns.length,
     scales: Float64Array.from(map, (j) => rows.scales[j]!),
-    fill: (wanted, from, to, stride, hi, lo) => rows.fill(wanted.map((j) => map[j]!), from, to, stride, hi, lo),
+    fill: (wanted, from, to, stride, hi, lo) =>
+      rows.fill(
+        wanted.map((j) => map[j]!),
+        from,
+        to,
+        stride,
+        hi,
+        lo,
+      ),
   };
 }
