@@ -1,3 +1,5 @@
+import { createRequire } from 'node:module';
+import type { JStat } from 'jstat';
 import { normalUpper, tTwoSided } from './distributions.ts';
 
 /** The studentised range of some independent means. */
@@ -20,7 +22,7 @@ export interface StudentisedRange {
 export function studentisedRange(k: number, df: number): StudentisedRange {
   const upper = k === 2 ? (q: number) => tTwoSided(q / Math.SQRT2, df) : tailOf(k, df);
   const safely = (q: number) => (Number.isNaN(q) ? Number.NaN : q <= 0 ? 1 : upper(q));
-  return { upper: safely, quantile: (p) => quantileOf(safely, p) };
+  return { upper: safely, quantile: (p) => quantileOf(safely, p, k, df) };
 }
 
 function tailOf(k: number, df: number): (q: number) => number {
@@ -87,18 +89,38 @@ function rangeTail(k: number): (r: number) => number {
   };
 }
 
+const require = createRequire(import.meta.url);
+
+/**
+ * Where jstat sees the quantile: good to three digits or more, so a bracket about it is soon narrow; loaded only where
+ * a quantile is asked for. Where it finds none the search starts from scratch.
+ */
+function firstGuess(p: number, k: number, df: number): number {
+  const { jStat } = require('jstat') as { jStat: JStat };
+  try {
+    const guess = jStat.tukey.inv(1 - p, k, df);
+    return guess > 0 && Number.isFinite(guess) ? guess : 2;
+  } catch {
+    // It gives up at few degrees of freedom and in far tails.
+    return 2;
+  }
+}
+
 /** By regula falsi on the logarithm of the tail, in Illinois form, within a bracket that it never leaves. */
-function quantileOf(upper: (q: number) => number, p: number): number {
+function quantileOf(upper: (q: number) => number, p: number, k: number, df: number): number {
   if (!(p > 0) || !(p < 1)) return Number.NaN;
   const miss = (q: number) => Math.log(upper(q) / p);
-  let low = 0;
-  let high = 4;
-  let missLow = -Math.log(p);
+  const guess = firstGuess(p, k, df);
+  let low = guess * 0.999;
+  let missLow = miss(low);
+  for (let reach = 0.9; missLow < 0 && low > 1e-300; reach *= reach) {
+    low *= reach;
+    missLow = miss(low);
+  }
+  let high = guess * 1.001;
   let missHigh = miss(high);
-  while (missHigh > 0 && high < 1e12) {
-    low = high;
-    missLow = missHigh;
-    high *= 2;
+  for (let reach = 1.1; missHigh > 0 && high < 1e12; reach *= reach) {
+    high *= reach;
     missHigh = miss(high);
   }
   for (let step = 0; step < 100; step++) {
