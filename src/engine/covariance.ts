@@ -103,7 +103,10 @@ export function automaticLags(n: number): number {
 const NOTHING = 1e-9;
 
 /** √(c′Vc), for c of length p; 0 where it is nothing beside the classical one. */
-export function errorOf(covariance: Covariance, c: ArrayLike<number>): number {
+export function errorOf(
+  covariance: Pick<Covariance, 'root' | 'classicalRoot' | 'variance'>,
+  c: ArrayLike<number>,
+): number {
   const { root, classicalRoot, variance } = covariance;
   const length = projectedLength(root, c);
   const nothing = root !== classicalRoot && length <= NOTHING * projectedLength(classicalRoot, c);

@@ -37,7 +37,7 @@ export interface Predictor extends RowNeeds {
   /** s; null where the fit is exact. */
   readonly s: number | null;
   /** The declared covariance of the estimates; null as for s. */
-  readonly covariance: Pick<Covariance, 'root' | 'variance'> | null;
+  readonly covariance: Pick<Covariance, 'root' | 'classicalRoot' | 'variance'> | null;
   /** Of t. */
   readonly degreesOfFreedom: number;
   /** Among the rows fitted. */

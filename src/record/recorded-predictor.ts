@@ -68,7 +68,8 @@ export function recordedPredictor(model: RecordModel, recorded: Recorded): Recor
       estimates: Float64Array.from(model.columns, ({ estimate }) => estimate),
       rootInverse: root,
       s,
-      covariance: s === null || variance === null ? null : { root: covarianceRoot, variance },
+      covariance:
+        s === null || variance === null ? null : { root: covarianceRoot, classicalRoot: root, variance },
       degreesOfFreedom: recorded.df,
       largestLeverage: model.largest_leverage,
       smearing: model.smearing === null ? null : Float64Array.from(model.smearing),
