@@ -8,6 +8,7 @@ import type { Chosen } from '../examine/chosen.ts';
 import { examine } from '../examine/examine.ts';
 import { findDependencies } from '../examine/find-dependencies.ts';
 import { standardErrorsOf } from '../examine/infer.ts';
+import { normalQuantiles } from '../examine/normal-quantiles.ts';
 import { withoutRows } from '../examine/without-row.ts';
 import type { Design } from '../model/design.ts';
 import { type DesignRows, numbersOf } from '../model/design-rows.ts';
@@ -168,6 +169,7 @@ function examinationOf(chosen: Chosen, run: Run): RecordExamination {
     before_you_rely: beforeYouRely(findings, run.predicted?.predictions ?? []),
     collinearity: findDependencies(chosen, run.fitted),
     bootstrap: describeBootstrap(chosen, run.bootstrapped),
+    normal_quantiles: normalQuantiles(chosen),
     ...rowSummaries(chosen, without),
   };
 }

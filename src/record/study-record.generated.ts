@@ -2039,6 +2039,31 @@ export interface RecordExamination {
    */
   bootstrap?: RecordBootstrap | null;
   /**
+   * The standardised residuals in order against those of normal errors: all ranks where there are few, else both ends and some between. Lists of equal length, ascending; null where the model leaves nothing to examine. Absent from records of versions before it.
+   */
+  normal_quantiles?: {
+    /**
+     * Normal quantile of each rank (Blom 1958).
+     */
+    expected: number[];
+    /**
+     * The standardised residual of each rank.
+     */
+    residual: number[];
+    /**
+     * Lower end of where 95 % of the residuals of that rank lie under normal errors (Atkinson 1985); null where not simulated.
+     */
+    lower: number[] | null;
+    /**
+     * Upper end of it.
+     */
+    upper: number[] | null;
+    /**
+     * How often errors were drawn; 0 where there are too many rows for it.
+     */
+    simulations: number;
+  } | null;
+  /**
    * Why the choice was not made again without each influential row, as a sentence; null where it was. Absent from records of versions before it.
    */
   choice_omitted?: string | null;

@@ -1,0 +1,115 @@
+import type { Fit } from '../engine/fit.ts';
+import { FULL_LEVERAGE } from '../engine/row-figures.ts';
+import { normalQuantile } from '../stats/distributions.ts';
+import { type Random, randomFrom } from '../stats/random.ts';
+import { type Chosen, standardisedResidual } from './chosen.ts';
+import { orthonormalRows } from './orthonormal-design.ts';
+
+/** Ordered residuals against what normal errors would give. Lists of equal length, ascending. */
+export interface NormalQuantiles {
+  /** Normal quantile at (i − 3/8)/(n + 1/4) (Blom 1958). */
+  readonly expected: number[];
+  /** The standardised residual of that rank. */
+  readonly residual: number[];
+  /** Between which 95 % of the residuals of that rank lie where the errors are normal; null where not simulated. */
+  readonly lower: number[] | null;
+  readonly upper: number[] | null;
+  /** How often errors were drawn; 0 where they were not. */
+  readonly simulations: number;
+}
+
+/** 5 of 200 places lie outside at each end. */
+const SIMULATIONS = 199;
+const OUTSIDE = 5;
+/** Beyond this many rows the envelope is narrower than a dot, and simulating takes long. */
+const MOST_SIMULATED = 2000;
+/** Ranks kept: all up to this many, else both ends whole and the middle thinned. */
+const MOST_RANKS = 240;
+const END = 40;
+const SEED = 1;
+
+/**
+ * The standardised residuals in order with a simulated envelope: normal errors are drawn, the chosen model is fitted to them,
+ * and the residuals of each rank are kept (Atkinson 1985, section 4.2; here with 199 drawings and pointwise 95 %). Null where
+ * the model leaves nothing to examine. The rows of leverage 1 have no standardised residual and are left out.
+ */
+export function normalQuantiles(chosen: Chosen): NormalQuantiles | null {
+  const { residuals, fit } = chosen;
+  if (chosen.s === null) return null;
+  const ordered = Float64Array.from(
+    Array.from(residuals, (_, i) => standardisedResidual(chosen, i)).filter((z) => z !== null),
+  ).sort();
+  const m = ordered.length;
+  if (m < 3) return null;
+  const ranks = keptRanks(m);
+  const simulated =
+    residuals.length > MOST_SIMULATED ? null : envelope(orthonormalRows(chosen), fit, ranks, m);
+  return {
+    expected: ranks.map((i) => normalQuantile((i + 1 - 0.375) / (m + 0.25))),
+    residual: ranks.map((i) => ordered[i]!),
+    lower: simulated?.lower ?? null,
+    upper: simulated?.upper ?? null,
+    simulations: simulated === null ? 0 : SIMULATIONS,
+  };
+}
+
+function keptRanks(m: number): number[] {
+  if (m <= MOST_RANKS) return Array.from({ length: m }, (_, i) => i);
+  const middle = MOST_RANKS - 2 * END;
+  const between = Array.from(
+    { length: middle },
+    (_, k) => END + Math.floor(((k + 0.5) * (m - 2 * END)) / middle),
+  );
+  return [
+    ...Array.from({ length: END }, (_, i) => i),
+    ...new Set(between),
+    ...Array.from({ length: END }, (_, i) => m - END + i),
+  ];
+}
+
+/** @param q orthonormal columns of the design, n × p column-major; its rows may be in another order than those of `chosen` */
+function envelope(
+  q: Float64Array,
+  fit: Fit,
+  ranks: readonly number[],
+  m: number,
+): { lower: number[]; upper: number[] } {
+  const p = fit.columns.length;
+  const n = q.length / p;
+  // Leverages are taken from Q again, since its rows are in time order and those of `chosen` are not.
+  const spread = new Float64Array(n);
+  for (let i = 0; i < n; i++) {
+    let h = 0;
+    for (let j = 0; j < p; j++) h += q[j * n + i]! ** 2;
+    spread[i] = h > FULL_LEVERAGE ? 0 : Math.sqrt(1 - h);
+  }
+  const random = randomFrom(SEED);
+  const drawn = ranks.map(() => new Float64Array(SIMULATIONS));
+  const e = new Float64Array(n);
+  const z = new Float64Array(m);
+  for (let simulation = 0; simulation < SIMULATIONS; simulation++) {
+    for (let i = 0; i < n; i++) e[i] = normal(random);
+    for (let j = 0; j < p; j++) {
+      let dot = 0;
+      for (let i = j * n; i < (j + 1) * n; i++) dot += q[i]! * e[i - j * n]!;
+      for (let i = 0; i < n; i++) e[i]! -= dot * q[j * n + i]!;
+    }
+    let squares = 0;
+    for (const value of e) squares += value * value;
+    const s = Math.sqrt(squares / fit.degreesOfFreedom);
+    let k = 0;
+    for (let i = 0; i < n && k < m; i++) if (spread[i]! > 0) z[k++] = e[i]! / (s * spread[i]!);
+    z.sort();
+    for (const [r, rank] of ranks.entries()) drawn[r]![simulation] = z[rank]!;
+  }
+  for (const values of drawn) values.sort();
+  return {
+    lower: drawn.map((values) => values[OUTSIDE - 1]!),
+    upper: drawn.map((values) => values[SIMULATIONS - OUTSIDE]!),
+  };
+}
+
+/** A standard normal number by inversion: 0 cannot come out of it. */
+function normal(random: Random): number {
+  return normalQuantile(Math.max(random.next(), 2 ** -54));
+}
