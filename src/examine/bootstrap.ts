@@ -195,10 +195,12 @@ export function ends(sorted: Float64Array, confidence: number): [number, number]
 
 /** The order statistic (B + 1)q, linear between two of them (Davison & Hinkley 1997, 2.4). */
 function quantile(sorted: Float64Array, q: number): number {
-  const place = Math.min(sorted.length, Math.max(1, (sorted.length + 1) * q));
-  // Places are whole for the usual numbers of repetitions, but for rounding.
-  const whole = Math.min(sorted.length, Math.floor(place + 1e-9));
-  const share = Math.max(0, place - whole);
+  const exact = (sorted.length + 1) * q;
+  // Whole for the usual numbers of repetitions, but for rounding.
+  const near = Math.abs(exact - Math.round(exact)) < 1e-9 ? Math.round(exact) : exact;
+  const place = Math.min(sorted.length, Math.max(1, near));
+  const whole = Math.floor(place);
+  const share = place - whole;
   const below = sorted[whole - 1]!;
   return whole >= sorted.length ? below : below + share * (sorted[whole]! - below);
 }

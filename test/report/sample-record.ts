@@ -2,7 +2,9 @@
  * A realistic, invented record for the report's tests, computed so that its numbers agree with one
  * another, and variants of it. Nothing in it was measured anywhere.
  */
+
 import cephes from 'cephes';
+import { beforeYouRely } from '../../src/examine/before-you-rely.ts';
 import type {
   RecordCandidate,
   RecordCoefficient,
@@ -151,7 +153,10 @@ export function sampleRecord(wish: Wish = {}): StudyRecord {
         : 'No candidate passes every admission rule.',
     },
     model: chosen ? modelOf(chosen, data, scale) : null,
-    examination: examined,
+    examination: examined && {
+      ...examined,
+      before_you_rely: beforeYouRely(examined.findings, predictions),
+    },
     predictions,
     prediction_total: predictions.length > 1 ? total(chosen!, data, scale, s2) : null,
     acceptance: chosen

@@ -416,7 +416,7 @@ describe('the first screen', () => {
       acceptance: [],
       warnings: [],
       predictions: [],
-      examination: { ...record.examination!, findings: [] },
+      examination: { ...record.examination!, findings: [], before_you_rely: [] },
     };
     expect(bewareLines(calm, lexicon)).toHaveLength(3);
     const loud: StudyRecord = {
@@ -426,6 +426,32 @@ describe('the first screen', () => {
     const lines = bewareLines(loud, lexicon);
     expect(lines).toHaveLength(5);
     expect(lines[4]).toMatch(/\d+ more/);
+  });
+  it('shows what the examination lists in its order: what weighs most before the warnings, the rest after', () => {
+    const { before_you_rely: list, ...examination } = record.examination!;
+    const one = { about: 'shape', finding: 'shape', concern: 2 } as const;
+    const told: StudyRecord = {
+      ...record,
+      acceptance: [],
+      warnings: [{ about: 'x', text: 'A warning.' }],
+      examination: {
+        ...examination,
+        before_you_rely: [
+          { ...one, text: 'Grave.', weight: 0.9 },
+          { ...one, text: 'Slight.', weight: 0.3 },
+        ],
+      },
+    };
+    expect(list!.length).toBeGreaterThan(0);
+    expect(bewareLines(told, lexicon).slice(0, 3)).toEqual(['Grave.', 'A warning.', 'Slight.']);
+    // A record of a version before the list: the findings, by concern.
+    const old: StudyRecord = { ...told, examination };
+    const lines = bewareLines(old, lexicon);
+    const care = examination.findings.filter(({ concern }) => concern === 2);
+    expect(lines.indexOf('A warning.')).toBe(care.length);
+    expect(lines.at(care.length + 1)).toContain(
+      examination.findings.find(({ concern }) => concern === 1)!.verdict,
+    );
   });
   it('tells how closely the model follows, with weights by the mean weight', () => {
     const candidate = record.candidates.find((c) => c.name === record.model!.candidate)!;
