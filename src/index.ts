@@ -3,8 +3,17 @@
  * with a study or its data comes back as problems with a place; only a fault of the program throws.
  */
 export type { Column, Table } from './data/table.ts';
+export {
+  type GroupTotal,
+  type PredictedFigures,
+  type PredictRecordOptions,
+  predictFromRecord,
+  type RecordPredictions,
+  type RowOutcome,
+} from './predict-record.ts';
 export type { Sample } from './prepare/sample.ts';
 export type { Place, Problem, ProblemCode, Report, Severity } from './problem.ts';
+export type { Difference } from './record/differences.ts';
 export type {
   RecordCandidate,
   RecordCoefficient,
@@ -20,3 +29,4 @@ export type { ResidualColumns } from './record/tables.ts';
 export { type Rendered, type RenderOptions, type ReportFormat, render } from './report/render.ts';
 export { type CheckedStudy, checkStudy, type RunOptions, type RunResult, runStudy } from './run.ts';
 export type { Study } from './study/study.ts';
+export { type Verified, type VerifyOptions, verifyRecord } from './verify.ts';

@@ -3,12 +3,16 @@ import { expect, test } from 'vitest';
 import * as plumbrule from '../src/index.ts';
 
 /** What others may rely on. A change here is a change of version. */
-const FUNCTIONS = ['checkStudy', 'render', 'runStudy'];
+const FUNCTIONS = ['checkStudy', 'predictFromRecord', 'render', 'runStudy', 'verifyRecord'];
 
 const TYPES = [
   'CheckedStudy',
   'Column',
+  'Difference',
+  'GroupTotal',
   'Place',
+  'PredictRecordOptions',
+  'PredictedFigures',
   'Problem',
   'ProblemCode',
   'RecordCandidate',
@@ -17,6 +21,7 @@ const TYPES = [
   'RecordFinding',
   'RecordModel',
   'RecordPrediction',
+  'RecordPredictions',
   'RecordTerm',
   'RecordVariable',
   'RenderOptions',
@@ -24,6 +29,7 @@ const TYPES = [
   'Report',
   'ReportFormat',
   'ResidualColumns',
+  'RowOutcome',
   'RunOptions',
   'RunResult',
   'Sample',
@@ -31,6 +37,8 @@ const TYPES = [
   'Study',
   'StudyRecord',
   'Table',
+  'Verified',
+  'VerifyOptions',
 ];
 
 test('the library has these functions and no others', () => {
