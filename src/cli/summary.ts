@@ -4,6 +4,7 @@ import { acceptanceSentence, missedSentences } from '../report/words/acceptance.
 import { answerSentences, fitSentence } from '../report/words/answer.ts';
 import { bewareLines } from '../report/words/beware.ts';
 import { contractSentence, dateRange, lossReason, rowsSentence } from '../report/words/data.ts';
+import { estimatedCandidate } from '../report/words/estimated.ts';
 import { concernWord } from '../report/words/finding.ts';
 import { counted, type Lexicon, lexiconOf } from '../report/words/lexicon.ts';
 import { predictionRounding, totalSentence } from '../report/words/prediction.ts';
@@ -100,7 +101,7 @@ function refusals({ selection, candidates }: StudyRecord): Paragraph[] {
 
 function says(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
   const { model } = record;
-  const candidate = chosenCandidate(record);
+  const candidate = estimatedCandidate(record);
   if (model === null || candidate === undefined) return answerSentences(record, lexicon);
   const more = model.terms.length - MOST;
   return [
@@ -130,10 +131,6 @@ function termInBrief(
   const rest =
     more > 0 ? [`${counted(more, 'more of these is', 'more of these are', count)} in the report.`] : [];
   return [...sentences.slice(0, MOST_OF_A_TERM), ...rest].join(' ');
-}
-
-function chosenCandidate(record: StudyRecord): RecordCandidate | undefined {
-  return record.candidates.find((candidate) => candidate.name === record.selection.chosen);
 }
 
 /** The questions that found something; what to do about them stands under "careful". */

@@ -26,7 +26,13 @@ import { acceptanceOf } from './acceptance.ts';
 import { rowSummaries } from './chart-points.ts';
 import { type Bootstrapped, describeBootstrap } from './describe-bootstrap.ts';
 import { describeModel } from './describe-model.ts';
-import { describeSelection, type SelectionFindings, validationFigures } from './describe-selection.ts';
+import {
+  choiceWarnings,
+  describeSelection,
+  type SelectionFindings,
+  splitSentence,
+  validationFigures,
+} from './describe-selection.ts';
 import { describeVariables } from './describe-variables.ts';
 import type { KeptSample } from './keep-sample.ts';
 import type { RecordCandidate, RecordExamination, StudyRecord } from './record.ts';
@@ -139,7 +145,7 @@ export function buildRecord(run: Run): StudyRecord {
         candidate: candidates[candidate]!.name,
       })),
       chosen: winner?.name ?? null,
-      because: choice.because,
+      because: [choice.because, ...splitSentence(findings)].join(' '),
       ...describeSelection(findings, { study, design: run.design, candidates, positive }, estimated),
     },
     model:
@@ -236,13 +242,14 @@ function newestDay(study: Study, sample: Sample): number | null {
   return column?.kind === 'date' ? column.values[sample.timeOrder!.at(-1)!]! : null;
 }
 
-function warningsOf({ problems, fitted, chosen, study, predicted }: Run): StudyRecord['warnings'] {
+function warningsOf({ problems, findings, fitted, chosen, study, predicted }: Run): StudyRecord['warnings'] {
   const warnings = problems
     .filter((problem) => problem.severity === 'warning')
     .map(({ place, message, hint }) => ({
       about: placeText(place),
       text: hint === undefined ? message : `${message} ${hint}`,
     }));
+  if (findings.trust !== null) warnings.push(...choiceWarnings(findings.trust));
   if (fitted.pressOmitted !== null)
     warnings.push({ about: 'PRESS', text: `PRESS was ${fitted.pressOmitted}.` });
   if (chosen !== null) {

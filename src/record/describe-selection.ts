@@ -71,6 +71,23 @@ export function describeSelection(
   };
 }
 
+/** What a reader must be warned of: a procedure that is no better than the mean of the response. */
+export function choiceWarnings({ honest }: ChoiceTrust): StudyRecord['warnings'] {
+  const error = honest?.error ?? null;
+  if (error === null) return [];
+  const { value, standardError } = error.gain;
+  return value <= (standardError ?? 0) ? [{ about: 'the choice', text: error.sentence }] : [];
+}
+
+/** Which rows the choice and the estimates are from, where they differ; else nothing. */
+export function splitSentence({ split }: SelectionFindings): string[] {
+  return split === null
+    ? []
+    : [
+        `The choice was made on ${split.choosing} rows; the chosen model is estimated from the other ${split.estimating}, which had no part in it.`,
+      ];
+}
+
 /** Of one candidate; absent where candidates are not cross-validated. */
 export function validationFigures(
   validated: Validated | null,

@@ -70,7 +70,10 @@ const CANDIDATE_FIGURES = [
 /** Every coefficient of every candidate, in the order declared. */
 export function coefficientsTable(record: StudyRecord): string {
   const figures = ['estimate', 'standard_error', 't', 'p_value', 'lower', 'upper', 'vif'] as const;
-  const rows = record.candidates.flatMap((candidate) =>
+  // Of the chosen candidate those that the model has, also where it is estimated from other rows than it was chosen on.
+  const estimated = record.selection.split_sample?.estimated ?? null;
+  const candidates = record.candidates.map((one) => (one.name === estimated?.name ? estimated : one));
+  const rows = candidates.flatMap((candidate) =>
     candidate.coefficients.map((coefficient) => [
       candidate.name,
       candidate.name === record.selection.chosen,

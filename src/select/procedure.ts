@@ -35,7 +35,7 @@ export interface Material {
 }
 
 /** The candidates of a study as far as they follow from the rows: those of its families that a search finds there. */
-export type Search = (material: Pick<Material, 'factor' | 'facts'>) => readonly CandidateModel[];
+export type Search = (material: Pick<Material, 'factor' | 'facts' | 'sample'>) => readonly CandidateModel[];
 
 /** The declared choice, to be made again from other rows: the fit of what it chooses, or null where it chooses none. */
 export type Procedure = (material: Material) => Fit | null;
@@ -58,7 +58,7 @@ export function declaredProcedure(study: Study, design: Design, search: Search |
     const fitOf = (index: number): Fit => {
       const known = fullFits.get(index);
       if (known !== undefined) return known;
-      const fit = fitCandidate(factor, candidates[index]!, facts);
+      const fit = fitCandidate(factor, candidates[index]!, facts, 'no condition number');
       fullFits.set(index, fit);
       return fit;
     };

@@ -87,7 +87,7 @@ describe('readRecord', () => {
       'The record has no warnings.',
       'candidates[0].rows must be integer.',
       'model.degrees_of_freedom must be integer.',
-      'selection.rank_by must be one of "adjusted_r_squared", "aic", "aicc", "bic", "mallows_cp", "press", "partial_f".',
+      'selection.rank_by must be one of "adjusted_r_squared", "aic", "aicc", "bic", "mallows_cp", "press", "cross_validation", "partial_f".',
       'tool.name must be "plumbrule".',
     ]);
     const { messages } = await read('{"format": "plumbrule-record/1"}');

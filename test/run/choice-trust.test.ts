@@ -336,3 +336,29 @@ test('progress of long work is told', async () => {
     await rm(folder, { recursive: true });
   }
 });
+
+test('the report and the tables speak of the model as it is estimated, and of the rows of each part', async () => {
+  const { record } = await run('{ split_sample: { share: 0.4, seed: 3 } }');
+  const { estimatedCandidate } = await import('../../src/report/words/estimated.ts');
+  const { coefficientsTable } = await import('../../src/record/tables.ts');
+  expect(estimatedCandidate(record)).toBe(record.selection.split_sample!.estimated);
+  expect(record.selection.because).toContain(
+    'The choice was made on 24 rows; the chosen model is estimated from the other 36, which had no part in it.',
+  );
+  const slope = record.model!.columns[1]!.estimate;
+  expect(coefficientsTable(record)).toContain(`,${slope},`);
+});
+
+test('a choice that is no better than the mean is among the warnings', async () => {
+  const data = rowsOf(40);
+  // Noise alone: y of other rows.
+  data.y = data.y!.map((_, i) => data.c![(i * 17 + 5) % 40]!);
+  const { record } = await run('{ rank_by: adjusted_r_squared, honest_error: {} }', data);
+  expect(record.selection.honest_error!.gain.value).toBeLessThan(
+    record.selection.honest_error!.gain.standard_error!,
+  );
+  expect(record.warnings).toContainEqual({
+    about: 'the choice',
+    text: record.selection.honest_error!.sentence,
+  });
+});

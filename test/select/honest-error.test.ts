@@ -7,7 +7,7 @@ import { honestError } from '../../src/select/honest-error.ts';
 import { declaredProcedure, type Search } from '../../src/select/procedure.ts';
 import { jointF } from '../../src/select/terms.ts';
 import { type PieceLists, variable } from '../engine/models.ts';
-import { makeGround, numbers } from './make-ground.ts';
+import { allOf, makeGround, numbers } from './make-ground.ts';
 import { studyWith } from './study-with.ts';
 
 const folds = (n: number, k: number): Folds => ({
@@ -149,7 +149,7 @@ describe('noise alone (Freedman 1983): 50 predictors, 100 rows, kept where p < 0
         ground.design,
         screen(ground),
       );
-      const [kept] = screen(ground)({ factor: fitted.factor, facts: fitted.facts });
+      const [kept] = screen(ground)({ ...allOf(ground), factor: fitted.factor, facts: fitted.facts });
       const fit = fitCandidate(fitted.factor, kept!, fitted.facts);
       // What a reader of the screened model alone would see: Freedman's point.
       const rSquared = 1 - fit.residualSumOfSquares / fit.totalSumOfSquares;

@@ -5,6 +5,7 @@ import { acceptanceSentence, acceptanceValue, criterionLabel } from '../words/ac
 import { answerSentences, fitSentence } from '../words/answer.ts';
 import { bewareLines } from '../words/beware.ts';
 import { studyLine } from '../words/data.ts';
+import { estimatedCandidate } from '../words/estimated.ts';
 import { counted, type Lexicon } from '../words/lexicon.ts';
 import { predictionRounding } from '../words/prediction.ts';
 import { fittedUnit } from '../words/scale.ts';
@@ -12,7 +13,7 @@ import { fittedUnit } from '../words/scale.ts';
 const ROWS = 8;
 
 export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
-  const chosen = record.candidates.find((c) => c.name === record.model?.candidate);
+  const chosen = estimatedCandidate(record);
   return {
     answer: answerSentences(record, lexicon),
     fit: chosen === undefined ? null : fitSentence(lexicon, chosen, record.candidates.length),

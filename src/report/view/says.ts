@@ -14,6 +14,7 @@ import type { RecordCandidate, RecordCoefficient, StudyRecord } from '../record-
 import type { CoefficientView, SaysView } from '../view.ts';
 import { fitSentence } from '../words/answer.ts';
 import { equationOf } from '../words/equation.ts';
+import { estimatedCandidate } from '../words/estimated.ts';
 import type { Lexicon } from '../words/lexicon.ts';
 import { fittedQuantity, fittedUnit, scaleSentence } from '../words/scale.ts';
 import { termViews } from './terms.ts';
@@ -21,7 +22,7 @@ import { termViews } from './terms.ts';
 export function saysView(record: StudyRecord, lexicon: Lexicon): SaysView | null {
   const { model } = record;
   if (model === null) return null;
-  const candidate = record.candidates.find((c) => c.name === model.candidate);
+  const candidate = estimatedCandidate(record);
   const coefficients = candidate?.coefficients ?? [];
   const unit = fittedUnit(lexicon.response);
   return {

@@ -5,13 +5,14 @@ import type { Figure } from '../chart/svg.ts';
 import { count, fixed, NONE, rounded, roundingFor, significant, value } from '../numbers.ts';
 import type { RecordExamination, StudyRecord } from '../record-type.ts';
 import type { FindingView, TrustView } from '../view.ts';
+import { estimatedCandidate } from '../words/estimated.ts';
 import { concernWord, evidence } from '../words/finding.ts';
 import { counted, type Lexicon, stopped } from '../words/lexicon.ts';
 
 export function trustView(record: StudyRecord, lexicon: Lexicon): TrustView | null {
   const { examination, model } = record;
   if (examination === null || model === null) return null;
-  const candidate = record.candidates.find((c) => c.name === model.candidate);
+  const candidate = estimatedCandidate(record);
   return {
     summary: summarySentence(examination),
     findings: withCharts(lexicon, examination),
