@@ -59,7 +59,7 @@ describe('README', () => {
       .flatMap(({ text }) => text.trim().split(/\n|&&/))
       .map((line) => line.trim());
     const own = commands.filter((line) => line.startsWith('npx plumbrule '));
-    expect(own).toHaveLength(4);
+    expect(own).toHaveLength(5);
     for (const line of own) {
       const { stdout, stderr } = await node(path('src/cli/main.ts'), ...line.split(' ').slice(2));
       // The one example with a row that cannot be predicted says so.
@@ -131,7 +131,7 @@ describe('README', () => {
   });
 
   test('the options and commands described are those there are', async () => {
-    for (const command of ['check', 'fit', 'predict', 'verify', 'render']) {
+    for (const command of ['check', 'fit', 'compare', 'predict', 'verify', 'render']) {
       const { stdout } = await node(path('src/cli/main.ts'), command, '--help');
       for (const [option] of stdout.matchAll(/--(?!help)[a-z-]+/g)) expect(readme).toContain(`\`${option}`);
       expect(readme).toContain(`\`plumbrule ${command} `);

@@ -1,4 +1,4 @@
-/** Timings, printed and held to nothing: npm run bench [factor] [validation] [run] */
+/** Timings, printed and held to nothing: npm run bench [factor] [validation] [compare] [run] */
 const wanted = process.argv.slice(2);
 const asked = (name: string) => wanted.length === 0 || wanted.includes(name);
 
@@ -10,6 +10,10 @@ if (asked('validation')) {
   const { benchBootstrap, benchValidation } = await import('./validation.ts');
   benchValidation();
   benchBootstrap();
+}
+if (asked('compare')) {
+  const { benchCompare } = await import('./compare.ts');
+  await benchCompare();
 }
 if (asked('run')) {
   const { benchWholeRun } = await import('./whole-run.ts');

@@ -1,5 +1,5 @@
 import { readFileSync } from 'node:fs';
-import Ajv2020 from 'ajv/dist/2020.js';
+import { Ajv2020 } from 'ajv/dist/2020.js';
 import { type ComparedSide, compareRecords } from '../../src/compare/compare.ts';
 import type { Comparison } from '../../src/compare/comparison.ts';
 import { comparisonText } from '../../src/compare/comparison-text.ts';
