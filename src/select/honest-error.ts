@@ -3,6 +3,7 @@ import { factorAt } from '../engine/fold-factors.ts';
 import { rowsAt } from '../engine/rows-at.ts';
 import { solveColumns, solveScratch } from '../engine/solve-columns.ts';
 import type { CandidateModel } from '../model/design.ts';
+import { namesOfChosen } from './candidate-name.ts';
 import { naturalErrors } from './cross-validate.ts';
 import type { Folds } from './folds.ts';
 import { type Ground, materialOf } from './material.ts';
@@ -62,6 +63,7 @@ export function honestError({
   const { rows, own } = ground;
   const cells = folds.sets.length * folds.count;
   const scratch = solveScratch(rows.width);
+  const nameOf = namesOfChosen(ground.design);
   const weights = new Float64Array(cells);
   const table = {
     procedure: new Float64Array(cells),
@@ -78,7 +80,7 @@ export function honestError({
       const at = s * folds.count + fold.fold;
       const training = fold.trainingRows();
       const chosen = procedure(materialOf(ground, fold.training, training, null));
-      const name = chosen?.candidate.name ?? null;
+      const name = chosen === null ? null : nameOf(chosen.candidate);
       choices.set(name, (choices.get(name) ?? 0) + 1);
       const judged = [chosen?.candidate, winner?.candidate].filter((one) => one !== undefined);
       const rest = predictable(fold, judged);

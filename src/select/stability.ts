@@ -6,6 +6,7 @@ import { emptyFactor, factorParts } from '../engine/fold-factors.ts';
 import { rowsAt } from '../engine/rows-at.ts';
 import { type Random, randomFrom } from '../stats/random.ts';
 import type { StabilityPlan } from '../study/study.ts';
+import { namesOfChosen } from './candidate-name.ts';
 import { rowsByPart } from './folds.ts';
 import { type Ground, materialOf } from './material.ts';
 import type { Procedure } from './procedure.ts';
@@ -55,6 +56,7 @@ const LEVELS = [0.05, 0.25, 0.5, 0.75, 0.95] as const;
  */
 export function stability({ plan, ground, procedure, onProgress }: StabilityInput): Stability {
   const { rows } = ground;
+  const nameOf = namesOfChosen(ground.design);
   const units = unitsOf(plan, ground);
   const random = randomFrom(plan.seed);
   const draw = units.rows === null ? rowDraws(ground, random) : unitDraws(ground, units.rows, random);
@@ -94,7 +96,8 @@ export function stability({ plan, ground, procedure, onProgress }: StabilityInpu
   };
 
   function take(fit: Fit): void {
-    const { name, terms: own, responseColumn } = fit.candidate;
+    const { terms: own, responseColumn } = fit.candidate;
+    const name = nameOf(fit.candidate);
     candidates.set(name, (candidates.get(name) ?? 0) + 1);
     for (const term of own) terms.set(term.name, (terms.get(term.name) ?? 0) + 1);
     fit.columns.forEach((column, j) => {

@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import type { CategoryColumn } from '../../src/data/table.ts';
+import { namesOfChosen } from '../../src/select/candidate-name.ts';
 import { choose } from '../../src/select/choose.ts';
 import { declaredProcedure } from '../../src/select/procedure.ts';
 import { quantileOf } from '../../src/select/quantile.ts';
@@ -125,6 +126,15 @@ describe('the choice from rows drawn anew is that of the draws written out', () 
     });
     expect(found).toMatchObject({ noneAdmitted: 60, candidates: [], terms: [], coefficients: [] });
   });
+});
+
+test('what a search finds is called by the study’s name for the same columns, else by its terms', () => {
+  const { ground } = makeGround(tableOf(10, 2), COLUMNS, CANDIDATES);
+  const [mean, a] = ground.design.candidates;
+  const nameOf = namesOfChosen({ candidates: [a!] });
+  expect(nameOf({ ...a!, name: 'Any 2a' })).toBe(a!.name);
+  expect(nameOf({ ...mean!, name: 'Any 1a' })).toBe('the mean alone');
+  expect(nameOf({ ...ground.design.candidates[3]!, name: 'Any 3a' })).toBe('a, b');
 });
 
 test('quantiles: none, one, two, and between (Hyndman & Fan 1996, definition 7)', () => {
