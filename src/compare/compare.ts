@@ -108,7 +108,7 @@ function compareRows(
     ...compareModel(pair, a, b, matched),
   }));
   const own = compared.find(({ pair }) => pair.chosen !== 'later')?.before ?? null;
-  if (own !== null && !givesRecord(own, earlier.record)) {
+  if (own !== null && !estimatedFromPart(earlier) && !givesRecord(own, earlier.record)) {
     report({
       code: 'record_unreadable',
       severity: 'error',
@@ -122,6 +122,11 @@ function compareRows(
   const newRows =
     own === null || matched.added.length === 0 ? null : scored(own, earlier.record, a, b, matched.added);
   return { matched, described, models: compared.map(({ model }) => model), newRows };
+}
+
+/** A study may choose on one part of its rows and estimate from the other: the kept rows are those of both. */
+function estimatedFromPart({ record }: ComparedSide): boolean {
+  return record.model !== null && record.model.rows !== record.data.rows_used;
 }
 
 function scored(own: Refit, record: StudyRecord, a: Side, b: Side, added: Int32Array): NewRows | null {
@@ -167,6 +172,13 @@ function cannotTell(earlier: ComparedSide, later: ComparedSide, by: 'row_id' | '
       : [
           `The rows of the ${absent.join(' and the ')} record were not kept, so that it cannot be told which rows are new, revised or gone, what moved each coefficient, or how new rows lie to the earlier model.`,
         ]),
+    ...[earlier, later].flatMap((side, index) =>
+      side.rows !== null && estimatedFromPart(side)
+        ? [
+            `The ${index === 0 ? 'earlier' : 'later'} record estimates its model from a part of its rows; the coefficients compared here are those of fits to all of them.`,
+          ]
+        : [],
+    ),
     ...(by === 'content'
       ? [
           'Rows have no identity in both records, so that they are matched by everything in them: a row with a revised value counts as one removed and one added.',

@@ -91,6 +91,27 @@ describe('rows', () => {
   });
 });
 
+describe('a study that estimates from a part of its rows', () => {
+  test('is compared by fits to all of them, and that is said', async () => {
+    const study = {
+      selection: 'split_sample: { share: 0.5 }',
+      candidates: `  - { name: All, terms: [weight, horsepower, model_year, origin] }
+  - { name: Power, terms: [horsepower] }`,
+    };
+    const before = await sideOf(SOUND.slice(0, 250), study);
+    const now = await sideOf(EARLIER, study);
+    const { cannot_tell: cannotTell, models } = compared(before, now);
+    expect(cannotTell).toEqual([
+      'The earlier record estimates its model from a part of its rows; the coefficients compared here are those of fits to all of them.',
+      'The later record estimates its model from a part of its rows; the coefficients compared here are those of fits to all of them.',
+    ]);
+    const all = new Map(earlier.record.model!.columns.map((column) => [column.name, column.estimate]));
+    for (const { name, after } of models[0]!.coefficients) {
+      expect(after! / all.get(name)!).toBeCloseTo(1, 10);
+    }
+  });
+});
+
 describe('the contract', () => {
   const kinds = (comparison: ReturnType<typeof compared>) =>
     comparison.contract.map(({ kind, variable, name, likely, because }) => [

@@ -24,11 +24,12 @@ export interface StudyParts {
   readonly derive?: string;
   readonly response?: string;
   readonly candidates?: string;
+  readonly selection?: string;
   readonly more?: string;
 }
 
 /** A study of the cars; parts that are not given are the usual ones. */
-export function carsStudy({ data, derive, response, candidates, more }: StudyParts = {}): string {
+export function carsStudy({ data, derive, response, candidates, selection, more }: StudyParts = {}): string {
   return `plumbrule: 1
 title: Fuel economy of cars
 data:
@@ -50,7 +51,7 @@ derive:
 ${response ?? 'response: economy'}
 candidates:
 ${candidates ?? '  - { name: All, terms: [weight, horsepower, model_year, origin] }'}
-selection: { rank_by: aicc }
+selection: { rank_by: aicc${selection === undefined ? '' : `, ${selection}`} }
 ${more ?? ''}
 `;
 }

@@ -36,7 +36,7 @@ const side = {
   chosen: 'A',
 };
 
-const contender = {
+const contender: NonNullable<Comparison['choice']['earlier']> = {
   name: 'A',
   value: 100,
   coefficient_count: 3,
@@ -44,7 +44,7 @@ const contender = {
   admitted: true,
   refused_because: [],
   reason: null,
-} as const;
+};
 
 const nothing: Comparison = {
   format: 'plumbrule-comparison/1',
