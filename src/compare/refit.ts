@@ -84,7 +84,7 @@ export function refit(
     columns: columns.map((_, column) => column).slice(definition.intercept ? 0 : 1),
     responseColumn: 0,
   };
-  const facts = rowFacts({ columns, responses: [definition.response], candidates: [candidate] }, design, own);
+  const facts = rowFacts({ columns, responses: [definition.response] }, design, own);
   const extended = rows.rowCount * design.width * design.width <= EXTENDED_BUDGET;
   const first = fitCandidate(extended ? factorExtended(design) : factorRows(design), candidate, facts);
   const fit = extended ? first : refineFit(first, design, facts);

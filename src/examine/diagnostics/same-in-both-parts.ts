@@ -54,7 +54,11 @@ function compare(chosen: Chosen, before: Int32Array, after: Int32Array, where: s
   const total = fit.degreesOfFreedom;
   const first = leftIn(chosen, before);
   const last = leftIn(chosen, after);
-  const rows = `${counted(before.length, 'row')} below ${where} and ${wholeNumber(after.length)} from there on`;
+  const { variable } = chosen.study.examination.splitAt!;
+  const rows =
+    sample.columns.get(variable)!.kind === 'flag'
+      ? `${counted(before.length, 'row')} where ${variable} does not hold and ${wholeNumber(after.length)} where it does`
+      : `${counted(before.length, 'row')} below ${where} and ${wholeNumber(after.length)} from there on`;
   // A part without degrees of freedom of its own is fitted exactly and adds nothing, which is Chow's second test.
   const rss = first.residualSumOfSquares + last.residualSumOfSquares;
   const df2 = Math.max(0, before.length - first.rank) + Math.max(0, after.length - last.rank);
