@@ -8,7 +8,17 @@ interface Row {
 }
 
 /** Definitions that several keys share; each gets a section of its own instead of being repeated. */
-const SHARED = ['term', 'member', 'scale', 'hypothesis', 'limits'];
+const SHARED = [
+  'candidate',
+  'subset_family',
+  'backward_family',
+  'forward_family',
+  'term',
+  'member',
+  'scale',
+  'hypothesis',
+  'limits',
+];
 
 /** Of these every form is shown with its keys. */
 const SHOWN_BY_FORM = ['term', 'scale', 'hypothesis'];
@@ -168,6 +178,10 @@ function isPlain(schema: JsonSchema): boolean {
 function headingOf(name: string): string {
   return (
     {
+      candidate: 'Named candidates',
+      subset_family: 'Families of subsets',
+      backward_family: 'Families by backward elimination',
+      forward_family: 'Families by forward selection',
       term: 'Terms',
       member: 'Members of an interaction',
       scale: 'Scales',

@@ -4,7 +4,7 @@ import { candidateCovariances } from './engine/candidate-covariances.ts';
 import { checkFits } from './engine/check-fits.ts';
 import { checkMagnitudes } from './engine/check-magnitudes.ts';
 import { checkStandardErrors } from './engine/check-standard-errors.ts';
-import { type FittedAll, fitAll } from './engine/fit-all.ts';
+import { type Factored, type FittedAll, factorAll, fitAll } from './engine/fit-all.ts';
 import { refineFit } from './engine/refine.ts';
 import { bootstrap } from './examine/bootstrap.ts';
 import { checkFindingNames } from './examine/check-finding-names.ts';
@@ -36,7 +36,9 @@ import { checkEstimating } from './select/check-estimating.ts';
 import type { Choice } from './select/choose.ts';
 import { choose } from './select/choose.ts';
 import type { Ground } from './select/material.ts';
+import type { Search } from './select/procedure.ts';
 import type { ChoiceTrust } from './select/question-choice.ts';
+import type { FoundFamily } from './select/search-families.ts';
 import { type Validated, validateCandidates } from './select/validate-candidates.ts';
 import { readStudy } from './study/read-study.ts';
 import type { Study } from './study/study.ts';
@@ -91,7 +93,7 @@ export async function checkStudy(path: string, options: RunOptions = {}): Promis
 /**
  * The whole study, stage by stage:
  *
- *     study file ─ data ─ sample ─ design ─ factor ─ fits ─ choice ─ examination ─ predictions ─ record
+ *     study file ─ data ─ sample ─ design ─ factor ─ search ─ fits ─ choice ─ examination ─ predictions ─ record
  *
  * Every candidate is fitted on the same rows; where an error is found the stages after it are left out.
  */
@@ -102,19 +104,25 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   const stopped: () => RunResult = () => ({ record: null, dataRead, problems, residuals: null, kept: null });
   if (study === null || table === null || sample === null || hasError(problems)) return stopped();
 
-  const design = buildDesign(study, sample, report);
-  if (design === null) return stopped();
-  checkHypotheses(study, design, report);
-  const whole = groundOf(study, sample, design);
-  if (!checkMagnitudes(study, sample, design, whole.rows, table.file, report)) return stopped();
+  const declared = buildDesign(study, sample, report);
+  if (declared === null) return stopped();
+  checkHypotheses(study, declared, report);
+  const whole = groundOf(study, sample, declared);
+  if (!checkMagnitudes(study, sample, declared, whole.rows, table.file, report)) return stopped();
 
   // All rows serve for choosing and for estimating, unless the study splits them.
-  const split = splitGround(study, sample, design, report);
+  const split = splitGround(study, sample, declared, report);
   if (hasError(problems)) return stopped();
-  const choosing = split?.choosing ?? whole;
-  const estimating = split?.estimating ?? whole;
 
-  const fits = fitGround(study, choosing, options, report);
+  // What a search of the families finds is a candidate like any other from there on.
+  const factored = factorGround(split?.choosing ?? whole, options);
+  const searched = await searchAll(study, split?.choosing ?? whole, factored, report, options);
+  if (hasError(problems)) return stopped();
+  const { design } = searched;
+  const choosing = { ...(split?.choosing ?? whole), design };
+  const estimating = { ...(split?.estimating ?? whole), design };
+
+  const fits = fitGround(study, choosing, options, report, factored);
   checkFits(study, choosing.sample, design, fits.fits, report);
   if (hasError(problems)) return stopped();
 
@@ -130,7 +138,16 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
   const choice = choose(study, ranked, report);
   if (hasError(problems)) return stopped();
 
-  const trust = await questionAll(study, choosing, ranked, choice, validated, report, options);
+  const trust = await questionAll(
+    study,
+    choosing,
+    searched.search,
+    ranked,
+    choice,
+    validated,
+    report,
+    options,
+  );
   if (hasError(problems)) return stopped();
 
   const fitted = split === null ? ranked : fitGround(study, estimating, options, report);
@@ -157,6 +174,7 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     fitted,
     ranked,
     choice,
+    families: searched.families,
     findings: {
       validated,
       trust,
@@ -200,11 +218,61 @@ function splitGround(
   };
 }
 
-function fitGround(study: Study, { sample, design, rows, own }: Part, options: RunOptions, report: Report) {
-  const fits = fitAll(design, rows, own, {
-    pressRanks: study.selection.rankBy === 'press',
-    onProgress: (done, total) => options.onProgress?.('fitting candidates', done, total),
+function factorGround({ design, rows, own }: Part, options: RunOptions): Factored {
+  return factorAll(design, rows, own, (done, total) =>
+    options.onProgress?.('fitting candidates', done, total),
+  );
+}
+
+interface Searched {
+  /** The declared design with the models found among its candidates. */
+  readonly design: Design;
+  readonly families: readonly FoundFamily[];
+  /** Makes the searches again on other rows; null without families. */
+  readonly search: Search | null;
+}
+
+/** Searches the families that the study declares. */
+async function searchAll(
+  study: Study,
+  { design, rows, sample }: Part,
+  factored: Factored,
+  report: Report,
+  options: RunOptions,
+): Promise<Searched> {
+  if (design.families.length === 0) return { design, families: [], search: null };
+  const { candidatesFrom, searchFamilies } = await import('./select/search-families.ts');
+  const { checkFamilies } = await import('./select/check-families.ts');
+  const ground = { ...factored, sample: () => ({ rows, sample }) };
+  const found = searchFamilies(study, design, ground, {
+    everySize: true,
+    onProgress: (name, visited) => options.onProgress?.(`searching ${name}`, visited, null),
   });
+  checkFamilies(study, design, ground, found, report);
+  return {
+    design: { ...design, candidates: [...design.candidates, ...found.candidates] },
+    families: found.families,
+    search: (material) => candidatesFrom(study, design, material),
+  };
+}
+
+function fitGround(
+  study: Study,
+  { sample, design, rows, own }: Part,
+  options: RunOptions,
+  report: Report,
+  factored?: Factored,
+) {
+  const fits = fitAll(
+    design,
+    rows,
+    own,
+    {
+      pressRanks: study.selection.rankBy === 'press',
+      onProgress: (done, total) => options.onProgress?.('fitting candidates', done, total),
+    },
+    factored,
+  );
   return { ...fits, covariances: candidateCovariances(study, sample, fits.fits, rows, report) };
 }
 
@@ -212,6 +280,7 @@ function fitGround(study: Study, { sample, design, rows, own }: Part, options: R
 async function questionAll(
   study: Study,
   part: Part,
+  search: Search | null,
   fitted: FittedAll,
   choice: Choice,
   validated: Validated | null,
@@ -227,7 +296,7 @@ async function questionAll(
     { ...part, facts: fitted.facts, folds },
     fitted,
     choice,
-    null,
+    search,
     report,
     options.onProgress,
   );

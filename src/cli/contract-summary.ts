@@ -23,6 +23,15 @@ export function contractSummary(checked: CheckedStudy, terminal: Terminal): stri
   return plumbLine(sections, terminal);
 }
 
+function tried({ candidates, families }: Study): string[] {
+  return [
+    ...(candidates.length > 0 ? [counted(candidates.length, 'candidate')] : []),
+    ...(families.length > 0
+      ? [counted(families.length, 'family of candidates', 'families of candidates')]
+      : []),
+  ];
+}
+
 function declared(study: Study): Paragraph[] {
   const { scale, variable } = study.response;
   const on = scale.kind === 'natural' ? '' : ` on the ${scale.kind.replace('_', '–')} scale`;
@@ -35,7 +44,7 @@ function declared(study: Study): Paragraph[] {
     ...(limits > 0 ? [counted(limits, 'acceptance criterion', 'acceptance criteria')] : []),
   ];
   return [
-    `${counted(study.candidates.length, 'candidate')} for ${variable}${on}, ranked by ${study.selection.rankBy}; ${counted(study.data.variables.length, 'variable')} declared, ${count(study.derive.length)} derived.`,
+    `${listed(tried(study))} for ${variable}${on}, ranked by ${study.selection.rankBy}; ${counted(study.data.variables.length, 'variable')} declared, ${count(study.derive.length)} derived.`,
     ...(extras.length > 0 ? [`Also ${listed(extras)}.`] : []),
   ];
 }

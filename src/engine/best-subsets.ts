@@ -3,7 +3,7 @@ import type { Factor } from './factor.ts';
 import { backwardBounds } from './subset-backward.ts';
 import { subsetGround } from './subset-ground.ts';
 import { inflationStack } from './subset-inflation.ts';
-import { type SubsetEntry, type SubsetGoal, type SubsetLists, subsetLists } from './subset-lists.ts';
+import { type SubsetEntry, type SubsetLists, subsetLists } from './subset-lists.ts';
 import {
   aftermath,
   depart,
@@ -18,40 +18,8 @@ import {
   sortAscending,
   survey,
 } from './subset-node.ts';
+import type { SubsetSearch } from './subset-search.ts';
 import { narrowed, type OpenTriangle, obstacleIn } from './subset-triangle.ts';
-
-/** Columns that come and go together: a term. */
-export interface SubsetGroup {
-  /** Union columns. */
-  readonly columns: readonly number[];
-  /** Indexes of the groups that are in whenever this one is: all of them, not only the next. */
-  readonly needs: readonly number[];
-}
-
-export interface SubsetSearch {
-  /** Union columns that every set has, the intercept among them where there is one. */
-  readonly always: readonly number[];
-  readonly groups: readonly SubsetGroup[];
-  readonly responseColumn: number;
-  /** Groups of a set beside what is always in. */
-  readonly atLeast: number;
-  readonly atMost: number;
-  /** How many sets to keep for each number of columns. */
-  readonly keep: number;
-  /** The most columns of a set, what is always in counted. */
-  readonly mostColumns: number;
-  /** Largest RSS of use, by the number of columns, in the response's own units; none: any. */
-  readonly largestResidual?: (columns: number) => number;
-  /** Whether a set may be kept; asked only of sets that would enter a list. None: every set may. */
-  readonly admits?: (groups: readonly number[]) => boolean;
-  /** The largest VIF, or of a group of several columns GVIF^(1/columns), that `admits` lets pass: it only grows with the set. */
-  readonly largestInflation?: number | null;
-  /** Narrows the search to sets that could still be chosen; values are of RSS in the response's own units. */
-  readonly goal?: SubsetGoal | null;
-  /** Multiplications after which the search is given up. */
-  readonly budget?: number;
-  readonly onProgress?: (visited: number) => void;
-}
 
 export interface FoundSubset {
   /** Indexes of groups beside what is always in, ascending. */

@@ -48,7 +48,7 @@ function reportTooFewRows(study: Study, fits: readonly Fit[], report: Report): v
     report({
       code: 'rows_too_few',
       severity: none ? 'error' : 'warning',
-      place: study.placeOf(['candidates', index]),
+      place: study.placeOf(placeInFile(fits, index)),
       message: `${candidate.name} has ${wanted} coefficients for ${wholeNumber(rowCount)} ${rowCount === 1 ? 'row' : 'rows'}: ${
         wanted === rowCount ? 'it fits them exactly, whatever they are' : 'there is no one answer'
       }, and nothing can be tested.`,
@@ -69,7 +69,7 @@ function reportNothingLeft(study: Study, fits: readonly Fit[], report: Report): 
     report({
       code: 'predictor_constant',
       severity: 'error',
-      place: study.placeOf(['candidates', index]),
+      place: study.placeOf(placeInFile(fits, index)),
       message: `${candidate.name} has no intercept, and its terms are 0 in all ${wholeNumber(rowCount)} rows used, so there is nothing to fit.`,
       hint: 'Take the candidate out.',
     });
@@ -86,7 +86,7 @@ function reportExactFits(study: Study, fits: readonly Fit[], report: Report): vo
   report({
     code: 'fit_exact',
     severity: 'warning',
-    place: study.placeOf(['candidates', first]),
+    place: study.placeOf(placeInFile(fits, first)),
     message: `But for rounding, ${response} is fitted exactly in all ${fits[first]!.rowCount} rows used by ${namesOf(exact, fits)}: nothing can be tested there, and there are no intervals.`,
     hint: `Is ${response} worked out from these terms? Measurements hardly ever fit so.`,
   });
@@ -116,7 +116,7 @@ function reportDependencies(study: Study, design: Design, fits: readonly Fit[], 
   for (const { dependent, near, candidates } of told.values()) {
     const [first] = candidates;
     const term = fits[first!]!.candidate.terms.findIndex((one) => one.columns.includes(dependent.column));
-    const place = study.placeOf(['candidates', first!, 'terms', Math.max(0, term)]);
+    const place = study.placeOf([...placeInFile(fits, first!), 'terms', Math.max(0, term)]);
     const names = namesOf(candidates, fits);
     if (near) {
       report({
@@ -143,4 +143,9 @@ function reportDependencies(study: Study, design: Design, fits: readonly Fit[], 
 
 function isProduct(design: Design, column: number): boolean {
   return design.columns[column]!.pieces.length > 1;
+}
+
+/** Where a candidate stands in the study file; one that a search found, where its family does. */
+function placeInFile(fits: readonly Fit[], index: number): (string | number)[] {
+  return ['candidates', fits[index]!.candidate.position ?? index];
 }

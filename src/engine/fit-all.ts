@@ -29,8 +29,18 @@ export interface FittedAll extends FitContext {
   readonly facts: RowFacts;
 }
 
+/** The one pass over the rows, and what goes with it. */
+export interface Factored {
+  readonly factor: Factor;
+  readonly facts: RowFacts;
+}
+
 /** What the likelihoods and sentences need beside the factor. */
-export function rowFacts(design: Design, rows: DesignRows, ownResponse: Float64Array): RowFacts {
+export function rowFacts(
+  design: Pick<Design, 'columns' | 'responses'>,
+  rows: DesignRows,
+  ownResponse: Float64Array,
+): RowFacts {
   let logWeights = 0;
   if (rows.rootWeights !== null) for (const root of rows.rootWeights) logWeights += 2 * Math.log(root);
   return {
@@ -44,21 +54,36 @@ export function rowFacts(design: Design, rows: DesignRows, ownResponse: Float64A
 }
 
 /**
+ * The factor of all columns of a design, in double-double where the work is small.
+ * @param ownResponse the response on its own scale, length n
+ */
+export function factorAll(
+  design: Pick<Design, 'columns' | 'responses'>,
+  rows: DesignRows,
+  ownResponse: Float64Array,
+  onProgress?: FitOptions['onProgress'],
+): Factored {
+  const facts = rowFacts(design, rows, ownResponse);
+  const n = rows.rowCount;
+  const extended = n * rows.width * rows.width <= EXTENDED_BUDGET;
+  const factor = extended ? factorExtended(rows) : factorRows(rows, 0, n, (done) => onProgress?.(done, n));
+  return { factor, facts };
+}
+
+/**
  * Fits every candidate: one pass for the factor, then each from the triangle, refined by the budget.
  * @param ownResponse the response on its own scale, length n
+ * @param factored the factor, where it is made already
  */
 export function fitAll(
   design: Design,
   rows: DesignRows,
   ownResponse: Float64Array,
   options: FitOptions,
+  factored: Factored = factorAll(design, rows, ownResponse, options.onProgress),
 ): FittedAll {
-  const facts = rowFacts(design, rows, ownResponse);
-  const n = rows.rowCount;
-  const extended = n * rows.width * rows.width <= EXTENDED_BUDGET;
-  const factor = extended
-    ? factorExtended(rows)
-    : factorRows(rows, 0, n, (done) => options.onProgress?.(done, n));
+  const { factor, facts } = factored;
+  const extended = factor.triangle.lo !== null;
   const plain = design.candidates.map((candidate) => fitCandidate(factor, candidate, facts));
   const fits = extended ? plain : refineByBudget(plain, rows, facts);
   return {
@@ -103,11 +128,14 @@ function pressByBudget(
   };
 }
 
-/** s² of the model with all columns of all candidates on each response; null without degrees of freedom. */
+/** s² of the model with all columns of all candidates and families on each response; null without degrees of freedom. */
 export function fullVariance(factor: Factor, design: Design, facts: RowFacts): (number | null)[] {
-  const used = [...new Set(design.candidates.flatMap((candidate) => candidate.columns))].sort(
-    (a, b) => a - b,
-  );
+  const inFamilies = design.families.flatMap(({ plan, terms }) => [
+    ...(plan.intercept ? [0] : []),
+    ...terms.flatMap(({ columns }) => columns),
+  ]);
+  const named = design.candidates.flatMap((candidate) => candidate.columns);
+  const used = [...new Set([...named, ...inFamilies])].sort((a, b) => a - b);
   return design.responses.map((response, responseColumn) => {
     const fit = fitCandidate(
       factor,

@@ -30,8 +30,14 @@ const NEARLY_DEPENDENT = 1e-5;
 /**
  * Fits one candidate from the factor alone: its columns of R are taken, triangularised again and solved. The
  * cost depends on the number of columns, not of rows. The arithmetic is that of the factor.
+ * @param needs the condition number costs as much as all the rest, and is NaN where it is not needed
  */
-export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: RowFacts): Fit {
+export function fitCandidate(
+  factor: Factor,
+  candidate: CandidateModel,
+  facts: RowFacts,
+  needs: 'all' | 'no condition number' = 'all',
+): Fit {
   const { predictorCount: union, scales } = factor;
   const responseAt = union + candidate.responseColumn;
   const height = responseAt + 1;
@@ -113,7 +119,7 @@ export function fitCandidate(factor: Factor, candidate: CandidateModel, facts: R
     exact,
     logLikelihood: exact ? null : logLikelihood(n, rss, facts, candidate.responseColumn),
     vif: inflation(factor, candidate, kept, inverse),
-    conditionNumber: conditionIndex(rootInverse, p, lengthsOf(factor, kept)),
+    conditionNumber: needs === 'all' ? conditionIndex(rootInverse, p, lengthsOf(factor, kept)) : Number.NaN,
     span,
     own: ownMask,
     arithmetic: work.lo === null ? 'plain' : 'extended',

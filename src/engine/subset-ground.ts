@@ -1,7 +1,7 @@
-import type { SubsetGroup, SubsetSearch } from './best-subsets.ts';
 import type { Factor } from './factor.ts';
 import { DEPENDENT } from './fit-candidate.ts';
 import { columnNorm, eliminate, type Matrix, matrix } from './kernel.ts';
+import type { SubsetGroup, SubsetSearch } from './subset-search.ts';
 import { type OpenTriangle, openColumns } from './subset-triangle.ts';
 
 /** A group as the search sees it: what depends on its own surroundings is gone. */

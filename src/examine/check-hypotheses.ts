@@ -4,11 +4,17 @@ import type { Report } from '../problem.ts';
 import { listedUpTo } from '../select/words.ts';
 import type { Study } from '../study/study.ts';
 
-/** Reports the coefficients named under `inference.hypotheses` that no candidate has. */
+/** Reports the coefficients named under `inference.hypotheses` that no candidate has or can have. */
 export function checkHypotheses(study: Study, design: Design, report: Report): void {
-  const used = new Set(design.candidates.flatMap((candidate) => candidate.columns));
+  const used = new Set([
+    ...design.candidates.flatMap((candidate) => candidate.columns),
+    ...design.families.flatMap(({ plan, terms }) => [
+      ...(plan.intercept ? [0] : []),
+      ...terms.flatMap(({ columns }) => columns),
+    ]),
+  ]);
   const known = design.columns.filter((_, column) => used.has(column)).map((column) => column.name);
-  const terms = design.candidates.flatMap((candidate) => candidate.terms);
+  const terms = [...design.candidates, ...design.families].flatMap((one) => one.terms);
   for (const { equalities } of study.inference.hypotheses) {
     for (const { combination, path } of equalities) {
       for (const name of combination.keys()) {

@@ -3,12 +3,12 @@ import { wholeNumber } from '../numerals.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
 import type { ResponsePlan, Study, TermPlan } from '../study/study.ts';
-import type { CandidateModel, Design, DesignColumn, ModelTerm, Piece } from './design.ts';
+import type { CandidateModel, Design, DesignColumn, FamilyModel, ModelTerm, Piece } from './design.ts';
 import { columnName, superscript, termName } from './names.ts';
 
 /**
- * The union of all candidates' design columns, in order of first use after the intercept, and each
- * candidate as indexes into it. A column that two terms share (a polynomial and its own variable) stands
+ * The union of all candidates' design columns, those of families last, in order of first use after the intercept,
+ * and each candidate as indexes into it. A column that two terms share (a polynomial and its own variable) stands
  * in the union once.
  *
  * Reports `category_one_level` where a category has a single level among the sample's rows; null then.
@@ -31,33 +31,47 @@ export function buildDesign(study: Study, sample: Sample, report: Report): Desig
     return index;
   };
 
-  const candidates = study.candidates.map((plan, position): CandidateModel => {
-    const terms = plan.terms.map((term, termPosition): ModelTerm => {
-      const oneLevel = (column: CategoryColumn, level: string | null) => {
-        if (refused.has(column.name)) return;
-        refused.add(column.name);
-        report({
-          code: 'category_one_level',
-          severity: 'error',
-          place: study.placeOf(['candidates', position, 'terms', termPosition]),
-          message: `${column.name} has ${level === null ? 'no level' : `only the level "${level}"`} in the ${wholeNumber(sample.rowCount)} rows used, so it cannot be a term.`,
-          hint: 'Look at what leave_out and missing values take away, or take the term out.',
-        });
-      };
-      const products = expand(term, sample, oneLevel);
-      return { name: termName(term), plan: term, columns: unique(products.map(columnIndex)) };
-    });
+  const modelTerm = (term: TermPlan, path: readonly (string | number)[]): ModelTerm => {
+    const oneLevel = (column: CategoryColumn, level: string | null) => {
+      if (refused.has(column.name)) return;
+      refused.add(column.name);
+      report({
+        code: 'category_one_level',
+        severity: 'error',
+        place: study.placeOf(path),
+        message: `${column.name} has ${level === null ? 'no level' : `only the level "${level}"`} in the ${wholeNumber(sample.rowCount)} rows used, so it cannot be a term.`,
+        hint: 'Look at what leave_out and missing values take away, or take the term out.',
+      });
+    };
+    const products = expand(term, sample, oneLevel);
+    return { name: termName(term), plan: term, columns: unique(products.map(columnIndex)) };
+  };
+
+  const candidates = study.candidates.map((plan, index): CandidateModel => {
+    const { position = index } = plan;
+    const terms = plan.terms.map((term, k) => modelTerm(term, ['candidates', position, 'terms', k]));
     const own = unique(terms.flatMap((term) => term.columns));
+    const response = { variable: study.response.variable, scale: plan.scale };
     return {
       name: plan.name,
-      response: { variable: study.response.variable, scale: plan.scale },
+      position,
+      response,
       intercept: plan.intercept,
       terms,
       columns: plan.intercept ? [0, ...own] : own,
-      responseColumn: responseIndex({ variable: study.response.variable, scale: plan.scale }, responses),
+      responseColumn: responseIndex(response, responses),
     };
   });
-  return refused.size > 0 ? null : { columns, responses, candidates };
+  const families = study.families.map((plan): FamilyModel => {
+    const response = { variable: study.response.variable, scale: plan.scale };
+    return {
+      plan,
+      terms: plan.terms.map(({ term, path }) => modelTerm(term, path)),
+      response,
+      responseColumn: responseIndex(response, responses),
+    };
+  });
+  return refused.size > 0 ? null : { columns, responses, candidates, families };
 }
 
 /** The products of pieces a term stands for. */

@@ -1,4 +1,4 @@
-import type { ResponsePlan, TermPlan } from '../study/study.ts';
+import type { FamilyPlan, ResponsePlan, TermPlan } from '../study/study.ts';
 
 /**
  * One factor of a design column. A design column is the product of its pieces, so it can be written
@@ -41,6 +41,8 @@ export interface ModelTerm {
 
 export interface CandidateModel {
   readonly name: string;
+  /** Where it stands in the study file's list of candidates; one that a search found, where its family does. */
+  readonly position?: number;
   readonly response: ResponsePlan;
   readonly intercept: boolean;
   readonly terms: readonly ModelTerm[];
@@ -50,11 +52,22 @@ export interface CandidateModel {
   readonly responseColumn: number;
 }
 
-/** The union of all candidates' design columns, and every response column. */
+/** A family of candidates with the columns of its terms: what a search needs to know of it. */
+export interface FamilyModel {
+  readonly plan: FamilyPlan;
+  /** In the order of the plan's terms. */
+  readonly terms: readonly ModelTerm[];
+  readonly response: ResponsePlan;
+  readonly responseColumn: number;
+}
+
+/** The union of all candidates' design columns, those of families included, and every response column. */
 export interface Design {
   /** P columns; column 0 is the intercept. */
   readonly columns: readonly DesignColumn[];
   /** The distinct responses, q columns. */
   readonly responses: readonly ResponsePlan[];
+  /** The named candidates; with those that a search found after them, once it has run. */
   readonly candidates: readonly CandidateModel[];
+  readonly families: readonly FamilyModel[];
 }

@@ -1,5 +1,6 @@
 import type { Column } from '../data/table.ts';
 import type { Report } from '../problem.ts';
+import { declaredScales } from '../study/declared-terms.ts';
 import type { Scale, Study } from '../study/study.ts';
 import { lineList, rowCountText } from './line-list.ts';
 
@@ -17,7 +18,7 @@ export function checkScales(
 ): boolean {
   if (response.kind === 'category' || response.kind === 'text') return true;
   const scales = new Map<Scale['kind'], Scale>();
-  for (const { scale } of study.candidates) scales.set(scale.kind, scale);
+  for (const scale of declaredScales(study)) scales.set(scale.kind, scale);
   let good = true;
   for (const kind of scales.keys()) {
     if (kind === 'natural') continue;

@@ -1,3 +1,4 @@
+import { declaredTerms } from '../study/declared-terms.ts';
 import type { Study, TermPlan } from '../study/study.ts';
 import { baseVariables } from './derive.ts';
 
@@ -7,10 +8,8 @@ import { baseVariables } from './derive.ts';
  */
 export function neededVariables(study: Study): readonly string[] {
   const needed = new Set<string>([study.response.variable]);
-  for (const candidate of study.candidates) {
-    for (const term of candidate.terms) {
-      for (const name of termVariables(term)) needed.add(name);
-    }
+  for (const term of declaredTerms(study)) {
+    for (const name of termVariables(term)) needed.add(name);
   }
   if (study.weights !== null) needed.add(study.weights);
   if (study.data.time !== null) needed.add(study.data.time);

@@ -9,6 +9,8 @@ type Criterion = StudyRecord['acceptance'][number];
 export interface Accepted {
   /** The chosen candidate as the record shows it; null where none was admitted. */
   readonly candidate: RecordCandidate | null;
+  /** Names of the families whose search found it. */
+  readonly families: readonly string[];
   readonly chosen: Chosen | null;
   readonly findings: readonly RecordFinding[];
   readonly predictions: readonly RecordPrediction[];
@@ -26,7 +28,7 @@ export function acceptanceOf(plans: readonly AcceptancePlan[], found: Accepted):
     switch (plan.criterion) {
       case 'chosen': {
         const value = found.candidate?.name ?? null;
-        const passed = value !== null && plan.names.includes(value);
+        const passed = value !== null && [value, ...found.families].some((name) => plan.names.includes(name));
         return { criterion: 'chosen', limit: plan.names.join(' or '), value, passed };
       }
       case 'sign': {

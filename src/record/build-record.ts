@@ -20,11 +20,13 @@ import type { Spread } from '../prepare/spread.ts';
 import type { Place, Problem } from '../problem.ts';
 import type { Choice } from '../select/choose.ts';
 import { coefficientFigures } from '../select/coefficients.ts';
+import type { FoundFamily } from '../select/search-families.ts';
 import { summarise } from '../select/summarise.ts';
 import type { Study } from '../study/study.ts';
 import { acceptanceOf } from './acceptance.ts';
 import { rowSummaries } from './chart-points.ts';
 import { type Bootstrapped, describeBootstrap } from './describe-bootstrap.ts';
+import { describeFamilies, modelsLookedAt, searchWarnings } from './describe-families.ts';
 import { describeModel } from './describe-model.ts';
 import {
   choiceWarnings,
@@ -51,6 +53,7 @@ export interface Run {
   readonly ranked: FittedAll;
   readonly findings: SelectionFindings;
   readonly choice: Choice;
+  readonly families: readonly FoundFamily[];
   readonly chosen: Chosen | null;
   readonly predicted: Predicted | null;
   /** Null where the study asks for no bootstrap, or the chosen model leaves nothing to draw. */
@@ -135,6 +138,9 @@ export function buildRecord(run: Run): StudyRecord {
       larger: candidates[row.larger]!.name,
     })),
     partial_f_omitted: choice.partialFOmitted,
+    ...(run.families.length === 0
+      ? {}
+      : { families: describeFamilies(run.families, study.selection, choice, candidates) }),
     selection: {
       rank_by: study.selection.rankBy,
       prefer_smaller_within: study.selection.preferSmallerWithin,
@@ -146,6 +152,9 @@ export function buildRecord(run: Run): StudyRecord {
       })),
       chosen: winner?.name ?? null,
       because: [choice.because, ...splitSentence(findings)].join(' '),
+      ...(run.families.length === 0
+        ? {}
+        : { models_looked_at: modelsLookedAt(study.candidates.length, run.families) }),
       ...describeSelection(findings, { study, design: run.design, candidates, positive }, estimated),
     },
     model:
@@ -155,6 +164,9 @@ export function buildRecord(run: Run): StudyRecord {
     prediction_total: predicted?.total ?? null,
     acceptance: acceptanceOf(study.acceptance, {
       candidate: winner,
+      families: run.families
+        .filter(({ models }) => models.some(({ candidate }) => candidate === winner?.name))
+        .map(({ plan }) => plan.name),
       chosen,
       findings: examination?.findings ?? [],
       predictions,
@@ -242,13 +254,22 @@ function newestDay(study: Study, sample: Sample): number | null {
   return column?.kind === 'date' ? column.values[sample.timeOrder!.at(-1)!]! : null;
 }
 
-function warningsOf({ problems, findings, fitted, chosen, study, predicted }: Run): StudyRecord['warnings'] {
+function warningsOf({
+  problems,
+  findings,
+  fitted,
+  chosen,
+  study,
+  predicted,
+  families,
+}: Run): StudyRecord['warnings'] {
   const warnings = problems
     .filter((problem) => problem.severity === 'warning')
     .map(({ place, message, hint }) => ({
       about: placeText(place),
       text: hint === undefined ? message : `${message} ${hint}`,
     }));
+  warnings.push(...searchWarnings(study.candidates.length, families));
   if (findings.trust !== null) warnings.push(...choiceWarnings(findings.trust));
   if (fitted.pressOmitted !== null)
     warnings.push({ about: 'PRESS', text: `PRESS was ${fitted.pressOmitted}.` });

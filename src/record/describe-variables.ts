@@ -4,6 +4,7 @@ import { isMissing } from '../prepare/is-missing.ts';
 import { termVariables } from '../prepare/needed-variables.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Spread } from '../prepare/spread.ts';
+import { declaredTerms } from '../study/declared-terms.ts';
 import type { Study } from '../study/study.ts';
 import type { RecordVariable } from './record.ts';
 
@@ -117,7 +118,7 @@ function levelRows(
 }
 
 function usesOf(study: Study): (name: string) => string[] {
-  const predictors = new Set(study.candidates.flatMap((candidate) => candidate.terms.flatMap(termVariables)));
+  const predictors = new Set(declaredTerms(study).flatMap(termVariables));
   const conditions = new Set(study.leaveOut.flatMap((rule) => [...namesIn(rule.where)]));
   const derivations = new Set(study.derive.flatMap((plan) => [...namesIn(plan.expression)]));
   return (name) => {

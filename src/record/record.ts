@@ -6,6 +6,7 @@ export type {
   RecordCandidate,
   RecordCoefficient,
   RecordExamination,
+  RecordFamily,
   RecordFinding,
   RecordModel,
   RecordPrediction,

@@ -304,6 +304,10 @@ export interface StudyRecord {
    */
   partial_f_omitted: string | null;
   /**
+   * What the searches of candidate families found, in the order declared; there only where the study declares families. The models found are among the candidates.
+   */
+  families?: RecordFamily[];
+  /**
    * The declared rule and what it chose.
    */
   selection: {
@@ -366,6 +370,10 @@ export interface StudyRecord {
      * Why that one, or none, in sentences.
      */
     because: string;
+    /**
+     * How many models the choice was made among, counting every subset that a search covers; there only where the study declares families. P-values and intervals of the chosen model do not allow for them.
+     */
+    models_looked_at?: number;
     /**
      * Whether the fewest coefficients within one standard error of the best cross-validated error win; absent where not.
      */
@@ -1215,6 +1223,156 @@ export interface RecordCoefficient {
    * Variance inflation factor; null for the intercept, and in a model with fewer than two other columns.
    */
   vif: number | null;
+}
+/**
+ * One family of candidates and what its search found.
+ */
+export interface RecordFamily {
+  /**
+   * Its name.
+   */
+  name: string;
+  /**
+   * All subsets, backward elimination or forward selection.
+   */
+  kind: 'subsets' | 'backward' | 'forward';
+  /**
+   * Its terms, those that every model has first.
+   *
+   * Items: One term.
+   */
+  terms: {
+    /**
+     * Its name.
+     */
+    name: string;
+    /**
+     * Whether every model has it.
+     */
+    always: boolean;
+  }[];
+  /**
+   * Whether models have an interaction or a higher power only with all that it contains.
+   */
+  hierarchy: boolean;
+  /**
+   * Fewest terms of a subset; null for elimination and selection.
+   */
+  at_least: number | null;
+  /**
+   * Most terms of a subset; null for elimination and selection.
+   */
+  at_most: number | null;
+  /**
+   * Models kept for each number of coefficients; null for elimination and selection.
+   */
+  keep: number | null;
+  /**
+   * The p-value above which a term leaves; null where none does.
+   */
+  leave_at: number | null;
+  /**
+   * The p-value at or below which a term enters; null where none does.
+   */
+  enter_at: number | null;
+  /**
+   * Models that the search covers: every subset within the limits, or those fitted on the way.
+   */
+  searched: number;
+  /**
+   * Whether they were counted; otherwise the number is an upper bound.
+   */
+  searched_exactly: boolean;
+  /**
+   * Places of the search that were looked at; the rest of what it covers was ruled out by bounds.
+   */
+  visited: number;
+  /**
+   * What the search is exact for: the best of every size, or only those that could be chosen; null for elimination and selection, which promise neither.
+   */
+  exact_for: 'every size' | 'the choice' | null;
+  /**
+   * Names of the candidates that the search found, by number of coefficients and then by residual sum of squares. One with the columns of an earlier candidate goes by that one's name.
+   */
+  candidates: string[];
+  /**
+   * How the best value falls or rises with size: the model with the least residual sum of squares of each number of coefficients, among those that keep the rules of admission where there is one. Empty for elimination and selection.
+   *
+   * Items: One size.
+   */
+  best_by_size: {
+    /**
+     * Number of coefficients, the intercept included.
+     */
+    coefficient_count: number;
+    /**
+     * Name of the candidate.
+     */
+    candidate: string;
+    /**
+     * Its value of the criterion that ranks; null where it is not defined.
+     */
+    value: number | null;
+    /**
+     * Whether it was admitted.
+     */
+    admitted: boolean;
+    /**
+     * Whether it is known to be the best of its size; false where the search left the size aside because none of it could be chosen.
+     */
+    settled: boolean;
+    /**
+     * Name of the best model of this size that breaks a rule of admission, where it fits better than this one; null where there is none.
+     */
+    better_refused: string | null;
+  }[];
+  /**
+   * The steps of elimination or selection, in order; empty for subsets.
+   *
+   * Items: One step.
+   */
+  path: {
+    /**
+     * From 1.
+     */
+    step: number;
+    /**
+     * Whether the term enters or leaves.
+     */
+    action: 'enters' | 'leaves';
+    /**
+     * Name of the term.
+     */
+    term: string;
+    /**
+     * Partial F of the term in the model that has it; null where it has no column beside the others.
+     */
+    statistic: number | null;
+    /**
+     * Degrees of freedom of the numerator; null with the statistic.
+     */
+    df1: number | null;
+    /**
+     * Degrees of freedom of the denominator; null with the statistic.
+     */
+    df2: number | null;
+    /**
+     * Upper tail probability of the statistic; null with it.
+     */
+    p_value: number | null;
+  }[];
+  /**
+   * Why the path ended there, as a sentence; null for subsets.
+   */
+  ended_because: string | null;
+  /**
+   * Terms that no model has, because in these rows they say nothing beside the terms that they need.
+   */
+  idle_terms: string[];
+  /**
+   * What the search does not do, as a sentence; null where there is nothing to say.
+   */
+  note: string | null;
 }
 /**
  * The chosen model, complete enough to predict from without the data.

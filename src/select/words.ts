@@ -33,6 +33,11 @@ export function significant(value: number, digits: number): string {
   return dressed(Number(`${mantissa}e${exponent}`).toFixed(Math.max(0, digits - 1 - exponent)));
 }
 
+/** A count in a sentence: whole up to a billion, then as a power of ten. */
+export function countText(count: number): string {
+  return count < 1e9 ? wholeNumber(count) : significant(count, 2);
+}
+
 /** A declared limit as it was written, with a true minus sign. */
 export function limitText(limit: number): string {
   return String(limit).replace('-', '−');

@@ -1,9 +1,10 @@
 import { isoDays } from '../expression/iso-date.ts';
+import { isFoundName } from './family-keys.ts';
 import { didYouMean, type Names } from './names.ts';
 import { type Path, quote, showPath } from './path.ts';
 import { entriesInOrder, fault, type Loose, type Reading } from './reading.ts';
 import { checkRange } from './resolve-variables.ts';
-import type { AcceptanceFigure, AcceptancePlan } from './study.ts';
+import type { AcceptanceFigure, AcceptancePlan, FamilyPlan } from './study.ts';
 import type { LimitsInFile } from './study-file.generated.ts';
 
 interface Reach {
@@ -33,7 +34,9 @@ const ANY: Reach = { least: null, most: null };
 
 /** What acceptance needs to know of the rest of the study. */
 export interface AcceptanceNeeds {
+  /** Names of candidates and of families. */
   readonly candidates: readonly string[];
+  readonly families: readonly FamilyPlan[];
   readonly names: Names;
   readonly time: string | null;
 }
@@ -48,7 +51,7 @@ function plansOf(reading: Reading, criterion: string, needs: AcceptanceNeeds): r
   const path = ['acceptance', criterion];
   switch (criterion) {
     case 'chosen': {
-      checkChosen(reading, needs.candidates);
+      checkChosen(reading, needs);
       const names = written.chosen?.filter((name) => name !== undefined) ?? [];
       return names.length === 0 ? [] : [{ criterion, names }];
     }
@@ -109,10 +112,11 @@ function checkPredicts(reading: Reading, figure: AcceptanceFigure, path: Path): 
   fault(reading, 'limit_nonsense', path, message, 'State rows under predict.');
 }
 
-function checkChosen(reading: Reading, candidates: readonly string[]): void {
+function checkChosen(reading: Reading, { candidates, families }: AcceptanceNeeds): void {
   const chosen = reading.file.acceptance?.chosen;
   chosen?.forEach((name, index) => {
     if (name === undefined || candidates.includes(name)) return;
+    if (families.some((family) => isFoundName(family, name))) return;
     const path = ['acceptance', 'chosen', index];
     const message = `${showPath(path)} names ${quote(name)}, which is not a candidate.`;
     fault(reading, 'name_unknown', path, message, didYouMean(name, candidates));

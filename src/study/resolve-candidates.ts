@@ -1,14 +1,21 @@
+import { isFamily, isFoundName } from './family-keys.ts';
 import type { Names } from './names.ts';
 import { type Path, quote, showPath } from './path.ts';
 import { fault, type Loose, type Reading, warning } from './reading.ts';
+import { resolveFamily } from './resolve-families.ts';
 import { resolveScale } from './resolve-scale.ts';
 import { resolveTerm, termKey, termPowers, termVariables } from './resolve-terms.ts';
-import type { CandidatePlan, ResponsePlan, TermPlan } from './study.ts';
+import type { CandidatePlan, FamilyPlan, ResponsePlan, TermPlan } from './study.ts';
 import type { CandidateInFile } from './study-file.generated.ts';
 import { warnOfMissingParts } from './warn-of-missing-parts.ts';
 
+export interface ResolvedCandidates {
+  readonly candidates: readonly CandidatePlan[];
+  readonly families: readonly FamilyPlan[];
+}
+
 /**
- * The candidates. `response` is null where it could not be resolved; `derivedFrom` gives the declared variables
+ * The candidates, named ones and families. `response` is null where it could not be resolved; `derivedFrom` gives the declared variables
  * that a variable rests on.
  */
 export function resolveCandidates(
@@ -16,13 +23,22 @@ export function resolveCandidates(
   names: Names,
   response: ResponsePlan | null,
   derivedFrom: (name: string) => ReadonlySet<string>,
-): readonly CandidatePlan[] {
+): ResolvedCandidates {
   const plans: CandidatePlan[] = [];
+  const families: FamilyPlan[] = [];
   const byName = new Map<string, number>();
   const byContent = new Map<string, string>();
   reading.file.candidates?.forEach((written, index) => {
     if (written === undefined) return;
     const path = ['candidates', index];
+    if (isFamily(written)) {
+      checkName(written.name, index);
+      const family = resolveFamily(reading, names, written, index, response, (term, at) =>
+        checkResponse(reading, term, at, response, derivedFrom),
+      );
+      if (family !== null) families.push(family);
+      return;
+    }
     const terms = resolveTerms(reading, names, written, [...path, 'terms']);
     for (const [at, term] of terms.entries()) {
       if (term !== null) checkResponse(reading, term, [...path, 'terms', at], response, derivedFrom);
@@ -30,11 +46,7 @@ export function resolveCandidates(
     if (!terms.includes(null)) warnOfMissingParts(reading, names, terms, [...path, 'terms']);
     const name = written.name;
     if (name === undefined) return;
-    const earlier = byName.get(name);
-    if (earlier !== undefined) {
-      const message = `${showPath([...path, 'name'])} is ${quote(name)}, the name of candidates[${earlier}] already.`;
-      fault(reading, 'candidate_twice', [...path, 'name'], message, 'Give each candidate a name of its own.');
-    } else byName.set(name, index);
+    const isTwice = checkName(name, index);
 
     const sound = terms.filter((term) => term !== null);
     if (sound.length < terms.length || written.terms === undefined) return;
@@ -46,13 +58,33 @@ export function resolveCandidates(
     }
     const content = JSON.stringify([sound.map(termKey).sort(), scale, intercept]);
     const same = byContent.get(content);
-    if (same !== undefined && earlier === undefined) {
+    if (same !== undefined && !isTwice) {
       const message = `${showPath(path)} has the same terms, scale and intercept as ${quote(same)}.`;
       fault(reading, 'candidate_twice', path, message, 'Remove one of the two.');
     } else byContent.set(content, name);
-    plans.push({ name, terms: sound, scale, intercept });
+    plans.push({ name, terms: sound, scale, intercept, position: index });
   });
-  return plans;
+  for (const { name, position = 0 } of plans) {
+    const family = families.find((each) => isFoundName(each, name));
+    if (family === undefined) continue;
+    const path = ['candidates', position, 'name'];
+    const message = `${showPath(path)} is ${quote(name)}, as a model found for ${quote(family.name)} could be called.`;
+    fault(reading, 'candidate_twice', path, message, 'Give it another name.');
+  }
+  return { candidates: plans, families };
+
+  function checkName(name: string | undefined, index: number): boolean {
+    if (name === undefined) return false;
+    const earlier = byName.get(name);
+    if (earlier === undefined) {
+      byName.set(name, index);
+      return false;
+    }
+    const path = ['candidates', index, 'name'];
+    const message = `${showPath(path)} is ${quote(name)}, the name of candidates[${earlier}] already.`;
+    fault(reading, 'candidate_twice', path, message, 'Give each candidate a name of its own.');
+    return true;
+  }
 }
 
 function resolveTerms(

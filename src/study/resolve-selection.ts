@@ -3,7 +3,7 @@ import { listed } from './path.ts';
 import { fault, type Reading } from './reading.ts';
 import { scaleText } from './resolve-scale.ts';
 import { resolveValidation } from './resolve-validation.ts';
-import type { AdmitPlan, CandidatePlan, RankBy, SelectionPlan } from './study.ts';
+import type { AdmitPlan, RankBy, Scale, SelectionPlan } from './study.ts';
 import { STUDY_DEFAULTS } from './study-defaults.generated.ts';
 
 /** Criteria in units of the fitted response: they say nothing across response scales. */
@@ -12,11 +12,11 @@ const ONE_SCALE_ONLY: readonly RankBy[] = ['adjusted_r_squared', 'mallows_cp', '
 export function resolveSelection(
   reading: Reading,
   names: Names,
-  candidates: readonly CandidatePlan[],
+  scalesOfAll: readonly Scale[],
 ): SelectionPlan {
   const written = reading.file.selection;
   const rankBy = written?.rank_by ?? STUDY_DEFAULTS['selection.rank_by'];
-  const scales = [...new Set(candidates.map(({ scale }) => scaleText(scale)))];
+  const scales = [...new Set(scalesOfAll.map(scaleText))];
   if (ONE_SCALE_ONLY.includes(rankBy) && scales.length > 1) {
     const message = `selection.rank_by is ${rankBy}, which cannot rank candidates across response scales (${listed(scales, 'and')}).`;
     const hint = 'Rank by aic, aicc, bic or cross_validation, or give all candidates one scale.';

@@ -1,5 +1,7 @@
 import { isAbsolute } from 'node:path';
 import { namesIn } from '../expression/names-in.ts';
+import { declaredScales, declaredTerms } from './declared-terms.ts';
+import { writtenTerms } from './family-keys.ts';
 import { type Names, TYPE_WORDS } from './names.ts';
 import { type Path, quote, showPath } from './path.ts';
 import { entriesInOrder, fault, type Reading, warning } from './reading.ts';
@@ -47,12 +49,13 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
   const roles = resolveRowRoles(reading, names);
   const response = resolveResponse(reading, names);
   const weights = resolveWeights(reading, names);
-  const candidates = resolveCandidates(reading, names, response, derivedFrom);
-  const inTerms = [...new Set(candidates.flatMap(({ terms }) => terms.flatMap(termVariables)))];
+  const resolved = resolveCandidates(reading, names, response, derivedFrom);
+  const { candidates, families } = resolved;
+  const inTerms = [...new Set(declaredTerms(resolved).flatMap(termVariables))];
 
   const named = file.candidates?.flatMap((candidate) => candidate?.name ?? []) ?? [];
-  const selection = resolveSelection(reading, names, candidates);
-  const acceptance = resolveAcceptance(reading, { candidates: named, names, time: roles.time });
+  const selection = resolveSelection(reading, names, declaredScales(resolved));
+  const acceptance = resolveAcceptance(reading, { candidates: named, families, names, time: roles.time });
   const examination = resolveExamination(reading, names);
   const rests = new Set(inTerms.flatMap((name) => [...derivedFrom(name)]));
   const inference = resolveInference(reading, names, roles.time, inTerms);
@@ -61,7 +64,7 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
     names,
     needed: variables.map(({ name }) => name).filter((name) => rests.has(name)),
     allowed: weights === null ? new Set() : derivedFrom(weights),
-    unsure: errors > 0 || candidates.length < (file.candidates?.length ?? 0),
+    unsure: errors > 0 || candidates.length + families.length < (file.candidates?.length ?? 0),
     derivedFrom,
   });
   const { holdOut } = selection;
@@ -89,6 +92,7 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
     response,
     weights,
     candidates,
+    families,
     selection,
     inference,
     examination,
@@ -144,7 +148,7 @@ function usedNames(
     file.selection?.validation?.group,
     file.selection?.honest_error?.group,
     file.selection?.stability?.group,
-    ...(file.candidates ?? []).map((candidate) => candidate?.terms),
+    ...(file.candidates ?? []).map((candidate) => candidate && writtenTerms(candidate)),
   ]) {
     start.push(...textsIn(value));
   }

@@ -1,3 +1,4 @@
+import { isFamily } from './family-keys.ts';
 import type { Names } from './names.ts';
 import { lookUpOfType, TYPE_WORDS } from './names.ts';
 import { type Path, showPath } from './path.ts';
@@ -227,5 +228,5 @@ function checkTogether(reading: Reading, plans: ValidationPlans, rankBy: RankBy,
 /** Whether more than one model can come out: several candidates, or one that is a family. */
 function isChoice(reading: Reading): boolean {
   const candidates = reading.file.candidates ?? [];
-  return candidates.length > 1 || candidates.some((one) => one !== undefined && one.terms === undefined);
+  return candidates.length > 1 || candidates.some((one) => one !== undefined && isFamily(one));
 }

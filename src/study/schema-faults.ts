@@ -160,6 +160,8 @@ export const EXPECTED: Readonly<Record<string, string>> = {
   box_cox: 'natural, log, sqrt, reciprocal or { box_cox: … }',
   'clustered hac': 'classical, hc0, hc1, hc2, hc3, hc4, { clustered_by: … } or { hac_lags: … }',
   'single_hypothesis joint_hypothesis': '{ name: …, combination: …, equals: … } or { name: …, all_of: […] }',
+  'candidate subset_family backward_family forward_family':
+    '{ terms: […], name: … }, { subsets_of: […], name: … }, { eliminate_from: […], name: …, leave_at: … } or { add_from: […], name: …, enter_at: … }',
   'interaction polynomial power bend spline':
     "a variable's name or one of { interaction: […] }, { polynomial: …, degree: … }, { power: …, to: … }, { bend: …, at: … }, { spline: …, knots: […] }",
   'polynomial power bend spline':

@@ -119,11 +119,11 @@ export interface StudyFile {
    */
   weights?: string | null;
   /**
-   * The models to be tried. All are fitted on the same rows.
+   * The models to be tried, each named or found by a search of a family. All are fitted on the same rows.
    *
    * @minItems 1
    */
-  candidates: CandidateInFile[];
+  candidates: (CandidateInFile | SubsetFamilyInFile | BackwardFamilyInFile | ForwardFamilyInFile)[];
   /**
    * The rule, declared beforehand, by which one candidate is chosen.
    */
@@ -710,6 +710,118 @@ export interface SplineInFile {
    * @maxItems 50
    */
   knots: number[];
+}
+/**
+ * All subsets of a list of terms. They are searched exactly; the best of each number of coefficients become candidates.
+ */
+export interface SubsetFamilyInFile {
+  /**
+   * A name of its own, from which those of the models found are made: "Loads 4a" is the best with 4 coefficients, "Loads 4b" the next.
+   */
+  name: string;
+  /**
+   * The terms to choose from. One of several columns is in or out as a whole.
+   *
+   * @minItems 1
+   */
+  subsets_of: TermInFile[];
+  /**
+   * Terms that every model has.
+   */
+  always?: TermInFile[];
+  /**
+   * The fewest terms of a model, those under always counted. Null: no limit.
+   */
+  at_least?: number | null;
+  /**
+   * The most terms of a model, those under always counted. Null: no limit.
+   */
+  at_most?: number | null;
+  /**
+   * How many models become candidates for each number of coefficients.
+   */
+  keep?: number;
+  /**
+   * Whether a model has an interaction or a higher power only with all that it contains.
+   */
+  hierarchy?: boolean;
+  scale?: ScaleInFile;
+  /**
+   * Whether the models have an intercept.
+   */
+  intercept?: boolean;
+}
+/**
+ * Backward elimination: from all terms, the one with the largest p-value of its partial F leaves, one after the other. What is left becomes a candidate.
+ */
+export interface BackwardFamilyInFile {
+  /**
+   * A name of its own, by which reports and criteria call the model found.
+   */
+  name: string;
+  /**
+   * The terms to begin with. One of several columns leaves as a whole.
+   *
+   * @minItems 1
+   */
+  eliminate_from: TermInFile[];
+  /**
+   * Terms that every model has.
+   */
+  always?: TermInFile[];
+  /**
+   * The p-value above which a term leaves.
+   */
+  leave_at: number;
+  /**
+   * The p-value at or below which a term that has left returns; no more than leave_at. Left out: none returns.
+   */
+  enter_at?: number;
+  /**
+   * Whether a model has an interaction or a higher power only with all that it contains.
+   */
+  hierarchy?: boolean;
+  scale?: ScaleInFile;
+  /**
+   * Whether the models have an intercept.
+   */
+  intercept?: boolean;
+}
+/**
+ * Forward selection: from the terms under always, the one with the smallest p-value of its partial F enters, one after the other. What is reached becomes a candidate.
+ */
+export interface ForwardFamilyInFile {
+  /**
+   * A name of its own, by which reports and criteria call the model found.
+   */
+  name: string;
+  /**
+   * The terms to choose from. One of several columns enters as a whole.
+   *
+   * @minItems 1
+   */
+  add_from: TermInFile[];
+  /**
+   * Terms that every model has.
+   */
+  always?: TermInFile[];
+  /**
+   * The p-value at or below which a term enters.
+   */
+  enter_at: number;
+  /**
+   * The p-value above which a term that has entered leaves again; at least enter_at. Left out: none leaves.
+   */
+  leave_at?: number;
+  /**
+   * Whether a model has an interaction or a higher power only with all that it contains.
+   */
+  hierarchy?: boolean;
+  scale?: ScaleInFile;
+  /**
+   * Whether the models have an intercept.
+   */
+  intercept?: boolean;
 }
 /**
  * Rows of one cluster may have errors that go together; clusters are independent of each other.

@@ -20,7 +20,10 @@ export interface Study {
   readonly response: ResponsePlan;
   /** Name of the variable of weights, or null. */
   readonly weights: string | null;
+  /** The named candidates, in order. */
   readonly candidates: readonly CandidatePlan[];
+  /** Families of candidates that a search is to find, in order. */
+  readonly families: readonly FamilyPlan[];
   readonly selection: SelectionPlan;
   readonly inference: InferencePlan;
   readonly examination: ExaminationPlan;
@@ -141,7 +144,54 @@ export interface CandidatePlan {
   /** The candidate's own response scale where it declares one, else the study's. */
   readonly scale: Scale;
   readonly intercept: boolean;
+  /** Where it stands in the study file's list of candidates; left out: where it stands among the named ones. */
+  readonly position?: number;
 }
+
+export interface FamilyTermPlan {
+  readonly term: TermPlan;
+  /** Every model of the family has it. */
+  readonly always: boolean;
+  /**
+   * Terms of the family, by index, that a model must have with this one: all that it contains (no interaction or
+   * higher power without its parts). Empty where the study does not ask for the hierarchy.
+   */
+  readonly needs: readonly number[];
+  /** Its path in the study file. */
+  readonly path: readonly (string | number)[];
+}
+
+interface AnyFamilyPlan {
+  readonly name: string;
+  /** Those that are always in first. No two have a column in common. */
+  readonly terms: readonly FamilyTermPlan[];
+  readonly hierarchy: boolean;
+  readonly scale: Scale;
+  readonly intercept: boolean;
+  /** Where it stands in the study file's list of candidates. */
+  readonly position: number;
+}
+
+/** All subsets of the terms, of which the best of each number of coefficients become candidates. */
+export interface SubsetFamilyPlan extends AnyFamilyPlan {
+  readonly kind: 'subsets';
+  /** Terms of a model, those that are always in counted. */
+  readonly atLeast: number;
+  readonly atMost: number;
+  /** How many models become candidates for each number of coefficients. */
+  readonly keep: number;
+}
+
+/** Elimination from all terms, or selection from those that are always in, by p-values of partial F. */
+export interface StepFamilyPlan extends AnyFamilyPlan {
+  readonly kind: 'backward' | 'forward';
+  /** A term whose p-value is above this leaves; null: none does. */
+  readonly leaveAt: number | null;
+  /** A term whose p-value is at or below this enters; null: none does. */
+  readonly enterAt: number | null;
+}
+
+export type FamilyPlan = SubsetFamilyPlan | StepFamilyPlan;
 
 export type RankBy =
   | 'adjusted_r_squared'

@@ -1,7 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bestSubsets, type SubsetSearch, type SubsetsFound } from '../../src/engine/best-subsets.ts';
+import { bestSubsets, type SubsetsFound } from '../../src/engine/best-subsets.ts';
 import { factorExtended, factorRows } from '../../src/engine/factor.ts';
+import type { SubsetSearch } from '../../src/engine/subset-search.ts';
 import { allSubsets, bestResiduals, type PlainGroup, type PlainSubset } from './all-subsets.ts';
 import { testModel, variable } from './models.ts';
 

@@ -35,6 +35,7 @@ export function testModel(
   const design: Design = {
     columns: union,
     responses: scales.map((scale) => ({ variable: 'y', scale })),
+    families: [],
     candidates: candidates.map(
       (own, i): CandidateModel => ({
         name: `candidate ${i + 1}`,

@@ -53,6 +53,7 @@ export function makeStudy(columns: readonly Column[], written: Written): Study {
     })),
     response: { variable: written.response, scale: natural },
     weights: written.weights ?? null,
+    families: [],
     candidates: written.candidates.map(
       (candidate, index): CandidatePlan => ({
         name: `Candidate ${index + 1}`,

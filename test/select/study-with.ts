@@ -34,6 +34,7 @@ export function studyWith(change: SelectionChange): Study {
     response: { variable: 'y', scale: { kind: 'natural' } },
     weights: null,
     candidates: [],
+    families: [],
     selection: {
       rankBy: 'aicc',
       preferSmallerWithin: 0,

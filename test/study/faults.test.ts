@@ -612,6 +612,12 @@ const CASES: readonly Case[] = [
     code: 'candidate_twice',
     says: ['candidates[1] has the same terms'],
   },
+  {
+    from: '    terms: [x]',
+    to: '    subsets_of: [x, «{ interaction: [x, k] }»]',
+    code: 'hierarchy_impossible',
+    says: ['candidates[0].subsets_of[1] contains k, which is no term of this family'],
+  },
   // Criteria
   ...(['adjusted_r_squared', 'mallows_cp', 'press', 'partial_f'] as const).map(
     (criterion): Case => ({
@@ -1202,7 +1208,13 @@ describe('faults at the edges', () => {
 describe('the codes of the study group', () => {
   it('are each provoked here or in read-study.test.ts', () => {
     const here = new Set([...CASES.map(({ code }) => code), 'name_unused', 'term_without_parts']);
-    const elsewhere = ['study_unreadable', 'study_not_utf8', 'parameter_unknown', 'parameter_value'];
+    const elsewhere = [
+      'study_unreadable',
+      'study_not_utf8',
+      'parameter_unknown',
+      'parameter_value',
+      'subsets_too_many',
+    ];
     expect(STUDY_CODES.filter((code) => !here.has(code) && !elsewhere.includes(code))).toEqual([]);
   });
 });

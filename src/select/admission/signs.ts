@@ -39,6 +39,8 @@ export function checkSignNames(study: Study, { fits, columnNames }: FitContext, 
     const name = path.at(-1)!;
     const rule = path.slice(0, -1).join('.');
     if (fits.some((fit) => columnNamed(name, fit, columnNames) !== null)) continue;
+    // A coefficient of a family of which no model found has it.
+    if (study.families.length > 0 && columnNames.includes(name)) continue;
     const term = fits.flatMap((fit) => fit.candidate.terms).find((each) => each.name === name);
     const place = study.placeOf(path);
     if (term !== undefined) {
