@@ -25,7 +25,7 @@ export function checkMagnitudes(
   report: Report,
 ): boolean {
   let sound = true;
-  const check = (name: string, variable: string, largest: Largest): void => {
+  const check = (name: string, variable: string, largest: Extreme): void => {
     const fault = faultOf(largest);
     if (fault === null) return;
     sound = false;
@@ -45,7 +45,12 @@ export function checkMagnitudes(
     check(`${response} on the ${scaleName(scale)} scale`, response, largestOf(rows.responses[k]!));
   });
   if (study.weights !== null) {
-    check(`The weight ${study.weights}`, study.weights, largestOf(numbersOf(sample, study.weights)));
+    // A weight that is next to nothing beside the others makes nothing of the columns that only its rows have.
+    const weights = numbersOf(sample, study.weights);
+    const largest = largestOf(weights);
+    const smallest = smallestOf(weights);
+    const name = `The weight ${study.weights}`;
+    check(name, study.weights, faultOf(largest) === null && faultOf(smallest) !== null ? smallest : largest);
   }
   design.columns.forEach(({ name, pieces }, column) => {
     if (pieces.every((piece) => piece.kind === 'level')) return;
@@ -59,13 +64,13 @@ export function checkMagnitudes(
   return sound;
 }
 
-/** The largest size in a column and where it is first; the first that is not a finite number, where one is. */
-interface Largest {
+/** A size in a column, and the row where it is. */
+interface Extreme {
   readonly value: number;
   readonly row: number;
 }
 
-function faultOf({ value }: Largest): { readonly what: string; readonly hint: string } | null {
+function faultOf({ value }: Extreme): { readonly what: string; readonly hint: string } | null {
   const size = Math.abs(value);
   if (!Number.isFinite(value)) {
     return {
@@ -79,12 +84,13 @@ function faultOf({ value }: Largest): { readonly what: string; readonly hint: st
     what:
       size > LARGEST
         ? `is about ${shown} there, too large for its squares to be computed with`
-        : `is nowhere larger than about ${shown}, too small for its squares to be computed with`,
+        : `is about ${shown} there, too small for its squares to be computed with`,
     hint: `Bring it into another unit by a derived variable: between ${SMALLEST} and ${LARGEST} all is well.`,
   };
 }
 
-function largestOf(values: Float64Array): Largest {
+/** The largest size and where it is first; the first that is not a finite number, where one is. */
+function largestOf(values: Float64Array): Extreme {
   let row = 0;
   let largest = 0;
   for (let i = 0; i < values.length; i++) {
@@ -98,12 +104,19 @@ function largestOf(values: Float64Array): Largest {
   return { value: values[row]!, row };
 }
 
+/** Of weights, which are above 0. */
+function smallestOf(values: Float64Array): Extreme {
+  let row = 0;
+  for (let i = 1; i < values.length; i++) if (values[i]! < values[row]!) row = i;
+  return { value: values[row]!, row };
+}
+
 const BLOCK = 1024;
 
 /** Of a column that is computed; without its weights and its power of two. */
-function largestOfColumn(column: number, rows: DesignRows): Largest {
+function largestOfColumn(column: number, rows: DesignRows): Extreme {
   const values = new Float64Array(BLOCK);
-  let found: Largest = { value: 0, row: 0 };
+  let found: Extreme = { value: 0, row: 0 };
   for (let from = 0; from < rows.rowCount; from += BLOCK) {
     const count = Math.min(BLOCK, rows.rowCount - from);
     rows.fill([column], from, from + count, BLOCK, values, null);

@@ -57,14 +57,18 @@ export function designRows(
   const rootWeights = weights === null ? null : numbersOf(source, weights).map(Math.sqrt);
   const bounds = boundCache(source);
   const weightBound = rootWeights === null ? 1 : largestSize(rootWeights);
-  const scales = Float64Array.from([
-    ...columns.map((column) => powerOfTwoFor(bounds(column) * weightBound)),
-    ...responses.map((values) => powerOfTwoFor(largestSize(values) * weightBound)),
-  ]);
   const writers = [
     ...columns.map((column) => columnWriter(column, source)),
     ...responses.map((values) => copyWriter(values)),
   ];
+  const scales = Float64Array.from([
+    ...columns.map((column, j) => {
+      // A bound may be far from what the rows hold, and only a bound: an extreme one is looked into.
+      if (powerOfTwoFor(bounds(column) * weightBound) === 1) return 1;
+      return powerOfTwoFor(largestWritten(writers[j]!, n) * weightBound);
+    }),
+    ...responses.map((values) => powerOfTwoFor(largestSize(values) * weightBound)),
+  ]);
 
   return {
     rowCount: n,
@@ -274,6 +278,17 @@ function largestSize(values: Float64Array): number {
   return largest;
 }
 
+function largestWritten(write: Writer, rowCount: number): number {
+  const block = new Float64Array(1024);
+  let largest = 0;
+  for (let from = 0; from < rowCount; from += block.length) {
+    const to = Math.min(rowCount, from + block.length);
+    write(from, to, block, null, 0);
+    largest = Math.max(largest, largestSize(block.subarray(0, to - from)));
+  }
+  return largest;
+}
+
 /** An upper bound of a column's size, from the largest sizes of its variables. */
 function boundCache(source: DesignSource): (column: DesignColumn) => number {
   const sizes = new Map<string, number>();
@@ -302,8 +317,9 @@ function boundCache(source: DesignSource): (column: DesignColumn) => number {
   return (column) => column.pieces.reduce((bound, piece) => bound * boundOf(piece), 1);
 }
 
-/** 1 for ordinary magnitudes, else the power of two that brings the bound near 1. */
+/** 1 for ordinary magnitudes and those that are none, else the power of two that brings the bound near 1. */
 function powerOfTwoFor(bound: number): number {
   if (!(bound > 0) || !Number.isFinite(bound) || (bound < 1e100 && bound > 1e-100)) return 1;
-  return 2 ** -Math.round(Math.log2(bound));
+  // 2¹⁰⁷⁴, for the smallest number of all, cannot be held.
+  return 2 ** Math.min(1000, -Math.round(Math.log2(bound)));
 }

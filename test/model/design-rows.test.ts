@@ -64,6 +64,22 @@ describe('design columns', () => {
     expect(valuesOf([], [x, number('w', [4, 9, 0.25])], 'w')).toEqual([2, 3, 0.5]);
   });
 
+  test('an extreme bound is looked into: only what the rows hold is scaled, and nothing becomes infinite', () => {
+    const scaleOf = (pieces: Piece[], values: number[]) =>
+      designRows(
+        [{ name: '', pieces, unit: null }],
+        { rowCount: values.length, columns: new Map([['x', number('x', values)]]) },
+        [],
+        null,
+      ).scales[0]!;
+    // 0 where x is far below the knots, however large the square of its size.
+    expect(scaleOf([{ kind: 'spline', variable: 'x', knots: [-5, 0, 10], index: 1 }], [3, -2e60])).toBe(1);
+    expect(Math.log2(scaleOf([{ kind: 'variable', variable: 'x' }], [3, 1e200]))).toBe(-664);
+    const smallest = scaleOf([{ kind: 'power', variable: 'x', to: 3 }], [1e-108, 0]);
+    expect(smallest).toBeGreaterThan(1e300);
+    expect(smallest).toBeLessThan(Number.POSITIVE_INFINITY);
+  });
+
   test('powers and products keep what a double would round away', () => {
     const third = number('x', [1 / 3, 0.1, 7]);
     const column: DesignColumn = { name: '', pieces: [{ kind: 'power', variable: 'x', to: 2 }], unit: null };

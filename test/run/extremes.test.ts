@@ -236,9 +236,9 @@ describe('very large and very small numbers', () => {
     ['y', 1e200, 'y is about 3.45e+201 there, too large for its squares to be computed with.'],
     ['x', 1e200, 'x is about 1.6e+201 there, too large for its squares to be computed with.'],
     ['z', 1e200, 'z is about 5e+200 there, too large for its squares to be computed with.'],
-    ['y', 1e-200, 'y is nowhere larger than about 3.45e-199, too small for its squares to be computed with.'],
-    ['x', 1e-200, 'x is nowhere larger than about 1.6e-199, too small for its squares to be computed with.'],
-    ['x', 1e-310, 'x is nowhere larger than about 1.6e-309, too small for its squares to be computed with.'],
+    ['y', 1e-200, 'y is about 3.45e-199 there, too small for its squares to be computed with.'],
+    ['x', 1e-200, 'x is about 1.6e-199 there, too small for its squares to be computed with.'],
+    ['x', 1e-310, 'x is about 1.6e-309 there, too small for its squares to be computed with.'],
   ] as const)('%s times %s', async (which, factor, message) => {
     const outcome = await run(study(), scaled(which, factor));
     expect(outcome.status).toBe(2);
@@ -337,6 +337,8 @@ describe('very large and very small numbers', () => {
       );
       expect([status, marks]).toEqual([2, ['value_not_finite row 2 w']]);
     }
+    const { status, marks } = await run(study({}, 'weights: w\n'), dataWith(5, { w: '1e-200' }));
+    expect([status, marks]).toEqual([2, ['value_not_finite row 7 w']]);
   });
 
   test('an offset that hides the variation of all but the last digits', async () => {

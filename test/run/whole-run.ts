@@ -82,11 +82,11 @@ async function runIn(home: string, out: string, inputs: string): Promise<Outcome
     ...printed,
     results,
     faults: [
-      ...problems.flatMap((problem) => problemFaults(problem, home)),
+      ...problems.flatMap((problem) => problemFaults(problem, home, inputs)),
       ...(record === null ? [] : recordFaultsOf(record)),
       ...statusFaults(status, record, problems, printed.err),
       ...resultFaults(status, record, results, home),
-      ...[...(status < 2 ? results : [])].flatMap(([name, text]) => strayWords(name, text, inputs)),
+      ...[...(status < 2 ? results : [])].flatMap(([name, text]) => wordFaults(name, text, inputs)),
     ],
   };
 }
@@ -113,12 +113,19 @@ export function mark({ code, severity, place }: Problem, home: string): string {
   return severity === 'warning' ? `(${text})` : text;
 }
 
+/** What a value that is none becomes when it is written; no word of ours, but perhaps of the input. */
+function strayWord(text: string, inputs: string): string | undefined {
+  return ['NaN', 'Infinity', 'undefined', '[object '].find(
+    (word) => text.includes(word) && !inputs.includes(word),
+  );
+}
+
 /** A problem is said in whole sentences and points to something that is there. */
-function problemFaults({ code, place, message, hint }: Problem, home: string): string[] {
+function problemFaults({ code, place, message, hint }: Problem, home: string, inputs: string): string[] {
   const faults: string[] = [];
   for (const text of [message, ...(hint === undefined ? [] : [hint])]) {
-    if (!/^\P{Ll}|^["a-z]/u.test(text) || !/\S[.?]$/.test(text)) faults.push(`${code}: no sentence: ${text}`);
-    if (/undefined|\bNaN\b|Infinity|\[object/.test(text.replace(/"[^"]*"|is undefined there/g, ''))) {
+    if (!/^\S.*[^\s.?][.?]$/su.test(text)) faults.push(`${code}: no sentence: ${text}`);
+    if (strayWord(text.replace(/is undefined there|"undefined [^"]*"/g, ''), inputs) !== undefined) {
       faults.push(`${code} holds what is no word: ${text}`);
     }
   }
@@ -203,14 +210,11 @@ function resultFaults(
   return faults;
 }
 
-/** What a value that is none becomes when it is written: never among results, unless it was among the input. */
-function strayWords(name: string, text: string, inputs: string): string[] {
+function wordFaults(name: string, text: string, inputs: string): string[] {
   if (name === 'notes.txt' || name === 'record.json') return [];
-  const words = ['NaN', 'Infinity', 'undefined', '[object '].filter((word) => !inputs.includes(word));
-  return words.flatMap((word) => {
-    const at = text.indexOf(word);
-    return at < 0 ? [] : [`${name}: …${text.slice(Math.max(0, at - 40), at + 40)}…`];
-  });
+  const word = strayWord(text, inputs);
+  const at = word === undefined ? -1 : text.indexOf(word);
+  return at < 0 ? [] : [`${name}: …${text.slice(Math.max(0, at - 40), at + 40)}…`];
 }
 
 function filesIn(folder: string): Map<string, string> {
