@@ -126,6 +126,7 @@ export const PROBLEM_CODES = [
   'record_other_version',
   'record_cannot_predict',
   'predictions_none',
+  'draft_impossible',
   'study_not_found',
   'template_unreadable',
   'template_broken',

@@ -15,6 +15,7 @@ const ROOMS = [
   'expression',
   'study',
   'data',
+  'draft',
   'prepare',
   'model',
   'engine',

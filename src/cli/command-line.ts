@@ -3,6 +3,7 @@ import { packageVersion } from '../package-file.ts';
 import type { Problem } from '../problem.ts';
 import type { StudyOptions } from './common-options.ts';
 import type { CompareCommandOptions } from './compare.ts';
+import type { DraftCommandOptions } from './draft.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
 import type { FitCommandOptions } from './fit.ts';
 import type { PredictCommandOptions } from './predict.ts';
@@ -58,6 +59,19 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
       .argParser((text: string, before: string[]) => [...before, text])
       .default([], 'the defaults that the study declares');
   const quiet = () => new Option('--quiet', 'print problems only');
+
+  program
+    .command('draft')
+    .description('write a first study file from a data file')
+    .argument('<data>', 'the data file')
+    .requiredOption('--response <name>', 'the column to be explained')
+    .option('--out <file>', 'where to write (default: standard output)')
+    .addOption(quiet())
+    .addOption(problems())
+    .action(async (data: string, options: DraftCommandOptions) => {
+      const { draftCommand } = await import('./draft.ts');
+      ended(await draftCommand(data, options, terminal));
+    });
 
   program
     .command('check')
