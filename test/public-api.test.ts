@@ -3,13 +3,26 @@ import { expect, test } from 'vitest';
 import * as plumbrule from '../src/index.ts';
 
 /** What others may rely on. A change here is a change of version. */
-const FUNCTIONS = ['checkStudy', 'predictFromRecord', 'render', 'runStudy', 'verifyRecord'];
+const FUNCTIONS = [
+  'checkStudy',
+  'compareRecords',
+  'predictFromRecord',
+  'readCompared',
+  'render',
+  'renderComparison',
+  'runStudy',
+  'verifyRecord',
+];
 
 const TYPES = [
   'CheckedStudy',
   'Column',
+  'ComparedSide',
+  'Comparison',
   'Difference',
   'GroupTotal',
+  'KeptRows',
+  'KeptSample',
   'Place',
   'PredictRecordOptions',
   'PredictedFigures',
