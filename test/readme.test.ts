@@ -131,7 +131,7 @@ describe('README', () => {
   });
 
   test('the options and commands described are those there are', async () => {
-    for (const command of ['check', 'fit', 'compare', 'predict', 'verify', 'render']) {
+    for (const command of ['draft', 'check', 'fit', 'compare', 'predict', 'verify', 'render']) {
       const { stdout } = await node(path('src/cli/main.ts'), command, '--help');
       for (const [option] of stdout.matchAll(/--(?!help)[a-z-]+/g)) expect(readme).toContain(`\`${option}`);
       expect(readme).toContain(`\`plumbrule ${command} `);
