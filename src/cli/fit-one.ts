@@ -3,7 +3,6 @@ import type { ComparedSide } from '../compare/compare.ts';
 import type { Comparison } from '../compare/comparison.ts';
 import type { Problem, Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
-import { recordFaults } from '../record/record-faults.ts';
 import { recordText } from '../record/record-text.ts';
 import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
 import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
@@ -100,9 +99,6 @@ async function resultFiles(
   folder: string,
   report: (problem: Problem) => void,
 ): Promise<ResultFile[]> {
-  const faults = recordFaults(record);
-  if (faults.length > 0)
-    throw new Error(`The record is not as its schema says: ${faults.slice(0, 3).join(' ')}`);
   return [
     { name: 'record.json', content: recordText(record) },
     ...(await reportFiles(record, record.study.report.formats, templatesOf(record, folder), report)),
