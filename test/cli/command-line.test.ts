@@ -177,6 +177,7 @@ describe('fit', () => {
       'record.json',
       'report.html',
       'report.md',
+      'sample.csv.gz',
       'tables',
       'tables/candidates.csv',
       'tables/coefficients.csv',
