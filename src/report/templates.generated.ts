@@ -856,7 +856,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p>"
-    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":14,"column":5},"end":{"line":14,"column":9}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":14,"column":3},"end":{"line":14,"column":16}}}))
+    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":15,"column":5},"end":{"line":15,"column":9}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":15,"column":3},"end":{"line":15,"column":16}}}))
     + "</p>\n";
 },"2":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -867,7 +867,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p class=\"fit\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "fit", {"start":{"line":17,"column":17},"end":{"line":17,"column":25}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "fit", {"start":{"line":18,"column":17},"end":{"line":18,"column":25}} ), depth0))
     + "</p>\n";
 },"3":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -878,11 +878,11 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Predictions asked for\">\n<table class=\"asked\">\n<caption>What was asked for, with "
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "predictionConfidence", {"start":{"line":23,"column":36},"end":{"line":23,"column":61}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "predictionConfidence", {"start":{"line":24,"column":36},"end":{"line":24,"column":61}} ), depth0))
     + " intervals for a new row</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">interval</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"head"),"predictions"),{"name":"each","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":28,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"head"),"predictions"),{"name":"each","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":0},"end":{"line":29,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"head"),"predictionsMore"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":0},"end":{"line":34,"column":7}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"head"),"predictionsMore"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":35,"column":7}}})) != null ? stack1 : "");
 },"4":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=depth0 != null ? depth0 : (container.nullContext || {}), alias2=container.strict, alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -892,14 +892,14 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<tr"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"total"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":3},"end":{"line":27,"column":37}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"total"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":28,"column":3},"end":{"line":28,"column":37}}})) != null ? stack1 : "")
     + "><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"label") || alias2(depth0, "label", {"start":{"line":27,"column":56},"end":{"line":27,"column":61}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"label","hash":{},"data":data,"loc":{"start":{"line":27,"column":54},"end":{"line":27,"column":63}}}) : helper)))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"outside"),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":63},"end":{"line":27,"column":128}}})) != null ? stack1 : "")
+    + alias4((((helper = lookupProperty(helpers,"label") || alias2(depth0, "label", {"start":{"line":28,"column":56},"end":{"line":28,"column":61}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"label","hash":{},"data":data,"loc":{"start":{"line":28,"column":54},"end":{"line":28,"column":63}}}) : helper)))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"outside"),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":28,"column":63},"end":{"line":28,"column":128}}})) != null ? stack1 : "")
     + "</th><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"estimate") || alias2(depth0, "estimate", {"start":{"line":27,"column":149},"end":{"line":27,"column":157}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":27,"column":147},"end":{"line":27,"column":159}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias2(depth0, "estimate", {"start":{"line":28,"column":149},"end":{"line":28,"column":157}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":28,"column":147},"end":{"line":28,"column":159}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"interval") || alias2(depth0, "interval", {"start":{"line":27,"column":180},"end":{"line":27,"column":188}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":27,"column":178},"end":{"line":27,"column":190}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"interval") || alias2(depth0, "interval", {"start":{"line":28,"column":180},"end":{"line":28,"column":188}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":28,"column":178},"end":{"line":28,"column":190}}}) : helper)))
     + "</td></tr>\n";
 },"5":function(container,depth0,helpers,partials,data) {
     return " class=\"total\"";
@@ -914,7 +914,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p class=\"small\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "predictionsMore", {"start":{"line":33,"column":19},"end":{"line":33,"column":39}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "predictionsMore", {"start":{"line":34,"column":19},"end":{"line":34,"column":39}} ), depth0))
     + "</p>\n";
 },"8":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -925,7 +925,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<li>"
-    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":40,"column":6},"end":{"line":40,"column":10}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":40,"column":4},"end":{"line":40,"column":17}}}))
+    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":43,"column":6},"end":{"line":43,"column":10}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":43,"column":4},"end":{"line":43,"column":17}}}))
     + "</li>\n";
 },"9":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -936,9 +936,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<div class=\"acceptance\">\n<h2>"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "acceptance", {"start":{"line":46,"column":6},"end":{"line":46,"column":21}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"head"), "acceptance", {"start":{"line":49,"column":6},"end":{"line":49,"column":21}} ), depth0))
     + "</h2>\n<ul>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"head"),"criteria"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":48,"column":0},"end":{"line":50,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"head"),"criteria"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":51,"column":0},"end":{"line":53,"column":9}}})) != null ? stack1 : "")
     + "</ul>\n</div>\n";
 },"10":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -949,15 +949,15 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<li class=\""
-    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":49,"column":13},"end":{"line":49,"column":17}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":49,"column":11},"end":{"line":49,"column":19}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":52,"column":13},"end":{"line":52,"column":17}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":52,"column":11},"end":{"line":52,"column":19}}}) : helper)))
     + "\"><span class=\"verdict\">"
-    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":49,"column":45},"end":{"line":49,"column":49}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":49,"column":43},"end":{"line":49,"column":51}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":52,"column":45},"end":{"line":52,"column":49}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":52,"column":43},"end":{"line":52,"column":51}}}) : helper)))
     + "</span> "
-    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":49,"column":61},"end":{"line":49,"column":65}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":49,"column":59},"end":{"line":49,"column":67}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":52,"column":61},"end":{"line":52,"column":65}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":52,"column":59},"end":{"line":52,"column":67}}}) : helper)))
     + " "
-    + alias4((((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":49,"column":70},"end":{"line":49,"column":75}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":49,"column":68},"end":{"line":49,"column":77}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":52,"column":70},"end":{"line":52,"column":75}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":52,"column":68},"end":{"line":52,"column":77}}}) : helper)))
     + "; asked for: "
-    + alias4((((helper = lookupProperty(helpers,"limit") || alias1(depth0, "limit", {"start":{"line":49,"column":92},"end":{"line":49,"column":97}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"limit","hash":{},"data":data,"loc":{"start":{"line":49,"column":90},"end":{"line":49,"column":99}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"limit") || alias1(depth0, "limit", {"start":{"line":52,"column":92},"end":{"line":52,"column":97}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"limit","hash":{},"data":data,"loc":{"start":{"line":52,"column":90},"end":{"line":52,"column":99}}}) : helper)))
     + "</li>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -973,19 +973,104 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias3((((helper = lookupProperty(helpers,"title") || alias1(depth0, "title", {"start":{"line":4,"column":6},"end":{"line":4,"column":11}} ))),(typeof helper === "function" ? helper.call(alias2,{"name":"title","hash":{},"data":data,"loc":{"start":{"line":4,"column":4},"end":{"line":4,"column":13}}}) : helper)))
     + "</h1>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"question"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":5,"column":0},"end":{"line":7,"column":7}}})) != null ? stack1 : "")
-    + "</div>\n</header>\n<section class=\"first\" id=\"answer\" aria-labelledby=\"answer-heading\">\n<h2 id=\"answer-heading\" class=\"quiet\">Answer</h2>\n<div class=\"answer\">\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"answer"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":0},"end":{"line":15,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"fit"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":0},"end":{"line":18,"column":7}}})) != null ? stack1 : "")
+    + "</div>\n</header>\n<section class=\"first screen\" id=\"answer\" aria-labelledby=\"answer-heading\">\n<h2 id=\"answer-heading\" class=\"quiet\">Answer</h2>\n<div class=\"told\">\n<div class=\"answer\">\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"answer"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":16,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"fit"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":19,"column":7}}})) != null ? stack1 : "")
     + "</div>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"predictions"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":0},"end":{"line":35,"column":7}}})) != null ? stack1 : "")
-    + "<div class=\"beware\">\n<h2>Before you rely on this</h2>\n<ol>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"beware"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":39,"column":0},"end":{"line":41,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"predictions"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":36,"column":7}}})) != null ? stack1 : "")
+    + "</div>\n<div class=\"judged\">\n<div class=\"beware\">\n<h2>Before you rely on this</h2>\n<ol>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"beware"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":42,"column":0},"end":{"line":44,"column":9}}})) != null ? stack1 : "")
     + "</ol>\n</div>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"acceptance"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":44,"column":0},"end":{"line":53,"column":7}}})) != null ? stack1 : "")
-    + "<p class=\"line\">"
-    + alias3(container.lambda(alias1(lookupProperty(depth0,"head"), "line", {"start":{"line":54,"column":18},"end":{"line":54,"column":27}} ), depth0))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"head"),"acceptance"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":47,"column":0},"end":{"line":56,"column":7}}})) != null ? stack1 : "")
+    + "</div>\n<p class=\"line\">"
+    + alias3(container.lambda(alias1(lookupProperty(depth0,"head"), "line", {"start":{"line":58,"column":18},"end":{"line":58,"column":27}} ), depth0))
     + "</p>\n<nav aria-label=\"Sections\">\n<ol>\n<li><a href=\"#data\">What data?</a></li>\n<li><a href=\"#tried\">What was tried?</a></li>\n<li><a href=\"#says\">What does it say?</a></li>\n<li><a href=\"#trust\">Can it be trusted?</a></li>\n<li><a href=\"#predicts\">What does it predict?</a></li>\n<li><a href=\"#careful\">What to be careful about</a></li>\n<li><a href=\"#again\">How to get this again</a></li>\n</ol>\n</nav>\n</section>\n";
 },"usePartial":true,"useData":true},
+  'levels': {"0":function(container,depth0,helpers,partials,data) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"level") || alias1(depth0, "level", {"start":{"line":9,"column":22},"end":{"line":9,"column":27}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"level","hash":{},"data":data,"loc":{"start":{"line":9,"column":20},"end":{"line":9,"column":29}}}) : helper)))
+    + "</th><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"rows") || alias1(depth0, "rows", {"start":{"line":9,"column":50},"end":{"line":9,"column":54}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rows","hash":{},"data":data,"loc":{"start":{"line":9,"column":48},"end":{"line":9,"column":56}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":9,"column":77},"end":{"line":9,"column":85}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":9,"column":75},"end":{"line":9,"column":87}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":9,"column":108},"end":{"line":9,"column":116}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":9,"column":106},"end":{"line":9,"column":118}}}) : helper)))
+    + "</td></tr>\n";
+},"1":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\""
+    + alias4((((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":15,"column":66},"end":{"line":15,"column":73}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":15,"column":64},"end":{"line":15,"column":75}}}) : helper)))
+    + ": pairs\">\n<table>\n<caption>"
+    + alias4((((helper = lookupProperty(helpers,"method") || alias1(depth0, "method", {"start":{"line":17,"column":11},"end":{"line":17,"column":17}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"method","hash":{},"data":data,"loc":{"start":{"line":17,"column":9},"end":{"line":17,"column":19}}}) : helper)))
+    + "</caption>\n<thead><tr><th scope=\"col\">level</th><th scope=\"col\">against</th><th scope=\"col\" class=\"n\">difference</th><th scope=\"col\" class=\"n\">interval</th><th scope=\"col\" class=\"n\">adjusted p-value</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"pairs"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":0},"end":{"line":22,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
+},"2":function(container,depth0,helpers,partials,data) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"level") || alias1(depth0, "level", {"start":{"line":21,"column":22},"end":{"line":21,"column":27}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"level","hash":{},"data":data,"loc":{"start":{"line":21,"column":20},"end":{"line":21,"column":29}}}) : helper)))
+    + "</th><td>"
+    + alias4((((helper = lookupProperty(helpers,"other") || alias1(depth0, "other", {"start":{"line":21,"column":40},"end":{"line":21,"column":45}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"other","hash":{},"data":data,"loc":{"start":{"line":21,"column":38},"end":{"line":21,"column":47}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":21,"column":68},"end":{"line":21,"column":76}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":21,"column":66},"end":{"line":21,"column":78}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":21,"column":99},"end":{"line":21,"column":107}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":21,"column":97},"end":{"line":21,"column":109}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"pValue") || alias1(depth0, "pValue", {"start":{"line":21,"column":130},"end":{"line":21,"column":136}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"pValue","hash":{},"data":data,"loc":{"start":{"line":21,"column":128},"end":{"line":21,"column":138}}}) : helper)))
+    + "</td></tr>\n";
+},"3":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p class=\"small\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"pairsNote") || container.strict(depth0, "pairsNote", {"start":{"line":28,"column":19},"end":{"line":28,"column":28}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"pairsNote","hash":{},"data":data,"loc":{"start":{"line":28,"column":17},"end":{"line":28,"column":30}}}) : helper)))
+    + "</p>\n";
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<details class=\"both\">\n<summary>"
+    + alias4((((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":2,"column":11},"end":{"line":2,"column":18}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":2,"column":9},"end":{"line":2,"column":20}}}) : helper)))
+    + "</summary>\n<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\""
+    + alias4((((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":3,"column":61},"end":{"line":3,"column":68}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":3,"column":59},"end":{"line":3,"column":70}}}) : helper)))
+    + ": expected at each level\">\n<table>\n<caption>Expected "
+    + alias4((((helper = lookupProperty(helpers,"quantity") || alias1(depth0, "quantity", {"start":{"line":5,"column":20},"end":{"line":5,"column":28}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"quantity","hash":{},"data":data,"loc":{"start":{"line":5,"column":18},"end":{"line":5,"column":30}}}) : helper)))
+    + ". "
+    + alias4((((helper = lookupProperty(helpers,"held") || alias1(depth0, "held", {"start":{"line":5,"column":34},"end":{"line":5,"column":38}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"held","hash":{},"data":data,"loc":{"start":{"line":5,"column":32},"end":{"line":5,"column":40}}}) : helper)))
+    + "</caption>\n<thead><tr><th scope=\"col\">level</th><th scope=\"col\" class=\"n\">rows</th><th scope=\"col\" class=\"n\">expected</th><th scope=\"col\" class=\"n\">interval</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"means"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":10,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"pairs"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":26,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"pairsNote"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":0},"end":{"line":29,"column":7}}})) != null ? stack1 : "")
+    + "</details>\n";
+},"useData":true},
   'mark': {"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "<svg class=\"mark\" viewBox=\"0 0 20 44\" width=\"20\" height=\"44\" aria-hidden=\"true\" focusable=\"false\"><path class=\"string\" d=\"M10 1V22\"/><path class=\"weight\" d=\"M7.5 21h5v3h2.5v6.5L10 43 5 30.5V24h2.5z\"/></svg>\n";
 },"useData":true},
@@ -1303,17 +1388,8 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "## Can it be trusted?\n\n"
     + ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"trust"), "summary", {"start":{"line":4,"column":2},"end":{"line":4,"column":15}} ), depth0)) != null ? stack1 : "")
     + "\n\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"findings"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":10,"column":9}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"findings"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":8,"column":9}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"word"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":7,"column":0},"end":{"line":9,"column":7}}})) != null ? stack1 : "");
-},"2":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1322,14 +1398,14 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "- **"
-    + ((stack1 = (((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":8,"column":6},"end":{"line":8,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":8,"column":4},"end":{"line":8,"column":16}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":7,"column":6},"end":{"line":7,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":7,"column":4},"end":{"line":7,"column":16}}}) : helper))) != null ? stack1 : "")
     + "** "
-    + ((stack1 = (((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":8,"column":21},"end":{"line":8,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":8,"column":19},"end":{"line":8,"column":27}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":7,"column":21},"end":{"line":7,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":7,"column":19},"end":{"line":7,"column":27}}}) : helper))) != null ? stack1 : "")
     + ". "
-    + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":8,"column":31},"end":{"line":8,"column":38}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":8,"column":29},"end":{"line":8,"column":40}}}) : helper))) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":40},"end":{"line":8,"column":72}}})) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":7,"column":31},"end":{"line":7,"column":38}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":7,"column":29},"end":{"line":7,"column":40}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":7,"column":40},"end":{"line":7,"column":72}}})) != null ? stack1 : "")
     + "\n";
-},"3":function(container,depth0,helpers,partials,data) {
+},"2":function(container,depth0,helpers,partials,data) {
     var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1338,7 +1414,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return " "
-    + ((stack1 = (((helper = lookupProperty(helpers,"advice") || container.strict(depth0, "advice", {"start":{"line":8,"column":57},"end":{"line":8,"column":63}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"advice","hash":{},"data":data,"loc":{"start":{"line":8,"column":55},"end":{"line":8,"column":65}}}) : helper))) != null ? stack1 : "");
+    + ((stack1 = (((helper = lookupProperty(helpers,"advice") || container.strict(depth0, "advice", {"start":{"line":7,"column":57},"end":{"line":7,"column":63}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"advice","hash":{},"data":data,"loc":{"start":{"line":7,"column":55},"end":{"line":7,"column":65}}}) : helper))) != null ? stack1 : "");
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1347,7 +1423,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":11,"column":7}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":9,"column":7}}})) != null ? stack1 : "");
 },"useData":true},
   'predicts': {"0":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1362,11 +1438,13 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"predicts"), "confidence", {"start":{"line":9,"column":28},"end":{"line":9,"column":47}} ), depth0))
     + " intervals</caption>\n<thead><tr><th scope=\"col\">row and its values</th><th scope=\"col\" class=\"n\">estimate</th>"
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"hasMean"),{"name":"if","hash":{},"fn":container.program(2, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":10,"column":89},"end":{"line":10,"column":155}}})) != null ? stack1 : "")
-    + "<th scope=\"col\" class=\"n\">interval for a new row</th><th scope=\"col\" class=\"n\">interval for the mean</th><th scope=\"col\">inside the data?</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"rows"),{"name":"each","hash":{},"fn":container.program(3, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":14,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"total"),{"name":"if","hash":{},"fn":container.program(5, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":17,"column":7}}})) != null ? stack1 : "")
+    + "<th scope=\"col\" class=\"n\">interval for a new row</th>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"hasDrawn"),{"name":"if","hash":{},"fn":container.program(3, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":10,"column":208},"end":{"line":10,"column":300}}})) != null ? stack1 : "")
+    + "<th scope=\"col\" class=\"n\">interval for the mean</th><th scope=\"col\">inside the data?</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"rows"),{"name":"each","hash":{},"fn":container.program(4, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":14,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"total"),{"name":"if","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":17,"column":7}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"notes"),{"name":"each","hash":{},"fn":container.program(8, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":23,"column":9}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"predicts"),"notes"),{"name":"each","hash":{},"fn":container.program(11, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":23,"column":9}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1378,7 +1456,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(depth0,"predicts"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
 },"2":function(container,depth0,helpers,partials,data) {
     return "<th scope=\"col\" class=\"n\">mean</th>";
-},"3":function(container,depth0,helpers,partials,data,blockParams,depths) {
+},"3":function(container,depth0,helpers,partials,data) {
+    return "<th scope=\"col\" class=\"n\">the same, drawn from the rows</th>";
+},"4":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1393,15 +1473,17 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + "</span></th><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":13,"column":87},"end":{"line":13,"column":95}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":13,"column":85},"end":{"line":13,"column":97}}}) : helper)))
     + "</td>"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depths[1],"predicts"),"hasMean"),{"name":"if","hash":{},"fn":container.program(4, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":102},"end":{"line":13,"column":163}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depths[1],"predicts"),"hasMean"),{"name":"if","hash":{},"fn":container.program(5, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":102},"end":{"line":13,"column":163}}})) != null ? stack1 : "")
     + "<td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"newInterval") || alias1(depth0, "newInterval", {"start":{"line":13,"column":179},"end":{"line":13,"column":190}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"newInterval","hash":{},"data":data,"loc":{"start":{"line":13,"column":177},"end":{"line":13,"column":192}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"meanInterval") || alias1(depth0, "meanInterval", {"start":{"line":13,"column":213},"end":{"line":13,"column":225}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"meanInterval","hash":{},"data":data,"loc":{"start":{"line":13,"column":211},"end":{"line":13,"column":227}}}) : helper)))
+    + "</td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depths[1],"predicts"),"hasDrawn"),{"name":"if","hash":{},"fn":container.program(6, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":197},"end":{"line":13,"column":268}}})) != null ? stack1 : "")
+    + "<td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"meanInterval") || alias1(depth0, "meanInterval", {"start":{"line":13,"column":284},"end":{"line":13,"column":296}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"meanInterval","hash":{},"data":data,"loc":{"start":{"line":13,"column":282},"end":{"line":13,"column":298}}}) : helper)))
     + "</td><td class=\"wide\">"
-    + alias4((((helper = lookupProperty(helpers,"place") || alias1(depth0, "place", {"start":{"line":13,"column":251},"end":{"line":13,"column":256}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"place","hash":{},"data":data,"loc":{"start":{"line":13,"column":249},"end":{"line":13,"column":258}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"place") || alias1(depth0, "place", {"start":{"line":13,"column":322},"end":{"line":13,"column":327}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"place","hash":{},"data":data,"loc":{"start":{"line":13,"column":320},"end":{"line":13,"column":329}}}) : helper)))
     + "</td></tr>\n";
-},"4":function(container,depth0,helpers,partials,data) {
+},"5":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1412,8 +1494,19 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "<td class=\"n\">"
     + container.escapeExpression((((helper = lookupProperty(helpers,"mean") || container.strict(depth0, "mean", {"start":{"line":13,"column":145},"end":{"line":13,"column":149}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"mean","hash":{},"data":data,"loc":{"start":{"line":13,"column":143},"end":{"line":13,"column":151}}}) : helper)))
     + "</td>";
-},"5":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=container.strict, alias2=container.lambda, alias3=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+},"6":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td class=\"n\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"drawnInterval") || container.strict(depth0, "drawnInterval", {"start":{"line":13,"column":241},"end":{"line":13,"column":254}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"drawnInterval","hash":{},"data":data,"loc":{"start":{"line":13,"column":239},"end":{"line":13,"column":256}}}) : helper)))
+    + "</td>";
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=container.strict, alias2=container.lambda, alias3=container.escapeExpression, alias4=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
@@ -1425,11 +1518,13 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + " rows</th><td class=\"n\">"
     + alias3(alias2(alias1(lookupProperty(lookupProperty(depth0,"predicts"),"total"), "estimate", {"start":{"line":16,"column":92},"end":{"line":16,"column":115}} ), depth0))
     + "</td>"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"predicts"),"hasMean"),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":122},"end":{"line":16,"column":229}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"predicts"),"hasMean"),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":122},"end":{"line":16,"column":229}}})) != null ? stack1 : "")
     + "<td class=\"n\">"
     + alias3(alias2(alias1(lookupProperty(lookupProperty(depth0,"predicts"),"total"), "interval", {"start":{"line":16,"column":245},"end":{"line":16,"column":268}} ), depth0))
-    + "</td><td class=\"n\">–</td><td></td></tr>\n";
-},"6":function(container,depth0,helpers,partials,data) {
+    + "</td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"predicts"),"hasDrawn"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":275},"end":{"line":16,"column":327}}})) != null ? stack1 : "")
+    + "<td class=\"n\">–</td><td></td></tr>\n";
+},"8":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1438,9 +1533,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<td class=\"n\">"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"predicts"),"total"),"mean"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":160},"end":{"line":16,"column":217}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"predicts"),"total"),"mean"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":160},"end":{"line":16,"column":217}}})) != null ? stack1 : "")
     + "</td>";
-},"7":function(container,depth0,helpers,partials,data) {
+},"9":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1449,11 +1544,13 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"predicts"),"total"), "mean", {"start":{"line":16,"column":189},"end":{"line":16,"column":208}} ), depth0));
-},"8":function(container,depth0,helpers,partials,data) {
+},"10":function(container,depth0,helpers,partials,data) {
+    return "<td class=\"n\">–</td>";
+},"11":function(container,depth0,helpers,partials,data) {
     return "<p class=\"small\">"
     + container.escapeExpression(container.lambda(depth0, depth0))
     + "</p>\n";
-},"9":function(container,depth0,helpers,partials,data) {
+},"12":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1461,10 +1558,10 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"hasModel"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.program(11, data, 0),"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":29,"column":7}}})) != null ? stack1 : "");
-},"10":function(container,depth0,helpers,partials,data) {
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"hasModel"),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.program(14, data, 0),"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":29,"column":7}}})) != null ? stack1 : "");
+},"13":function(container,depth0,helpers,partials,data) {
     return "<p>No prediction was asked for.</p>\n";
-},"11":function(container,depth0,helpers,partials,data) {
+},"14":function(container,depth0,helpers,partials,data) {
     return "<p>Without an admitted model nothing is predicted.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1475,7 +1572,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<section id=\"predicts\" aria-labelledby=\"predicts-heading\">\n<h2 id=\"predicts-heading\"><span class=\"no\">5</span> What does it predict?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"predicts"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(9, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":30,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"predicts"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(12, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":30,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true,"useDepths":true},
   'says': {"0":function(container,depth0,helpers,partials,data,blockParams,depths) {
@@ -1500,14 +1597,19 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + "</p>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"ladder"),{"name":"if","hash":{},"fn":container.program(6, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":21,"column":7}}})) != null ? stack1 : "")
     + "<h3>Term by term</h3>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"terms"),{"name":"each","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":51,"column":9}}})) != null ? stack1 : "")
-    + "<h3>All coefficients</h3>\n<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients\">\n<table>\n<caption>Coefficients for "
-    + alias3(alias2(alias1(lookupProperty(depth0,"says"), "quantity", {"start":{"line":55,"column":28},"end":{"line":55,"column":41}} ), depth0))
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"terms"),{"name":"each","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":54,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"hypotheses"),{"name":"if","hash":{},"fn":container.program(15, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":55,"column":0},"end":{"line":63,"column":7}}})) != null ? stack1 : "")
+    + "<h3>All coefficients</h3>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"errors"),{"name":"if","hash":{},"fn":container.program(17, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":65,"column":0},"end":{"line":67,"column":7}}})) != null ? stack1 : "")
+    + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients\">\n<table>\n<caption>Coefficients for "
+    + alias3(alias2(alias1(lookupProperty(depth0,"says"), "quantity", {"start":{"line":70,"column":28},"end":{"line":70,"column":41}} ), depth0))
     + "; the p-value compares each with zero, the other terms held</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\">unit of its column</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">standard error</th><th scope=\"col\" class=\"n\">"
-    + alias3(alias2(alias1(lookupProperty(depth0,"says"), "confidence", {"start":{"line":56,"column":194},"end":{"line":56,"column":209}} ), depth0))
+    + alias3(alias2(alias1(lookupProperty(depth0,"says"), "confidence", {"start":{"line":71,"column":194},"end":{"line":71,"column":209}} ), depth0))
     + " interval</th><th scope=\"col\" class=\"n\">p-value</th><th scope=\"col\" class=\"n\">variance inflation</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"coefficients"),{"name":"each","hash":{},"fn":container.program(14, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":58,"column":0},"end":{"line":60,"column":9}}})) != null ? stack1 : "")
-    + "</tbody>\n</table>\n</div>\n";
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"coefficients"),{"name":"each","hash":{},"fn":container.program(18, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":73,"column":0},"end":{"line":75,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"looked"),{"name":"if","hash":{},"fn":container.program(19, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":79,"column":0},"end":{"line":81,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"more"),{"name":"if","hash":{},"fn":container.program(20, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":82,"column":0},"end":{"line":97,"column":7}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1592,6 +1694,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + "</div>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(11, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":34,"column":0},"end":{"line":36,"column":7}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"rows"),{"name":"if","hash":{},"fn":container.program(12, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":37,"column":0},"end":{"line":49,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"levels"),{"name":"if","hash":{},"fn":container.program(14, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":50,"column":0},"end":{"line":52,"column":7}}})) != null ? stack1 : "")
     + "</article>\n";
 },"8":function(container,depth0,helpers,partials,data) {
     return " plain";
@@ -1654,6 +1757,52 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":44,"column":80},"end":{"line":44,"column":88}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":44,"column":78},"end":{"line":44,"column":90}}}) : helper)))
     + "</td></tr>\n";
 },"14":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"levels"),lookupProperty(depth0,"levels"),{"name":"levels","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"15":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<h3>What was asked of the coefficients</h3>\n<dl>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"says"),"hypotheses"),{"name":"each","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":58,"column":0},"end":{"line":61,"column":9}}})) != null ? stack1 : "")
+    + "</dl>\n";
+},"16":function(container,depth0,helpers,partials,data) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<dt>"
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":59,"column":6},"end":{"line":59,"column":10}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":59,"column":4},"end":{"line":59,"column":12}}}) : helper)))
+    + "?</dt>\n<dd>"
+    + alias4((((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":60,"column":6},"end":{"line":60,"column":13}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":60,"column":4},"end":{"line":60,"column":15}}}) : helper)))
+    + "<span class=\"under full\">"
+    + alias4((((helper = lookupProperty(helpers,"evidence") || alias1(depth0, "evidence", {"start":{"line":60,"column":42},"end":{"line":60,"column":50}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":60,"column":40},"end":{"line":60,"column":52}}}) : helper)))
+    + "</span></dd>\n";
+},"17":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"says"), "errors", {"start":{"line":66,"column":19},"end":{"line":66,"column":30}} ), depth0))
+    + "</p>\n";
+},"18":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1662,21 +1811,122 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":59,"column":22},"end":{"line":59,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":59,"column":20},"end":{"line":59,"column":28}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":74,"column":22},"end":{"line":74,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":74,"column":20},"end":{"line":74,"column":28}}}) : helper)))
     + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"unit") || alias1(depth0, "unit", {"start":{"line":59,"column":39},"end":{"line":59,"column":43}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"unit","hash":{},"data":data,"loc":{"start":{"line":59,"column":37},"end":{"line":59,"column":45}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"unit") || alias1(depth0, "unit", {"start":{"line":74,"column":39},"end":{"line":74,"column":43}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"unit","hash":{},"data":data,"loc":{"start":{"line":74,"column":37},"end":{"line":74,"column":45}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":59,"column":66},"end":{"line":59,"column":74}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":59,"column":64},"end":{"line":59,"column":76}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":74,"column":66},"end":{"line":74,"column":74}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":74,"column":64},"end":{"line":74,"column":76}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"standardError") || alias1(depth0, "standardError", {"start":{"line":59,"column":97},"end":{"line":59,"column":110}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardError","hash":{},"data":data,"loc":{"start":{"line":59,"column":95},"end":{"line":59,"column":112}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"standardError") || alias1(depth0, "standardError", {"start":{"line":74,"column":97},"end":{"line":74,"column":110}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardError","hash":{},"data":data,"loc":{"start":{"line":74,"column":95},"end":{"line":74,"column":112}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":59,"column":133},"end":{"line":59,"column":141}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":59,"column":131},"end":{"line":59,"column":143}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":74,"column":133},"end":{"line":74,"column":141}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":74,"column":131},"end":{"line":74,"column":143}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"pValue") || alias1(depth0, "pValue", {"start":{"line":59,"column":164},"end":{"line":59,"column":170}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"pValue","hash":{},"data":data,"loc":{"start":{"line":59,"column":162},"end":{"line":59,"column":172}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"pValue") || alias1(depth0, "pValue", {"start":{"line":74,"column":164},"end":{"line":74,"column":170}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"pValue","hash":{},"data":data,"loc":{"start":{"line":74,"column":162},"end":{"line":74,"column":172}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"vif") || alias1(depth0, "vif", {"start":{"line":59,"column":193},"end":{"line":59,"column":196}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"vif","hash":{},"data":data,"loc":{"start":{"line":59,"column":191},"end":{"line":59,"column":198}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"vif") || alias1(depth0, "vif", {"start":{"line":74,"column":193},"end":{"line":74,"column":196}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"vif","hash":{},"data":data,"loc":{"start":{"line":74,"column":191},"end":{"line":74,"column":198}}}) : helper)))
     + "</td></tr>\n";
-},"15":function(container,depth0,helpers,partials,data) {
+},"19":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"says"), "looked", {"start":{"line":80,"column":19},"end":{"line":80,"column":30}} ), depth0))
+    + "</p>\n";
+},"20":function(container,depth0,helpers,partials,data,blockParams,depths) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<details>\n<summary>More about each coefficient</summary>\n<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"More about each coefficient\">\n<table>\n<caption>Standardised: the coefficient in standard deviations of column and response. Partial correlation: with the response, both without what the other columns explain."
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"more"),"simultaneous"),{"name":"if","hash":{},"fn":container.program(21, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":87,"column":170},"end":{"line":87,"column":234}}})) != null ? stack1 : "")
+    + "</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\" class=\"n\">standardised</th><th scope=\"col\" class=\"n\">partial correlation</th><th scope=\"col\" class=\"n\">R² lost without it</th>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"more"),"simultaneous"),{"name":"if","hash":{},"fn":container.program(22, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":88,"column":185},"end":{"line":88,"column":299}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"more"),"hasDrawn"),{"name":"if","hash":{},"fn":container.program(23, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":88,"column":299},"end":{"line":88,"column":416}}})) != null ? stack1 : "")
+    + "</tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"more"),"coefficients"),{"name":"each","hash":{},"fn":container.program(24, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":90,"column":0},"end":{"line":92,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n</details>\n";
+},"21":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return " "
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"says"),"more"), "simultaneous", {"start":{"line":87,"column":203},"end":{"line":87,"column":225}} ), depth0));
+},"22":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<th scope=\"col\" class=\"n\">simultaneous "
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"says"),"more"), "confidence", {"start":{"line":88,"column":256},"end":{"line":88,"column":276}} ), depth0))
+    + " interval</th>";
+},"23":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<th scope=\"col\" class=\"n\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"says"),"more"), "confidence", {"start":{"line":88,"column":353},"end":{"line":88,"column":373}} ), depth0))
+    + " interval drawn from the rows</th>";
+},"24":function(container,depth0,helpers,partials,data,blockParams,depths) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":91,"column":22},"end":{"line":91,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":91,"column":20},"end":{"line":91,"column":28}}}) : helper)))
+    + "</th><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"standardised") || alias1(depth0, "standardised", {"start":{"line":91,"column":49},"end":{"line":91,"column":61}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardised","hash":{},"data":data,"loc":{"start":{"line":91,"column":47},"end":{"line":91,"column":63}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"partial") || alias1(depth0, "partial", {"start":{"line":91,"column":84},"end":{"line":91,"column":91}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"partial","hash":{},"data":data,"loc":{"start":{"line":91,"column":82},"end":{"line":91,"column":93}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"lost") || alias1(depth0, "lost", {"start":{"line":91,"column":114},"end":{"line":91,"column":118}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"lost","hash":{},"data":data,"loc":{"start":{"line":91,"column":112},"end":{"line":91,"column":120}}}) : helper)))
+    + "</td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(lookupProperty(depths[1],"says"),"more"),"simultaneous"),{"name":"if","hash":{},"fn":container.program(25, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":91,"column":125},"end":{"line":91,"column":200}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(lookupProperty(depths[1],"says"),"more"),"hasDrawn"),{"name":"if","hash":{},"fn":container.program(26, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":91,"column":200},"end":{"line":91,"column":264}}})) != null ? stack1 : "")
+    + "</tr>\n";
+},"25":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td class=\"n\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"simultaneous") || container.strict(depth0, "simultaneous", {"start":{"line":91,"column":174},"end":{"line":91,"column":186}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"simultaneous","hash":{},"data":data,"loc":{"start":{"line":91,"column":172},"end":{"line":91,"column":188}}}) : helper)))
+    + "</td>";
+},"26":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td class=\"n\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"drawn") || container.strict(depth0, "drawn", {"start":{"line":91,"column":245},"end":{"line":91,"column":250}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"drawn","hash":{},"data":data,"loc":{"start":{"line":91,"column":243},"end":{"line":91,"column":252}}}) : helper)))
+    + "</td>";
+},"27":function(container,depth0,helpers,partials,data) {
     return "<p>No candidate was admitted, so there is no chosen model to read. The table above gives each candidate’s reason. Three ways on: bring in the variables or rows that the reasons point at; declare a candidate that keeps the rules; or decide, in writing and before looking further, that a rule was the wrong one.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1687,11 +1937,11 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<section id=\"says\" aria-labelledby=\"says-heading\">\n<h2 id=\"says-heading\"><span class=\"no\">3</span> What does it say?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(15, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":66,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(27, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":100,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true,"useDepths":true},
   'style': {"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return ":root{--paper:#fcfbf8;--ink:#1d1c1a;--soft:#595650;--faint:#d9d5cb;--wash:#f3f0e8;--accent:#84540a;--dot:#6d6a63;--band:#e3cfa6;--edge:#1d1c1a2b}\n@media (prefers-color-scheme:dark){:root{--paper:#171614;--ink:#ece8df;--soft:#b0aa9d;--faint:#403d37;--wash:#211f1c;--accent:#e3b25c;--dot:#a39d90;--band:#57452a;--edge:#00000099}}\n*{box-sizing:border-box}\nhtml{-webkit-text-size-adjust:100%}\nbody{margin:0 auto;max-width:54rem;padding:1.5rem 1.25rem 3rem;background:var(--paper);color:var(--ink);font:1.06rem/1.55 Charter,\"Bitstream Charter\",\"Iowan Old Style\",\"Source Serif 4\",Palatino,\"Palatino Linotype\",Georgia,serif;overflow-wrap:break-word}\ntable,figcaption,svg text,nav,.small,.line,.note,.under,.verdict,.flow b,.brand{font-family:system-ui,-apple-system,\"Segoe UI\",Roboto,\"Helvetica Neue\",sans-serif}\np,ul,ol,dl,h1,h2,h3,h4{max-width:40rem}\nh1,h2,h3,h4{line-height:1.2;font-weight:600;text-wrap:balance}\nh1{font-size:clamp(1.6rem,4.6vw,2.3rem);margin:0}\nh2{font-size:1.5rem;margin:3.2rem 0 .8rem}\nh3{font-size:1.15rem;margin:2rem 0 .4rem}\nh4{font-size:1.05rem;margin:0 0 .4rem}\np{margin:.6rem 0}\na{color:var(--accent)}\n.skip{position:absolute;left:-99rem}\n.skip:focus{position:static}\n.masthead{display:flex;gap:1rem;align-items:flex-start}\n.brand .mark{height:3.6rem;width:1.65rem}\n.mark .string{stroke:var(--accent);stroke-width:1.6;fill:none}\n.mark .weight{fill:var(--accent)}\n.question{font-style:italic;color:var(--soft);font-size:1.15rem;margin:.4rem 0 0}\n.first h2{font-size:1.05rem;margin:0 0 .4rem}\n.quiet{position:absolute;width:1px;height:1px;overflow:hidden;clip-path:inset(50%)}\n.answer{border-left:2px solid var(--accent);padding:.1rem 0 .1rem 1.1rem;margin:1.4rem 0}\n.answer p{font-size:1.18rem;line-height:1.45;margin:0 0 .7rem}\n.answer p.fit{font-size:1.02rem;color:var(--soft);margin-bottom:0}\n.beware{background:var(--wash);padding:1rem 1.2rem;margin:1.4rem 0;max-width:44rem}\n.beware ol{margin:0;padding-left:1.3rem}\n.beware li{margin:.35rem 0}\n.acceptance ul{list-style:none;padding:0;margin:.2rem 0 0}\n.acceptance li{margin:.15rem 0}\n.verdict{font-size:.86em;font-weight:700}\n.missed .verdict,.c2 .verdict,.chosen .verdict{color:var(--accent)}\n.line{font-size:.88rem;color:var(--soft);margin:1.4rem 0 1rem}\nnav{border-top:1px solid var(--faint);border-bottom:1px solid var(--faint);padding:.5rem 0;font-size:.88rem}\nnav ol{display:flex;flex-wrap:wrap;gap:.1rem 1.3rem;margin:0;padding:0;list-style-position:inside;max-width:none}\nnav li{padding:.15rem 0}\nnav li::marker{color:var(--soft)}\n.no{color:var(--accent);margin-right:.35em}\n.small{font-size:.84rem;line-height:1.5;color:var(--soft)}\n.finding{font-weight:600}\n.flow{list-style:none;padding:0;margin:1rem 0}\n.flow li{display:grid;grid-template-columns:5.5rem 1fr;gap:.8rem;padding:.15rem 0}\n.flow b{text-align:right;font-variant-numeric:tabular-nums;font-weight:600;font-size:.95rem}\n.flow .loss{color:var(--soft)}\n.flow .used{border-top:1px solid var(--ink);margin-top:.2rem;padding-top:.3rem}\n.scroll{overflow-x:auto;margin:1.1rem 0;max-width:100%;background:linear-gradient(to right,var(--paper) 40%,transparent) 0 0/2.5rem 100% no-repeat local,linear-gradient(to left,var(--paper) 40%,transparent) 100% 0/2.5rem 100% no-repeat local,linear-gradient(to right,var(--edge),transparent) 0 0/.9rem 100% no-repeat scroll,linear-gradient(to left,var(--edge),transparent) 100% 0/.9rem 100% no-repeat scroll}\ntable{border-collapse:collapse;font-size:.86rem;line-height:1.4;font-variant-numeric:tabular-nums lining-nums;min-width:min(100%,30rem)}\ncaption{max-width:min(40rem,calc(100vw - 2.5rem));text-align:left;color:var(--soft);padding:0 0 .4rem;caption-side:top}\nth,td{padding:.38rem .9rem .38rem 0;text-align:left;vertical-align:top;border-bottom:1px solid var(--faint)}\nth:last-child,td:last-child{padding-right:0}\nthead th{font-weight:600;color:var(--soft);vertical-align:bottom;border-bottom:1px solid var(--ink)}\ntbody th{font-weight:500;min-width:7.5rem}\ntbody th.n{min-width:0}\n.n{text-align:right;white-space:nowrap}\ntd.near{white-space:nowrap}\nthead .n{white-space:normal}\ntr.chosen th,tr.chosen td{font-weight:650}\ntr.chosen .under{font-weight:400}\ntr.total th,tr.total td{border-top:1px solid var(--ink);font-weight:650}\n.under{display:block;color:var(--soft);font-size:.92em;font-weight:400;max-width:24rem}\ntd.wide{min-width:11rem;max-width:20rem}\n.note{color:var(--accent);font-size:.9em;margin-left:.3em}\ncode{font:.9em ui-monospace,\"SFMono-Regular\",Menlo,Consolas,\"Liberation Mono\",monospace;overflow-wrap:anywhere}\npre{background:var(--wash);padding:.8rem 1rem;overflow-x:auto;max-width:44rem}\npre code{overflow-wrap:normal}\n.hash{font-size:.8em}\n.equation{display:flex;gap:.7rem;background:var(--wash);padding:.9rem 1.1rem;margin:1rem 0 .4rem;font-variant-numeric:tabular-nums lining-nums;max-width:44rem;flex-wrap:wrap}\n.equation ul{list-style:none;margin:0;padding:0}\n.equation .left{white-space:nowrap}\n.equation li{padding-left:1.4em;text-indent:-1.4em}\n.equation .sign{display:inline-block;width:1.1em;text-indent:0}\n.equation .factor{overflow-wrap:anywhere}\nfigure{margin:1.2rem 0;max-width:34rem}\n.canvas svg{display:block;width:100%;height:auto}\nfigcaption{font-size:.88rem;line-height:1.45;margin-top:.3rem;color:var(--ink)}\n.term,.asked-of{border-top:1px solid var(--faint);padding:1.1rem 0 .5rem}\n.asked-of{margin-top:1rem}\n.asked-of h3{margin-top:0}\n.term figure,.charts figure,.pair figure{margin:0;min-width:0}\n@media (min-width:52rem){.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 2rem}.term.plain{display:block}.term .both{grid-column:1/-1}.charts{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:1.5rem}.charts figure:only-child{grid-column:1/-1;max-width:34rem}.pair{display:grid;grid-template-columns:minmax(0,7fr) minmax(0,5fr);gap:2rem;align-items:center}}\n.charts{margin-top:1rem}\n@media (max-width:51.99rem){.charts figure+figure{margin-top:1.4rem}}\ndl{margin:.6rem 0}\ndt{font-weight:600;margin-top:.7rem}\ndd{margin:0}\nfooter{margin-top:4rem;border-top:1px solid var(--faint);padding-top:1rem;display:flex;gap:.8rem;align-items:center;color:var(--soft);font-size:.88rem}\nfooter p{margin:0}\nfooter .mark{height:2.2rem;width:1rem;flex:none}\nsvg text{fill:var(--ink);font-size:12px;font-variant-numeric:tabular-nums}\nsvg .num{fill:var(--soft);font-size:11.5px}\nsvg .title{fill:var(--soft);font-size:12px}\nsvg .name{paint-order:stroke;stroke:var(--paper);stroke-width:4px;stroke-linejoin:round}\nsvg .strong{font-weight:700}\nsvg .axis,svg .tick{stroke:var(--soft);stroke-width:1}\nsvg .grid{stroke:var(--faint);stroke-width:1}\nsvg .plumb{stroke:var(--accent);stroke-width:1.4}\nsvg .bob{fill:var(--accent)}\nsvg .dots{stroke:var(--dot);stroke-width:3.6;stroke-linecap:round;fill:none;stroke-opacity:.75}\nsvg .faint{stroke-opacity:.6}\nsvg .thread{stroke:var(--faint);stroke-width:1;fill:none}\nsvg .stems{stroke:var(--dot);stroke-width:1.3;fill:none}\nsvg .trend{stroke:var(--ink);stroke-width:1.6;stroke-dasharray:5 4;fill:none}\nsvg .band{fill:var(--band);fill-opacity:.65}\nsvg .curve{stroke:var(--accent);stroke-width:2.4;fill:none}\nsvg .zone{fill:var(--wash)}\nsvg .reach{stroke:var(--faint);stroke-width:1.5}\nsvg .rung{stroke:var(--ink);stroke-width:1.8}\nsvg .thick{stroke-width:6;stroke:var(--dot)}\nsvg circle{stroke:var(--ink);fill:var(--dot);stroke-width:1}\nsvg circle.chosen{fill:var(--accent);stroke:var(--paper);stroke-width:1.2}\nsvg circle.refused{fill:var(--paper);stroke:var(--ink);stroke-width:1.4}\n@media (max-width:30rem){svg text{font-size:13.5px}svg .num,svg .title{font-size:13px}body{padding:1rem 1rem 2.5rem;font-size:1rem}.answer p{font-size:1.08rem}.beware{padding:.9rem 1rem}.flow li{grid-template-columns:4rem 1fr}}\n@media print{:root{--paper:#fff;--ink:#000;--soft:#444;--faint:#bbb;--wash:#f4f4f4;--accent:#6b4408;--dot:#555;--band:#d8d8d8}@page{size:A4;margin:16mm 15mm 18mm}html{font-size:10pt}body{max-width:none;padding:0;font-size:1.02rem;line-height:1.42}nav,.skip{display:none}a{color:inherit;text-decoration:none}.scroll,pre{overflow:visible}.scroll{background:none}pre code{white-space:pre-wrap;overflow-wrap:anywhere}table{width:100%;min-width:0}td.wide,tbody th{min-width:0}h2,h3,h4,caption{break-after:avoid}figure,.term,.scroll:not(.long),tr,.beware,.acceptance,.equation,.flow,dt,dd{break-inside:avoid}dt{break-after:avoid}thead{display:table-header-group;break-after:avoid}tbody tr:first-child{break-before:avoid}td.wide{min-width:42mm!important}.answer{margin:4mm 0}.answer p{font-size:1.12rem}.beware{margin:4mm 0}.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 6mm}.term.plain{display:block}.term .both{grid-column:1/-1}.charts,.pair{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:6mm;align-items:start}.charts figure:only-child{grid-column:1/-1;max-width:125mm}figure{max-width:125mm;margin:3mm 0}h2{margin-top:9mm}*{-webkit-print-color-adjust:exact;print-color-adjust:exact}}\n";
+    return ":root{--paper:#fcfbf8;--ink:#1d1c1a;--soft:#595650;--faint:#d9d5cb;--wash:#f3f0e8;--accent:#84540a;--dot:#6d6a63;--band:#e3cfa6;--edge:#1d1c1a2b}\n@media (prefers-color-scheme:dark){:root{--paper:#171614;--ink:#ece8df;--soft:#b0aa9d;--faint:#403d37;--wash:#211f1c;--accent:#e3b25c;--dot:#a39d90;--band:#57452a;--edge:#00000099}}\n*{box-sizing:border-box}\nhtml{-webkit-text-size-adjust:100%}\nbody{margin:0 auto;max-width:60rem;padding:1.5rem 1.25rem 3rem;background:var(--paper);color:var(--ink);font:1.06rem/1.55 Charter,\"Bitstream Charter\",\"Iowan Old Style\",\"Source Serif 4\",Palatino,\"Palatino Linotype\",Georgia,serif;overflow-wrap:break-word}\ntable,figcaption,svg text,nav,summary,.small,.line,.note,.under,.verdict,.flow b,.brand{font-family:system-ui,-apple-system,\"Segoe UI\",Roboto,\"Helvetica Neue\",sans-serif}\np,ul,ol,dl,h1,h2,h3,h4{max-width:40rem}\nh1,h2,h3,h4{line-height:1.2;font-weight:600;text-wrap:balance}\nh1{font-size:clamp(1.6rem,4.6vw,2.3rem);margin:0}\nh2{font-size:1.5rem;margin:3.2rem 0 .8rem}\nh3{font-size:1.15rem;margin:2rem 0 .4rem}\nh4{font-size:1.05rem;margin:0 0 .4rem}\np{margin:.6rem 0}\na{color:var(--accent)}\n.skip{position:absolute;left:-99rem}\n.skip:focus{position:static}\n.masthead{display:flex;gap:1rem;align-items:flex-start}\n.brand .mark{height:3.6rem;width:1.65rem}\n.mark .string{stroke:var(--accent);stroke-width:1.6;fill:none}\n.mark .weight{fill:var(--accent)}\n.question{font-style:italic;color:var(--soft);font-size:1.15rem;margin:.4rem 0 0}\n.first h2{font-size:1.05rem;margin:0 0 .4rem}\n.quiet{position:absolute;width:1px;height:1px;overflow:hidden;clip-path:inset(50%)}\n.answer{border-left:2px solid var(--accent);padding:.1rem 0 .1rem 1.1rem;margin:1.4rem 0}\n.answer p{font-size:1.18rem;line-height:1.45;margin:0 0 .7rem}\n.answer p.fit{font-size:1.02rem;color:var(--soft);margin-bottom:0}\n.beware{background:var(--wash);padding:1rem 1.2rem;margin:1.4rem 0;max-width:44rem}\n.beware ol{margin:0;padding-left:1.3rem}\n.beware li{margin:.35rem 0}\n.acceptance ul{list-style:none;padding:0;margin:.2rem 0 0;font-size:.92em}\n.acceptance li{margin:.1rem 0}\n.verdict{font-size:.86em;font-weight:700}\n.missed .verdict,.c2 .verdict,.chosen .verdict{color:var(--accent)}\n.line{font-size:.88rem;color:var(--soft);margin:1.2rem 0 1rem}\n@media (min-width:60rem){.screen{display:grid;grid-template-columns:minmax(0,7fr) minmax(0,5fr);gap:0 2.2rem}.screen .line,.screen nav{grid-column:1/-1}.screen .scroll{margin:.6rem 0}.screen .answer p{font-size:1.1rem}.screen .judged{font-size:.96rem;line-height:1.45}.screen .asked td,.screen .asked th{padding-top:.25rem;padding-bottom:.25rem}}\nnav{border-top:1px solid var(--faint);border-bottom:1px solid var(--faint);padding:.5rem 0;font-size:.88rem}\nnav ol{display:flex;flex-wrap:wrap;gap:.1rem 1.3rem;margin:0;padding:0;list-style-position:inside;max-width:none}\nnav li{padding:.15rem 0}\nnav li::marker{color:var(--soft)}\n.no{color:var(--accent);margin-right:.35em}\n.small{font-size:.84rem;line-height:1.5;color:var(--soft)}\n.finding{font-weight:600}\n.flow{list-style:none;padding:0;margin:1rem 0}\n.flow li{display:grid;grid-template-columns:5.5rem 1fr;gap:.8rem;padding:.15rem 0}\n.flow b{text-align:right;font-variant-numeric:tabular-nums;font-weight:600;font-size:.95rem}\n.flow .loss{color:var(--soft)}\n.flow .used{border-top:1px solid var(--ink);margin-top:.2rem;padding-top:.3rem}\n.scroll{overflow-x:auto;margin:1.1rem 0;max-width:100%;background:linear-gradient(to right,var(--paper) 40%,transparent) 0 0/2.5rem 100% no-repeat local,linear-gradient(to left,var(--paper) 40%,transparent) 100% 0/2.5rem 100% no-repeat local,linear-gradient(to right,var(--edge),transparent) 0 0/.9rem 100% no-repeat scroll,linear-gradient(to left,var(--edge),transparent) 100% 0/.9rem 100% no-repeat scroll}\ntable{border-collapse:collapse;font-size:.86rem;line-height:1.4;font-variant-numeric:tabular-nums lining-nums;min-width:min(100%,30rem)}\ncaption{max-width:min(40rem,calc(100vw - 2.5rem));text-align:left;color:var(--soft);padding:0 0 .4rem;caption-side:top}\nth,td{padding:.38rem .9rem .38rem 0;text-align:left;vertical-align:top;border-bottom:1px solid var(--faint)}\nth:last-child,td:last-child{padding-right:0}\nthead th{font-weight:600;color:var(--soft);vertical-align:bottom;border-bottom:1px solid var(--ink)}\ntbody th{font-weight:500;min-width:7.5rem}\ntbody th.n{min-width:0}\n.n{text-align:right;white-space:nowrap}\ntd.near{white-space:nowrap}\nthead .n{white-space:normal}\ntr.chosen th,tr.chosen td{font-weight:650}\ntr.chosen .under{font-weight:400}\ntr.total th,tr.total td{border-top:1px solid var(--ink);font-weight:650}\n.under{display:block;color:var(--soft);font-size:.92em;font-weight:400;max-width:24rem}\ndd .full{max-width:40rem;font-size:.82rem;line-height:1.45}\n.term .both{margin-top:.2rem}\ntd.wide{min-width:11rem;max-width:20rem}\n.note{color:var(--accent);font-size:.9em;margin-left:.3em}\ncode{font:.9em ui-monospace,\"SFMono-Regular\",Menlo,Consolas,\"Liberation Mono\",monospace;overflow-wrap:anywhere}\npre{background:var(--wash);padding:.8rem 1rem;overflow-x:auto;max-width:44rem}\npre code{overflow-wrap:normal}\n.hash{font-size:.8em}\n.equation{display:flex;gap:.7rem;background:var(--wash);padding:.9rem 1.1rem;margin:1rem 0 .4rem;font-variant-numeric:tabular-nums lining-nums;max-width:44rem;flex-wrap:wrap}\n.equation ul{list-style:none;margin:0;padding:0}\n.equation .left{white-space:nowrap}\n.equation li{padding-left:1.4em;text-indent:-1.4em}\n.equation .sign{display:inline-block;width:1.1em;text-indent:0}\n.equation .factor{overflow-wrap:anywhere}\nfigure{margin:1.2rem 0;max-width:34rem}\n.canvas svg{display:block;width:100%;height:auto}\nfigcaption{font-size:.88rem;line-height:1.45;margin-top:.3rem;color:var(--ink)}\n.term,.asked-of{border-top:1px solid var(--faint);padding:1.1rem 0 .5rem}\n.asked-of{margin-top:1rem}\n.asked-of h3{margin-top:0}\n.term figure,.charts figure,.pair figure{margin:0;min-width:0}\n@media (min-width:52rem){.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 2rem}.term.plain{display:block}.term .both{grid-column:1/-1}.charts{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:1.5rem}.charts figure:only-child{grid-column:1/-1;max-width:29rem}.charts figure:has([aria-labelledby^=residuals-each]){grid-column:1/-1;max-width:36rem}.pair{display:grid;grid-template-columns:minmax(0,7fr) minmax(0,5fr);gap:2rem;align-items:center}}\n.charts{margin-top:1rem}\n@media (max-width:51.99rem){.charts figure+figure{margin-top:1.4rem}}\ndl{margin:.6rem 0}\n.answers{max-width:none;columns:22rem 2;column-gap:2.4rem}\n.answers>div{break-inside:avoid;padding-bottom:.9rem}\n.answers dt{margin:0;font-size:.95rem;line-height:1.35}\n.answers dd{font-size:.95rem;line-height:1.45}\n.answers .under{font-size:.8rem;line-height:1.4;max-width:none;margin-top:.1rem}\ndetails{margin:1.1rem 0;border-top:1px solid var(--faint);padding-top:.5rem}\nsummary{cursor:pointer;color:var(--accent);font-weight:600;max-width:40rem}\nsummary:focus-visible{outline:2px solid var(--accent);outline-offset:3px}\ndt{font-weight:600;margin-top:.7rem}\ndd{margin:0}\nfooter{margin-top:4rem;border-top:1px solid var(--faint);padding-top:1rem;display:flex;gap:.8rem;align-items:center;color:var(--soft);font-size:.88rem}\nfooter p{margin:0}\nfooter .mark{height:2.2rem;width:1rem;flex:none}\nsvg text{fill:var(--ink);font-size:12px;font-variant-numeric:tabular-nums}\nsvg .num{fill:var(--soft);font-size:11.5px}\nsvg .title{fill:var(--soft);font-size:12px}\nsvg .name{paint-order:stroke;stroke:var(--paper);stroke-width:4px;stroke-linejoin:round}\nsvg .strong{font-weight:700}\nsvg .axis,svg .tick{stroke:var(--soft);stroke-width:1}\nsvg .grid{stroke:var(--faint);stroke-width:1}\nsvg .plumb{stroke:var(--accent);stroke-width:1.4}\nsvg .bob{fill:var(--accent)}\nsvg .dots{stroke:var(--dot);stroke-width:3.6;stroke-linecap:round;fill:none;stroke-opacity:.75}\nsvg .fine{stroke-width:2.6}\nsvg .faint{stroke-opacity:.6}\nsvg .thread{stroke:var(--faint);stroke-width:1;fill:none}\nsvg .stems{stroke:var(--dot);stroke-width:1.3;fill:none}\nsvg .trend{stroke:var(--ink);stroke-width:1.6;stroke-dasharray:5 4;fill:none}\nsvg .band{fill:var(--band);fill-opacity:.65}\nsvg .curve{stroke:var(--accent);stroke-width:2.4;fill:none}\nsvg .zone{fill:var(--wash)}\nsvg .reach{stroke:var(--faint);stroke-width:1.5}\nsvg .rung{stroke:var(--ink);stroke-width:1.8}\nsvg .thick{stroke-width:6;stroke:var(--dot)}\nsvg circle{stroke:var(--ink);fill:var(--dot);stroke-width:1}\nsvg circle.chosen{fill:var(--accent);stroke:var(--paper);stroke-width:1.2}\nsvg circle.refused{fill:var(--paper);stroke:var(--ink);stroke-width:1.4}\n@media (max-width:30rem){svg text{font-size:13.5px}svg .num,svg .title{font-size:13px}body{padding:1rem 1rem 2.5rem;font-size:1rem}.answer p{font-size:1.08rem}.beware{padding:.9rem 1rem}.flow li{grid-template-columns:4rem 1fr}}\n@media print{:root{--paper:#fff;--ink:#000;--soft:#444;--faint:#bbb;--wash:#f4f4f4;--accent:#6b4408;--dot:#555;--band:#d8d8d8}@page{size:A4;margin:16mm 15mm 18mm}html{font-size:10pt}body{max-width:none;padding:0;font-size:1.02rem;line-height:1.42}nav,.skip{display:none}details::details-content{content-visibility:visible;display:block;block-size:auto}summary{list-style:none;color:inherit}summary::-webkit-details-marker{display:none}.answers{columns:2}a{color:inherit;text-decoration:none}.scroll,pre{overflow:visible}.scroll{background:none}pre code{white-space:pre-wrap;overflow-wrap:anywhere}table{width:100%;min-width:0}td.wide,tbody th{min-width:0}h2,h3,h4,caption{break-after:avoid}figure,.term,.scroll:not(.long),tr,.beware,.acceptance,.equation,.flow,dt,dd{break-inside:avoid}dt{break-after:avoid}thead{display:table-header-group;break-after:avoid}tbody tr:first-child{break-before:avoid}td.wide{min-width:42mm!important}.answer{margin:4mm 0}.answer p{font-size:1.12rem}.beware{margin:4mm 0}.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 6mm}.term.plain{display:block}.term .both{grid-column:1/-1}.charts,.pair{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:6mm;align-items:start}.charts figure:only-child{grid-column:1/-1;max-width:125mm}figure{max-width:125mm;margin:3mm 0}h2{margin-top:9mm}*{-webkit-print-color-adjust:exact;print-color-adjust:exact}}\n";
 },"useData":true},
   'tried': {"0":function(container,depth0,helpers,partials,data) {
     return "<p>"
@@ -1924,7 +2174,11 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias3(alias2(alias1(lookupProperty(depth0,"trust"), "arithmetic", {"start":{"line":11,"column":19},"end":{"line":11,"column":35}} ), depth0))
     + "</p>\n</div>\n</div>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"findings"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":32,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":45,"column":7}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":56,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":57,"column":0},"end":{"line":67,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":68,"column":0},"end":{"line":86,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"if","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":87,"column":0},"end":{"line":96,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"if","hash":{},"fn":container.program(24, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":0},"end":{"line":106,"column":7}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
     return "<p>"
     + container.escapeExpression(container.lambda(depth0, depth0))
@@ -1941,26 +2195,16 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias4((((helper = lookupProperty(helpers,"concern") || alias1(depth0, "concern", {"start":{"line":15,"column":28},"end":{"line":15,"column":35}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"concern","hash":{},"data":data,"loc":{"start":{"line":15,"column":26},"end":{"line":15,"column":37}}}) : helper)))
     + "\">\n<h3>"
     + alias4((((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":16,"column":6},"end":{"line":16,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":16,"column":4},"end":{"line":16,"column":16}}}) : helper)))
-    + "</h3>\n<p>"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"word"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":3},"end":{"line":17,"column":61}}})) != null ? stack1 : "")
-    + alias4((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":17,"column":63},"end":{"line":17,"column":67}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":17,"column":61},"end":{"line":17,"column":77}}}))
+    + "</h3>\n<p><span class=\"verdict\">"
+    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":17,"column":27},"end":{"line":17,"column":31}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":17,"column":25},"end":{"line":17,"column":33}}}) : helper)))
+    + ".</span> "
+    + alias4((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":17,"column":44},"end":{"line":17,"column":48}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":17,"column":42},"end":{"line":17,"column":58}}}))
     + "</p>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":0},"end":{"line":20,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":23,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"charts"),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":30,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":0},"end":{"line":20,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":23,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"charts"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":30,"column":7}}})) != null ? stack1 : "")
     + "</article>\n";
 },"3":function(container,depth0,helpers,partials,data) {
-    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<span class=\"verdict\">"
-    + container.escapeExpression((((helper = lookupProperty(helpers,"word") || container.strict(depth0, "word", {"start":{"line":17,"column":39},"end":{"line":17,"column":43}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"word","hash":{},"data":data,"loc":{"start":{"line":17,"column":37},"end":{"line":17,"column":45}}}) : helper)))
-    + ".</span> ";
-},"4":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1971,7 +2215,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "<p><b>What to do:</b> "
     + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":19,"column":24},"end":{"line":19,"column":28}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"advice"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":19,"column":22},"end":{"line":19,"column":37}}}))
     + "</p>\n";
-},"5":function(container,depth0,helpers,partials,data) {
+},"4":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1982,7 +2226,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "<p class=\"small\">"
     + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":22,"column":19},"end":{"line":22,"column":27}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":22,"column":17},"end":{"line":22,"column":29}}}) : helper)))
     + "</p>\n";
-},"6":function(container,depth0,helpers,partials,data) {
+},"5":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1991,9 +2235,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<div class=\"charts\">\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"charts"),{"name":"each","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":28,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"charts"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":28,"column":9}}})) != null ? stack1 : "")
     + "</div>\n";
-},"7":function(container,depth0,helpers,partials,data) {
+},"6":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2002,7 +2246,31 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),depth0,{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<article class=\"asked-of\">\n<h3>Which terms move together?</h3>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"sentences"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":36,"column":0},"end":{"line":38,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"chart"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":39,"column":0},"end":{"line":41,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"rows"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":42,"column":0},"end":{"line":54,"column":7}}})) != null ? stack1 : "")
+    + "</article>\n";
 },"8":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p>"
+    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":37,"column":5},"end":{"line":37,"column":9}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":37,"column":3},"end":{"line":37,"column":16}}}))
+    + "</p>\n";
+},"9":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2010,10 +2278,19 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Most influential rows\">\n<table>\n<caption>The rows that move the coefficients most</caption>\n<thead><tr><th scope=\"col\" class=\"n\">row of the file</th><th scope=\"col\">identity</th><th scope=\"col\" class=\"n\">observed</th><th scope=\"col\" class=\"n\">fitted</th><th scope=\"col\" class=\"n\">standardised residual</th><th scope=\"col\" class=\"n\">leverage</th><th scope=\"col\" class=\"n\">Cook’s distance</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"each","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":39,"column":0},"end":{"line":41,"column":9}}})) != null ? stack1 : "")
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"10":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients without their partners\">\n<table>\n<caption>What each coefficient becomes without one of its partners</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\">without</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">standard error</th><th scope=\"col\" class=\"n\">estimate then</th><th scope=\"col\" class=\"n\">standard error then</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"rows"),{"name":"each","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":48,"column":0},"end":{"line":50,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n";
-},"9":function(container,depth0,helpers,partials,data) {
+},"11":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2021,22 +2298,170 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return "<tr><th scope=\"row\" class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"row") || alias1(depth0, "row", {"start":{"line":40,"column":32},"end":{"line":40,"column":35}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"row","hash":{},"data":data,"loc":{"start":{"line":40,"column":30},"end":{"line":40,"column":37}}}) : helper)))
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":49,"column":22},"end":{"line":49,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":49,"column":20},"end":{"line":49,"column":28}}}) : helper)))
     + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"id") || alias1(depth0, "id", {"start":{"line":40,"column":48},"end":{"line":40,"column":50}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"id","hash":{},"data":data,"loc":{"start":{"line":40,"column":46},"end":{"line":40,"column":52}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"leftOut") || alias1(depth0, "leftOut", {"start":{"line":49,"column":39},"end":{"line":49,"column":46}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"leftOut","hash":{},"data":data,"loc":{"start":{"line":49,"column":37},"end":{"line":49,"column":48}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"observed") || alias1(depth0, "observed", {"start":{"line":40,"column":73},"end":{"line":40,"column":81}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"observed","hash":{},"data":data,"loc":{"start":{"line":40,"column":71},"end":{"line":40,"column":83}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":49,"column":69},"end":{"line":49,"column":77}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":49,"column":67},"end":{"line":49,"column":79}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"fitted") || alias1(depth0, "fitted", {"start":{"line":40,"column":104},"end":{"line":40,"column":110}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"fitted","hash":{},"data":data,"loc":{"start":{"line":40,"column":102},"end":{"line":40,"column":112}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"standardError") || alias1(depth0, "standardError", {"start":{"line":49,"column":100},"end":{"line":49,"column":113}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardError","hash":{},"data":data,"loc":{"start":{"line":49,"column":98},"end":{"line":49,"column":115}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"residual") || alias1(depth0, "residual", {"start":{"line":40,"column":133},"end":{"line":40,"column":141}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"residual","hash":{},"data":data,"loc":{"start":{"line":40,"column":131},"end":{"line":40,"column":143}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"estimateWithout") || alias1(depth0, "estimateWithout", {"start":{"line":49,"column":136},"end":{"line":49,"column":151}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimateWithout","hash":{},"data":data,"loc":{"start":{"line":49,"column":134},"end":{"line":49,"column":153}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"leverage") || alias1(depth0, "leverage", {"start":{"line":40,"column":164},"end":{"line":40,"column":172}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"leverage","hash":{},"data":data,"loc":{"start":{"line":40,"column":162},"end":{"line":40,"column":174}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"distance") || alias1(depth0, "distance", {"start":{"line":40,"column":195},"end":{"line":40,"column":203}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"distance","hash":{},"data":data,"loc":{"start":{"line":40,"column":193},"end":{"line":40,"column":205}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"standardErrorWithout") || alias1(depth0, "standardErrorWithout", {"start":{"line":49,"column":174},"end":{"line":49,"column":194}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardErrorWithout","hash":{},"data":data,"loc":{"start":{"line":49,"column":172},"end":{"line":49,"column":196}}}) : helper)))
     + "</td></tr>\n";
-},"10":function(container,depth0,helpers,partials,data) {
+},"12":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<article class=\"asked-of\">\n<h3>Do the intervals hold without their assumptions?</h3>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),"chart"),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.program(14, data, 0),"data":data,"loc":{"start":{"line":60,"column":0},"end":{"line":64,"column":7}}})) != null ? stack1 : "")
+    + "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"), "method", {"start":{"line":65,"column":19},"end":{"line":65,"column":42}} ), depth0))
+    + "</p>\n</article>\n";
+},"13":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"14":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p>"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"), "finding", {"start":{"line":63,"column":5},"end":{"line":63,"column":29}} ), depth0))
+    + "</p>\n";
+},"15":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<article class=\"asked-of\">\n<h3>What would it say without a row?</h3>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rowsNote"),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":71,"column":0},"end":{"line":73,"column":7}}})) != null ? stack1 : "")
+    + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Most influential rows\">\n<table>\n<caption>The rows that move the coefficients most, and the coefficient that each moves most: as it is, and without the row</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\">moves</th><th scope=\"col\" class=\"n\">observed</th><th scope=\"col\" class=\"n\">fitted</th><th scope=\"col\" class=\"n\">standardised residual</th><th scope=\"col\" class=\"n\">leverage</th><th scope=\"col\" class=\"n\">Cook’s distance</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"each","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":79,"column":0},"end":{"line":81,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n</article>\n";
+},"16":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p>"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"trust"), "rowsNote", {"start":{"line":72,"column":5},"end":{"line":72,"column":19}} ), depth0))
+    + "</p>\n";
+},"17":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":80,"column":22},"end":{"line":80,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":80,"column":20},"end":{"line":80,"column":28}}}) : helper)))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"identified"),{"name":"if","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":80,"column":28},"end":{"line":80,"column":91}}})) != null ? stack1 : "")
+    + "</th><td class=\"wide\">"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"moves"),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.program(20, data, 0),"data":data,"loc":{"start":{"line":80,"column":113},"end":{"line":80,"column":151}}})) != null ? stack1 : "")
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"observed") || alias1(depth0, "observed", {"start":{"line":80,"column":172},"end":{"line":80,"column":180}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"observed","hash":{},"data":data,"loc":{"start":{"line":80,"column":170},"end":{"line":80,"column":182}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"fitted") || alias1(depth0, "fitted", {"start":{"line":80,"column":203},"end":{"line":80,"column":209}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"fitted","hash":{},"data":data,"loc":{"start":{"line":80,"column":201},"end":{"line":80,"column":211}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"residual") || alias1(depth0, "residual", {"start":{"line":80,"column":232},"end":{"line":80,"column":240}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"residual","hash":{},"data":data,"loc":{"start":{"line":80,"column":230},"end":{"line":80,"column":242}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"leverage") || alias1(depth0, "leverage", {"start":{"line":80,"column":263},"end":{"line":80,"column":271}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"leverage","hash":{},"data":data,"loc":{"start":{"line":80,"column":261},"end":{"line":80,"column":273}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"distance") || alias1(depth0, "distance", {"start":{"line":80,"column":294},"end":{"line":80,"column":302}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"distance","hash":{},"data":data,"loc":{"start":{"line":80,"column":292},"end":{"line":80,"column":304}}}) : helper)))
+    + "</td></tr>\n";
+},"18":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<span class=\"under\">row "
+    + container.escapeExpression((((helper = lookupProperty(helpers,"row") || container.strict(depth0, "row", {"start":{"line":80,"column":72},"end":{"line":80,"column":75}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"row","hash":{},"data":data,"loc":{"start":{"line":80,"column":70},"end":{"line":80,"column":77}}}) : helper)))
+    + "</span>";
+},"19":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return container.escapeExpression((((helper = lookupProperty(helpers,"moves") || container.strict(depth0, "moves", {"start":{"line":80,"column":128},"end":{"line":80,"column":133}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"moves","hash":{},"data":data,"loc":{"start":{"line":80,"column":126},"end":{"line":80,"column":135}}}) : helper)));
+},"20":function(container,depth0,helpers,partials,data) {
+    return "–";
+},"21":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<article class=\"asked-of\">\n<h3>Asked, with nothing to see</h3>\n<dl class=\"answers\">\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"each","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":91,"column":0},"end":{"line":93,"column":9}}})) != null ? stack1 : "")
+    + "</dl>\n</article>\n";
+},"22":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div><dt>"
+    + alias3((((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":92,"column":11},"end":{"line":92,"column":19}} ))),(typeof helper === "function" ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":92,"column":9},"end":{"line":92,"column":21}}}) : helper)))
+    + "</dt><dd>"
+    + alias3((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":92,"column":32},"end":{"line":92,"column":36}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":92,"column":30},"end":{"line":92,"column":46}}}))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(23, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":92,"column":46},"end":{"line":92,"column":108}}})) != null ? stack1 : "")
+    + "</dd></div>\n";
+},"23":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<span class=\"under\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":92,"column":84},"end":{"line":92,"column":92}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":92,"column":82},"end":{"line":92,"column":94}}}) : helper)))
+    + "</span>";
+},"24":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<details>\n<summary>The residuals in pictures</summary>\n<div class=\"charts\">\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":101,"column":0},"end":{"line":103,"column":9}}})) != null ? stack1 : "")
+    + "</div>\n</details>\n";
+},"25":function(container,depth0,helpers,partials,data) {
     return "<p>There is no chosen model to examine.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -2047,7 +2472,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<section id=\"trust\" aria-labelledby=\"trust-heading\">\n<h2 id=\"trust-heading\"><span class=\"no\">4</span> Can it be trusted?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(10, data, 0),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":48,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(25, data, 0),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":109,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true},
 };

@@ -165,6 +165,18 @@ export interface SaysView {
   readonly ladder: Figure | null;
   readonly terms: readonly TermView[];
   readonly coefficients: readonly CoefficientView[];
+  /** Which standard errors they rest on; null for a record of a version before it. */
+  readonly errors: string | null;
+  /** How many models were looked at before this one; null where none was. */
+  readonly looked: string | null;
+  /** What the study asks of the coefficients. */
+  readonly hypotheses: readonly {
+    readonly name: string;
+    readonly verdict: string;
+    readonly evidence: string;
+  }[];
+  /** Further measures of each coefficient; null for a record of a version before them. */
+  readonly more: MoreView | null;
   /** "95 %". */
   readonly confidence: string;
   /** Quantity and unit of the coefficients: "fuel burned, L". */
@@ -179,6 +191,55 @@ export interface TermView {
   readonly chart: Figure | null;
   /** Levels or slopes where there are too many for sentences. */
   readonly rows: readonly { readonly name: string; readonly estimate: string; readonly interval: string }[];
+  /** Level means and pairs of levels of a category; null for other terms. */
+  readonly levels: LevelsView | null;
+}
+
+export interface LevelsView {
+  readonly heading: string;
+  /** What the means are of: "fuel burned in L". */
+  readonly quantity: string;
+  /** Where everything else is held. */
+  readonly held: string;
+  readonly means: readonly {
+    readonly level: string;
+    readonly rows: string;
+    readonly estimate: string;
+    readonly interval: string;
+  }[];
+  /** What the pairs’ p-values and intervals hold for; null where none are compared. */
+  readonly method: string | null;
+  readonly pairs: readonly {
+    readonly level: string;
+    readonly other: string;
+    readonly estimate: string;
+    readonly interval: string;
+    /** Adjusted for the number of pairs. */
+    readonly pValue: string;
+  }[];
+  readonly pairsNote: string | null;
+}
+
+export interface MoreView {
+  /** What the simultaneous intervals hold for; null where not asked for. */
+  readonly simultaneous: string | null;
+  /** "95 %". */
+  readonly confidence: string;
+  /** Whether intervals were drawn from the rows again. */
+  readonly hasDrawn: boolean;
+  readonly coefficients: readonly {
+    readonly name: string;
+    /** Coefficient in standard deviations of both sides. */
+    readonly standardised: string;
+    /** Partial correlation with the response. */
+    readonly partial: string;
+    /** What R² would lose without the column. */
+    readonly lost: string;
+    /** Interval that holds for all together; an en dash where not asked for. */
+    readonly simultaneous: string;
+    /** Interval drawn from the rows again; an en dash where not asked for. */
+    readonly drawn: string;
+  }[];
 }
 
 export interface CoefficientView {
@@ -194,33 +255,92 @@ export interface CoefficientView {
 export interface TrustView {
   /** How many findings call for care, in a sentence. */
   readonly summary: string;
+  /** What calls for care or is worth a look, weightiest first, each with its drawings. */
   readonly findings: readonly FindingView[];
+  /** What was asked with nothing to see. */
+  readonly quiet: readonly QuietView[];
+  /** Drawings of the residuals beside questions that found nothing. */
+  readonly pictures: readonly Figure[];
+  /** Columns that nearly depend on one another; null where none do. */
+  readonly dependencies: DependenciesView | null;
+  /** The bootstrap beside the declared intervals; null where the study asks for none. */
+  readonly drawnAgain: AgainstRowsView | null;
+  /** Observed against fitted values. */
   readonly fitted: Figure;
+  /** How many rows lie far off or far out, as sentences. */
   readonly counts: readonly string[];
+  /** The rows that move the coefficients most, up to five. */
   readonly rows: readonly InfluentialRowView[];
+  /** What the rule would choose without each of them; null where it was not asked again. */
+  readonly rowsNote: string | null;
+  /** How precisely the model was worked out. */
   readonly arithmetic: string;
 }
 
 export interface FindingView {
+  /** Stable name: "equal_spread". */
+  readonly name: string;
   readonly question: string;
-  /** "Nothing to see", "Worth a look", "Take care". */
+  /** "Worth a look", "Take care". */
   readonly word: string;
-  /** 0, 1 or 2. */
+  /** 1 or 2. */
   readonly concern: number;
   readonly verdict: string;
+  /** Statistic, degrees of freedom, p-value or mark; null without a statistic. */
   readonly evidence: string | null;
+  /** What to do about it; null where nothing is to be done. */
   readonly advice: string | null;
   readonly charts: readonly Figure[];
 }
 
+export interface QuietView {
+  /** Stable name: "equal_spread". */
+  readonly name: string;
+  readonly question: string;
+  readonly verdict: string;
+  /** As for a finding. */
+  readonly evidence: string | null;
+}
+
+export interface DependenciesView {
+  /** Which columns carry each dependency and what that means. */
+  readonly sentences: readonly string[];
+  readonly chart: Figure | null;
+  /** What the coefficients become without one of their partners. */
+  readonly rows: readonly {
+    readonly leftOut: string;
+    readonly name: string;
+    readonly estimate: string;
+    readonly standardError: string;
+    readonly estimateWithout: string;
+    readonly standardErrorWithout: string;
+  }[];
+}
+
+export interface AgainstRowsView {
+  /** How both kinds of interval compare. */
+  readonly finding: string;
+  /** How rows were drawn. */
+  readonly method: string;
+  readonly chart: Figure | null;
+}
+
 export interface InfluentialRowView {
+  /** Line in the data file. */
   readonly row: string;
-  readonly id: string;
+  /** Its identity, or "Row 12". */
+  readonly name: string;
+  /** Whether the name is an identity of its own. */
+  readonly identified: boolean;
   readonly observed: string;
   readonly fitted: string;
+  /** Standardised residual. */
   readonly residual: string;
   readonly leverage: string;
+  /** Cook’s distance. */
   readonly distance: string;
+  /** The coefficient that it moves most, with and without it; null where the record does not say. */
+  readonly moves: string | null;
 }
 
 export interface PredictsView {
@@ -237,6 +357,8 @@ export interface PredictsView {
   readonly confidence: string;
   /** Whether a mean stands beside the median. */
   readonly hasMean: boolean;
+  /** Whether intervals were drawn from the rows again. */
+  readonly hasDrawn: boolean;
 }
 
 export interface PredictionView {
@@ -247,6 +369,8 @@ export interface PredictionView {
   readonly mean: string;
   readonly meanInterval: string;
   readonly newInterval: string;
+  /** Interval for a new row drawn from the rows again; an en dash where there is none. */
+  readonly drawnInterval: string;
   readonly inside: boolean;
   /** "inside the data", or how it lies outside. */
   readonly place: string;

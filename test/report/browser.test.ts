@@ -5,6 +5,7 @@ import { pathToFileURL } from 'node:url';
 import { type Browser, chromium, type Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { render } from '../../src/report/render.ts';
+import { declaredRecord, EXAMINED, TANGLED } from './declared-record.ts';
 import { CLIPPED_TABLES, HEADING_LEVELS, LOW_CONTRAST, TEXT_OUTSIDE } from './in-page.ts';
 import { sampleRecord, VARIANTS } from './sample-record.ts';
 
@@ -17,14 +18,21 @@ if (CHROMIUM === undefined) {
   );
 }
 
+/** Reports by name: of the hand-made records, and of runs that declare all there is. */
+const REPORTS = [
+  ...VARIANTS.map(([name, wish]) => [name, async () => sampleRecord(wish)] as const),
+  ['examined', () => declaredRecord(EXAMINED)] as const,
+  ['tangled', () => declaredRecord(TANGLED)] as const,
+];
+
 describe.skipIf(CHROMIUM === undefined)('the report in a browser', () => {
   let browser: Browser;
   let folder: string;
 
   beforeAll(async () => {
     folder = mkdtempSync(join(tmpdir(), 'plumbrule-report-'));
-    for (const [name, wish] of VARIANTS) {
-      const { html } = render(sampleRecord(wish), { formats: ['html'] }, () => {});
+    for (const [name, record] of REPORTS) {
+      const { html } = render(await record(), { formats: ['html'] }, () => {});
       writeFileSync(join(folder, `${name}.html`), html!);
     }
     browser = await chromium.launch({
@@ -63,7 +71,7 @@ describe.skipIf(CHROMIUM === undefined)('the report in a browser', () => {
     return { page, heard };
   }
 
-  describe.each(VARIANTS.map(([name]) => name))('%s', (name) => {
+  describe.each(REPORTS.map(([name]) => name))('%s', (name) => {
     it.each([360, 1280])(
       'does not scroll sideways at %d pixels, asks for nothing and says nothing',
       async (width) => {
@@ -81,7 +89,7 @@ describe.skipIf(CHROMIUM === undefined)('the report in a browser', () => {
   it.each(['light', 'dark'] as const)(
     'has text of contrast 4.5 and more in %s, in drawings too',
     async (scheme) => {
-      for (const name of ['usual', 'none admitted']) {
+      for (const name of ['usual', 'none admitted', 'examined']) {
         const { page } = await open(name, 1280, scheme);
         const poor = await page.evaluate<string[]>(LOW_CONTRAST);
         expect(poor).toEqual([]);
@@ -101,16 +109,36 @@ describe.skipIf(CHROMIUM === undefined)('the report in a browser', () => {
   });
 
   it('keeps text inside its drawing', async () => {
-    for (const [name] of VARIANTS) {
+    for (const [name] of REPORTS) {
       const { page } = await open(name, 1280);
+      // What is folded away has no size.
+      await page.evaluate("document.querySelectorAll('details').forEach((one) => (one.open = true))");
       const outside = await page.evaluate<string[]>(TEXT_OUTSIDE);
       expect(outside, name).toEqual([]);
       await page.close();
     }
   });
 
+  it('has the first screen on one screen of a desk', async () => {
+    const { page } = await open('examined', 1280);
+    const end = await page.evaluate<number>(
+      "document.querySelector('#answer nav').getBoundingClientRect().top",
+    );
+    expect(end).toBeLessThan(900);
+    await page.close();
+  });
+
+  it('prints what is folded away', async () => {
+    const { page } = await open('examined', 1280);
+    const seen = `document.querySelector('[aria-label="More about each coefficient"]').checkVisibility()`;
+    expect(await page.evaluate<boolean>(seen)).toBe(false);
+    await page.emulateMedia({ media: 'print' });
+    expect(await page.evaluate<boolean>(seen)).toBe(true);
+    await page.close();
+  });
+
   it('prints with every section and nothing cut off at the side', async () => {
-    const { page } = await open('usual', 1280);
+    const { page } = await open('examined', 1280);
     await page.emulateMedia({ media: 'print' });
     const headings = await page.locator('h2').allInnerTexts();
     for (const heading of [

@@ -15,29 +15,14 @@ import {
   residualsTimeChart,
 } from '../../src/report/chart/residuals.ts';
 import { correlation, ranks, shareBetween, spreadAlong, twoThirds } from '../../src/report/chart/summary.ts';
-import { at, clipped, dots, escaped, type Figure } from '../../src/report/chart/svg.ts';
+import { at, clipped, dots, escaped } from '../../src/report/chart/svg.ts';
 import type { RecordExamination, StudyRecord } from '../../src/report/record-type.ts';
 import { lexiconOf } from '../../src/report/words/lexicon.ts';
 import { NASTY, sampleRecord } from './sample-record.ts';
+import { sound } from './sound.ts';
 
 const record = sampleRecord();
 const lexicon = lexiconOf(record);
-
-/** Tags open and close in order, one svg with title and description, no number gone wrong, nothing unescaped. */
-function sound(figure: Figure | null): void {
-  if (figure === null) return;
-  expect(figure.svg).not.toMatch(/NaN|Infinity|undefined|null/);
-  const open: string[] = [];
-  for (const [, closing, name, self] of figure.svg.matchAll(/<(\/?)([a-zA-Z]+)[^>]*?(\/?)>/g)) {
-    if (closing) expect(open.pop()).toBe(name);
-    else if (!self) open.push(name!);
-  }
-  expect(open).toEqual([]);
-  expect(figure.svg).toMatch(
-    /^<svg class="chart" viewBox="0 0 [\d.]+ [\d.]+" role="img" aria-labelledby="([\w-]+)-t \1-d"><title id="\1-t">[^<]+<\/title><desc id="\1-d">[^<]+<\/desc>/,
-  );
-  expect(figure.caption).toMatch(/[.?!]$/);
-}
 
 const wild = fc.oneof(
   fc.double({ min: -1e6, max: 1e6, noNaN: true }),

@@ -574,6 +574,38 @@ describe('selection, predictions and findings in words', () => {
     );
     expect(evidence({ ...finding, statistic: null })).toBeNull();
   });
+  it('gives the figures beside a statistic, rows in whole numbers, none where it is to be brief', () => {
+    const finding = {
+      ...record.examination!.findings[0]!,
+      statistic: 12,
+      statistic_name: 'rows that do',
+      df: [],
+      p_value: null,
+      mark: null,
+      figures: [
+        { name: 'skewness', value: 4 },
+        { name: 'rows back', value: 1200 },
+        { name: 'nothing', value: null },
+      ],
+    };
+    expect(plain(evidence(finding)!)).toBe('Rows that do: 12. Also: skewness 4.00; rows back 1 200.');
+    expect(evidence(finding, true)).toBe('Rows that do: 12.');
+  });
+  it('says on the first screen what was found, not what to do about it', () => {
+    const finding = { ...record.examination!.findings[0]!, verdict: 'It bends.', advice: 'Straighten it.' };
+    const told: StudyRecord = {
+      ...record,
+      acceptance: [],
+      examination: {
+        ...record.examination!,
+        findings: [finding],
+        before_you_rely: [
+          { text: 'It bends. Straighten it.', about: 'shape', finding: finding.name, concern: 2, weight: 1 },
+        ],
+      },
+    };
+    expect(bewareLines(told, lexicon)[0]).toBe('It bends.');
+  });
   it('always warns of association, selection, extrapolation and review, the study’s own caution first', () => {
     const headings = cautions(record).map((c) => c.heading);
     expect(headings[0]).toBe('From the study');

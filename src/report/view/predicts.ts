@@ -12,9 +12,10 @@ export function predictsView(record: StudyRecord, lexicon: Lexicon): PredictsVie
   const { predictions, prediction_total: total } = record;
   if (record.model === null || predictions.length === 0) return null;
   const { unit } = lexicon.response;
+  const drawn = record.examination?.bootstrap?.predictions ?? [];
   const more = predictions.length - ROWS;
   return {
-    rows: predictions.slice(0, ROWS).map((p) => predictionView(lexicon, p)),
+    rows: predictions.slice(0, ROWS).map((p, i) => predictionView(lexicon, p, drawn[i])),
     chart: predictionsChart(lexicon, predictions),
     total:
       total === null
@@ -31,10 +32,13 @@ export function predictsView(record: StudyRecord, lexicon: Lexicon): PredictsVie
     ],
     confidence: percent(record.study.prediction_interval),
     hasMean: predictions.some((p) => p.mean !== null),
+    hasDrawn: drawn.length > 0,
   };
 }
 
-function predictionView(lexicon: Lexicon, p: RecordPrediction): PredictionView {
+type Drawn = NonNullable<NonNullable<StudyRecord['examination']>['bootstrap']>['predictions'][number];
+
+function predictionView(lexicon: Lexicon, p: RecordPrediction, drawn: Drawn | undefined): PredictionView {
   const rounding = predictionRounding(p);
   const { unit } = lexicon.response;
   return {
@@ -44,6 +48,7 @@ function predictionView(lexicon: Lexicon, p: RecordPrediction): PredictionView {
     mean: p.mean === null ? NONE : withUnit(rounded(p.mean, rounding), unit),
     meanInterval: rangeWithUnit(p.mean_lower, p.mean_upper, rounding, unit),
     newInterval: rangeWithUnit(p.lower, p.upper, rounding, unit),
+    drawnInterval: drawn === undefined ? NONE : rangeWithUnit(drawn.lower, drawn.upper, rounding, unit),
     inside: p.outside.length === 0,
     place: p.outside.length === 0 ? 'inside the data' : p.outside.map(stopped).join(' '),
   };

@@ -10,13 +10,16 @@ import {
   roundingFor,
   significant,
 } from '../numbers.ts';
-import type { RecordCandidate, RecordCoefficient, StudyRecord } from '../record-type.ts';
+import type { RecordCandidate, RecordCoefficient, RecordModel, StudyRecord } from '../record-type.ts';
 import type { CoefficientView, SaysView } from '../view.ts';
 import { fitSentence } from '../words/answer.ts';
 import { equationOf } from '../words/equation.ts';
 import { estimatedCandidate } from '../words/estimated.ts';
-import type { Lexicon } from '../words/lexicon.ts';
+import { hypothesisEvidence } from '../words/hypothesis.ts';
+import { type Lexicon, stopped } from '../words/lexicon.ts';
+import { lookedSentence } from '../words/looked.ts';
 import { fittedQuantity, fittedUnit, scaleSentence } from '../words/scale.ts';
+import { moreView } from './more.ts';
 import { termViews } from './terms.ts';
 
 export function saysView(record: StudyRecord, lexicon: Lexicon): SaysView | null {
@@ -36,10 +39,23 @@ export function saysView(record: StudyRecord, lexicon: Lexicon): SaysView | null
     coefficients: coefficients.map((c) =>
       coefficientView(c, model.columns.find((column) => column.name === c.name)?.unit ?? null),
     ),
+    errors: standardErrors(model),
+    looked: lookedSentence(record),
+    hypotheses: (model.inference?.hypotheses ?? []).map((one) => ({
+      name: one.name,
+      verdict: stopped(one.verdict),
+      evidence: hypothesisEvidence(one),
+    })),
+    more: moreView(record, coefficients),
     confidence: percent(record.study.confidence),
     quantity:
       unit === null ? fittedQuantity(lexicon.response) : `${fittedQuantity(lexicon.response)} in ${unit}`,
   };
+}
+
+/** Which standard errors the figures rest on; null for a record of a version before it. */
+function standardErrors({ standard_errors: errors }: RecordModel): string | null {
+  return errors === undefined ? null : stopped(errors.sentence);
 }
 
 function overallSentence({ overall_f: f, intercept }: RecordCandidate): string | null {

@@ -2,12 +2,24 @@ import { differenceTitle } from '../chart/effects.ts';
 import { levelsChart } from '../chart/levels.ts';
 import { partialChart } from '../chart/partial.ts';
 import type { Figure } from '../chart/svg.ts';
-import { count, pPhrase, range, rounded, roundingOfInterval, significant } from '../numbers.ts';
+import {
+  count,
+  pPhrase,
+  range,
+  rounded,
+  roundingOfInterval,
+  significant,
+  value,
+  withUnit,
+} from '../numbers.ts';
 import type { RecordCoefficient, RecordExamination, RecordModel, RecordTerm } from '../record-type.ts';
 import type { TermView } from '../view.ts';
 import { effectOf, shortEffect } from '../words/effect.ts';
 import { type Lexicon, labelOf, raised, termLabel, unitOf } from '../words/lexicon.ts';
+import { ownScaleSentences } from '../words/own-scale.ts';
+import { pairsSentence } from '../words/pairs.ts';
 import { fittedUnit, scaleKind } from '../words/scale.ts';
+import { slopesAlongSentences } from '../words/slopes.ts';
 import {
   baselineMoved,
   movesSeveral,
@@ -20,9 +32,11 @@ import {
   termSentences,
 } from '../words/term.ts';
 
+import { levelsView } from './levels.ts';
+
 type Points = RecordExamination['points'] | null;
 
-/** Levels or slopes beyond this get a table, since sentences no longer list them. */
+/** Levels or slopes from this many on get a table, since sentences no longer list them. */
 const ROWS_FROM = 5;
 
 export function termViews(
@@ -37,10 +51,17 @@ export function termViews(
     // Terms of one variable share its curve: it is drawn with the first of them.
     const fresh = term.kind === 'interaction' || !drawn.has(variable);
     if (term.kind !== 'interaction') drawn.add(variable);
+    const pairs = pairsSentence(lexicon, term);
     return {
       heading: raised(termLabel(lexicon, term)),
-      sentences: termSentences(lexicon, term, model, coefficients),
+      sentences: [
+        ...termSentences(lexicon, term, model, coefficients),
+        ...slopesAlongSentences(lexicon, term, model),
+        ...ownScaleSentences(lexicon, term),
+        ...(pairs === null ? [] : [pairs]),
+      ],
       test: testSentence(term),
+      levels: levelsView(lexicon, term),
       chart: fresh ? termChart(lexicon, term, model, `term-${i + 1}`, points) : null,
       rows: termRows(lexicon, term),
     };
@@ -117,12 +138,16 @@ function curveCaption(lexicon: Lexicon, term: RecordTerm, model: RecordModel): s
 }
 
 function termRows(lexicon: Lexicon, term: RecordTerm): TermView['rows'] {
+  const along = term.slopes_along;
+  const slopeUnit = along ? unitOf(lexicon, along.variable) : null;
   const rows =
     term.kind === 'interaction'
       ? term.slopes.map((s) => ({ ...s, name: slopeName(lexicon, s, term) }))
       : term.kind === 'category'
         ? term.typical_steps.map((s) => ({ ...s, name: s.to }))
-        : [];
+        : along?.declared
+          ? along.places.map((place) => ({ ...place, name: withUnit(value(place.at, 4), slopeUnit) }))
+          : [];
   if (rows.length < ROWS_FROM) return [];
   const log = scaleKind(lexicon.response.scale) === 'log';
   const unit = fittedUnit(lexicon.response);

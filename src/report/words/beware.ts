@@ -36,19 +36,22 @@ export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
   return shown;
 }
 
-/** What the examination lists, weightiest first; from a record without that list, the findings by concern. */
+/**
+ * What the examination lists, weightiest first, without what to do about it, which stands beside the question; from a record
+ * without that list, the findings by concern.
+ */
 function toKnow({ examination }: StudyRecord): readonly { readonly text: string; readonly weight: number }[] {
   if (examination === null) return [];
-  return (
-    examination.before_you_rely ??
-    [2, 1].flatMap((concern) =>
-      examination.findings
-        .filter((finding) => finding.concern === concern)
-        .map(({ verdict, advice }) => ({
-          text: stopped(verdict) + (advice === null ? '' : ` ${stopped(advice)}`),
-          weight: concern === 2 ? 1 : 0,
-        })),
-    )
+  const { findings, before_you_rely: listed } = examination;
+  if (listed !== undefined)
+    return listed.map(({ text, weight, finding }) => {
+      const verdict = stopped(findings.find(({ name }) => name === finding)?.verdict ?? '');
+      return { text: verdict !== '' && text.startsWith(verdict) ? verdict : stopped(text), weight };
+    });
+  return [2, 1].flatMap((concern) =>
+    findings
+      .filter((finding) => finding.concern === concern)
+      .map(({ verdict }) => ({ text: stopped(verdict), weight: concern === 2 ? 1 : 0 })),
   );
 }
 

@@ -2,6 +2,7 @@ import { count, decimalExponent, isoDate, value, withUnit } from '../numbers.ts'
 import type { RecordCoefficient, RecordModel, RecordTerm } from '../record-type.ts';
 import { effectPhrase, openSentence, shortEffect } from './effect.ts';
 import { type Lexicon, labelOf, listed, raised, unitOf, variableNamed } from './lexicon.ts';
+import { perDoubling } from './own-scale.ts';
 import { scaleKind } from './scale.ts';
 import { eachUnit, oneMore } from './units.ts';
 
@@ -110,6 +111,9 @@ function doublingSentence(
   coefficient: RecordCoefficient,
   model: RecordModel,
 ): string | null {
+  const own = perDoubling(term);
+  if (own !== null)
+    return `Doubling ${labelOf(lexicon, own.of)} goes with ${effectPhrase(lexicon, own)}${heldPhrase(lexicon, term, model)}.${openSentence(own)}`;
   const derived = lexicon.variables.get(variable)?.derived_from ?? '';
   const parts = /^\s*(log|log10)\s*\(\s*([\p{L}_][\p{L}\p{N}_]*)\s*\)\s*$/u.exec(derived);
   if (parts === null) return null;
