@@ -23,10 +23,10 @@ export interface Rendered {
   readonly markdown?: string;
 }
 
-export const require = createRequire(import.meta.url);
+const require = createRequire(import.meta.url);
 
 /** Access to anything but a value's own keys is off, also for the user's own templates. */
-export const WALLS = {
+const WALLS = {
   allowProtoPropertiesByDefault: false,
   allowProtoMethodsByDefault: false,
 } as const;
@@ -59,8 +59,13 @@ export function render(record: StudyRecord, options: RenderOptions, report: Repo
 
 /** The program's own templates, compiled ahead of time: only the small run-time part of Handlebars is loaded. */
 function ownTemplate(format: ReportFormat, view: ReportView): string {
+  return fillTemplate((format === 'html' ? HTML : MARKDOWN) as TemplateSpecification, view);
+}
+
+/** A template compiled ahead of time, filled from its view. */
+export function fillTemplate(template: TemplateSpecification, view: object): string {
   const handlebars = environment(require('handlebars/dist/handlebars.runtime.min.js') as typeof Handlebars);
-  return handlebars.template((format === 'html' ? HTML : MARKDOWN) as TemplateSpecification)(view, WALLS);
+  return handlebars.template(template)(view, WALLS);
 }
 
 function userTemplate(
@@ -97,7 +102,7 @@ function userTemplate(
 export type TemplateSpecification = Parameters<typeof Handlebars.template>[0];
 
 /** A Handlebars of its own with our helpers and partials and nothing else. */
-export function environment(base: typeof Handlebars): typeof Handlebars {
+function environment(base: typeof Handlebars): typeof Handlebars {
   const handlebars = base.create();
   // `log` writes to the console, the two hooks are for calls that a template must not make.
   for (const name of Object.keys(handlebars.helpers)) {

@@ -149,6 +149,7 @@ describe('a sound study', () => {
     expect(study!.report).toEqual({
       formats: ['html'],
       templates: { html: 'own.hbs', markdown: null },
+      keepSample: true,
       caution: 'The harbour master reviews this.',
     });
   });
@@ -206,6 +207,7 @@ describe('settings', () => {
           ['report.formats', 'html, markdown'],
           ['report.templates.html', 'none'],
           ['report.templates.markdown', 'none'],
+          ['report.keep_sample', 'true'],
           ['report.caution', 'none'],
         ] as const
       ).map(([key, value]) => ({ key, value, written: false })),
