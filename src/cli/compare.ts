@@ -6,7 +6,7 @@ import { writeResults } from '../record/write-results.ts';
 import type { CommonOptions } from './common-options.ts';
 import { type ComparisonFormat, comparisonFiles, comparisonIn } from './comparison-files.ts';
 import { comparisonSummary } from './comparison-summary.ts';
-import { DONE, UNUSABLE } from './exit-status.ts';
+import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
@@ -19,7 +19,8 @@ export interface CompareCommandOptions extends CommonOptions {
 
 /**
  * `plumbrule compare EARLIER LATER`: what is different between two records. Files are written where a folder is named;
- * without one, a format that is named is printed in place of the summary.
+ * without one, a format that is named is printed in place of the summary. A limit against the earlier record that is missed
+ * makes the exit status 1, as it does in `fit --against`.
  */
 export async function compareCommand(
   earlierPath: string,
@@ -40,11 +41,12 @@ export async function compareCommand(
   }
   await showProblems(problems, await sourceTexts(problems), options.problems, terminal);
   if (comparison === null || hasError(problems)) return UNUSABLE;
-  if (options.problems === 'json') return DONE;
+  const status = comparison.acceptance.some(({ passed }) => passed === false) ? NOT_ACCEPTED : DONE;
+  if (options.problems === 'json') return status;
   if (format !== undefined && out === undefined) {
     terminal.out(comparisonIn(format, comparison, later!.record));
   } else if (options.quiet !== true) {
     terminal.out(comparisonSummary(comparison, later!.record, places, terminal));
   }
-  return DONE;
+  return status;
 }

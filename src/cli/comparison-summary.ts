@@ -1,6 +1,7 @@
 import type { Comparison } from '../compare/comparison.ts';
 import type { StudyRecord } from '../record/record.ts';
 import { count, fixed, rounded, roundingFor } from '../report/numbers.ts';
+import { comparedCriterionSentence } from '../report/words/acceptance.ts';
 import {
   attentionLines,
   choiceSentences,
@@ -53,6 +54,10 @@ export function comparisonSummary(
     { label: 'choice', paragraphs: choiceSentences(comparison, selection) },
     { label: 'moved', paragraphs: comparison.models.flatMap((model) => moved(model)) },
     { label: 'new rows', paragraphs: newRows(lexicon, comparison) },
+    {
+      label: 'accepted',
+      paragraphs: comparison.acceptance.map((each) => ({ mark: '·', text: comparedCriterionSentence(each) })),
+    },
     { label: 'written', paragraphs: places.map((line) => ({ line })) },
   ];
   return plumbLine(

@@ -64,9 +64,11 @@ export async function fitOne(path: string, out: string, options: FitOptions): Pr
 }
 
 /** 2 where nothing was written; 1 where no candidate was admitted or an acceptance criterion was missed; else 0. */
-export function statusOf({ written }: FittedStudy): number {
+export function statusOf({ written, comparison }: FittedStudy): number {
   if (written === null) return UNUSABLE;
-  const accepted = written.record.acceptance.every((criterion) => criterion.passed);
+  const accepted =
+    written.record.acceptance.every((criterion) => criterion.passed) &&
+    (comparison?.acceptance ?? []).every((criterion) => criterion.passed !== false);
   return written.record.selection.chosen !== null && accepted ? DONE : NOT_ACCEPTED;
 }
 

@@ -49,7 +49,8 @@ export async function fitCommand(
     const out = options.out ?? defaultFolder(path);
     fitted = await fitOne(path, out, { onProgress: progress.show, parameters, earlier });
     if (options.junit !== undefined) {
-      const run = { study: path, record: fitted.written?.record ?? null, problems: fitted.problems };
+      const { written, problems, comparison } = fitted;
+      const run = { study: path, record: written?.record ?? null, problems, comparison };
       await writeText(options.junit, junitText([run]), (problem) => late.push(problem));
     }
   } finally {
@@ -67,7 +68,7 @@ export async function fitCommand(
 async function showResults({ written, comparison }: FittedStudy, terminal: Terminal): Promise<void> {
   if (written === null) return;
   const found = places(written.out, written.names);
-  terminal.out(summary(written.record, found, terminal));
+  terminal.out(summary(written.record, found, terminal, comparison !== null));
   if (comparison === null) return;
   const { comparisonSummary } = await import('./comparison-summary.ts');
   const shown = found.filter((place) => place.includes('comparison.'));

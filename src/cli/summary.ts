@@ -1,6 +1,6 @@
 import type { RecordCandidate, RecordModel, RecordTerm, StudyRecord } from '../record/record.ts';
 import { count, fixed, percent, rangeWithUnit, rounded, withUnit } from '../report/numbers.ts';
-import { acceptanceSentence, missedSentences } from '../report/words/acceptance.ts';
+import { acceptanceSentence, missedSentences, needsEarlierSentence } from '../report/words/acceptance.ts';
 import { answerSentences, fitSentence } from '../report/words/answer.ts';
 import { bewareLines } from '../report/words/beware.ts';
 import { contractSentence, dateRange, lossReason, rowsSentence } from '../report/words/data.ts';
@@ -17,8 +17,16 @@ import type { Terminal } from './terminal.ts';
 /** Longest lists of candidates, terms and predictions; the report and the tables have all. */
 const MOST = 8;
 
-/** What a run found, in the order in which a reader asks. `places` says where results lie, for the last section. */
-export function summary(record: StudyRecord, places: readonly string[], terminal: Terminal): string {
+/**
+ * What a run found, in the order in which a reader asks. `places` says where results lie, for the last section;
+ * `compared`, whether a comparison follows, which holds the criteria that need an earlier record.
+ */
+export function summary(
+  record: StudyRecord,
+  places: readonly string[],
+  terminal: Terminal,
+  compared = false,
+): string {
   const lexicon = lexiconOf(record);
   const sections: Section[] = [
     { label: 'asked', paragraphs: [record.study.title, ...present(record.study.question)] },
@@ -28,7 +36,7 @@ export function summary(record: StudyRecord, places: readonly string[], terminal
     { label: 'trust', paragraphs: trust(record) },
     { label: 'predicts', paragraphs: predicts(record, lexicon) },
     { label: 'careful', paragraphs: bewareLines(record, lexicon).map((text) => ({ mark: '·', text })) },
-    { label: 'accepted', paragraphs: accepted(record, lexicon) },
+    { label: 'accepted', paragraphs: accepted(record, lexicon, compared) },
     { label: 'written', paragraphs: places.map((line) => ({ line })) },
   ];
   return plumbLine(
@@ -157,10 +165,12 @@ function trust(record: StudyRecord): Paragraph[] {
   ];
 }
 
-function accepted({ acceptance }: StudyRecord, { response }: Lexicon): Paragraph[] {
+function accepted(record: StudyRecord, { response }: Lexicon, compared: boolean): Paragraph[] {
+  const { acceptance, acceptance_against_earlier: later } = record;
   return [
     ...present(acceptanceSentence(acceptance)),
     ...missedSentences(acceptance, fittedUnit(response)).map((text) => ({ mark: '·', text })),
+    ...(compared ? [] : present(needsEarlierSentence(later))),
   ];
 }
 

@@ -2,6 +2,7 @@ import { packageVersion } from '../package-file.ts';
 import type { Report } from '../problem.ts';
 import type { KeptRows } from '../record/read-sample.ts';
 import type { StudyRecord } from '../record/record.ts';
+import { acceptanceAgainst } from './acceptance.ts';
 import { compareModel, givesRecord, type ModelPair, type Side } from './attribute.ts';
 import { compareChoice } from './choice.ts';
 import type { ComparedModel, ComparedRecord, Comparison, NewRows } from './comparison.ts';
@@ -36,13 +37,18 @@ export function compareRecords(
   const rows = compareRows(earlier, later, report);
   if (rows === undefined) return null;
   const first = definitionOf(before);
+  const found = {
+    rows: rows?.described ?? null,
+    models: rows?.models ?? [],
+    new_rows: rows?.newRows ?? null,
+  };
   return {
     format: 'plumbrule-comparison/1',
     tool: { name: 'plumbrule', version: packageVersion() },
     earlier: sideOf(before),
     later: sideOf(now),
     cannot_tell: cannotTell(earlier, later, rows === null ? null : rows.matched.by),
-    rows: rows?.described ?? null,
+    rows: found.rows,
     contract: contractChanges(
       before,
       now,
@@ -53,8 +59,9 @@ export function compareRecords(
       changes: declarationChanges(before, now),
     },
     choice: compareChoice(before, now, first, later.rows === null ? null : sided(later)),
-    models: rows?.models ?? [],
-    new_rows: rows?.newRows ?? null,
+    models: found.models,
+    new_rows: found.new_rows,
+    acceptance: acceptanceAgainst(now, found),
   };
 }
 

@@ -57,6 +57,10 @@ export interface Comparison {
    * The rows added, held against the model chosen earlier; null where there are none or it cannot be done.
    */
   new_rows: NewRows | null;
+  /**
+   * The later study's acceptance criteria that only an earlier record can judge, held against this one; empty where it declares none.
+   */
+  acceptance: ComparedCriterion[];
 }
 /**
  * One of the two records.
@@ -537,4 +541,29 @@ export interface ComparisonTest {
    * P(F > statistic).
    */
   p_value: number;
+}
+/**
+ * One criterion.
+ */
+export interface ComparedCriterion {
+  /**
+   * The figure.
+   */
+  criterion: 'coefficient_change' | 'new_rows_inside';
+  /**
+   * The coefficient; left out for the largest change and for the new rows.
+   */
+  of?: string;
+  /**
+   * The limit, for people.
+   */
+  limit: string;
+  /**
+   * The value found: a change in earlier standard errors without its sign, or a share; null where there is none.
+   */
+  value: number | null;
+  /**
+   * Whether the limit is kept; null where there was nothing to judge, since no row is new. A value that cannot be told misses its limit.
+   */
+  passed: boolean | null;
 }

@@ -5,6 +5,7 @@
 export type {
   ChoiceChange,
   CoefficientChange,
+  ComparedCriterion,
   ComparedModel,
   ComparedRecord,
   ComparedRows,

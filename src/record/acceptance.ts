@@ -1,7 +1,13 @@
 import type { Chosen } from '../examine/chosen.ts';
 import { fromScale } from '../model/response-scale.ts';
-import type { AcceptanceFigure, AcceptancePlan } from '../study/study.ts';
-import type { RecordCandidate, RecordFinding, RecordPrediction, StudyRecord } from './record.ts';
+import type { AcceptanceFigure, AcceptancePlan, EarlierAcceptancePlan } from '../study/study.ts';
+import type {
+  RecordCandidate,
+  RecordEarlierCriterion,
+  RecordFinding,
+  RecordPrediction,
+  StudyRecord,
+} from './record.ts';
 
 type Criterion = StudyRecord['acceptance'][number];
 
@@ -22,9 +28,12 @@ export interface Accepted {
   readonly newest: number | null;
 }
 
-/** Each declared acceptance criterion with its limit, value and whether it is met. An undefined value misses its limit. */
+/**
+ * Each declared acceptance criterion with its limit, value and whether it is met; those apart that need an earlier
+ * record. An undefined value misses its limit.
+ */
 export function acceptanceOf(plans: readonly AcceptancePlan[], found: Accepted): Criterion[] {
-  return plans.map((plan): Criterion => {
+  return plans.filter(isJudgedAlone).map((plan): Criterion => {
     switch (plan.criterion) {
       case 'chosen': {
         const value = found.candidate?.name ?? null;
@@ -52,6 +61,33 @@ export function acceptanceOf(plans: readonly AcceptancePlan[], found: Accepted):
         return held(plan, null, figureOf(plan.criterion, found));
     }
   });
+}
+
+/** The criteria that need an earlier record, with their limits. */
+export function acceptanceAgainstEarlier(plans: readonly AcceptancePlan[]): RecordEarlierCriterion[] {
+  return plans.flatMap((plan) =>
+    isJudgedAlone(plan)
+      ? []
+      : [
+          {
+            criterion: plan.criterion,
+            ...(plan.of === null ? {} : { of: plan.of }),
+            limit: earlierLimit(plan),
+            at_least: plan.atLeast,
+            at_most: plan.atMost,
+          },
+        ],
+  );
+}
+
+function isJudgedAlone(plan: AcceptancePlan): plan is Exclude<AcceptancePlan, EarlierAcceptancePlan> {
+  return plan.criterion !== 'coefficient_change' && plan.criterion !== 'new_rows_inside';
+}
+
+function earlierLimit({ criterion, atLeast, atMost }: EarlierAcceptancePlan): string {
+  const limit = limitText(atLeast, atMost);
+  if (criterion === 'new_rows_inside') return limit;
+  return `${limit} ${atMost === 1 ? 'standard error' : 'standard errors'}`;
 }
 
 interface Limits {

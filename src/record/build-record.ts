@@ -23,7 +23,7 @@ import { coefficientFigures } from '../select/coefficients.ts';
 import type { FoundFamily } from '../select/search-families.ts';
 import { summarise } from '../select/summarise.ts';
 import type { Study } from '../study/study.ts';
-import { acceptanceOf } from './acceptance.ts';
+import { acceptanceAgainstEarlier, acceptanceOf } from './acceptance.ts';
 import { rowSummaries } from './chart-points.ts';
 import { type Bootstrapped, describeBootstrap } from './describe-bootstrap.ts';
 import { describeFamilies, modelsLookedAt, searchWarnings } from './describe-families.ts';
@@ -83,6 +83,7 @@ export function buildRecord(run: Run): StudyRecord {
   const variables = describeVariables(study, table, sample, run.spreads);
   const response = variables.find((variable) => variable.name === study.response.variable)!;
   const examination = chosen === null ? null : examinationOf(chosen, run);
+  const againstEarlier = acceptanceAgainstEarlier(study.acceptance);
   const predictions = (predicted?.predictions ?? []).map((one) => ({
     ...one,
     values: one.values.map((value) => ({ ...value })),
@@ -175,6 +176,7 @@ export function buildRecord(run: Run): StudyRecord {
       rowsLost: sample.losses.reduce((sum, loss) => (loss.kind === 'left_out' ? sum : sum + loss.rows), 0),
       newest: newestDay(study, sample),
     }),
+    ...(againstEarlier.length === 0 ? {} : { acceptance_against_earlier: againstEarlier }),
     warnings: warningsOf(run),
   };
 }

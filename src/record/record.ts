@@ -5,6 +5,7 @@
 export type {
   RecordCandidate,
   RecordCoefficient,
+  RecordEarlierCriterion,
   RecordExamination,
   RecordFamily,
   RecordFinding,

@@ -918,6 +918,10 @@ export interface StudyRecord {
     passed: boolean;
   }[];
   /**
+   * The study's acceptance criteria that only an earlier record can judge; a comparison holds what came of them, since a record does not depend on another. Left out where the study declares none.
+   */
+  acceptance_against_earlier?: RecordEarlierCriterion[];
+  /**
    * What to know before relying on the results, in the order found.
    *
    * Items: One warning.
@@ -2717,4 +2721,29 @@ export interface RecordPrediction {
    * Each way in which the row lies outside the data, as a sentence.
    */
   outside: string[];
+}
+/**
+ * One criterion.
+ */
+export interface RecordEarlierCriterion {
+  /**
+   * The figure.
+   */
+  criterion: 'coefficient_change' | 'new_rows_inside';
+  /**
+   * The coefficient; left out for the largest change and for the new rows.
+   */
+  of?: string;
+  /**
+   * The limit, for people.
+   */
+  limit: string;
+  /**
+   * Lower limit; null for none.
+   */
+  at_least: number | null;
+  /**
+   * Upper limit; null for none.
+   */
+  at_most: number | null;
 }

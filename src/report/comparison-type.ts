@@ -1,6 +1,7 @@
 /** The one place where the report takes in the type of a comparison. */
 export type {
   CoefficientChange,
+  ComparedCriterion,
   ComparedModel,
   Comparison,
   ComparisonTest,

@@ -9,6 +9,8 @@ export interface ComparisonView {
   readonly answer: readonly string[];
   /** What to look at first. */
   readonly attention: readonly string[];
+  /** Every acceptance criterion that an earlier record judges, and what came of it. */
+  readonly accepted: readonly { readonly word: string; readonly sentence: string }[];
   /** The two sides in a line each. */
   readonly sides: readonly SideView[];
   readonly rows: RowsView;

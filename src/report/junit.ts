@@ -1,6 +1,7 @@
 import type { Problem } from '../problem.ts';
+import type { Comparison } from './comparison-type.ts';
 import type { StudyRecord } from './record-type.ts';
-import { acceptanceValue, criterionLabel } from './words/acceptance.ts';
+import { acceptanceValue, comparedCriterionSentence, criterionLabel } from './words/acceptance.ts';
 import { lexiconOf } from './words/lexicon.ts';
 import { fittedUnit } from './words/scale.ts';
 
@@ -11,11 +12,13 @@ export interface JunitRun {
   /** Null where the run stopped on an error. */
   readonly record: StudyRecord | null;
   readonly problems: readonly Problem[];
+  /** With an earlier record, which judges the criteria that need one; without, they are skipped. */
+  readonly comparison?: Comparison | null;
 }
 
 interface TestCase {
   readonly name: string;
-  readonly outcome: 'passed' | 'failure' | 'error';
+  readonly outcome: 'passed' | 'failure' | 'error' | 'skipped';
   readonly type: string;
   readonly message: string;
 }
@@ -23,7 +26,8 @@ interface TestCase {
 /**
  * Runs as JUnit XML, in the form that continuous-integration servers read (common practice, after the report format of
  * Apache Ant's junit task): a suite for each study, in it one test for the run itself, one for the choice, and one for
- * each acceptance criterion. A problem that stopped the run is an error, a criterion missed a failure. No clock time.
+ * each acceptance criterion. A problem that stopped the run is an error, a criterion missed a failure,
+ * and a criterion that could not be judged is skipped. No clock time.
  */
 export function junitText(runs: readonly JunitRun[]): string {
   const suites = runs.map((run) => ({ run, cases: casesOf(run) }));
@@ -41,7 +45,7 @@ export function junitText(runs: readonly JunitRun[]): string {
   return `${lines.join('\n')}\n`;
 }
 
-function casesOf({ record, problems }: JunitRun): TestCase[] {
+function casesOf({ record, problems, comparison }: JunitRun): TestCase[] {
   const errors = problems.filter(({ severity }) => severity === 'error');
   const ran: TestCase =
     errors.length === 0 && record !== null
@@ -69,7 +73,23 @@ function casesOf({ record, problems }: JunitRun): TestCase[] {
       const message = `${label} is ${value}; the study asks for ${criterion.limit}.`;
       return { name, outcome: 'failure', type: criterion.criterion, message };
     }),
+    ...(comparison?.acceptance ?? record.acceptance_against_earlier ?? []).map(earlierCase),
   ];
+}
+
+function earlierCase(
+  criterion:
+    | Comparison['acceptance'][number]
+    | NonNullable<StudyRecord['acceptance_against_earlier']>[number],
+): TestCase {
+  const name = `${criterionLabel(criterion)}: ${criterion.limit}`;
+  const type = criterion.criterion;
+  if (!('passed' in criterion)) {
+    return { name, outcome: 'skipped', type, message: 'It needs an earlier record.' };
+  }
+  if (criterion.passed === true) return passed(name);
+  const outcome = criterion.passed === null ? 'skipped' : 'failure';
+  return { name, outcome, type, message: comparedCriterionSentence(criterion) };
 }
 
 function passed(name: string): TestCase {
@@ -90,13 +110,16 @@ function said({ place, message, hint }: Problem): string {
 
 function counts(cases: readonly TestCase[]): string {
   const count = (outcome: TestCase['outcome']) => cases.filter((one) => one.outcome === outcome).length;
-  return `tests="${cases.length}" failures="${count('failure')}" errors="${count('error')}" skipped="0"`;
+  return `tests="${cases.length}" failures="${count('failure')}" errors="${count('error')}" skipped="${count('skipped')}"`;
 }
 
 function caseLines({ name, outcome, type, message }: TestCase, study: string): string[] {
   const open = `    <testcase classname="${escaped(study)}" name="${escaped(name)}"`;
   if (outcome === 'passed') return [`${open}/>`];
   const [first = ''] = message.split('\n');
+  if (outcome === 'skipped') {
+    return [`${open}>`, `      <skipped message="${escaped(first)}"/>`, '    </testcase>'];
+  }
   return [
     `${open}>`,
     `      <${outcome} message="${escaped(first)}" type="${escaped(type)}">${escaped(message)}</${outcome}>`,

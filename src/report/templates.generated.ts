@@ -91,6 +91,17 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     + container.escapeExpression(container.lambda(depth0, depth0))
     + "</li>\n";
 },"4":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"acceptance\">\n<h2>Held against the earlier record</h2>\n<ul>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"accepted"),{"name":"each","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":45,"column":0},"end":{"line":47,"column":9}}})) != null ? stack1 : "")
+    + "</ul>\n</div>\n";
+},"5":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -98,33 +109,13 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
         return undefined
     };
 
-  return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"when") || alias1(depth0, "when", {"start":{"line":47,"column":22},"end":{"line":47,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"when","hash":{},"data":data,"loc":{"start":{"line":47,"column":20},"end":{"line":47,"column":28}}}) : helper)))
-    + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"study") || alias1(depth0, "study", {"start":{"line":47,"column":39},"end":{"line":47,"column":44}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"study","hash":{},"data":data,"loc":{"start":{"line":47,"column":37},"end":{"line":47,"column":46}}}) : helper)))
-    + "</td><td>"
-    + alias4((((helper = lookupProperty(helpers,"data") || alias1(depth0, "data", {"start":{"line":47,"column":57},"end":{"line":47,"column":61}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"data","hash":{},"data":data,"loc":{"start":{"line":47,"column":55},"end":{"line":47,"column":63}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"rows") || alias1(depth0, "rows", {"start":{"line":47,"column":84},"end":{"line":47,"column":88}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rows","hash":{},"data":data,"loc":{"start":{"line":47,"column":82},"end":{"line":47,"column":90}}}) : helper)))
-    + "</td><td>"
-    + alias4((((helper = lookupProperty(helpers,"dates") || alias1(depth0, "dates", {"start":{"line":47,"column":101},"end":{"line":47,"column":106}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"dates","hash":{},"data":data,"loc":{"start":{"line":47,"column":99},"end":{"line":47,"column":108}}}) : helper)))
-    + "</td><td>"
-    + alias4((((helper = lookupProperty(helpers,"chosen") || alias1(depth0, "chosen", {"start":{"line":47,"column":119},"end":{"line":47,"column":125}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"chosen","hash":{},"data":data,"loc":{"start":{"line":47,"column":117},"end":{"line":47,"column":127}}}) : helper)))
-    + "</td></tr>\n";
-},"5":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<p>"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "revised", {"start":{"line":71,"column":5},"end":{"line":71,"column":17}} ), depth0))
-    + "</p>\n<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Revised cells\">\n<table>\n<caption>Revised cells</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\">variable</th><th scope=\"col\" class=\"n\">before</th><th scope=\"col\" class=\"n\">now</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisions"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":77,"column":0},"end":{"line":79,"column":9}}})) != null ? stack1 : "")
-    + "</tbody>\n</table>\n</div>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisionsMore"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":83,"column":0},"end":{"line":85,"column":7}}})) != null ? stack1 : "");
+  return "<li class=\""
+    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":46,"column":13},"end":{"line":46,"column":17}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":46,"column":11},"end":{"line":46,"column":19}}}) : helper)))
+    + "\"><span class=\"verdict\">"
+    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":46,"column":45},"end":{"line":46,"column":49}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":46,"column":43},"end":{"line":46,"column":51}}}) : helper)))
+    + "</span> "
+    + alias4((((helper = lookupProperty(helpers,"sentence") || alias1(depth0, "sentence", {"start":{"line":46,"column":61},"end":{"line":46,"column":69}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"sentence","hash":{},"data":data,"loc":{"start":{"line":46,"column":59},"end":{"line":46,"column":71}}}) : helper)))
+    + "</li>\n";
 },"6":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -134,36 +125,49 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"row") || alias1(depth0, "row", {"start":{"line":78,"column":22},"end":{"line":78,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"row","hash":{},"data":data,"loc":{"start":{"line":78,"column":20},"end":{"line":78,"column":27}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"when") || alias1(depth0, "when", {"start":{"line":57,"column":22},"end":{"line":57,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"when","hash":{},"data":data,"loc":{"start":{"line":57,"column":20},"end":{"line":57,"column":28}}}) : helper)))
     + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"variable") || alias1(depth0, "variable", {"start":{"line":78,"column":38},"end":{"line":78,"column":46}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"variable","hash":{},"data":data,"loc":{"start":{"line":78,"column":36},"end":{"line":78,"column":48}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"study") || alias1(depth0, "study", {"start":{"line":57,"column":39},"end":{"line":57,"column":44}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"study","hash":{},"data":data,"loc":{"start":{"line":57,"column":37},"end":{"line":57,"column":46}}}) : helper)))
+    + "</td><td>"
+    + alias4((((helper = lookupProperty(helpers,"data") || alias1(depth0, "data", {"start":{"line":57,"column":57},"end":{"line":57,"column":61}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"data","hash":{},"data":data,"loc":{"start":{"line":57,"column":55},"end":{"line":57,"column":63}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"earlier") || alias1(depth0, "earlier", {"start":{"line":78,"column":69},"end":{"line":78,"column":76}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"earlier","hash":{},"data":data,"loc":{"start":{"line":78,"column":67},"end":{"line":78,"column":78}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"later") || alias1(depth0, "later", {"start":{"line":78,"column":99},"end":{"line":78,"column":104}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"later","hash":{},"data":data,"loc":{"start":{"line":78,"column":97},"end":{"line":78,"column":106}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"rows") || alias1(depth0, "rows", {"start":{"line":57,"column":84},"end":{"line":57,"column":88}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rows","hash":{},"data":data,"loc":{"start":{"line":57,"column":82},"end":{"line":57,"column":90}}}) : helper)))
+    + "</td><td>"
+    + alias4((((helper = lookupProperty(helpers,"dates") || alias1(depth0, "dates", {"start":{"line":57,"column":101},"end":{"line":57,"column":106}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"dates","hash":{},"data":data,"loc":{"start":{"line":57,"column":99},"end":{"line":57,"column":108}}}) : helper)))
+    + "</td><td>"
+    + alias4((((helper = lookupProperty(helpers,"chosen") || alias1(depth0, "chosen", {"start":{"line":57,"column":119},"end":{"line":57,"column":125}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"chosen","hash":{},"data":data,"loc":{"start":{"line":57,"column":117},"end":{"line":57,"column":127}}}) : helper)))
     + "</td></tr>\n";
 },"7":function(container,depth0,helpers,partials,data) {
-    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<p class=\"small\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "revisionsMore", {"start":{"line":84,"column":19},"end":{"line":84,"column":37}} ), depth0))
-    + "</p>\n";
+  return "<p>"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "revised", {"start":{"line":81,"column":5},"end":{"line":81,"column":17}} ), depth0))
+    + "</p>\n<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Revised cells\">\n<table>\n<caption>Revised cells</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\">variable</th><th scope=\"col\" class=\"n\">before</th><th scope=\"col\" class=\"n\">now</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisions"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":87,"column":0},"end":{"line":89,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisionsMore"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":93,"column":0},"end":{"line":95,"column":7}}})) != null ? stack1 : "");
 },"8":function(container,depth0,helpers,partials,data) {
-    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<p class=\"small\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "addedList", {"start":{"line":88,"column":19},"end":{"line":88,"column":33}} ), depth0))
-    + "</p>\n";
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"row") || alias1(depth0, "row", {"start":{"line":88,"column":22},"end":{"line":88,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"row","hash":{},"data":data,"loc":{"start":{"line":88,"column":20},"end":{"line":88,"column":27}}}) : helper)))
+    + "</th><td>"
+    + alias4((((helper = lookupProperty(helpers,"variable") || alias1(depth0, "variable", {"start":{"line":88,"column":38},"end":{"line":88,"column":46}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"variable","hash":{},"data":data,"loc":{"start":{"line":88,"column":36},"end":{"line":88,"column":48}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"earlier") || alias1(depth0, "earlier", {"start":{"line":88,"column":69},"end":{"line":88,"column":76}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"earlier","hash":{},"data":data,"loc":{"start":{"line":88,"column":67},"end":{"line":88,"column":78}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"later") || alias1(depth0, "later", {"start":{"line":88,"column":99},"end":{"line":88,"column":104}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"later","hash":{},"data":data,"loc":{"start":{"line":88,"column":97},"end":{"line":88,"column":106}}}) : helper)))
+    + "</td></tr>\n";
 },"9":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -173,21 +177,30 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<p class=\"small\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "removedList", {"start":{"line":91,"column":19},"end":{"line":91,"column":35}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "revisionsMore", {"start":{"line":94,"column":19},"end":{"line":94,"column":37}} ), depth0))
     + "</p>\n";
 },"10":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<ul>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"contract"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":99,"column":0},"end":{"line":101,"column":9}}})) != null ? stack1 : "")
-    + "</ul>\n";
+  return "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "addedList", {"start":{"line":98,"column":19},"end":{"line":98,"column":33}} ), depth0))
+    + "</p>\n";
 },"11":function(container,depth0,helpers,partials,data) {
-    return "<p>Levels, ranges, missing values, columns and units are as they were.</p>\n";
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "removedList", {"start":{"line":101,"column":19},"end":{"line":101,"column":35}} ), depth0))
+    + "</p>\n";
 },"12":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -197,9 +210,22 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<ul>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"declaration"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":112,"column":0},"end":{"line":114,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"contract"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":109,"column":0},"end":{"line":111,"column":9}}})) != null ? stack1 : "")
     + "</ul>\n";
 },"13":function(container,depth0,helpers,partials,data) {
+    return "<p>Levels, ranges, missing values, columns and units are as they were.</p>\n";
+},"14":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<ul>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"declaration"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":122,"column":0},"end":{"line":124,"column":9}}})) != null ? stack1 : "")
+    + "</ul>\n";
+},"15":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -208,8 +234,8 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<p>Every difference is taken apart in one order: the rows that are gone, then the values revised, then the rows that are new, then the declaration. Each step is a fit of its own, and the parts add up to the whole.</p>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"models"),{"name":"each","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":128,"column":0},"end":{"line":153,"column":9}}})) != null ? stack1 : "");
-},"14":function(container,depth0,helpers,partials,data) {
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"models"),{"name":"each","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":138,"column":0},"end":{"line":163,"column":9}}})) != null ? stack1 : "");
+},"16":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -218,39 +244,17 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<h3>"
-    + alias4((((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":129,"column":6},"end":{"line":129,"column":13}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":129,"column":4},"end":{"line":129,"column":15}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":139,"column":6},"end":{"line":139,"column":13}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":139,"column":4},"end":{"line":139,"column":15}}}) : helper)))
     + "</h3>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"finding"),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":130,"column":0},"end":{"line":132,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"note"),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":133,"column":0},"end":{"line":135,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"scatter"),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":136,"column":0},"end":{"line":138,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":139,"column":0},"end":{"line":141,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"finding"),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":140,"column":0},"end":{"line":142,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"note"),{"name":"if","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":143,"column":0},"end":{"line":145,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"scatter"),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":146,"column":0},"end":{"line":148,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":149,"column":0},"end":{"line":151,"column":7}}})) != null ? stack1 : "")
     + "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients before and now\">\n<table>\n<caption>Coefficients for "
-    + alias4((((helper = lookupProperty(helpers,"quantity") || alias1(depth0, "quantity", {"start":{"line":144,"column":28},"end":{"line":144,"column":36}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"quantity","hash":{},"data":data,"loc":{"start":{"line":144,"column":26},"end":{"line":144,"column":38}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"quantity") || alias1(depth0, "quantity", {"start":{"line":154,"column":28},"end":{"line":154,"column":36}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"quantity","hash":{},"data":data,"loc":{"start":{"line":154,"column":26},"end":{"line":154,"column":38}}}) : helper)))
     + ", before and now</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\" class=\"n\">before</th><th scope=\"col\" class=\"n\">now</th><th scope=\"col\" class=\"n\">difference</th><th scope=\"col\" class=\"n\">by rows gone</th><th scope=\"col\" class=\"n\">by revision</th><th scope=\"col\" class=\"n\">by new rows</th><th scope=\"col\" class=\"n\">by declaration</th><th scope=\"col\" class=\"n\">in earlier standard errors</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"coefficients"),{"name":"each","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":147,"column":0},"end":{"line":149,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"coefficients"),{"name":"each","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":157,"column":0},"end":{"line":159,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n";
-},"15":function(container,depth0,helpers,partials,data) {
-    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<p class=\"finding\">"
-    + container.escapeExpression((((helper = lookupProperty(helpers,"finding") || container.strict(depth0, "finding", {"start":{"line":131,"column":21},"end":{"line":131,"column":28}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"finding","hash":{},"data":data,"loc":{"start":{"line":131,"column":19},"end":{"line":131,"column":30}}}) : helper)))
-    + "</p>\n";
-},"16":function(container,depth0,helpers,partials,data) {
-    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<p>"
-    + container.escapeExpression((((helper = lookupProperty(helpers,"note") || container.strict(depth0, "note", {"start":{"line":134,"column":5},"end":{"line":134,"column":9}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"note","hash":{},"data":data,"loc":{"start":{"line":134,"column":3},"end":{"line":134,"column":11}}}) : helper)))
-    + "</p>\n";
 },"17":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -259,10 +263,32 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
         return undefined
     };
 
-  return "<p>"
-    + container.escapeExpression((((helper = lookupProperty(helpers,"scatter") || container.strict(depth0, "scatter", {"start":{"line":137,"column":5},"end":{"line":137,"column":12}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"scatter","hash":{},"data":data,"loc":{"start":{"line":137,"column":3},"end":{"line":137,"column":14}}}) : helper)))
+  return "<p class=\"finding\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"finding") || container.strict(depth0, "finding", {"start":{"line":141,"column":21},"end":{"line":141,"column":28}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"finding","hash":{},"data":data,"loc":{"start":{"line":141,"column":19},"end":{"line":141,"column":30}}}) : helper)))
     + "</p>\n";
 },"18":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p>"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"note") || container.strict(depth0, "note", {"start":{"line":144,"column":5},"end":{"line":144,"column":9}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"note","hash":{},"data":data,"loc":{"start":{"line":144,"column":3},"end":{"line":144,"column":11}}}) : helper)))
+    + "</p>\n";
+},"19":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p>"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"scatter") || container.strict(depth0, "scatter", {"start":{"line":147,"column":5},"end":{"line":147,"column":12}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"scatter","hash":{},"data":data,"loc":{"start":{"line":147,"column":3},"end":{"line":147,"column":14}}}) : helper)))
+    + "</p>\n";
+},"20":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -271,7 +297,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(depth0,"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
-},"19":function(container,depth0,helpers,partials,data) {
+},"21":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -280,26 +306,26 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":148,"column":22},"end":{"line":148,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":148,"column":20},"end":{"line":148,"column":28}}}) : helper)))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"unit"),{"name":"if","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":148,"column":28},"end":{"line":148,"column":82}}})) != null ? stack1 : "")
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":158,"column":22},"end":{"line":158,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":158,"column":20},"end":{"line":158,"column":28}}}) : helper)))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"unit"),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":158,"column":28},"end":{"line":158,"column":82}}})) != null ? stack1 : "")
     + "</th><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"before") || alias1(depth0, "before", {"start":{"line":148,"column":103},"end":{"line":148,"column":109}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"before","hash":{},"data":data,"loc":{"start":{"line":148,"column":101},"end":{"line":148,"column":111}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"before") || alias1(depth0, "before", {"start":{"line":158,"column":103},"end":{"line":158,"column":109}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"before","hash":{},"data":data,"loc":{"start":{"line":158,"column":101},"end":{"line":158,"column":111}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"after") || alias1(depth0, "after", {"start":{"line":148,"column":132},"end":{"line":148,"column":137}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"after","hash":{},"data":data,"loc":{"start":{"line":148,"column":130},"end":{"line":148,"column":139}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"after") || alias1(depth0, "after", {"start":{"line":158,"column":132},"end":{"line":158,"column":137}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"after","hash":{},"data":data,"loc":{"start":{"line":158,"column":130},"end":{"line":158,"column":139}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"difference") || alias1(depth0, "difference", {"start":{"line":148,"column":160},"end":{"line":148,"column":170}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"difference","hash":{},"data":data,"loc":{"start":{"line":148,"column":158},"end":{"line":148,"column":172}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"difference") || alias1(depth0, "difference", {"start":{"line":158,"column":160},"end":{"line":158,"column":170}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"difference","hash":{},"data":data,"loc":{"start":{"line":158,"column":158},"end":{"line":158,"column":172}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"removed") || alias1(depth0, "removed", {"start":{"line":148,"column":193},"end":{"line":148,"column":200}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"removed","hash":{},"data":data,"loc":{"start":{"line":148,"column":191},"end":{"line":148,"column":202}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"removed") || alias1(depth0, "removed", {"start":{"line":158,"column":193},"end":{"line":158,"column":200}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"removed","hash":{},"data":data,"loc":{"start":{"line":158,"column":191},"end":{"line":158,"column":202}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"revised") || alias1(depth0, "revised", {"start":{"line":148,"column":223},"end":{"line":148,"column":230}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"revised","hash":{},"data":data,"loc":{"start":{"line":148,"column":221},"end":{"line":148,"column":232}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"revised") || alias1(depth0, "revised", {"start":{"line":158,"column":223},"end":{"line":158,"column":230}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"revised","hash":{},"data":data,"loc":{"start":{"line":158,"column":221},"end":{"line":158,"column":232}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"added") || alias1(depth0, "added", {"start":{"line":148,"column":253},"end":{"line":148,"column":258}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"added","hash":{},"data":data,"loc":{"start":{"line":148,"column":251},"end":{"line":148,"column":260}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"added") || alias1(depth0, "added", {"start":{"line":158,"column":253},"end":{"line":158,"column":258}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"added","hash":{},"data":data,"loc":{"start":{"line":158,"column":251},"end":{"line":158,"column":260}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"declaration") || alias1(depth0, "declaration", {"start":{"line":148,"column":281},"end":{"line":148,"column":292}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"declaration","hash":{},"data":data,"loc":{"start":{"line":148,"column":279},"end":{"line":148,"column":294}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"declaration") || alias1(depth0, "declaration", {"start":{"line":158,"column":281},"end":{"line":158,"column":292}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"declaration","hash":{},"data":data,"loc":{"start":{"line":158,"column":279},"end":{"line":158,"column":294}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"inErrors") || alias1(depth0, "inErrors", {"start":{"line":148,"column":315},"end":{"line":148,"column":323}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"inErrors","hash":{},"data":data,"loc":{"start":{"line":148,"column":313},"end":{"line":148,"column":325}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"inErrors") || alias1(depth0, "inErrors", {"start":{"line":158,"column":315},"end":{"line":158,"column":323}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"inErrors","hash":{},"data":data,"loc":{"start":{"line":158,"column":313},"end":{"line":158,"column":325}}}) : helper)))
     + "</td></tr>\n";
-},"20":function(container,depth0,helpers,partials,data) {
+},"22":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -308,11 +334,11 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<span class=\"under\">"
-    + container.escapeExpression((((helper = lookupProperty(helpers,"unit") || container.strict(depth0, "unit", {"start":{"line":148,"column":62},"end":{"line":148,"column":66}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"unit","hash":{},"data":data,"loc":{"start":{"line":148,"column":60},"end":{"line":148,"column":68}}}) : helper)))
+    + container.escapeExpression((((helper = lookupProperty(helpers,"unit") || container.strict(depth0, "unit", {"start":{"line":158,"column":62},"end":{"line":158,"column":66}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"unit","hash":{},"data":data,"loc":{"start":{"line":158,"column":60},"end":{"line":158,"column":68}}}) : helper)))
     + "</span>";
-},"21":function(container,depth0,helpers,partials,data) {
+},"23":function(container,depth0,helpers,partials,data) {
     return "<p>There is no model that could be fitted to both sets of rows.</p>\n";
-},"22":function(container,depth0,helpers,partials,data) {
+},"24":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -320,8 +346,8 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"newRows"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":161,"column":0},"end":{"line":163,"column":9}}})) != null ? stack1 : "");
-},"23":function(container,depth0,helpers,partials,data) {
+  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"newRows"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":171,"column":0},"end":{"line":173,"column":9}}})) != null ? stack1 : "");
+},"25":function(container,depth0,helpers,partials,data) {
     return "<p>There are no new rows that the earlier model could be held against.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -347,33 +373,34 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"answer"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":0},"end":{"line":29,"column":9}}})) != null ? stack1 : "")
     + "</div>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"attention"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":31,"column":0},"end":{"line":40,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"accepted"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":41,"column":0},"end":{"line":50,"column":7}}})) != null ? stack1 : "")
     + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"The two records\">\n<table>\n<caption>The two records</caption>\n<thead><tr><th scope=\"col\"></th><th scope=\"col\">study</th><th scope=\"col\">data</th><th scope=\"col\" class=\"n\">rows used</th><th scope=\"col\">dates</th><th scope=\"col\">chosen</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"sides"),{"name":"each","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":46,"column":0},"end":{"line":48,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"sides"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":56,"column":0},"end":{"line":58,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n<nav aria-label=\"Sections\">\n<ol>\n<li><a href=\"#rows\">Which rows changed?</a></li>\n<li><a href=\"#contract\">Did the data keep its contract?</a></li>\n<li><a href=\"#study\">Did the study change?</a></li>\n<li><a href=\"#choice\">Is the choice the same?</a></li>\n<li><a href=\"#coefficients\">What moved each coefficient?</a></li>\n<li><a href=\"#new-rows\">Do the new rows fit?</a></li>\n</ol>\n</nav>\n</section>\n<main>\n<section id=\"rows\" aria-labelledby=\"rows-heading\">\n<h2 id=\"rows-heading\"><span class=\"no\">1</span> Which rows changed?</h2>\n<p>"
-    + alias4((lookupProperty(helpers,"join")||alias1(depth0, "join", {"start":{"line":66,"column":5},"end":{"line":66,"column":9}} )).call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"sentences")," ",{"name":"join","hash":{},"data":data,"loc":{"start":{"line":66,"column":3},"end":{"line":66,"column":30}}}))
+    + alias4((lookupProperty(helpers,"join")||alias1(depth0, "join", {"start":{"line":76,"column":5},"end":{"line":76,"column":9}} )).call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"sentences")," ",{"name":"join","hash":{},"data":data,"loc":{"start":{"line":76,"column":3},"end":{"line":76,"column":30}}}))
     + "</p>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"cannotTell"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":67,"column":0},"end":{"line":69,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"revised"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":70,"column":0},"end":{"line":86,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"addedList"),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":87,"column":0},"end":{"line":89,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"removedList"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":90,"column":0},"end":{"line":92,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"cannotTell"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":77,"column":0},"end":{"line":79,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"revised"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":80,"column":0},"end":{"line":96,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"addedList"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":0},"end":{"line":99,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"removedList"),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":100,"column":0},"end":{"line":102,"column":7}}})) != null ? stack1 : "")
     + "<p class=\"small\">Rows are those used: one that was read but is now left out counts as gone.</p>\n</section>\n<section id=\"contract\" aria-labelledby=\"contract-heading\">\n<h2 id=\"contract-heading\"><span class=\"no\">2</span> Did the data keep its contract?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"contract"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.program(11, data, 0),"data":data,"loc":{"start":{"line":97,"column":0},"end":{"line":105,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"contract"),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.program(13, data, 0),"data":data,"loc":{"start":{"line":107,"column":0},"end":{"line":115,"column":7}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"study\" aria-labelledby=\"study-heading\">\n<h2 id=\"study-heading\"><span class=\"no\">3</span> Did the study change?</h2>\n<p>"
-    + alias4((((helper = lookupProperty(helpers,"study") || alias1(depth0, "study", {"start":{"line":109,"column":5},"end":{"line":109,"column":10}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"study","hash":{},"data":data,"loc":{"start":{"line":109,"column":3},"end":{"line":109,"column":12}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"study") || alias1(depth0, "study", {"start":{"line":119,"column":5},"end":{"line":119,"column":10}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"study","hash":{},"data":data,"loc":{"start":{"line":119,"column":3},"end":{"line":119,"column":12}}}) : helper)))
     + "</p>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"declaration"),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":110,"column":0},"end":{"line":116,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"declaration"),{"name":"if","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":120,"column":0},"end":{"line":126,"column":7}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"choice\" aria-labelledby=\"choice-heading\">\n<h2 id=\"choice-heading\"><span class=\"no\">4</span> Is the choice the same?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"choice"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":120,"column":0},"end":{"line":122,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"choice"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":130,"column":0},"end":{"line":132,"column":9}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"coefficients\" aria-labelledby=\"coefficients-heading\">\n<h2 id=\"coefficients-heading\"><span class=\"no\">5</span> What moved each coefficient?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"models"),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.program(21, data, 0),"data":data,"loc":{"start":{"line":126,"column":0},"end":{"line":156,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"models"),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.program(23, data, 0),"data":data,"loc":{"start":{"line":136,"column":0},"end":{"line":166,"column":7}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"new-rows\" aria-labelledby=\"new-rows-heading\">\n<h2 id=\"new-rows-heading\"><span class=\"no\">6</span> Do the new rows fit?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"newRows"),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.program(23, data, 0),"data":data,"loc":{"start":{"line":160,"column":0},"end":{"line":166,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"newRows"),{"name":"if","hash":{},"fn":container.program(24, data, 0),"inverse":container.program(25, data, 0),"data":data,"loc":{"start":{"line":170,"column":0},"end":{"line":176,"column":7}}})) != null ? stack1 : "")
     + "</section>\n</main>\n<footer>\n"
     + ((stack1 = container.invokePartial(lookupProperty(partials,"mark"),depth0,{"name":"mark","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
     + "<p>"
-    + alias4((((helper = lookupProperty(helpers,"title") || alias1(depth0, "title", {"start":{"line":171,"column":5},"end":{"line":171,"column":10}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"title","hash":{},"data":data,"loc":{"start":{"line":171,"column":3},"end":{"line":171,"column":12}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"title") || alias1(depth0, "title", {"start":{"line":181,"column":5},"end":{"line":181,"column":10}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"title","hash":{},"data":data,"loc":{"start":{"line":181,"column":3},"end":{"line":181,"column":12}}}) : helper)))
     + ". Made by "
-    + alias4((((helper = lookupProperty(helpers,"tool") || alias1(depth0, "tool", {"start":{"line":171,"column":24},"end":{"line":171,"column":28}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"tool","hash":{},"data":data,"loc":{"start":{"line":171,"column":22},"end":{"line":171,"column":30}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"tool") || alias1(depth0, "tool", {"start":{"line":181,"column":24},"end":{"line":181,"column":28}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"tool","hash":{},"data":data,"loc":{"start":{"line":181,"column":22},"end":{"line":181,"column":30}}}) : helper)))
     + " from two records of the study and the rows kept with them.</p>\n</footer>\n</body>\n</html>\n";
 },"usePartial":true,"useData":true};
 export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpers,partials,data) {
@@ -399,6 +426,30 @@ export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpe
     + ((stack1 = container.lambda(depth0, depth0)) != null ? stack1 : "")
     + "\n";
 },"3":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "**Held against the earlier record**\n\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"accepted"),{"name":"each","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":0},"end":{"line":20,"column":9}}})) != null ? stack1 : "")
+    + "\n";
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "- "
+    + ((stack1 = (((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":19,"column":4},"end":{"line":19,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":19,"column":2},"end":{"line":19,"column":10}}}) : helper))) != null ? stack1 : "")
+    + ": "
+    + ((stack1 = (((helper = lookupProperty(helpers,"sentence") || alias1(depth0, "sentence", {"start":{"line":19,"column":14},"end":{"line":19,"column":22}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"sentence","hash":{},"data":data,"loc":{"start":{"line":19,"column":12},"end":{"line":19,"column":24}}}) : helper))) != null ? stack1 : "")
+    + "\n";
+},"5":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -407,43 +458,26 @@ export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpe
     };
 
   return "| "
-    + ((stack1 = (((helper = lookupProperty(helpers,"when") || alias1(depth0, "when", {"start":{"line":18,"column":4},"end":{"line":18,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"when","hash":{},"data":data,"loc":{"start":{"line":18,"column":2},"end":{"line":18,"column":10}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"when") || alias1(depth0, "when", {"start":{"line":26,"column":4},"end":{"line":26,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"when","hash":{},"data":data,"loc":{"start":{"line":26,"column":2},"end":{"line":26,"column":10}}}) : helper))) != null ? stack1 : "")
     + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"study") || alias1(depth0, "study", {"start":{"line":18,"column":15},"end":{"line":18,"column":20}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"study","hash":{},"data":data,"loc":{"start":{"line":18,"column":13},"end":{"line":18,"column":22}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"study") || alias1(depth0, "study", {"start":{"line":26,"column":15},"end":{"line":26,"column":20}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"study","hash":{},"data":data,"loc":{"start":{"line":26,"column":13},"end":{"line":26,"column":22}}}) : helper))) != null ? stack1 : "")
     + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"data") || alias1(depth0, "data", {"start":{"line":18,"column":27},"end":{"line":18,"column":31}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"data","hash":{},"data":data,"loc":{"start":{"line":18,"column":25},"end":{"line":18,"column":33}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"data") || alias1(depth0, "data", {"start":{"line":26,"column":27},"end":{"line":26,"column":31}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"data","hash":{},"data":data,"loc":{"start":{"line":26,"column":25},"end":{"line":26,"column":33}}}) : helper))) != null ? stack1 : "")
     + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"rows") || alias1(depth0, "rows", {"start":{"line":18,"column":38},"end":{"line":18,"column":42}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rows","hash":{},"data":data,"loc":{"start":{"line":18,"column":36},"end":{"line":18,"column":44}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"rows") || alias1(depth0, "rows", {"start":{"line":26,"column":38},"end":{"line":26,"column":42}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rows","hash":{},"data":data,"loc":{"start":{"line":26,"column":36},"end":{"line":26,"column":44}}}) : helper))) != null ? stack1 : "")
     + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"chosen") || alias1(depth0, "chosen", {"start":{"line":18,"column":49},"end":{"line":18,"column":55}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"chosen","hash":{},"data":data,"loc":{"start":{"line":18,"column":47},"end":{"line":18,"column":57}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"chosen") || alias1(depth0, "chosen", {"start":{"line":26,"column":49},"end":{"line":26,"column":55}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"chosen","hash":{},"data":data,"loc":{"start":{"line":26,"column":47},"end":{"line":26,"column":57}}}) : helper))) != null ? stack1 : "")
     + " |\n";
-},"4":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"rows"), "revised", {"start":{"line":22,"column":2},"end":{"line":22,"column":14}} ), depth0)) != null ? stack1 : "")
-    + "\n\n";
-},"5":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "## Did the data keep its contract?\n\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"contract"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":28,"column":0},"end":{"line":30,"column":9}}})) != null ? stack1 : "")
-    + "\n";
 },"6":function(container,depth0,helpers,partials,data) {
-    var stack1;
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
 
-  return "- "
-    + ((stack1 = container.lambda(depth0, depth0)) != null ? stack1 : "")
-    + "\n";
+  return ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"rows"), "revised", {"start":{"line":30,"column":2},"end":{"line":30,"column":14}} ), depth0)) != null ? stack1 : "")
+    + "\n\n";
 },"7":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -452,36 +486,26 @@ export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpe
         return undefined
     };
 
-  return "## Did the study change?\n\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"declaration"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":36,"column":0},"end":{"line":38,"column":9}}})) != null ? stack1 : "")
+  return "## Did the data keep its contract?\n\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"contract"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":36,"column":0},"end":{"line":38,"column":9}}})) != null ? stack1 : "")
     + "\n";
 },"8":function(container,depth0,helpers,partials,data) {
-    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
+    var stack1;
 
-  return "## What moved each coefficient?\n\n"
-    + ((stack1 = (((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":50,"column":2},"end":{"line":50,"column":9}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":50,"column":0},"end":{"line":50,"column":11}}}) : helper))) != null ? stack1 : "")
-    + "."
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"note"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":50,"column":12},"end":{"line":50,"column":40}}})) != null ? stack1 : "")
-    + " Coefficients for "
-    + ((stack1 = (((helper = lookupProperty(helpers,"quantity") || alias1(depth0, "quantity", {"start":{"line":50,"column":60},"end":{"line":50,"column":68}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"quantity","hash":{},"data":data,"loc":{"start":{"line":50,"column":58},"end":{"line":50,"column":70}}}) : helper))) != null ? stack1 : "")
-    + ":\n\n| coefficient | before | now | difference | by rows gone | by revision | by new rows | by declaration | in earlier standard errors |\n|:--|--:|--:|--:|--:|--:|--:|--:|--:|\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"coefficients"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":54,"column":0},"end":{"line":56,"column":9}}})) != null ? stack1 : "")
+  return "- "
+    + ((stack1 = container.lambda(depth0, depth0)) != null ? stack1 : "")
     + "\n";
 },"9":function(container,depth0,helpers,partials,data) {
-    var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return " "
-    + ((stack1 = (((helper = lookupProperty(helpers,"note") || container.strict(depth0, "note", {"start":{"line":50,"column":27},"end":{"line":50,"column":31}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"note","hash":{},"data":data,"loc":{"start":{"line":50,"column":25},"end":{"line":50,"column":33}}}) : helper))) != null ? stack1 : "");
+  return "## Did the study change?\n\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"declaration"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":44,"column":0},"end":{"line":46,"column":9}}})) != null ? stack1 : "")
+    + "\n";
 },"10":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -490,26 +514,15 @@ export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpe
         return undefined
     };
 
-  return "| "
-    + ((stack1 = (((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":55,"column":4},"end":{"line":55,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":55,"column":2},"end":{"line":55,"column":10}}}) : helper))) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"unit"),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":55,"column":10},"end":{"line":55,"column":40}}})) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"before") || alias1(depth0, "before", {"start":{"line":55,"column":45},"end":{"line":55,"column":51}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"before","hash":{},"data":data,"loc":{"start":{"line":55,"column":43},"end":{"line":55,"column":53}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"after") || alias1(depth0, "after", {"start":{"line":55,"column":58},"end":{"line":55,"column":63}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"after","hash":{},"data":data,"loc":{"start":{"line":55,"column":56},"end":{"line":55,"column":65}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"difference") || alias1(depth0, "difference", {"start":{"line":55,"column":70},"end":{"line":55,"column":80}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"difference","hash":{},"data":data,"loc":{"start":{"line":55,"column":68},"end":{"line":55,"column":82}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"removed") || alias1(depth0, "removed", {"start":{"line":55,"column":87},"end":{"line":55,"column":94}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"removed","hash":{},"data":data,"loc":{"start":{"line":55,"column":85},"end":{"line":55,"column":96}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"revised") || alias1(depth0, "revised", {"start":{"line":55,"column":101},"end":{"line":55,"column":108}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"revised","hash":{},"data":data,"loc":{"start":{"line":55,"column":99},"end":{"line":55,"column":110}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"added") || alias1(depth0, "added", {"start":{"line":55,"column":115},"end":{"line":55,"column":120}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"added","hash":{},"data":data,"loc":{"start":{"line":55,"column":113},"end":{"line":55,"column":122}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"declaration") || alias1(depth0, "declaration", {"start":{"line":55,"column":127},"end":{"line":55,"column":138}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"declaration","hash":{},"data":data,"loc":{"start":{"line":55,"column":125},"end":{"line":55,"column":140}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"inErrors") || alias1(depth0, "inErrors", {"start":{"line":55,"column":145},"end":{"line":55,"column":153}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"inErrors","hash":{},"data":data,"loc":{"start":{"line":55,"column":143},"end":{"line":55,"column":155}}}) : helper))) != null ? stack1 : "")
-    + " |\n";
+  return "## What moved each coefficient?\n\n"
+    + ((stack1 = (((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":58,"column":2},"end":{"line":58,"column":9}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":58,"column":0},"end":{"line":58,"column":11}}}) : helper))) != null ? stack1 : "")
+    + "."
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"note"),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":58,"column":12},"end":{"line":58,"column":40}}})) != null ? stack1 : "")
+    + " Coefficients for "
+    + ((stack1 = (((helper = lookupProperty(helpers,"quantity") || alias1(depth0, "quantity", {"start":{"line":58,"column":60},"end":{"line":58,"column":68}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"quantity","hash":{},"data":data,"loc":{"start":{"line":58,"column":58},"end":{"line":58,"column":70}}}) : helper))) != null ? stack1 : "")
+    + ":\n\n| coefficient | before | now | difference | by rows gone | by revision | by new rows | by declaration | in earlier standard errors |\n|:--|--:|--:|--:|--:|--:|--:|--:|--:|\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"coefficients"),{"name":"each","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":62,"column":0},"end":{"line":64,"column":9}}})) != null ? stack1 : "")
+    + "\n";
 },"11":function(container,depth0,helpers,partials,data) {
     var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -518,10 +531,48 @@ export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpe
         return undefined
     };
 
-  return " ("
-    + ((stack1 = (((helper = lookupProperty(helpers,"unit") || container.strict(depth0, "unit", {"start":{"line":55,"column":26},"end":{"line":55,"column":30}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"unit","hash":{},"data":data,"loc":{"start":{"line":55,"column":24},"end":{"line":55,"column":32}}}) : helper))) != null ? stack1 : "")
-    + ")";
+  return " "
+    + ((stack1 = (((helper = lookupProperty(helpers,"note") || container.strict(depth0, "note", {"start":{"line":58,"column":27},"end":{"line":58,"column":31}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"note","hash":{},"data":data,"loc":{"start":{"line":58,"column":25},"end":{"line":58,"column":33}}}) : helper))) != null ? stack1 : "");
 },"12":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "| "
+    + ((stack1 = (((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":63,"column":4},"end":{"line":63,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":63,"column":2},"end":{"line":63,"column":10}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"unit"),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":63,"column":10},"end":{"line":63,"column":40}}})) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"before") || alias1(depth0, "before", {"start":{"line":63,"column":45},"end":{"line":63,"column":51}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"before","hash":{},"data":data,"loc":{"start":{"line":63,"column":43},"end":{"line":63,"column":53}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"after") || alias1(depth0, "after", {"start":{"line":63,"column":58},"end":{"line":63,"column":63}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"after","hash":{},"data":data,"loc":{"start":{"line":63,"column":56},"end":{"line":63,"column":65}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"difference") || alias1(depth0, "difference", {"start":{"line":63,"column":70},"end":{"line":63,"column":80}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"difference","hash":{},"data":data,"loc":{"start":{"line":63,"column":68},"end":{"line":63,"column":82}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"removed") || alias1(depth0, "removed", {"start":{"line":63,"column":87},"end":{"line":63,"column":94}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"removed","hash":{},"data":data,"loc":{"start":{"line":63,"column":85},"end":{"line":63,"column":96}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"revised") || alias1(depth0, "revised", {"start":{"line":63,"column":101},"end":{"line":63,"column":108}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"revised","hash":{},"data":data,"loc":{"start":{"line":63,"column":99},"end":{"line":63,"column":110}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"added") || alias1(depth0, "added", {"start":{"line":63,"column":115},"end":{"line":63,"column":120}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"added","hash":{},"data":data,"loc":{"start":{"line":63,"column":113},"end":{"line":63,"column":122}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"declaration") || alias1(depth0, "declaration", {"start":{"line":63,"column":127},"end":{"line":63,"column":138}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"declaration","hash":{},"data":data,"loc":{"start":{"line":63,"column":125},"end":{"line":63,"column":140}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"inErrors") || alias1(depth0, "inErrors", {"start":{"line":63,"column":145},"end":{"line":63,"column":153}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"inErrors","hash":{},"data":data,"loc":{"start":{"line":63,"column":143},"end":{"line":63,"column":155}}}) : helper))) != null ? stack1 : "")
+    + " |\n";
+},"13":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return " ("
+    + ((stack1 = (((helper = lookupProperty(helpers,"unit") || container.strict(depth0, "unit", {"start":{"line":63,"column":26},"end":{"line":63,"column":30}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"unit","hash":{},"data":data,"loc":{"start":{"line":63,"column":24},"end":{"line":63,"column":32}}}) : helper))) != null ? stack1 : "")
+    + ")";
+},"14":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -530,7 +581,7 @@ export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpe
     };
 
   return "## Do the new rows fit?\n\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"newRows"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":62,"column":0},"end":{"line":65,"column":9}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"newRows"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":70,"column":0},"end":{"line":73,"column":9}}})) != null ? stack1 : "");
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -544,18 +595,19 @@ export const COMPARISON_MARKDOWN: unknown = {"0":function(container,depth0,helpe
     + ": what changed\n\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"answer"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":6,"column":9}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"attention"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":7,"column":0},"end":{"line":14,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"accepted"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":22,"column":7}}})) != null ? stack1 : "")
     + "| | study | data | rows used | chosen |\n|:--|:--|:--|--:|:--|\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"sides"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":19,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"sides"),{"name":"each","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":27,"column":9}}})) != null ? stack1 : "")
     + "\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"revised"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":24,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"contract"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":32,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"declaration"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":40,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"revised"),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":0},"end":{"line":32,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"contract"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":40,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"declaration"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":41,"column":0},"end":{"line":48,"column":7}}})) != null ? stack1 : "")
     + "## Is the choice the same?\n\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"choice"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":43,"column":0},"end":{"line":46,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"models"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":47,"column":0},"end":{"line":58,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"newRows"),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":59,"column":0},"end":{"line":66,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"choice"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":51,"column":0},"end":{"line":54,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"models"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":55,"column":0},"end":{"line":66,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"newRows"),{"name":"if","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":67,"column":0},"end":{"line":74,"column":7}}})) != null ? stack1 : "")
     + "---\n\nMade by "
-    + ((stack1 = (((helper = lookupProperty(helpers,"tool") || alias1(depth0, "tool", {"start":{"line":69,"column":10},"end":{"line":69,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"tool","hash":{},"data":data,"loc":{"start":{"line":69,"column":8},"end":{"line":69,"column":16}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"tool") || alias1(depth0, "tool", {"start":{"line":77,"column":10},"end":{"line":77,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"tool","hash":{},"data":data,"loc":{"start":{"line":77,"column":8},"end":{"line":77,"column":16}}}) : helper))) != null ? stack1 : "")
     + " from two records and the rows kept with them.\n";
 },"useData":true};
 export const PARTIALS: Readonly<Record<string, unknown>> = {

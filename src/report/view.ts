@@ -62,8 +62,9 @@ export interface CriterionView {
   readonly name: string;
   readonly value: string;
   readonly limit: string;
-  readonly passed: boolean;
-  /** "met" or "missed". */
+  /** Null where it needs an earlier record. */
+  readonly passed: boolean | null;
+  /** "met", "missed" or "not judged". */
   readonly word: string;
 }
 

@@ -68,6 +68,14 @@ function plansOf(reading: Reading, criterion: string, needs: AcceptanceNeeds): r
       );
     case 'age_of_newest_row':
       return resolveAge(reading, needs);
+    case 'coefficient_change':
+      return resolveChange(reading);
+    case 'new_rows_inside': {
+      const limits = written.new_rows_inside;
+      if (limits === undefined) return [];
+      checkLimits(reading, path, limits, PROBABILITY);
+      return [{ criterion, of: null, ...ends(limits) }];
+    }
     default: {
       if (!Object.hasOwn(FIGURES, criterion)) return [];
       const figure = criterion as AcceptanceFigure;
@@ -85,6 +93,23 @@ function ends(limits: Loose<LimitsInFile>): {
   readonly atMost: number | null;
 } {
   return { atLeast: limits.at_least ?? null, atMost: limits.at_most ?? null };
+}
+
+function resolveChange(reading: Reading): readonly AcceptancePlan[] {
+  const written = reading.file.acceptance?.coefficient_change;
+  const plan = (of: string | null, atMost: number): AcceptancePlan => ({
+    criterion: 'coefficient_change',
+    of,
+    atLeast: null,
+    atMost,
+  });
+  const path = ['acceptance', 'coefficient_change', 'of'];
+  return [
+    ...(written?.at_most === undefined ? [] : [plan(null, written.at_most)]),
+    ...entriesInOrder(reading, written?.of, path).flatMap(([name, limit]) =>
+      limit?.at_most === undefined ? [] : [plan(name, limit.at_most)],
+    ),
+  ];
 }
 
 function resolveAge(reading: Reading, { names, time }: AcceptanceNeeds): readonly AcceptancePlan[] {

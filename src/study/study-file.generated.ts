@@ -486,6 +486,30 @@ export interface StudyFile {
       at_most: number;
     };
     /**
+     * Limits on how far coefficients of the chosen model lie from an earlier record, in the earlier record's standard errors. Judged by `fit --against` and `compare`; without an earlier record it is listed as needing one, neither met nor missed.
+     */
+    coefficient_change?: {
+      /**
+       * Upper limit on the largest change among the coefficients that the chosen model has then and now, in either direction.
+       */
+      at_most?: number;
+      /**
+       * Limits on the change of single coefficients, by the name of a coefficient or of a term with one column. One that the chosen model does not have then and now misses its limit.
+       */
+      of?: {
+        /**
+         * The limit.
+         */
+        [k: string]: {
+          /**
+           * Upper limit on the change in either direction.
+           */
+          at_most: number;
+        };
+      };
+    };
+    new_rows_inside?: LimitsInFile;
+    /**
      * Names of the candidates of which one must be chosen.
      *
      * @minItems 1

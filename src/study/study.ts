@@ -370,7 +370,17 @@ export type AcceptancePlan =
       readonly onText: string;
       readonly atMost: number;
     }
-  | { readonly criterion: 'chosen'; readonly names: readonly string[] };
+  | { readonly criterion: 'chosen'; readonly names: readonly string[] }
+  | EarlierAcceptancePlan;
+
+/** A limit that only an earlier record can judge. */
+export interface EarlierAcceptancePlan {
+  readonly criterion: 'coefficient_change' | 'new_rows_inside';
+  /** The coefficient; null for the largest change and for the new rows. */
+  readonly of: string | null;
+  readonly atLeast: number | null;
+  readonly atMost: number | null;
+}
 
 export type AcceptanceFigure =
   | 'r_squared'

@@ -66,6 +66,7 @@ const nothing: Comparison = {
   },
   models: [],
   new_rows: null,
+  acceptance: [],
 };
 
 describe('rows', () => {

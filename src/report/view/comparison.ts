@@ -8,6 +8,7 @@ import type {
 } from '../comparison-view.ts';
 import { count, fixed, longDate, NONE, rounded, roundingFor, value, withUnit } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
+import { comparedCriterionSentence } from '../words/acceptance.ts';
 import {
   attentionLines,
   choiceSentences,
@@ -41,6 +42,10 @@ export function comparisonView(comparison: Comparison, record: StudyRecord): Com
       ...newRows.slice(0, 2),
     ],
     attention: attentionLines(lexicon, comparison, selection),
+    accepted: comparison.acceptance.map((criterion) => ({
+      word: criterion.passed === null ? 'not judged' : criterion.passed ? 'met' : 'missed',
+      sentence: comparedCriterionSentence(criterion),
+    })),
     sides: [sideView('before', comparison.earlier), sideView('now', comparison.later)],
     rows: rowsView(lexicon, comparison),
     contract: comparison.contract.map((change) => raised(contractChangeSentence(lexicon, change))),

@@ -1,7 +1,12 @@
 import { count, percent, rangeWithUnit, rounded, withUnit } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import type { HeadPrediction, HeadView } from '../view.ts';
-import { acceptanceSentence, acceptanceValue, criterionLabel } from '../words/acceptance.ts';
+import {
+  acceptanceSentence,
+  acceptanceValue,
+  criterionLabel,
+  needsEarlierSentence,
+} from '../words/acceptance.ts';
 import { answerSentences, fitSentence } from '../words/answer.ts';
 import { bewareLines } from '../words/beware.ts';
 import { studyLine } from '../words/data.ts';
@@ -21,14 +26,24 @@ export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
     predictionConfidence: percent(record.study.prediction_interval),
     predictionsMore: furtherRows(record.predictions.length - ROWS),
     beware: bewareLines(record, lexicon),
-    acceptance: acceptanceSentence(record.acceptance),
-    criteria: record.acceptance.map((c) => ({
-      name: criterionLabel(c),
-      value: acceptanceValue(c, fittedUnit(lexicon.response)),
-      limit: c.limit,
-      passed: c.passed,
-      word: c.passed ? 'met' : 'missed',
-    })),
+    acceptance:
+      acceptanceSentence(record.acceptance) ?? needsEarlierSentence(record.acceptance_against_earlier),
+    criteria: [
+      ...record.acceptance.map((c) => ({
+        name: criterionLabel(c),
+        value: acceptanceValue(c, fittedUnit(lexicon.response)),
+        limit: c.limit,
+        passed: c.passed,
+        word: c.passed ? 'met' : 'missed',
+      })),
+      ...(record.acceptance_against_earlier ?? []).map((c) => ({
+        name: criterionLabel(c),
+        value: 'needs an earlier record',
+        limit: c.limit,
+        passed: null,
+        word: 'not judged',
+      })),
+    ],
     line: studyLine(record),
   };
 }

@@ -1,5 +1,6 @@
+import type { ComparedCriterion } from '../comparison-type.ts';
 import { fixed, NONE, value, withUnit } from '../numbers.ts';
-import type { StudyRecord } from '../record-type.ts';
+import type { RecordEarlierCriterion, StudyRecord } from '../record-type.ts';
 import { counted, listed, lowered } from './lexicon.ts';
 
 type Criterion = StudyRecord['acceptance'][number];
@@ -23,17 +24,27 @@ const NAMES: Readonly<Record<string, string>> = {
   sign: 'Sign',
   age_of_newest_row: 'Age of the newest row',
   chosen: 'Candidate chosen',
+  coefficient_change: 'Largest change of a coefficient',
+  new_rows_inside: 'Share of the new rows inside the earlier prediction intervals',
 };
 
 /** "Adjusted R²", "Coefficient of cargo" */
 export function criterionLabel({ criterion, of }: Pick<Criterion, 'criterion' | 'of'>): string {
   const name = Object.hasOwn(NAMES, criterion) ? NAMES[criterion]! : criterion;
   if (of === undefined) return name;
+  if (criterion === 'coefficient_change') return `Change of the coefficient of ${of}`;
   return criterion === 'p_value' ? `${name} of ${of.replaceAll('_', ' ')}` : `${name} of ${of}`;
 }
 
 /** The figure that was held against the limit, with as many digits as it takes to tell the two apart. */
-export function acceptanceValue({ criterion, limit, value: figure }: Criterion, unit: string | null): string {
+export function acceptanceValue(
+  {
+    criterion,
+    limit,
+    value: figure,
+  }: Pick<Criterion, 'criterion' | 'limit' | 'value'> & { readonly passed?: boolean | null },
+  unit: string | null,
+): string {
   if (figure === null) return NONE;
   if (typeof figure === 'string') return figure;
   if (criterion === 'age_of_newest_row') return counted(figure, 'day', 'days', (days) => value(days, 6));
@@ -46,7 +57,8 @@ export function acceptanceValue({ criterion, limit, value: figure }: Criterion, 
   }
   let digits = 4;
   while (digits < 17 && !apart(Number(figure.toPrecision(digits)))) digits++;
-  return withUnit(value(figure, digits), criterion === 'residual_standard_error' ? unit : null);
+  const own = criterion === 'coefficient_change' ? 'standard errors' : null;
+  return withUnit(value(figure, digits), criterion === 'residual_standard_error' ? unit : own);
 }
 
 /** "2 of 5 acceptance criteria are missed: adjusted R² and rows used." Null where the study declares none. */
@@ -74,4 +86,22 @@ export function missedSentences(acceptance: readonly Criterion[], unit: string |
       const is = c.value === null ? undefinedAs : acceptanceValue(c, unit);
       return `${criterionLabel(c)} is ${is}; the study asks for ${c.limit}.`;
     });
+}
+
+/** "1 criterion needs an earlier record and is not judged here: largest change of a coefficient." Null for none. */
+export function needsEarlierSentence(criteria: readonly RecordEarlierCriterion[] | undefined): string | null {
+  const all = criteria?.length ?? 0;
+  if (criteria === undefined || all === 0) return null;
+  const which = listed(criteria.map((c) => lowered(criterionLabel(c))));
+  return `${counted(all, 'criterion needs', 'criteria need')} an earlier record and ${all === 1 ? 'is' : 'are'} not judged here: ${which}.`;
+}
+
+/** What came of a criterion that was held against an earlier record. */
+export function comparedCriterionSentence(criterion: ComparedCriterion): string {
+  const label = criterionLabel(criterion);
+  const asked = `the study asks for ${criterion.limit}`;
+  if (criterion.passed === null) return `${label} is not judged, since no row is new; ${asked}.`;
+  if (criterion.value === null) return `${label} cannot be told, which misses its limit; ${asked}.`;
+  const is = `${label} is ${acceptanceValue(criterion, null)}`;
+  return `${is}; ${asked}${criterion.passed ? ', which is met' : ''}.`;
 }

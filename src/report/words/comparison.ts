@@ -19,6 +19,7 @@ import {
   withUnit,
 } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
+import { comparedCriterionSentence } from './acceptance.ts';
 import { counted, type Lexicon, labelOf, listed, raised, stopped, unitOf } from './lexicon.ts';
 import { criterionName, criterionRounding } from './selection.ts';
 
@@ -263,6 +264,7 @@ export function attentionLines(
   const fresh = contract.filter(({ kind }) => kind === 'level_new' || kind === 'unit');
   const studyChanges = comparison.declaration.changes.filter(({ kind }) => kind !== 'parameter').length;
   return [
+    ...comparison.acceptance.filter(({ passed }) => passed === false).map(comparedCriterionSentence),
     ...(choice.changed ? [choiceSentences(comparison, selection)[0]!] : []),
     ...renamed.map((change) => contractChangeSentence(lexicon, change)),
     ...models

@@ -34,6 +34,9 @@ export function checkSignNames(study: Study, { fits, columnNames }: FitContext, 
   for (const plan of study.acceptance) {
     if (plan.criterion === 'sign') named.push(['acceptance', 'signs', plan.of]);
     if (plan.criterion === 'coefficient') named.push(['acceptance', 'coefficients', plan.of]);
+    if (plan.criterion === 'coefficient_change' && plan.of !== null) {
+      named.push(['acceptance', 'coefficient_change', 'of', plan.of]);
+    }
   }
   for (const path of named) {
     const name = path.at(-1)!;
