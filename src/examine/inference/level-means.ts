@@ -2,7 +2,7 @@ import { type Covariance, errorOf } from '../../engine/covariance.ts';
 import { presentLevels } from '../../model/build-design.ts';
 import type { ModelTerm, Piece } from '../../model/design.ts';
 import { fromScale, isDecreasing } from '../../model/response-scale.ts';
-import { tTwoSided } from '../../stats/distributions.ts';
+import { tTwoSided, tTwoSidedQuantile } from '../../stats/distributions.ts';
 import { studentisedRange } from '../../stats/studentised-range.ts';
 import type { Scale } from '../../study/study.ts';
 import type { Chosen } from '../chosen.ts';
@@ -156,7 +156,7 @@ function compare(
   const adjusted = range === null ? holm(raw) : pairs.map(({ t }) => range.upper(Math.abs(t) * Math.SQRT2));
   const reach =
     range === null
-      ? studentisedRange(2, covariance.df).quantile(1 - confidence) / Math.SQRT2
+      ? tTwoSidedQuantile(1 - confidence, covariance.df)
       : range.quantile(1 - confidence) / Math.SQRT2;
   return {
     method,
