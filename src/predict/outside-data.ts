@@ -40,17 +40,30 @@ export function outsideData(
       for (const group of groups) {
         const said = group.flatMap(({ name, range, values }) => {
           const value = values[row]!;
-          if (value < range.smallest)
-            return [`${name} ${value} is below ${range.smallest}, the smallest in the data`];
-          return value > range.largest
-            ? [`${name} ${value} is above ${range.largest}, the largest in the data`]
-            : [];
+          if (value < range.smallest) {
+            const [it, end] = apart(value, range.smallest);
+            return [`${name} ${it} is below ${end}, the smallest in the data`];
+          }
+          if (value > range.largest) {
+            const [it, end] = apart(value, range.largest);
+            return [`${name} ${it} is above ${end}, the largest in the data`];
+          }
+          return [];
         });
         if (said.length > 0) return said;
       }
     }
     return remote ? ['its combination of values is more remote than any row in the data'] : [];
   };
+}
+
+/** Two numbers with as many digits, six at least, as tell them apart: what is derived has digits beyond use. */
+function apart(a: number, b: number): readonly [number, number] {
+  for (let digits = 6; digits < 17; digits++) {
+    const short = [Number(a.toPrecision(digits)), Number(b.toPrecision(digits))] as const;
+    if (short[0] !== short[1]) return short;
+  }
+  return [a, b];
 }
 
 export interface UnknownLevel {

@@ -75,7 +75,10 @@ export function loseMissing(
   }
 }
 
-/** ", as kwh is empty"; ", as kwh is empty in 3 and days in 1 of these" where neither is empty in all rows. */
+/**
+ * ", as kwh has no value"; ", as kwh has no value in 3 and days in 1 of these" where neither lacks one in all rows. Not
+ * "is empty": a cell may hold a text that is declared to mean a missing value.
+ */
 function emptyBases(
   bases: readonly string[],
   columns: ReadonlyMap<string, Column>,
@@ -88,12 +91,12 @@ function emptyBases(
   });
   const everywhere = empty.filter(({ rows }) => rows === taken.length).map(({ base }) => base);
   if (everywhere.length > 0) {
-    return `, as ${listed(everywhere)} ${everywhere.length === 1 ? 'is' : 'are'} empty`;
+    return `, as ${listed(everywhere)} ${everywhere.length === 1 ? 'has' : 'have'} no value`;
   }
   if (empty.length === 0) return '';
   const [first, ...rest] = empty.map(({ base, rows }) => ({ base, rows: wholeNumber(rows) }));
   const others = rest.map(({ base, rows }) => `${base} in ${rows}`);
-  return `, as ${listed([`${first!.base} is empty in ${first!.rows}`, ...others])} of these`;
+  return `, as ${listed([`${first!.base} has no value in ${first!.rows}`, ...others])} of these`;
 }
 
 /** Calls `visit` with every row in which the column has no value. */

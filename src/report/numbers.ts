@@ -104,9 +104,23 @@ export function range(lower: number | null, upper: number | null, rounding: Roun
   return rounding.exponent === 0 ? inner : `(${inner})${behind(rounding)}`;
 }
 
-/** The rounding for an interval whose standard error is not at hand: from its half-width at about two errors. */
+/**
+ * The rounding for an interval whose standard error is not at hand: from its half-width at about two errors. Of an
+ * interval that another scale has made lopsided the shorter half tells, since the longer would round away its other end.
+ */
 export function roundingOfInterval(estimate: number, lower: number | null, upper: number | null): Rounding {
-  return roundingFor(estimate, lower === null || upper === null ? null : (upper - lower) / 4);
+  return roundingFor(estimate, lower === null || upper === null ? null : spreadOf(estimate, lower, upper));
+}
+
+/** A quarter of the width, of a lopsided interval half of its shorter half. */
+export function spreadOf(estimate: number, lower: number, upper: number): number {
+  const shorter = 2 * Math.min(estimate - lower, upper - estimate);
+  return (shorter > 0 && lopsided(estimate, lower, upper) ? shorter : upper - lower) / 4;
+}
+
+/** Whether the halves differ by more than rounding. */
+export function lopsided(estimate: number, lower: number, upper: number): boolean {
+  return Math.abs(upper - estimate - (estimate - lower)) > 1e-6 * (upper - lower);
 }
 
 /** A described value (a range's end, a mean): at most `digits` significant digits, whole numbers in full. */

@@ -2,7 +2,13 @@ import { describe, expect, test } from 'vitest';
 import { csvOf, runText } from '../run/run-text.ts';
 
 /** Residuals that grow with x, over many rows; `shift` moves the response, whose smallest value is then `shift`. */
-async function findingsOf(shift: number, scale = 'natural', spoilt = false, rows = 1200) {
+async function findingsOf(
+  shift: number,
+  scale = 'natural',
+  spoilt = false,
+  rows = 1200,
+  errors = 'classical',
+) {
   const x = Array.from({ length: rows }, (_, i) => i);
   const y = x.map((v) => 3 * v + ((v * v * 7) % 11) * 0.2 * v);
   const smallest = Math.min(...y);
@@ -11,9 +17,11 @@ async function findingsOf(shift: number, scale = 'natural', spoilt = false, rows
 title: Spread
 data:
   file: rows.csv
+  time: x
   variables: { x: { type: number }, y: { type: number } }
 response: { variable: y, scale: ${scale} }
 candidates: [{ name: Line, terms: [x] }]
+inference: { standard_errors: ${errors} }
 `;
   const { record, problems } = await runText(study, { 'rows.csv': csv });
   expect(problems).toEqual([]);
@@ -32,6 +40,17 @@ describe('a remedy for uneven spread is one that the response allows', () => {
     expect(found.concern).toBe(2);
     expect(found.advice).toContain(advice);
   });
+});
+
+test('intervals are not called wrong for what the declared standard errors allow for', async () => {
+  const verdict = async (errors: string, name: string) =>
+    (await findingsOf(5, 'natural', false, 200, errors))(name).verdict;
+  expect(await verdict('classical', 'equal_spread')).toContain(
+    ': standard errors and intervals are too narrow',
+  );
+  for (const errors of ['hc3', '{ hac_lags: 4 }']) {
+    expect(await verdict(errors, 'equal_spread')).toContain('the declared standard errors allow for that');
+  }
 });
 
 test('a sentence begins with a capital and keeps thousands apart', async () => {

@@ -89,6 +89,14 @@ describe('predictions', () => {
     ]);
   });
 
+  test('beyond the range is said with the digits that tell, six at least', async () => {
+    const { predictions } = await predictionsAt([40 + 1 / 24, 12.000000001]);
+    expect(predictions.map((one) => one.outside)).toEqual([
+      ['x 40.0417 is above 12, the largest in the data'],
+      ['x 12.000000001 is above 12, the largest in the data'],
+    ]);
+  });
+
   test('on the log scale the ends are taken back, the estimate is the median and the mean is by smearing (Duan 1983)', async () => {
     const { predictions, model, prediction_total: total, warnings } = await predictionsAt([4], 'scale');
     const one = predictions[0]!;

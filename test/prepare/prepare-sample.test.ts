@@ -122,7 +122,7 @@ describe('losses', () => {
     });
     expect(sample!.losses.map((loss) => [loss.because, loss.rows])).toEqual([
       ['missing when', 1],
-      ['missing square, as x is empty', 1],
+      ['missing square, as x has no value', 1],
     ]);
     expect([...sample!.columns.keys()].sort()).toEqual(['square', 'when', 'x', 'y']);
     expect([...sample!.timeOrder!]).toEqual([1, 0]);
@@ -141,8 +141,8 @@ describe('losses', () => {
       candidates: [{ terms: ['per_day', 'cost', 'at_odds'] }],
     });
     expect(sample!.losses.map((loss) => [loss.because, loss.rows, loss.missingAny])).toEqual([
-      ['missing per_day, as kwh is empty in 2 and days in 1 of these', 3, 3],
-      ['missing cost, as bill is empty', 1, 2],
+      ['missing per_day, as kwh has no value in 2 and days in 1 of these', 3, 3],
+      ['missing cost, as bill has no value', 1, 2],
       ['missing at_odds', 0, 3],
     ]);
   });

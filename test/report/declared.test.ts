@@ -115,6 +115,9 @@ describe('a study that declares everything about its model', () => {
     expect(plain(pairsSentence(lexicon, with3(0.2))!)).toBe(
       'Compared all together, none of the 3 pairs of levels can be told apart (at 5 %).',
     );
+    expect(plain(pairsSentence({ ...lexicon, confidence: 0.9 }, with3(0.08))!)).toMatch(
+      /all 3 pairs of levels can be told apart \(at 10 %\)/,
+    );
     expect(plain(pairsSentence(lexicon, with3(0.01))!)).toMatch(
       /^Compared all together, all 3 pairs of levels can/,
     );

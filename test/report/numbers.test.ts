@@ -100,6 +100,8 @@ describe('rounding by the standard error', () => {
   });
   it('works from an interval where the standard error is not at hand', () => {
     expect(range(1.6, 2.2, roundingOfInterval(1.9, 1.6, 2.2))).toBe('1.60 to 2.20');
+    // exp(1 ± 2): by a quarter of the width (4.9) both ends would be whole numbers, the lower one 0.
+    expect(range(0.3679, 20.0855, roundingOfInterval(Math.E, 0.3679, 20.0855))).toBe('0.4 to 20.1');
   });
 });
 

@@ -469,6 +469,9 @@ describe('the first screen', () => {
     });
     expect(plain(typicalMiss({ ...lexicon, variables }, 100)!)).toBe('20 L at the mean weight (days 25)');
     expect(typicalMiss(lexicon, null)).toBeNull();
+    const log = { ...lexicon, response: { ...lexicon.response, scale: 'log' } };
+    expect(plain(typicalMiss(log, Math.log(1.44))!)).toBe('44 %');
+    expect(plain(typicalMiss(log, 1)!)).toBe('a factor of 2.7');
     expect(fitSentence(lexicon, { ...candidate, r_squared: null }, 1)).toContain('no defined R²');
   });
   it('says what acceptance asked for', () => {
@@ -513,7 +516,9 @@ describe('data in words', () => {
     expect(plain(rowsSentence({ ...record.data, rows_read: 36, rows_used: 35 }))).toBe(
       '35 of the 36 rows read were used; the other one (2.8 %) is counted below, under its reason.',
     );
-    expect(lossReason(record.data.left_out[1]!)).toContain('missing in 9');
+    expect(lossReason(record.data.left_out[1]!)).toContain(
+      '(9 with those that lack something else as well and are counted above)',
+    );
     expect(contractSentence({ ...record.data, bad_value_count: 0, bad_values: [] })).toBe(
       'No value broke the declared contract.',
     );
@@ -566,6 +571,17 @@ describe('selection, predictions and findings in words', () => {
   });
   it('gives the evidence of a finding', () => {
     const finding = record.examination!.findings[0]!;
+    // exp(17.7 ± 2.7): an interval from another scale has its lower end above 0, and says so.
+    const wide = {
+      ...record.predictions[0]!,
+      label: 'A',
+      estimate: 48844490,
+      lower: 3337933,
+      upper: 714748884,
+    };
+    expect(plain(predictionSentence(lexicon, [wide], null)!)).toMatch(
+      /48 800 000 L \(\d+ % interval 3 300 000 to 714 700 000 L\)/,
+    );
     expect(plain(evidence({ ...finding, statistic: 9.372, df: [8], p_value: 0.31 })!)).toBe(
       'Koenker’s form of the Breusch–Pagan statistic: 9.37 on 8 degrees of freedom, p = 0.31.',
     );

@@ -1,5 +1,6 @@
 import { designRows } from '../../model/design-rows.ts';
 import { chiSquaredUpper } from '../../stats/distributions.ts';
+import { allowsUnevenSpread } from '../allowed-for.ts';
 import { type Auxiliary, type ColumnWriter, factorOf, regress, rowsWith } from '../auxiliary.ts';
 import type { Chosen } from '../chosen.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
@@ -32,7 +33,7 @@ export const equalSpread: Diagnostic = {
       verdict:
         concern === 0
           ? 'The squared residuals do not visibly depend on the model’s variables.'
-          : 'The size of the residuals depends on the model’s variables: standard errors and intervals are too narrow in some places and too wide in others.',
+          : `The size of the residuals depends on the model’s variables: ${allowsUnevenSpread(chosen) ? 'the declared standard errors allow for that, but intervals for new rows do not, and' : 'standard errors and intervals'} are too narrow in some places and too wide in others.`,
       concern,
       advice: concern === 0 ? null : `${remedy(chosen)}; do not lean on intervals at the edge of the data.`,
     };

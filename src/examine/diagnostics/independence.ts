@@ -1,4 +1,5 @@
 import { decimalNumber, wholeNumber } from '../../numerals.ts';
+import { allowsRelatedNeighbours } from '../allowed-for.ts';
 import type { Chosen } from '../chosen.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
 import { durbinWatson, exactTails, normalTails, type Tails } from '../durbin-watson.ts';
@@ -35,7 +36,7 @@ export const independence: Diagnostic = {
       concern === 0
         ? `Neighbours in time are not visibly related (correlation ${correlation}).`
         : statistic < 2
-          ? `A row’s residual resembles the one before it (correlation ${correlation}): there is less information in the rows than their number says, and the intervals are too narrow.`
+          ? `A row’s residual resembles the one before it (correlation ${correlation}): there is less information in the rows than their number says, ${allowsRelatedNeighbours(chosen) ? 'which the declared standard errors allow for and the tests of whole models do not' : 'and the intervals are probably too narrow'}.`
           : `A row’s residual tends to oppose the one before it (correlation ${correlation}), as where one period’s excess is booked in the next.`;
     return {
       statistic,

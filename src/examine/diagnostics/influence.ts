@@ -53,7 +53,7 @@ export const influence: Diagnostic = {
       mark: 'worth a look above 0.5, a result that hangs on one row above 1 (common practice)',
       verdict:
         (largest >= 0.5
-          ? `${rowNameFirst(chosen.sample, row)} moves the coefficients noticeably: without it the model would say something else.`
+          ? `${rowNameFirst(chosen.sample, row)} moves the coefficients noticeably: without it some of them would be clearly different.`
           : `No single row moves the coefficients much; ${name} moves them most.`) + alone,
       concern,
       advice:

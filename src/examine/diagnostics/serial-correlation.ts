@@ -1,5 +1,6 @@
 import { counted } from '../../select/words.ts';
 import { chiSquaredUpper } from '../../stats/distributions.ts';
+import { allowsRelatedNeighbours } from '../allowed-for.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
 import { percent } from '../percent.ts';
 
@@ -43,12 +44,12 @@ export const serialCorrelation: Diagnostic = {
       verdict:
         concern === 0
           ? `Residuals up to ${rowsBack(lags)} say nothing visible about a row’s own.`
-          : `Residuals up to ${rowsBack(lags)} tell ${percent(share)} of a row’s own: something that lasts or comes round again is not in the model, and the intervals are not to be trusted.`,
+          : `Residuals up to ${rowsBack(lags)} tell ${percent(share)} of a row’s own: something that lasts or comes round again is not in the model${allowsRelatedNeighbours(chosen) ? '. The declared standard errors allow for what fades within their lags' : ', and the intervals are not to be trusted'}.`,
       concern,
       advice:
         concern === 0
           ? null
-          : 'Bring the season, the trend or the state that lasts into the model, or declare standard errors that allow for related neighbours.',
+          : `Bring the season, the trend or the state that lasts into the model${allowsRelatedNeighbours(chosen) ? '' : ', or declare standard errors that allow for related neighbours'}.`,
       figures: [
         { name: 'rows back', value: lags },
         { name: 'share of the residuals’ squares told by earlier residuals', value: share },

@@ -1,6 +1,7 @@
 import { designRows } from '../../model/design-rows.ts';
 import { wholeNumber } from '../../numerals.ts';
 import { chiSquaredUpper } from '../../stats/distributions.ts';
+import { allowsUnevenSpread } from '../allowed-for.ts';
 import { factorOf, regress, rowsWith } from '../auxiliary.ts';
 import { concernOf, type Diagnostic, notPossible } from '../diagnostic.ts';
 import { squaresAndProducts } from '../products.ts';
@@ -67,12 +68,12 @@ export const unevenSpread: Diagnostic = {
       verdict:
         concern === 0
           ? 'The squared residuals do not visibly depend on squares and products of the model’s variables.'
-          : 'The size of the residuals depends on the model’s variables in a way that bends or that several of them share: intervals are too narrow in some places and too wide in others.',
+          : `The size of the residuals depends on the model’s variables in a way that bends or that several of them share: ${allowsUnevenSpread(chosen) ? 'the declared standard errors allow for that, but intervals for new rows do not, and' : 'intervals'} are too narrow in some places and too wide in others.`,
       concern,
       advice:
         concern === 0
           ? null
-          : 'Look at the residuals against each variable; declare weights, another scale of the response, or robust standard errors.',
+          : `Look at the residuals against each variable; declare weights${allowsUnevenSpread(chosen) ? ' or another scale of the response' : ', another scale of the response, or robust standard errors'}.`,
       figures: [{ name: 'share of the squared residuals’ variation', value: share }],
     };
   },

@@ -55,6 +55,10 @@ function predictionView(lexicon: Lexicon, p: RecordPrediction, drawn: Drawn | un
 }
 
 function valueText(lexicon: Lexicon, { variable, value: v }: RecordPrediction['values'][number]): string {
-  if (typeof v === 'boolean') return v ? 'yes' : 'no';
+  if (typeof v === 'boolean') {
+    // A declared flag has its own two values ("planned", "urgent"); a derived one has none.
+    const values = lexicon.variables.get(variable)?.levels ?? [];
+    return (values.length === 2 ? values[v ? 1 : 0]?.level : undefined) ?? (v ? 'yes' : 'no');
+  }
   return typeof v === 'number' ? withUnit(value(v, 6), unitOf(lexicon, variable)) : v;
 }

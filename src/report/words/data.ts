@@ -16,11 +16,11 @@ export function rowsSentence(data: Data): string {
   return `${count(data.rows_used)} of the ${counted(data.rows_read, 'row', 'rows', count)} read ${data.rows_used === 1 ? 'was' : 'were'} used; ${others}.`;
 }
 
-/** What one loss says: its reason, with how often the variable is missing in all where that is more. */
+/** What one loss says: its reason, with how many rows lack the variable where some of them are counted under another. */
 export function lossReason(loss: Data['left_out'][number]): string {
   const also =
     loss.missing_any !== null && loss.missing_any > loss.rows
-      ? ` (missing in ${count(loss.missing_any)} of the rows left at that point)`
+      ? ` (${count(loss.missing_any)} with those that lack something else as well and are counted above)`
       : '';
   return raised(loss.because) + also;
 }

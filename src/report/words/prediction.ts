@@ -1,4 +1,14 @@
-import { percent, type Rounding, range, rangeWithUnit, rounded, roundingFor, withUnit } from '../numbers.ts';
+import {
+  lopsided,
+  percent,
+  type Rounding,
+  range,
+  rangeWithUnit,
+  rounded,
+  roundingFor,
+  spreadOf,
+  withUnit,
+} from '../numbers.ts';
 import type { RecordPrediction, StudyRecord } from '../record-type.ts';
 import { counted, type Lexicon, listed } from './lexicon.ts';
 import { scaleKind } from './scale.ts';
@@ -7,10 +17,16 @@ type Total = NonNullable<StudyRecord['prediction_total']>;
 
 type Interval = Pick<RecordPrediction, 'estimate' | 'lower' | 'upper'>;
 
-/** Rounding for a prediction: the new-row interval spans about three to four of its standard errors. */
-export function predictionRounding(p: Interval): Rounding {
-  const half = p.lower === null ? null : (p.upper ?? 2 * p.estimate - p.lower) - p.lower;
-  return roundingFor(p.estimate, half === null ? null : half / 4);
+/**
+ * Rounding for a prediction: the new-row interval spans about three to four of its standard errors. A lower end that
+ * another scale keeps above 0 has two digits of its own, lest it read as 0.
+ */
+export function predictionRounding({ estimate, lower, upper }: Interval): Rounding {
+  if (lower === null) return roundingFor(estimate, null);
+  const end = upper ?? 2 * estimate - lower;
+  const spread = spreadOf(estimate, lower, end);
+  const kept = lower > 0 && lopsided(estimate, lower, end);
+  return roundingFor(estimate, kept ? Math.max(Math.min(spread, lower), spread / 25) : spread);
 }
 
 /** Infinite where the interval has no upper end, 0 where there is none. */
