@@ -113,6 +113,8 @@ function figureOf(figure: AcceptanceFigure, found: Accepted): number | null {
       return candidate === null || candidate.coefficient_count === 0
         ? null
         : candidate.rows / candidate.coefficient_count;
+    case 'largest_vif':
+      return candidate === null ? null : (candidate.largest_vif ?? (standsAlone(candidate) ? 1 : null));
     case 'cv_rmse':
       return chosen === null ? null : relativeErrors(chosen).rootMeanSquare;
     case 'bias':
@@ -127,6 +129,11 @@ function figureOf(figure: AcceptanceFigure, found: Accepted): number | null {
     default:
       return candidate === null ? null : candidate[figure];
   }
+}
+
+/** A lone column beside the intercept is not shown an inflation; 1/(1 − R²) with nothing to explain it by is 1. */
+function standsAlone({ coefficients, intercept }: RecordCandidate): boolean {
+  return coefficients.length - (intercept ? 1 : 0) === 1;
 }
 
 /** A coefficient by its own name, or by that of its term where the term has no other. */

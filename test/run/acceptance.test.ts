@@ -40,6 +40,11 @@ const faults = async (acceptance: string, change = (text: string) => text) => {
 };
 
 describe('acceptance', () => {
+  test('nothing inflates a column that stands alone: its factor is 1 (Marquardt 1970)', async () => {
+    const { acceptance } = await accepted('  largest_vif: { at_most: 5 }');
+    expect(acceptance).toMatchObject([{ criterion: 'largest_vif', value: 1, passed: true }]);
+  });
+
   test('coefficients and signs are held against the chosen model, by coefficient or term', async () => {
     const { acceptance, candidates } = await accepted(`
   coefficients: { x: { at_least: 1.9, at_most: 2.1 }, intercept: { at_most: 0 } }
