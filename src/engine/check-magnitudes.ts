@@ -1,5 +1,5 @@
 import type { Design } from '../model/design.ts';
-import { type DesignRows, numbersOf } from '../model/design-rows.ts';
+import { columnBounds, type DesignRows, numbersOf } from '../model/design-rows.ts';
 import { scaleName } from '../model/response-scale.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Report } from '../problem.ts';
@@ -52,14 +52,32 @@ export function checkMagnitudes(
     const name = `The weight ${study.weights}`;
     check(name, study.weights, faultOf(largest) === null && faultOf(smallest) !== null ? smallest : largest);
   }
-  design.columns.forEach(({ name, pieces }, column) => {
-    if (pieces.every((piece) => piece.kind === 'level')) return;
+  // A variable that is too large is said once, and not again for each column that is made of it.
+  const said = new Set<string>();
+  const pieces = design.columns.flatMap((column) => column.pieces);
+  for (const name of new Set(pieces.flatMap((piece) => (piece.kind === 'level' ? [] : [piece.variable])))) {
+    const largest = largestOf(numbersOf(sample, name));
+    if (Math.abs(largest.value) <= LARGEST) continue;
+    said.add(name);
+    check(name, name, largest);
+  }
+  const bounds = columnBounds(sample);
+  design.columns.forEach((column, index) => {
+    const { name, pieces } = column;
+    if (pieces.every((piece) => piece.kind === 'level') || pieces.some((piece) => said.has(piece.variable)))
+      return;
     const [first] = pieces;
+    const { variable } = first!;
+    const alone = pieces.length === 1;
     const largest =
-      pieces.length === 1 && first?.kind === 'variable'
-        ? largestOf(numbersOf(sample, first.variable))
-        : largestOfColumn(column, rows);
-    check(name, first!.variable, largest);
+      alone && first?.kind === 'variable'
+        ? largestOf(numbersOf(sample, variable))
+        : largestOfColumn(index, rows);
+    // Effects are worked out at combinations of values that no row has.
+    const anywhere = { ...largest, value: bounds(column) };
+    if (!alone && faultOf(largest) === null && anywhere.value > LARGEST)
+      check(`${name}, with each of its variables at the largest,`, variable, anywhere);
+    else check(name, variable, largest);
   });
   return sound;
 }

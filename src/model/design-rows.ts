@@ -55,7 +55,7 @@ export function designRows(
   const n = source.rowCount;
   const predictorCount = columns.length;
   const rootWeights = weights === null ? null : numbersOf(source, weights).map(Math.sqrt);
-  const bounds = boundCache(source);
+  const bounds = columnBounds(source);
   const weightBound = rootWeights === null ? 1 : largestSize(rootWeights);
   const writers = [
     ...columns.map((column) => columnWriter(column, source)),
@@ -289,8 +289,8 @@ function largestWritten(write: Writer, rowCount: number): number {
   return largest;
 }
 
-/** An upper bound of a column's size, from the largest sizes of its variables. */
-function boundCache(source: DesignSource): (column: DesignColumn) => number {
+/** An upper bound of a column's size, from the largest sizes of its variables: that of any combination of their values. */
+export function columnBounds(source: DesignSource): (column: DesignColumn) => number {
   const sizes = new Map<string, number>();
   const sizeOf = (variable: string): number => {
     let size = sizes.get(variable);

@@ -12,8 +12,8 @@ const COUNT = 24;
 
 /** Everyday and awkward numbers. */
 const number = fc.oneof(
-  { weight: 6, arbitrary: fc.integer({ min: -20, max: 20 }) },
-  { weight: 6, arbitrary: fc.double({ min: -1000, max: 1000, noNaN: true }) },
+  { weight: 60, arbitrary: fc.integer({ min: -20, max: 20 }) },
+  { weight: 60, arbitrary: fc.double({ min: -1000, max: 1000, noNaN: true }) },
   {
     weight: 1,
     arbitrary: fc.constantFrom(0, -0, 1e-300, 5e-324, 1e300, -1e300, 1e75, 1e-75, 1e16, 0.1, 1 / 3),
@@ -178,8 +178,8 @@ test('a study of any numbers ends with a record of numbers or with a word', asyn
       ends[record === null ? 'words' : 'results']++;
       expect(faults).toEqual([]);
     }),
-    { numRuns: Number(process.env.RUNS ?? 250) },
+    { numRuns: 200 },
   );
   // The cases are to reach the end as well as the refusals.
-  expect(Math.min(ends.results, ends.words)).toBeGreaterThan(30);
-}, 1_200_000);
+  expect(Math.min(ends.results, ends.words)).toBeGreaterThan(40);
+}, 120_000);

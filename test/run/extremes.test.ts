@@ -327,6 +327,20 @@ describe('very large and very small numbers', () => {
     expect([status, marks]).toEqual([2, ['value_not_finite row 14 x']]);
   });
 
+  test('a product of variables that are large in different rows', async () => {
+    const outcome = await run(
+      study({ '[x, z]': '[x, z, { interaction: [x, z] }]' }),
+      data((row, i) => {
+        row.x = i % 2 === 0 ? (i + 1) * 1e50 : i * 1e-50;
+        row.z = i % 2 === 0 ? 1e-50 : ((i * 7) % 5) * 1e50;
+      }),
+    );
+    expect([outcome.status, outcome.marks]).toEqual([2, ['value_not_finite row 9 x']]);
+    expect(messages(outcome)[0]).toBe(
+      'x × z, with each of its variables at the largest, is about 6e+101 there, too large for its squares to be computed with.',
+    );
+  });
+
   test('weights that are extreme', async () => {
     for (const w of ['1e300', '1e-300']) {
       const { status, marks } = await run(

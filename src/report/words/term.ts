@@ -152,10 +152,9 @@ function isJump(lexicon: Lexicon, variable: string, step: Step): boolean {
 
 /** Two values with as few digits as tell them apart well. */
 function twoValues(from: number, to: number): [string, string] {
-  const digits = Math.max(
-    3,
-    decimalExponent(Math.max(Math.abs(from), Math.abs(to)), 3) - decimalExponent(to - from, 3) + 2,
-  );
+  const apart = decimalExponent(Math.max(Math.abs(from), Math.abs(to)), 3) - decimalExponent(to - from, 3);
+  // A double has no more than 17; two values that are one are told apart by none.
+  const digits = from === to ? 3 : Math.min(17, Math.max(3, apart + 2));
   return [value(from, digits), value(to, digits)];
 }
 
