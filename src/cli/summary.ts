@@ -7,10 +7,13 @@ import { contractSentence, dateRange, lossReason, rowsSentence } from '../report
 import { estimatedCandidate } from '../report/words/estimated.ts';
 import { concernWord } from '../report/words/finding.ts';
 import { counted, type Lexicon, lexiconOf } from '../report/words/lexicon.ts';
+import { modelsLookedAt } from '../report/words/models.ts';
 import { predictionRounding, totalSentence } from '../report/words/prediction.ts';
 import { fittedUnit } from '../report/words/scale.ts';
 import { criterionName, criterionRounding, ruleSentences } from '../report/words/selection.ts';
+import { stabilitySentences } from '../report/words/stability.ts';
 import { termSentences } from '../report/words/term.ts';
+import { unseenSentences } from '../report/words/unseen.ts';
 import { type Paragraph, plumbLine, type Section } from './plumb-line.ts';
 import type { Terminal } from './terminal.ts';
 
@@ -33,7 +36,7 @@ export function summary(
     { label: 'data', paragraphs: data(record) },
     { label: 'tried', paragraphs: tried(record) },
     { label: 'says', paragraphs: says(record, lexicon) },
-    { label: 'trust', paragraphs: trust(record) },
+    { label: 'trust', paragraphs: trust(record, lexicon) },
     { label: 'predicts', paragraphs: predicts(record, lexicon) },
     { label: 'careful', paragraphs: bewareLines(record, lexicon).map((text) => ({ mark: '·', text })) },
     { label: 'accepted', paragraphs: accepted(record, lexicon, compared) },
@@ -77,7 +80,7 @@ function tried(record: StudyRecord): Paragraph[] {
   });
   const more = candidates.length - rows.length;
   return [
-    ruleSentences(selection, candidates.length).join(' '),
+    ruleSentences(record).join(' '),
     {
       columns: [
         { heading: 'rank', align: 'right' },
@@ -113,7 +116,7 @@ function says(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
   if (model === null || candidate === undefined) return answerSentences(record, lexicon);
   const more = model.terms.length - MOST;
   return [
-    fitSentence(lexicon, candidate, record.candidates.length),
+    fitSentence(lexicon, candidate, modelsLookedAt(record)),
     ...model.terms
       .slice(0, MOST)
       .map((term) => termInBrief(lexicon, term, model, candidate))
@@ -142,12 +145,20 @@ function termInBrief(
 }
 
 /** The questions that found something; what to do about them stands under "careful". */
-function trust(record: StudyRecord): Paragraph[] {
+function trust(record: StudyRecord, lexicon: Lexicon): Paragraph[] {
   const findings = record.examination?.findings ?? [];
   const found = findings.filter((finding) => finding.concern > 0);
-  if (findings.length === 0) return [];
+  // Of what rows not seen and rows drawn anew say, the finding; how it was found stands in the report.
+  const [unseen] = unseenSentences(record, lexicon);
+  const { stability, chosen } = record.selection;
+  const tested = [
+    ...(unseen === undefined ? [] : [unseen]),
+    ...(stability === undefined ? [] : stabilitySentences(stability, chosen).slice(0, 1)),
+  ];
+  if (findings.length === 0) return tested;
   const quiet = findings.length - found.length;
   return [
+    ...tested,
     ...(found.length === 0
       ? []
       : [

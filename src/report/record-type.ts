@@ -7,6 +7,7 @@ export type {
   RecordCoefficient,
   RecordEarlierCriterion,
   RecordExamination,
+  RecordFamily,
   RecordFinding,
   RecordModel,
   RecordPrediction,

@@ -1131,8 +1131,8 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
 
   return ((stack1 = container.lambda(depth0, depth0)) != null ? stack1 : "")
     + "\n";
-},"1":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+},"1":function(container,depth0,helpers,partials,data,blockParams,depths) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
@@ -1141,9 +1141,17 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
 
   return "| rank | candidate | coefficients | "
     + ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"tried"), "criterion", {"start":{"line":9,"column":38},"end":{"line":9,"column":53}} ), depth0)) != null ? stack1 : "")
-    + " | from the best | adjusted R² | admitted? |\n|--:|:--|--:|--:|--:|--:|:--|\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"tried"),"candidates"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":13,"column":9}}})) != null ? stack1 : "");
+    + " | from the best |"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"hasError"),{"name":"if","hash":{},"fn":container.program(2, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":9,"column":73},"end":{"line":9,"column":127}}})) != null ? stack1 : "")
+    + " adjusted R² | admitted? |\n|--:|:--|--:|--:|--:|"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"hasError"),{"name":"if","hash":{},"fn":container.program(3, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":10,"column":21},"end":{"line":10,"column":54}}})) != null ? stack1 : "")
+    + "--:|:--|\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"candidates"),{"name":"each","hash":{},"fn":container.program(4, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":13,"column":9}}})) != null ? stack1 : "");
 },"2":function(container,depth0,helpers,partials,data) {
+    return " error on rows held out |";
+},"3":function(container,depth0,helpers,partials,data) {
+    return "--:|";
+},"4":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1154,19 +1162,21 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "| "
     + ((stack1 = (((helper = lookupProperty(helpers,"rank") || alias1(depth0, "rank", {"start":{"line":12,"column":4},"end":{"line":12,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rank","hash":{},"data":data,"loc":{"start":{"line":12,"column":2},"end":{"line":12,"column":10}}}) : helper))) != null ? stack1 : "")
     + " | "
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.program(4, data, 0),"data":data,"loc":{"start":{"line":12,"column":13},"end":{"line":12,"column":62}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(5, data, 0, blockParams, depths),"inverse":container.program(6, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":12,"column":13},"end":{"line":12,"column":62}}})) != null ? stack1 : "")
     + " | "
     + ((stack1 = (((helper = lookupProperty(helpers,"coefficients") || alias1(depth0, "coefficients", {"start":{"line":12,"column":67},"end":{"line":12,"column":79}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"coefficients","hash":{},"data":data,"loc":{"start":{"line":12,"column":65},"end":{"line":12,"column":81}}}) : helper))) != null ? stack1 : "")
     + " | "
     + ((stack1 = (((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":12,"column":86},"end":{"line":12,"column":91}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":12,"column":84},"end":{"line":12,"column":93}}}) : helper))) != null ? stack1 : "")
     + " | "
     + ((stack1 = (((helper = lookupProperty(helpers,"difference") || alias1(depth0, "difference", {"start":{"line":12,"column":98},"end":{"line":12,"column":108}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"difference","hash":{},"data":data,"loc":{"start":{"line":12,"column":96},"end":{"line":12,"column":110}}}) : helper))) != null ? stack1 : "")
+    + " |"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depths[1],"tried"),"hasError"),{"name":"if","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":112},"end":{"line":12,"column":156}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = (((helper = lookupProperty(helpers,"adjustedRSquared") || alias1(depth0, "adjustedRSquared", {"start":{"line":12,"column":159},"end":{"line":12,"column":175}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"adjustedRSquared","hash":{},"data":data,"loc":{"start":{"line":12,"column":157},"end":{"line":12,"column":177}}}) : helper))) != null ? stack1 : "")
     + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"adjustedRSquared") || alias1(depth0, "adjustedRSquared", {"start":{"line":12,"column":115},"end":{"line":12,"column":131}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"adjustedRSquared","hash":{},"data":data,"loc":{"start":{"line":12,"column":113},"end":{"line":12,"column":133}}}) : helper))) != null ? stack1 : "")
-    + " | "
-    + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":12,"column":138},"end":{"line":12,"column":145}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":12,"column":136},"end":{"line":12,"column":147}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":12,"column":182},"end":{"line":12,"column":189}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":12,"column":180},"end":{"line":12,"column":191}}}) : helper))) != null ? stack1 : "")
     + " |\n";
-},"3":function(container,depth0,helpers,partials,data) {
+},"5":function(container,depth0,helpers,partials,data) {
     var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1177,7 +1187,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "**"
     + ((stack1 = (((helper = lookupProperty(helpers,"name") || container.strict(depth0, "name", {"start":{"line":12,"column":31},"end":{"line":12,"column":35}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":12,"column":29},"end":{"line":12,"column":37}}}) : helper))) != null ? stack1 : "")
     + "**";
-},"4":function(container,depth0,helpers,partials,data) {
+},"6":function(container,depth0,helpers,partials,data) {
     var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1186,7 +1196,18 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return ((stack1 = (((helper = lookupProperty(helpers,"name") || container.strict(depth0, "name", {"start":{"line":12,"column":49},"end":{"line":12,"column":53}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":12,"column":47},"end":{"line":12,"column":55}}}) : helper))) != null ? stack1 : "");
-},"5":function(container,depth0,helpers,partials,data) {
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return " "
+    + ((stack1 = (((helper = lookupProperty(helpers,"error") || container.strict(depth0, "error", {"start":{"line":12,"column":140},"end":{"line":12,"column":145}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"error","hash":{},"data":data,"loc":{"start":{"line":12,"column":138},"end":{"line":12,"column":147}}}) : helper))) != null ? stack1 : "")
+    + " |";
+},"8":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1195,8 +1216,8 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "| rank | candidate | coefficients | adjusted R² | admitted? |\n|--:|:--|--:|--:|:--|\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"tried"),"candidates"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":19,"column":9}}})) != null ? stack1 : "");
-},"6":function(container,depth0,helpers,partials,data) {
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"tried"),"candidates"),{"name":"each","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":19,"column":9}}})) != null ? stack1 : "");
+},"9":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1207,7 +1228,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "| "
     + ((stack1 = (((helper = lookupProperty(helpers,"rank") || alias1(depth0, "rank", {"start":{"line":18,"column":4},"end":{"line":18,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rank","hash":{},"data":data,"loc":{"start":{"line":18,"column":2},"end":{"line":18,"column":10}}}) : helper))) != null ? stack1 : "")
     + " | "
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.program(4, data, 0),"data":data,"loc":{"start":{"line":18,"column":13},"end":{"line":18,"column":62}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.program(6, data, 0),"data":data,"loc":{"start":{"line":18,"column":13},"end":{"line":18,"column":62}}})) != null ? stack1 : "")
     + " | "
     + ((stack1 = (((helper = lookupProperty(helpers,"coefficients") || alias1(depth0, "coefficients", {"start":{"line":18,"column":67},"end":{"line":18,"column":79}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"coefficients","hash":{},"data":data,"loc":{"start":{"line":18,"column":65},"end":{"line":18,"column":81}}}) : helper))) != null ? stack1 : "")
     + " | "
@@ -1215,7 +1236,27 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + " | "
     + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":18,"column":109},"end":{"line":18,"column":116}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":18,"column":107},"end":{"line":18,"column":118}}}) : helper))) != null ? stack1 : "")
     + " |\n";
-},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+},"10":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"tried"), "candidatesMore", {"start":{"line":23,"column":2},"end":{"line":23,"column":22}} ), depth0)) != null ? stack1 : "")
+    + "\n";
+},"11":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"tried"),"stability"), "finding", {"start":{"line":26,"column":2},"end":{"line":26,"column":25}} ), depth0)) != null ? stack1 : "")
+    + "\n";
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1224,11 +1265,14 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "## What was tried?\n\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"rule"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":5,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"rule"),{"name":"each","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":5,"column":9}}})) != null ? stack1 : "")
     + ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"tried"), "because", {"start":{"line":6,"column":2},"end":{"line":6,"column":15}} ), depth0)) != null ? stack1 : "")
     + "\n\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.program(5, data, 0),"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":20,"column":7}}})) != null ? stack1 : "");
-},"useData":true},
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(1, data, 0, blockParams, depths),"inverse":container.program(8, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":20,"column":7}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"candidatesMore"),{"name":"if","hash":{},"fn":container.program(10, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":0},"end":{"line":24,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"stability"),{"name":"if","hash":{},"fn":container.program(11, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":27,"column":7}}})) != null ? stack1 : "");
+},"useData":true,"useDepths":true},
   'markdown-coefficients': {"0":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), alias2=container.strict, alias3=container.lambda, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1244,7 +1288,10 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + ":\n\n| coefficient | unit of its column | estimate | standard error | "
     + ((stack1 = alias3(alias2(lookupProperty(depth0,"says"), "confidence", {"start":{"line":10,"column":67},"end":{"line":10,"column":82}} ), depth0)) != null ? stack1 : "")
     + " interval | p-value |\n|:--|:--|--:|--:|--:|--:|\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"says"),"coefficients"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":14,"column":9}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"says"),"coefficients"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":14,"column":9}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"says"),"looked"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":0},"end":{"line":18,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"says"),"hypotheses"),{"name":"each","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":19,"column":0},"end":{"line":21,"column":9}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1276,6 +1323,29 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + " | "
     + ((stack1 = (((helper = lookupProperty(helpers,"pValue") || alias1(depth0, "pValue", {"start":{"line":13,"column":76},"end":{"line":13,"column":82}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"pValue","hash":{},"data":data,"loc":{"start":{"line":13,"column":74},"end":{"line":13,"column":84}}}) : helper))) != null ? stack1 : "")
     + " |\n";
+},"3":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"says"), "looked", {"start":{"line":17,"column":2},"end":{"line":17,"column":13}} ), depth0)) != null ? stack1 : "")
+    + "\n";
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "- **"
+    + ((stack1 = (((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":20,"column":6},"end":{"line":20,"column":10}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":20,"column":4},"end":{"line":20,"column":12}}}) : helper))) != null ? stack1 : "")
+    + "?** "
+    + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":20,"column":18},"end":{"line":20,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":20,"column":16},"end":{"line":20,"column":27}}}) : helper))) != null ? stack1 : "")
+    + "\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1284,7 +1354,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":15,"column":7}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":22,"column":7}}})) != null ? stack1 : "");
 },"useData":true},
   'markdown-first-screen': {"0":function(container,depth0,helpers,partials,data) {
     var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1430,7 +1500,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"head"),"acceptance"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":39,"column":7}}})) != null ? stack1 : "");
 },"useData":true},
   'markdown-trust': {"0":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
@@ -1438,10 +1508,21 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "## Can it be trusted?\n\n"
-    + ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"trust"), "summary", {"start":{"line":4,"column":2},"end":{"line":4,"column":15}} ), depth0)) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"unseen"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":0},"end":{"line":7,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = container.lambda(container.strict(lookupProperty(depth0,"trust"), "summary", {"start":{"line":8,"column":2},"end":{"line":8,"column":15}} ), depth0)) != null ? stack1 : "")
     + "\n\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"findings"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":8,"column":9}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"findings"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":10,"column":0},"end":{"line":12,"column":9}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"unseen"), "finding", {"start":{"line":5,"column":2},"end":{"line":5,"column":22}} ), depth0)) != null ? stack1 : "")
+    + "\n\n";
+},"2":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1450,14 +1531,14 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "- **"
-    + ((stack1 = (((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":7,"column":6},"end":{"line":7,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":7,"column":4},"end":{"line":7,"column":16}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":11,"column":6},"end":{"line":11,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":11,"column":4},"end":{"line":11,"column":16}}}) : helper))) != null ? stack1 : "")
     + "** "
-    + ((stack1 = (((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":7,"column":21},"end":{"line":7,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":7,"column":19},"end":{"line":7,"column":27}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":11,"column":21},"end":{"line":11,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":11,"column":19},"end":{"line":11,"column":27}}}) : helper))) != null ? stack1 : "")
     + ". "
-    + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":7,"column":31},"end":{"line":7,"column":38}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":7,"column":29},"end":{"line":7,"column":40}}}) : helper))) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":7,"column":40},"end":{"line":7,"column":72}}})) != null ? stack1 : "")
+    + ((stack1 = (((helper = lookupProperty(helpers,"verdict") || alias1(depth0, "verdict", {"start":{"line":11,"column":31},"end":{"line":11,"column":38}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"verdict","hash":{},"data":data,"loc":{"start":{"line":11,"column":29},"end":{"line":11,"column":40}}}) : helper))) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":40},"end":{"line":11,"column":72}}})) != null ? stack1 : "")
     + "\n";
-},"2":function(container,depth0,helpers,partials,data) {
+},"3":function(container,depth0,helpers,partials,data) {
     var stack1, helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1466,7 +1547,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return " "
-    + ((stack1 = (((helper = lookupProperty(helpers,"advice") || container.strict(depth0, "advice", {"start":{"line":7,"column":57},"end":{"line":7,"column":63}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"advice","hash":{},"data":data,"loc":{"start":{"line":7,"column":55},"end":{"line":7,"column":65}}}) : helper))) != null ? stack1 : "");
+    + ((stack1 = (((helper = lookupProperty(helpers,"advice") || container.strict(depth0, "advice", {"start":{"line":11,"column":57},"end":{"line":11,"column":63}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"advice","hash":{},"data":data,"loc":{"start":{"line":11,"column":55},"end":{"line":11,"column":65}}}) : helper))) != null ? stack1 : "");
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1475,7 +1556,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":9,"column":7}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":13,"column":7}}})) != null ? stack1 : "");
 },"useData":true},
   'predicts': {"0":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1661,7 +1742,8 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"coefficients"),{"name":"each","hash":{},"fn":container.program(18, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":73,"column":0},"end":{"line":75,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"looked"),{"name":"if","hash":{},"fn":container.program(19, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":79,"column":0},"end":{"line":81,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"more"),{"name":"if","hash":{},"fn":container.program(20, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":82,"column":0},"end":{"line":97,"column":7}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"more"),{"name":"if","hash":{},"fn":container.program(20, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":82,"column":0},"end":{"line":97,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"says"),"averaged"),{"name":"if","hash":{},"fn":container.program(27, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":98,"column":0},"end":{"line":127,"column":7}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1979,6 +2061,70 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + container.escapeExpression((((helper = lookupProperty(helpers,"drawn") || container.strict(depth0, "drawn", {"start":{"line":91,"column":245},"end":{"line":91,"column":250}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"drawn","hash":{},"data":data,"loc":{"start":{"line":91,"column":243},"end":{"line":91,"column":252}}}) : helper)))
     + "</td>";
 },"27":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=container.strict, alias2=container.lambda, alias3=container.escapeExpression, alias4=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<details>\n<summary>Averaged over the candidates</summary>\n<p>"
+    + alias3(alias2(alias1(lookupProperty(lookupProperty(depth0,"says"),"averaged"), "sentence", {"start":{"line":101,"column":5},"end":{"line":101,"column":27}} ), depth0))
+    + "</p>\n<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Averaged coefficients\">\n<table>\n<caption>Coefficients averaged over the admitted candidates</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\" class=\"n\">weight of those that have it</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">standard error</th><th scope=\"col\" class=\"n\">"
+    + alias3(alias2(alias1(lookupProperty(lookupProperty(depth0,"says"),"averaged"), "confidence", {"start":{"line":105,"column":214},"end":{"line":105,"column":238}} ), depth0))
+    + " interval</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"averaged"),"coefficients"),{"name":"each","hash":{},"fn":container.program(28, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":107,"column":0},"end":{"line":109,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"averaged"),"predictions"),{"name":"if","hash":{},"fn":container.program(29, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":113,"column":0},"end":{"line":125,"column":7}}})) != null ? stack1 : "")
+    + "</details>\n";
+},"28":function(container,depth0,helpers,partials,data) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":108,"column":22},"end":{"line":108,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":108,"column":20},"end":{"line":108,"column":28}}}) : helper)))
+    + "</th><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"weight") || alias1(depth0, "weight", {"start":{"line":108,"column":49},"end":{"line":108,"column":55}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"weight","hash":{},"data":data,"loc":{"start":{"line":108,"column":47},"end":{"line":108,"column":57}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":108,"column":78},"end":{"line":108,"column":86}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":108,"column":76},"end":{"line":108,"column":88}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"standardError") || alias1(depth0, "standardError", {"start":{"line":108,"column":109},"end":{"line":108,"column":122}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardError","hash":{},"data":data,"loc":{"start":{"line":108,"column":107},"end":{"line":108,"column":124}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":108,"column":145},"end":{"line":108,"column":153}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":108,"column":143},"end":{"line":108,"column":155}}}) : helper)))
+    + "</td></tr>\n";
+},"29":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Averaged predictions\">\n<table>\n<caption>The same of the mean at the rows asked for, with "
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"says"),"averaged"), "predictionConfidence", {"start":{"line":116,"column":60},"end":{"line":116,"column":94}} ), depth0))
+    + " intervals</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">interval for the mean</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"says"),"averaged"),"predictions"),{"name":"each","hash":{},"fn":container.program(30, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":119,"column":0},"end":{"line":121,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
+},"30":function(container,depth0,helpers,partials,data) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"label") || alias1(depth0, "label", {"start":{"line":120,"column":22},"end":{"line":120,"column":27}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"label","hash":{},"data":data,"loc":{"start":{"line":120,"column":20},"end":{"line":120,"column":29}}}) : helper)))
+    + "</th><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":120,"column":50},"end":{"line":120,"column":58}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":120,"column":48},"end":{"line":120,"column":60}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"interval") || alias1(depth0, "interval", {"start":{"line":120,"column":81},"end":{"line":120,"column":89}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"interval","hash":{},"data":data,"loc":{"start":{"line":120,"column":79},"end":{"line":120,"column":91}}}) : helper)))
+    + "</td></tr>\n";
+},"31":function(container,depth0,helpers,partials,data) {
     return "<p>No candidate was admitted, so there is no chosen model to read. The table above gives each candidate’s reason. Three ways on: bring in the variables or rows that the reasons point at; declare a candidate that keeps the rules; or decide, in writing and before looking further, that a rule was the wrong one.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1989,11 +2135,11 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<section id=\"says\" aria-labelledby=\"says-heading\">\n<h2 id=\"says-heading\"><span class=\"no\">3</span> What does it say?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(27, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":100,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"says"),{"name":"if","hash":{},"fn":container.program(0, data, 0, blockParams, depths),"inverse":container.program(31, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":130,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true,"useDepths":true},
   'style': {"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return ":root{--paper:#fcfbf8;--ink:#1d1c1a;--soft:#595650;--faint:#d9d5cb;--wash:#f3f0e8;--accent:#84540a;--dot:#6d6a63;--band:#e3cfa6;--edge:#1d1c1a2b}\n@media (prefers-color-scheme:dark){:root{--paper:#171614;--ink:#ece8df;--soft:#b0aa9d;--faint:#403d37;--wash:#211f1c;--accent:#e3b25c;--dot:#a39d90;--band:#57452a;--edge:#00000099}}\n*{box-sizing:border-box}\nhtml{-webkit-text-size-adjust:100%}\nbody{margin:0 auto;max-width:60rem;padding:1.5rem 1.25rem 3rem;background:var(--paper);color:var(--ink);font:1.06rem/1.55 Charter,\"Bitstream Charter\",\"Iowan Old Style\",\"Source Serif 4\",Palatino,\"Palatino Linotype\",Georgia,serif;overflow-wrap:break-word}\ntable,figcaption,svg text,nav,summary,.small,.line,.note,.under,.verdict,.flow b,.brand{font-family:system-ui,-apple-system,\"Segoe UI\",Roboto,\"Helvetica Neue\",sans-serif}\np,ul,ol,dl,h1,h2,h3,h4{max-width:40rem}\nh1,h2,h3,h4{line-height:1.2;font-weight:600;text-wrap:balance}\nh1{font-size:clamp(1.6rem,4.6vw,2.3rem);margin:0}\nh2{font-size:1.5rem;margin:3.2rem 0 .8rem}\nh3{font-size:1.15rem;margin:2rem 0 .4rem}\nh4{font-size:1.05rem;margin:0 0 .4rem}\np{margin:.6rem 0}\na{color:var(--accent)}\n.skip{position:absolute;left:-99rem}\n.skip:focus{position:static}\n.masthead{display:flex;gap:1rem;align-items:flex-start}\n.brand .mark{height:3.6rem;width:1.65rem}\n.mark .string{stroke:var(--accent);stroke-width:1.6;fill:none}\n.mark .weight{fill:var(--accent)}\n.question{font-style:italic;color:var(--soft);font-size:1.15rem;margin:.4rem 0 0}\n.first h2{font-size:1.05rem;margin:0 0 .4rem}\n.quiet{position:absolute;width:1px;height:1px;overflow:hidden;clip-path:inset(50%)}\n.answer{border-left:2px solid var(--accent);padding:.1rem 0 .1rem 1.1rem;margin:1.4rem 0}\n.answer p{font-size:1.18rem;line-height:1.45;margin:0 0 .7rem}\n.answer p.fit{font-size:1.02rem;color:var(--soft);margin-bottom:0}\n.beware{background:var(--wash);padding:1rem 1.2rem;margin:1.4rem 0;max-width:44rem}\n.beware ol{margin:0;padding-left:1.3rem}\n.beware li{margin:.35rem 0}\n.acceptance ul{list-style:none;padding:0;margin:.2rem 0 0;font-size:.92em}\n.acceptance li{margin:.1rem 0}\n.verdict{font-size:.86em;font-weight:700}\n.missed .verdict,.c2 .verdict,.chosen .verdict{color:var(--accent)}\n.line{font-size:.88rem;color:var(--soft);margin:1.2rem 0 1rem}\n@media (min-width:60rem){.screen{display:grid;grid-template-columns:minmax(0,7fr) minmax(0,5fr);gap:0 2.2rem}.screen .line,.screen nav{grid-column:1/-1}.screen .scroll{margin:.6rem 0}.screen .answer p{font-size:1.1rem}.screen .judged{font-size:.96rem;line-height:1.45}.screen .asked td,.screen .asked th{padding-top:.25rem;padding-bottom:.25rem}}\nnav{border-top:1px solid var(--faint);border-bottom:1px solid var(--faint);padding:.5rem 0;font-size:.88rem}\nnav ol{display:flex;flex-wrap:wrap;gap:.1rem 1.3rem;margin:0;padding:0;list-style-position:inside;max-width:none}\nnav li{padding:.15rem 0}\nnav li::marker{color:var(--soft)}\n.no{color:var(--accent);margin-right:.35em}\n.small{font-size:.84rem;line-height:1.5;color:var(--soft)}\n.finding{font-weight:600}\n.flow{list-style:none;padding:0;margin:1rem 0}\n.flow li{display:grid;grid-template-columns:5.5rem 1fr;gap:.8rem;padding:.15rem 0}\n.flow b{text-align:right;font-variant-numeric:tabular-nums;font-weight:600;font-size:.95rem}\n.flow .loss{color:var(--soft)}\n.flow .used{border-top:1px solid var(--ink);margin-top:.2rem;padding-top:.3rem}\n.scroll{overflow-x:auto;margin:1.1rem 0;max-width:100%;background:linear-gradient(to right,var(--paper) 40%,transparent) 0 0/2.5rem 100% no-repeat local,linear-gradient(to left,var(--paper) 40%,transparent) 100% 0/2.5rem 100% no-repeat local,linear-gradient(to right,var(--edge),transparent) 0 0/.9rem 100% no-repeat scroll,linear-gradient(to left,var(--edge),transparent) 100% 0/.9rem 100% no-repeat scroll}\ntable{border-collapse:collapse;font-size:.86rem;line-height:1.4;font-variant-numeric:tabular-nums lining-nums;min-width:min(100%,30rem)}\ncaption{max-width:min(40rem,calc(100vw - 2.5rem));text-align:left;color:var(--soft);padding:0 0 .4rem;caption-side:top}\nth,td{padding:.38rem .9rem .38rem 0;text-align:left;vertical-align:top;border-bottom:1px solid var(--faint)}\nth:last-child,td:last-child{padding-right:0}\nthead th{font-weight:600;color:var(--soft);vertical-align:bottom;border-bottom:1px solid var(--ink)}\ntbody th{font-weight:500;min-width:7.5rem}\ntbody th.n{min-width:0}\n.n{text-align:right;white-space:nowrap}\ntd.near{white-space:nowrap}\nthead .n{white-space:normal}\ntr.chosen th,tr.chosen td{font-weight:650}\ntr.chosen .under{font-weight:400}\ntr.total th,tr.total td{border-top:1px solid var(--ink);font-weight:650}\n.under{display:block;color:var(--soft);font-size:.92em;font-weight:400;max-width:24rem}\ndd .full{max-width:40rem;font-size:.82rem;line-height:1.45}\n.term .both{margin-top:.2rem}\ntd.wide{min-width:11rem;max-width:20rem}\n.note{color:var(--accent);font-size:.9em;margin-left:.3em}\ncode{font:.9em ui-monospace,\"SFMono-Regular\",Menlo,Consolas,\"Liberation Mono\",monospace;overflow-wrap:anywhere}\npre{background:var(--wash);padding:.8rem 1rem;overflow-x:auto;max-width:44rem}\npre code{overflow-wrap:normal}\n.hash{font-size:.8em}\n.equation{display:flex;gap:.7rem;background:var(--wash);padding:.9rem 1.1rem;margin:1rem 0 .4rem;font-variant-numeric:tabular-nums lining-nums;max-width:44rem;flex-wrap:wrap}\n.equation ul{list-style:none;margin:0;padding:0}\n.equation .left{white-space:nowrap}\n.equation li{padding-left:1.4em;text-indent:-1.4em}\n.equation .sign{display:inline-block;width:1.1em;text-indent:0}\n.equation .factor{overflow-wrap:anywhere}\nfigure{margin:1.2rem 0;max-width:34rem}\n.canvas svg{display:block;width:100%;height:auto}\nfigcaption{font-size:.88rem;line-height:1.45;margin-top:.3rem;color:var(--ink)}\n.term,.asked-of{border-top:1px solid var(--faint);padding:1.1rem 0 .5rem}\n.asked-of{margin-top:1rem}\n.asked-of h3{margin-top:0}\n.term figure,.charts figure,.pair figure{margin:0;min-width:0}\n@media (min-width:52rem){.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 2rem}.term.plain{display:block}.term .both{grid-column:1/-1}.charts{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:1.5rem}.charts figure:only-child{grid-column:1/-1;max-width:29rem}.charts figure:has([aria-labelledby^=residuals-each]){grid-column:1/-1;max-width:36rem}.pair{display:grid;grid-template-columns:minmax(0,7fr) minmax(0,5fr);gap:2rem;align-items:center}}\n.charts{margin-top:1rem}\n@media (max-width:51.99rem){.charts figure+figure{margin-top:1.4rem}}\ndl{margin:.6rem 0}\n.answers{max-width:none;columns:22rem 2;column-gap:2.4rem}\n.answers>div{break-inside:avoid;padding-bottom:.9rem}\n.answers dt{margin:0;font-size:.95rem;line-height:1.35}\n.answers dd{font-size:.95rem;line-height:1.45}\n.answers .under{font-size:.8rem;line-height:1.4;max-width:none;margin-top:.1rem}\ndetails{margin:1.1rem 0;border-top:1px solid var(--faint);padding-top:.5rem}\nsummary{cursor:pointer;color:var(--accent);font-weight:600;max-width:40rem}\nsummary:focus-visible{outline:2px solid var(--accent);outline-offset:3px}\ndt{font-weight:600;margin-top:.7rem}\ndd{margin:0}\nfooter{margin-top:4rem;border-top:1px solid var(--faint);padding-top:1rem;display:flex;gap:.8rem;align-items:center;color:var(--soft);font-size:.88rem}\nfooter p{margin:0}\nfooter .mark{height:2.2rem;width:1rem;flex:none}\nsvg text{fill:var(--ink);font-size:12px;font-variant-numeric:tabular-nums}\nsvg .num{fill:var(--soft);font-size:11.5px}\nsvg .title{fill:var(--soft);font-size:12px}\nsvg .name{paint-order:stroke;stroke:var(--paper);stroke-width:4px;stroke-linejoin:round}\nsvg .strong{font-weight:700}\nsvg .axis,svg .tick{stroke:var(--soft);stroke-width:1}\nsvg .grid{stroke:var(--faint);stroke-width:1}\nsvg .plumb{stroke:var(--accent);stroke-width:1.4}\nsvg .bob{fill:var(--accent)}\nsvg .dots{stroke:var(--dot);stroke-width:3.6;stroke-linecap:round;fill:none;stroke-opacity:.75}\nsvg .fine{stroke-width:2.6}\nsvg .faint{stroke-opacity:.6}\nsvg .thread{stroke:var(--faint);stroke-width:1;fill:none}\nsvg .stems{stroke:var(--dot);stroke-width:1.3;fill:none}\nsvg .trend{stroke:var(--ink);stroke-width:1.6;stroke-dasharray:5 4;fill:none}\nsvg .band{fill:var(--band);fill-opacity:.65}\nsvg .curve{stroke:var(--accent);stroke-width:2.4;fill:none}\nsvg .zone{fill:var(--wash)}\nsvg .reach{stroke:var(--faint);stroke-width:1.5}\nsvg .rung{stroke:var(--ink);stroke-width:1.8}\nsvg .thick{stroke-width:6;stroke:var(--dot)}\nsvg circle{stroke:var(--ink);fill:var(--dot);stroke-width:1}\nsvg circle.chosen{fill:var(--accent);stroke:var(--paper);stroke-width:1.2}\nsvg circle.refused{fill:var(--paper);stroke:var(--ink);stroke-width:1.4}\n@media (max-width:30rem){svg text{font-size:13.5px}svg .num,svg .title{font-size:13px}body{padding:1rem 1rem 2.5rem;font-size:1rem}.answer p{font-size:1.08rem}.beware{padding:.9rem 1rem}.flow li{grid-template-columns:4rem 1fr}}\n@media print{:root{--paper:#fff;--ink:#000;--soft:#444;--faint:#bbb;--wash:#f4f4f4;--accent:#6b4408;--dot:#555;--band:#d8d8d8}@page{size:A4;margin:16mm 15mm 18mm}html{font-size:10pt}body{max-width:none;padding:0;font-size:1.02rem;line-height:1.42}nav,.skip{display:none}details::details-content{content-visibility:visible;display:block;block-size:auto}summary{list-style:none;color:inherit}summary::-webkit-details-marker{display:none}.answers{columns:2}a{color:inherit;text-decoration:none}.scroll,pre{overflow:visible}.scroll{background:none}pre code{white-space:pre-wrap;overflow-wrap:anywhere}table{width:100%;min-width:0}td.wide,tbody th{min-width:0}h2,h3,h4,caption{break-after:avoid}figure,.term,.scroll:not(.long),tr,.beware,.acceptance,.equation,.flow,dt,dd{break-inside:avoid}dt{break-after:avoid}thead{display:table-header-group;break-after:avoid}tbody tr:first-child{break-before:avoid}td.wide{min-width:42mm!important}.answer{margin:4mm 0}.answer p{font-size:1.12rem}.beware{margin:4mm 0}.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 6mm}.term.plain{display:block}.term .both{grid-column:1/-1}.charts,.pair{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:6mm;align-items:start}.charts figure:only-child{grid-column:1/-1;max-width:125mm}figure{max-width:125mm;margin:3mm 0}h2{margin-top:9mm}*{-webkit-print-color-adjust:exact;print-color-adjust:exact}}\n";
+    return ":root{--paper:#fcfbf8;--ink:#1d1c1a;--soft:#595650;--faint:#d9d5cb;--wash:#f3f0e8;--accent:#84540a;--dot:#6d6a63;--band:#e3cfa6;--edge:#1d1c1a2b}\n@media (prefers-color-scheme:dark){:root{--paper:#171614;--ink:#ece8df;--soft:#b0aa9d;--faint:#403d37;--wash:#211f1c;--accent:#e3b25c;--dot:#a39d90;--band:#57452a;--edge:#00000099}}\n*{box-sizing:border-box}\nhtml{-webkit-text-size-adjust:100%}\nbody{margin:0 auto;max-width:60rem;padding:1.5rem 1.25rem 3rem;background:var(--paper);color:var(--ink);font:1.06rem/1.55 Charter,\"Bitstream Charter\",\"Iowan Old Style\",\"Source Serif 4\",Palatino,\"Palatino Linotype\",Georgia,serif;overflow-wrap:break-word}\ntable,figcaption,svg text,nav,summary,.small,.line,.note,.under,.verdict,.flow b,.brand{font-family:system-ui,-apple-system,\"Segoe UI\",Roboto,\"Helvetica Neue\",sans-serif}\np,ul,ol,dl,h1,h2,h3,h4{max-width:40rem}\nh1,h2,h3,h4{line-height:1.2;font-weight:600;text-wrap:balance}\nh1{font-size:clamp(1.6rem,4.6vw,2.3rem);margin:0}\nh2{font-size:1.5rem;margin:3.2rem 0 .8rem}\nh3{font-size:1.15rem;margin:2rem 0 .4rem}\nh4{font-size:1.05rem;margin:0 0 .4rem}\np{margin:.6rem 0}\na{color:var(--accent)}\n.skip{position:absolute;left:-99rem}\n.skip:focus{position:static}\n.masthead{display:flex;gap:1rem;align-items:flex-start}\n.brand .mark{height:3.6rem;width:1.65rem}\n.mark .string{stroke:var(--accent);stroke-width:1.6;fill:none}\n.mark .weight{fill:var(--accent)}\n.question{font-style:italic;color:var(--soft);font-size:1.15rem;margin:.4rem 0 0}\n.first h2{font-size:1.05rem;margin:0 0 .4rem}\n.quiet{position:absolute;width:1px;height:1px;overflow:hidden;clip-path:inset(50%)}\n.answer{border-left:2px solid var(--accent);padding:.1rem 0 .1rem 1.1rem;margin:1.4rem 0}\n.answer p{font-size:1.18rem;line-height:1.45;margin:0 0 .7rem}\n.answer p.fit{font-size:1.02rem;color:var(--soft);margin-bottom:0}\n.beware{background:var(--wash);padding:1rem 1.2rem;margin:1.4rem 0;max-width:44rem}\n.beware ol{margin:0;padding-left:1.3rem}\n.beware li{margin:.35rem 0}\n.acceptance ul{list-style:none;padding:0;margin:.2rem 0 0;font-size:.92em}\n.acceptance li{margin:.1rem 0}\n.verdict{font-size:.86em;font-weight:700}\n.missed .verdict,.c2 .verdict,.chosen .verdict{color:var(--accent)}\n.line{font-size:.88rem;color:var(--soft);margin:1.2rem 0 1rem}\n@media (min-width:60rem){.screen{display:grid;grid-template-columns:minmax(0,7fr) minmax(0,5fr);gap:0 2.2rem}.screen .line,.screen nav{grid-column:1/-1}.screen .scroll{margin:.6rem 0}.screen .answer p{font-size:1.1rem}.screen .judged{font-size:.96rem;line-height:1.45}.screen .asked td,.screen .asked th{padding-top:.25rem;padding-bottom:.25rem}}\nnav{border-top:1px solid var(--faint);border-bottom:1px solid var(--faint);padding:.5rem 0;font-size:.88rem}\nnav ol{display:flex;flex-wrap:wrap;gap:.1rem 1.3rem;margin:0;padding:0;list-style-position:inside;max-width:none}\nnav li{padding:.15rem 0}\nnav li::marker{color:var(--soft)}\n.no{color:var(--accent);margin-right:.35em}\n.small{font-size:.84rem;line-height:1.5;color:var(--soft)}\n.finding{font-weight:600}\n.flow{list-style:none;padding:0;margin:1rem 0}\n.flow li{display:grid;grid-template-columns:5.5rem 1fr;gap:.8rem;padding:.15rem 0}\n.flow b{text-align:right;font-variant-numeric:tabular-nums;font-weight:600;font-size:.95rem}\n.flow .loss{color:var(--soft)}\n.flow .used{border-top:1px solid var(--ink);margin-top:.2rem;padding-top:.3rem}\n.scroll{overflow-x:auto;margin:1.1rem 0;max-width:100%;background:linear-gradient(to right,var(--paper) 40%,transparent) 0 0/2.5rem 100% no-repeat local,linear-gradient(to left,var(--paper) 40%,transparent) 100% 0/2.5rem 100% no-repeat local,linear-gradient(to right,var(--edge),transparent) 0 0/.9rem 100% no-repeat scroll,linear-gradient(to left,var(--edge),transparent) 100% 0/.9rem 100% no-repeat scroll}\ntable{border-collapse:collapse;font-size:.86rem;line-height:1.4;font-variant-numeric:tabular-nums lining-nums;min-width:min(100%,30rem)}\ncaption{max-width:min(40rem,calc(100vw - 2.5rem));text-align:left;color:var(--soft);padding:0 0 .4rem;caption-side:top}\nth,td{padding:.38rem .9rem .38rem 0;text-align:left;vertical-align:top;border-bottom:1px solid var(--faint)}\nth:last-child,td:last-child{padding-right:0}\nthead th{font-weight:600;color:var(--soft);vertical-align:bottom;border-bottom:1px solid var(--ink)}\ntbody th{font-weight:500;min-width:7.5rem}\ntbody th.n{min-width:0}\n.n{text-align:right;white-space:nowrap}\ntd.near{white-space:nowrap}\nthead .n{white-space:normal}\ntr.chosen th,tr.chosen td{font-weight:650}\ntr.chosen .under{font-weight:400}\ntr.total th,tr.total td{border-top:1px solid var(--ink);font-weight:650}\n.under{display:block;color:var(--soft);font-size:.92em;font-weight:400;max-width:24rem}\n@media screen{#tried tbody th{min-width:11rem}}\ndd .full{max-width:40rem;font-size:.82rem;line-height:1.45}\n.term .both{margin-top:.2rem}\ntd.wide{min-width:11rem;max-width:20rem}\n.note{color:var(--accent);font-size:.9em;margin-left:.3em}\ncode{font:.9em ui-monospace,\"SFMono-Regular\",Menlo,Consolas,\"Liberation Mono\",monospace;overflow-wrap:anywhere}\npre{background:var(--wash);padding:.8rem 1rem;overflow-x:auto;max-width:44rem}\npre code{overflow-wrap:normal}\n.hash{font-size:.8em}\n.equation{display:flex;gap:.7rem;background:var(--wash);padding:.9rem 1.1rem;margin:1rem 0 .4rem;font-variant-numeric:tabular-nums lining-nums;max-width:44rem;flex-wrap:wrap}\n.equation ul{list-style:none;margin:0;padding:0}\n.equation .left{white-space:nowrap}\n.equation li{padding-left:1.4em;text-indent:-1.4em}\n.equation .sign{display:inline-block;width:1.1em;text-indent:0}\n.equation .factor{overflow-wrap:anywhere}\nfigure{margin:1.2rem 0;max-width:34rem}\n.canvas svg{display:block;width:100%;height:auto}\nfigcaption{font-size:.88rem;line-height:1.45;margin-top:.3rem;color:var(--ink)}\n.term,.asked-of{border-top:1px solid var(--faint);padding:1.1rem 0 .5rem}\n.asked-of{margin-top:1rem}\n.asked-of h3{margin-top:0}\n.term figure,.charts figure,.pair figure{margin:0;min-width:0}\n@media (min-width:52rem){.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 2rem}.term.plain{display:block}.term .both{grid-column:1/-1}.charts{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:1.5rem}.charts figure:only-child{grid-column:1/-1;max-width:29rem}.charts figure:has([aria-labelledby^=residuals-each]){grid-column:1/-1;max-width:36rem}.pair{display:grid;grid-template-columns:minmax(0,7fr) minmax(0,5fr);gap:2rem;align-items:center}}\n.charts{margin-top:1rem}\n@media (max-width:51.99rem){.charts figure+figure{margin-top:1.4rem}}\ndl{margin:.6rem 0}\n.answers{max-width:none;columns:22rem 2;column-gap:2.4rem}\n.answers>div{break-inside:avoid;padding-bottom:.9rem}\n.answers dt{margin:0;font-size:.95rem;line-height:1.35}\n.answers dd{font-size:.95rem;line-height:1.45}\n.answers .under{font-size:.8rem;line-height:1.4;max-width:none;margin-top:.1rem}\ndetails{margin:1.1rem 0;border-top:1px solid var(--faint);padding-top:.5rem}\nsummary{cursor:pointer;color:var(--accent);font-weight:600;max-width:40rem}\nsummary:focus-visible{outline:2px solid var(--accent);outline-offset:3px}\ndt{font-weight:600;margin-top:.7rem}\ndd{margin:0}\nfooter{margin-top:4rem;border-top:1px solid var(--faint);padding-top:1rem;display:flex;gap:.8rem;align-items:center;color:var(--soft);font-size:.88rem}\nfooter p{margin:0}\nfooter .mark{height:2.2rem;width:1rem;flex:none}\nsvg text{fill:var(--ink);font-size:12px;font-variant-numeric:tabular-nums}\nsvg .num{fill:var(--soft);font-size:11.5px}\nsvg .title{fill:var(--soft);font-size:12px}\nsvg .name{paint-order:stroke;stroke:var(--paper);stroke-width:4px;stroke-linejoin:round}\nsvg .strong{font-weight:700}\nsvg .axis,svg .tick{stroke:var(--soft);stroke-width:1}\nsvg .grid{stroke:var(--faint);stroke-width:1}\nsvg .plumb{stroke:var(--accent);stroke-width:1.4}\nsvg .bob{fill:var(--accent)}\nsvg .dots{stroke:var(--dot);stroke-width:3.6;stroke-linecap:round;fill:none;stroke-opacity:.75}\nsvg .fine{stroke-width:2.6}\nsvg .faint{stroke-opacity:.6}\nsvg .thread{stroke:var(--faint);stroke-width:1;fill:none}\nsvg .course{stroke:var(--dot);stroke-width:1.6}\nsvg .stems{stroke:var(--dot);stroke-width:1.3;fill:none}\nsvg .trend{stroke:var(--ink);stroke-width:1.6;stroke-dasharray:5 4;fill:none}\nsvg .band{fill:var(--band);fill-opacity:.65}\nsvg .curve{stroke:var(--accent);stroke-width:2.4;fill:none}\nsvg .zone{fill:var(--wash)}\nsvg .reach{stroke:var(--faint);stroke-width:1.5}\nsvg .rung{stroke:var(--ink);stroke-width:1.8}\nsvg .thick{stroke-width:6;stroke:var(--dot)}\nsvg circle{stroke:var(--ink);fill:var(--dot);stroke-width:1}\nsvg circle.chosen{fill:var(--accent);stroke:var(--paper);stroke-width:1.2}\nsvg circle.refused{fill:var(--paper);stroke:var(--ink);stroke-width:1.4}\n@media (max-width:30rem){svg text{font-size:13.5px}svg .num,svg .title{font-size:13px}body{padding:1rem 1rem 2.5rem;font-size:1rem}.answer p{font-size:1.08rem}.beware{padding:.9rem 1rem}.flow li{grid-template-columns:4rem 1fr}}\n@media print{:root{--paper:#fff;--ink:#000;--soft:#444;--faint:#bbb;--wash:#f4f4f4;--accent:#6b4408;--dot:#555;--band:#d8d8d8}@page{size:A4;margin:16mm 15mm 18mm}html{font-size:10pt}body{max-width:none;padding:0;font-size:1.02rem;line-height:1.42}nav,.skip{display:none}details::details-content{content-visibility:visible;display:block;block-size:auto}summary{list-style:none;color:inherit}summary::-webkit-details-marker{display:none}.answers{columns:2}a{color:inherit;text-decoration:none}.scroll,pre{overflow:visible}.scroll{background:none}pre code{white-space:pre-wrap;overflow-wrap:anywhere}table{width:100%;min-width:0}td.wide,tbody th{min-width:0}h2,h3,h4,caption{break-after:avoid}figure,.term,.scroll:not(.long),tr,.beware,.acceptance,.equation,.flow,dt,dd{break-inside:avoid}dt{break-after:avoid}thead{display:table-header-group;break-after:avoid}tbody tr:first-child{break-before:avoid}td.wide{min-width:42mm!important}.answer{margin:4mm 0}.answer p{font-size:1.12rem}.beware{margin:4mm 0}.term{display:grid;grid-template-columns:minmax(0,5fr) minmax(0,7fr);gap:0 6mm}.term.plain{display:block}.term .both{grid-column:1/-1}.charts,.pair{display:grid;grid-template-columns:repeat(2,minmax(0,1fr));gap:6mm;align-items:start}.charts figure:only-child{grid-column:1/-1;max-width:125mm}figure{max-width:125mm;margin:3mm 0}h2{margin-top:9mm}*{-webkit-print-color-adjust:exact;print-color-adjust:exact}}\n";
 },"useData":true},
   'tried': {"0":function(container,depth0,helpers,partials,data) {
     return "<p>"
@@ -2015,68 +2161,60 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + container.escapeExpression(container.lambda(depth0, depth0))
     + "</li>\n";
 },"3":function(container,depth0,helpers,partials,data) {
-    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, helper, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return ", best "
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"tried"), "criterion", {"start":{"line":17,"column":48},"end":{"line":17,"column":63}} ), depth0))
-    + " first";
+  return "<h3>"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"name") || container.strict(depth0, "name", {"start":{"line":16,"column":6},"end":{"line":16,"column":10}} ))),(typeof helper === "function" ? helper.call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":16,"column":4},"end":{"line":16,"column":12}}}) : helper)))
+    + "</h3>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(depth0,"sentences"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":19,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":0},"end":{"line":22,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"path"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":35,"column":7}}})) != null ? stack1 : "");
 },"4":function(container,depth0,helpers,partials,data) {
-    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<th scope=\"col\" class=\"n\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"tried"), "criterion", {"start":{"line":18,"column":181},"end":{"line":18,"column":196}} ), depth0))
-    + "</th><th scope=\"col\" class=\"n\">from the best</th>";
-},"5":function(container,depth0,helpers,partials,data,blockParams,depths) {
-    var stack1, helper, alias1=depth0 != null ? depth0 : (container.nullContext || {}), alias2=container.strict, alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(depth0,"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"5":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<tr"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(6, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":3},"end":{"line":21,"column":39}}})) != null ? stack1 : "")
-    + "><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"rank") || alias2(depth0, "rank", {"start":{"line":21,"column":56},"end":{"line":21,"column":60}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"rank","hash":{},"data":data,"loc":{"start":{"line":21,"column":54},"end":{"line":21,"column":62}}}) : helper)))
-    + "</td><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"name") || alias2(depth0, "name", {"start":{"line":21,"column":85},"end":{"line":21,"column":89}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":21,"column":83},"end":{"line":21,"column":91}}}) : helper)))
-    + "<span class=\"under\">"
-    + alias4((((helper = lookupProperty(helpers,"terms") || alias2(depth0, "terms", {"start":{"line":21,"column":113},"end":{"line":21,"column":118}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"terms","hash":{},"data":data,"loc":{"start":{"line":21,"column":111},"end":{"line":21,"column":120}}}) : helper)))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"scale"),{"name":"if","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":120},"end":{"line":21,"column":173}}})) != null ? stack1 : "")
-    + "</span>"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(depth0,"dropped"),{"name":"each","hash":{},"fn":container.program(8, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":180},"end":{"line":21,"column":256}}})) != null ? stack1 : "")
-    + "</th><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"coefficients") || alias2(depth0, "coefficients", {"start":{"line":21,"column":277},"end":{"line":21,"column":289}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"coefficients","hash":{},"data":data,"loc":{"start":{"line":21,"column":275},"end":{"line":21,"column":291}}}) : helper)))
-    + "</td>"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depths[1],"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(9, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":296},"end":{"line":21,"column":387}}})) != null ? stack1 : "")
-    + "<td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"adjustedRSquared") || alias2(depth0, "adjustedRSquared", {"start":{"line":21,"column":403},"end":{"line":21,"column":419}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"adjustedRSquared","hash":{},"data":data,"loc":{"start":{"line":21,"column":401},"end":{"line":21,"column":421}}}) : helper)))
-    + "</td><td class=\"wide\">"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(10, data, 0, blockParams, depths),"inverse":container.program(11, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":21,"column":443},"end":{"line":21,"column":523}}})) != null ? stack1 : "")
-    + "</td></tr>\n";
+  return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\""
+    + container.escapeExpression((((helper = lookupProperty(helpers,"name") || container.strict(depth0, "name", {"start":{"line":24,"column":61},"end":{"line":24,"column":65}} ))),(typeof helper === "function" ? helper.call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":24,"column":59},"end":{"line":24,"column":67}}}) : helper)))
+    + ": steps\">\n<table>\n<caption>The steps; F tests each term in the model that has it</caption>\n<thead><tr><th scope=\"col\">term</th><th scope=\"col\" class=\"n\">step</th><th scope=\"col\">action</th><th scope=\"col\">partial F</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(depth0,"path"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":0},"end":{"line":31,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
 },"6":function(container,depth0,helpers,partials,data) {
-    return " class=\"chosen\"";
-},"7":function(container,depth0,helpers,partials,data) {
-    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "; response on the "
-    + container.escapeExpression((((helper = lookupProperty(helpers,"scale") || container.strict(depth0, "scale", {"start":{"line":21,"column":153},"end":{"line":21,"column":158}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"scale","hash":{},"data":data,"loc":{"start":{"line":21,"column":151},"end":{"line":21,"column":160}}}) : helper)))
-    + " scale";
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"term") || alias1(depth0, "term", {"start":{"line":30,"column":22},"end":{"line":30,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"term","hash":{},"data":data,"loc":{"start":{"line":30,"column":20},"end":{"line":30,"column":28}}}) : helper)))
+    + "</th><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"step") || alias1(depth0, "step", {"start":{"line":30,"column":49},"end":{"line":30,"column":53}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"step","hash":{},"data":data,"loc":{"start":{"line":30,"column":47},"end":{"line":30,"column":55}}}) : helper)))
+    + "</td><td>"
+    + alias4((((helper = lookupProperty(helpers,"action") || alias1(depth0, "action", {"start":{"line":30,"column":66},"end":{"line":30,"column":72}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"action","hash":{},"data":data,"loc":{"start":{"line":30,"column":64},"end":{"line":30,"column":74}}}) : helper)))
+    + "</td><td>"
+    + alias4((((helper = lookupProperty(helpers,"evidence") || alias1(depth0, "evidence", {"start":{"line":30,"column":85},"end":{"line":30,"column":93}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":30,"column":83},"end":{"line":30,"column":95}}}) : helper)))
+    + "</td></tr>\n";
+},"7":function(container,depth0,helpers,partials,data) {
+    return "<h3>The candidates</h3>\n";
 },"8":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2085,10 +2223,79 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return "<span class=\"under\">Left out: "
-    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":21,"column":229},"end":{"line":21,"column":233}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":21,"column":227},"end":{"line":21,"column":240}}}))
-    + "</span>";
+  return ", best "
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"tried"), "criterion", {"start":{"line":42,"column":48},"end":{"line":42,"column":63}} ), depth0))
+    + " first";
 },"9":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<th scope=\"col\" class=\"n\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"tried"), "criterion", {"start":{"line":43,"column":181},"end":{"line":43,"column":196}} ), depth0))
+    + "</th><th scope=\"col\" class=\"n\">from the best</th>";
+},"10":function(container,depth0,helpers,partials,data) {
+    return "<th scope=\"col\" class=\"n\">weight of evidence</th>";
+},"11":function(container,depth0,helpers,partials,data) {
+    return "<th scope=\"col\" class=\"n\">error on rows held out</th>";
+},"12":function(container,depth0,helpers,partials,data,blockParams,depths) {
+    var stack1, helper, alias1=depth0 != null ? depth0 : (container.nullContext || {}), alias2=container.strict, alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(13, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":46,"column":3},"end":{"line":46,"column":39}}})) != null ? stack1 : "")
+    + "><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"rank") || alias2(depth0, "rank", {"start":{"line":46,"column":56},"end":{"line":46,"column":60}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"rank","hash":{},"data":data,"loc":{"start":{"line":46,"column":54},"end":{"line":46,"column":62}}}) : helper)))
+    + "</td><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"name") || alias2(depth0, "name", {"start":{"line":46,"column":85},"end":{"line":46,"column":89}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":46,"column":83},"end":{"line":46,"column":91}}}) : helper)))
+    + "<span class=\"under\">"
+    + alias4((((helper = lookupProperty(helpers,"terms") || alias2(depth0, "terms", {"start":{"line":46,"column":113},"end":{"line":46,"column":118}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"terms","hash":{},"data":data,"loc":{"start":{"line":46,"column":111},"end":{"line":46,"column":120}}}) : helper)))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"scale"),{"name":"if","hash":{},"fn":container.program(14, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":46,"column":120},"end":{"line":46,"column":173}}})) != null ? stack1 : "")
+    + "</span>"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(depth0,"dropped"),{"name":"each","hash":{},"fn":container.program(15, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":46,"column":180},"end":{"line":46,"column":256}}})) != null ? stack1 : "")
+    + "</th><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"coefficients") || alias2(depth0, "coefficients", {"start":{"line":46,"column":277},"end":{"line":46,"column":289}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"coefficients","hash":{},"data":data,"loc":{"start":{"line":46,"column":275},"end":{"line":46,"column":291}}}) : helper)))
+    + "</td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depths[1],"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(16, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":46,"column":296},"end":{"line":46,"column":387}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depths[1],"tried"),"hasEvidence"),{"name":"if","hash":{},"fn":container.program(17, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":46,"column":387},"end":{"line":46,"column":453}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depths[1],"tried"),"hasError"),{"name":"if","hash":{},"fn":container.program(18, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":46,"column":453},"end":{"line":46,"column":513}}})) != null ? stack1 : "")
+    + "<td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"adjustedRSquared") || alias2(depth0, "adjustedRSquared", {"start":{"line":46,"column":529},"end":{"line":46,"column":545}} ))),(typeof helper === alias3 ? helper.call(alias1,{"name":"adjustedRSquared","hash":{},"data":data,"loc":{"start":{"line":46,"column":527},"end":{"line":46,"column":547}}}) : helper)))
+    + "</td><td class=\"wide\">"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(depth0,"chosen"),{"name":"if","hash":{},"fn":container.program(19, data, 0, blockParams, depths),"inverse":container.program(20, data, 0, blockParams, depths),"data":data,"loc":{"start":{"line":46,"column":569},"end":{"line":46,"column":649}}})) != null ? stack1 : "")
+    + "</td></tr>\n";
+},"13":function(container,depth0,helpers,partials,data) {
+    return " class=\"chosen\"";
+},"14":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "; response on the "
+    + container.escapeExpression((((helper = lookupProperty(helpers,"scale") || container.strict(depth0, "scale", {"start":{"line":46,"column":153},"end":{"line":46,"column":158}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"scale","hash":{},"data":data,"loc":{"start":{"line":46,"column":151},"end":{"line":46,"column":160}}}) : helper)))
+    + " scale";
+},"15":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<span class=\"under\">Left out: "
+    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":46,"column":229},"end":{"line":46,"column":233}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":46,"column":227},"end":{"line":46,"column":240}}}))
+    + "</span>";
+},"16":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2097,13 +2304,35 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":21,"column":335},"end":{"line":21,"column":340}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":21,"column":333},"end":{"line":21,"column":342}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":46,"column":335},"end":{"line":46,"column":340}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":46,"column":333},"end":{"line":46,"column":342}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"difference") || alias1(depth0, "difference", {"start":{"line":21,"column":363},"end":{"line":21,"column":373}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"difference","hash":{},"data":data,"loc":{"start":{"line":21,"column":361},"end":{"line":21,"column":375}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"difference") || alias1(depth0, "difference", {"start":{"line":46,"column":363},"end":{"line":46,"column":373}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"difference","hash":{},"data":data,"loc":{"start":{"line":46,"column":361},"end":{"line":46,"column":375}}}) : helper)))
     + "</td>";
-},"10":function(container,depth0,helpers,partials,data) {
+},"17":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td class=\"n\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":46,"column":431},"end":{"line":46,"column":439}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":46,"column":429},"end":{"line":46,"column":441}}}) : helper)))
+    + "</td>";
+},"18":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td class=\"n\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"error") || container.strict(depth0, "error", {"start":{"line":46,"column":494},"end":{"line":46,"column":499}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"error","hash":{},"data":data,"loc":{"start":{"line":46,"column":492},"end":{"line":46,"column":501}}}) : helper)))
+    + "</td>";
+},"19":function(container,depth0,helpers,partials,data) {
     return "<span class=\"verdict\">chosen</span>";
-},"11":function(container,depth0,helpers,partials,data) {
+},"20":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2111,68 +2340,8 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":21,"column":502},"end":{"line":21,"column":506}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":21,"column":500},"end":{"line":21,"column":516}}}));
-},"12":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(depth0,"tried"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
-},"13":function(container,depth0,helpers,partials,data,blockParams,depths) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Partial F of nested pairs\">\n<table>\n<caption>Does the larger of two nested candidates improve on the smaller?</caption>\n<thead><tr><th scope=\"col\">smaller</th><th scope=\"col\">larger</th><th scope=\"col\" class=\"n\">partial F</th><th scope=\"col\" class=\"n\">degrees of freedom</th><th scope=\"col\" class=\"n\">p-value</th>"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairsDecided"),{"name":"if","hash":{},"fn":container.program(14, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":193},"end":{"line":33,"column":265}}})) != null ? stack1 : "")
-    + "</tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairs"),{"name":"each","hash":{},"fn":container.program(15, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":35,"column":0},"end":{"line":37,"column":9}}})) != null ? stack1 : "")
-    + "</tbody>\n</table>\n</div>\n";
-},"14":function(container,depth0,helpers,partials,data) {
-    return "<th scope=\"col\">part in the choice</th>";
-},"15":function(container,depth0,helpers,partials,data,blockParams,depths) {
-    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"smaller") || alias1(depth0, "smaller", {"start":{"line":36,"column":22},"end":{"line":36,"column":29}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"smaller","hash":{},"data":data,"loc":{"start":{"line":36,"column":20},"end":{"line":36,"column":31}}}) : helper)))
-    + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"larger") || alias1(depth0, "larger", {"start":{"line":36,"column":42},"end":{"line":36,"column":48}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"larger","hash":{},"data":data,"loc":{"start":{"line":36,"column":40},"end":{"line":36,"column":50}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"statistic") || alias1(depth0, "statistic", {"start":{"line":36,"column":71},"end":{"line":36,"column":80}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"statistic","hash":{},"data":data,"loc":{"start":{"line":36,"column":69},"end":{"line":36,"column":82}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"freedom") || alias1(depth0, "freedom", {"start":{"line":36,"column":103},"end":{"line":36,"column":110}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"freedom","hash":{},"data":data,"loc":{"start":{"line":36,"column":101},"end":{"line":36,"column":112}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"pValue") || alias1(depth0, "pValue", {"start":{"line":36,"column":133},"end":{"line":36,"column":139}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"pValue","hash":{},"data":data,"loc":{"start":{"line":36,"column":131},"end":{"line":36,"column":141}}}) : helper)))
-    + "</td>"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depths[1],"tried"),"pairsDecided"),{"name":"if","hash":{},"fn":container.program(16, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":36,"column":146},"end":{"line":36,"column":232}}})) != null ? stack1 : "")
-    + "</tr>\n";
-},"16":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<td>"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"decided"),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.program(18, data, 0),"data":data,"loc":{"start":{"line":36,"column":179},"end":{"line":36,"column":220}}})) != null ? stack1 : "")
-    + "</td>";
-},"17":function(container,depth0,helpers,partials,data) {
-    return "decided";
-},"18":function(container,depth0,helpers,partials,data) {
-    return "none";
-},"19":function(container,depth0,helpers,partials,data) {
+  return container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":46,"column":628},"end":{"line":46,"column":632}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":46,"column":626},"end":{"line":46,"column":642}}}));
+},"21":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2181,8 +2350,115 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p class=\"small\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"tried"), "pairsNote", {"start":{"line":43,"column":19},"end":{"line":43,"column":34}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"tried"), "candidatesMore", {"start":{"line":52,"column":19},"end":{"line":52,"column":39}} ), depth0))
     + "</p>\n";
+},"22":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(depth0,"tried"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"23":function(container,depth0,helpers,partials,data,blockParams,depths) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Partial F of nested pairs\">\n<table>\n<caption>Does the larger of two nested candidates improve on the smaller?</caption>\n<thead><tr><th scope=\"col\">smaller</th><th scope=\"col\">larger</th><th scope=\"col\" class=\"n\">partial F</th><th scope=\"col\" class=\"n\">degrees of freedom</th><th scope=\"col\" class=\"n\">p-value</th>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairsDecided"),{"name":"if","hash":{},"fn":container.program(24, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":61,"column":193},"end":{"line":61,"column":265}}})) != null ? stack1 : "")
+    + "</tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairs"),{"name":"each","hash":{},"fn":container.program(25, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":63,"column":0},"end":{"line":65,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
+},"24":function(container,depth0,helpers,partials,data) {
+    return "<th scope=\"col\">part in the choice</th>";
+},"25":function(container,depth0,helpers,partials,data,blockParams,depths) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"smaller") || alias1(depth0, "smaller", {"start":{"line":64,"column":22},"end":{"line":64,"column":29}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"smaller","hash":{},"data":data,"loc":{"start":{"line":64,"column":20},"end":{"line":64,"column":31}}}) : helper)))
+    + "</th><td>"
+    + alias4((((helper = lookupProperty(helpers,"larger") || alias1(depth0, "larger", {"start":{"line":64,"column":42},"end":{"line":64,"column":48}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"larger","hash":{},"data":data,"loc":{"start":{"line":64,"column":40},"end":{"line":64,"column":50}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"statistic") || alias1(depth0, "statistic", {"start":{"line":64,"column":71},"end":{"line":64,"column":80}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"statistic","hash":{},"data":data,"loc":{"start":{"line":64,"column":69},"end":{"line":64,"column":82}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"freedom") || alias1(depth0, "freedom", {"start":{"line":64,"column":103},"end":{"line":64,"column":110}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"freedom","hash":{},"data":data,"loc":{"start":{"line":64,"column":101},"end":{"line":64,"column":112}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"pValue") || alias1(depth0, "pValue", {"start":{"line":64,"column":133},"end":{"line":64,"column":139}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"pValue","hash":{},"data":data,"loc":{"start":{"line":64,"column":131},"end":{"line":64,"column":141}}}) : helper)))
+    + "</td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depths[1],"tried"),"pairsDecided"),{"name":"if","hash":{},"fn":container.program(26, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":64,"column":146},"end":{"line":64,"column":232}}})) != null ? stack1 : "")
+    + "</tr>\n";
+},"26":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"decided"),{"name":"if","hash":{},"fn":container.program(27, data, 0),"inverse":container.program(28, data, 0),"data":data,"loc":{"start":{"line":64,"column":179},"end":{"line":64,"column":220}}})) != null ? stack1 : "")
+    + "</td>";
+},"27":function(container,depth0,helpers,partials,data) {
+    return "decided";
+},"28":function(container,depth0,helpers,partials,data) {
+    return "none";
+},"29":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"tried"), "pairsNote", {"start":{"line":71,"column":19},"end":{"line":71,"column":34}} ), depth0))
+    + "</p>\n";
+},"30":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=container.strict, alias2=container.lambda, alias3=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<h3>Would other rows have chosen another?</h3>\n<p>"
+    + alias3(alias2(alias1(lookupProperty(lookupProperty(depth0,"tried"),"stability"), "finding", {"start":{"line":75,"column":5},"end":{"line":75,"column":28}} ), depth0))
+    + "</p>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"tried"),"stability"),"candidates"),{"name":"if","hash":{},"fn":container.program(31, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":76,"column":0},"end":{"line":83,"column":7}}})) != null ? stack1 : "")
+    + "<p class=\"small\">"
+    + alias3(alias2(alias1(lookupProperty(lookupProperty(depth0,"tried"),"stability"), "method", {"start":{"line":84,"column":19},"end":{"line":84,"column":41}} ), depth0))
+    + "</p>\n";
+},"31":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"charts\">\n"
+    + ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"tried"),"stability"),"candidates"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"tried"),"stability"),"terms"),{"name":"if","hash":{},"fn":container.program(32, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":79,"column":0},"end":{"line":81,"column":7}}})) != null ? stack1 : "")
+    + "</div>\n";
+},"32":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"tried"),"stability"),"terms"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data,blockParams,depths) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2196,16 +2472,23 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"admission"),{"name":"if","hash":{},"fn":container.program(1, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":13,"column":7}}})) != null ? stack1 : "")
     + "<p class=\"finding\">"
     + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":14,"column":21},"end":{"line":14,"column":25}} )).call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"because"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":14,"column":19},"end":{"line":14,"column":41}}}))
-    + "</p>\n<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Candidates\">\n<table>\n<caption>Candidates"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(3, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":19},"end":{"line":17,"column":78}}})) != null ? stack1 : "")
+    + "</p>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"families"),{"name":"each","hash":{},"fn":container.program(3, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":36,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"families"),{"name":"if","hash":{},"fn":container.program(7, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":37,"column":0},"end":{"line":39,"column":7}}})) != null ? stack1 : "")
+    + "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Candidates\">\n<table>\n<caption>Candidates"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(8, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":42,"column":19},"end":{"line":42,"column":78}}})) != null ? stack1 : "")
     + "</caption>\n<thead><tr><th scope=\"col\" class=\"n\">rank</th><th scope=\"col\">candidate and its terms</th><th scope=\"col\" class=\"n\">coefficients</th>"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(4, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":133},"end":{"line":18,"column":254}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"ranked"),{"name":"if","hash":{},"fn":container.program(9, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":43,"column":133},"end":{"line":43,"column":254}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"hasEvidence"),{"name":"if","hash":{},"fn":container.program(10, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":43,"column":254},"end":{"line":43,"column":335}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"hasError"),{"name":"if","hash":{},"fn":container.program(11, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":43,"column":335},"end":{"line":43,"column":417}}})) != null ? stack1 : "")
     + "<th scope=\"col\" class=\"n\">adjusted R²</th><th scope=\"col\">admitted?</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"candidates"),{"name":"each","hash":{},"fn":container.program(5, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":0},"end":{"line":22,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"candidates"),{"name":"each","hash":{},"fn":container.program(12, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":45,"column":0},"end":{"line":47,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"chart"),{"name":"if","hash":{},"fn":container.program(12, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":28,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairs"),{"name":"if","hash":{},"fn":container.program(13, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":0},"end":{"line":41,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairsNote"),{"name":"if","hash":{},"fn":container.program(19, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":42,"column":0},"end":{"line":44,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"candidatesMore"),{"name":"if","hash":{},"fn":container.program(21, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":51,"column":0},"end":{"line":53,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"chart"),{"name":"if","hash":{},"fn":container.program(22, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":54,"column":0},"end":{"line":56,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairs"),{"name":"if","hash":{},"fn":container.program(23, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":57,"column":0},"end":{"line":69,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"pairsNote"),{"name":"if","hash":{},"fn":container.program(29, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":70,"column":0},"end":{"line":72,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"tried"),"stability"),{"name":"if","hash":{},"fn":container.program(30, data, 0, blockParams, depths),"inverse":container.noop,"data":data,"loc":{"start":{"line":73,"column":0},"end":{"line":85,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true,"useDepths":true},
   'trust': {"0":function(container,depth0,helpers,partials,data) {
@@ -2218,24 +2501,56 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
 
   return "<p class=\"finding\">"
     + alias3(alias2(alias1(lookupProperty(depth0,"trust"), "summary", {"start":{"line":4,"column":21},"end":{"line":4,"column":34}} ), depth0))
-    + "</p>\n<div class=\"pair\">\n"
+    + "</p>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"unseen"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":5,"column":0},"end":{"line":18,"column":7}}})) != null ? stack1 : "")
+    + "<div class=\"pair\">\n"
     + ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(depth0,"trust"),"fitted"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
     + "<div>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"counts"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":10,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"counts"),{"name":"each","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":0},"end":{"line":24,"column":9}}})) != null ? stack1 : "")
     + "<p class=\"small\">"
-    + alias3(alias2(alias1(lookupProperty(depth0,"trust"), "arithmetic", {"start":{"line":11,"column":19},"end":{"line":11,"column":35}} ), depth0))
+    + alias3(alias2(alias1(lookupProperty(depth0,"trust"), "arithmetic", {"start":{"line":25,"column":19},"end":{"line":25,"column":35}} ), depth0))
     + "</p>\n</div>\n</div>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"findings"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":32,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":56,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":57,"column":0},"end":{"line":67,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":68,"column":0},"end":{"line":86,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"if","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":87,"column":0},"end":{"line":96,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"if","hash":{},"fn":container.program(24, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":0},"end":{"line":106,"column":7}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"unseen"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":28,"column":0},"end":{"line":30,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"findings"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":31,"column":0},"end":{"line":49,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":50,"column":0},"end":{"line":73,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":74,"column":0},"end":{"line":84,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":85,"column":0},"end":{"line":103,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"if","hash":{},"fn":container.program(25, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":104,"column":0},"end":{"line":113,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"if","hash":{},"fn":container.program(28, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":114,"column":0},"end":{"line":123,"column":7}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<article class=\"asked-of\">\n<h3>How does it do on rows it has not seen?</h3>\n<p>"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"unseen"), "finding", {"start":{"line":8,"column":5},"end":{"line":8,"column":25}} ), depth0))
+    + "</p>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"unseen"),"chart"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":9,"column":0},"end":{"line":11,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"unseen"),"sentences"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":14,"column":9}}})) != null ? stack1 : "")
+    + "</article>\n<article class=\"asked-of\">\n<h3>How close is it to the rows it was fitted on?</h3>\n";
+},"2":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"unseen"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"3":function(container,depth0,helpers,partials,data) {
+    return "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(depth0, depth0))
+    + "</p>\n";
+},"4":function(container,depth0,helpers,partials,data) {
     return "<p>"
     + container.escapeExpression(container.lambda(depth0, depth0))
     + "</p>\n";
-},"2":function(container,depth0,helpers,partials,data) {
+},"5":function(container,depth0,helpers,partials,data) {
+    return "</article>\n";
+},"6":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2244,19 +2559,19 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<article class=\"asked-of c"
-    + alias4((((helper = lookupProperty(helpers,"concern") || alias1(depth0, "concern", {"start":{"line":15,"column":28},"end":{"line":15,"column":35}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"concern","hash":{},"data":data,"loc":{"start":{"line":15,"column":26},"end":{"line":15,"column":37}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"concern") || alias1(depth0, "concern", {"start":{"line":32,"column":28},"end":{"line":32,"column":35}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"concern","hash":{},"data":data,"loc":{"start":{"line":32,"column":26},"end":{"line":32,"column":37}}}) : helper)))
     + "\">\n<h3>"
-    + alias4((((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":16,"column":6},"end":{"line":16,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":16,"column":4},"end":{"line":16,"column":16}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":33,"column":6},"end":{"line":33,"column":14}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":33,"column":4},"end":{"line":33,"column":16}}}) : helper)))
     + "</h3>\n<p><span class=\"verdict\">"
-    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":17,"column":27},"end":{"line":17,"column":31}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":17,"column":25},"end":{"line":17,"column":33}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"word") || alias1(depth0, "word", {"start":{"line":34,"column":27},"end":{"line":34,"column":31}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"word","hash":{},"data":data,"loc":{"start":{"line":34,"column":25},"end":{"line":34,"column":33}}}) : helper)))
     + ".</span> "
-    + alias4((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":17,"column":44},"end":{"line":17,"column":48}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":17,"column":42},"end":{"line":17,"column":58}}}))
+    + alias4((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":34,"column":44},"end":{"line":34,"column":48}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":34,"column":42},"end":{"line":34,"column":58}}}))
     + "</p>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":0},"end":{"line":20,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":23,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"charts"),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":30,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"advice"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":35,"column":0},"end":{"line":37,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":38,"column":0},"end":{"line":40,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"charts"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":41,"column":0},"end":{"line":47,"column":7}}})) != null ? stack1 : "")
     + "</article>\n";
-},"3":function(container,depth0,helpers,partials,data) {
+},"7":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2265,9 +2580,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p><b>What to do:</b> "
-    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":19,"column":24},"end":{"line":19,"column":28}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"advice"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":19,"column":22},"end":{"line":19,"column":37}}}))
+    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":36,"column":24},"end":{"line":36,"column":28}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"advice"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":36,"column":22},"end":{"line":36,"column":37}}}))
     + "</p>\n";
-},"4":function(container,depth0,helpers,partials,data) {
+},"8":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2276,51 +2591,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p class=\"small\">"
-    + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":22,"column":19},"end":{"line":22,"column":27}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":22,"column":17},"end":{"line":22,"column":29}}}) : helper)))
-    + "</p>\n";
-},"5":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<div class=\"charts\">\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"charts"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":28,"column":9}}})) != null ? stack1 : "")
-    + "</div>\n";
-},"6":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),depth0,{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
-},"7":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<article class=\"asked-of\">\n<h3>Which terms move together?</h3>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"sentences"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":36,"column":0},"end":{"line":38,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"chart"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":39,"column":0},"end":{"line":41,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"rows"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":42,"column":0},"end":{"line":54,"column":7}}})) != null ? stack1 : "")
-    + "</article>\n";
-},"8":function(container,depth0,helpers,partials,data) {
-    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<p>"
-    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":37,"column":5},"end":{"line":37,"column":9}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":37,"column":3},"end":{"line":37,"column":16}}}))
+    + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":39,"column":19},"end":{"line":39,"column":27}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":39,"column":17},"end":{"line":39,"column":29}}}) : helper)))
     + "</p>\n";
 },"9":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -2330,7 +2601,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+  return "<div class=\"charts\">\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"charts"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":43,"column":0},"end":{"line":45,"column":9}}})) != null ? stack1 : "")
+    + "</div>\n";
 },"10":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2339,43 +2612,31 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients without their partners\">\n<table>\n<caption>What each coefficient becomes without one of its partners</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\">without</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">standard error</th><th scope=\"col\" class=\"n\">estimate then</th><th scope=\"col\" class=\"n\">standard error then</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"rows"),{"name":"each","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":48,"column":0},"end":{"line":50,"column":9}}})) != null ? stack1 : "")
-    + "</tbody>\n</table>\n</div>\n";
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),depth0,{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
 },"11":function(container,depth0,helpers,partials,data) {
-    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":49,"column":22},"end":{"line":49,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":49,"column":20},"end":{"line":49,"column":28}}}) : helper)))
-    + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"leftOut") || alias1(depth0, "leftOut", {"start":{"line":49,"column":39},"end":{"line":49,"column":46}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"leftOut","hash":{},"data":data,"loc":{"start":{"line":49,"column":37},"end":{"line":49,"column":48}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":49,"column":69},"end":{"line":49,"column":77}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":49,"column":67},"end":{"line":49,"column":79}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"standardError") || alias1(depth0, "standardError", {"start":{"line":49,"column":100},"end":{"line":49,"column":113}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardError","hash":{},"data":data,"loc":{"start":{"line":49,"column":98},"end":{"line":49,"column":115}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"estimateWithout") || alias1(depth0, "estimateWithout", {"start":{"line":49,"column":136},"end":{"line":49,"column":151}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimateWithout","hash":{},"data":data,"loc":{"start":{"line":49,"column":134},"end":{"line":49,"column":153}}}) : helper)))
-    + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"standardErrorWithout") || alias1(depth0, "standardErrorWithout", {"start":{"line":49,"column":174},"end":{"line":49,"column":194}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardErrorWithout","hash":{},"data":data,"loc":{"start":{"line":49,"column":172},"end":{"line":49,"column":196}}}) : helper)))
-    + "</td></tr>\n";
+  return "<article class=\"asked-of\">\n<h3>Which terms move together?</h3>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"sentences"),{"name":"each","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":53,"column":0},"end":{"line":55,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"chart"),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":56,"column":0},"end":{"line":58,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"rows"),{"name":"if","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":59,"column":0},"end":{"line":71,"column":7}}})) != null ? stack1 : "")
+    + "</article>\n";
 },"12":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "<article class=\"asked-of\">\n<h3>Do the intervals hold without their assumptions?</h3>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),"chart"),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.program(14, data, 0),"data":data,"loc":{"start":{"line":60,"column":0},"end":{"line":64,"column":7}}})) != null ? stack1 : "")
-    + "<p class=\"small\">"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"), "method", {"start":{"line":65,"column":19},"end":{"line":65,"column":42}} ), depth0))
-    + "</p>\n</article>\n";
+  return "<p>"
+    + container.escapeExpression((lookupProperty(helpers,"rich")||container.strict(depth0, "rich", {"start":{"line":54,"column":5},"end":{"line":54,"column":9}} )).call(depth0 != null ? depth0 : (container.nullContext || {}),depth0,{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":54,"column":3},"end":{"line":54,"column":16}}}))
+    + "</p>\n";
 },"13":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2384,8 +2645,62 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
 },"14":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients without their partners\">\n<table>\n<caption>What each coefficient becomes without one of its partners</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\">without</th><th scope=\"col\" class=\"n\">estimate</th><th scope=\"col\" class=\"n\">standard error</th><th scope=\"col\" class=\"n\">estimate then</th><th scope=\"col\" class=\"n\">standard error then</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),"rows"),{"name":"each","hash":{},"fn":container.program(15, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":65,"column":0},"end":{"line":67,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
+},"15":function(container,depth0,helpers,partials,data) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":66,"column":22},"end":{"line":66,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":66,"column":20},"end":{"line":66,"column":28}}}) : helper)))
+    + "</th><td>"
+    + alias4((((helper = lookupProperty(helpers,"leftOut") || alias1(depth0, "leftOut", {"start":{"line":66,"column":39},"end":{"line":66,"column":46}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"leftOut","hash":{},"data":data,"loc":{"start":{"line":66,"column":37},"end":{"line":66,"column":48}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"estimate") || alias1(depth0, "estimate", {"start":{"line":66,"column":69},"end":{"line":66,"column":77}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimate","hash":{},"data":data,"loc":{"start":{"line":66,"column":67},"end":{"line":66,"column":79}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"standardError") || alias1(depth0, "standardError", {"start":{"line":66,"column":100},"end":{"line":66,"column":113}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardError","hash":{},"data":data,"loc":{"start":{"line":66,"column":98},"end":{"line":66,"column":115}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"estimateWithout") || alias1(depth0, "estimateWithout", {"start":{"line":66,"column":136},"end":{"line":66,"column":151}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"estimateWithout","hash":{},"data":data,"loc":{"start":{"line":66,"column":134},"end":{"line":66,"column":153}}}) : helper)))
+    + "</td><td class=\"n\">"
+    + alias4((((helper = lookupProperty(helpers,"standardErrorWithout") || alias1(depth0, "standardErrorWithout", {"start":{"line":66,"column":174},"end":{"line":66,"column":194}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"standardErrorWithout","hash":{},"data":data,"loc":{"start":{"line":66,"column":172},"end":{"line":66,"column":196}}}) : helper)))
+    + "</td></tr>\n";
+},"16":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<article class=\"asked-of\">\n<h3>Do the intervals hold without their assumptions?</h3>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),"chart"),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.program(18, data, 0),"data":data,"loc":{"start":{"line":77,"column":0},"end":{"line":81,"column":7}}})) != null ? stack1 : "")
+    + "<p class=\"small\">"
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"), "method", {"start":{"line":82,"column":19},"end":{"line":82,"column":42}} ), depth0))
+    + "</p>\n</article>\n";
+},"17":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"18":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2394,9 +2709,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p>"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"), "finding", {"start":{"line":63,"column":5},"end":{"line":63,"column":29}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"), "finding", {"start":{"line":80,"column":5},"end":{"line":80,"column":29}} ), depth0))
     + "</p>\n";
-},"15":function(container,depth0,helpers,partials,data) {
+},"19":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2405,11 +2720,11 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<article class=\"asked-of\">\n<h3>What would it say without a row?</h3>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rowsNote"),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":71,"column":0},"end":{"line":73,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rowsNote"),{"name":"if","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":88,"column":0},"end":{"line":90,"column":7}}})) != null ? stack1 : "")
     + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Most influential rows\">\n<table>\n<caption>The rows that move the coefficients most, and the coefficient that each moves most: as it is, and without the row</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\">moves</th><th scope=\"col\" class=\"n\">observed</th><th scope=\"col\" class=\"n\">fitted</th><th scope=\"col\" class=\"n\">standardised residual</th><th scope=\"col\" class=\"n\">leverage</th><th scope=\"col\" class=\"n\">Cook’s distance</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"each","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":79,"column":0},"end":{"line":81,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"each","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":96,"column":0},"end":{"line":98,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n</article>\n";
-},"16":function(container,depth0,helpers,partials,data) {
+},"20":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2418,9 +2733,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<p>"
-    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"trust"), "rowsNote", {"start":{"line":72,"column":5},"end":{"line":72,"column":19}} ), depth0))
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"trust"), "rowsNote", {"start":{"line":89,"column":5},"end":{"line":89,"column":19}} ), depth0))
     + "</p>\n";
-},"17":function(container,depth0,helpers,partials,data) {
+},"21":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2429,22 +2744,22 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":80,"column":22},"end":{"line":80,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":80,"column":20},"end":{"line":80,"column":28}}}) : helper)))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"identified"),{"name":"if","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":80,"column":28},"end":{"line":80,"column":91}}})) != null ? stack1 : "")
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":97,"column":22},"end":{"line":97,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":97,"column":20},"end":{"line":97,"column":28}}}) : helper)))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"identified"),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":28},"end":{"line":97,"column":91}}})) != null ? stack1 : "")
     + "</th><td class=\"wide\">"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"moves"),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.program(20, data, 0),"data":data,"loc":{"start":{"line":80,"column":113},"end":{"line":80,"column":151}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"moves"),{"name":"if","hash":{},"fn":container.program(23, data, 0),"inverse":container.program(24, data, 0),"data":data,"loc":{"start":{"line":97,"column":113},"end":{"line":97,"column":151}}})) != null ? stack1 : "")
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"observed") || alias1(depth0, "observed", {"start":{"line":80,"column":172},"end":{"line":80,"column":180}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"observed","hash":{},"data":data,"loc":{"start":{"line":80,"column":170},"end":{"line":80,"column":182}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"observed") || alias1(depth0, "observed", {"start":{"line":97,"column":172},"end":{"line":97,"column":180}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"observed","hash":{},"data":data,"loc":{"start":{"line":97,"column":170},"end":{"line":97,"column":182}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"fitted") || alias1(depth0, "fitted", {"start":{"line":80,"column":203},"end":{"line":80,"column":209}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"fitted","hash":{},"data":data,"loc":{"start":{"line":80,"column":201},"end":{"line":80,"column":211}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"fitted") || alias1(depth0, "fitted", {"start":{"line":97,"column":203},"end":{"line":97,"column":209}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"fitted","hash":{},"data":data,"loc":{"start":{"line":97,"column":201},"end":{"line":97,"column":211}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"residual") || alias1(depth0, "residual", {"start":{"line":80,"column":232},"end":{"line":80,"column":240}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"residual","hash":{},"data":data,"loc":{"start":{"line":80,"column":230},"end":{"line":80,"column":242}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"residual") || alias1(depth0, "residual", {"start":{"line":97,"column":232},"end":{"line":97,"column":240}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"residual","hash":{},"data":data,"loc":{"start":{"line":97,"column":230},"end":{"line":97,"column":242}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"leverage") || alias1(depth0, "leverage", {"start":{"line":80,"column":263},"end":{"line":80,"column":271}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"leverage","hash":{},"data":data,"loc":{"start":{"line":80,"column":261},"end":{"line":80,"column":273}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"leverage") || alias1(depth0, "leverage", {"start":{"line":97,"column":263},"end":{"line":97,"column":271}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"leverage","hash":{},"data":data,"loc":{"start":{"line":97,"column":261},"end":{"line":97,"column":273}}}) : helper)))
     + "</td><td class=\"n\">"
-    + alias4((((helper = lookupProperty(helpers,"distance") || alias1(depth0, "distance", {"start":{"line":80,"column":294},"end":{"line":80,"column":302}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"distance","hash":{},"data":data,"loc":{"start":{"line":80,"column":292},"end":{"line":80,"column":304}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"distance") || alias1(depth0, "distance", {"start":{"line":97,"column":294},"end":{"line":97,"column":302}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"distance","hash":{},"data":data,"loc":{"start":{"line":97,"column":292},"end":{"line":97,"column":304}}}) : helper)))
     + "</td></tr>\n";
-},"18":function(container,depth0,helpers,partials,data) {
+},"22":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2453,44 +2768,8 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<span class=\"under\">row "
-    + container.escapeExpression((((helper = lookupProperty(helpers,"row") || container.strict(depth0, "row", {"start":{"line":80,"column":72},"end":{"line":80,"column":75}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"row","hash":{},"data":data,"loc":{"start":{"line":80,"column":70},"end":{"line":80,"column":77}}}) : helper)))
+    + container.escapeExpression((((helper = lookupProperty(helpers,"row") || container.strict(depth0, "row", {"start":{"line":97,"column":72},"end":{"line":97,"column":75}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"row","hash":{},"data":data,"loc":{"start":{"line":97,"column":70},"end":{"line":97,"column":77}}}) : helper)))
     + "</span>";
-},"19":function(container,depth0,helpers,partials,data) {
-    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return container.escapeExpression((((helper = lookupProperty(helpers,"moves") || container.strict(depth0, "moves", {"start":{"line":80,"column":128},"end":{"line":80,"column":133}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"moves","hash":{},"data":data,"loc":{"start":{"line":80,"column":126},"end":{"line":80,"column":135}}}) : helper)));
-},"20":function(container,depth0,helpers,partials,data) {
-    return "–";
-},"21":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<article class=\"asked-of\">\n<h3>Asked, with nothing to see</h3>\n<dl class=\"answers\">\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"each","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":91,"column":0},"end":{"line":93,"column":9}}})) != null ? stack1 : "")
-    + "</dl>\n</article>\n";
-},"22":function(container,depth0,helpers,partials,data) {
-    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<div><dt>"
-    + alias3((((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":92,"column":11},"end":{"line":92,"column":19}} ))),(typeof helper === "function" ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":92,"column":9},"end":{"line":92,"column":21}}}) : helper)))
-    + "</dt><dd>"
-    + alias3((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":92,"column":32},"end":{"line":92,"column":36}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":92,"column":30},"end":{"line":92,"column":46}}}))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(23, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":92,"column":46},"end":{"line":92,"column":108}}})) != null ? stack1 : "")
-    + "</dd></div>\n";
 },"23":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2499,10 +2778,46 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
         return undefined
     };
 
-  return "<span class=\"under\">"
-    + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":92,"column":84},"end":{"line":92,"column":92}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":92,"column":82},"end":{"line":92,"column":94}}}) : helper)))
-    + "</span>";
+  return container.escapeExpression((((helper = lookupProperty(helpers,"moves") || container.strict(depth0, "moves", {"start":{"line":97,"column":128},"end":{"line":97,"column":133}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"moves","hash":{},"data":data,"loc":{"start":{"line":97,"column":126},"end":{"line":97,"column":135}}}) : helper)));
 },"24":function(container,depth0,helpers,partials,data) {
+    return "–";
+},"25":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<article class=\"asked-of\">\n<h3>Asked, with nothing to see</h3>\n<dl class=\"answers\">\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"each","hash":{},"fn":container.program(26, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":108,"column":0},"end":{"line":110,"column":9}}})) != null ? stack1 : "")
+    + "</dl>\n</article>\n";
+},"26":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div><dt>"
+    + alias3((((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":109,"column":11},"end":{"line":109,"column":19}} ))),(typeof helper === "function" ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":109,"column":9},"end":{"line":109,"column":21}}}) : helper)))
+    + "</dt><dd>"
+    + alias3((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":109,"column":32},"end":{"line":109,"column":36}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":109,"column":30},"end":{"line":109,"column":46}}}))
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(27, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":109,"column":46},"end":{"line":109,"column":108}}})) != null ? stack1 : "")
+    + "</dd></div>\n";
+},"27":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<span class=\"under\">"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":109,"column":84},"end":{"line":109,"column":92}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":109,"column":82},"end":{"line":109,"column":94}}}) : helper)))
+    + "</span>";
+},"28":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2511,9 +2826,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<details>\n<summary>The residuals in pictures</summary>\n<div class=\"charts\">\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":101,"column":0},"end":{"line":103,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":118,"column":0},"end":{"line":120,"column":9}}})) != null ? stack1 : "")
     + "</div>\n</details>\n";
-},"25":function(container,depth0,helpers,partials,data) {
+},"29":function(container,depth0,helpers,partials,data) {
     return "<p>There is no chosen model to examine.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -2524,7 +2839,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<section id=\"trust\" aria-labelledby=\"trust-heading\">\n<h2 id=\"trust-heading\"><span class=\"no\">4</span> Can it be trusted?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(25, data, 0),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":109,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(29, data, 0),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":126,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true},
 };

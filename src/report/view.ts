@@ -106,7 +106,12 @@ export interface VariableView {
 }
 
 export interface TriedView {
+  /** The declared rule in words, and how candidates were held against rows they had not seen. */
   readonly rule: readonly string[];
+  /** What each search of a family covered and found. */
+  readonly families: readonly FamilyView[];
+  /** How often what was chosen would be chosen again; null where the study does not ask. */
+  readonly stability: StabilityView | null;
   /** Admission rules in force, a sentence each. */
   readonly admission: readonly string[];
   readonly because: string;
@@ -114,7 +119,14 @@ export interface TriedView {
   readonly criterion: string;
   /** Whether candidates carry a value of that criterion. */
   readonly ranked: boolean;
+  /** Whether candidates carry weights of evidence. */
+  readonly hasEvidence: boolean;
+  /** Whether candidates carry an error on rows held out. */
+  readonly hasError: boolean;
+  /** The best ranked in full, the chosen one among them. */
   readonly candidates: readonly CandidateView[];
+  /** How many further candidates are in the tables; null where all are shown. */
+  readonly candidatesMore: string | null;
   readonly chart: Figure | null;
   /** Partial F of nested pairs: those that decided, then those that the chosen candidate is part of. */
   readonly pairs: readonly PairView[];
@@ -133,12 +145,42 @@ export interface CandidateView {
   readonly difference: string;
   readonly coefficients: string;
   readonly adjustedRSquared: string;
+  /** Weight of evidence: "48.7 %"; an en dash where there is none. */
+  readonly evidence: string;
+  /** Root mean squared error on rows held out, with its unit; an en dash where there is none. */
+  readonly error: string;
   readonly admitted: boolean;
   readonly chosen: boolean;
   /** "chosen", "admitted", or why it was refused. */
   readonly verdict: string;
   /** Columns left out because they depend on others, as sentences. */
   readonly dropped: readonly string[];
+}
+
+export interface FamilyView {
+  readonly name: string;
+  /** What was searched, how exactly, and why it ended. */
+  readonly sentences: readonly string[];
+  /** How the best value falls with size; null for elimination and selection. */
+  readonly chart: Figure | null;
+  /** The steps of elimination or selection. */
+  readonly path: readonly {
+    readonly step: string;
+    readonly term: string;
+    /** "enters" or "leaves". */
+    readonly action: string;
+    readonly evidence: string;
+  }[];
+}
+
+export interface StabilityView {
+  readonly finding: string;
+  /** How rows were drawn. */
+  readonly method: string;
+  /** How often each candidate is chosen; null where it is always the same. */
+  readonly candidates: Figure | null;
+  /** How often each term is in what is chosen; null likewise. */
+  readonly terms: Figure | null;
 }
 
 export interface PairView {
@@ -178,6 +220,8 @@ export interface SaysView {
   }[];
   /** Further measures of each coefficient; null for a record of a version before them. */
   readonly more: MoreView | null;
+  /** Estimates averaged over the admitted candidates; null where the study does not ask. */
+  readonly averaged: AveragedView | null;
   /** "95 %". */
   readonly confidence: string;
   /** Quantity and unit of the coefficients: "fuel burned, L". */
@@ -221,6 +265,28 @@ export interface LevelsView {
   readonly pairsNote: string | null;
 }
 
+export interface AveragedView {
+  /** What is averaged, and how to read it. */
+  readonly sentence: string;
+  /** "95 %": of the coefficients’ intervals. */
+  readonly confidence: string;
+  readonly coefficients: readonly {
+    readonly name: string;
+    /** Weight of the candidates that have it. */
+    readonly weight: string;
+    readonly estimate: string;
+    readonly standardError: string;
+    readonly interval: string;
+  }[];
+  /** "90 %": of the predictions’ intervals. */
+  readonly predictionConfidence: string;
+  readonly predictions: readonly {
+    readonly label: string;
+    readonly estimate: string;
+    readonly interval: string;
+  }[];
+}
+
 export interface MoreView {
   /** What the simultaneous intervals hold for; null where not asked for. */
   readonly simultaneous: string | null;
@@ -256,6 +322,8 @@ export interface CoefficientView {
 export interface TrustView {
   /** How many findings call for care, in a sentence. */
   readonly summary: string;
+  /** How the model does on rows that it has not seen; null where the study does not ask. */
+  readonly unseen: UnseenView | null;
   /** What calls for care or is worth a look, weightiest first, each with its drawings. */
   readonly findings: readonly FindingView[];
   /** What was asked with nothing to see. */
@@ -276,6 +344,13 @@ export interface TrustView {
   readonly rowsNote: string | null;
   /** How precisely the model was worked out. */
   readonly arithmetic: string;
+}
+
+export interface UnseenView {
+  readonly finding: string;
+  /** How that was found out, and what the rows set aside say. */
+  readonly sentences: readonly string[];
+  readonly chart: Figure | null;
 }
 
 export interface FindingView {

@@ -5,7 +5,7 @@ import { pathToFileURL } from 'node:url';
 import { type Browser, chromium, type Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { render } from '../../src/report/render.ts';
-import { declaredRecord, EXAMINED, TANGLED } from './declared-record.ts';
+import { declaredRecord, EXAMINED, SEARCHED, TANGLED, TESTED } from './declared-record.ts';
 import { CLIPPED_TABLES, HEADING_LEVELS, LOW_CONTRAST, TEXT_OUTSIDE } from './in-page.ts';
 import { sampleRecord, VARIANTS } from './sample-record.ts';
 
@@ -23,6 +23,8 @@ const REPORTS = [
   ...VARIANTS.map(([name, wish]) => [name, async () => sampleRecord(wish)] as const),
   ['examined', () => declaredRecord(EXAMINED)] as const,
   ['tangled', () => declaredRecord(TANGLED)] as const,
+  ['tested', () => declaredRecord(TESTED)] as const,
+  ['searched', () => declaredRecord(SEARCHED)] as const,
 ];
 
 describe.skipIf(CHROMIUM === undefined)('the report in a browser', () => {

@@ -111,3 +111,36 @@ export const TANGLED: Declared = {
 `,
   rest: '',
 };
+
+/** Everything that the study file offers for telling how far the choice can be trusted. */
+export const TESTED: Declared = {
+  candidates: NAMED,
+  rest: `selection:
+  rank_by: aicc
+  validation: { by: rows, folds: 5, repeats: 2 }
+  honest_error: { by: rows, folds: 5 }
+  stability: { repetitions: 30 }
+  hold_out: { last: 20 }
+  average: true
+`,
+};
+
+/** Searched families beside one named candidate. */
+export const SEARCHED: Declared = {
+  candidates: `  - name: Load alone
+    terms: [cargo]
+  - name: Any
+    subsets_of: [cargo, axle_load, speed, headwind, hull_days, vessel]
+    keep: 3
+  - name: Back
+    eliminate_from: [cargo, axle_load, speed, headwind, hull_days, vessel]
+    leave_at: 0.05
+`,
+  rest: `selection:
+  rank_by: aicc
+  stability: { repetitions: 30 }
+`,
+};
+
+/** Chosen on one part of the rows, estimated on the other. */
+export const SPLIT: Declared = { candidates: NAMED, rest: 'selection: { split_sample: { share: 0.5 } }\n' };

@@ -38,13 +38,13 @@ describe('a study that declares everything about its model', () => {
     const [errors, table, looked] = [
       'HC3: MacKinnon',
       'aria-label="Coefficients"',
-      'models were looked at',
+      'candidates were looked at',
     ].map((text) => html.indexOf(text));
     expect(errors).toBeGreaterThan(0);
     expect(errors!).toBeLessThan(table!);
     expect(table!).toBeLessThan(looked!);
     expect(plain(lookedSentence(record)!)).toMatch(
-      /^3 models were looked at and this one was chosen on the same rows/,
+      /^3 candidates were looked at and this one was chosen on the same rows/,
     );
     expect(lookedSentence({ ...record, candidates: record.candidates.slice(0, 1) })).toBeNull();
   });

@@ -28,6 +28,7 @@ import {
   termLabel,
 } from '../../src/report/words/lexicon.ts';
 import { typicalMiss } from '../../src/report/words/miss.ts';
+import { modelsLookedAt } from '../../src/report/words/models.ts';
 import { intervalCaption, predictionSentence } from '../../src/report/words/prediction.ts';
 import { scaleSentence } from '../../src/report/words/scale.ts';
 import { distanceCaption, ruleSentences } from '../../src/report/words/selection.ts';
@@ -455,7 +456,7 @@ describe('the first screen', () => {
   });
   it('tells how closely the model follows, with weights by the mean weight', () => {
     const candidate = record.candidates.find((c) => c.name === record.model!.candidate)!;
-    expect(plain(fitSentence(lexicon, candidate, 6))).toMatch(
+    expect(plain(fitSentence(lexicon, candidate, modelsLookedAt(record)))).toMatch(
       /chosen of 6 candidates, accounts for 9\d\.\d % .* it typically misses by \d+ L\.$/,
     );
     const variables = new Map(lexicon.variables);
@@ -472,7 +473,9 @@ describe('the first screen', () => {
     const log = { ...lexicon, response: { ...lexicon.response, scale: 'log' } };
     expect(plain(typicalMiss(log, Math.log(1.44))!)).toBe('44 %');
     expect(plain(typicalMiss(log, 1)!)).toBe('a factor of 2.7');
-    expect(fitSentence(lexicon, { ...candidate, r_squared: null }, 1)).toContain('no defined R²');
+    expect(
+      fitSentence(lexicon, { ...candidate, r_squared: null }, { count: 1, exact: true, searched: false }),
+    ).toContain('no defined R²');
   });
   it('says what acceptance asked for', () => {
     const met = { criterion: 'adjusted_r_squared', limit: 'at least 0.75', value: 0.8234, passed: true };
@@ -541,12 +544,14 @@ describe('selection, predictions and findings in words', () => {
       'press',
       'partial_f',
     ] as const) {
-      const sentences = ruleSentences({ ...record.selection, rank_by }, 6);
+      const sentences = ruleSentences({ ...record, selection: { ...record.selection, rank_by } });
       expect(sentences[1]).toMatch(
         rank_by === 'partial_f' ? /significance of 0\.05, by partial F/ : /is better/,
       );
     }
-    expect(ruleSentences({ ...record.selection, prefer_smaller_within: 0 }, 1)[1]).not.toContain('within');
+    expect(
+      ruleSentences({ ...record, selection: { ...record.selection, prefer_smaller_within: 0 } })[1],
+    ).not.toContain('within');
   });
   it('captions the distances: best, not best, none', () => {
     expect(distanceCaption(record.selection, record.candidates)).toMatch(/has the best AICc/);
@@ -568,9 +573,6 @@ describe('selection, predictions and findings in words', () => {
     );
     expect(intervalCaption(lexicon, record.predictions)).toContain('lies outside the data');
     expect(intervalCaption(lexicon, [])).toBe('');
-  });
-  it('gives the evidence of a finding', () => {
-    const finding = record.examination!.findings[0]!;
     // exp(17.7 ± 2.7): an interval from another scale has its lower end above 0, and says so.
     const wide = {
       ...record.predictions[0]!,
@@ -582,6 +584,9 @@ describe('selection, predictions and findings in words', () => {
     expect(plain(predictionSentence(lexicon, [wide], null)!)).toMatch(
       /48 800 000 L \(\d+ % interval 3 300 000 to 714 700 000 L\)/,
     );
+  });
+  it('gives the evidence of a finding', () => {
+    const finding = record.examination!.findings[0]!;
     expect(plain(evidence({ ...finding, statistic: 9.372, df: [8], p_value: 0.31 })!)).toBe(
       'Koenker’s form of the Breusch–Pagan statistic: 9.37 on 8 degrees of freedom, p = 0.31.',
     );
@@ -626,7 +631,7 @@ describe('selection, predictions and findings in words', () => {
     const headings = cautions(record).map((c) => c.heading);
     expect(headings[0]).toBe('From the study');
     expect(headings).toEqual(expect.arrayContaining(['Association', 'Selection', 'Extrapolation', 'Review']));
-    expect(cautions(record).find((c) => c.heading === 'Selection')!.text).toMatch(/^6 candidates/);
+    expect(cautions(record).find((c) => c.heading === 'Selection')!.text).toMatch(/^6\u00a0candidates/);
     expect(cautions({ ...record, study: { ...record.study, caution: null } })[0]!.heading).toBe(
       'Association',
     );

@@ -12,6 +12,7 @@ import { bewareLines } from '../words/beware.ts';
 import { studyLine } from '../words/data.ts';
 import { estimatedCandidate } from '../words/estimated.ts';
 import { counted, type Lexicon } from '../words/lexicon.ts';
+import { modelsLookedAt } from '../words/models.ts';
 import { predictionRounding } from '../words/prediction.ts';
 import { fittedUnit } from '../words/scale.ts';
 
@@ -21,7 +22,7 @@ export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
   const chosen = estimatedCandidate(record);
   return {
     answer: answerSentences(record, lexicon),
-    fit: chosen === undefined ? null : fitSentence(lexicon, chosen, record.candidates.length),
+    fit: chosen === undefined ? null : fitSentence(lexicon, chosen, modelsLookedAt(record)),
     predictions: headPredictions(record, lexicon),
     predictionConfidence: percent(record.study.prediction_interval),
     predictionsMore: furtherRows(record.predictions.length - ROWS),

@@ -18,7 +18,9 @@ import { estimatedCandidate } from '../words/estimated.ts';
 import { hypothesisEvidence } from '../words/hypothesis.ts';
 import { type Lexicon, stopped } from '../words/lexicon.ts';
 import { lookedSentence } from '../words/looked.ts';
+import { modelsLookedAt } from '../words/models.ts';
 import { fittedQuantity, fittedUnit, scaleSentence } from '../words/scale.ts';
+import { averagedView } from './averaged.ts';
 import { moreView } from './more.ts';
 import { termViews } from './terms.ts';
 
@@ -30,7 +32,7 @@ export function saysView(record: StudyRecord, lexicon: Lexicon): SaysView | null
   const unit = fittedUnit(lexicon.response);
   return {
     candidate: model.candidate,
-    fit: candidate === undefined ? '' : fitSentence(lexicon, candidate, record.candidates.length),
+    fit: candidate === undefined ? '' : fitSentence(lexicon, candidate, modelsLookedAt(record)),
     scaleNote: scaleSentence(lexicon),
     equation: equationOf(lexicon, model, coefficients),
     overall: candidate === undefined ? null : overallSentence(candidate),
@@ -47,6 +49,7 @@ export function saysView(record: StudyRecord, lexicon: Lexicon): SaysView | null
       evidence: hypothesisEvidence(one),
     })),
     more: moreView(record, coefficients),
+    averaged: averagedView(record, lexicon),
     confidence: percent(record.study.confidence),
     quantity:
       unit === null ? fittedQuantity(lexicon.response) : `${fittedQuantity(lexicon.response)} in ${unit}`,

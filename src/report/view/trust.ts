@@ -9,6 +9,7 @@ import { counted, type Lexicon } from '../words/lexicon.ts';
 import { dependenciesView } from './dependencies.ts';
 import { findingViews } from './findings.ts';
 import { influenceView } from './influence.ts';
+import { unseenView } from './unseen.ts';
 
 export function trustView(record: StudyRecord, lexicon: Lexicon): TrustView | null {
   const { examination, model } = record;
@@ -17,6 +18,7 @@ export function trustView(record: StudyRecord, lexicon: Lexicon): TrustView | nu
   const coefficients = candidate?.coefficients ?? [];
   return {
     summary: summarySentence(examination),
+    unseen: unseenView(record, lexicon),
     ...findingViews(lexicon, examination),
     dependencies: dependenciesView(examination),
     drawnAgain: drawnAgain(examination, coefficients),

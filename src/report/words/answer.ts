@@ -1,8 +1,9 @@
 import { count, percent, share } from '../numbers.ts';
 import type { RecordCandidate, RecordTerm, StudyRecord } from '../record-type.ts';
 import { briefEffect } from './effect.ts';
-import { counted, type Lexicon, labelOf, listed, lowered, raised } from './lexicon.ts';
+import { type Lexicon, labelOf, listed, lowered, raised } from './lexicon.ts';
 import { typicalMiss } from './miss.ts';
+import { type ModelsLookedAt, modelsPhrase } from './models.ts';
 import { predictionSentence } from './prediction.ts';
 import { fittedQuantity } from './scale.ts';
 import { stepPhrase } from './term.ts';
@@ -67,11 +68,11 @@ function noneAdmitted(record: StudyRecord): string[] {
 }
 
 /** How well the chosen model follows the data: "It accounts for …, typically missing by 24 L." */
-export function fitSentence(lexicon: Lexicon, candidate: RecordCandidate, candidates: number): string {
+export function fitSentence(lexicon: Lexicon, candidate: RecordCandidate, looked: ModelsLookedAt): string {
   const from =
-    candidates === 1
+    looked.count === 1
       ? `The one candidate, ${candidate.name},`
-      : `${candidate.name}, chosen of ${counted(candidates, 'candidate', 'candidates', count)},`;
+      : `${candidate.name}, chosen of ${modelsPhrase(looked)},`;
   if (candidate.r_squared === null) return `${from} has no defined R².`;
   const adjusted =
     candidate.adjusted_r_squared === null ? '' : ` (adjusted R² ${share(candidate.adjusted_r_squared)})`;

@@ -2,7 +2,10 @@ import { count, percent } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import { missedSentences } from './acceptance.ts';
 import { type Lexicon, raised, stopped } from './lexicon.ts';
+import { modelsLookedAt, modelsPhrase } from './models.ts';
 import { fittedUnit } from './scale.ts';
+import { stabilitySentences, unsettled } from './stability.ts';
+import { intervalsTooShort } from './unseen.ts';
 
 /** At least this many lines stand on the first screen, and at most that many. */
 const FEWEST = 3;
@@ -18,6 +21,7 @@ export function bewareLines(record: StudyRecord, lexicon: Lexicon): string[] {
   const found = toKnow(record);
   const lines = [
     ...missedSentences(record.acceptance, fittedUnit(lexicon.response)),
+    ...choiceLines(record),
     ...found.filter(({ weight }) => weight >= GRAVE).map(({ text }) => text),
     ...record.warnings.map((w) => raised(stopped(w.text))),
     ...found.filter(({ weight }) => weight < GRAVE).map(({ text }) => text),
@@ -55,6 +59,21 @@ function toKnow({ examination }: StudyRecord): readonly { readonly text: string;
   );
 }
 
+/** What rows not seen, and rows drawn anew, say against relying on the choice. */
+function choiceLines({ selection }: StudyRecord): string[] {
+  const { stability, hold_out: held, chosen } = selection;
+  return [
+    ...(held !== undefined && intervalsTooShort(held)
+      ? [
+          `Of the rows set aside, only ${count(held.inside ?? 0)} of ${count(held.with_interval ?? 0)} lie inside their ${percent(held.interval)} intervals: the intervals are too short.`,
+        ]
+      : []),
+    ...(stability !== undefined && unsettled(stability, chosen)
+      ? [`${stabilitySentences(stability, chosen)[0]!} The choice is not settled by these rows.`]
+      : []),
+  ];
+}
+
 function lossLine(record: StudyRecord): string[] {
   const { rows_read: read, rows_used: used } = record.data;
   const lost = read - used;
@@ -64,7 +83,6 @@ function lossLine(record: StudyRecord): string[] {
 }
 
 function standingLines(record: StudyRecord): string[] {
-  const n = record.candidates.length;
   if (record.model === null) {
     return [
       'No model was chosen, so nothing here should be used as a prediction.',
@@ -74,9 +92,18 @@ function standingLines(record: StudyRecord): string[] {
   }
   return [
     'The terms go with the response in these rows; that does not show that changing one would change the response.',
-    n > 1
-      ? `The model was chosen among ${count(n)} on these same rows, so its intervals and p-values look somewhat surer than they are.`
-      : 'The model was judged on the same rows that it was fitted on; new rows may follow it less closely.',
+    choiceCaution(record),
     'The model speaks for conditions like those in the data and for no others.',
   ];
+}
+
+/** What the choice does to the figures of what was chosen. */
+function choiceCaution(record: StudyRecord): string {
+  if (record.selection.split_sample !== undefined)
+    return 'The model was chosen on one part of the rows and estimated on the other, so its intervals and p-values owe nothing to the choice.';
+  const looked = modelsLookedAt(record);
+  if (looked.count < 2)
+    return 'The model was judged on the same rows that it was fitted on; new rows may follow it less closely.';
+  const among = looked.searched ? modelsPhrase(looked) : count(looked.count);
+  return `The model was chosen among ${among} on these same rows, so its intervals and p-values look somewhat surer than they are.`;
 }

@@ -1,6 +1,6 @@
-import { count } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
-import { stopped } from './lexicon.ts';
+import { raised, stopped } from './lexicon.ts';
+import { modelsLookedAt, modelsPhrase } from './models.ts';
 
 /** A caution with a short heading. */
 export interface Caution {
@@ -10,7 +10,8 @@ export interface Caution {
 
 /** What to be careful about, whatever was found; the analyst's own caution first. */
 export function cautions(record: StudyRecord): Caution[] {
-  const n = record.candidates.length;
+  const looked = modelsLookedAt(record);
+  const split = record.selection.split_sample !== undefined;
   const own = record.study.caution;
   return [
     ...(own === null || own.trim() === '' ? [] : [{ heading: 'From the study', text: stopped(own) }]),
@@ -21,9 +22,11 @@ export function cautions(record: StudyRecord): Caution[] {
     {
       heading: 'Selection',
       text:
-        n > 1
-          ? `${count(n)} candidates were fitted to the same rows and one was picked. P-values and intervals are worked out as if it had been the only one, so they are somewhat too favourable; the more candidates were tried, the more so. Models tried before this study was declared are not counted here.`
-          : 'One candidate was declared and fitted, so nothing was selected by this run. Models tried before this study was declared are not counted here.',
+        looked.count > 1 && split
+          ? `${raised(modelsPhrase(looked))} were looked at on one part of the rows, and the one picked was estimated on the other, so its p-values and intervals owe nothing to the choice. The choice itself may still be a poor one, and models tried before this study was declared are not counted here.`
+          : looked.count > 1
+            ? `${raised(modelsPhrase(looked))} were fitted to the same rows and one was picked. P-values and intervals are worked out as if it had been the only one, so they are somewhat too favourable; the more candidates were tried, the more so. Models tried before this study was declared are not counted here.`
+            : 'One candidate was declared and fitted, so nothing was selected by this run. Models tried before this study was declared are not counted here.',
     },
     {
       heading: 'Extrapolation',

@@ -44,9 +44,20 @@ export function criterionName(rankBy: StudyRecord['selection']['rank_by']): stri
 }
 
 /** The declared rule in words. */
-export function ruleSentences(selection: StudyRecord['selection'], candidates: number): string[] {
+export function ruleSentences({
+  selection,
+  candidates,
+  families = [],
+}: Pick<StudyRecord, 'selection' | 'candidates' | 'families'>): string[] {
   const criterion = CRITERIA[selection.rank_by];
-  const first = `${counted(candidates, 'candidate', 'candidates', count)} ${candidates === 1 ? 'was' : 'were'} declared, all fitted on the same rows.`;
+  const n = candidates.length;
+  const all = `${counted(n, 'candidate', 'candidates', count)} ${n === 1 ? 'was' : 'were'}`;
+  const searches = counted(families.length, 'family', 'families', count);
+  const found = new Set(families.flatMap((family) => family.candidates)).size;
+  const first =
+    families.length === 0
+      ? `${all} declared, all fitted on the same rows.`
+      : `${all} fitted on the same rows, ${found === n ? 'all' : count(found)} of them found by searching ${searches}.`;
   if (selection.rank_by === 'partial_f') {
     return [
       first,
