@@ -1,4 +1,4 @@
-import { DEPENDENT } from './fit-candidate.ts';
+import { DEPENDENT_IN_DOUBLES } from './fit-candidate.ts';
 
 /** Arrays that are used again from solve to solve, and what the last one found. Everything is in the rows' scaled units. */
 export interface SolveScratch {
@@ -70,7 +70,7 @@ export function solveColumns(
     const alpha = pivot < last ? work[pivot]! : 0;
     const left = alpha * alpha + below;
     pivots[j] = rank;
-    if (left <= DEPENDENT * DEPENDENT * (above + left)) {
+    if (left <= DEPENDENT_IN_DOUBLES ** 2 * (above + left)) {
       kept[j] = 0;
       continue;
     }

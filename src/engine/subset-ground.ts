@@ -1,5 +1,5 @@
 import type { Factor } from './factor.ts';
-import { DEPENDENT } from './fit-candidate.ts';
+import { dependentShare } from './fit-candidate.ts';
 import { columnNorm, eliminate, type Matrix, matrix } from './kernel.ts';
 import type { SubsetGroup, SubsetSearch } from './subset-search.ts';
 import { type OpenTriangle, openColumns } from './subset-triangle.ts';
@@ -103,7 +103,10 @@ function independent(
   const kept: number[] = [];
   let rank = 0;
   all.forEach((column, j) => {
-    if (columnNorm(work, j, rank, height) <= DEPENDENT * columnNorm(factor.triangle, column, 0, column + 1))
+    if (
+      columnNorm(work, j, rank, height) <=
+      dependentShare(work) * columnNorm(factor.triangle, column, 0, column + 1)
+    )
       return;
     eliminate(work, j, rank, height, all.length);
     rank++;

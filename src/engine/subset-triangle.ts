@@ -1,4 +1,4 @@
-import { DEPENDENT } from './fit-candidate.ts';
+import { DEPENDENT, dependentShare } from './fit-candidate.ts';
 import { columnNorm, eliminate, type Matrix, matrix } from './kernel.ts';
 
 /** Columns of all groups, one after the other: of group g from starts[g] on, starts[g + 1] excluded. */
@@ -73,7 +73,7 @@ export function openColumns(
     const j = first + c;
     const row = first + rank;
     // A dependent column gets a row of zeros, so that what comes later stands in rows of its own.
-    if (columnNorm(work, j, Math.min(row, height), height) <= DEPENDENT * length) return -1;
+    if (columnNorm(work, j, Math.min(row, height), height) <= dependentShare(work) * length) return -1;
     eliminate(work, j, row, height, y + 1);
     rank++;
     return row;

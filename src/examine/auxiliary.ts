@@ -1,5 +1,5 @@
 import { EXTENDED_BUDGET, type Factor, factorExtended, factorRows } from '../engine/factor.ts';
-import { DEPENDENT } from '../engine/fit-candidate.ts';
+import { dependentShare } from '../engine/fit-candidate.ts';
 import { columnNorm, eliminate, matrix } from '../engine/kernel.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 
@@ -74,7 +74,7 @@ export function regress(factor: Factor, columns: readonly number[], response = 0
   let rank = 0;
   columns.forEach((column, j) => {
     const end = column + 1;
-    if (columnNorm(work, j, rank, end) <= DEPENDENT * columnNorm(work, j, 0, end)) return;
+    if (columnNorm(work, j, rank, end) <= dependentShare(work) * columnNorm(work, j, 0, end)) return;
     eliminate(work, j, rank, end, order.length);
     rank++;
   });

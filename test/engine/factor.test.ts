@@ -358,3 +358,17 @@ describe('dependent columns', () => {
     expect(one!.span[0]).toBe(0b0011);
   });
 });
+
+test('in doubles, rounding that a near dependency has magnified does not count as a direction', () => {
+  // The difference of two columns that are large and alike: what rounding leaves of it is 5e-12 of its length.
+  const a = Array.from({ length: 400 }, (_, i) => 1000 + ((i * 7919) % 401) / 400);
+  const b = a.map((v, i) => v + 0.1 * Math.sin(i * 1.7));
+  const difference = a.map((v, i) => b[i]! - v);
+  const y = a.map((v, i) => v + ((i * 13) % 17));
+  const model = testModel({ y, a, b, difference }, ['a', 'b', 'difference'].map(variable), [[0, 1, 2, 3]]);
+  for (const make of [factorRows, factorExtended]) {
+    expect(fitOne(make(model.rows), model).dropped.map((one) => one.sentence)).toEqual([
+      'difference equals b − a in these rows',
+    ]);
+  }
+});
