@@ -5,7 +5,12 @@ import { readFileSync } from 'node:fs';
  * both in the sources and in the built files, where all modules are bundled into few.
  */
 export function packageFile(name: string): string {
-  return readFileSync(new URL(`../${name}`, import.meta.url), 'utf8');
+  return readFileSync(packageUrl(name), 'utf8');
+}
+
+/** Where a file of the package itself lies. */
+export function packageUrl(name: string): URL {
+  return new URL(`../${name}`, import.meta.url);
 }
 
 /** The version in package.json. */

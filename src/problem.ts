@@ -90,6 +90,8 @@ export const PROBLEM_CODES = [
   'nothing_left',
   'hold_out_nothing',
   'split_too_small',
+  'repeat_level_missing',
+  'repeat_level_unknown',
   'weight_negative',
   // model/ and engine/
   'category_one_level',
@@ -128,6 +130,7 @@ export const PROBLEM_CODES = [
   'predictions_none',
   'draft_impossible',
   'study_not_found',
+  'run_failed',
   'template_unreadable',
   'template_broken',
   'output_unwritable',

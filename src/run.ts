@@ -14,18 +14,20 @@ import { buildDesign } from './model/build-design.ts';
 import type { Design } from './model/design.ts';
 import { type DesignRows, designRows, numbersOf } from './model/design-rows.ts';
 import { toScale } from './model/response-scale.ts';
+import { wholeNumber } from './numerals.ts';
 import { type AveragedPrediction, averagePredictions } from './predict/average-predictions.ts';
 import { bootstrapPredictions } from './predict/bootstrap-predictions.ts';
 import { tryHoldOut } from './predict/hold-out.ts';
 import { type Predicted, type PredictionRows, predict, smearingResiduals } from './predict/predict.ts';
 import { fileRows, statedRows } from './predict/prediction-rows.ts';
 import { prepareSample } from './prepare/prepare-sample.ts';
+import { type LevelRows, rowsByLevel, tableOfRows } from './prepare/rows-of-level.ts';
 import type { Sample } from './prepare/sample.ts';
 import { splitSample } from './prepare/set-aside.ts';
 import { type Spread, spreadsOf } from './prepare/spread.ts';
 import { subSample } from './prepare/sub-sample.ts';
 import type { Problem, Report } from './problem.ts';
-import { buildRecord } from './record/build-record.ts';
+import { buildRecord, type Run } from './record/build-record.ts';
 import type { Bootstrapped } from './record/describe-bootstrap.ts';
 import type { SelectionFindings } from './record/describe-selection.ts';
 import { type KeptSample, keepSample } from './record/keep-sample.ts';
@@ -46,6 +48,8 @@ import type { Study } from './study/study.ts';
 export interface RunOptions {
   /** Values for the study's parameters, by name, as text; the defaults where left out. */
   readonly parameters?: ReadonlyMap<string, string>;
+  /** For a study that repeats for a variable: the level whose rows are run. */
+  readonly level?: string;
   /** Told of long work: the stage in words, how much is done, and of how much where that is known. */
   readonly onProgress?: (stage: string, done: number, total: number | null) => void;
 }
@@ -72,22 +76,131 @@ export interface RunResult {
   readonly kept: KeptSample | null;
 }
 
-/** Reads and checks a study and its data, down to the rows that would be fitted, and fits nothing. */
-export async function checkStudy(path: string, options: RunOptions = {}): Promise<CheckedStudy> {
+/** A study with its data, read once for all that is done with it. */
+export interface ReadStudy {
+  readonly study: Study | null;
+  /** Null where it cannot be used. */
+  readonly table: Table | null;
+  /** False where the study itself kept its data from being looked at. */
+  readonly dataRead: boolean;
+  readonly problems: readonly Problem[];
+  /** The rows of each level that the study repeats for; null where it does not repeat, or nothing was read. */
+  readonly levels: readonly LevelRows[] | null;
+}
+
+/** Reads and checks a study and its data's contract. */
+export async function readStudyAndData(path: string, options: RunOptions = {}): Promise<ReadStudy> {
   const problems: Problem[] = [];
   const report: Report = (problem) => problems.push(problem);
   const study = await readStudy(path, report, options.parameters);
   if (study === null || hasError(problems)) {
-    return { study, table: null, sample: null, dataRead: false, problems };
+    return { study, table: null, dataRead: false, problems, levels: null };
   }
+  const repeatFor = study.repeatFor ?? null;
   const table = await readTable(study.data, study.folder, report, {
     onProgress: (rows) => options.onProgress?.('reading rows', rows, null),
+    // Each level lists and counts its own, which a list cut short does not tell.
+    ...(repeatFor === null || study.data.onBadValue === 'stop' ? {} : { limit: Number.POSITIVE_INFINITY }),
   });
   checkFindingNames(study, report);
-  if (table === null) return { study, table, sample: null, dataRead: true, problems };
-  const sample = prepareSample(study, table, report);
-  if (sample !== null) checkStandardErrors(study, sample, report);
-  return { study, table, sample, dataRead: true, problems };
+  const column = repeatFor === null ? undefined : table?.columns.get(repeatFor);
+  const levels = column === undefined ? null : rowsByLevel(column);
+  if (table !== null && levels !== null) reportWithoutLevel(study, table, levels, report);
+  return { study, table, dataRead: true, problems, levels };
+}
+
+/** Rows that belong to no run, and that there is any run at all. */
+function reportWithoutLevel(study: Study, table: Table, levels: readonly LevelRows[], report: Report): void {
+  const without = levels.reduce((left, { rows }) => left - rows.length, table.rowCount);
+  if (without === 0) return;
+  const none = levels.length === 0;
+  report({
+    code: 'repeat_level_missing',
+    severity: none ? 'error' : 'warning',
+    place: { kind: 'cell', file: table.file, variable: study.repeatFor! },
+    message: none
+      ? `No row has a value of ${study.repeatFor}, which the study repeats for.`
+      : `${wholeNumber(without)} ${without === 1 ? 'row has' : 'rows have'} no value of ${study.repeatFor}, which the study repeats for, and ${without === 1 ? 'belongs' : 'belong'} to no run.`,
+  });
+}
+
+/** What one run works on: a study with all rows, or with those of one level. */
+interface RunRows {
+  readonly study: Study;
+  readonly table: Table;
+  readonly repeat: Run['repeat'];
+}
+
+/** The study and the rows of one run; null, with the reason reported, where the level is not there. */
+function oneRun(
+  { study, table, levels }: ReadStudy,
+  level: string | undefined,
+  report: Report,
+): RunRows | null {
+  if (study === null || table === null) return null;
+  const variable = study.repeatFor ?? null;
+  if (variable === null && level === undefined) return { study, table, repeat: null };
+  const found = levels?.find((each) => each.level === level);
+  if (variable === null || level === undefined || found === undefined) {
+    report({
+      code: 'repeat_level_unknown',
+      severity: 'error',
+      place: { kind: 'file', file: study.file },
+      message:
+        variable === null
+          ? `The study does not repeat, so it has no run for "${level}".`
+          : level === undefined
+            ? `The study repeats for ${variable}, and no level was named.`
+            : `No row has "${level}" as its ${variable}, which the study repeats for.`,
+    });
+    return null;
+  }
+  const rows = tableOfRows(study.data, table, found.rows, report);
+  if (rows === null) return null;
+  const label = study.data.variables.find(({ name }) => name === variable)?.label ?? variable;
+  return {
+    study: { ...study, title: `${study.title}: ${label} ${level}` },
+    table: rows,
+    repeat: { variable, level },
+  };
+}
+
+/** Reads and checks a study and its data, down to the rows that would be fitted, and fits nothing. */
+export async function checkStudy(path: string, options: RunOptions = {}): Promise<CheckedStudy> {
+  const read = await readStudyAndData(path, options);
+  const { study, table, dataRead } = read;
+  const problems = [...read.problems];
+  if (study === null || table === null) return { study, table, sample: null, dataRead, problems };
+  if (read.levels !== null && options.level === undefined) {
+    // Each run has its own rows: all are checked, and none of them stands for the study.
+    for (const { level } of read.levels) problems.push(...ofLevel(level, sampleOf(read, level).problems));
+    return { study, table, sample: null, dataRead, problems };
+  }
+  const made = sampleOf(read, options.level);
+  return {
+    study: made.ground?.study ?? study,
+    table: made.ground?.table ?? table,
+    sample: made.sample,
+    dataRead,
+    problems: [...problems, ...made.problems],
+  };
+}
+
+/** Problems of one of many runs, each saying whose it is. */
+export function ofLevel(level: string, problems: readonly Problem[]): Problem[] {
+  return problems.map((problem) => ({ ...problem, message: `${level}: ${problem.message}` }));
+}
+
+function sampleOf(
+  read: ReadStudy,
+  level: string | undefined,
+): { readonly ground: RunRows | null; readonly sample: Sample | null; readonly problems: Problem[] } {
+  const problems: Problem[] = [];
+  const report: Report = (problem) => problems.push(problem);
+  const ground = oneRun(read, level, report);
+  const sample = ground === null ? null : prepareSample(ground.study, ground.table, report);
+  if (ground !== null && sample !== null) checkStandardErrors(ground.study, sample, report);
+  return { ground, sample, problems };
 }
 
 /**
@@ -98,11 +211,19 @@ export async function checkStudy(path: string, options: RunOptions = {}): Promis
  * Every candidate is fitted on the same rows; where an error is found the stages after it are left out.
  */
 export async function runStudy(path: string, options: RunOptions = {}): Promise<RunResult> {
-  const { study, table, sample, dataRead, problems: found } = await checkStudy(path, options);
-  const problems = [...found];
+  return runRead(await readStudyAndData(path, options), options);
+}
+
+/** The stages after reading; of a study that repeats, for the rows of one level. */
+export async function runRead(read: ReadStudy, options: RunOptions = {}): Promise<RunResult> {
+  const { dataRead } = read;
+  const problems = [...read.problems];
   const report: Report = (problem) => problems.push(problem);
   const stopped: () => RunResult = () => ({ record: null, dataRead, problems, residuals: null, kept: null });
-  if (study === null || table === null || sample === null || hasError(problems)) return stopped();
+  const { ground, sample, problems: found } = sampleOf(read, options.level);
+  problems.push(...found);
+  if (ground === null || sample === null || hasError(problems)) return stopped();
+  const { study, table, repeat } = ground;
 
   const declared = buildDesign(study, sample, report);
   if (declared === null) return stopped();
@@ -168,6 +289,7 @@ export async function runStudy(path: string, options: RunOptions = {}): Promise<
     study,
     table,
     sample,
+    repeat,
     spreads: split === null ? spreads : spreadsOf(sample),
     design,
     rows,

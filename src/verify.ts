@@ -52,6 +52,7 @@ export async function verifyRecord(path: string, options: VerifyOptions = {}): P
   const given = (record.study.parameters ?? []).filter((parameter) => parameter.given);
   const again = await runStudy(study, {
     parameters: new Map(given.map(({ name, value }) => [name, String(value)])),
+    ...(record.data.repeat == null ? {} : { level: record.data.repeat.level }),
     ...(options.onProgress === undefined ? {} : { onProgress: options.onProgress }),
   });
   if (again.record === null) {

@@ -5,7 +5,7 @@ import type { StudyOptions } from './common-options.ts';
 import type { CompareCommandOptions } from './compare.ts';
 import type { DraftCommandOptions } from './draft.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
-import type { FitCommandOptions } from './fit.ts';
+import type { FitCommandOptions } from './fit-options.ts';
 import type { PredictCommandOptions } from './predict.ts';
 import type { RenderCommandOptions } from './render.ts';
 import { showProblems } from './show-problems.ts';
@@ -88,16 +88,16 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
   program
     .command('fit')
     .description('run the whole study and write its record, reports and tables')
-    .argument('<study>', 'the study file')
+    .argument('<study...>', 'the study file; several, or folders of studies, are run one by one')
     .option('--out <folder>', 'where to write (default: results/ and the name of the study)')
     .option('--against <earlier>', 'an earlier record, or the folder of its results, to compare with')
     .addOption(given())
     .option('--junit <file>', 'write the acceptance criteria as tests for continuous integration (JUnit XML)')
     .addOption(quiet())
     .addOption(problems())
-    .action(async (study: string, options: FitCommandOptions) => {
+    .action(async (studies: string[], options: FitCommandOptions) => {
       const { fitCommand } = await import('./fit.ts');
-      ended(await fitCommand(study, options, terminal));
+      ended(await fitCommand(studies, options, terminal));
     });
 
   program

@@ -6,7 +6,7 @@ import type { StudyRecord } from '../record/record.ts';
 import { recordText } from '../record/record-text.ts';
 import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
 import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
-import { type RunOptions, type RunResult, runStudy } from '../run.ts';
+import { type ReadStudy, type RunOptions, type RunResult, runRead } from '../run.ts';
 import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
 import { reportFiles, templatesOf } from './report-files.ts';
@@ -37,11 +37,19 @@ export interface Written {
   readonly names: readonly string[];
 }
 
-/** Runs one study, down to record, reports and tables in the output folder. */
-export async function fitOne(path: string, out: string, options: FitOptions): Promise<FittedStudy> {
+/**
+ * Runs a study that is read already, down to record, reports and tables in the output folder; of one that repeats, for
+ * the level that the options name.
+ */
+export async function fitRead(
+  path: string,
+  read: ReadStudy,
+  out: string,
+  options: FitOptions,
+): Promise<FittedStudy> {
   const problems: Problem[] = [];
   const report = (problem: Problem) => problems.push(problem);
-  const result = await runStudy(path, options);
+  const result = await runRead(read, options);
   problems.push(...result.problems);
   const { dataRead } = result;
   if (result.record === null || hasError(problems)) {
@@ -72,10 +80,15 @@ export function statusOf({ written, comparison }: FittedStudy): number {
   return written.record.selection.chosen !== null && accepted ? DONE : NOT_ACCEPTED;
 }
 
-/** results/ and the study's name: its file's, or its folder's where the file is called study.yaml. */
+/** results/ and the study's name. */
 export function defaultFolder(path: string): string {
+  return join('results', studyName(path));
+}
+
+/** The name of a study: its file's, or its folder's where the file is called study.yaml. */
+export function studyName(path: string): string {
   const name = basename(path).replace(/(?:\.study)?\.ya?ml$/i, '');
-  return join('results', name === 'study' ? basename(dirname(resolve(path))) || name : name);
+  return name === 'study' ? basename(dirname(resolve(path))) || name : name;
 }
 
 async function compareWith(

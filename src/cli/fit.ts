@@ -2,36 +2,34 @@ import { join, relative, resolve } from 'node:path';
 import type { ComparedSide } from '../compare/compare.ts';
 import type { Problem, Report } from '../problem.ts';
 import { junitText } from '../report/junit.ts';
-import type { StudyOptions } from './common-options.ts';
+import { readStudyAndData } from '../run.ts';
 import { UNUSABLE } from './exit-status.ts';
-import { defaultFolder, type FittedStudy, fitOne, statusOf } from './fit-one.ts';
+import { defaultFolder, type FittedStudy, fitRead, statusOf } from './fit-one.ts';
+import type { FitCommandOptions } from './fit-options.ts';
 import { givenParameters } from './given-parameters.ts';
 import { hasError } from './has-error.ts';
+import { isFolderOfStudies } from './is-folder.ts';
 import { progressOn } from './progress.ts';
+import { refusedForMany } from './refused-for-many.ts';
 import { showDataNotRead, showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import { summary } from './summary.ts';
 import type { Terminal } from './terminal.ts';
 import { writeText } from './write-text.ts';
 
-export interface FitCommandOptions extends StudyOptions {
-  readonly out?: string;
-  /** An earlier record, or the folder of its results, to compare with. */
-  readonly against?: string;
-  /** Where the acceptance criteria go as JUnit XML. */
-  readonly junit?: string;
-}
-
 /**
- * `plumbrule fit STUDY`: the whole study, down to record, reports and tables in the output folder; with an earlier
+ * `plumbrule fit STUDY …`: the whole study, down to record, reports and tables in the output folder; with an earlier
  * record also what is different from it, written together with the rest.
  */
 export async function fitCommand(
-  path: string,
+  paths: readonly string[],
   options: FitCommandOptions,
   terminal: Terminal,
 ): Promise<number> {
   const before: Problem[] = [];
+  const path = paths[0]!;
+  const several = paths.length > 1 || (await isFolderOfStudies(path));
+  if (several) before.push(...refusedForMany(options));
   const parameters = givenParameters(options.with ?? [], (problem) => before.push(problem));
   // The earlier record may lie where the new one is going to be written.
   const earlier =
@@ -43,11 +41,21 @@ export async function fitCommand(
     return UNUSABLE;
   }
   const progress = progressOn(terminal, options.quiet === true);
+  const setting = { parameters, progress, terminal, options };
   let fitted: FittedStudy;
   const late: Problem[] = [];
   try {
+    if (several) return await (await import('./fit-several.ts')).fitSeveral(paths, setting);
+    const read = await readStudyAndData(path, { onProgress: progress.show, parameters });
+    if (read.levels !== null) {
+      before.push(...refusedForMany(options));
+      if (!hasError(before)) return await (await import('./fit-several.ts')).fitRepeated(path, read, setting);
+      progress.clear();
+      await showProblems(before, new Map(), options.problems, terminal);
+      return UNUSABLE;
+    }
     const out = options.out ?? defaultFolder(path);
-    fitted = await fitOne(path, out, { onProgress: progress.show, parameters, earlier });
+    fitted = await fitRead(path, read, out, { onProgress: progress.show, parameters, earlier });
     if (options.junit !== undefined) {
       const { written, problems, comparison } = fitted;
       const run = { study: path, record: written?.record ?? null, problems, comparison };

@@ -85,7 +85,11 @@ export function finishColumn(plan: DataPlan, filling: Filling, rowCount: number)
 }
 
 /** A declared baseline must be among the levels that were found; says whether it is. */
-export function checkBaseline(plan: DataPlan, { variable, column }: Filled, report: Report): boolean {
+export function checkBaseline(
+  plan: DataPlan,
+  { variable, column }: Pick<Filled, 'variable' | 'column'>,
+  report: Report,
+): boolean {
   if (column.kind !== 'category' || variable.baseline === null || variable.levels !== null) return true;
   if (column.levels.length === 0 || column.levels.includes(variable.baseline)) return true;
   const near = nearest(variable.baseline, column.levels);

@@ -44,6 +44,8 @@ export interface Run {
   readonly study: Study;
   readonly table: Table;
   readonly sample: Sample;
+  /** The level whose rows these are, where the study repeats for a variable. */
+  readonly repeat: { readonly variable: string; readonly level: string } | null;
   readonly spreads: ReadonlyMap<string, Spread>;
   readonly design: Design;
   readonly rows: DesignRows;
@@ -110,6 +112,7 @@ export function buildRecord(run: Run): StudyRecord {
       sha256: table.sha256,
       delimiter: table.format.delimiter,
       encoding: table.format.encoding,
+      ...(run.repeat === null ? {} : { repeat: { ...run.repeat } }),
       rows_read: table.rowCount,
       rows_used: sample.rowCount,
       left_out: sample.losses.map((loss) => ({

@@ -139,7 +139,20 @@ export interface StudyRecord {
      */
     encoding: 'utf-8' | 'latin-1';
     /**
-     * Rows in the file, the header not counted.
+     * The level whose rows this run has, where the study repeats for a variable; absent or null otherwise.
+     */
+    repeat?: {
+      /**
+       * The variable.
+       */
+      variable: string;
+      /**
+       * Its level, as text.
+       */
+      level: string;
+    } | null;
+    /**
+     * Rows in the file, the header not counted; those of the level where the study repeats.
      */
     rows_read: number;
     /**

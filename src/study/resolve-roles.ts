@@ -58,3 +58,26 @@ export function resolveRowRoles(
   }
   return { rowId, time };
 }
+
+/** What a study repeats for is declared, has levels, and is no part of any model: within a level it is constant. */
+export function resolveRepeat(reading: Reading, names: Names, inModels: ReadonlySet<string>): string | null {
+  const name = reading.file.repeat_for;
+  if (name === undefined) return null;
+  const path = ['repeat_for'];
+  const purpose = 'a study repeats for a category, a text, an identifier or an integer';
+  const suited = ['category', 'text', 'identifier', 'integer'] as const;
+  const named = lookUpOfType(reading, names, name, path, suited, purpose);
+  if (named === null) return null;
+  if (named.derived) {
+    fault(
+      reading,
+      'type_unsuited',
+      path,
+      `repeat_for names ${name}, which is derived; ${purpose} in the data.`,
+    );
+  } else if (inModels.has(name)) {
+    const message = `repeat_for names ${name}, which a candidate or the response uses; within one of its levels it is constant.`;
+    fault(reading, 'rules_contradict', path, message, 'Take it out of the candidates, or do not repeat.');
+  }
+  return name;
+}

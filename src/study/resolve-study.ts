@@ -12,7 +12,7 @@ import { resolveExamination } from './resolve-examination.ts';
 import { checkText, parseText, untypedUses } from './resolve-expression.ts';
 import { resolveInference } from './resolve-inference.ts';
 import { resolvePredict } from './resolve-predict.ts';
-import { resolveResponse, resolveRowRoles, resolveWeights } from './resolve-roles.ts';
+import { resolveRepeat, resolveResponse, resolveRowRoles, resolveWeights } from './resolve-roles.ts';
 import { resolveSelection } from './resolve-selection.ts';
 import { termVariables } from './resolve-terms.ts';
 import { dataMissing, resolveVariables } from './resolve-variables.ts';
@@ -58,6 +58,8 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
   const acceptance = resolveAcceptance(reading, { candidates: named, families, names, time: roles.time });
   const examination = resolveExamination(reading, names);
   const rests = new Set(inTerms.flatMap((name) => [...derivedFrom(name)]));
+  const inModels = response === null ? rests : new Set([...rests, ...derivedFrom(response.variable)]);
+  const repeatFor = resolveRepeat(reading, names, inModels);
   const inference = resolveInference(reading, names, roles.time, inTerms);
   const predict = resolvePredict(reading, {
     variables,
@@ -91,6 +93,7 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
     leaveOut: leaveOut.map((rule) => rule.plan),
     response,
     weights,
+    repeatFor,
     candidates,
     families,
     selection,

@@ -119,6 +119,10 @@ export interface StudyFile {
    */
   weights?: string | null;
   /**
+   * A declared variable for each of whose levels the study runs once, on the rows of that level alone: a category, a text, an identifier or an integer that no term uses. The data is read once. Left out: the study runs once, on all rows.
+   */
+  repeat_for?: string;
+  /**
    * The models to be tried, each named or found by a search of a family. All are fitted on the same rows.
    *
    * @minItems 1

@@ -20,6 +20,8 @@ export interface Study {
   readonly response: ResponsePlan;
   /** Name of the variable of weights, or null. */
   readonly weights: string | null;
+  /** The variable for each of whose levels the study runs once; null or left out: it runs once, on all rows. */
+  readonly repeatFor?: string | null;
   /** The named candidates, in order. */
   readonly candidates: readonly CandidatePlan[];
   /** Families of candidates that a search is to find, in order. */

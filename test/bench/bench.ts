@@ -1,4 +1,4 @@
-/** Timings, printed and held to nothing: npm run bench [factor] [validation] [compare] [run] */
+/** Timings, printed and held to nothing: npm run bench [factor] [validation] [compare] [run] [repeats] */
 const wanted = process.argv.slice(2);
 const asked = (name: string) => wanted.length === 0 || wanted.includes(name);
 
@@ -18,4 +18,8 @@ if (asked('compare')) {
 if (asked('run')) {
   const { benchWholeRun } = await import('./whole-run.ts');
   benchWholeRun();
+}
+if (asked('repeats')) {
+  const { benchRepeats } = await import('./repeats.ts');
+  benchRepeats();
 }

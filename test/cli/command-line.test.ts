@@ -66,7 +66,7 @@ describe('the command line', () => {
     [['fti', 'x'], "Unknown command 'fti'. Did you mean fit?"],
     [['fit'], "Missing required argument 'study'. See plumbrule fit --help."],
     [['fit', 'a', '--oot', 'b'], "Unknown option '--oot'. Did you mean --out?"],
-    [['fit', 'a', 'b'], "Too many arguments for 'fit'. Expected 1 argument but got 2"],
+    [['check', 'a', 'b'], "Too many arguments for 'check'. Expected 1 argument but got 2"],
     [['check', 'a', '--problems', 'xml'], "'xml' is invalid. Allowed choices are text, json."],
     [['render', 'a', '--format', 'pdf'], "'pdf' is invalid. Allowed choices are html, markdown."],
     [['--nonsense'], "Unknown option '--nonsense'. See plumbrule --help."],

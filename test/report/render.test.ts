@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import type { Problem } from '../../src/problem.ts';
 import { escapeMarkdown } from '../../src/report/markdown.ts';
 import { type Rendered, type RenderOptions, render } from '../../src/report/render.ts';
-import { compiledTemplates } from '../../templates/generate.ts';
+import { compiledOverview, compiledTemplates } from '../../templates/generate.ts';
 import { NASTY, sampleRecord, VARIANTS } from './sample-record.ts';
 
 /** Renders and expects no problem. */
@@ -210,5 +210,8 @@ describe('the compiled templates', () => {
     expect(readFileSync(new URL('../../src/report/templates.generated.ts', import.meta.url), 'utf8')).toBe(
       compiledTemplates(),
     );
+    expect(
+      readFileSync(new URL('../../src/report/overview-templates.generated.ts', import.meta.url), 'utf8'),
+    ).toBe(compiledOverview());
   });
 });
