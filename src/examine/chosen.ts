@@ -114,10 +114,16 @@ export function covarianceRatio(chosen: Chosen, row: number): number | null {
 
 /** How a row is named to a person: its identity where the study declares one, else its line in the file. */
 export function rowName(sample: Sample, row: number): string {
-  return sample.ids?.[row] ?? `line ${sample.lines[row]}`;
+  const id = sample.ids?.[row];
+  if (id === undefined) return `line ${sample.lines[row]}`;
+  // A bare number would read as a count.
+  return /^\d+$/.test(id) ? `row ${id}` : id;
 }
 
 /** The same at the start of a sentence; an identity keeps its letters as they are. */
 export function rowNameFirst(sample: Sample, row: number): string {
-  return sample.ids?.[row] ?? `Line ${sample.lines[row]}`;
+  return rowName(sample, row).replace(
+    /^(line|row) (?=\d+$)/,
+    (word) => word[0]!.toUpperCase() + word.slice(1),
+  );
 }
