@@ -3,8 +3,10 @@ import { readTable } from './data/read-table.ts';
 import type { Column, Table } from './data/table.ts';
 import { nearest } from './expression/nearest.ts';
 import { type Prediction, type PredictionTotal, predictRows } from './predict/predict.ts';
+import { emptyFigures, predictionAt } from './predict/predicted-columns.ts';
 import { rowsOfTable, usableRows } from './predict/prediction-rows.ts';
 import type { Problem, Report } from './problem.ts';
+import type { PredictedRowColumns } from './record/predicted-rows.ts';
 import { readRecord } from './record/read-record.ts';
 import type { StudyRecord } from './record/record.ts';
 import { type RecordedPredictor, recordedPredictor } from './record/recorded-predictor.ts';
@@ -52,6 +54,11 @@ export interface RecordPredictions {
 /** Rows that cannot be predicted are named one by one up to this many. */
 const MOST_NAMED = 20;
 
+/** As `RecordPredictions`, in columns: what a table of many rows is written from. */
+export interface RecordPredictionColumns extends Omit<RecordPredictions, 'rows'> {
+  readonly rows: PredictedRowColumns & { readonly lines: Uint32Array };
+}
+
 /**
  * Predictions at the rows of a file from a record alone: record ─ predictor ─ rows ─ predictions. Rows are read
  * under the contract of the study; one with a value missing or not allowed, or a level that no row fitted has, is
@@ -62,9 +69,49 @@ export async function predictFromRecord(
   rowsPath: string,
   options: PredictRecordOptions = {},
 ): Promise<RecordPredictions> {
+  const found = await predictColumnsFromRecord(recordPath, rowsPath, options);
+  return { ...found, rows: outcomesOf(found.rows) };
+}
+
+/** Row by row. */
+export function outcomesOf({
+  labels,
+  lines,
+  at,
+  because,
+  predicted,
+}: RecordPredictionColumns['rows']): RowOutcome[] {
+  return labels.map((label, row) => ({
+    label,
+    line: lines[row]!,
+    prediction: at[row]! < 0 ? null : predictionAt(predicted, at[row]!, label, []),
+    because: because[row]!,
+  }));
+}
+
+const NO_ROWS: RecordPredictionColumns['rows'] = {
+  labels: [],
+  lines: new Uint32Array(0),
+  at: new Int32Array(0),
+  because: [],
+  predicted: {
+    count: 0,
+    figures: emptyFigures(0),
+    outside: new Map(),
+    source: new Int32Array(0),
+    row: new Int32Array(0),
+  },
+};
+
+/** `predictFromRecord`, with its rows in columns. */
+export async function predictColumnsFromRecord(
+  recordPath: string,
+  rowsPath: string,
+  options: PredictRecordOptions = {},
+): Promise<RecordPredictionColumns> {
   const problems: Problem[] = [];
   const report: Report = (problem) => problems.push(problem);
-  const failed = (): RecordPredictions => ({ record: null, interval: 0, rows: [], totals: [], problems });
+  const failed = () => ({ record: null, interval: 0, rows: NO_ROWS, totals: [], problems });
 
   const record = await readRecord(recordPath, report);
   if (record === null) return failed();
@@ -83,7 +130,7 @@ export async function predictFromRecord(
   const group =
     options.totalBy === undefined ? null : groupsOf(table.columns.get(groupName(recorded, options.totalBy))!);
   const interval = options.interval ?? record.study.prediction_interval;
-  const { predictions, sourceRows, totals } = predictRows(
+  const { predicted, totals } = predictRows(
     predictor,
     [rows],
     {
@@ -95,7 +142,7 @@ export async function predictFromRecord(
     listing.report,
   );
   listing.close();
-  if (predictions.length === 0) {
+  if (predicted.count === 0) {
     const message = 'None of the rows can be predicted.';
     report({
       code: 'predictions_none',
@@ -105,19 +152,15 @@ export async function predictFromRecord(
     });
     return failed();
   }
-  const found = new Array<RowOutcome['prediction']>(table.rowCount).fill(null);
-  predictions.forEach((prediction, k) => {
-    found[kept[sourceRows[k]!]!] = prediction;
+  const at = new Int32Array(table.rowCount).fill(-1);
+  for (let k = 0; k < predicted.count; k++) at[kept[predicted.row[k]!]!] = k;
+  at.forEach((k, row) => {
+    if (k < 0) because[row] ??= 'the model has no answer there';
   });
   return {
     record,
     interval,
-    rows: found.map((prediction, row) => ({
-      label: all.labels[row]!,
-      line: table.lines[row]!,
-      prediction,
-      because: prediction === null ? (because[row] ?? 'the model has no answer there') : null,
-    })),
+    rows: { labels: all.labels, lines: table.lines, at, because, predicted },
     totals: totals.flatMap((total, k) =>
       total === null ? [] : [{ group: k === 0 ? null : group!.names[k - 1]!, ...total }],
     ),

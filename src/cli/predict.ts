@@ -1,4 +1,4 @@
-import { predictFromRecord, type RecordPredictions } from '../predict-record.ts';
+import { outcomesOf, predictColumnsFromRecord, type RecordPredictionColumns } from '../predict-record.ts';
 import type { Problem } from '../problem.ts';
 import { predictedRowsTable, totalsTable } from '../record/predicted-rows.ts';
 import type { CommonOptions } from './common-options.ts';
@@ -38,9 +38,9 @@ export async function predictCommand(
     ]);
   }
   const progress = progressOn(terminal, options.quiet === true);
-  let predicted: RecordPredictions;
+  let predicted: RecordPredictionColumns;
   try {
-    predicted = await predictFromRecord(record, rows === '-' ? 'standard input' : rows, {
+    predicted = await predictColumnsFromRecord(record, rows === '-' ? 'standard input' : rows, {
       onProgress: progress.show,
       ...(interval === undefined ? {} : { interval }),
       ...(options.totalBy === undefined ? {} : { totalBy: options.totalBy }),
@@ -67,7 +67,7 @@ export async function predictCommand(
           ? [totalsTable(totalsAsked(predicted, options), options.totalBy ?? null)]
           : predictedRowsTable(predicted.rows);
     if (options.out === undefined) for (const piece of text) terminal.out(piece);
-    else await writeText(options.out, [...text].join(''), (problem) => problems.push(problem));
+    else await writeText(options.out, text, (problem) => problems.push(problem));
   }
   await showProblems(problems, await sourceTexts(problems), options.problems, terminal);
   return hasError(problems) ? UNUSABLE : DONE;
@@ -78,7 +78,7 @@ export async function predictCommand(
   }
 }
 
-function totalsAsked({ totals }: RecordPredictions, { totalBy }: PredictCommandOptions) {
+function totalsAsked({ totals }: RecordPredictionColumns, { totalBy }: PredictCommandOptions) {
   return totalBy === undefined ? totals.slice(0, 1) : totals;
 }
 
@@ -88,7 +88,7 @@ function intervalOf(text: string): number | null {
 }
 
 /** One row to a line, so that the text can be read and compared by lines. */
-function jsonText({ record, interval, rows, totals }: RecordPredictions, withTotals: boolean): string {
+function jsonText({ record, interval, rows, totals }: RecordPredictionColumns, withTotals: boolean): string {
   const head = {
     format: 'plumbrule-predictions/1',
     record: {
@@ -100,7 +100,7 @@ function jsonText({ record, interval, rows, totals }: RecordPredictions, withTot
     },
     interval,
   };
-  const lines = rows.map(({ label, line, prediction, because }) =>
+  const lines = outcomesOf(rows).map(({ label, line, prediction, because }) =>
     JSON.stringify(
       prediction === null
         ? { label, line, not_predicted: because }

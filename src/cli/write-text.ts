@@ -4,7 +4,11 @@ import { dirname } from 'node:path';
 import type { Report } from '../problem.ts';
 
 /** Writes one file beside the results, whole or not at all; a failure is reported. Says whether it is written. */
-export async function writeText(path: string, content: string, report: Report): Promise<boolean> {
+export async function writeText(
+  path: string,
+  content: string | Iterable<string>,
+  report: Report,
+): Promise<boolean> {
   const beside = `${path}.${randomUUID()}`;
   try {
     await mkdir(dirname(path), { recursive: true });

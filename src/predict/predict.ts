@@ -9,7 +9,10 @@ import type { Place, Report, Severity } from '../problem.ts';
 import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { Scale } from '../study/study.ts';
 import { outsideData } from './outside-data.ts';
+import { emptyFigures, type PredictedColumns, type Prediction, predictionAt } from './predicted-columns.ts';
 import { type Predictor, predictorOf } from './predictor.ts';
+
+export type { Prediction } from './predicted-columns.ts';
 
 /** Rows to be predicted: every variable of the model, declared and derived. */
 export interface PredictionRows {
@@ -21,24 +24,6 @@ export interface PredictionRows {
   readonly placeOf: (row: number) => Place;
   /** How much it matters that a row cannot be predicted. */
   readonly severity: Severity;
-}
-
-/** One prediction, on the response's own scale. */
-export interface Prediction {
-  readonly label: string;
-  readonly values: readonly { variable: string; value: number | string | boolean }[];
-  /** x′b taken back to the response's own scale: its median there. */
-  readonly estimate: number;
-  /** Interval for a new row; both null where the model fits exactly, the upper one where it has no end. */
-  readonly lower: number | null;
-  readonly upper: number | null;
-  /** Interval for the mean (the median where the scale is not natural) at this place; null likewise. */
-  readonly mean_lower: number | null;
-  readonly mean_upper: number | null;
-  /** The mean on the own scale by smearing where the scale is not natural, else null. */
-  readonly mean: number | null;
-  readonly leverage: number;
-  readonly outside: string[];
 }
 
 export interface PredictionTotal {
@@ -68,9 +53,7 @@ export interface PredictRequest {
 }
 
 export interface PredictedRows {
-  readonly predictions: Prediction[];
-  /** By prediction: the row of its source. */
-  readonly sourceRows: readonly number[];
+  readonly predicted: PredictedColumns;
   /** Of all rows predicted, then of each group; all null where the response's scale is not natural or no row is predicted. */
   readonly totals: readonly (PredictionTotal | null)[];
 }
@@ -83,7 +66,12 @@ export function predict(
   report: Report,
 ): Predicted {
   const { interval, total } = chosen.study.predict;
-  const { predictions, totals } = predictRows(predictorOf(chosen, smearing), sources, { interval }, report);
+  const { predicted, totals } = predictRows(predictorOf(chosen, smearing), sources, { interval }, report);
+  const predictions = Array.from({ length: predicted.count }, (_, k) => {
+    const rows = sources[predicted.source[k]!]!;
+    const row = predicted.row[k]!;
+    return predictionAt(predicted, k, rows.labels[row]!, rows.given[row]!);
+  });
   return { predictions, total: total ? totals[0]! : null };
 }
 
@@ -112,13 +100,17 @@ export function predictRows(
     return classical ? leverage : (errorOf(covariance, x) / s) ** 2;
   };
   const sums = Array.from({ length: 1 + (groups?.count ?? 0) }, () => emptySum(p));
-  const sourceRows: number[] = [];
+  const most = sources.reduce((sum, { rowCount }) => sum + rowCount, 0);
+  const figures = emptyFigures(most);
+  const [sourceOf, rowOf] = [new Int32Array(most), new Int32Array(most)];
+  const outside = new Map<number, string[]>();
+  let count = 0;
 
-  const predictions = sources.flatMap((rows, source) => {
+  sources.forEach((rows, source) => {
     const at = rowsOf(predictor.columns, rows);
     const weightOf = weightsAt(predictor.weights, rows);
     const outsideAt = outsideData(predictor, rows.columns, rows.rowCount);
-    return rows.labels.flatMap((label, i): Prediction[] => {
+    for (let i = 0; i < rows.rowCount; i++) {
       const row = at(i);
       const centre = dot(row, estimates);
       const leverage = rootForm(rootInverse, p, row) ** 2;
@@ -126,30 +118,26 @@ export function predictRows(
       const estimate = fromScale(centre, scale);
       if (!(Number.isFinite(centre) && Number.isFinite(leverage) && Number.isFinite(estimate))) {
         unpredictable(predictor, rows, i, centre, leverage, report);
-        return [];
+        continue;
       }
       const share = shareOf(row, leverage);
       addRow(sums[0]!, row, centre, weight);
       if (groups !== undefined) addRow(sums[1 + groups.of[source]![i]!]!, row, centre, weight);
       const [lower, upper] = ends(centre, s, t * Math.sqrt(1 / weight + share), scale);
       const [meanLower, meanUpper] = ends(centre, s, t * Math.sqrt(share), scale);
-      const remote = weight * leverage > largestLeverage * (1 + 1e-9);
-      sourceRows.push(i);
-      return [
-        {
-          label,
-          values: rows.given[i]!,
-          estimate,
-          lower,
-          upper,
-          mean_lower: meanLower,
-          mean_upper: meanUpper,
-          mean: smearing === null ? null : smearedMean(centre, smearing, scale),
-          leverage,
-          outside: outsideAt(i, remote),
-        },
-      ];
-    });
+      const ways = outsideAt(i, weight * leverage > largestLeverage * (1 + 1e-9));
+      if (ways.length > 0) outside.set(count, ways);
+      sourceOf[count] = source;
+      rowOf[count] = i;
+      figures.estimate[count] = estimate;
+      figures.lower[count] = lower ?? Number.NaN;
+      figures.upper[count] = upper ?? Number.NaN;
+      figures.mean_lower[count] = meanLower ?? Number.NaN;
+      figures.mean_upper[count] = meanUpper ?? Number.NaN;
+      figures.mean[count] = (smearing === null ? null : smearedMean(centre, smearing, scale)) ?? Number.NaN;
+      figures.leverage[count] = leverage;
+      count++;
+    }
   });
   const totals = sums.map((sum): PredictionTotal | null => {
     if (scale.kind !== 'natural' || sum.rows === 0) return null;
@@ -157,7 +145,7 @@ export function predictRows(
     const [lower, upper] = ends(sum.centres, s, t * Math.sqrt(sum.newRows + share), scale);
     return { rows: sum.rows, estimate: sum.centres, lower, upper, mean: null };
   });
-  return { predictions, sourceRows, totals };
+  return { predicted: { count, figures, outside, source: sourceOf, row: rowOf }, totals };
 }
 
 /** What a total is worked out from. */

@@ -148,7 +148,7 @@ export function usableRows(
     rows: {
       rowCount: kept.length,
       labels: whole ? rows.labels : kept.map((row) => rows.labels[row]!),
-      given: kept.map((row) => rows.given[row] ?? []),
+      given: rows.given.length === 0 ? [] : kept.map((row) => rows.given[row]!),
       columns: whole ? columns : new Map([...columns].map(([name, column]) => [name, pick(column, kept)])),
       placeOf: (row) => placeOf(kept[row]!),
       severity,

@@ -1,4 +1,4 @@
-/** Timings, printed and held to nothing: npm run bench [factor] [validation] [compare] [run] [repeats] */
+/** Timings, printed and held to nothing: npm run bench [factor] [validation] [compare] [predict] [run] [repeats] */
 const wanted = process.argv.slice(2);
 const asked = (name: string) => wanted.length === 0 || wanted.includes(name);
 
@@ -14,6 +14,10 @@ if (asked('validation')) {
 if (asked('compare')) {
   const { benchCompare } = await import('./compare.ts');
   await benchCompare();
+}
+if (asked('predict')) {
+  const { benchPredict } = await import('./predict.ts');
+  await benchPredict();
 }
 if (asked('run')) {
   const { benchWholeRun } = await import('./whole-run.ts');
