@@ -37,6 +37,33 @@ export const MARKDOWN: unknown = {"0":function(container,depth0,helpers,partials
 
   return ((stack1 = container.lambda(depth0, depth0)) != null ? stack1 : "")
     + "\n";
+},"1":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "\n| parameter | value in this run | default | given or default |\n|:--|:--|:--|:--|\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"again"),"parameters"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":0},"end":{"line":24,"column":9}}})) != null ? stack1 : "");
+},"2":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "| "
+    + ((stack1 = (((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":23,"column":4},"end":{"line":23,"column":8}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":23,"column":2},"end":{"line":23,"column":10}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":23,"column":15},"end":{"line":23,"column":20}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":23,"column":13},"end":{"line":23,"column":22}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"default") || alias1(depth0, "default", {"start":{"line":23,"column":27},"end":{"line":23,"column":34}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"default","hash":{},"data":data,"loc":{"start":{"line":23,"column":25},"end":{"line":23,"column":36}}}) : helper))) != null ? stack1 : "")
+    + " | "
+    + ((stack1 = (((helper = lookupProperty(helpers,"source") || alias1(depth0, "source", {"start":{"line":23,"column":41},"end":{"line":23,"column":47}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"source","hash":{},"data":data,"loc":{"start":{"line":23,"column":39},"end":{"line":23,"column":49}}}) : helper))) != null ? stack1 : "")
+    + " |\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -58,7 +85,8 @@ export const MARKDOWN: unknown = {"0":function(container,depth0,helpers,partials
     + ((stack1 = (((helper = lookupProperty(helpers,"tool") || alias1(depth0, "tool", {"start":{"line":11,"column":25},"end":{"line":11,"column":29}} ))),(typeof helper === "function" ? helper.call(alias2,{"name":"tool","hash":{},"data":data,"loc":{"start":{"line":11,"column":23},"end":{"line":11,"column":31}}}) : helper))) != null ? stack1 : "")
     + "; again with:\n\n```\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(lookupProperty(depth0,"again"),"commands"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":16,"column":9}}})) != null ? stack1 : "")
-    + "```\n";
+    + "```\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"again"),"parameters"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":0},"end":{"line":25,"column":7}}})) != null ? stack1 : "");
 },"usePartial":true,"useData":true};
 export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -615,6 +643,17 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     return container.escapeExpression(container.lambda(depth0, depth0))
     + "\n";
 },"1":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Parameters\">\n<table>\n<caption>Parameters</caption>\n<thead><tr><th scope=\"col\">parameter</th><th scope=\"col\">value in this run</th><th scope=\"col\">default</th><th scope=\"col\">given or default</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"again"),"parameters"),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":14,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
+},"2":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -623,23 +662,14 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"role") || alias1(depth0, "role", {"start":{"line":12,"column":22},"end":{"line":12,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"role","hash":{},"data":data,"loc":{"start":{"line":12,"column":20},"end":{"line":12,"column":28}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":13,"column":22},"end":{"line":13,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":13,"column":20},"end":{"line":13,"column":28}}}) : helper)))
     + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":12,"column":39},"end":{"line":12,"column":43}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":12,"column":37},"end":{"line":12,"column":45}}}) : helper)))
-    + "</td><td><code class=\"hash\">"
-    + alias4((((helper = lookupProperty(helpers,"sha256") || alias1(depth0, "sha256", {"start":{"line":12,"column":75},"end":{"line":12,"column":81}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"sha256","hash":{},"data":data,"loc":{"start":{"line":12,"column":73},"end":{"line":12,"column":83}}}) : helper)))
-    + "</code></td></tr>\n";
-},"2":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Settings\">\n<table class=\"settings\">\n<caption>Settings in force</caption>\n<thead><tr><th scope=\"col\">setting</th><th scope=\"col\">value</th><th scope=\"col\">written or default</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"again"),"settings"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":26,"column":9}}})) != null ? stack1 : "")
-    + "</tbody>\n</table>\n</div>\n";
+    + alias4((((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":13,"column":39},"end":{"line":13,"column":44}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":13,"column":37},"end":{"line":13,"column":46}}}) : helper)))
+    + "</td><td>"
+    + alias4((((helper = lookupProperty(helpers,"default") || alias1(depth0, "default", {"start":{"line":13,"column":57},"end":{"line":13,"column":64}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"default","hash":{},"data":data,"loc":{"start":{"line":13,"column":55},"end":{"line":13,"column":66}}}) : helper)))
+    + "</td><td>"
+    + alias4((((helper = lookupProperty(helpers,"source") || alias1(depth0, "source", {"start":{"line":13,"column":77},"end":{"line":13,"column":83}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"source","hash":{},"data":data,"loc":{"start":{"line":13,"column":75},"end":{"line":13,"column":85}}}) : helper)))
+    + "</td></tr>\n";
 },"3":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -649,11 +679,37 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<tr><th scope=\"row\">"
-    + alias4((((helper = lookupProperty(helpers,"key") || alias1(depth0, "key", {"start":{"line":25,"column":22},"end":{"line":25,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"key","hash":{},"data":data,"loc":{"start":{"line":25,"column":20},"end":{"line":25,"column":27}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"role") || alias1(depth0, "role", {"start":{"line":25,"column":22},"end":{"line":25,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"role","hash":{},"data":data,"loc":{"start":{"line":25,"column":20},"end":{"line":25,"column":28}}}) : helper)))
     + "</th><td>"
-    + alias4((((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":25,"column":38},"end":{"line":25,"column":43}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":25,"column":36},"end":{"line":25,"column":45}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":25,"column":39},"end":{"line":25,"column":43}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":25,"column":37},"end":{"line":25,"column":45}}}) : helper)))
+    + "</td><td><code class=\"hash\">"
+    + alias4((((helper = lookupProperty(helpers,"sha256") || alias1(depth0, "sha256", {"start":{"line":25,"column":75},"end":{"line":25,"column":81}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"sha256","hash":{},"data":data,"loc":{"start":{"line":25,"column":73},"end":{"line":25,"column":83}}}) : helper)))
+    + "</code></td></tr>\n";
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Settings\">\n<table class=\"settings\">\n<caption>Settings in force</caption>\n<thead><tr><th scope=\"col\">setting</th><th scope=\"col\">value</th><th scope=\"col\">written or default</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"again"),"settings"),{"name":"each","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":37,"column":0},"end":{"line":39,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
+},"5":function(container,depth0,helpers,partials,data) {
+    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + alias4((((helper = lookupProperty(helpers,"key") || alias1(depth0, "key", {"start":{"line":38,"column":22},"end":{"line":38,"column":25}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"key","hash":{},"data":data,"loc":{"start":{"line":38,"column":20},"end":{"line":38,"column":27}}}) : helper)))
+    + "</th><td>"
+    + alias4((((helper = lookupProperty(helpers,"value") || alias1(depth0, "value", {"start":{"line":38,"column":38},"end":{"line":38,"column":43}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"value","hash":{},"data":data,"loc":{"start":{"line":38,"column":36},"end":{"line":38,"column":45}}}) : helper)))
     + "</td><td>"
-    + alias4((((helper = lookupProperty(helpers,"written") || alias1(depth0, "written", {"start":{"line":25,"column":56},"end":{"line":25,"column":63}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"written","hash":{},"data":data,"loc":{"start":{"line":25,"column":54},"end":{"line":25,"column":65}}}) : helper)))
+    + alias4((((helper = lookupProperty(helpers,"written") || alias1(depth0, "written", {"start":{"line":38,"column":56},"end":{"line":38,"column":63}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"written","hash":{},"data":data,"loc":{"start":{"line":38,"column":54},"end":{"line":38,"column":65}}}) : helper)))
     + "</td></tr>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda, alias3=container.escapeExpression, alias4=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -667,14 +723,16 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias3(alias2(alias1(lookupProperty(depth0,"again"), "tool", {"start":{"line":3,"column":10},"end":{"line":3,"column":20}} ), depth0))
     + ", the same study file and the same data give the same record and the same report, byte for byte.</p>\n<pre tabindex=\"0\" aria-label=\"Commands\"><code>"
     + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"again"),"commands"),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":46},"end":{"line":5,"column":9}}})) != null ? stack1 : "")
-    + "</code></pre>\n<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Files and their hashes\">\n<table>\n<caption>Files</caption>\n<thead><tr><th scope=\"col\">file</th><th scope=\"col\">name</th><th scope=\"col\">SHA-256</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"again"),"files"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":13,"column":9}}})) != null ? stack1 : "")
+    + "</code></pre>\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"again"),"parameters"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":18,"column":7}}})) != null ? stack1 : "")
+    + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Files and their hashes\">\n<table>\n<caption>Files</caption>\n<thead><tr><th scope=\"col\">file</th><th scope=\"col\">name</th><th scope=\"col\">SHA-256</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias4,lookupProperty(lookupProperty(depth0,"again"),"files"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":26,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n<p class=\"small\">"
-    + alias3(alias2(alias1(lookupProperty(depth0,"again"), "reading", {"start":{"line":17,"column":19},"end":{"line":17,"column":32}} ), depth0))
+    + alias3(alias2(alias1(lookupProperty(depth0,"again"), "reading", {"start":{"line":30,"column":19},"end":{"line":30,"column":32}} ), depth0))
     + " Record format: "
-    + alias3(alias2(alias1(lookupProperty(depth0,"again"), "format", {"start":{"line":17,"column":52},"end":{"line":17,"column":64}} ), depth0))
+    + alias3(alias2(alias1(lookupProperty(depth0,"again"), "format", {"start":{"line":30,"column":52},"end":{"line":30,"column":64}} ), depth0))
     + ". Full-precision numbers are in record.json and in the tables beside it.</p>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"again"),"settings"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":0},"end":{"line":30,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"again"),"settings"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":31,"column":0},"end":{"line":43,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"useData":true},
   'careful': {"0":function(container,depth0,helpers,partials,data) {

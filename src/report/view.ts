@@ -460,6 +460,14 @@ export interface CarefulView {
 export interface AgainView {
   /** Commands to type; in Markdown not escaped, since they stand in a code block. */
   readonly commands: readonly string[];
+  /** The study's parameters with the values of this run. */
+  readonly parameters: readonly {
+    readonly name: string;
+    readonly value: string;
+    readonly default: string;
+    /** "given" or "default". */
+    readonly source: string;
+  }[];
   readonly files: readonly { readonly role: string; readonly name: string; readonly sha256: string }[];
   readonly tool: string;
   readonly format: string;
