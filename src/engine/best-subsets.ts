@@ -1,6 +1,6 @@
 import { type CountedMember, countBetween, countSubsets } from '../stats/count-subsets.ts';
 import type { Factor } from './factor.ts';
-import { backwardBounds } from './subset-backward.ts';
+import { backwardSets } from './subset-backward.ts';
 import { subsetGround } from './subset-ground.ts';
 import { inflationStack } from './subset-inflation.ts';
 import { type SubsetEntry, type SubsetLists, subsetLists } from './subset-lists.ts';
@@ -59,6 +59,12 @@ export interface SubsetsFound {
 /** A lower bound counts this much lower: it carries the rounding of an inverse. */
 const SAFE = 1 - 1e-10;
 
+/** What stands at a rule's limit but for rounding is left to the exact test. */
+const QUICK_MARGIN = 1e-6;
+
+/** Multiplications that asking for admission is worth. */
+const ADMISSION_COST = 1e5;
+
 /** A search of this many multiplications takes about a minute. */
 const BUDGET = 3e10;
 
@@ -113,10 +119,29 @@ export function bestSubsets(factor: Factor, search: SubsetSearch): SubsetsFound 
   let work = 0;
   let finished = true;
 
-  if (!hasRules)
-    lists.promise(backwardBounds(ground.open, ground.lengths, layout, capacity, atLeast, atMost));
+  start();
   settle(ground.open, 0, 0);
   return collect();
+
+  /** Bounds from sets that are easily found: as many as are to be kept, or, with rules, the best that is admitted. */
+  function start(): void {
+    const sets = backwardSets(ground.open, ground.lengths, layout, atLeast, atMost);
+    if (!hasRules) {
+      lists.promise(
+        Float64Array.from(
+          capacity,
+          (wanted, size) => sets.get(size)?.[wanted - 1]?.residual ?? Number.POSITIVE_INFINITY,
+        ),
+      );
+      return;
+    }
+    if (search.goal == null) return;
+    for (const [size, [best]] of sets) {
+      if (best === undefined || capacity[size] === 0) continue;
+      work += ADMISSION_COST;
+      if (best.residual < entry[size]! && admits(asAsked(best.groups))) lists.aim(size, best.residual);
+    }
+  }
 
   function widthOf(group: number): number {
     return starts[group + 1]! - starts[group]!;
@@ -184,22 +209,23 @@ export function bestSubsets(factor: Factor, search: SubsetSearch): SubsetsFound 
       const rss = node.residual + node.rises[k]!;
       const group = node.order[k]!;
       const width = dependents[group]!.length === 0 ? widthOf(group) : leaversWith(node, k, layout, leavers);
-      if (matters(whole - width, rss)) {
+      if (matters(whole - width, rss) && !isRefusedQuickly(node, k, whole - width, rss)) {
         consider(node, stayCount, stayCount + countWithout(node, group), whole - width, rss, group);
       }
     }
-    if (count === 1 || isHopelessBelow(node, stayColumns, whole, boundsWith(stayCount))) return;
+    if (count === 1 || isHopelessBelow(node, stayColumns, whole, entry)) return;
 
     const child = nodeAt(level + 1);
     let smallest = stayColumns;
     for (let i = 0; i < count - 1 && stayCount + i <= atMost; i++) {
       const position = node.ranking[i]!;
       const group = node.order[position]!;
-      const bounds = boundsWith(stayCount + i);
-      if (mayGain(node, position, smallest, whole, bounds)) {
+      if (mayGain(node, position, smallest, whole, entry)) {
+        const bounds = boundsWith(stayCount + i);
         step.count = leaversWith(node, position, layout, leavers);
         openAfter(node, i, child);
-        if (step.leftCount > 0 && stayCount + i + child.groups >= atLeast) {
+        const isWanted = bounds === entry || mayGain(node, position, smallest, whole, bounds);
+        if (isWanted && step.leftCount > 0 && stayCount + i + child.groups >= atLeast) {
           departure(node, leavers, step.count, step);
           aftermath(node, leavers, step);
           work += 2 * step.count * step.leftCount + 10 * step.leftCount;
@@ -311,6 +337,36 @@ export function bestSubsets(factor: Factor, search: SubsetSearch): SubsetsFound 
     return false;
   }
 
+  /**
+   * Whether a set that lacks only the group at a position breaks a rule as can be seen from here, and is no better than
+   * what is known of its size.
+   */
+  function isRefusedQuickly(node: SubsetNode, position: number, size: number, rss: number): boolean {
+    const { quick } = search;
+    if (quick === undefined || rss < overall[size]!) return false;
+    const group = node.order[position]!;
+    if (widthOf(group) > 1 || dependents[group]!.length > 0) return false;
+    const { inverse, estimates, columns } = node;
+    const at = node.offsets[position]!;
+    const pivot = inverse[at * columns + at]!;
+    const share = estimates[at]! / pivot;
+    const p = ground.alwaysRank + size;
+    const least = quick.smallestT2 === null ? 0 : quick.smallestT2(p) * (1 - QUICK_MARGIN);
+    const variance = Math.max(rss, exact) / (factor.rowCount - p);
+    for (let k = 0; k < node.groups; k++) {
+      const other = node.order[k]!;
+      if (k === position || widthOf(other) > 1) continue;
+      const j = node.offsets[k]!;
+      const cross = inverse[at * columns + j]!;
+      const estimate = estimates[j]! - cross * share;
+      const spread = inverse[j * columns + j]! - (cross * cross) / pivot;
+      if (estimate * estimate < least * variance * spread) return true;
+      const sign = quick.signs[groups[other]!.index]!;
+      if (sign * estimate < 0 && estimate * estimate > QUICK_MARGIN * variance * spread) return true;
+    }
+    return false;
+  }
+
   function countWithout(node: SubsetNode, group: number): number {
     const gone = dependents[group]!;
     if (gone.length === 0) return node.groups - 1;
@@ -340,6 +396,7 @@ export function bestSubsets(factor: Factor, search: SubsetSearch): SubsetsFound 
       if (group !== without && !gone.includes(group)) own.push(group);
     }
     const found: SubsetEntry = { groups: own.sort((a, b) => a - b), residual: rss };
+    if (hasRules) work += ADMISSION_COST;
     const isAdmitted = admits === undefined || admits(asAsked(found.groups));
     if (!isAdmitted) lists.takeRefused(size, found);
     else if (rss < entry[size]!) lists.take(size, found);

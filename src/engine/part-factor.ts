@@ -18,7 +18,7 @@ export interface Part {
 export function partFactor(factor: Factor, candidate: CandidateModel, facts: RowFacts): Part {
   const { stride, hi } = factor.triangle;
   const responseAt = factor.predictorCount + candidate.responseColumn;
-  const union = [0, ...candidate.columns.filter((column) => column !== 0)];
+  const union = [0, ...candidate.columns.filter((column) => column !== 0).sort((a, b) => a - b)];
   const at = new Map(union.map((column, j) => [column, j]));
   const own = [...union, responseAt];
   const height = responseAt + 1;
@@ -27,7 +27,12 @@ export function partFactor(factor: Factor, candidate: CandidateModel, facts: Row
   own.forEach((column, j) => {
     for (let i = 0; i <= column; i++) work.hi[j * height + i] = hi[column * stride + i]!;
   });
-  for (let j = 0; j < width; j++) eliminate(work, j, j, height, width);
+  // Rows below the last column taken so far are still zero.
+  let end = 0;
+  own.forEach((column, j) => {
+    end = Math.max(end, column + 1);
+    eliminate(work, j, j, end, width);
+  });
   const triangle = matrix(width, width, false);
   for (let j = 0; j < width; j++)
     for (let i = 0; i <= j; i++) triangle.hi[j * width + i] = work.hi[j * height + i]!;

@@ -1,3 +1,4 @@
+import type { SubsetEntry } from './subset-lists.ts';
 import {
   aftermath,
   depart,
@@ -13,21 +14,21 @@ import {
 } from './subset-node.ts';
 import { type OpenTriangle, obstacleIn } from './subset-triangle.ts';
 
+/** By size: sets as lists of groups, each once, with their RSS, the least first. */
+export type SeenSets = ReadonlyMap<number, readonly SubsetEntry[]>;
+
 /**
- * Bounds to start a search with: leaves out the group whose loss costs least, one after the other, and notes on the way
- * every set that lacks one group. The result is, by size, the RSS that as many different sets as are to be kept do
- * not exceed; infinite where too few were seen.
+ * Good sets to start a search with: leaves out the group whose loss costs least, one after the other, and notes on the way
+ * every set that lacks one group. None where columns depend on each other.
  */
-export function backwardBounds(
+export function backwardSets(
   open: OpenTriangle,
   lengths: Float64Array,
   layout: GroupLayout,
-  capacity: Int32Array,
   atLeast: number,
   atMost: number,
-): Float64Array {
-  const bounds = new Float64Array(capacity.length).fill(Number.POSITIVE_INFINITY);
-  if (open.columns === 0 || obstacleIn(open, layout.starts, lengths) !== null) return bounds;
+): SeenSets {
+  if (open.columns === 0 || obstacleIn(open, layout.starts, lengths) !== null) return new Map();
   const groupCount = open.order.length;
   const scratch: SubsetScratch = {
     leavers: new Int32Array(open.columns + 1),
@@ -36,7 +37,7 @@ export function backwardBounds(
     values: new Float64Array(open.columns + 1),
   };
   const { leavers, step } = scratch;
-  const seen = new Map<number, Map<string, number>>();
+  const seen = new Map<number, Map<string, SubsetEntry>>();
   let [node, next] = [room(), room()];
   enter(open, node);
   while (node.groups > 0) {
@@ -61,13 +62,9 @@ export function backwardBounds(
     next.variances = null;
     [node, next] = [next, node];
   }
-  for (const [size, sets] of seen) {
-    const wanted = capacity[size]!;
-    if (wanted > 0 && sets.size >= wanted) {
-      bounds[size] = [...sets.values()].sort((a, b) => a - b)[wanted - 1]!;
-    }
-  }
-  return bounds;
+  return new Map(
+    [...seen].map(([size, sets]) => [size, [...sets.values()].sort((a, b) => a.residual - b.residual)]),
+  );
 
   function room(): SubsetNode {
     return emptyNode(groupCount, open.columns, groupCount);
@@ -81,8 +78,9 @@ export function backwardBounds(
     );
     if (rest.length < atLeast || rest.length > atMost) return;
     const size = from.columns - leaversWith(from, position, layout, leavers);
-    const sets = seen.get(size) ?? new Map<string, number>();
+    const sets = seen.get(size) ?? new Map<string, SubsetEntry>();
     seen.set(size, sets);
-    sets.set(rest.sort((a, b) => a - b).join(), from.residual + from.rises[position]!);
+    rest.sort((a, b) => a - b);
+    sets.set(rest.join(), { groups: rest, residual: from.residual + from.rises[position]! });
   }
 }

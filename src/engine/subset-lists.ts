@@ -27,6 +27,8 @@ export interface SubsetLists {
   readonly overall: Float64Array;
   /** Says that so good sets are known to be found, by size: bounds before there are any. */
   readonly promise: (residuals: Float64Array) => void;
+  /** Says that a set with this RSS is admitted, before the search comes upon it. */
+  readonly aim: (size: number, residual: number) => void;
   readonly take: (size: number, entry: SubsetEntry) => void;
   readonly takeRefused: (size: number, entry: SubsetEntry) => void;
   readonly kept: (size: number) => readonly SubsetEntry[];
@@ -68,6 +70,9 @@ export function subsetLists(
         promised[size] = residual * (1 + ROUNDING);
         tighten(size);
       });
+    },
+    aim(size, residual) {
+      if (goal !== null) towards(goal, goal.value(size, residual));
     },
     take(size, found) {
       const list = lists[size]!;

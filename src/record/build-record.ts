@@ -274,7 +274,7 @@ function warningsOf({
       about: placeText(place),
       text: hint === undefined ? message : `${message} ${hint}`,
     }));
-  warnings.push(...searchWarnings(study.candidates.length, families));
+  warnings.push(...searchWarnings(study.candidates.length, families, findings.split !== null));
   if (findings.trust !== null) warnings.push(...choiceWarnings(findings.trust));
   if (fitted.pressOmitted !== null)
     warnings.push({ about: 'PRESS', text: `PRESS was ${fitted.pressOmitted}.` });

@@ -78,9 +78,16 @@ function noteOf({ rankBy }: SelectionPlan, keep: number): string | null {
   return `The search goes by the residual sum of squares: ${title} is held only against ${kept} of each number of coefficients, and a model that it would prefer may not be among them.`;
 }
 
-/** What p-values and intervals of a searched model leave out. */
-export function searchWarnings(named: number, families: readonly FoundFamily[]): StudyRecord['warnings'] {
-  if (families.length === 0) return [];
+/**
+ * What p-values and intervals of a searched model leave out.
+ * @param isEstimatedApart the chosen model is estimated from rows that had no part in the choice, so that they leave out nothing
+ */
+export function searchWarnings(
+  named: number,
+  families: readonly FoundFamily[],
+  isEstimatedApart: boolean,
+): StudyRecord['warnings'] {
+  if (families.length === 0 || isEstimatedApart) return [];
   const atMost = families.some(({ coveredExactly }) => !coveredExactly) ? 'up to ' : '';
   const count = countText(modelsLookedAt(named, families));
   return [

@@ -4,6 +4,7 @@ import type { Fit, FitContext } from '../engine/fit.ts';
 import { fitCandidate, type RowFacts } from '../engine/fit-candidate.ts';
 import { partFactor } from '../engine/part-factor.ts';
 import type { CandidateModel } from '../model/design.ts';
+import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { AdmitPlan } from '../study/study.ts';
 import { ADMISSION_RULES } from './admission.ts';
 
@@ -23,15 +24,29 @@ export function searchAdmission(
   covarianceOf: ((fit: Fit) => Covariance | null) | null,
 ): (candidate: CandidateModel) => boolean {
   const classical = covarianceOf === null ? admit : { ...admit, pValue: null };
+  const limits: number[] = [];
   const plain: Factor = { ...factor, triangle: { ...factor.triangle, lo: null } };
   return (candidate) => {
     const part = partFactor(plain, candidate, facts);
     const fit = fitCandidate(part.factor, part.candidate, part.facts, 'no condition number');
-    if (!keeps(classical, contextOf(fit, part.facts))) return false;
+    if (isFarBelow(fit) || !keeps(classical, contextOf(fit, part.facts))) return false;
     if (covarianceOf === null || admit.pValue === null) return true;
     const whole = fitCandidate(plain, candidate, facts, 'no condition number');
     return keeps(admit, { ...contextOf(whole, facts), covariances: [covarianceOf(whole)] });
   };
+
+  /** Whether the p-value of a term of one column is above the limit, seen from its t: most sets are refused by this. */
+  function isFarBelow(fit: Fit): boolean {
+    if (classical.pValue === null || fit.degreesOfFreedom < 1) return false;
+    const df = fit.degreesOfFreedom;
+    limits[df] ??= tTwoSidedQuantile(classical.pValue.atMost, df) ** 2 * (1 - 1e-9);
+    const p = fit.columns.length;
+    const least = (limits[df]! * fit.residualSumOfSquares) / df;
+    return fit.candidate.terms.some(({ columns }) => {
+      const j = columns.length === 1 ? fit.columns.indexOf(columns[0]!) : -1;
+      return j >= 0 && fit.estimates[j]! ** 2 < least * fit.inverse[j * p + j]!;
+    });
+  }
 }
 
 function contextOf(fit: Fit, facts: RowFacts): FitContext {

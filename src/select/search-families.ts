@@ -82,6 +82,7 @@ export function searchFamilies(
   const known = new Map(design.candidates.map((candidate) => [contentKey(candidate), candidate.name]));
   const candidates: CandidateModel[] = [];
   const variances = selection.rankBy === 'mallows_cp' ? fullVariance(factor, design, facts) : [];
+  const hasClassicalP = study.inference.standardErrors.kind === 'classical';
   const admits = searchAdmission(selection.admit, factor, facts, covarianceOf());
   const families = design.families.map((family) =>
     isSubsets(family) ? subsets(family) : steps(family as FamilyModel & { plan: StepFamilyPlan }),
@@ -115,6 +116,7 @@ export function searchFamilies(
       factor,
       facts,
       fullVariance: variances[family.responseColumn] ?? null,
+      hasClassicalP,
       admits,
       everySize: options.everySize,
       onProgress: (visited) => options.onProgress?.(plan.name, visited),

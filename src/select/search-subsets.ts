@@ -4,13 +4,16 @@ import type { RowFacts } from '../engine/fit-candidate.ts';
 import { columnNorm } from '../engine/kernel.ts';
 import type { SubsetSearch } from '../engine/subset-search.ts';
 import type { CandidateModel, FamilyModel } from '../model/design.ts';
+import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { SelectionPlan, SubsetFamilyPlan } from '../study/study.ts';
 import { familyCandidate } from './family-model.ts';
 import { hasRules } from './search-admission.ts';
 import { searchGoal } from './search-goal.ts';
 
-/** Multiplications spent on the best of every size before only those that could be chosen are looked for. */
+/** Multiplications spent on the best of every size before only those that could be chosen are looked for: half a minute. */
 const EVERY_SIZE_BUDGET = 1.5e10;
+/** The same with rules: where no set of a size is admitted, none can be known not to be without trying all. */
+const WITH_RULES_BUDGET = 2e9;
 
 export interface SubsetFamily extends FamilyModel {
   readonly plan: SubsetFamilyPlan;
@@ -22,6 +25,8 @@ export interface SubsetsQuestion {
   readonly factor: Factor;
   readonly facts: RowFacts;
   readonly fullVariance: number | null;
+  /** Whether p-values of the rules are classical. */
+  readonly hasClassicalP: boolean;
   /** Whether a candidate keeps the rules of admission. */
   readonly admits: (candidate: CandidateModel) => boolean;
   /** The best of every size are wanted, and not only what could be chosen. */
@@ -46,7 +51,7 @@ export function termsOf(family: SubsetFamily, optional: readonly number[], own: 
 
 /** Searches a family of subsets: for the best of every size, or, where that is too much, for those that could be chosen. */
 export function searchSubsets(question: SubsetsQuestion): SubsetsAnswer {
-  const { family, selection, factor, fullVariance } = question;
+  const { family, selection, factor, facts, fullVariance } = question;
   const { plan, terms } = family;
   const optional = plan.terms.flatMap((term, index) => (term.always ? [] : [index]));
   const always = terms.filter((_, index) => plan.terms[index]!.always);
@@ -75,18 +80,44 @@ export function searchSubsets(question: SubsetsQuestion): SubsetsAnswer {
           admits: (groups: readonly number[]) =>
             question.admits(familyCandidate(family, termsOf(family, optional, groups), plan.name)),
           largestInflation: admit.vif?.atMost ?? null,
+          quick: {
+            smallestT2: question.hasClassicalP ? smallestT2() : null,
+            signs: optional.map((index) => signOf(index)),
+          },
         }
       : {}),
     ...(question.onProgress === undefined ? {} : { onProgress: question.onProgress }),
   };
   const goal = searchGoal(selection, n, total, fullVariance);
   if (goal === null || question.everySize) {
-    const found = bestSubsets(factor, goal === null ? search : { ...search, budget: EVERY_SIZE_BUDGET });
+    const found = bestSubsets(
+      factor,
+      goal === null ? search : { ...search, budget: hasRules(admit) ? WITH_RULES_BUDGET : EVERY_SIZE_BUDGET },
+    );
     if (found.finished || goal === null)
       return { found, optional, exactFor: found.finished ? 'every size' : null };
   }
   const found = bestSubsets(factor, { ...search, goal });
   return { found, optional, exactFor: found.finished ? 'the choice' : null };
+
+  /** t² at the limit of p-values, by the number of coefficients. */
+  function smallestT2(): ((columns: number) => number) | null {
+    const limit = admit.pValue?.atMost;
+    if (limit === undefined) return null;
+    const known: number[] = [];
+    return (columns) => {
+      known[columns] ??= tTwoSidedQuantile(limit, n - columns) ** 2;
+      return known[columns]!;
+    };
+  }
+
+  /** 1, −1 or 0, of a term of one column by either of its names. */
+  function signOf(index: number): number {
+    const [column, ...more] = terms[index]!.columns;
+    if (column === undefined || more.length > 0) return 0;
+    const sign = admit.signs.get(facts.columnNames[column]!) ?? admit.signs.get(terms[index]!.name);
+    return sign === undefined ? 0 : sign === 'positive' ? 1 : -1;
+  }
 
   /** A model must leave a degree of freedom, and keep the rule of rows for each coefficient. */
   function mostColumns(): number {

@@ -105,16 +105,27 @@ function oneOrNone(weight: number): Polynomial {
 function multiply(a: Polynomial, b: Polynomial): Polynomial {
   const heaviest = widest(a) + widest(b) - 1;
   const product = Array.from({ length: a.length + b.length - 1 }, () => new Float64Array(heaviest));
+  const spans = b.map(spanOf);
   a.forEach((left, i) => {
+    const [from, to] = spanOf(left);
     b.forEach((right, j) => {
       const row = product[i + j]!;
-      for (let u = 0; u < left.length; u++) {
-        if (left[u] === 0) continue;
-        for (let v = 0; v < right.length; v++) row[u + v]! += left[u]! * right[v]!;
+      const [first, last] = spans[j]!;
+      for (let u = from; u < to; u++) {
+        for (let v = first; v < last; v++) row[u + v]! += left[u]! * right[v]!;
       }
     });
   });
   return product;
+}
+
+/** Where a row is not zero: most rows hold few weights. */
+function spanOf(row: Float64Array): readonly [number, number] {
+  let last = row.length;
+  while (last > 0 && row[last - 1] === 0) last--;
+  let first = 0;
+  while (first < last && row[first] === 0) first++;
+  return [first, last];
 }
 
 function add(a: Polynomial, b: Polynomial): Polynomial {

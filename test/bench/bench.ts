@@ -1,10 +1,14 @@
-/** Timings, printed and held to nothing: npm run bench [factor] [validation] [compare] [predict] [run] [repeats] */
+/** Timings, printed and held to nothing: npm run bench [factor] [search] [validation] [compare] [predict] [run] [repeats] */
 const wanted = process.argv.slice(2);
 const asked = (name: string) => wanted.length === 0 || wanted.includes(name);
 
 if (asked('factor')) {
   const { benchFactor } = await import('./factor.ts');
   benchFactor();
+}
+if (asked('search')) {
+  const { benchSearch } = await import('./search.ts');
+  benchSearch();
 }
 if (asked('validation')) {
   const { benchBootstrap, benchValidation } = await import('./validation.ts');

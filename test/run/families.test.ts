@@ -218,6 +218,29 @@ describe('a search of noise', () => {
   });
 });
 
+describe('a searched choice on one part of the rows', () => {
+  it('is estimated from the other without the caution', async () => {
+    const names = ['v1', 'v2', 'v3', 'v4', 'v5', 'v6'];
+    const study = [
+      'plumbrule: 1',
+      'title: Noise',
+      'data:',
+      '  file: noise.csv',
+      '  variables:',
+      ...[...names, 'y'].map((name) => `    ${name}: { type: number }`),
+      'response: y',
+      'candidates:',
+      `  - { name: F, subsets_of: [${names.join(', ')}], at_least: 2 }`,
+      'selection: { rank_by: aicc, split_sample: { share: 0.5, seed: 4 } }',
+      '',
+    ].join('\n');
+    const record = await recordOf(study, noise());
+    expect(record.families![0]!.searched).toBe(2 ** 6 - 1 - 6);
+    expect(record.selection.split_sample).toMatchObject({ rows_choosing: 50, rows_estimating: 50 });
+    expect(record.warnings.filter(({ about }) => about === 'selection')).toEqual([]);
+  });
+});
+
 describe('a family of which nothing can be fitted', () => {
   it('stops the run where it is all there is', async () => {
     const { record, problems } = await runText(
