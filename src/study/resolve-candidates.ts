@@ -7,7 +7,7 @@ import { resolveScale } from './resolve-scale.ts';
 import { resolveTerm, termKey, termPowers, termVariables } from './resolve-terms.ts';
 import type { CandidatePlan, FamilyPlan, ResponsePlan, TermPlan } from './study.ts';
 import type { CandidateInFile } from './study-file.generated.ts';
-import { warnOfMissingParts } from './warn-of-missing-parts.ts';
+import { warnOfBaselineAtZero, warnOfMissingParts } from './warn-of-missing-parts.ts';
 
 export interface ResolvedCandidates {
   readonly candidates: readonly CandidatePlan[];
@@ -44,6 +44,7 @@ export function resolveCandidates(
       if (term !== null) checkResponse(reading, term, [...path, 'terms', at], response, derivedFrom);
     }
     if (!terms.includes(null)) warnOfMissingParts(reading, names, terms, [...path, 'terms']);
+    if (written.intercept === false) warnOfBaselineAtZero(reading, names, terms, [...path, 'terms']);
     const name = written.name;
     if (name === undefined) return;
     const isTwice = checkName(name, index);

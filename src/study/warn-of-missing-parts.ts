@@ -52,6 +52,29 @@ export function warnOfMissingParts(
   });
 }
 
+/**
+ * Warns of a category in a candidate without an intercept: its levels are set against the baseline, which the fit
+ * then holds at zero.
+ */
+export function warnOfBaselineAtZero(
+  reading: Reading,
+  names: Names,
+  terms: readonly (TermPlan | null)[],
+  path: Path,
+): void {
+  terms.forEach((term, index) => {
+    if (term?.kind !== 'variable' || names.get(term.variable)?.type !== 'category') return;
+    const at = [...path, index];
+    warning(
+      reading,
+      'term_without_parts',
+      reading.written.placeOf(at),
+      `${showPath(at)} is the category ${term.variable} in a candidate without an intercept. Its baseline is then held at a response of zero where the other terms are 0.`,
+      'This is allowed; keep the intercept unless it is what you mean.',
+    );
+  });
+}
+
 /** The parts with fewest members that no term is made of: single variables, else pairs and so on. */
 function smallestAbsent(members: readonly Member[], present: ReadonlySet<string>): (readonly Member[])[] {
   for (let size = 1; size < members.length; size++) {

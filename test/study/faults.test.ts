@@ -1143,6 +1143,17 @@ describe('faults at the edges', () => {
     expect(read(changed(SMALL, '[x]', terms)).places).toEqual([]);
   });
 
+  it('warns of a category without an intercept, whose baseline is held at zero', () => {
+    const { text, places } = marked(changed(SMALL, '[x]', '[x, «k»]\n    intercept: false'));
+    const outcome = read(text);
+    expect(outcome.places).toEqual(places.map((place) => `${place} term_without_parts`));
+    expect(outcome.problems[0]).toMatchObject({
+      severity: 'warning',
+      message: expect.stringContaining('Its baseline is then held at a response of zero'),
+    });
+    expect(outcome.study).not.toBeNull();
+  });
+
   it('knows a comma inside braces that cuts a text short', () => {
     const text = changed(SMALL, 'response: y', 'derive:\n  z: { expression: min(x, 2) }\nresponse: y');
     const { problems, places } = read(text);
