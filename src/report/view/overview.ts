@@ -7,7 +7,7 @@ import {
   worstFirst,
 } from '../overview.ts';
 import type { OverviewView } from '../overview-view.ts';
-import { counted, raised } from '../words/lexicon.ts';
+import { counted, listed } from '../words/lexicon.ts';
 import { outcomeSentence } from '../words/overview.ts';
 
 /** Coefficients side by side on a page; the table in CSV has all. */
@@ -38,23 +38,22 @@ export function overviewView(title: string, tool: string, entries: readonly Over
   };
 }
 
+/** Which candidates were chosen how often; nothing where no two runs have the same, as different studies do not. */
 function chosenSentence(entries: readonly OverviewEntry[]): string[] {
   const counts = new Map<string, number>();
   for (const { chosen } of entries) if (chosen !== null) counts.set(chosen, (counts.get(chosen) ?? 0) + 1);
   const [first, ...others] = [...counts].sort(([, a], [, b]) => b - a);
-  if (first === undefined || entries.length < 2) return [];
+  if (first === undefined || first[1] < 2) return [];
   const [name, runs] = first;
-  return others.length === 0
-    ? [`Wherever a candidate was chosen it is ${name}.`]
-    : [
-        `${raised(name)} was chosen in ${counted(runs, 'run', 'runs', count)}, ${others
-          .slice(0, 3)
-          .map(([other, times]) => `${other} in ${count(times)}`)
-          .join(
-            ', ',
-          )}${others.length > 3 ? ` and ${counted(others.length - 3, 'other', 'others')} in the rest` : ''}.`,
-      ];
+  if (others.length === 0) return [`Wherever a candidate was chosen it is ${name}.`];
+  const told = others.slice(0, MOST_CHOSEN).map(([other, times]) => `${other} in ${count(times)}`);
+  const more = others.length - told.length;
+  const rest = more > 0 ? [counted(more, 'other candidate', 'other candidates', count)] : [];
+  return [`${name} was chosen in ${count(runs)} of the runs, ${listed([...told, ...rest])}.`];
 }
+
+/** Candidates beside the most frequent one that a sentence names. */
+const MOST_CHOSEN = 3;
 
 function coefficientsView({
   quantity,
