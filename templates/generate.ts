@@ -2,14 +2,17 @@
  * Compiles the templates of this folder ahead of time, so that a run spends no time on it (compiling them took
  * about 200 ms of processor time, loading the compiled ones takes about 10):
  *
- *     npx tsx templates/generate.ts            writes src/report/templates.generated.ts and its like for the overview
+ *     npx tsx templates/generate.ts            writes src/report/templates.generated.ts, its like for the overview, and view.md
  *     npx tsx templates/generate.ts --check    exits 1 if it is not fresh
  */
 import { readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import Handlebars from 'handlebars';
+import { viewReference } from './view-reference.ts';
 
 const TARGET = new URL('../src/report/templates.generated.ts', import.meta.url);
+/** The reference for people who write templates of their own. */
+const REFERENCE = new URL('view.md', import.meta.url);
 const OVERVIEW_TARGET = new URL('../src/report/overview-templates.generated.ts', import.meta.url);
 
 const NOTE =
@@ -58,6 +61,7 @@ if (process.argv[1] === fileURLToPath(import.meta.url)) {
   for (const [target, text] of [
     [TARGET, compiledTemplates()],
     [OVERVIEW_TARGET, compiledOverview()],
+    [REFERENCE, viewReference()],
   ] as const) {
     if (!process.argv.includes('--check')) writeFileSync(target, text);
     else if (readFileSync(target, 'utf8') !== text) {

@@ -4,7 +4,9 @@ import { modelsLookedAt, modelsPhrase } from './models.ts';
 
 /** A caution with a short heading. */
 export interface Caution {
+  /** A word or two. */
   readonly heading: string;
+  /** The caution. */
   readonly text: string;
 }
 
