@@ -16,6 +16,9 @@ import { ruleSentences } from '../../src/report/words/selection.ts';
 import { stabilitySentences, unsettled } from '../../src/report/words/stability.ts';
 import { intervalsTooShort, noBetterThanMean, unseenSentences } from '../../src/report/words/unseen.ts';
 import { partsPhrase, validationSentences } from '../../src/report/words/validation.ts';
+import { normalQuantile } from '../../src/stats/distributions.ts';
+import { randomFrom } from '../../src/stats/random.ts';
+import { runText } from '../run/run-text.ts';
 import { declaredRecord, SEARCHED, SPLIT, TESTED } from './declared-record.ts';
 import { sampleRecord } from './sample-record.ts';
 import { sound } from './sound.ts';
@@ -365,5 +368,39 @@ describe('a split sample', () => {
       examination: { ...split.examination!, findings: [], before_you_rely: [] },
     };
     expect(bewareLines(calm, lexiconOf(split)).join(' ')).toContain('owe nothing to the choice');
+  });
+});
+
+describe('noise and nothing else', () => {
+  it('is told to be no better than the mean, on the first screen too (after Freedman 1983)', async () => {
+    const random = randomFrom(1983);
+    const names = Array.from({ length: 50 }, (_, j) => `x${j + 1}`);
+    const normal = (): number => normalQuantile(Math.max(random.next(), 1e-9));
+    const rows = Array.from({ length: 100 }, () => [normal(), ...names.map(normal)].map((v) => v.toFixed(4)));
+    const { record } = await runText(
+      `plumbrule: 1
+title: Noise
+data:
+  file: data.csv
+  variables:
+    y: { type: number }
+${names.map((name) => `    ${name}: { type: number }`).join('\n')}
+response: y
+candidates:
+  - name: Forth
+    add_from: [${names.join(', ')}]
+    enter_at: 0.25
+selection: { honest_error: { folds: 5 } }
+`,
+      { 'data.csv': `y,${names.join(',')}\n${rows.map((row) => row.join(',')).join('\n')}\n` },
+    );
+    expect(record!.model).not.toBeNull();
+    // The chosen model's own figures look like a finding.
+    expect(record!.candidates[0]!.overall_f!.p_value).toBeLessThan(0.01);
+    expect(noBetterThanMean(record!.selection.honest_error!)).toBe(true);
+    const view = buildView(record!);
+    expect(view.trust!.unseen!.finding).toMatch(/no better than saying the mean\.$/);
+    expect(view.head.beware.join(' ')).toMatch(/the mean/);
+    expect(markdown(record!)).toContain('no better than saying the mean');
   });
 });
