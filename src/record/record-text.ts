@@ -1,8 +1,12 @@
-import { jsonText } from './json.ts';
+import { jsonText, type SchemaNode } from './json.ts';
 import type { StudyRecord } from './record.ts';
 import { recordSchema } from './record-schema.ts';
 
 /** The text of record.json: keys in the schema's order, full-precision numbers, the same bytes every time. */
 export function recordText(record: StudyRecord): string {
-  return jsonText(record, recordSchema());
+  schema ??= recordSchema();
+  return jsonText(record, schema);
 }
+
+/** Read once: a run over many levels writes a record for each. */
+let schema: SchemaNode | undefined;

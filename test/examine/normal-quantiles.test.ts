@@ -30,7 +30,7 @@ describe('ordered residuals', () => {
       expect([...list].sort((a, b) => a - b)).toEqual(list);
     }
     expect(found.lower!.every((low, i) => low < found.upper![i]!)).toBe(true);
-    expect(found.simulations).toBe(199);
+    expect(found.simulations).toBe(79);
   });
   it('lie inside it where the errors are normal, as often as it says, and a wild one outside', () => {
     const inside = (wild: (i: number) => number): number[] => {
