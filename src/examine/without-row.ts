@@ -179,7 +179,7 @@ function contextWithout(
     logWeights: fitted.facts.logWeights - 2 * Math.log(root),
     logJacobians: fitted.facts.logJacobians.map((sum, k) => sum - logJacobian(y, design.responses[k]!.scale)),
   };
-  const fits = fitted.fits.map((fit) => fitCandidate(factor, fit.candidate, facts));
+  const fits = fitted.fits.map((fit) => fitCandidate(factor, fit.candidate, facts, 'no condition number'));
   const { rankBy } = chosen.study.selection;
   const kept = rankBy === 'press' ? allBut(rows, row) : null;
   return {
