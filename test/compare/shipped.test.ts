@@ -70,7 +70,12 @@ describe('cold-store-electricity', () => {
     expect(comparison.rows!.revisions).toMatchObject([{ id: '2024-02', variable: 'kwh' }]);
     expect(comparison.rows!.added_rows[0]).toBe('2023-03');
     const saving = coefficient(comparison, 'overhauled');
-    expect(comparison.models[0]!.largest_change!.name).toBe('overhauled');
+    // In errors that allow for related neighbours the intake's coefficient moves a little more, by the same reading.
+    const largest = comparison.models[0]!.largest_change!;
+    expect(largest.name).toBe('intake_per_day');
+    const intake = coefficient(comparison, 'intake_per_day');
+    expect(Math.abs(intake.in_standard_errors!)).toBeLessThan(1.4);
+    expect(intake.parts!.revised / intake.difference!).toBeGreaterThan(0.5);
     expect(saving.in_standard_errors).toBeGreaterThan(0.8);
     expect(saving.in_standard_errors).toBeLessThan(1.4);
     expect(saving.parts!.revised / saving.difference!).toBeGreaterThan(0.5);
