@@ -41,6 +41,9 @@ export function fittedObservedChart(
 
 function agreement(lexicon: Lexicon, model: RecordModel): string {
   const miss = typicalMiss(lexicon, model.residual_standard_error);
+  // On the log scale the miss is a share of the response itself.
+  const { response } = lexicon;
+  const quantity = response.scale === 'log' ? response.label : fittedQuantity(response);
   if (miss === null) return 'On the line, observed and fitted values agree.';
-  return `${raised(fittedQuantity(lexicon.response))} as observed lies typically ${miss} from what the model says; on the line they agree.`;
+  return `${raised(quantity)} as observed lies typically ${miss} from what the model says; on the line they agree.`;
 }

@@ -142,7 +142,8 @@ function neighbourCaption(ordered: readonly number[], thinned: boolean): string 
       : r > 0
         ? 'Neighbours in time resemble each other'
         : 'Neighbours in time tend to opposite sides';
-  return `${words}: each residual’s correlation with the one before is ${fixed(r, 2)}.`;
+  // The finding beside the chart has the figure.
+  return `${words}.`;
 }
 
 /** Residuals against the model's variable that their size goes with most; null where there is none. */

@@ -16,7 +16,9 @@ export function dataView(record: StudyRecord): SourceView {
     dates: dateRange(data),
     rowsRead: count(data.rows_read),
     rowsUsed: count(data.rows_used),
-    losses: data.left_out.map((loss) => ({ rows: count(loss.rows), because: stopped(lossReason(loss)) })),
+    losses: data.left_out
+      .filter((loss) => loss.rows > 0 || loss.kind === 'left_out')
+      .map((loss) => ({ rows: count(loss.rows), because: stopped(lossReason(loss)) })),
     variables: data.variables.filter((v) => !idle.includes(v)).map(variableView),
     unused: idle.length === 0 ? null : `Declared but not used: ${listed(idle.map((v) => v.name))}.`,
     contract: contractSentence(data),

@@ -29,7 +29,10 @@ export function slopesAlongSentences(lexicon: Lexicon, term: RecordTerm, model: 
   }
   const [low, high] = [places[0]!, places.at(-1)!];
   if (low === high) return [];
+  // Below a bend the slope is nothing at all, not a small figure.
+  const told = (place: typeof low): string =>
+    place.estimate === 0 ? 'no difference' : shortEffect(lexicon, place);
   return [
-    `${raised(subject)} goes with ${shortEffect(lexicon, low)} near ${at(low.at)} and ${shortEffect(lexicon, high)} near ${at(high.at)}${held}.`,
+    `${raised(subject)} goes with ${told(low)} near ${at(low.at)} and ${told(high)} near ${at(high.at)}${held}.`,
   ];
 }
