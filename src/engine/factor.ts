@@ -18,8 +18,8 @@ export interface Factor {
   readonly scales: Float64Array;
 }
 
-/** Rows in a block: with some twenty columns it stays in the first-level cache's neighbourhood. */
-const BLOCK = 256;
+/** Rows in a block: with some twenty columns it stays in the second-level cache. */
+const BLOCK = 512;
 
 /** Multiplications (n · m²) up to which the factor is worked out in double-double: a tenth of a second or so. */
 export const EXTENDED_BUDGET = 6e6;
@@ -85,8 +85,8 @@ export function mergeFactors(a: Factor, b: Factor): Factor {
 const NOTHING = 1e-290;
 
 /**
- * Takes a block of rows into R by Householder reflections of [R; B], two reflections at a time over two
- * columns at a time, which halves the traffic to memory. B is destroyed. The diagonal of R comes out ≥ 0.
+ * Takes a block of rows into R by Householder reflections of [R; B], two reflections at a time over four
+ * columns at a time, which spares most of the traffic to memory. B is destroyed. The diagonal of R comes out ≥ 0.
  *
  * @param r m × m upper triangle, column-major
  * @param b rows × m block, column-major with the given stride
@@ -136,41 +136,65 @@ export function absorb(r: Float64Array, m: number, b: Float64Array, stride: numb
     }
 
     let k = j + 2;
-    for (; k + 1 < m; k += 2) {
+    for (; k + 3 < m; k += 4) {
       const p = k * stride;
       const q = p + stride;
+      const t = q + stride;
+      const u = t + stride;
       let p1 = 0;
       let p2 = 0;
       let q1 = 0;
       let q2 = 0;
+      let t1 = 0;
+      let t2 = 0;
+      let u1 = 0;
+      let u2 = 0;
       for (let i = 0; i < rows; i++) {
         const v = b[first + i]!;
         const w = b[second + i]!;
-        const x = b[p + i]!;
-        const y = b[q + i]!;
-        p1 += v * x;
-        p2 += w * x;
-        q1 += v * y;
-        q2 += w * y;
+        const bp = b[p + i]!;
+        const bq = b[q + i]!;
+        const bt = b[t + i]!;
+        const bu = b[u + i]!;
+        p1 += v * bp;
+        p2 += w * bp;
+        q1 += v * bq;
+        q2 += w * bq;
+        t1 += v * bt;
+        t2 += w * bt;
+        u1 += v * bu;
+        u2 += w * bu;
       }
       const rp = k * m + j;
       const rq = rp + m;
+      const rt = rq + m;
+      const ru = rt + m;
       p1 = (p1 + head * r[rp]!) * factor;
       q1 = (q1 + head * r[rq]!) * factor;
+      t1 = (t1 + head * r[rt]!) * factor;
+      u1 = (u1 + head * r[ru]!) * factor;
       r[rp]! -= p1 * head;
       r[rq]! -= q1 * head;
+      r[rt]! -= t1 * head;
+      r[ru]! -= u1 * head;
       p2 = (p2 - p1 * cross + head2 * r[rp + 1]!) * factor2;
       q2 = (q2 - q1 * cross + head2 * r[rq + 1]!) * factor2;
+      t2 = (t2 - t1 * cross + head2 * r[rt + 1]!) * factor2;
+      u2 = (u2 - u1 * cross + head2 * r[ru + 1]!) * factor2;
       r[rp + 1]! -= p2 * head2;
       r[rq + 1]! -= q2 * head2;
+      r[rt + 1]! -= t2 * head2;
+      r[ru + 1]! -= u2 * head2;
       for (let i = 0; i < rows; i++) {
         const v = b[first + i]!;
         const w = b[second + i]!;
         b[p + i] = b[p + i]! - p1 * v - p2 * w;
         b[q + i] = b[q + i]! - q1 * v - q2 * w;
+        b[t + i] = b[t + i]! - t1 * v - t2 * w;
+        b[u + i] = b[u + i]! - u1 * v - u2 * w;
       }
     }
-    if (k < m) {
+    for (; k < m; k++) {
       const p = k * stride;
       let p1 = 0;
       let p2 = 0;

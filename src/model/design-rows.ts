@@ -122,7 +122,7 @@ function columnWriter(column: DesignColumn, source: DesignSource): Writer {
 
 function copyWriter(values: Float64Array): Writer {
   return (from, to, hi, _lo, at) => {
-    for (let i = from; i < to; i++) hi[at + i - from] = values[i]!;
+    hi.set(values.subarray(from, to), at);
   };
 }
 
