@@ -8,7 +8,7 @@ export interface DependencyPart {
 }
 
 /** Parts below this share of the dependent column are rounding. */
-const NEGLIGIBLE = 1e-9;
+const NEGLIGIBLE = 1e-7;
 
 /**
  * "total equals laden + empty in these rows"; "cargo is 3 in every row used"; "b is within 0.002 % of 2 × a − 5".
