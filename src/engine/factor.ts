@@ -81,6 +81,27 @@ export function mergeFactors(a: Factor, b: Factor): Factor {
   return { ...a, rowCount: a.rowCount + b.rowCount, triangle };
 }
 
+/**
+ * The listed columns of R side by side, `height` rows each, to be triangularised again.
+ * @param extended in the factor's own arithmetic, or (false) rounded to doubles
+ */
+export function columnsOf(
+  factor: Factor,
+  columns: readonly number[],
+  height: number,
+  extended = factor.triangle.lo !== null,
+): Matrix {
+  const source = factor.triangle;
+  const work = matrix(height, columns.length, extended);
+  for (let j = 0; j < columns.length; j++) {
+    const from = columns[j]! * source.stride;
+    const top = Math.min(columns[j]! + 1, height);
+    for (let i = 0; i < top; i++) work.hi[j * height + i] = source.hi[from + i]!;
+    if (work.lo !== null) for (let i = 0; i < top; i++) work.lo[j * height + i] = source.lo![from + i]!;
+  }
+  return work;
+}
+
 /** Squares of a column below this are nothing beside its scaled magnitude. */
 const NOTHING = 1e-290;
 

@@ -1,7 +1,7 @@
 import type { CandidateModel } from '../model/design.ts';
 import { conditionIndex } from './condition-number.ts';
 import { dependencySentence } from './dependency.ts';
-import type { Factor } from './factor.ts';
+import { columnsOf, type Factor } from './factor.ts';
 import type { DependentColumn, Fit } from './fit.ts';
 import { backSubstitute, columnNorm, eliminate, type Matrix, matrix } from './kernel.ts';
 
@@ -181,19 +181,6 @@ export function logLikelihood(n: number, rss: number, facts: RowFacts, response:
 /** Whether RSS is not even the rounding of the response's own decimals, Σ w y² being its size. */
 export function isExact(rss: number, size: number): boolean {
   return rss <= 1e-27 * size;
-}
-
-/** The listed columns of R side by side, `height` rows each. */
-function columnsOf(factor: Factor, columns: readonly number[], height: number): Matrix {
-  const source = factor.triangle;
-  const work = matrix(height, columns.length, source.lo !== null);
-  for (let j = 0; j < columns.length; j++) {
-    const from = columns[j]! * source.stride;
-    const top = Math.min(columns[j]! + 1, height);
-    for (let i = 0; i < top; i++) work.hi[j * height + i] = source.hi[from + i]!;
-    if (source.lo !== null) for (let i = 0; i < top; i++) work.lo![j * height + i] = source.lo[from + i]!;
-  }
-  return work;
 }
 
 function copyTop(from: Matrix, column: number, to: Matrix, target: number, count: number): void {

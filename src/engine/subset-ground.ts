@@ -1,6 +1,6 @@
-import type { Factor } from './factor.ts';
+import { columnsOf, type Factor } from './factor.ts';
 import { dependentShare } from './fit-candidate.ts';
-import { columnNorm, eliminate, type Matrix, matrix } from './kernel.ts';
+import { columnNorm, eliminate } from './kernel.ts';
 import type { SubsetGroup, SubsetSearch } from './subset-search.ts';
 import { type OpenTriangle, openColumns } from './subset-triangle.ts';
 
@@ -60,7 +60,7 @@ export function subsetGround(factor: Factor, search: SubsetSearch): SubsetGround
   });
 
   const lengths = Float64Array.from(columns, (column) => columnNorm(factor.triangle, column, 0, column + 1));
-  const work = columnsOf(factor, [...always, ...columns, responseAt], height);
+  const work = columnsOf(factor, [...always, ...columns, responseAt], height, false);
   const { open, rank } = openColumns(
     work,
     height,
@@ -99,7 +99,7 @@ function independent(
   columns: readonly number[],
 ): number[] {
   const all = [...base, ...columns.filter((column) => !base.includes(column))];
-  const work = columnsOf(factor, all, height);
+  const work = columnsOf(factor, all, height, false);
   const kept: number[] = [];
   let rank = 0;
   all.forEach((column, j) => {
@@ -117,21 +117,11 @@ function independent(
 
 function ownLog(factor: Factor, height: number, intercept: boolean, columns: readonly number[]): number {
   const all = intercept ? [0, ...columns] : columns;
-  const work = columnsOf(factor, all, height);
+  const work = columnsOf(factor, all, height, false);
   let log = 0;
   all.forEach((_, j) => {
     eliminate(work, j, j, height, all.length);
     if (j > 0 || !intercept) log += 2 * Math.log(Math.abs(work.hi[j * height + j]!));
   });
   return log;
-}
-
-/** The listed columns of R side by side, in double arithmetic. */
-function columnsOf(factor: Factor, columns: readonly number[], height: number): Matrix {
-  const { hi, stride } = factor.triangle;
-  const work = matrix(height, columns.length, false);
-  columns.forEach((column, j) => {
-    for (let i = 0; i < Math.min(column + 1, height); i++) work.hi[j * height + i] = hi[column * stride + i]!;
-  });
-  return work;
 }

@@ -1,6 +1,6 @@
-import { EXTENDED_BUDGET, type Factor, factorExtended, factorRows } from '../engine/factor.ts';
+import { columnsOf, EXTENDED_BUDGET, type Factor, factorExtended, factorRows } from '../engine/factor.ts';
 import { dependentShare } from '../engine/fit-candidate.ts';
-import { columnNorm, eliminate, matrix } from '../engine/kernel.ts';
+import { columnNorm, eliminate } from '../engine/kernel.ts';
 import type { DesignRows } from '../model/design-rows.ts';
 
 /** Writes rows from…to−1 of a column that is computed, not read, at `at`. */
@@ -64,13 +64,7 @@ export function regress(factor: Factor, columns: readonly number[], response = 0
   const at = predictorCount + response;
   const height = at + 1;
   const order = [...columns, at];
-  const work = matrix(height, order.length, triangle.lo !== null);
-  order.forEach((column, j) => {
-    const from = column * triangle.stride;
-    const to = from + column + 1;
-    work.hi.set(triangle.hi.subarray(from, to), j * height);
-    if (triangle.lo !== null) work.lo!.set(triangle.lo.subarray(from, to), j * height);
-  });
+  const work = columnsOf(factor, order, height);
   let rank = 0;
   columns.forEach((column, j) => {
     const end = column + 1;
