@@ -1,7 +1,7 @@
 import type { Fit } from '../engine/fit.ts';
 import { FULL_LEVERAGE } from '../engine/row-figures.ts';
 import { normalQuantile } from '../stats/distributions.ts';
-import { type Random, randomFrom } from '../stats/random.ts';
+import { randomFrom } from '../stats/random.ts';
 import { type Chosen, standardisedResidual } from './chosen.ts';
 import { orthonormalRows } from './orthonormal-design.ts';
 
@@ -83,33 +83,54 @@ function envelope(
     for (let j = 0; j < p; j++) h += q[j * n + i]! ** 2;
     spread[i] = h > FULL_LEVERAGE ? 0 : Math.sqrt(1 - h);
   }
-  const random = randomFrom(SEED);
-  const drawn = ranks.map(() => new Float64Array(SIMULATIONS));
+  const errors = normalNumbers(SIMULATIONS * n);
+  // Of each rank only the outermost of all drawings are needed: the OUTSIDE smallest, ascending, and as many largest, descending.
+  const low = new Float64Array(ranks.length * OUTSIDE).fill(Number.POSITIVE_INFINITY);
+  const high = new Float64Array(ranks.length * OUTSIDE).fill(Number.NEGATIVE_INFINITY);
   const e = new Float64Array(n);
   const z = new Float64Array(m);
   for (let simulation = 0; simulation < SIMULATIONS; simulation++) {
-    for (let i = 0; i < n; i++) e[i] = normal(random);
+    e.set(errors.subarray(simulation * n, (simulation + 1) * n));
     for (let j = 0; j < p; j++) {
+      const column = q.subarray(j * n, (j + 1) * n);
       let dot = 0;
-      for (let i = j * n; i < (j + 1) * n; i++) dot += q[i]! * e[i - j * n]!;
-      for (let i = 0; i < n; i++) e[i]! -= dot * q[j * n + i]!;
+      for (let i = 0; i < n; i++) dot += column[i]! * e[i]!;
+      for (let i = 0; i < n; i++) e[i]! -= dot * column[i]!;
     }
     let squares = 0;
-    for (const value of e) squares += value * value;
+    for (let i = 0; i < n; i++) squares += e[i]! * e[i]!;
     const s = Math.sqrt(squares / fit.degreesOfFreedom);
     let k = 0;
     for (let i = 0; i < n && k < m; i++) if (spread[i]! > 0) z[k++] = e[i]! / (s * spread[i]!);
     z.sort();
-    for (const [r, rank] of ranks.entries()) drawn[r]![simulation] = z[rank]!;
+    for (let r = 0; r < ranks.length; r++) {
+      const value = z[ranks[r]!]!;
+      keepOutermost(low, r * OUTSIDE, value, 1);
+      keepOutermost(high, r * OUTSIDE, value, -1);
+    }
   }
-  for (const values of drawn) values.sort();
-  return {
-    lower: drawn.map((values) => values[OUTSIDE - 1]!),
-    upper: drawn.map((values) => values[SIMULATIONS - OUTSIDE]!),
-  };
+  const innermost = (kept: Float64Array) => ranks.map((_, r) => kept[(r + 1) * OUTSIDE - 1]!);
+  return { lower: innermost(low), upper: innermost(high) };
 }
 
-/** A standard normal number by inversion: 0 cannot come out of it. */
-function normal(random: Random): number {
-  return normalQuantile(Math.max(random.next(), 2 ** -54));
+/** Puts a value among the OUTSIDE kept from `start` on, where it belongs there; `sign` 1 keeps the smallest, −1 the largest. */
+function keepOutermost(kept: Float64Array, start: number, value: number, sign: 1 | -1): void {
+  let place = start + OUTSIDE - 1;
+  if (sign * value >= sign * kept[place]!) return;
+  for (; place > start && sign * value < sign * kept[place - 1]!; place--) kept[place] = kept[place - 1]!;
+  kept[place] = value;
 }
+
+/**
+ * The first standard normal numbers of the seed, by inversion, which 0 cannot come out of. They are kept: a study that repeats
+ * asks for the same ones in every run, and making them costs more than what is done with them.
+ */
+function normalNumbers(count: number): Float64Array {
+  if (known.length < count) {
+    const random = randomFrom(SEED);
+    known = Float64Array.from({ length: count }, () => normalQuantile(Math.max(random.next(), 2 ** -54)));
+  }
+  return known;
+}
+
+let known: Float64Array = new Float64Array(0);

@@ -7,9 +7,10 @@
  * throws with its path.
  */
 export function jsonText(value: unknown, schema: SchemaNode): string {
-  const lines: string[] = [];
-  write(value, schema, { root: schema, lines, path: [] }, '', '');
-  return `${lines.join('\n')}\n`;
+  const output: Output = { root: schema, parts: [], path: [] };
+  write(value, schema, output, '\n');
+  output.parts.push('\n');
+  return output.parts.join('');
 }
 
 /** As much of a JSON Schema as the order of keys needs. */
@@ -23,7 +24,7 @@ export interface SchemaNode {
 
 interface Output {
   readonly root: SchemaNode;
-  readonly lines: string[];
+  readonly parts: string[];
   readonly path: (string | number)[];
 }
 
@@ -33,100 +34,91 @@ const SHORT = 40;
 type Primitive = string | number | boolean | null;
 
 function isPrimitive(value: unknown): value is Primitive {
-  return value === null || ['string', 'number', 'boolean'].includes(typeof value);
+  return (
+    value === null || typeof value === 'number' || typeof value === 'string' || typeof value === 'boolean'
+  );
 }
 
-/** Appends lines: `lead` goes before the value's first line, `indent` before its further ones. */
-function write(value: unknown, schema: SchemaNode | undefined, output: Output, lead: string, indent: string) {
-  const node = resolve(schema, output.root);
+/** Appends the value's text; `line` begins a further line of it. */
+function write(value: unknown, schema: SchemaNode | undefined, output: Output, line: string) {
   if (isPrimitive(value)) {
-    output.lines.push(lead + primitive(value, output));
+    output.parts.push(primitive(value, output));
   } else if (Array.isArray(value)) {
-    writeList(value, node?.items, output, lead, indent);
+    writeList(value, structureOf(schema, output.root)?.items, output, line);
   } else if (typeof value === 'object' && value !== null) {
-    writeObject(value as { [key: string]: unknown }, node, output, lead, indent);
+    writeObject(value as { [key: string]: unknown }, structureOf(schema, output.root), output, line);
   } else {
     throw new TypeError(`${output.path.join('.')} has no JSON form.`);
   }
 }
 
-function writeList(
-  list: readonly unknown[],
-  items: SchemaNode | undefined,
-  output: Output,
-  lead: string,
-  indent: string,
-) {
+function writeList(list: readonly unknown[], items: SchemaNode | undefined, output: Output, line: string) {
+  const { parts } = output;
   if (list.every((item) => isPrimitive(item) && (typeof item !== 'string' || item.length <= SHORT))) {
-    const parts = (list as readonly Primitive[]).map((item) => primitive(item, output));
-    output.lines.push(`${lead}[${parts.join(', ')}]`);
+    for (let k = 0; k < list.length; k++)
+      parts.push(k === 0 ? '[' : ', ', primitive(list[k] as Primitive, output));
+    parts.push(list.length === 0 ? '[]' : ']');
     return;
   }
-  output.lines.push(`${lead}[`);
-  const inner = `${indent}  `;
-  list.forEach((item, index) => {
-    output.path.push(index);
-    write(item, items, output, inner, inner);
+  const inner = `${line}  `;
+  for (let k = 0; k < list.length; k++) {
+    parts.push(k === 0 ? '[' : ',', inner);
+    output.path.push(k);
+    write(list[k], items, output, inner);
     output.path.pop();
-    if (index < list.length - 1) endWithComma(output.lines);
-  });
-  output.lines.push(`${indent}]`);
+  }
+  parts.push(line, ']');
 }
 
 function writeObject(
   value: { readonly [key: string]: unknown },
   node: SchemaNode | undefined,
   output: Output,
-  lead: string,
-  indent: string,
+  line: string,
 ) {
-  const keys = orderedKeys(value, node);
-  if (keys.length === 0) {
-    output.lines.push(`${lead}{}`);
-    return;
-  }
-  output.lines.push(`${lead}{`);
-  const inner = `${indent}  `;
-  keys.forEach((key, index) => {
+  const { parts } = output;
+  const inner = `${line}  `;
+  let first = true;
+  for (const key of orderedKeys(value, node)) {
+    parts.push(first ? '{' : ',', inner, JSON.stringify(key), ': ');
+    first = false;
     output.path.push(key);
-    const child = node?.properties !== undefined && Object.hasOwn(node.properties, key);
-    write(
-      value[key],
-      child ? node.properties?.[key] : undefined,
-      output,
-      `${inner}${JSON.stringify(key)}: `,
-      inner,
-    );
+    write(value[key], childOf(node, key), output, inner);
     output.path.pop();
-    if (index < keys.length - 1) endWithComma(output.lines);
-  });
-  output.lines.push(`${indent}}`);
+  }
+  if (first) parts.push('{}');
+  else parts.push(line, '}');
+}
+
+function childOf(node: SchemaNode | undefined, key: string): SchemaNode | undefined {
+  const { properties } = node ?? {};
+  return properties !== undefined && Object.hasOwn(properties, key) ? properties[key] : undefined;
 }
 
 /** Keys that the schema knows, in its order; then the rest in code-point order. Absent (undefined) keys are left out. */
 function orderedKeys(value: { readonly [key: string]: unknown }, node: SchemaNode | undefined): string[] {
-  const known = Object.keys(node?.properties ?? {});
-  const present = Object.keys(value).filter((key) => value[key] !== undefined);
-  const rest = present.filter((key) => !known.includes(key)).sort();
-  return [...known.filter((key) => Object.hasOwn(value, key) && value[key] !== undefined), ...rest];
-}
-
-function endWithComma(lines: string[]) {
-  lines[lines.length - 1] += ',';
+  const properties = node?.properties ?? {};
+  const keys = Object.keys(properties).filter((key) => Object.hasOwn(value, key) && value[key] !== undefined);
+  const rest = Object.keys(value).filter(
+    (key) => value[key] !== undefined && !Object.hasOwn(properties, key),
+  );
+  return rest.length === 0 ? keys : [...keys, ...rest.sort()];
 }
 
 function primitive(value: Primitive, output: Output): string {
-  if (typeof value === 'number' && !Number.isFinite(value)) {
+  if (typeof value !== 'number') return JSON.stringify(value);
+  if (!Number.isFinite(value)) {
     throw new TypeError(`${output.path.join('.')} is ${value}, which has no JSON form.`);
   }
-  return JSON.stringify(value);
+  // The same digits as JSON.stringify, which writes −0 as 0 too.
+  return String(value);
 }
 
 /** Follows `$ref` into `$defs`, and `anyOf` to the alternative that has a structure. */
-function resolve(schema: SchemaNode | undefined, root: SchemaNode): SchemaNode | undefined {
-  if (schema?.$ref !== undefined) return resolve(root.$defs?.[schema.$ref.replace('#/$defs/', '')], root);
+function structureOf(schema: SchemaNode | undefined, root: SchemaNode): SchemaNode | undefined {
+  if (schema?.$ref !== undefined) return structureOf(root.$defs?.[schema.$ref.replace('#/$defs/', '')], root);
   if (schema?.anyOf !== undefined) {
-    const alternatives = schema.anyOf.map((alternative) => resolve(alternative, root));
+    const alternatives = schema.anyOf.map((alternative) => structureOf(alternative, root));
     return alternatives.find((node) => node?.properties !== undefined || node?.items !== undefined);
   }
   return schema;

@@ -25,8 +25,18 @@ export function escaped(text: string): string {
 /** A coordinate with one decimal; a number that is not finite throws, since it means a fault of ours. */
 export function at(x: number): string {
   if (!Number.isFinite(x)) throw new Error('A drawing was given a coordinate that is not a number.');
-  // Adding 0 takes the sign off −0; this is called for every dot and is several times quicker than toFixed.
-  return String(Math.round(x * 10) / 10 + 0);
+  return tenths(Math.round(x * 10));
+}
+
+/** Texts of the tenths from 0 on: a report asks for the same few thousand tens of thousands of times. */
+const TENTHS: string[] = [];
+const MOST_TENTHS = 8192;
+
+function tenths(k: number): string {
+  // Adding 0 takes the sign off −0, and is several times quicker than toFixed.
+  if (!(k >= 0 && k < MOST_TENTHS)) return String(k / 10 + 0);
+  for (let next = TENTHS.length; next <= k; next++) TENTHS.push(String(next / 10));
+  return TENTHS[k]!;
 }
 
 type Attributes = Readonly<Record<string, string | number | null>>;
@@ -76,9 +86,16 @@ export function drawing(
  * Dots that fall on one another at a tenth of a unit are drawn once.
  */
 export function dots(points: readonly (readonly [number, number])[], className: string): string {
-  const seen = new Set<string>();
+  const seen = new Set<number>();
+  let path = '';
   for (const [x, y] of points) {
-    if (Number.isFinite(x) && Number.isFinite(y)) seen.add(`M${at(x)} ${at(y)}h0`);
+    if (!Number.isFinite(x) || !Number.isFinite(y)) continue;
+    const [kx, ky] = [Math.round(x * 10), Math.round(y * 10)];
+    // One number for both, exact for whatever lies within a thousand drawings of this one.
+    const place = kx * 2 ** 26 + ky;
+    if (seen.has(place)) continue;
+    seen.add(place);
+    path += `M${tenths(kx)} ${tenths(ky)}h0`;
   }
-  return seen.size === 0 ? '' : `<path class="${className}" d="${[...seen].join('')}"/>`;
+  return path === '' ? '' : `<path class="${className}" d="${path}"/>`;
 }
