@@ -50,14 +50,23 @@ export function factorRows(
   };
 }
 
-/** The factor of all rows in double-double: about 31 digits. Holds the whole block, so for small work only. */
-export function factorExtended(rows: DesignRows): Factor {
+/**
+ * The factor of all rows in double-double: about 31 digits. Holds the whole block, so for small work only.
+ * @param earlier an extended factor of other rows of the same design and scales, to which these are added; null for none
+ */
+export function factorExtended(rows: DesignRows, earlier: Factor | null = null): Factor {
   const m = rows.width;
   const n = rows.rowCount;
-  const height = Math.max(n, m);
+  const top = earlier === null ? 0 : m;
+  const height = Math.max(top + n, m);
   const work = matrix(height, m, true);
   const all = Array.from({ length: m }, (_, j) => j);
-  rows.fill(all, 0, n, height, work.hi, work.lo);
+  for (let j = 0; j < top; j++) {
+    const { hi, lo } = earlier!.triangle;
+    work.hi.set(hi.subarray(j * m, j * m + j + 1), j * height);
+    work.lo!.set(lo!.subarray(j * m, j * m + j + 1), j * height);
+  }
+  rows.fill(all, 0, n, height, work.hi.subarray(top), work.lo!.subarray(top));
   for (let j = 0; j < m; j++) eliminate(work, j, j, height, m);
   const triangle = matrix(m, m, true);
   for (let j = 0; j < m; j++) {
@@ -66,7 +75,13 @@ export function factorExtended(rows: DesignRows): Factor {
       triangle.lo![j * m + i] = work.lo![j * height + i]!;
     }
   }
-  return { width: m, predictorCount: rows.predictorCount, rowCount: n, triangle, scales: rows.scales };
+  return {
+    width: m,
+    predictorCount: rows.predictorCount,
+    rowCount: n + (earlier?.rowCount ?? 0),
+    triangle,
+    scales: rows.scales,
+  };
 }
 
 /**

@@ -44,8 +44,8 @@ export interface Around {
 }
 
 const MOST_ROWS = 10;
-/** Multiplications up to which the factors without single rows are worked out in double-double. */
-const EXTENDED_WORK = 1e7;
+/** Rows × columns² up to which the factors without single rows are worked out in double-double. */
+const EXTENDED_WORK = 1e6;
 /** Candidates × rows × columns³ up to which every candidate is fitted again. */
 const REFIT_WORK = 1e9;
 /** Rows × columns², over candidates and rows left out, up to which PRESS is worked out again. */
@@ -147,9 +147,19 @@ function choicesWithout(
 /** The factor of all rows but one, for each of some rows. */
 function factorsWithout(rows: DesignRows, left: readonly number[], extendedWork: number): Factor[] {
   const n = rows.rowCount;
-  if (n * rows.width ** 2 * left.length <= extendedWork)
-    return left.map((row) => factorExtended(allBut(rows, row)));
   const cuts = [...left].sort((a, b) => a - b);
+  if (n * rows.width ** 2 <= extendedWork) {
+    const common = factorExtended(allBut(rows, cuts));
+    return left.map((row) =>
+      factorExtended(
+        theseRows(
+          rows,
+          cuts.filter((cut) => cut !== row),
+        ),
+        common,
+      ),
+    );
+  }
   const between = [-1, ...cuts].map((cut, k) => factorRows(rows, cut + 1, cuts[k] ?? n));
   const single = new Map(cuts.map((cut) => [cut, factorRows(rows, cut, cut + 1)]));
   const common = between.reduce(mergeFactors);
@@ -158,12 +168,16 @@ function factorsWithout(rows: DesignRows, left: readonly number[], extendedWork:
   );
 }
 
-function allBut(rows: DesignRows, row: number): DesignRows {
-  return rowsAt(
+function allBut(rows: DesignRows, left: readonly number[]): DesignRows {
+  const gone = new Set(left);
+  return theseRows(
     rows,
-    Int32Array.from({ length: rows.rowCount - 1 }, (_, i) => (i < row ? i : i + 1)),
-    null,
+    Array.from({ length: rows.rowCount }, (_, i) => i).filter((i) => !gone.has(i)),
   );
+}
+
+function theseRows(rows: DesignRows, index: readonly number[]): DesignRows {
+  return rowsAt(rows, Int32Array.from(index), null);
 }
 
 function contextWithout(
@@ -181,7 +195,7 @@ function contextWithout(
   };
   const fits = fitted.fits.map((fit) => fitCandidate(factor, fit.candidate, facts, 'no condition number'));
   const { rankBy } = chosen.study.selection;
-  const kept = rankBy === 'press' ? allBut(rows, row) : null;
+  const kept = rankBy === 'press' ? allBut(rows, [row]) : null;
   return {
     fits,
     press: fits.map((fit) => (kept === null || fit.degreesOfFreedom < 1 ? null : press(fit, kept))),
