@@ -3,7 +3,7 @@ import type { ComparedSide } from '../compare/compare.ts';
 import type { Comparison } from '../compare/comparison.ts';
 import type { Problem, Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
-import { recordText } from '../record/record-text.ts';
+import { recordPieces } from '../record/record-text.ts';
 import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
 import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
 import { type ReadStudy, type RunOptions, type RunResult, runRead } from '../run.ts';
@@ -115,7 +115,7 @@ async function resultFiles(
   report: (problem: Problem) => void,
 ): Promise<ResultFile[]> {
   return [
-    { name: 'record.json', content: recordText(record) },
+    { name: 'record.json', content: recordPieces(record) },
     ...(await reportFiles(record, record.study.report.formats, templatesOf(record, folder), report)),
     { name: 'tables/candidates.csv', content: candidatesTable(record) },
     { name: 'tables/coefficients.csv', content: coefficientsTable(record) },

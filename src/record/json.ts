@@ -7,10 +7,19 @@
  * throws with its path.
  */
 export function jsonText(value: unknown, schema: SchemaNode): string {
-  const output: Output = { root: schema, parts: [], path: [] };
+  return jsonPieces(value, schema).join('');
+}
+
+/**
+ * The same text in pieces, one after the other. A string of some hundred thousand characters costs several times what its
+ * pieces cost, since each is given memory of its own by the system: what is only to be written is better left in pieces.
+ */
+export function jsonPieces(value: unknown, schema: SchemaNode): string[] {
+  const output: Output = { root: schema, pieces: [], parts: [], length: 0, path: [] };
   write(value, schema, output, '\n');
-  output.parts.push('\n');
-  return output.parts.join('');
+  put(output, '\n');
+  endPiece(output);
+  return output.pieces;
 }
 
 /** As much of a JSON Schema as the order of keys needs. */
@@ -24,8 +33,26 @@ export interface SchemaNode {
 
 interface Output {
   readonly root: SchemaNode;
-  readonly parts: string[];
+  readonly pieces: string[];
+  /** Of the piece that is being made. */
+  parts: string[];
+  length: number;
   readonly path: (string | number)[];
+}
+
+/** Characters of a piece. */
+const PIECE = 30_000;
+
+function put(output: Output, text: string): void {
+  output.parts.push(text);
+  output.length += text.length;
+  if (output.length >= PIECE) endPiece(output);
+}
+
+function endPiece(output: Output): void {
+  output.pieces.push(output.parts.join(''));
+  output.parts = [];
+  output.length = 0;
 }
 
 /** Longest text that may share a line with others of its list. */
@@ -42,7 +69,7 @@ function isPrimitive(value: unknown): value is Primitive {
 /** Appends the value's text; `line` begins a further line of it. */
 function write(value: unknown, schema: SchemaNode | undefined, output: Output, line: string) {
   if (isPrimitive(value)) {
-    output.parts.push(primitive(value, output));
+    put(output, primitive(value, output));
   } else if (Array.isArray(value)) {
     writeList(value, structureOf(schema, output.root)?.items, output, line);
   } else if (typeof value === 'object' && value !== null) {
@@ -53,21 +80,23 @@ function write(value: unknown, schema: SchemaNode | undefined, output: Output, l
 }
 
 function writeList(list: readonly unknown[], items: SchemaNode | undefined, output: Output, line: string) {
-  const { parts } = output;
+  if (list.every((item) => item === null || Number.isFinite(item))) {
+    // Most of a record are long lists of numbers, which are written several times faster at once.
+    put(output, JSON.stringify(list).replace(/,/g, ', '));
+    return;
+  }
   if (list.every((item) => isPrimitive(item) && (typeof item !== 'string' || item.length <= SHORT))) {
-    for (let k = 0; k < list.length; k++)
-      parts.push(k === 0 ? '[' : ', ', primitive(list[k] as Primitive, output));
-    parts.push(list.length === 0 ? '[]' : ']');
+    put(output, `[${list.map((item) => primitive(item as Primitive, output)).join(', ')}]`);
     return;
   }
   const inner = `${line}  `;
   for (let k = 0; k < list.length; k++) {
-    parts.push(k === 0 ? '[' : ',', inner);
+    put(output, k === 0 ? `[${inner}` : `,${inner}`);
     output.path.push(k);
     write(list[k], items, output, inner);
     output.path.pop();
   }
-  parts.push(line, ']');
+  put(output, `${line}]`);
 }
 
 function writeObject(
@@ -76,18 +105,16 @@ function writeObject(
   output: Output,
   line: string,
 ) {
-  const { parts } = output;
   const inner = `${line}  `;
-  let first = true;
+  let before = '{';
   for (const key of orderedKeys(value, node)) {
-    parts.push(first ? '{' : ',', inner, JSON.stringify(key), ': ');
-    first = false;
+    put(output, `${before}${inner}${JSON.stringify(key)}: `);
+    before = ',';
     output.path.push(key);
     write(value[key], childOf(node, key), output, inner);
     output.path.pop();
   }
-  if (first) parts.push('{}');
-  else parts.push(line, '}');
+  put(output, before === '{' ? '{}' : `${line}}`);
 }
 
 function childOf(node: SchemaNode | undefined, key: string): SchemaNode | undefined {
@@ -106,12 +133,10 @@ function orderedKeys(value: { readonly [key: string]: unknown }, node: SchemaNod
 }
 
 function primitive(value: Primitive, output: Output): string {
-  if (typeof value !== 'number') return JSON.stringify(value);
-  if (!Number.isFinite(value)) {
+  if (typeof value === 'number' && !Number.isFinite(value)) {
     throw new TypeError(`${output.path.join('.')} is ${value}, which has no JSON form.`);
   }
-  // The same digits as JSON.stringify, which writes −0 as 0 too.
-  return String(value);
+  return JSON.stringify(value);
 }
 
 /** Follows `$ref` into `$defs`, and `anyOf` to the alternative that has a structure. */

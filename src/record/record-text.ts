@@ -1,11 +1,16 @@
-import { jsonText, type SchemaNode } from './json.ts';
+import { jsonPieces, type SchemaNode } from './json.ts';
 import type { StudyRecord } from './record.ts';
 import { recordSchema } from './record-schema.ts';
 
 /** The text of record.json: keys in the schema's order, full-precision numbers, the same bytes every time. */
 export function recordText(record: StudyRecord): string {
+  return recordPieces(record).join('');
+}
+
+/** The same text in pieces, for writing. */
+export function recordPieces(record: StudyRecord): string[] {
   schema ??= recordSchema();
-  return jsonText(record, schema);
+  return jsonPieces(record, schema);
 }
 
 /** Read once: a run over many levels writes a record for each. */
