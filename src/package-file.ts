@@ -15,5 +15,8 @@ export function packageUrl(name: string): URL {
 
 /** The version in package.json. */
 export function packageVersion(): string {
-  return (JSON.parse(packageFile('package.json')) as { version: string }).version;
+  version ??= (JSON.parse(packageFile('package.json')) as { version: string }).version;
+  return version;
 }
+
+let version: string | undefined;
