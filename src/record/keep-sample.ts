@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { createGzip } from 'node:zlib';
+import { createGzip, gzipSync } from 'node:zlib';
 import type { Column } from '../data/table.ts';
 import type { Sample } from '../prepare/sample.ts';
 import type { Study } from '../study/study.ts';
@@ -45,6 +45,26 @@ export async function keepSample(study: Study, sample: Sample): Promise<KeptSamp
     ...(sample.ids === null ? [] : [textWriter(sample.ids)]),
     ...columns.map(columnWriter),
   ];
+  const head = Buffer.from(`${header.join(',')}\n`);
+  const blocks = blocksOf(writers, sample.rowCount);
+  const { sha256, content } =
+    sample.rowCount <= BLOCK ? packed([head, ...blocks]) : await packing(head, blocks);
+  return { file: SAMPLE_FILE, sha256, content, rows };
+}
+
+type Packed = Pick<KeptSample, 'sha256' | 'content'>;
+
+/** What fits into one block, at once: streams cost more than the work. */
+function packed(parts: readonly Uint8Array[]): Packed {
+  const bytes = Buffer.concat(parts);
+  return {
+    sha256: createHash('sha256').update(bytes).digest('hex'),
+    content: [gzipSync(bytes, { level: COMPRESSION })],
+  };
+}
+
+/** Block by block, compressed while the next one is written. */
+async function packing(head: Uint8Array, blocks: Iterable<Uint8Array>): Promise<Packed> {
   const hash = createHash('sha256');
   const gzip = createGzip({ level: COMPRESSION });
   const content: Uint8Array[] = [];
@@ -57,13 +77,11 @@ export async function keepSample(study: Study, sample: Sample): Promise<KeptSamp
     hash.update(bytes);
     if (!gzip.write(bytes)) await new Promise((resolve) => gzip.once('drain', resolve));
   };
-  await send(Buffer.from(`${header.join(',')}\n`));
-  for (let from = 0; from < sample.rowCount; from += BLOCK) {
-    await send(blockOf(writers, from, Math.min(from + BLOCK, sample.rowCount)));
-  }
+  await send(head);
+  for (const block of blocks) await send(block);
   gzip.end();
   await ended;
-  return { file: SAMPLE_FILE, sha256: hash.digest('hex'), content, rows };
+  return { sha256: hash.digest('hex'), content };
 }
 
 /** What of a sample is kept: the declared variables that the study fits with. */
@@ -85,6 +103,12 @@ interface CellWriter {
 
 const COMMA = 44;
 const LINE_FEED = 10;
+
+function* blocksOf(writers: readonly CellWriter[], rowCount: number): Iterable<Uint8Array> {
+  for (let from = 0; from < rowCount; from += BLOCK) {
+    yield blockOf(writers, from, Math.min(from + BLOCK, rowCount));
+  }
+}
 
 function blockOf(writers: readonly CellWriter[], from: number, to: number): Buffer {
   const room = writers.reduce((sum, writer) => sum + writer.room(from, to) + 1, 0);

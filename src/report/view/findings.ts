@@ -12,7 +12,8 @@ import { type Lexicon, stopped } from '../words/lexicon.ts';
 interface Drawing {
   /** Names of the findings that it answers; it stands beside the first of them that found something. */
   readonly answers: readonly string[];
-  readonly figure: Figure | null;
+  /** Draws it; a drawing that is not shown is not made. */
+  readonly figure: () => Figure | null;
   /** Whether it is worth a look where nothing was found too. */
   readonly always: boolean;
 }
@@ -33,14 +34,14 @@ export function findingViews(
         for (const one of own) used.add(one);
         return findingView(
           finding,
-          own.flatMap(({ figure }) => figure ?? []),
+          own.flatMap(({ figure }) => figure() ?? []),
         );
       }),
   );
   return {
     findings,
     quiet: examination.findings.filter(({ concern }) => concern === 0).map(quietView),
-    pictures: drawings.flatMap((one) => (one.always && !used.has(one) && one.figure ? [one.figure] : [])),
+    pictures: drawings.flatMap((one) => (one.always && !used.has(one) ? (one.figure() ?? []) : [])),
   };
 }
 
@@ -49,34 +50,38 @@ function drawingsOf(lexicon: Lexicon, examination: RecordExamination): Drawing[]
   const each = residualsEachChart(lexicon, points);
   const scale = findings.find(({ name }) => name === 'response_scale');
   return [
-    { answers: ['shape', 'lack_of_fit', 'equal_spread', 'uneven_spread'], figure: each, always: true },
+    { answers: ['shape', 'lack_of_fit', 'equal_spread', 'uneven_spread'], figure: () => each, always: true },
     {
       answers: ['equal_spread', 'uneven_spread', 'response_scale'],
-      figure: residualsFittedChart(lexicon, points),
+      figure: () => residualsFittedChart(lexicon, points),
       always: true,
     },
     {
       answers: ['equal_spread', 'uneven_spread'],
-      figure: residualsPredictorChart(lexicon, points),
+      figure: () => residualsPredictorChart(lexicon, points),
       // Where each variable has a panel of its own, this one only adds what was found.
       always: each === null,
     },
     {
       answers: ['response_scale'],
-      figure: scale === undefined ? null : responsePowerChart(scale),
+      figure: () => (scale === undefined ? null : responsePowerChart(scale)),
       always: false,
     },
     {
       answers: ['independence', 'serial_correlation', 'drift', 'same_in_both_parts'],
-      figure: residualsTimeChart(lexicon, points),
+      figure: () => residualsTimeChart(lexicon, points),
       always: true,
     },
     {
       answers: ['normality', 'skewness_and_tails', 'outlying_rows'],
-      figure: quantilesChart(examination),
+      figure: () => quantilesChart(examination),
       always: true,
     },
-    { answers: ['influence', 'choice_without_a_row'], figure: influenceChart(examination), always: true },
+    {
+      answers: ['influence', 'choice_without_a_row'],
+      figure: () => influenceChart(examination),
+      always: true,
+    },
   ];
 }
 
