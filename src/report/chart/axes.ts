@@ -1,4 +1,3 @@
-import { extent } from 'd3-array';
 import { type ScaleLinear, scaleLinear } from 'd3-scale';
 import { fixed, scientific } from '../numbers.ts';
 import { clipped, element, label } from './svg.ts';
@@ -23,8 +22,14 @@ export function plotOf(height: number): Plot {
 
 /** Smallest and largest number; [0, 1] where there is none; widened where they are equal. Beyond 1e300 counts as without end. */
 export function spanOf(values: Iterable<number | null>): [number, number] {
-  const [low, high] = extent([...values].filter((v): v is number => v !== null && Math.abs(v) < 1e300));
-  if (low === undefined || high === undefined) return [0, 1];
+  let low = Number.POSITIVE_INFINITY;
+  let high = Number.NEGATIVE_INFINITY;
+  for (const value of values) {
+    if (value === null || !(Math.abs(value) < 1e300)) continue;
+    if (value < low) low = value;
+    if (value > high) high = value;
+  }
+  if (low > high) return [0, 1];
   // A span of a few last bits, or of subnormal numbers, has no ticks.
   if (high - low > Math.max(1e-290, 1e-13 * Math.max(Math.abs(low), Math.abs(high)))) return [low, high];
   const size = Math.max(Math.abs(low), Math.abs(high)) * 0.05;

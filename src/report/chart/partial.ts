@@ -40,11 +40,9 @@ export function partialChart(
           .map((x, i) => [x, curveAt(curve, x) + points.residual[i]!] as const)
           .filter(([x, y]) => Number.isFinite(x) && Number.isFinite(y));
   const plot = plotOf(HEIGHT);
-  const x = roomy(spanOf([...usable.map((p) => p.x), ...cloud.map((p) => p[0])]), [plot.left, plot.right]);
-  const y = roomy(spanOf([0, ...usable.flatMap((p) => [p.y, p.lower, p.upper]), ...cloud.map((p) => p[1])]), [
-    plot.bottom,
-    plot.top,
-  ]);
+  const x = roomy(spanOf(usable.map((p) => p.x).concat(cloud.map((p) => p[0]))), [plot.left, plot.right]);
+  const drawn: (number | null)[] = [0, ...usable.flatMap((p) => [p.y, p.lower, p.upper])];
+  const y = roomy(spanOf(drawn.concat(cloud.map((p) => p[1]))), [plot.bottom, plot.top]);
   const banded = usable.filter((p) => p.lower !== null && p.upper !== null);
   const band = area<(typeof usable)[number]>()
     .x((p) => x(p.x))

@@ -1,10 +1,10 @@
-import { quantileSorted } from 'd3-array';
 import { line } from 'd3-shape';
 import { rounded, roundingFor, withUnit } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { type Lexicon, labelOf, unitOf } from '../words/lexicon.ts';
 import { fittedUnit } from '../words/scale.ts';
 import { axisTitle, bottomAxis, leftAxis, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import { quantileOf } from './summary.ts';
 import { clipped, dots, drawing, element, type Figure } from './svg.ts';
 
 type Points = RecordExamination['points'];
@@ -97,10 +97,10 @@ export function middlesAlong(x: readonly number[], y: readonly number[]): Middle
       Math.floor(((b + 1) * order.length) / bins),
     );
     const middle = (values: readonly number[]): number =>
-      quantileSorted(
-        rows.map((i) => values[i]!).sort((p, q) => p - q),
+      quantileOf(
+        rows.map((i) => values[i]!),
         0.5,
-      ) as number;
+      );
     return { x: middle(x), y: middle(y) };
   });
 }

@@ -6,12 +6,14 @@ import { quantileSorted } from 'd3-array';
  */
 export function twoThirds(values: readonly number[]): number | null {
   if (values.length === 0) return null;
-  return (
-    quantileSorted(
-      values.map(Math.abs).sort((a, b) => a - b),
-      2 / 3,
-    ) ?? null
-  );
+  return quantileOf(values.map(Math.abs), 2 / 3);
+}
+
+/** The quantile of numbers in any order; NaN for none. */
+export function quantileOf(values: readonly number[], share: number): number {
+  // A typed array sorts by itself, several times quicker than by a comparison of ours.
+  const sorted: ArrayLike<number> = Float64Array.from(values).sort();
+  return quantileSorted(sorted as number[], share) ?? Number.NaN;
 }
 
 /** Product-moment correlation; null where either side does not vary or there are fewer than three pairs. */
