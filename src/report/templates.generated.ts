@@ -2573,8 +2573,8 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"dependencies"),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":50,"column":0},"end":{"line":73,"column":7}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"drawnAgain"),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":74,"column":0},"end":{"line":84,"column":7}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":85,"column":0},"end":{"line":103,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"if","hash":{},"fn":container.program(25, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":104,"column":0},"end":{"line":113,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"if","hash":{},"fn":container.program(28, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":114,"column":0},"end":{"line":123,"column":7}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"if","hash":{},"fn":container.program(26, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":104,"column":0},"end":{"line":113,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias4,lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"if","hash":{},"fn":container.program(29, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":114,"column":0},"end":{"line":123,"column":7}}})) != null ? stack1 : "");
 },"1":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2779,8 +2779,10 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
 
   return "<article class=\"asked-of\">\n<h3>What would it say without a row?</h3>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rowsNote"),{"name":"if","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":88,"column":0},"end":{"line":90,"column":7}}})) != null ? stack1 : "")
-    + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Most influential rows\">\n<table>\n<caption>The rows that move the coefficients most, and the coefficient that each moves most: as it is, and without the row</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\">moves</th><th scope=\"col\" class=\"n\">observed</th><th scope=\"col\" class=\"n\">fitted</th><th scope=\"col\" class=\"n\">standardised residual</th><th scope=\"col\" class=\"n\">leverage</th><th scope=\"col\" class=\"n\">Cook’s distance</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"each","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":96,"column":0},"end":{"line":98,"column":9}}})) != null ? stack1 : "")
+    + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"Most influential rows\">\n<table>\n<caption>The rows that move the coefficients most, and the coefficient that each moves most: as it is, and without the row"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rowsScale"),{"name":"if","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":93,"column":122},"end":{"line":93,"column":217}}})) != null ? stack1 : "")
+    + "</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\">moves</th><th scope=\"col\" class=\"n\">observed</th><th scope=\"col\" class=\"n\">fitted</th><th scope=\"col\" class=\"n\">standardised residual</th><th scope=\"col\" class=\"n\">leverage</th><th scope=\"col\" class=\"n\">Cook’s distance</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"trust"),"rows"),{"name":"each","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":96,"column":0},"end":{"line":98,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n</article>\n";
 },"20":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -2794,6 +2796,17 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"trust"), "rowsNote", {"start":{"line":89,"column":5},"end":{"line":89,"column":19}} ), depth0))
     + "</p>\n";
 },"21":function(container,depth0,helpers,partials,data) {
+    var lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ". Observed and fitted values are on the "
+    + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"trust"), "rowsScale", {"start":{"line":93,"column":187},"end":{"line":93,"column":202}} ), depth0))
+    + " scale";
+},"22":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2803,9 +2816,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
 
   return "<tr><th scope=\"row\">"
     + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":97,"column":22},"end":{"line":97,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":97,"column":20},"end":{"line":97,"column":28}}}) : helper)))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"identified"),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":28},"end":{"line":97,"column":91}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"identified"),{"name":"if","hash":{},"fn":container.program(23, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":28},"end":{"line":97,"column":91}}})) != null ? stack1 : "")
     + "</th><td class=\"wide\">"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"moves"),{"name":"if","hash":{},"fn":container.program(23, data, 0),"inverse":container.program(24, data, 0),"data":data,"loc":{"start":{"line":97,"column":113},"end":{"line":97,"column":151}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"moves"),{"name":"if","hash":{},"fn":container.program(24, data, 0),"inverse":container.program(25, data, 0),"data":data,"loc":{"start":{"line":97,"column":113},"end":{"line":97,"column":151}}})) != null ? stack1 : "")
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"observed") || alias1(depth0, "observed", {"start":{"line":97,"column":172},"end":{"line":97,"column":180}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"observed","hash":{},"data":data,"loc":{"start":{"line":97,"column":170},"end":{"line":97,"column":182}}}) : helper)))
     + "</td><td class=\"n\">"
@@ -2817,7 +2830,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"distance") || alias1(depth0, "distance", {"start":{"line":97,"column":294},"end":{"line":97,"column":302}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"distance","hash":{},"data":data,"loc":{"start":{"line":97,"column":292},"end":{"line":97,"column":304}}}) : helper)))
     + "</td></tr>\n";
-},"22":function(container,depth0,helpers,partials,data) {
+},"23":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2828,7 +2841,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "<span class=\"under\">row "
     + container.escapeExpression((((helper = lookupProperty(helpers,"row") || container.strict(depth0, "row", {"start":{"line":97,"column":72},"end":{"line":97,"column":75}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"row","hash":{},"data":data,"loc":{"start":{"line":97,"column":70},"end":{"line":97,"column":77}}}) : helper)))
     + "</span>";
-},"23":function(container,depth0,helpers,partials,data) {
+},"24":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2837,9 +2850,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return container.escapeExpression((((helper = lookupProperty(helpers,"moves") || container.strict(depth0, "moves", {"start":{"line":97,"column":128},"end":{"line":97,"column":133}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"moves","hash":{},"data":data,"loc":{"start":{"line":97,"column":126},"end":{"line":97,"column":135}}}) : helper)));
-},"24":function(container,depth0,helpers,partials,data) {
-    return "–";
 },"25":function(container,depth0,helpers,partials,data) {
+    return "–";
+},"26":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2848,9 +2861,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<article class=\"asked-of\">\n<h3>Asked, with nothing to see</h3>\n<dl class=\"answers\">\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"each","hash":{},"fn":container.program(26, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":108,"column":0},"end":{"line":110,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"quiet"),{"name":"each","hash":{},"fn":container.program(27, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":108,"column":0},"end":{"line":110,"column":9}}})) != null ? stack1 : "")
     + "</dl>\n</article>\n";
-},"26":function(container,depth0,helpers,partials,data) {
+},"27":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2862,9 +2875,9 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     + alias3((((helper = lookupProperty(helpers,"question") || alias1(depth0, "question", {"start":{"line":109,"column":11},"end":{"line":109,"column":19}} ))),(typeof helper === "function" ? helper.call(alias2,{"name":"question","hash":{},"data":data,"loc":{"start":{"line":109,"column":9},"end":{"line":109,"column":21}}}) : helper)))
     + "</dt><dd>"
     + alias3((lookupProperty(helpers,"rich")||alias1(depth0, "rich", {"start":{"line":109,"column":32},"end":{"line":109,"column":36}} )).call(alias2,lookupProperty(depth0,"verdict"),{"name":"rich","hash":{},"data":data,"loc":{"start":{"line":109,"column":30},"end":{"line":109,"column":46}}}))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(27, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":109,"column":46},"end":{"line":109,"column":108}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"evidence"),{"name":"if","hash":{},"fn":container.program(28, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":109,"column":46},"end":{"line":109,"column":108}}})) != null ? stack1 : "")
     + "</dd></div>\n";
-},"27":function(container,depth0,helpers,partials,data) {
+},"28":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2875,7 +2888,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "<span class=\"under\">"
     + container.escapeExpression((((helper = lookupProperty(helpers,"evidence") || container.strict(depth0, "evidence", {"start":{"line":109,"column":84},"end":{"line":109,"column":92}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"evidence","hash":{},"data":data,"loc":{"start":{"line":109,"column":82},"end":{"line":109,"column":94}}}) : helper)))
     + "</span>";
-},"28":function(container,depth0,helpers,partials,data) {
+},"29":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2886,7 +2899,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
   return "<details>\n<summary>The residuals in pictures</summary>\n<div class=\"charts\">\n"
     + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(lookupProperty(depth0,"trust"),"pictures"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":118,"column":0},"end":{"line":120,"column":9}}})) != null ? stack1 : "")
     + "</div>\n</details>\n";
-},"29":function(container,depth0,helpers,partials,data) {
+},"30":function(container,depth0,helpers,partials,data) {
     return "<p>There is no chosen model to examine.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -2897,7 +2910,7 @@ export const PARTIALS: Readonly<Record<string, unknown>> = {
     };
 
   return "<section id=\"trust\" aria-labelledby=\"trust-heading\">\n<h2 id=\"trust-heading\"><span class=\"no\">4</span> Can it be trusted?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(29, data, 0),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":126,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"trust"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(30, data, 0),"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":126,"column":7}}})) != null ? stack1 : "")
     + "</section>\n";
 },"usePartial":true,"useData":true},
 };

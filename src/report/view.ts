@@ -413,6 +413,8 @@ export interface TrustView {
   readonly rows: readonly InfluentialRowView[];
   /** What the rule would choose without each of them; null where it was not asked again. */
   readonly rowsNote: string | null;
+  /** "log": the scale that the observed and fitted values of the rows are on; null where it is the response's own. */
+  readonly rowsScale: string | null;
   /** How precisely the model was worked out. */
   readonly arithmetic: string;
 }

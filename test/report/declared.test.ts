@@ -213,6 +213,14 @@ describe('the examination', () => {
     ).toBeNull();
     expect(choiceWithout(sampleRecord(), [old])).toBeNull();
   });
+  it('says that observed and fitted values of influential rows are on another scale than the response’s own', () => {
+    const page = (scale: 'natural' | 'log'): string =>
+      render(sampleRecord({ scale }), { formats: ['html'] }, () => {}).html!;
+    const said = 'Observed and fitted values are on the log scale';
+    expect(page('log')).toContain(said);
+    expect(page('natural')).not.toContain('Observed and fitted values are on');
+    expect(buildView(sampleRecord()).trust!.rowsScale).toBeNull();
+  });
   it('compares the bootstrap’s intervals with the declared ones', () => {
     const bootstrap = record.examination!.bootstrap!;
     const intervals = twoIntervals(bootstrap, coefficients);

@@ -2,15 +2,17 @@ import { fixed, rounded, roundingFor, significant } from '../numbers.ts';
 import type { RecordCoefficient, StudyRecord } from '../record-type.ts';
 import type { TrustView } from '../view.ts';
 import { choiceWithout, movesMost, rowWord } from '../words/influence.ts';
-import { raised } from '../words/lexicon.ts';
+import { type Lexicon, raised } from '../words/lexicon.ts';
+import { scaleKind, scaleName } from '../words/scale.ts';
 
 const ROWS = 5;
 
 /** The rows that move the coefficients most, and what would be without them. */
 export function influenceView(
   record: StudyRecord,
+  { response }: Lexicon,
   coefficients: readonly RecordCoefficient[],
-): Pick<TrustView, 'rows' | 'rowsNote'> {
+): Pick<TrustView, 'rows' | 'rowsNote' | 'rowsScale'> {
   const rows = (record.examination?.influential_rows ?? []).slice(0, ROWS);
   const s = record.model?.residual_standard_error ?? null;
   return {
@@ -29,5 +31,6 @@ export function influenceView(
       };
     }),
     rowsNote: choiceWithout(record, rows),
+    rowsScale: scaleKind(response.scale) === 'natural' ? null : scaleName(response.scale),
   };
 }

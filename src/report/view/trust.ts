@@ -24,7 +24,7 @@ export function trustView(record: StudyRecord, lexicon: Lexicon): TrustView | nu
     drawnAgain: drawnAgain(examination, coefficients),
     fitted: fittedObservedChart(lexicon, examination.points, model),
     counts: countSentences(examination),
-    ...influenceView(record, coefficients),
+    ...influenceView(record, lexicon, coefficients),
     arithmetic: arithmeticSentence(candidate?.arithmetic ?? 'plain'),
   };
 }
