@@ -75,22 +75,22 @@ export async function predictFromRecord(
 
 /** Row by row. */
 export function outcomesOf({
-  labels,
+  labelOf,
   lines,
   at,
   because,
   predicted,
 }: RecordPredictionColumns['rows']): RowOutcome[] {
-  return labels.map((label, row) => ({
-    label,
+  return Array.from(at, (k, row) => ({
+    label: labelOf(row),
     line: lines[row]!,
-    prediction: at[row]! < 0 ? null : predictionAt(predicted, at[row]!, label, []),
+    prediction: k < 0 ? null : predictionAt(predicted, k, labelOf(row), []),
     because: because[row]!,
   }));
 }
 
 const NO_ROWS: RecordPredictionColumns['rows'] = {
-  labels: [],
+  labelOf: () => '',
   lines: new Uint32Array(0),
   at: new Int32Array(0),
   because: [],
@@ -137,7 +137,7 @@ export async function predictColumnsFromRecord(
       interval,
       ...(group === null
         ? {}
-        : { groups: { count: group.names.length, of: [Int32Array.from(kept, (row) => group.codes[row]!)] } }),
+        : { groups: { count: group.names.length, of: [kept.map((row) => group.codes[row]!)] } }),
     },
     listing.report,
   );
@@ -160,7 +160,7 @@ export async function predictColumnsFromRecord(
   return {
     record,
     interval,
-    rows: { labels: all.labels, lines: table.lines, at, because, predicted },
+    rows: { labelOf: all.labelOf, lines: table.lines, at, because, predicted },
     totals: totals.flatMap((total, k) =>
       total === null ? [] : [{ group: k === 0 ? null : group!.names[k - 1]!, ...total }],
     ),

@@ -1,6 +1,6 @@
-import { outcomesOf, predictColumnsFromRecord, type RecordPredictionColumns } from '../predict-record.ts';
+import { predictColumnsFromRecord, type RecordPredictionColumns } from '../predict-record.ts';
 import type { Problem } from '../problem.ts';
-import { predictedRowsTable, totalsTable } from '../record/predicted-rows.ts';
+import { predictedRowsJson, predictedRowsTable, totalsTable } from '../record/predicted-rows.ts';
 import type { CommonOptions } from './common-options.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
@@ -62,7 +62,7 @@ export async function predictCommand(
   if (!hasError(problems)) {
     const text =
       options.format === 'json'
-        ? [jsonText(predicted, wantsTotal)]
+        ? jsonTexts(predicted, wantsTotal)
         : wantsTotal
           ? [totalsTable(totalsAsked(predicted, options), options.totalBy ?? null)]
           : predictedRowsTable(predicted.rows);
@@ -88,7 +88,10 @@ function intervalOf(text: string): number | null {
 }
 
 /** One row to a line, so that the text can be read and compared by lines. */
-function jsonText({ record, interval, rows, totals }: RecordPredictionColumns, withTotals: boolean): string {
+function* jsonTexts(
+  { record, interval, rows, totals }: RecordPredictionColumns,
+  withTotals: boolean,
+): Generator<string> {
   const head = {
     format: 'plumbrule-predictions/1',
     record: {
@@ -100,17 +103,9 @@ function jsonText({ record, interval, rows, totals }: RecordPredictionColumns, w
     },
     interval,
   };
-  const lines = outcomesOf(rows).map(({ label, line, prediction, because }) =>
-    JSON.stringify(
-      prediction === null
-        ? { label, line, not_predicted: because }
-        : { ...prediction, values: undefined, line },
-    ),
-  );
-  const parts = [
-    JSON.stringify(head).slice(0, -1),
-    `"predictions":[\n${lines.join(',\n')}\n]`,
-    ...(withTotals ? [`"totals":[\n${totals.map((total) => JSON.stringify(total)).join(',\n')}\n]`] : []),
-  ];
-  return `${parts.join(',\n')}}\n`;
+  yield `${JSON.stringify(head).slice(0, -1)},\n"predictions":[\n`;
+  yield* predictedRowsJson(rows);
+  yield '\n]';
+  if (withTotals) yield `,\n"totals":[\n${totals.map((total) => JSON.stringify(total)).join(',\n')}\n]`;
+  yield '}\n';
 }

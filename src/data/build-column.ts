@@ -3,19 +3,14 @@ import type { ColumnFaults } from './faults.ts';
 import { type DateReader, readIsoDate } from './read-date.ts';
 import { flagTexts, readUsualFlag } from './read-flag.ts';
 import { readNumber, readPlainNumber } from './read-number.ts';
+import { type CellRows, cellText } from './split-rows.ts';
 import type { CategoryColumn, Column, TextColumn } from './table.ts';
-
-/** Rows of cells, and the line on which each starts. */
-export interface Rows {
-  readonly cells: readonly (readonly string[])[];
-  readonly lines: readonly number[];
-}
 
 /** Turns the cells of one column into values, batch by batch. */
 export interface ColumnBuilder {
   readonly variable: VariablePlan;
   /** Reads cell `faults.position` of every row; the first becomes row `base` of the table. */
-  readonly fill: (rows: Rows, base: number) => void;
+  readonly fill: (rows: CellRows, base: number) => void;
   /** The column, cut to the rows read. */
   readonly finish: (rowCount: number) => Column;
 }
@@ -60,7 +55,7 @@ function buildNumbers(
     [...missing].map((text) => readNumber(text, decimalMark)).filter((value) => Number.isFinite(value)),
   );
   const mayBeMissing = missingNumbers.size > 0;
-  let values = new Float64Array(0);
+  const parts: Float64Array[] = [];
 
   const readOther = (cell: string, row: number, line: number): number => {
     const text = cell.trim();
@@ -72,26 +67,31 @@ function buildNumbers(
 
   return {
     variable,
-    fill: ({ cells, lines }, base) => {
-      const count = cells.length;
-      values = withRoom(values, base + count, (length) => new Float64Array(length));
+    fill: (rows, base) => {
+      const { text, codes, starts, ends, first, lines, count } = rows;
+      const values = new Float64Array(count);
       for (let i = 0; i < count; i++) {
-        const cell = cells[i]![at]!;
-        let value = readPlainNumber(cell, mark);
+        const cell = first[i]! + at;
+        let value = readPlainNumber(text, codes, starts[cell]!, ends[cell]!, mark);
         if (Number.isNaN(value) || (mayBeMissing && missingNumbers.has(value))) {
-          value = readOther(cell, base + i, lines[i]!);
+          value = readOther(cellText(rows, i, at), base + i, lines[i]!);
         }
         if (whole && !Number.isSafeInteger(value) && !Number.isNaN(value)) {
-          faults.add('cell_not_integer', base + i, lines[i]!, cell.trim());
+          faults.add('cell_not_integer', base + i, lines[i]!, cellText(rows, i, at).trim());
           value = Number.NaN;
         } else if (value < least || value > most) {
-          faults.add('cell_out_of_range', base + i, lines[i]!, cell.trim());
+          faults.add('cell_out_of_range', base + i, lines[i]!, cellText(rows, i, at).trim());
           value = Number.NaN;
         }
-        values[base + i] = value;
+        values[i] = value;
       }
+      parts.push(values);
     },
-    finish: (rowCount) => ({ kind: 'number', name: variable.name, values: cut(values, rowCount) }),
+    finish: (rowCount) => ({
+      kind: 'number',
+      name: variable.name,
+      values: joined(parts, new Float64Array(rowCount)),
+    }),
   };
 }
 
@@ -103,29 +103,30 @@ function buildFlags(
   const at = faults.position;
   const declared = variable.flagValues;
   const spelt: readonly [Set<string>, Set<string>] = [new Set(), new Set()];
-  let values = new Float64Array(0);
+  const parts: Float64Array[] = [];
   const read =
     declared === null
       ? readUsualFlag
       : (text: string): number => (text === declared[0] ? 0 : text === declared[1] ? 1 : Number.NaN);
   return {
     variable,
-    fill: ({ cells, lines }, base) => {
-      const count = cells.length;
-      values = withRoom(values, base + count, (length) => new Float64Array(length));
+    fill: (rows, base) => {
+      const { lines, count } = rows;
+      const values = new Float64Array(count);
       for (let i = 0; i < count; i++) {
-        const text = cells[i]![at]!.trim();
+        const text = cellText(rows, i, at).trim();
         const value = missing.has(text) ? Number.NaN : read(text);
         if (value === 0) spelt[0].add(text);
         else if (value === 1) spelt[1].add(text);
         else if (!missing.has(text)) faults.add('cell_not_flag', base + i, lines[i]!, text);
-        values[base + i] = value;
+        values[i] = value;
       }
+      parts.push(values);
     },
     finish: (rowCount) => ({
       kind: 'flag',
       name: variable.name,
-      values: cut(values, rowCount),
+      values: joined(parts, new Float64Array(rowCount)),
       flagTexts: declared ?? flagTexts(spelt[0], spelt[1]),
     }),
   };
@@ -140,14 +141,14 @@ function buildDates(
   const at = faults.position;
   const least = variable.atLeast ?? Number.NEGATIVE_INFINITY;
   const most = variable.atMost ?? Number.POSITIVE_INFINITY;
-  let values = new Float64Array(0);
+  const parts: Float64Array[] = [];
   return {
     variable,
-    fill: ({ cells, lines }, base) => {
-      const count = cells.length;
-      values = withRoom(values, base + count, (length) => new Float64Array(length));
+    fill: (rows, base) => {
+      const { lines, count } = rows;
+      const values = new Float64Array(count);
       for (let i = 0; i < count; i++) {
-        const text = cells[i]![at]!.trim();
+        const text = cellText(rows, i, at).trim();
         let value = Number.NaN;
         if (!missing.has(text)) {
           value = readDate(text);
@@ -158,10 +159,15 @@ function buildDates(
             value = Number.NaN;
           }
         }
-        values[base + i] = value;
+        values[i] = value;
       }
+      parts.push(values);
     },
-    finish: (rowCount) => ({ kind: 'date', name: variable.name, values: cut(values, rowCount) }),
+    finish: (rowCount) => ({
+      kind: 'date',
+      name: variable.name,
+      values: joined(parts, new Float64Array(rowCount)),
+    }),
   };
 }
 
@@ -173,14 +179,14 @@ function buildCategory(
   const at = faults.position;
   const declared = variable.levels;
   const codeOf = new Map<string, number>(declared?.map((level, code) => [level, code]));
-  let codes = new Int32Array(0);
+  const parts: Int32Array[] = [];
   return {
     variable,
-    fill: ({ cells, lines }, base) => {
-      const count = cells.length;
-      codes = withRoom(codes, base + count, (length) => new Int32Array(length));
+    fill: (rows, base) => {
+      const { lines, count } = rows;
+      const codes = new Int32Array(count);
       for (let i = 0; i < count; i++) {
-        const text = cells[i]![at]!.trim();
+        const text = cellText(rows, i, at).trim();
         let code = -1;
         if (!missing.has(text)) {
           const known = codeOf.get(text);
@@ -193,11 +199,12 @@ function buildCategory(
             faults.add('cell_level_undeclared', base + i, lines[i]!, text);
           }
         }
-        codes[base + i] = code;
+        codes[i] = code;
       }
+      parts.push(codes);
     },
     finish: (rowCount): CategoryColumn => {
-      const kept = cut(codes, rowCount);
+      const kept = joined(parts, new Int32Array(rowCount));
       const levels = declared ?? [...codeOf.keys()].sort();
       if (declared === null) {
         // Found in the order of rows; the sorted order does not depend on it.
@@ -223,9 +230,9 @@ function buildTexts(
   const values: (string | null)[] = [];
   return {
     variable,
-    fill: ({ cells }) => {
-      for (const row of cells) {
-        const cell = row[at]!;
+    fill: (rows) => {
+      for (let i = 0; i < rows.count; i++) {
+        const cell = cellText(rows, i, at);
         const text = cell.trim();
         const absent = missing.has(text) || (identifier && text === '');
         values.push(absent ? null : keep(identifier ? text : cell));
@@ -240,15 +247,12 @@ function keep(text: string): string {
   return text.length < 13 ? text : ` ${text}`.slice(1);
 }
 
-type Values = Float64Array<ArrayBuffer> | Int32Array<ArrayBuffer>;
-
-function withRoom<V extends Values>(values: V, needed: number, make: (length: number) => V): V {
-  if (needed <= values.length) return values;
-  const larger = make(Math.max(1024, Math.ceil(needed * 1.6)));
-  larger.set(values);
-  return larger;
-}
-
-function cut<V extends Values>(values: V, rowCount: number): V {
-  return (values.length === rowCount ? values : values.slice(0, rowCount)) as V;
+/** The parts of a column, one from each batch of rows, in one piece. */
+function joined<V extends Float64Array | Int32Array>(parts: readonly V[], all: V): V {
+  let at = 0;
+  for (const part of parts) {
+    all.set(part, at);
+    at += part.length;
+  }
+  return all;
 }

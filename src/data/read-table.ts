@@ -7,7 +7,7 @@ import { checkBaseline, type Filling, finishColumn, startColumns, takeWholeRows 
 import { findDelimiter } from './find-delimiter.ts';
 import { type HeaderMatch, matchHeader } from './match-header.ts';
 import { type ByteSource, brokenOff, isReadingError, openBytes, streamedBytes } from './read-bytes.ts';
-import { splitRows } from './split-rows.ts';
+import { rowTexts, splitRows } from './split-rows.ts';
 import { summarise } from './summarise.ts';
 import type { Table } from './table.ts';
 import { warnOfLikeLevels } from './warn-of-like-levels.ts';
@@ -102,7 +102,7 @@ async function readRows(
 
   const faults = gatherFaults(plan, limit);
   const encoding = watchEncoding(plan);
-  const lines: (readonly number[])[] = [];
+  const lines: Uint32Array[] = [];
   let header: { cells: readonly string[]; match: HeaderMatch; fillings: readonly Filling[] } | null = null;
   let rowCount = 0;
   let broken: Problem | null = null;
@@ -111,10 +111,11 @@ async function readRows(
     broken = batch.fault;
     let first = 0;
     if (header === null) {
-      const cells = batch.cells[0];
-      if (cells === undefined) continue;
-      if (batch.replaced) encoding.rejects(cells, batch.lines[0]!, cells);
-      const match = matchHeader(plan, cells, batch.lines[0]!, required, optional, report);
+      if (batch.rows.count === 0) continue;
+      const cells = rowTexts(batch.rows, 0);
+      const line = batch.rows.lines[0]!;
+      if (batch.replaced) encoding.rejects(cells, line, cells);
+      const match = matchHeader(plan, cells, line, required, optional, report);
       const fillings = startColumns(plan, match.found, faults, report);
       if (fillings === null || (fillings.length === 0 && !match.complete)) {
         encoding.settle(report);
@@ -126,7 +127,7 @@ async function readRows(
     const rows = takeWholeRows(batch, first, header.cells, faults, encoding);
     for (const { builder } of header.fillings) builder.fill(rows, rowCount);
     lines.push(rows.lines);
-    rowCount += rows.cells.length;
+    rowCount += rows.count;
     onProgress?.(rowCount);
   }
 
@@ -164,7 +165,7 @@ async function readRows(
   };
 }
 
-function joinLines(parts: readonly (readonly number[])[], rowCount: number): Uint32Array {
+function joinLines(parts: readonly Uint32Array[], rowCount: number): Uint32Array {
   const all = new Uint32Array(rowCount);
   let at = 0;
   for (const part of parts) {

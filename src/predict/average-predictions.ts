@@ -7,7 +7,7 @@ import type { Report } from '../problem.ts';
 import { type Averaged, unconditional } from '../select/average.ts';
 import { listedUpTo } from '../select/words.ts';
 import { normalQuantile } from '../stats/distributions.ts';
-import type { PredictionRows } from './predict.ts';
+import { labelsOf, type PredictionRows } from './predict.ts';
 import { statedRows } from './prediction-rows.ts';
 
 /** The mean at a stated row (the median where the scale is not natural), averaged over candidates; own scale. */
@@ -42,7 +42,7 @@ export function averagePredictions(
   const values = new Float64Array(rows.rowCount * used.length);
   const all = used.map((_, j) => j);
   design.fill(all, 0, rows.rowCount, rows.rowCount, values, null);
-  return rows.labels.flatMap((label, row): AveragedPrediction[] => {
+  return labelsOf(rows).flatMap((label, row): AveragedPrediction[] => {
     const at = (column: number) => {
       const j = used.indexOf(column);
       return values[j * rows.rowCount + row]! / design.scales[j]!;
@@ -77,8 +77,9 @@ function rowsOfAll(chosen: Chosen, context: FitContext, averaged: Averaged, repo
   const columns = averaged.candidates.flatMap(({ candidate }) => context.fits[candidate]!.candidate.columns);
   const all = { ...chosen.fit.candidate, columns: [...new Set(columns)].sort((a, b) => a - b) };
   const rows = statedRows({ ...chosen, fit: { ...chosen.fit, candidate: all } }, () => {});
+  const usable = labelsOf(rows);
   const stated = chosen.study.predict.rows.map(({ label }) => label);
-  const without = stated.filter((label) => !rows.labels.includes(label));
+  const without = stated.filter((label) => !usable.includes(label));
   if (without.length > 0) {
     report({
       code: 'prediction_value_missing',

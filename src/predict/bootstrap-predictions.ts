@@ -2,7 +2,7 @@ import { type Bootstrap, ERRORS_STREAM, ends } from '../examine/bootstrap.ts';
 import type { Chosen } from '../examine/chosen.ts';
 import { fromScale, isDecreasing } from '../model/response-scale.ts';
 import { randomFrom } from '../stats/random.ts';
-import { designAt, endOf, type PredictionRows, weightsOf } from './predict.ts';
+import { designAt, endOf, labelsOf, type PredictionRows, weightsOf } from './predict.ts';
 
 /** Intervals of one prediction by the bootstrap, on the response's own scale; null where an end does not exist. */
 export interface BootstrapPrediction {
@@ -37,7 +37,7 @@ export function bootstrapPredictions(
   return sources.flatMap((rows) => {
     const at = designAt(chosen, rows);
     const weightOf = weightsOf(chosen, rows);
-    return rows.labels.flatMap((label, i): BootstrapPrediction[] => {
+    return labelsOf(rows).flatMap((label, i): BootstrapPrediction[] => {
       const x = at(i);
       const root = Math.sqrt(weightOf(i));
       let centre = 0;

@@ -35,15 +35,14 @@ export function tryHoldOut(chosen: Chosen, heldOut: Sample, smearing: Float64Arr
   const isKnown = knownRows(chosen, heldOut);
   const own = numbersOf(heldOut, chosen.study.response.variable);
   const weights = chosen.study.weights === null ? null : numbersOf(heldOut, chosen.study.weights);
-  const labels = Array.from({ length: n }, (_, row) => String(row));
   const { predictions } = predict(
     { ...chosen, study: { ...chosen.study, predict: { ...chosen.study.predict, total: false } } },
     [
       {
         rowCount: n,
-        labels,
+        labelOf: String,
         columns: heldOut.columns,
-        given: labels.map(() => []),
+        given: Array.from({ length: n }, () => []),
         placeOf: (row) => ({ kind: 'cell', file: chosen.study.data.file, row: heldOut.lines[row]! }),
         severity: 'warning',
       },

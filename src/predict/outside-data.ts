@@ -5,7 +5,7 @@ import type { Predictor, RowNeeds } from './predictor.ts';
 export { modelVariables } from './predictor.ts';
 
 /** For each row of rows to be predicted, the ways in which it lies outside the sample. */
-export type OutsideData = (row: number, remote: boolean) => string[];
+export type OutsideData = (row: number, remote: boolean) => readonly string[];
 
 /**
  * Each way in which a row lies outside the sample, as a sentence: a value beyond the range of its variable, or
@@ -53,9 +53,12 @@ export function outsideData(
         if (said.length > 0) return said;
       }
     }
-    return remote ? ['its combination of values is more remote than any row in the data'] : [];
+    return remote ? REMOTE : INSIDE;
   };
 }
+
+const INSIDE: readonly string[] = [];
+const REMOTE: readonly string[] = ['its combination of values is more remote than any row in the data'];
 
 /** Two numbers with as many digits, six at least, as tell them apart: what is derived has digits beyond use. */
 function apart(a: number, b: number): readonly [number, number] {
@@ -72,17 +75,18 @@ export interface UnknownLevel {
   readonly known: readonly string[];
 }
 
-/** Per row, the levels that it has and may not have: such a row cannot be predicted. */
+/** Per row, the levels that it has and may not have: such a row cannot be predicted. Null where no row has any. */
 export function unknownLevels(
   needs: RowNeeds,
   columns: ReadonlyMap<string, Column>,
-): (row: number) => UnknownLevel[] {
+): ((row: number) => UnknownLevel[]) | null {
   const checks = [...needs.levels].flatMap(([variable, known]) => {
     const column = columns.get(variable);
     if (column?.kind !== 'category') return [];
     const strange = column.levels.map((level) => !known.includes(level));
     return strange.includes(true) ? [{ variable, known, column, strange }] : [];
   });
+  if (checks.length === 0) return null;
   return (row) =>
     checks.flatMap(({ variable, known, column, strange }) => {
       const code = column.codes[row]!;

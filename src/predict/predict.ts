@@ -9,7 +9,13 @@ import type { Place, Report, Severity } from '../problem.ts';
 import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { Scale } from '../study/study.ts';
 import { outsideData } from './outside-data.ts';
-import { emptyFigures, type PredictedColumns, type Prediction, predictionAt } from './predicted-columns.ts';
+import {
+  emptyFigures,
+  orNull,
+  type PredictedColumns,
+  type Prediction,
+  predictionAt,
+} from './predicted-columns.ts';
 import { type Predictor, predictorOf } from './predictor.ts';
 
 export type { Prediction } from './predicted-columns.ts';
@@ -17,13 +23,19 @@ export type { Prediction } from './predicted-columns.ts';
 /** Rows to be predicted: every variable of the model, declared and derived. */
 export interface PredictionRows {
   readonly rowCount: number;
-  readonly labels: readonly string[];
+  /** The label of a row, worked out when it is asked for. */
+  readonly labelOf: (row: number) => string;
   readonly columns: ReadonlyMap<string, Column>;
   /** What the analyst gave for each row, for the record. */
   readonly given: readonly (readonly { variable: string; value: number | string | boolean }[])[];
   readonly placeOf: (row: number) => Place;
   /** How much it matters that a row cannot be predicted. */
   readonly severity: Severity;
+}
+
+/** The label of every row. */
+export function labelsOf({ rowCount, labelOf }: PredictionRows): string[] {
+  return Array.from({ length: rowCount }, (_, row) => labelOf(row));
 }
 
 export interface PredictionTotal {
@@ -70,7 +82,7 @@ export function predict(
   const predictions = Array.from({ length: predicted.count }, (_, k) => {
     const rows = sources[predicted.source[k]!]!;
     const row = predicted.row[k]!;
-    return predictionAt(predicted, k, rows.labels[row]!, rows.given[row]!);
+    return predictionAt(predicted, k, rows.labelOf(row), rows.given[row]!);
   });
   return { predictions, total: total ? totals[0]! : null };
 }
@@ -91,6 +103,8 @@ export function predictRows(
 ): PredictedRows {
   const { estimates, rootInverse, s, covariance, smearing, largestLeverage } = predictor;
   const { scale } = predictor.response;
+  // Where the scale falls, the lower end on it is the upper one.
+  const down = isDecreasing(scale) ? 1 : -1;
   const p = estimates.length;
   const t = tTwoSidedQuantile(1 - interval, predictor.degreesOfFreedom);
   // x′Vx/s²: with the classical covariance, the leverage.
@@ -103,7 +117,7 @@ export function predictRows(
   const most = sources.reduce((sum, { rowCount }) => sum + rowCount, 0);
   const figures = emptyFigures(most);
   const [sourceOf, rowOf] = [new Int32Array(most), new Int32Array(most)];
-  const outside = new Map<number, string[]>();
+  const outside = new Map<number, readonly string[]>();
   let count = 0;
 
   sources.forEach((rows, source) => {
@@ -123,17 +137,17 @@ export function predictRows(
       const share = shareOf(row, leverage);
       addRow(sums[0]!, row, centre, weight);
       if (groups !== undefined) addRow(sums[1 + groups.of[source]![i]!]!, row, centre, weight);
-      const [lower, upper] = ends(centre, s, t * Math.sqrt(1 / weight + share), scale);
-      const [meanLower, meanUpper] = ends(centre, s, t * Math.sqrt(share), scale);
+      const forNewRow = t * Math.sqrt(1 / weight + share);
+      const forMean = t * Math.sqrt(share);
       const ways = outsideAt(i, weight * leverage > largestLeverage * (1 + 1e-9));
       if (ways.length > 0) outside.set(count, ways);
       sourceOf[count] = source;
       rowOf[count] = i;
       figures.estimate[count] = estimate;
-      figures.lower[count] = lower ?? Number.NaN;
-      figures.upper[count] = upper ?? Number.NaN;
-      figures.mean_lower[count] = meanLower ?? Number.NaN;
-      figures.mean_upper[count] = meanUpper ?? Number.NaN;
+      figures.lower[count] = endAt(centre, s, down * forNewRow, scale);
+      figures.upper[count] = endAt(centre, s, -down * forNewRow, scale);
+      figures.mean_lower[count] = endAt(centre, s, down * forMean, scale);
+      figures.mean_upper[count] = endAt(centre, s, -down * forMean, scale);
       figures.mean[count] = (smearing === null ? null : smearedMean(centre, smearing, scale)) ?? Number.NaN;
       figures.leverage[count] = leverage;
       count++;
@@ -142,8 +156,15 @@ export function predictRows(
   const totals = sums.map((sum): PredictionTotal | null => {
     if (scale.kind !== 'natural' || sum.rows === 0) return null;
     const share = shareOf(sum.columns, rootForm(rootInverse, p, sum.columns) ** 2);
-    const [lower, upper] = ends(sum.centres, s, t * Math.sqrt(sum.newRows + share), scale);
-    return { rows: sum.rows, estimate: sum.centres, lower, upper, mean: null };
+    const reach = t * Math.sqrt(sum.newRows + share);
+    const [lower, upper] = [-reach, reach].map((each) => endAt(sum.centres, s, each, scale));
+    return {
+      rows: sum.rows,
+      estimate: sum.centres,
+      lower: orNull(lower!),
+      upper: orNull(upper!),
+      mean: null,
+    };
   });
   return { predicted: { count, figures, outside, source: sourceOf, row: rowOf }, totals };
 }
@@ -176,15 +197,23 @@ export function designAt(chosen: Chosen, rows: PredictionRows): (row: number) =>
   return rowsOf(columns, rows);
 }
 
+/** Rows formed at a time. */
+const BLOCK = 256;
+
+/** Rows are formed in blocks, and so are best asked for in order. */
 function rowsOf(columns: readonly DesignColumn[], rows: PredictionRows): (row: number) => Float64Array {
-  const m = rows.rowCount;
+  const p = columns.length;
   const design = designRows(columns, rows, [], null);
-  const x = new Float64Array(m * columns.length);
   const all = columns.map((_, j) => j);
-  design.fill(all, 0, m, m, x, null);
-  const row = new Float64Array(columns.length);
+  const block = new Float64Array(BLOCK * p);
+  const row = new Float64Array(p);
+  let start = -1;
   return (i) => {
-    for (let j = 0; j < row.length; j++) row[j] = x[j * m + i]! / design.scales[j]!;
+    if (start < 0 || i < start || i >= start + BLOCK) {
+      start = i;
+      design.fill(all, start, Math.min(start + BLOCK, rows.rowCount), BLOCK, block, null);
+    }
+    for (let j = 0; j < p; j++) row[j] = block[j * BLOCK + i - start]! / design.scales[j]!;
     return row;
   };
 }
@@ -205,20 +234,19 @@ function dot(a: Float64Array, b: Float64Array): number {
   return sum;
 }
 
-/** centre ± s · reach on the own scale, lower end first; null where there is no s, or no end. */
-function ends(centre: number, s: number | null, reach: number, scale: Scale): [number | null, number | null] {
-  if (s === null) return [null, null];
-  const a = endOf(centre - s * reach, scale);
-  const b = endOf(centre + s * reach, scale);
-  return isDecreasing(scale) ? [b, a] : [a, b];
+/** centre + s · reach on the own scale; NaN where there is no s, or no end. */
+function endAt(centre: number, s: number | null, reach: number, scale: Scale): number {
+  if (s === null) return Number.NaN;
+  const value = fromScale(centre + s * reach, scale);
+  if (Number.isFinite(value)) return value;
+  // Beyond the image of the scale lies the end of the own scale: zero, or none at all.
+  const endless = scale.kind === 'reciprocal' || (scale.kind === 'box_cox' && scale.lambda < 0);
+  return Number.isNaN(value) && !endless ? 0 : Number.NaN;
 }
 
-/** An end beyond the image of the scale is the end of the own scale: zero, or none at all. */
+/** An end of an interval, on the fitted scale, taken back to the own one; null where there it has none. */
 export function endOf(z: number, scale: Scale): number | null {
-  const value = fromScale(z, scale);
-  if (Number.isFinite(value)) return value;
-  const endless = scale.kind === 'reciprocal' || (scale.kind === 'box_cox' && scale.lambda < 0);
-  return Number.isNaN(value) && !endless ? 0 : null;
+  return orNull(endAt(z, 0, 0, scale));
 }
 
 function unpredictable(
@@ -230,7 +258,7 @@ function unpredictable(
   report: Report,
 ): void {
   const { variable, scale } = predictor.response;
-  const label = `The row "${rows.labels[row]}" cannot be predicted`;
+  const label = `The row "${rows.labelOf(row)}" cannot be predicted`;
   const place = rows.placeOf(row);
   const hint = 'Predict nearer to the data.';
   if (Number.isFinite(centre) && Number.isFinite(leverage) && Number.isNaN(fromScale(centre, scale))) {

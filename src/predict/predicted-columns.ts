@@ -76,6 +76,7 @@ export function predictionAt(
   };
 }
 
-function orNull(figure: number): number | null {
+/** A figure of the columns by itself: null where there is none. */
+export function orNull(figure: number): number | null {
   return Number.isNaN(figure) ? null : figure;
 }

@@ -25,7 +25,7 @@ export function statedRows(chosen: Chosen, report: Report): PredictionRows {
   }
   const rows = {
     rowCount: plans.length,
-    labels: plans.map((plan) => plan.label),
+    labelOf: (row: number) => plans[row]!.label,
     given: plans.map((plan): Given[] => [...plan.values].map(([variable, value]) => ({ variable, value }))),
     columns: base,
     placeOf: (row: number) => plans[row]!.place,
@@ -59,7 +59,7 @@ export function rowsOfTable(table: Table, rowId: string | null): PredictionRows 
   const ids = rowId === null ? undefined : table.columns.get(rowId);
   return {
     rowCount: table.rowCount,
-    labels: Array.from({ length: table.rowCount }, (_, i) => labelOf(ids, i) ?? `line ${table.lines[i]}`),
+    labelOf: (row) => identityOf(ids, row) ?? `line ${table.lines[row]}`,
     given: [],
     columns: table.columns,
     placeOf: (row) => ({ kind: 'cell', file: table.file, row: table.lines[row]! }),
@@ -67,7 +67,7 @@ export function rowsOfTable(table: Table, rowId: string | null): PredictionRows 
   };
 }
 
-function labelOf(ids: Column | undefined, row: number): string | null {
+function identityOf(ids: Column | undefined, row: number): string | null {
   if (ids === undefined) return null;
   if (ids.kind === 'text') return ids.values[row] ?? null;
   return ids.kind === 'category' ? (ids.levels[ids.codes[row]!] ?? null) : String(ids.values[row]);
@@ -86,7 +86,7 @@ function shownValue(table: Table, name: string, row: number): number | string {
 export interface UsableRows {
   readonly rows: PredictionRows;
   /** By row kept: the row that it was. */
-  readonly kept: readonly number[];
+  readonly kept: Int32Array;
 }
 
 /**
@@ -99,7 +99,7 @@ export function usableRows(
   report: Report,
   leaveOut: (row: number, because: string) => void = () => {},
 ): UsableRows {
-  const { placeOf, severity, rowCount } = rows;
+  const { labelOf, placeOf, severity, rowCount } = rows;
   const derive = derivationsAtHand(needs, rows);
   const { columns } = evaluateDerived(derive, rows.columns, rowCount);
   const unknownAt = unknownLevels(needs, columns);
@@ -109,14 +109,15 @@ export function usableRows(
     names.map((name) => columns.get(name)!),
     rowCount,
   );
-  const kept: number[] = [];
+  const usable = new Int32Array(rowCount);
+  let count = 0;
   for (let row = 0; row < rowCount; row++) {
-    const unknown = unknownAt(row);
+    const unknown = unknownAt === null ? [] : unknownAt(row);
     if (unknown.length === 0 && incomplete[row] === 0) {
-      kept.push(row);
+      usable[count++] = row;
       continue;
     }
-    const label = `The row "${rows.labels[row]}"`;
+    const label = `The row "${labelOf(row)}"`;
     for (const { variable, level, known } of unknown) {
       const close = nearest(level, known);
       report({
@@ -142,13 +143,14 @@ export function usableRows(
     const [strange] = unknown;
     leaveOut(row, strange === undefined ? lacks : `no row fitted has ${strange.variable} "${strange.level}"`);
   }
-  const whole = kept.length === rowCount;
+  const kept = usable.subarray(0, count);
+  const whole = count === rowCount;
   return {
     kept,
     rows: {
-      rowCount: kept.length,
-      labels: whole ? rows.labels : kept.map((row) => rows.labels[row]!),
-      given: rows.given.length === 0 ? [] : kept.map((row) => rows.given[row]!),
+      rowCount: count,
+      labelOf: (row) => labelOf(kept[row]!),
+      given: rows.given.length === 0 ? [] : Array.from(kept, (row) => rows.given[row]!),
       columns: whole ? columns : new Map([...columns].map(([name, column]) => [name, pick(column, kept)])),
       placeOf: (row) => placeOf(kept[row]!),
       severity,
@@ -160,9 +162,15 @@ export function usableRows(
 function missingAnywhere(columns: readonly Column[], rowCount: number): Uint8Array {
   const missing = new Uint8Array(rowCount);
   for (const column of columns) {
-    for (let row = 0; row < rowCount; row++) if (isMissing(column, row)) missing[row] = 1;
+    if (column.kind === 'category' || column.kind === 'text') {
+      for (let row = 0; row < rowCount; row++) if (isMissing(column, row)) missing[row] = 1;
+    } else markMissing(column.values, missing);
   }
   return missing;
+}
+
+function markMissing(values: Float64Array, missing: Uint8Array): void {
+  for (let row = 0; row < missing.length; row++) if (Number.isNaN(values[row]!)) missing[row] = 1;
 }
 
 /** The derivations whose variables the rows have; those that the model rests on are among them. */
@@ -172,10 +180,10 @@ function derivationsAtHand(needs: RowNeeds, rows: PredictionRows): RowNeeds['der
   );
 }
 
-function pick(column: Column, rows: readonly number[]): Column {
-  if (column.kind === 'category')
-    return { ...column, codes: Int32Array.from(rows, (row) => column.codes[row]!) };
-  if (column.kind === 'text') return { ...column, values: rows.map((row) => column.values[row] ?? null) };
+function pick(column: Column, rows: Int32Array): Column {
+  if (column.kind === 'category') return { ...column, codes: rows.map((row) => column.codes[row]!) };
+  if (column.kind === 'text')
+    return { ...column, values: Array.from(rows, (row) => column.values[row] ?? null) };
   return { ...column, values: Float64Array.from(rows, (row) => column.values[row]!) };
 }
 

@@ -154,7 +154,7 @@ describe('intervals', () => {
 describe('predictions', () => {
   const rows = {
     rowCount: 2,
-    labels: ['near', 'far'],
+    labelOf: (row: number) => ['near', 'far'][row]!,
     given: [[], []],
     columns: byName([numbers('a', [5, 30]), numbers('b', [0, 0]), numbers('w', [1, 4])]),
     placeOf: () => ({ kind: 'command' }) as const,

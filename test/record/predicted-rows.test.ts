@@ -1,8 +1,8 @@
-/** Predictions as CSV are written in blocks; cell by cell they are the same. */
+/** Predictions are written in blocks of bytes; cell by cell, and object by object, they are the same. */
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { emptyFigures, PREDICTED_FIGURES } from '../../src/predict/predicted-columns.ts';
-import { predictedRowsTable } from '../../src/record/predicted-rows.ts';
+import { predictedRowsJson, predictedRowsTable } from '../../src/record/predicted-rows.ts';
 
 interface Row {
   /** Null for a row without a prediction. */
@@ -10,7 +10,7 @@ interface Row {
   readonly outside: readonly string[];
 }
 
-function table(rows: readonly Row[]): string {
+function columnsOf(rows: readonly Row[]) {
   const count = rows.filter(({ figures }) => figures !== null).length;
   const figures = emptyFigures(count);
   const outside = new Map<number, readonly string[]>();
@@ -26,18 +26,43 @@ function table(rows: readonly Row[]): string {
   });
   const predicted = { count, figures, outside, source: new Int32Array(count), row: new Int32Array(count) };
   const because = rows.map((row) => (row.figures === null ? 'x, "y" is missing' : null));
-  return [...predictedRowsTable({ labels: rows.map((_, i) => `r${i}`), at, because, predicted })].join('');
+  const lines = Uint32Array.from(rows, (_, i) => i + 2);
+  return { labelOf, lines, at, because, predicted };
+}
+
+// Long, so that rows fill several blocks; some have characters of more bytes than one.
+const labelOf = (row: number) => `r${row}${row % 3 === 0 ? ' "Ärö\u{1f33f}"' : ''}`;
+
+function table(rows: readonly Row[]): string {
+  return [...predictedRowsTable(columnsOf(rows))].join('');
 }
 
 /** As it is written by hand. */
 function byCell(rows: readonly Row[]): string {
   const lines = rows.map(({ figures, outside }, i) => {
-    if (figures === null) return `r${i},,,,,,,,,"x, ""y"" is missing"`;
-    return [`r${i}`, ...figures.map((x) => (Number.isNaN(x) ? '' : String(x))), outside.join('; '), ''].join(
+    const label = i % 3 === 0 ? `"r${i} ""Ärö\u{1f33f}"""` : `r${i}`;
+    if (figures === null) return `${label},,,,,,,,,"x, ""y"" is missing"`;
+    return [label, ...figures.map((x) => (Number.isNaN(x) ? '' : String(x))), outside.join('; '), ''].join(
       ',',
     );
   });
   return `${['label,estimate,lower,upper,mean_lower,mean_upper,mean,leverage,outside,not_predicted', ...lines].join('\n')}\n`;
+}
+
+/** As the language writes objects; a NaN as null. */
+function byObject(rows: readonly Row[]): string {
+  const lines = rows.map(({ figures, outside }, i) => {
+    const [label, line] = [labelOf(i), i + 2];
+    if (figures === null) return JSON.stringify({ label, line, not_predicted: 'x, "y" is missing' });
+    const named = Object.fromEntries(PREDICTED_FIGURES.map((name, j) => [name, figures[j]]));
+    return JSON.stringify({ label, ...named, outside, line });
+  });
+  return lines.join(',\n');
+}
+
+function both(rows: readonly Row[]): void {
+  expect(table(rows)).toBe(byCell(rows));
+  expect([...predictedRowsJson(columnsOf(rows))].join('')).toBe(byObject(rows));
 }
 
 const figure = fc.oneof(fc.double({ noNaN: true, noDefaultInfinity: true }), fc.constant(Number.NaN));
@@ -49,7 +74,7 @@ const row = fc.record({
 test('any figures, absent in any place', () => {
   fc.assert(
     fc.property(fc.array(row, { maxLength: 30 }), (rows) => {
-      expect(table(rows)).toBe(byCell(rows));
+      both(rows);
     }),
   );
 });
@@ -69,12 +94,12 @@ test('what the scales leave absent, over several blocks', () => {
           : Array.from({ length: 7 }, (_, j) => (absent.includes(j) ? Number.NaN : (i - 4500) / (j + 3))),
       outside: i % 700 === 0 ? ['a is below 1'] : [],
     }));
-    expect(table(rows)).toBe(byCell(rows));
+    both(rows);
   }
 });
 
 test('no row at all, and none with a prediction', () => {
-  expect(table([])).toBe(byCell([]));
+  both([]);
   const none = [{ figures: null, outside: [] }];
-  expect(table(none)).toBe(byCell(none));
+  both(none);
 });
