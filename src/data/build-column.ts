@@ -9,8 +9,11 @@ import type { CategoryColumn, Column, TextColumn } from './table.ts';
 /** Turns the cells of one column into values, batch by batch. */
 export interface ColumnBuilder {
   readonly variable: VariablePlan;
-  /** Reads cell `faults.position` of every row; the first becomes row `base` of the table. */
-  readonly fill: (rows: CellRows, base: number) => void;
+  /**
+   * Reads cell `faults.position` of every row; the first becomes row `base` of the table, which is expected to have
+   * `expected` rows in all, or as many as there are.
+   */
+  readonly fill: (rows: CellRows, base: number, expected: number) => void;
   /** The column, cut to the rows read. */
   readonly finish: (rowCount: number) => Column;
 }
@@ -55,7 +58,7 @@ function buildNumbers(
     [...missing].map((text) => readNumber(text, decimalMark)).filter((value) => Number.isFinite(value)),
   );
   const mayBeMissing = missingNumbers.size > 0;
-  const parts: Float64Array[] = [];
+  let values: Float64Array = new Float64Array(0);
 
   const readOther = (cell: string, row: number, line: number): number => {
     const text = cell.trim();
@@ -67,9 +70,9 @@ function buildNumbers(
 
   return {
     variable,
-    fill: (rows, base) => {
+    fill: (rows, base, expected) => {
       const { text, codes, starts, ends, first, lines, count } = rows;
-      const values = new Float64Array(count);
+      values = withRoom(values, base + count, expected);
       for (let i = 0; i < count; i++) {
         const cell = first[i]! + at;
         let value = readPlainNumber(text, codes, starts[cell]!, ends[cell]!, mark);
@@ -83,14 +86,13 @@ function buildNumbers(
           faults.add('cell_out_of_range', base + i, lines[i]!, cellText(rows, i, at).trim());
           value = Number.NaN;
         }
-        values[i] = value;
+        values[base + i] = value;
       }
-      parts.push(values);
     },
     finish: (rowCount) => ({
       kind: 'number',
       name: variable.name,
-      values: joined(parts, new Float64Array(rowCount)),
+      values: values.subarray(0, rowCount),
     }),
   };
 }
@@ -103,30 +105,29 @@ function buildFlags(
   const at = faults.position;
   const declared = variable.flagValues;
   const spelt: readonly [Set<string>, Set<string>] = [new Set(), new Set()];
-  const parts: Float64Array[] = [];
+  let values: Float64Array = new Float64Array(0);
   const read =
     declared === null
       ? readUsualFlag
       : (text: string): number => (text === declared[0] ? 0 : text === declared[1] ? 1 : Number.NaN);
   return {
     variable,
-    fill: (rows, base) => {
+    fill: (rows, base, expected) => {
       const { lines, count } = rows;
-      const values = new Float64Array(count);
+      values = withRoom(values, base + count, expected);
       for (let i = 0; i < count; i++) {
         const text = cellText(rows, i, at).trim();
         const value = missing.has(text) ? Number.NaN : read(text);
         if (value === 0) spelt[0].add(text);
         else if (value === 1) spelt[1].add(text);
         else if (!missing.has(text)) faults.add('cell_not_flag', base + i, lines[i]!, text);
-        values[i] = value;
+        values[base + i] = value;
       }
-      parts.push(values);
     },
     finish: (rowCount) => ({
       kind: 'flag',
       name: variable.name,
-      values: joined(parts, new Float64Array(rowCount)),
+      values: values.subarray(0, rowCount),
       flagTexts: declared ?? flagTexts(spelt[0], spelt[1]),
     }),
   };
@@ -141,12 +142,12 @@ function buildDates(
   const at = faults.position;
   const least = variable.atLeast ?? Number.NEGATIVE_INFINITY;
   const most = variable.atMost ?? Number.POSITIVE_INFINITY;
-  const parts: Float64Array[] = [];
+  let values: Float64Array = new Float64Array(0);
   return {
     variable,
-    fill: (rows, base) => {
+    fill: (rows, base, expected) => {
       const { lines, count } = rows;
-      const values = new Float64Array(count);
+      values = withRoom(values, base + count, expected);
       for (let i = 0; i < count; i++) {
         const text = cellText(rows, i, at).trim();
         let value = Number.NaN;
@@ -159,14 +160,13 @@ function buildDates(
             value = Number.NaN;
           }
         }
-        values[i] = value;
+        values[base + i] = value;
       }
-      parts.push(values);
     },
     finish: (rowCount) => ({
       kind: 'date',
       name: variable.name,
-      values: joined(parts, new Float64Array(rowCount)),
+      values: values.subarray(0, rowCount),
     }),
   };
 }
@@ -179,12 +179,12 @@ function buildCategory(
   const at = faults.position;
   const declared = variable.levels;
   const codeOf = new Map<string, number>(declared?.map((level, code) => [level, code]));
-  const parts: Int32Array[] = [];
+  let codes: Int32Array = new Int32Array(0);
   return {
     variable,
-    fill: (rows, base) => {
+    fill: (rows, base, expected) => {
       const { lines, count } = rows;
-      const codes = new Int32Array(count);
+      codes = withRoom(codes, base + count, expected);
       for (let i = 0; i < count; i++) {
         const text = cellText(rows, i, at).trim();
         let code = -1;
@@ -199,12 +199,11 @@ function buildCategory(
             faults.add('cell_level_undeclared', base + i, lines[i]!, text);
           }
         }
-        codes[i] = code;
+        codes[base + i] = code;
       }
-      parts.push(codes);
     },
     finish: (rowCount): CategoryColumn => {
-      const kept = joined(parts, new Int32Array(rowCount));
+      const kept = codes.subarray(0, rowCount);
       const levels = declared ?? [...codeOf.keys()].sort();
       if (declared === null) {
         // Found in the order of rows; the sorted order does not depend on it.
@@ -247,12 +246,14 @@ function keep(text: string): string {
   return text.length < 13 ? text : ` ${text}`.slice(1);
 }
 
-/** The parts of a column, one from each batch of rows, in one piece. */
-function joined<V extends Float64Array | Int32Array>(parts: readonly V[], all: V): V {
-  let at = 0;
-  for (const part of parts) {
-    all.set(part, at);
-    at += part.length;
-  }
-  return all;
+/**
+ * Values with room for as many as are needed, and then for as many as are expected. What is never written takes no memory, so
+ * the finished column is not copied but cut.
+ */
+function withRoom<V extends Float64Array | Int32Array>(values: V, needed: number, expected: number): V {
+  if (needed <= values.length) return values;
+  const length = Math.max(1024, expected, needed > 1024 ? needed * 2 : 0);
+  const larger = new (values.constructor as new (length: number) => V)(length);
+  larger.set(values);
+  return larger;
 }

@@ -20,6 +20,8 @@ export interface DecodedText {
   readonly utf16: boolean;
   /** The first piece's text. */
   readonly head: string;
+  /** How many bytes it was, a byte-order mark not counted. */
+  readonly headBytes: number;
   /** Every piece in order, the head first. */
   readonly pieces: AsyncGenerator<TextPiece>;
 }
@@ -88,7 +90,7 @@ export async function decodeText(
     yield { ...decode(Buffer.concat(tail)), last: true };
   }
 
-  return { newline: rowEnd, encoding, utf16, head: first.text, pieces: pieces() };
+  return { newline: rowEnd, encoding, utf16, head: first.text, headBytes: firstCut, pieces: pieces() };
 }
 
 /** The first line end outside quotes; null where more bytes are needed. */

@@ -8,6 +8,8 @@ import type { Problem, Report } from '../problem.ts';
 /** An open data file: its bytes once, unpacked where its name ends in .gz. */
 export interface ByteSource {
   readonly bytes: AsyncGenerator<Buffer>;
+  /** How many there are, unpacked; null where that is not known. */
+  readonly size: number | null;
   /** Whether the file is another, or has another size or time of change, than when it was opened. */
   readonly hasChanged: () => Promise<boolean>;
   /** SHA-256 of the file as stored, over the very bytes that were read; reads what is left first. */
@@ -46,6 +48,7 @@ export async function openBytes(
     return null;
   }
 
+  const packed = /\.gz$/i.test(file);
   const hash = createHash('sha256');
   const readChunk = async (): Promise<Buffer | null> => {
     const buffer = Buffer.allocUnsafe(chunkSize);
@@ -60,7 +63,8 @@ export async function openBytes(
   }
 
   return {
-    bytes: /\.gz$/i.test(file) ? unpacked(stored(), chunkSize) : stored(),
+    bytes: packed ? unpacked(stored(), chunkSize) : stored(),
+    size: packed ? null : Number(before.size),
     hasChanged: async () => {
       const now = await stat(path, { bigint: true }).then(versionOf, () => null);
       return now === null || !sameVersion(before, now);
@@ -86,6 +90,7 @@ export function streamedBytes(stream: AsyncIterable<Uint8Array>): ByteSource {
   const bytes = pass();
   return {
     bytes,
+    size: null,
     hasChanged: async () => false,
     finish: async () => {
       while (!(await bytes.next()).done);

@@ -105,6 +105,7 @@ async function readRows(
   const lines: Uint32Array[] = [];
   let header: { cells: readonly string[]; match: HeaderMatch; fillings: readonly Filling[] } | null = null;
   let rowCount = 0;
+  let rowsExpected = 0;
   let broken: Problem | null = null;
 
   for await (const batch of splitRows(decoded.pieces, { delimiter, newline }, plan.file)) {
@@ -125,7 +126,9 @@ async function readRows(
       first = 1;
     }
     const rows = takeWholeRows(batch, first, header.cells, faults, encoding);
-    for (const { builder } of header.fillings) builder.fill(rows, rowCount);
+    if (rowsExpected === 0 && rows.count > 0)
+      rowsExpected = expectedRows(source.size, rows.count / decoded.headBytes);
+    for (const { builder } of header.fillings) builder.fill(rows, rowCount, rowsExpected);
     lines.push(rows.lines);
     rowCount += rows.count;
     onProgress?.(rowCount);
@@ -163,6 +166,11 @@ async function readRows(
     summaries: declared.map(({ variable, column, bad }) => summarise(variable, column, bad)),
     format: { delimiter, encoding: decoded.encoding },
   };
+}
+
+/** Rows to make room for, at as many a byte as the first of them have, and a few more; 0 where the size is not known. */
+function expectedRows(size: number | null, perByte: number): number {
+  return size === null ? 0 : Math.ceil(size * perByte * 1.05) + 16;
 }
 
 function joinLines(parts: readonly Uint32Array[], rowCount: number): Uint32Array {
