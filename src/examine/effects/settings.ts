@@ -105,8 +105,14 @@ export function rootForm(rootInverse: Float64Array, p: number, c: Float64Array):
   let j = 0;
   // Four columns at a time, so that one need not wait for another; each is added up in its own order all the same.
   for (; j + 3 < p; j += 4) {
-    const [at0, at1, at2, at3] = [j * p, (j + 1) * p, (j + 2) * p, (j + 3) * p];
-    let [y0, y1, y2, y3] = [0, 0, 0, 0];
+    const at0 = j * p;
+    const at1 = at0 + p;
+    const at2 = at1 + p;
+    const at3 = at2 + p;
+    let y0 = 0;
+    let y1 = 0;
+    let y2 = 0;
+    let y3 = 0;
     for (let k = 0; k <= j; k++) {
       const x = c[k]!;
       y0 += rootInverse[at0 + k]! * x;
@@ -114,7 +120,9 @@ export function rootForm(rootInverse: Float64Array, p: number, c: Float64Array):
       y2 += rootInverse[at2 + k]! * x;
       y3 += rootInverse[at3 + k]! * x;
     }
-    const [x1, x2, x3] = [c[j + 1]!, c[j + 2]!, c[j + 3]!];
+    const x1 = c[j + 1]!;
+    const x2 = c[j + 2]!;
+    const x3 = c[j + 3]!;
     y1 += rootInverse[at1 + j + 1]! * x1;
     y2 += rootInverse[at2 + j + 1]! * x1;
     y2 += rootInverse[at2 + j + 2]! * x2;
