@@ -131,6 +131,7 @@ export const PROBLEM_CODES = [
   'draft_impossible',
   'study_not_found',
   'run_failed',
+  'earlier_run_gone',
   'template_unreadable',
   'template_broken',
   'output_unwritable',

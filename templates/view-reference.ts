@@ -1,10 +1,13 @@
 /**
- * The reference of the view object for people who write templates of their own: every key of `ReportView` with its value and
- * meaning, read from the interfaces and docstrings of src/report/view.ts, so that it cannot differ from what templates get.
+ * The reference of the view object for people who write templates of their own: every key of `ReportView` and `ComparisonView`
+ * with its value and meaning, read from the interfaces and docstrings of src/report/view.ts and comparison-view.ts, so that it cannot differ from what templates get.
  */
 import { readFileSync } from 'node:fs';
 
-const SOURCES = ['view.ts', 'chart/svg.ts', 'words/caution.ts'] as const;
+const SOURCES = ['view.ts', 'comparison-view.ts', 'chart/svg.ts', 'words/caution.ts'] as const;
+
+/** The views themselves, each with what its keys hold after it. */
+const ROOTS = ['ReportView', 'ComparisonView'] as const;
 
 /** One key of a part of the view. */
 export interface ViewKey {
@@ -29,15 +32,15 @@ export function viewReference(): string {
       partsOf(readFileSync(new URL(`../src/report/${file}`, import.meta.url), 'utf8')),
     ).map((part) => [part.name, part]),
   );
-  const used = reachable('ReportView', parts);
-  return `${[INTRODUCTION, ...used.map((name) => section(parts.get(name)!, parts))].join('\n\n')}\n`;
+  const used = new Set(ROOTS.flatMap((root) => reachable(root, parts)));
+  return `${[INTRODUCTION, ...[...used].map((name) => section(parts.get(name)!, parts))].join('\n\n')}\n`;
 }
 
-const INTRODUCTION = `<!-- Generated from src/report/view.ts by templates/generate.ts. -->
+const INTRODUCTION = `<!-- Generated from src/report/view.ts and comparison-view.ts by templates/generate.ts. -->
 
 # What a template is given
 
-A template of your own stands in a study under \`report.templates\` (\`html\`, \`markdown\`). It is a Handlebars template, and it gets one object, the view, with the keys below: everything is already said in words and formatted numbers, so that a template only arranges. Every key is always there; what does not apply is null, an empty list or false. A key that is not in the view is told as an error with its line.
+A template of your own stands in a study under \`report.templates\`: \`html\` and \`markdown\` for the report, which get a [ReportView](#reportview), and \`comparison.html\` and \`comparison.markdown\` for what is different from an earlier record, which get a [ComparisonView](#comparisonview). It is a Handlebars template, and it gets one object, the view, with the keys below: everything is already said in words and formatted numbers, so that a template only arranges. Every key is always there; what does not apply is null, an empty list or false. A key that is not in the view is told as an error with its line.
 
 Text is plain text. In HTML \`{{name}}\` escapes it; in Markdown the view carries it escaped.
 
@@ -49,7 +52,7 @@ Text is plain text. In HTML \`{{name}}\` escapes it; in Markdown the view carrie
 
 \`if\`, \`unless\`, \`each\`, \`with\` and \`lookup\` are there too; no other helper is, and nothing outside the view can be reached.
 
-The shipped templates stand in this folder, and their parts may be used by name: \`{{> first-screen}}\`, \`{{> data}}\`, \`{{> tried}}\`, \`{{> says}}\`, \`{{> trust}}\`, \`{{> predicts}}\`, \`{{> careful}}\`, \`{{> again}}\`, \`{{> style}}\` and \`{{> mark}}\`, where the whole view is at hand; \`{{> figure chart}}\` for one figure; and for Markdown \`{{> markdown-first-screen}}\`, \`{{> markdown-candidates}}\`, \`{{> markdown-coefficients}}\` and \`{{> markdown-trust}}\`.
+The shipped templates stand in this folder, and their parts may be used by name: \`{{> first-screen}}\`, \`{{> data}}\`, \`{{> tried}}\`, \`{{> says}}\`, \`{{> trust}}\`, \`{{> predicts}}\`, \`{{> careful}}\`, \`{{> again}}\`, \`{{> style}}\` and \`{{> mark}}\`, where the whole view of a report is at hand (the last two anywhere); \`{{> figure chart}}\` for one figure; and for Markdown \`{{> markdown-first-screen}}\`, \`{{> markdown-candidates}}\`, \`{{> markdown-coefficients}}\` and \`{{> markdown-trust}}\`.
 
 A small page of one's own:
 
@@ -139,7 +142,7 @@ function section({ name, meaning, keys }: ViewPart, parts: ReadonlyMap<string, V
   const rows = keys.flatMap((key) => rowsOf(key, '', parts));
   return [
     `## ${name}`,
-    ...(name === 'ReportView' || meaning === '' ? [] : [meaning]),
+    ...(name === ROOTS[0] || meaning === '' ? [] : [meaning]),
     ['| key | value | meaning |', '|---|---|---|', ...rows].join('\n'),
   ].join('\n\n');
 }

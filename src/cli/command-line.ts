@@ -2,7 +2,7 @@ import { Command, CommanderError, Option } from 'commander';
 import { packageVersion } from '../package-file.ts';
 import type { Problem } from '../problem.ts';
 import type { StudyOptions } from './common-options.ts';
-import type { CompareCommandOptions } from './compare.ts';
+import type { CompareCommandOptions } from './compared-files.ts';
 import type { DraftCommandOptions } from './draft.ts';
 import { OWN_FAULT, UNUSABLE } from './exit-status.ts';
 import type { FitCommandOptions } from './fit-options.ts';
@@ -90,7 +90,10 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
     .description('run the whole study and write its record, reports and tables')
     .argument('<study...>', 'the study file; several, or folders of studies, are run one by one')
     .option('--out <folder>', 'where to write (default: results/ and the name of the study)')
-    .option('--against <earlier>', 'an earlier record, or the folder of its results, to compare with')
+    .option(
+      '--against <earlier>',
+      'an earlier record, or the folder of its results or of those of many runs, to compare with',
+    )
     .addOption(given())
     .option('--junit <file>', 'write the acceptance criteria as tests for continuous integration (JUnit XML)')
     .addOption(quiet())
@@ -103,7 +106,7 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
   program
     .command('compare')
     .description('say what is different between two records, and what moved each coefficient')
-    .argument('<earlier>', 'the earlier record, or the folder of its results')
+    .argument('<earlier>', 'the earlier record, or the folder of its results, or of those of many runs')
     .argument('<later>', 'the later one')
     .option('--out <folder>', 'where to write (default: nothing is written)')
     .addOption(
@@ -112,6 +115,7 @@ function commands(terminal: Terminal, ended: (status: number) => void): Command 
         'one format only; without --out it is printed (default: all three are written)',
       ).choices(['html', 'markdown', 'json']),
     )
+    .option('--template <file>', 'a template of your own for that format')
     .addOption(quiet())
     .addOption(problems())
     .action(async (earlier: string, later: string, options: CompareCommandOptions) => {

@@ -2,25 +2,20 @@ import { join } from 'node:path';
 import { compareRecords } from '../compare/compare.ts';
 import { readCompared } from '../compare/read-compared.ts';
 import type { Problem } from '../problem.ts';
-import { writeResults } from '../record/write-results.ts';
-import type { CommonOptions } from './common-options.ts';
-import { type ComparisonFormat, comparisonFiles, comparisonIn } from './comparison-files.ts';
+import { type ResultFile, writeResults } from '../record/write-results.ts';
+import { type CompareCommandOptions, filesOf, statusOfComparison, templatePlaces } from './compared-files.ts';
 import { comparisonSummary } from './comparison-summary.ts';
-import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
+import { UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
+import { DEEPEST, findRecords, hasRecord, type ManyRecords } from './many-records.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
 
-export interface CompareCommandOptions extends CommonOptions {
-  readonly out?: string;
-  readonly format?: ComparisonFormat;
-}
-
 /**
- * `plumbrule compare EARLIER LATER`: what is different between two records. Files are written where a folder is named;
- * without one, a format that is named is printed in place of the summary. A limit against the earlier record that is missed
- * makes the exit status 1, as it does in `fit --against`.
+ * `plumbrule compare EARLIER LATER`: what is different between two records, or between each two of many. Files are written
+ * where a folder is named; without one, a format that is named is printed in place of the summary. A limit against the
+ * earlier record that is missed makes the exit status 1, as it does in `fit --against`.
  */
 export async function compareCommand(
   earlierPath: string,
@@ -30,23 +25,51 @@ export async function compareCommand(
 ): Promise<number> {
   const problems: Problem[] = [];
   const report = (problem: Problem) => problems.push(problem);
-  const earlier = await readCompared(earlierPath, report);
-  const later = await readCompared(laterPath, report);
+  const [before, now] = [await manyBelow(earlierPath), await manyBelow(laterPath)];
+  if (before !== null && now !== null) {
+    return (await import('./compare-many.ts')).compareMany(before, now, options, terminal);
+  }
+  if (before !== null || now !== null) report(oneOfMany((before ?? now)!.root));
+  const earlier = hasError(problems) ? null : await readCompared(earlierPath, report);
+  const later = hasError(problems) ? null : await readCompared(laterPath, report);
   const comparison = earlier === null || later === null ? null : compareRecords(earlier, later, report);
   const { out, format } = options;
+  let files: ResultFile[] = [];
+  if (comparison !== null) files = await filesOf(comparison, later!.record, options, report);
   let places: string[] = [];
-  if (comparison !== null && out !== undefined && !hasError(problems)) {
-    const files = comparisonFiles(comparison, later!.record, format === undefined ? undefined : [format]);
+  if (out !== undefined && files.length > 0 && !hasError(problems)) {
     if (await writeResults(out, files, report)) places = files.map(({ name }) => join(out, name));
   }
-  await showProblems(problems, await sourceTexts(problems), options.problems, terminal);
+  await showProblems(
+    problems,
+    await sourceTexts(problems, templatePlaces(later?.record ?? null, options)),
+    options.problems,
+    terminal,
+  );
   if (comparison === null || hasError(problems)) return UNUSABLE;
-  const status = comparison.acceptance.some(({ passed }) => passed === false) ? NOT_ACCEPTED : DONE;
+  const status = statusOfComparison(comparison);
   if (options.problems === 'json') return status;
   if (format !== undefined && out === undefined) {
-    terminal.out(comparisonIn(format, comparison, later!.record));
+    for (const { content } of files) terminal.out(content as string);
   } else if (options.quiet !== true) {
     terminal.out(comparisonSummary(comparison, later!.record, places, terminal));
   }
   return status;
+}
+
+/** The records below a folder that is none of a single record; null where it is, or has none. */
+async function manyBelow(path: string): Promise<ManyRecords | null> {
+  if (await hasRecord(path)) return null;
+  const records = await findRecords(path, DEEPEST);
+  return records.folders.size === 0 ? null : records;
+}
+
+function oneOfMany(many: string): Problem {
+  return {
+    code: 'command_unusable',
+    severity: 'error',
+    place: { kind: 'command' },
+    message: `"${many}" holds the records of many runs, each in its own folder, and the other is one record.`,
+    hint: 'Compare one record with one, or the folders of two such runs.',
+  };
 }

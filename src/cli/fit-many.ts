@@ -1,24 +1,16 @@
 import { join } from 'node:path';
-import type { Problem } from '../problem.ts';
-import type { OverviewRun } from '../report/overview.ts';
-import { ofLevel, type ReadStudy, type RunOptions, readStudyAndData } from '../run.ts';
-import { OWN_FAULT } from './exit-status.ts';
-import { fitRead, statusOf, studyName } from './fit-one.ts';
-import { faultText, inTurn, type Job, type JobResult } from './level-job.ts';
+import { type ReadStudy, type RunOptions, readStudyAndData } from '../run.ts';
+import { studyName } from './fit-one.ts';
+import { doJob, faultText, inTurn, type Job } from './level-job.ts';
+import type { ManyRecords } from './many-records.ts';
+import { faultyRun, type ManyRun } from './many-run.ts';
 import { safeNames } from './safe-names.ts';
-
-/** One run of many: of a study, or of one level of a study that repeats. */
-export interface ManyRun extends OverviewRun {
-  /** The study file as it was named. */
-  readonly path: string;
-  readonly status: number;
-  /** The fault of the program that ended it, for `PLUMBRULE_DEBUG`; else null. */
-  readonly fault: string | null;
-}
 
 export interface ManyOptions {
   readonly parameters: ReadonlyMap<string, string>;
   readonly onProgress?: NonNullable<RunOptions['onProgress']>;
+  /** The records of an earlier such run, as found before anything is written; each run is held against that at its place. */
+  readonly earlier?: ManyRecords | null;
 }
 
 /**
@@ -37,16 +29,17 @@ export async function fitMany(
     const progress: NonNullable<RunOptions['onProgress']> = (stage, done, total) =>
       options.onProgress?.(`${folder} (${index + 1} of ${paths.length}): ${stage}`, done, total);
     const inner = { ...options, onProgress: progress };
+    const job = jobOf({ name: folder, folder, study: path, level: null }, out, options.earlier);
     try {
       const read = await readStudyAndData(path, inner);
       if (read.levels !== null && read.table !== null) {
-        runs.push(...(await fitRepeats(path, read, join(out, folder), inner, folder)));
+        runs.push(...(await fitRepeats(path, read, out, inner, folder)));
       } else {
-        const fitted = await fitRead(path, read, join(out, folder), inner);
-        runs.push(runOf(path, folder, folder, { fitted }, fitted.problems));
+        const { parameters } = options;
+        runs.push(await doJob(path, read, asked(read, job), { parameters, onProgress: progress }));
       }
     } catch (fault) {
-      runs.push(runOf(path, folder, folder, { fault: faultText(fault) }, []));
+      runs.push(faultyRun(job, path, faultText(fault)));
     }
   }
   return runs;
@@ -55,7 +48,8 @@ export async function fitMany(
 /**
  * Runs a study that repeats, once for each level, each into its own folder below `out`; the runs come in the order of
  * the levels.
- * @param name the study's among others, which begins the names of its runs; left out where it is the only one
+ * @param name the study's among others, which begins the names of its runs and is the folder of theirs; left out where it
+ * is the only one
  */
 export async function fitRepeats(
   path: string,
@@ -66,65 +60,43 @@ export async function fitRepeats(
 ): Promise<ManyRun[]> {
   const levels = (read.levels ?? []).map(({ level }) => level);
   if (levels.length === 0 || read.problems.some(({ severity }) => severity === 'error')) {
-    const stopped = await fitRead(path, { ...read, table: null }, out, {});
-    return [runOf(path, name ?? studyName(path), name ?? '.', { fitted: stopped }, read.problems)];
+    const place = { name: name ?? studyName(path), folder: name ?? '.', study: path, level: null };
+    return [await doJob(path, { ...read, table: null }, jobOf(place, out, null), {})];
   }
   const folders = safeNames(levels);
-  const jobs = levels.map((level, index): Job => ({ level, out: join(out, folders[index]!) }));
+  const jobs = levels.map((level, index): Job => {
+    const shown = name === null ? level : `${name}, ${level}`;
+    const folder = name === null ? folders[index]! : `${name}/${folders[index]!}`;
+    return jobOf({ name: shown, folder, study: `${path}, ${level}`, level }, out, options.earlier);
+  });
   let done = 0;
   const onDone = () => options.onProgress?.('fitting levels', ++done, jobs.length);
   const { inThreads, threadsFor } = await import('./level-threads.ts');
   const threads = threadsFor(jobs.length);
-  const results =
+  const runs =
     threads > 1
       ? await inThreads(path, read, jobs, options.parameters, threads, onDone)
       : await inTurn(path, read, jobs, options.parameters, onDone);
-  const runs = levels.map((level, index) => {
-    const result = results[index]!;
-    // What was found in reading the study and its data is the study's, and said once.
-    const own = 'fitted' in result ? result.fitted.problems.slice(read.problems.length) : [];
-    const shown = name === null ? level : `${name}, ${level}`;
-    const folder = name === null ? folders[index]! : `${name}/${folders[index]!}`;
-    return runOf(path, shown, folder, result, ofLevel(level, own), level);
-  });
+  // What was found in reading the study and its data is the study's, and said once.
   const [first, ...rest] = runs;
   return [{ ...first!, problems: [...read.problems, ...first!.problems] }, ...rest];
 }
 
-function runOf(
-  path: string,
-  name: string,
-  folder: string,
-  result: JobResult,
-  problems: readonly Problem[],
-  level: string | null = null,
-): ManyRun {
-  const base = { path, name, folder, study: level === null ? path : `${path}, ${level}` };
-  if ('fitted' in result) {
-    const { written } = result.fitted;
-    return {
-      ...base,
-      record: written?.record ?? null,
-      files: written?.names ?? [],
-      problems,
-      status: statusOf(result.fitted),
-      fault: null,
-    };
-  }
-  const [first = ''] = result.fault.split('\n');
-  const problem: Problem = {
-    code: 'run_failed',
-    severity: 'error',
-    place: { kind: 'file', file: path },
-    message: `${level === null ? '' : `${level}: `}The run failed through a fault of the program's own, and nothing of it was written. ${first}${/[.!?]$/.test(first) ? '' : '.'}`,
-    hint: 'Set PLUMBRULE_DEBUG=1 to see where it happened.',
-  };
-  return {
-    ...base,
-    record: null,
-    files: [],
-    problems: [...problems, problem],
-    status: OWN_FAULT,
-    fault: result.fault,
-  };
+function jobOf(
+  place: Pick<Job, 'name' | 'folder' | 'study' | 'level'>,
+  out: string,
+  earlier: ManyRecords | null | undefined,
+): Job {
+  const { folder } = place;
+  const job = { ...place, out: join(out, folder), hasEarlier: null, earlier: null };
+  if (earlier == null) return job;
+  if (earlier.folders.has(folder)) return { ...job, hasEarlier: true, earlier: join(earlier.root, folder) };
+  // Where levels of it were run before, it is not new.
+  const repeated = [...earlier.folders].some((each) => each.startsWith(`${folder}/`));
+  return repeated ? job : { ...job, hasEarlier: false };
+}
+
+/** A study that repeats but whose levels could not be read is held against nothing. */
+function asked({ study }: ReadStudy, job: Job): Job {
+  return (study?.repeatFor ?? null) === null ? job : { ...job, hasEarlier: null, earlier: null };
 }

@@ -9,7 +9,7 @@ import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-res
 import { type ReadStudy, type RunOptions, type RunResult, runRead } from '../run.ts';
 import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
 import { hasError } from './has-error.ts';
-import { reportFiles, templatesOf } from './report-files.ts';
+import { reportFiles, templateNames, templatesIn } from './report-files.ts';
 
 /** What came of one study. */
 export interface FittedStudy {
@@ -56,12 +56,11 @@ export async function fitRead(
     return { path, problems, dataRead, templates: new Map(), written: null, comparison: null };
   }
   const templates = templatePlaces(result.record, dirname(path));
-  const files = await resultFiles(result.record, result, dirname(path), report);
-  let comparison: Comparison | null = null;
-  if (options.earlier) {
-    comparison = await compareWith(options.earlier, result.record, result, out, report);
-    if (comparison !== null) files.push(...(await filesOf(comparison, result.record)));
-  }
+  const comparison = options.earlier
+    ? await compareWith(options.earlier, result.record, result, out, report)
+    : null;
+  const files = await resultFiles(result.record, result, comparison, dirname(path), report);
+  if (comparison !== null) files.push(...(await filesOf(comparison, result.record, dirname(path), report)));
   let written: Written | null = null;
   if (!hasError(problems)) {
     options.onProgress?.('writing results', 0, null);
@@ -103,20 +102,34 @@ async function compareWith(
   return compareRecords(earlier, later, report);
 }
 
-async function filesOf(comparison: Comparison, record: StudyRecord): Promise<ResultFile[]> {
-  const { comparisonFiles } = await import('./comparison-files.ts');
-  return comparisonFiles(comparison, record);
+async function filesOf(
+  comparison: Comparison,
+  record: StudyRecord,
+  folder: string,
+  report: Report,
+): Promise<ResultFile[]> {
+  const { COMPARISON_FORMATS, comparisonFiles } = await import('./comparison-files.ts');
+  const templates = templatesIn(templateNames(record, 'comparison'), folder);
+  return comparisonFiles(comparison, record, COMPARISON_FORMATS, templates, report);
 }
 
 async function resultFiles(
   record: StudyRecord,
   result: RunResult,
+  comparison: Comparison | null,
   folder: string,
   report: (problem: Problem) => void,
 ): Promise<ResultFile[]> {
+  const templates = templatesIn(templateNames(record, 'report'), folder);
   return [
     { name: 'record.json', content: recordPieces(record) },
-    ...(await reportFiles(record, record.study.report.formats, templatesOf(record, folder), report)),
+    ...(await reportFiles(
+      record,
+      record.study.report.formats,
+      templates,
+      comparison?.acceptance ?? null,
+      report,
+    )),
     { name: 'tables/candidates.csv', content: candidatesTable(record) },
     { name: 'tables/coefficients.csv', content: coefficientsTable(record) },
     ...(result.residuals === null
@@ -131,6 +144,6 @@ async function resultFiles(
 
 /** Where the templates that a study names lie, by the names under which problems know them. */
 function templatePlaces(record: StudyRecord, folder: string): Map<string, string> {
-  const named = Object.values(record.study.report.templates).filter((name) => name !== null);
-  return new Map(named.map((name) => [name, resolve(folder, name)]));
+  const names = (['report', 'comparison'] as const).flatMap((of) => Object.values(templateNames(record, of)));
+  return new Map(names.flatMap((name) => (name === null ? [] : [[name, resolve(folder, name)]])));
 }

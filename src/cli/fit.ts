@@ -1,8 +1,8 @@
 import { join, relative, resolve } from 'node:path';
 import type { ComparedSide } from '../compare/compare.ts';
 import type { Problem, Report } from '../problem.ts';
-import { junitText } from '../report/junit.ts';
-import { readStudyAndData } from '../run.ts';
+import { junitSuite, junitText } from '../report/junit.ts';
+import { type ReadStudy, readStudyAndData } from '../run.ts';
 import { UNUSABLE } from './exit-status.ts';
 import { defaultFolder, type FittedStudy, fitRead, statusOf } from './fit-one.ts';
 import type { FitCommandOptions } from './fit-options.ts';
@@ -10,7 +10,6 @@ import { givenParameters } from './given-parameters.ts';
 import { hasError } from './has-error.ts';
 import { isFolderOfStudies } from './is-folder.ts';
 import { progressOn } from './progress.ts';
-import { refusedForMany } from './refused-for-many.ts';
 import { showDataNotRead, showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import { summary } from './summary.ts';
@@ -29,13 +28,7 @@ export async function fitCommand(
   const before: Problem[] = [];
   const path = paths[0]!;
   const several = paths.length > 1 || (await isFolderOfStudies(path));
-  if (several) before.push(...refusedForMany(options));
   const parameters = givenParameters(options.with ?? [], (problem) => before.push(problem));
-  // The earlier record may lie where the new one is going to be written.
-  const earlier =
-    options.against === undefined || hasError(before)
-      ? null
-      : await readEarlier(options.against, (problem) => before.push(problem));
   if (hasError(before)) {
     await showProblems(before, await sourceTexts(before), options.problems, terminal);
     return UNUSABLE;
@@ -48,10 +41,13 @@ export async function fitCommand(
     if (several) return await (await import('./fit-several.ts')).fitSeveral(paths, setting);
     const read = await readStudyAndData(path, { onProgress: progress.show, parameters });
     if (read.levels !== null) {
-      before.push(...refusedForMany(options));
-      if (!hasError(before)) return await (await import('./fit-several.ts')).fitRepeated(path, read, setting);
+      return await (await import('./fit-several.ts')).fitRepeated(path, read, setting);
+    }
+    const earlier = await readEarlier(options.against, read, (problem) => before.push(problem));
+    if (hasError(before)) {
       progress.clear();
-      await showProblems(before, new Map(), options.problems, terminal);
+      const found = [...read.problems, ...before];
+      await showProblems(found, await sourceTexts(found), options.problems, terminal);
       return UNUSABLE;
     }
     const out = options.out ?? defaultFolder(path);
@@ -59,7 +55,7 @@ export async function fitCommand(
     if (options.junit !== undefined) {
       const { written, problems, comparison } = fitted;
       const run = { study: path, record: written?.record ?? null, problems, comparison };
-      await writeText(options.junit, junitText([run]), (problem) => late.push(problem));
+      await writeText(options.junit, junitText([junitSuite(run)]), (problem) => late.push(problem));
     }
   } finally {
     progress.clear();
@@ -83,7 +79,16 @@ async function showResults({ written, comparison }: FittedStudy, terminal: Termi
   terminal.out(`\n${comparisonSummary(comparison, written.record, shown, terminal)}`);
 }
 
-async function readEarlier(path: string, report: Report): Promise<ComparedSide | null> {
+/**
+ * The earlier record, which may lie where the new one is going to be written; nothing of a study that repeats, whose levels
+ * could not be read.
+ */
+async function readEarlier(
+  path: string | undefined,
+  { study }: ReadStudy,
+  report: Report,
+): Promise<ComparedSide | null> {
+  if (path === undefined || (study?.repeatFor ?? null) !== null) return null;
   const { readCompared } = await import('../compare/read-compared.ts');
   return readCompared(path, report);
 }

@@ -1,14 +1,19 @@
-import type { ReadStudy } from '../run.ts';
-import { type FittedStudy, fitRead } from './fit-one.ts';
+import type { Problem } from '../problem.ts';
+import { ofLevel, type ReadStudy, type RunOptions } from '../run.ts';
+import { UNUSABLE } from './exit-status.ts';
+import { fitRead, statusOf } from './fit-one.ts';
+import { hasError } from './has-error.ts';
+import { readEarlier } from './many-records.ts';
+import { faultyRun, type ManyRun, manyRun, type RunPlace } from './many-run.ts';
 
-/** A run that is to be made. */
-export interface Job {
-  readonly level: string;
+/** A run of many that is to be made. */
+export interface Job extends RunPlace {
+  /** The level whose rows it has; null for a study that does not repeat. */
+  readonly level: string | null;
   readonly out: string;
+  /** The folder of the earlier record that it is held against; null for none. It may be the folder that is written to. */
+  readonly earlier: string | null;
 }
-
-/** What came of a job; a fault of the program is a text. */
-export type JobResult = { readonly fitted: FittedStudy } | { readonly fault: string };
 
 /** The runs one after the other, in the order of the jobs. */
 export async function inTurn(
@@ -17,27 +22,57 @@ export async function inTurn(
   jobs: readonly Job[],
   parameters: ReadonlyMap<string, string>,
   onDone: () => void,
-): Promise<JobResult[]> {
-  const results: JobResult[] = [];
+): Promise<ManyRun[]> {
+  const runs: ManyRun[] = [];
   for (const job of jobs) {
-    results.push(await doJob(path, read, job, parameters));
+    runs.push(await doJob(path, read, job, { parameters }));
     onDone();
   }
-  return results;
+  return runs;
 }
 
-/** One run; a fault of the program is its result and nothing more. */
-export async function doJob(
-  path: string,
-  read: ReadStudy,
-  { level, out }: Job,
-  parameters: ReadonlyMap<string, string>,
-): Promise<JobResult> {
+/**
+ * One run; a fault of the program is its result and nothing more. Of the problems found in reading a study that repeats,
+ * which are said once, it has none.
+ */
+export async function doJob(path: string, read: ReadStudy, job: Job, options: RunOptions): Promise<ManyRun> {
   try {
-    return { fitted: await fitRead(path, read, out, { level, parameters }) };
+    const run = await made(path, read, job, options);
+    // Its own suite and its line in the overview say whose they are already.
+    return job.level === null ? run : { ...run, problems: ofLevel(job.level, run.problems) };
   } catch (fault) {
-    return { fault: faultText(fault) };
+    return faultyRun(job, path, faultText(fault));
   }
+}
+
+async function made(path: string, read: ReadStudy, job: Job, options: RunOptions): Promise<ManyRun> {
+  const { level } = job;
+  const before: Problem[] = [];
+  const earlier =
+    job.earlier === null ? null : await readEarlier(job.earlier, level, (one) => before.push(one));
+  const shared = level === null ? 0 : read.problems.length;
+  if (hasError(before)) {
+    const problems = [...read.problems.slice(shared), ...before];
+    return manyRun(job, { record: null, comparison: null, files: [], problems, status: UNUSABLE });
+  }
+  const fitted = await fitRead(path, read, job.out, {
+    ...options,
+    ...(level === null ? {} : { level }),
+    earlier,
+  });
+  const { written, comparison } = fitted;
+  return manyRun(
+    // What lies at its place but is of another level is no earlier record of it.
+    { ...job, hasEarlier: job.hasEarlier === true ? earlier !== null : job.hasEarlier },
+    {
+      record: written?.record ?? null,
+      comparison: written === null ? null : comparison,
+      files: written?.names ?? [],
+      problems: [...before, ...fitted.problems.slice(shared)],
+      status: statusOf(fitted),
+      templates: fitted.templates,
+    },
+  );
 }
 
 export function faultText(fault: unknown): string {

@@ -2,7 +2,8 @@ import { availableParallelism } from 'node:os';
 import { Worker } from 'node:worker_threads';
 import { packageUrl } from '../package-file.ts';
 import type { ReadStudy } from '../run.ts';
-import { doJob, type Job, type JobResult } from './level-job.ts';
+import { doJob, type Job } from './level-job.ts';
+import { faultyRun, type ManyRun } from './many-run.ts';
 
 /** What a thread is started with: all that can be handed over; the study itself it reads again. */
 export interface ThreadData {
@@ -43,10 +44,10 @@ export async function inThreads(
   threads: number,
   onDone: () => void,
   script: ThreadScript = { url: packageUrl('dist/cli/level-worker.js') },
-): Promise<JobResult[]> {
+): Promise<ManyRun[]> {
   const { study, ...rest } = read;
   const workerData: ThreadData = { path, read: rest, studySha256: study!.sha256, parameters };
-  const results = new Array<JobResult | undefined>(jobs.length);
+  const results = new Array<ManyRun | undefined>(jobs.length);
   let next = 0;
   const work = () =>
     new Promise<void>((resolve) => {
@@ -59,7 +60,7 @@ export async function inThreads(
         current = next < jobs.length ? next++ : -1;
         worker.postMessage(current < 0 ? null : jobs[current]);
       };
-      worker.on('message', (result: JobResult | 'ready') => {
+      worker.on('message', (result: ManyRun | 'ready') => {
         if (result !== 'ready') {
           results[current] = result;
           onDone();
@@ -68,7 +69,8 @@ export async function inThreads(
       });
       // A thread that dies takes the run with it that it was making; the others go on.
       worker.on('error', (fault) => {
-        if (current >= 0) results[current] = { fault: `${fault.name}: ${fault.message}` };
+        if (current >= 0)
+          results[current] = faultyRun(jobs[current]!, path, `${fault.name}: ${fault.message}`);
       });
       worker.on('exit', () => resolve());
     });
@@ -76,8 +78,8 @@ export async function inThreads(
   // Where all threads died, what is left is done here.
   for (const [index, job] of jobs.entries()) {
     if (results[index] !== undefined) continue;
-    results[index] = await doJob(path, read, job, parameters);
+    results[index] = await doJob(path, read, job, { parameters });
     onDone();
   }
-  return results as JobResult[];
+  return results as ManyRun[];
 }

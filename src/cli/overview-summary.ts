@@ -1,22 +1,30 @@
 import { count, NONE, share } from '../report/numbers.ts';
-import { OUTCOMES, type OverviewEntry, worstFirst } from '../report/overview.ts';
+import {
+  mostMovedFirst,
+  OUTCOMES,
+  type Overview,
+  type OverviewEntry,
+  worstFirst,
+} from '../report/overview.ts';
 import { counted } from '../report/words/lexicon.ts';
-import { outcomeSentence } from '../report/words/overview.ts';
+import {
+  changeParagraphs,
+  choiceText,
+  insideText,
+  movedText,
+  moveText,
+  outcomeSentence,
+} from '../report/words/overview.ts';
 import { type Paragraph, plumbLine } from './plumb-line.ts';
 import type { Terminal } from './terminal.ts';
 
 /** A line for each run, those first that are not done, and the totals. `places` says where the overview lies. */
-export function overviewSummary(
-  title: string,
-  entries: readonly OverviewEntry[],
-  places: readonly string[],
-  terminal: Terminal,
-): string {
+export function overviewSummary(overview: Overview, places: readonly string[], terminal: Terminal): string {
   return plumbLine(
     [
-      { label: 'asked', paragraphs: [title] },
-      { label: 'runs', paragraphs: [runsTable(entries)] },
-      { label: 'all', paragraphs: totals(entries) },
+      { label: 'asked', paragraphs: [overview.title] },
+      { label: 'runs', paragraphs: [overview.compared ? changesTable(overview) : runsTable(overview.runs)] },
+      { label: 'all', paragraphs: totals(overview) },
       ...(places.length === 0
         ? []
         : [{ label: 'written', paragraphs: places.map((line): Paragraph => ({ line })) }]),
@@ -46,12 +54,46 @@ function runsTable(entries: readonly OverviewEntry[]): Paragraph {
   };
 }
 
-function totals(entries: readonly OverviewEntry[]): string[] {
+/** Runs against their earlier records, and what is no longer there. */
+function changesTable({ runs, gone }: Overview): Paragraph {
+  return {
+    columns: [
+      { heading: 'run', align: 'left', shrinks: true },
+      { heading: 'outcome', align: 'left' },
+      { heading: 'choice', align: 'left', shrinks: true },
+      { heading: 'moved most', align: 'left', shrinks: true },
+      { heading: 'in errors', align: 'right' },
+      { heading: 'new inside', align: 'right' },
+    ],
+    rows: [
+      ...mostMovedFirst(runs).map((entry) => [
+        entry.name,
+        entry.outcome,
+        choiceText(entry),
+        entry.change === null ? NONE : movedText(entry.change),
+        entry.change === null ? NONE : moveText(entry.change),
+        entry.change === null ? NONE : insideText(entry.change),
+      ]),
+      ...gone.map(({ name, chosen }) => [
+        name,
+        'no longer there',
+        `before: ${chosen ?? 'none'}`,
+        NONE,
+        NONE,
+        NONE,
+      ]),
+    ],
+  };
+}
+
+function totals(overview: Overview): string[] {
+  const entries = overview.runs;
   const rows = entries.reduce((sum, { rowsUsed }) => sum + (rowsUsed ?? 0), 0);
   const concerned = entries.filter(({ concerns }) => (concerns ?? 0) > 0).length;
   const written = entries.filter(({ outcome }) => outcome !== OUTCOMES[0]).length;
   return [
     outcomeSentence(entries),
+    ...changeParagraphs(overview),
     ...(written === 0
       ? []
       : [

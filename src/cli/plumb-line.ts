@@ -95,8 +95,9 @@ function tableLines(
   let excess = widths.reduce((sum, each) => sum + each, 2 * (columns.length - 1)) - width;
   columns.forEach((column, j) => {
     if (!column.shrinks || excess <= 0) return;
-    const narrower = Math.max(FEWEST, (widths[j] ?? 0) - excess);
-    excess -= (widths[j] ?? 0) - narrower;
+    const wide = widths[j] ?? 0;
+    const narrower = Math.max(Math.min(FEWEST, wide), wide - excess);
+    excess -= wide - narrower;
     widths[j] = narrower;
   });
   return cells.map((row) =>

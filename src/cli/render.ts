@@ -1,4 +1,5 @@
 import { dirname, join } from 'node:path';
+import { readVerdicts } from '../compare/read-verdicts.ts';
 import type { Problem } from '../problem.ts';
 import { readRecord } from '../record/read-record.ts';
 import type { StudyRecord } from '../record/record.ts';
@@ -6,8 +7,9 @@ import { writeResults } from '../record/write-results.ts';
 import type { ReportFormat } from '../report/render.ts';
 import type { CommonOptions } from './common-options.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
+import { givenTemplate } from './given-template.ts';
 import { hasError } from './has-error.ts';
-import { reportFiles, type TemplatePaths } from './report-files.ts';
+import { reportFiles, templateNames } from './report-files.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
@@ -33,8 +35,10 @@ export async function renderCommand(
   const record = await readRecord(path, report);
   if (record !== null) {
     const formats = options.format === undefined ? record.study.report.formats : [options.format];
-    const templates = templatesFor(record, formats, options.template, report);
-    const files = hasError(problems) ? [] : await reportFiles(record, formats, templates, report);
+    const templates = givenTemplate(templateNames(record, 'report'), formats, options.template, report);
+    // Where this record was held against an earlier one, the comparison beside it says what came of that.
+    const verdicts = await readVerdicts(path, record, report);
+    const files = hasError(problems) ? [] : await reportFiles(record, formats, templates, verdicts, report);
     if (!hasError(problems) && (await writeResults(out, files, report))) {
       written = files.map((file) => join(out, file.name));
     }
@@ -58,37 +62,4 @@ function templatePlace(record: StudyRecord | null, options: RenderCommandOptions
   const format = options.format ?? record?.study.report.formats[0];
   if (record === null || format === undefined || options.template === undefined) return new Map();
   return new Map([[record.study.report.templates[format] ?? `template for ${format}`, options.template]]);
-}
-
-/** A record does not know where its study lies, so the study's own templates are not looked for. */
-function templatesFor(
-  record: StudyRecord,
-  formats: readonly ReportFormat[],
-  template: string | undefined,
-  report: (problem: Problem) => void,
-): TemplatePaths {
-  const [format] = formats;
-  if (template !== undefined && format !== undefined && formats.length === 1) return { [format]: template };
-  if (template !== undefined) {
-    report({
-      code: 'command_unusable',
-      severity: 'error',
-      place: { kind: 'command' },
-      message: '--template is for one format, and this record asks for two.',
-      hint: 'Say which with --format.',
-    });
-    return {};
-  }
-  for (const each of formats) {
-    const named = record.study.report.templates[each];
-    if (named === null) continue;
-    report({
-      code: 'template_unreadable',
-      severity: 'warning',
-      place: { kind: 'file', file: named },
-      message: `The study's own template for ${each} is not used: a record does not say where its study lies.`,
-      hint: `Name it with --format ${each} --template.`,
-    });
-  }
-  return {};
 }

@@ -3,38 +3,61 @@ import { resolve } from 'node:path';
 import type { Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
 import type { ResultFile } from '../record/write-results.ts';
-import { type ReportFormat, render } from '../report/render.ts';
+import { type RenderOptions, type ReportFormat, render } from '../report/render.ts';
 
 const NAMES: { readonly [format in ReportFormat]: string } = { html: 'report.html', markdown: 'report.md' };
 
 /** The user's own templates, as paths, by format; the program's own where left out. */
 export type TemplatePaths = { readonly [format in ReportFormat]?: string };
 
-/** The reports of a record as files to be written; a template that cannot be read or used is reported and its report left out. */
+/**
+ * The reports of a record as files to be written; a template that cannot be read or used is reported and its report left out.
+ *
+ * @param verdicts what came of the criteria that need an earlier record; null where they are not judged
+ */
 export async function reportFiles(
   record: StudyRecord,
   formats: readonly ReportFormat[],
   templates: TemplatePaths,
+  verdicts: NonNullable<RenderOptions['verdicts']> | null,
   report: Report,
 ): Promise<ResultFile[]> {
-  const templateText: { html?: string; markdown?: string } = {};
-  for (const format of formats) {
-    const path = templates[format];
-    if (path === undefined) continue;
-    const text = await templateAt(path, report);
-    if (text === null) return [];
-    templateText[format] = text;
-  }
-  const rendered = render(record, { formats, templateText }, report);
+  const templateText = await templateTexts(formats, templates, report);
+  if (templateText === null) return [];
+  const rendered = render(record, { formats, templateText, verdicts }, report);
   return formats.flatMap((format) => {
     const content = rendered[format];
     return content === undefined ? [] : [{ name: NAMES[format], content }];
   });
 }
 
-/** Where the templates that a study names lie, `folder` being that of the study. */
-export function templatesOf(record: StudyRecord, folder: string): TemplatePaths {
-  const { html, markdown } = record.study.report.templates;
+/** The texts of the user's own templates; null, with an error reported, where one cannot be read. */
+export async function templateTexts(
+  formats: readonly ReportFormat[],
+  templates: TemplatePaths,
+  report: Report,
+): Promise<{ readonly [format in ReportFormat]?: string } | null> {
+  const texts: { html?: string; markdown?: string } = {};
+  for (const format of formats) {
+    const path = templates[format];
+    if (path === undefined) continue;
+    const text = await templateAt(path, report);
+    if (text === null) return null;
+    texts[format] = text;
+  }
+  return texts;
+}
+
+/** The templates that a study names, relative to it, for its reports or for what is different from an earlier record. */
+export function templateNames(record: StudyRecord, of: 'report' | 'comparison'): TemplateNames {
+  const { html, markdown, comparison } = record.study.report.templates;
+  return of === 'report' ? { html, markdown } : (comparison ?? { html: null, markdown: null });
+}
+
+type TemplateNames = { readonly [format in ReportFormat]: string | null };
+
+/** Where they lie, `folder` being that of the study. */
+export function templatesIn({ html, markdown }: TemplateNames, folder: string): TemplatePaths {
   return {
     ...(html === null ? {} : { html: resolve(folder, html) }),
     ...(markdown === null ? {} : { markdown: resolve(folder, markdown) }),

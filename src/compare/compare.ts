@@ -2,6 +2,7 @@ import { packageVersion } from '../package-file.ts';
 import type { Report } from '../problem.ts';
 import type { KeptRows } from '../record/read-sample.ts';
 import type { StudyRecord } from '../record/record.ts';
+import { recordSha256 } from '../record/record-text.ts';
 import { acceptanceAgainst } from './acceptance.ts';
 import { compareModel, givesRecord, type ModelPair, type Side } from './attribute.ts';
 import { compareChoice } from './choice.ts';
@@ -156,9 +157,11 @@ function sided({ record, rows }: ComparedSide): Side {
   return { record, declaration: declarationOf(record), base: rows! };
 }
 
-function sideOf({ study, data, selection }: StudyRecord): ComparedRecord {
+function sideOf(record: StudyRecord): ComparedRecord {
+  const { study, data, selection } = record;
   return {
     title: study.title,
+    record_sha256: recordSha256(record),
     study_file: study.file,
     study_sha256: study.sha256,
     data_file: data.file,

@@ -71,6 +71,10 @@ export interface ComparedRecord {
    */
   title: string;
   /**
+   * Hash of the record's text, by which a comparison that lies beside a record is known to be its own.
+   */
+  record_sha256: string;
+  /**
    * The study file's base name.
    */
   study_file: string;

@@ -105,7 +105,7 @@ export function buildRecord(run: Run): StudyRecord {
       caution: study.report.caution,
       confidence: study.inference.confidence,
       prediction_interval: study.predict.interval,
-      report: { formats: [...study.report.formats], templates: { ...study.report.templates } },
+      report: { formats: [...study.report.formats], templates: templatesOf(study) },
     },
     data: {
       file: table.file,
@@ -182,6 +182,13 @@ export function buildRecord(run: Run): StudyRecord {
     ...(againstEarlier.length === 0 ? {} : { acceptance_against_earlier: againstEarlier }),
     warnings: warningsOf(run),
   };
+}
+
+/** As the study names them; those of a comparison only where it names one. */
+function templatesOf({ report }: Study): StudyRecord['study']['report']['templates'] {
+  const { html, markdown, comparison } = report.templates;
+  const none = comparison.html === null && comparison.markdown === null;
+  return { html, markdown, ...(none ? {} : { comparison: { ...comparison } }) };
 }
 
 function examinationOf(chosen: Chosen, run: Run): RecordExamination {

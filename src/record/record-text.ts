@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { jsonPieces, type SchemaNode } from './json.ts';
 import type { StudyRecord } from './record.ts';
 import { recordSchema } from './record-schema.ts';
@@ -11,6 +12,13 @@ export function recordText(record: StudyRecord): string {
 export function recordPieces(record: StudyRecord): string[] {
   schema ??= recordSchema();
   return jsonPieces(record, schema);
+}
+
+/** SHA-256 of that text, as hexadecimal digits. */
+export function recordSha256(record: StudyRecord): string {
+  const hash = createHash('sha256');
+  for (const piece of recordPieces(record)) hash.update(piece);
+  return hash.digest('hex');
 }
 
 /** Read once: a run over many levels writes a record for each. */

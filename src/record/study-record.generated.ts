@@ -115,6 +115,19 @@ export interface StudyRecord {
          * For Markdown.
          */
         markdown: string | null;
+        /**
+         * Those for what is different from an earlier record; left out where the study names none.
+         */
+        comparison?: {
+          /**
+           * For HTML.
+           */
+          html: string | null;
+          /**
+           * For Markdown.
+           */
+          markdown: string | null;
+        };
       };
     };
   };

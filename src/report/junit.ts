@@ -1,5 +1,6 @@
 import type { Problem } from '../problem.ts';
 import type { Comparison } from './comparison-type.ts';
+import type { GoneRun } from './overview.ts';
 import type { StudyRecord } from './record-type.ts';
 import { acceptanceValue, comparedCriterionSentence, criterionLabel } from './words/acceptance.ts';
 import { lexiconOf } from './words/lexicon.ts';
@@ -16,6 +17,14 @@ export interface JunitRun {
   readonly comparison?: Comparison | null;
 }
 
+/** What came of a run, as JUnit XML has it. */
+export interface JunitSuite {
+  readonly name: string;
+  /** The study file as it was named. */
+  readonly study: string;
+  readonly cases: readonly TestCase[];
+}
+
 interface TestCase {
   readonly name: string;
   readonly outcome: 'passed' | 'failure' | 'error' | 'skipped';
@@ -25,19 +34,15 @@ interface TestCase {
 
 /**
  * Runs as JUnit XML, in the form that continuous-integration servers read (common practice, after the report format of
- * Apache Ant's junit task): a suite for each study, in it one test for the run itself, one for the choice, and one for
- * each acceptance criterion. A problem that stopped the run is an error, a criterion missed a failure,
- * and a criterion that could not be judged is skipped. No clock time.
+ * Apache Ant's junit task): a suite for each study. No clock time.
  */
-export function junitText(runs: readonly JunitRun[]): string {
-  const suites = runs.map((run) => ({ run, cases: casesOf(run) }));
-  const all = suites.flatMap(({ cases }) => cases);
+export function junitText(suites: readonly JunitSuite[]): string {
   const lines = [
     '<?xml version="1.0" encoding="UTF-8"?>',
-    `<testsuites name="plumbrule" ${counts(all)}>`,
-    ...suites.flatMap(({ run, cases }) => [
-      `  <testsuite name="${escaped(run.record?.study.title ?? run.study)}" ${counts(cases)}>`,
-      ...cases.flatMap((one) => caseLines(one, run.study)),
+    `<testsuites name="plumbrule" ${counts(suites.flatMap(({ cases }) => cases))}>`,
+    ...suites.flatMap(({ name, study, cases }) => [
+      `  <testsuite name="${escaped(name)}" ${counts(cases)}>`,
+      ...cases.flatMap((one) => caseLines(one, study)),
       '  </testsuite>',
     ]),
     '</testsuites>',
@@ -45,13 +50,30 @@ export function junitText(runs: readonly JunitRun[]): string {
   return `${lines.join('\n')}\n`;
 }
 
+/**
+ * The suite of a run: one test for the run itself, one for the choice, and one for each acceptance criterion. A problem
+ * that stopped the run is an error, a criterion missed a failure, and a criterion that could not be judged is skipped.
+ */
+export function junitSuite(run: JunitRun): JunitSuite {
+  return { name: run.record?.study.title ?? run.study, study: run.study, cases: casesOf(run) };
+}
+
+/** The suite of an earlier record that no run stands for: one test, skipped. */
+export function goneSuite({ name, folder }: GoneRun): JunitSuite {
+  const message = `There is an earlier record in ${folder}, and no run now.`;
+  const cases: TestCase[] = [{ name: RUNS, outcome: 'skipped', type: 'gone', message }];
+  return { name, study: name, cases };
+}
+
+const RUNS = 'The study runs';
+
 function casesOf({ record, problems, comparison }: JunitRun): TestCase[] {
   const errors = problems.filter(({ severity }) => severity === 'error');
   const ran: TestCase =
     errors.length === 0 && record !== null
-      ? passed('The study runs')
+      ? passed(RUNS)
       : {
-          name: 'The study runs',
+          name: RUNS,
           outcome: 'error',
           type: errors[0]?.code ?? 'stopped',
           message: errors.map(said).join('\n') || 'The run stopped.',

@@ -4,8 +4,28 @@ export interface OverviewView {
   readonly tool: string;
   /** How many runs, and what came of them. */
   readonly answer: readonly string[];
-  /** The runs that are not done, worst first. */
+  /** The runs that are not done, worst first; then what changed since the earlier records and is to be looked at. */
   readonly failures: readonly { readonly name: string; readonly outcome: string; readonly why: string }[];
+  /** What changed since the earlier records; null where runs are not compared. */
+  readonly changes: {
+    /** Worst first, then changed choices, then by the largest move; what is no longer there at the end. */
+    readonly rows: readonly {
+      readonly name: string;
+      /** Address of the comparison; null where there is none. */
+      readonly link: string | null;
+      readonly outcome: string;
+      readonly done: boolean;
+      readonly choice: string;
+      /** Whether that asks for a look: another choice, nothing to compare with. */
+      readonly marked: boolean;
+      /** The coefficient that moved most. */
+      readonly moved: string;
+      readonly errors: string;
+      readonly inside: string;
+      readonly criteria: string;
+    }[];
+    readonly note: string;
+  } | null;
   /** All of them, in the order in which they were asked for. */
   readonly runs: readonly {
     readonly name: string;

@@ -46,7 +46,7 @@ export interface HeadView {
   readonly predictionsMore: string | null;
   /** Three to five lines to know before relying on the answer, most important first. */
   readonly beware: readonly string[];
-  /** "All 2 acceptance criteria are met."; null where the study declares none. */
+  /** "All 2 acceptance criteria are met.", and what came of those against an earlier record; null where the study declares none. */
   readonly acceptance: string | null;
   /** Each acceptance criterion. */
   readonly criteria: readonly CriterionView[];
@@ -74,7 +74,7 @@ export interface CriterionView {
   readonly value: string;
   /** What the study asks for. */
   readonly limit: string;
-  /** Null where it needs an earlier record. */
+  /** Null where it is not judged: it needs an earlier record, or no row is new. */
   readonly passed: boolean | null;
   /** "met", "missed" or "not judged". */
   readonly word: string;

@@ -212,6 +212,11 @@ function resolveReport(reading: Reading): ReportPlan {
   const templates = {
     html: written?.templates?.html ?? STUDY_DEFAULTS['report.templates.html'],
     markdown: written?.templates?.markdown ?? STUDY_DEFAULTS['report.templates.markdown'],
+    comparison: {
+      html: written?.templates?.comparison?.html ?? STUDY_DEFAULTS['report.templates.comparison.html'],
+      markdown:
+        written?.templates?.comparison?.markdown ?? STUDY_DEFAULTS['report.templates.comparison.markdown'],
+    },
   };
   written?.formats?.forEach((format, index) => {
     if (format === undefined || written.formats?.indexOf(format) === index) return;
@@ -239,6 +244,8 @@ function checkFileNames(reading: Reading): void {
     [['predict', 'file'], predict?.file],
     [['report', 'templates', 'html'], report?.templates?.html],
     [['report', 'templates', 'markdown'], report?.templates?.markdown],
+    [['report', 'templates', 'comparison', 'html'], report?.templates?.comparison?.html],
+    [['report', 'templates', 'comparison', 'markdown'], report?.templates?.comparison?.markdown],
   ];
   for (const [path, name] of given) {
     if (typeof name !== 'string' || !(isAbsolute(name) || /^[A-Za-z]:[\\/]/.test(name))) continue;

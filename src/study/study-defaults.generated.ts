@@ -34,6 +34,8 @@ export const STUDY_DEFAULTS = {
   'report.formats': ["html","markdown"],
   'report.templates.html': null,
   'report.templates.markdown': null,
+  'report.templates.comparison.html': null,
+  'report.templates.comparison.markdown': null,
   'report.keep_sample': true,
   'report.caution': null,
 } as const;

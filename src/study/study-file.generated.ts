@@ -540,6 +540,19 @@ export interface StudyFile {
        * A Handlebars template for the Markdown report, relative to the study file. Null: the shipped one.
        */
       markdown?: string | null;
+      /**
+       * Templates of your own for what is different from an earlier record, by format.
+       */
+      comparison?: {
+        /**
+         * A Handlebars template for comparison.html, relative to the study file. Null: the shipped one.
+         */
+        html?: string | null;
+        /**
+         * A Handlebars template for comparison.md, relative to the study file. Null: the shipped one.
+         */
+        markdown?: string | null;
+      };
     };
     /**
      * Whether the rows used are kept beside the record (sample.csv.gz), so that a later run can be compared with this one row by row.

@@ -399,10 +399,16 @@ export type AcceptanceFigure =
   | 'prediction_interval_width'
   | 'relative_interval_width';
 
+/** Files of templates, relative to the study file; null for the shipped ones. */
+export interface TemplateNames {
+  readonly html: string | null;
+  readonly markdown: string | null;
+}
+
 export interface ReportPlan {
   readonly formats: readonly ('html' | 'markdown')[];
   /** The user's own templates, relative to the study file, by format. */
-  readonly templates: { readonly html: string | null; readonly markdown: string | null };
+  readonly templates: TemplateNames & { readonly comparison: TemplateNames };
   /** Whether the rows used are kept beside the record. */
   readonly keepSample: boolean;
   /** A sentence of the analyst's own for the cautions (the local code, who must review), or null. */

@@ -115,12 +115,7 @@ describe('several studies', () => {
     });
   });
 
-  test('are refused with --against, and a folder without one is told', async () => {
-    await inFolder({ 'x.txt': '', 's.study.yaml': repeated, 'data.csv': data() }, async (folder) => {
-      const with_ = await plumbrule('fit', folder, folder, '--against', folder);
-      expect(with_).toMatchObject({ status: 2, out: '' });
-      expect(with_.err).toContain('--against compares one run');
-    });
+  test('a folder without one is told', async () => {
     await inFolder({ 'x.txt': '' }, async (folder) => {
       const none = await plumbrule('fit', folder);
       expect(none).toMatchObject({ status: 2, out: '' });
@@ -164,15 +159,6 @@ describe('a study that repeats', () => {
     });
   });
 
-  test('is refused with --against', async () => {
-    await inFolder(files, async (folder) => {
-      const path = join(folder, 's.study.yaml');
-      await plumbrule('fit', path, '--out', join(folder, 'out'));
-      const against = await plumbrule('fit', path, '--against', join(folder, 'out', 'a'), '--out', folder);
-      expect(against).toMatchObject({ status: 2, out: '' });
-    });
-  });
-
   test('gives the same bytes in threads as in turn, and a thread that dies costs one run', async () => {
     const many = data((row, i) => {
       row.k = 'abcd'[i % 4]!;
@@ -181,8 +167,18 @@ describe('a study that repeats', () => {
       const path = join(folder, 's.study.yaml');
       const read = await readStudyAndData(path);
       const jobs = (out: string): Job[] =>
-        read.levels!.map(({ level }) => ({ level, out: join(folder, out, level) }));
-      for (const job of jobs('turn')) await doJob(path, read, job, new Map());
+        read.levels!.map(({ level }) => ({
+          name: level,
+          folder: level,
+          study: path,
+          level,
+          out: join(folder, out, level),
+          hasEarlier: out === 'died' ? null : true,
+          earlier: out === 'died' ? null : join(folder, 'earlier', level),
+        }));
+      await plumbrule('fit', path, '--out', join(folder, 'earlier'));
+      const inTurn = [];
+      for (const job of jobs('turn')) inTurn.push(await doJob(path, read, job, { parameters: new Map() }));
       let done = 0;
       const script = {
         url: new URL('../../src/cli/level-worker.ts', import.meta.url),
@@ -190,11 +186,12 @@ describe('a study that repeats', () => {
       };
       const results = await inThreads(path, read, jobs('threads'), new Map(), 2, () => done++, script);
       expect(done).toBe(4);
-      expect(
-        results.map((result) => 'fitted' in result && result.fitted.written?.record.data.repeat?.level),
-      ).toEqual(['a', 'b', 'c', 'd']);
-      for (const { level } of jobs('')) {
-        for (const file of ['record.json', 'report.html', 'tables/residuals.csv']) {
+      expect(results).toEqual(inTurn);
+      expect(results.map(({ entry }) => [entry.name, entry.outcome, entry.change?.choice.changed])).toEqual(
+        ['a', 'b', 'c', 'd'].map((level) => [level, 'done', false]),
+      );
+      for (const { name: level } of jobs('')) {
+        for (const file of ['record.json', 'report.html', 'comparison.json', 'tables/residuals.csv']) {
           const [one, other] = await Promise.all(
             ['turn', 'threads'].map((out) => readFile(join(folder, out, level, file), 'utf8')),
           );
@@ -206,11 +203,11 @@ describe('a study that repeats', () => {
           parentPort.on('message', () => { throw new Error('no memory'); }); parentPort.postMessage('ready');`)}`,
       );
       const died = await inThreads(path, read, jobs('died'), new Map(), 1, () => {}, { url: deadly });
-      expect(died.map((result) => ('fault' in result ? 'fault' : 'fitted'))).toEqual([
-        'fault',
-        'fitted',
-        'fitted',
-        'fitted',
+      expect(died.map(({ entry, fault }) => [entry.outcome, fault])).toEqual([
+        ['failed', 'Error: no memory'],
+        ['done', null],
+        ['done', null],
+        ['done', null],
       ]);
     });
   });

@@ -57,7 +57,7 @@ describe('ferry-fuel', () => {
     expect(share).toBeLessThan(0.65);
     expect(upper).toBeLessThan(0.9);
     expect(surface!.p_value).toBeLessThan(1e-10);
-    expect(renderComparison(comparison, now.record, 'markdown')).toContain(
+    expect(renderComparison(comparison, now.record, { formats: ['markdown'] }, () => {}).markdown).toContain(
       'The coefficient that moved most is vessel Tern',
     );
   });

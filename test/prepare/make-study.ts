@@ -95,7 +95,12 @@ export function makeStudy(columns: readonly Column[], written: Written): Study {
     examination: { lags: null, splitAt: null, bootstrap: null },
     predict: { rows: [], file: null, interval: 0.95, total: false },
     acceptance: [],
-    report: { formats: [], templates: { html: null, markdown: null }, keepSample: true, caution: null },
+    report: {
+      formats: [],
+      templates: { html: null, markdown: null, comparison: { html: null, markdown: null } },
+      keepSample: true,
+      caution: null,
+    },
     parameters: [],
     settings: [],
     placeOf: () => place,

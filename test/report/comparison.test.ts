@@ -25,6 +25,7 @@ const unbroken = (text: string) => text.replace(/[\u00a0\u202f]/g, ' ');
 
 const side = {
   title: 'T',
+  record_sha256: 'c'.repeat(64),
   study_file: 's.yaml',
   study_sha256: 'a'.repeat(64),
   data_file: 'd.csv',

@@ -1,6 +1,8 @@
 import { describe, expect, test } from 'vitest';
-import { junitText } from '../../src/report/junit.ts';
+import { type JunitRun, junitSuite, junitText } from '../../src/report/junit.ts';
 import { smallRecord } from '../record/small-record.ts';
+
+const junitOf = (runs: readonly JunitRun[]) => junitText(runs.map(junitSuite));
 
 const record = () => ({
   ...smallRecord(),
@@ -13,7 +15,7 @@ const record = () => ({
 
 describe('JUnit XML', () => {
   test('a test for the run, the choice and each criterion', () => {
-    const text = junitText([{ study: 'small.study.yaml', record: record(), problems: [] }]);
+    const text = junitOf([{ study: 'small.study.yaml', record: record(), problems: [] }]);
     expect(text).toBe(`<?xml version="1.0" encoding="UTF-8"?>
 <testsuites name="plumbrule" tests="5" failures="2" errors="0" skipped="0">
   <testsuite name="A small study" tests="5" failures="2" errors="0" skipped="0">
@@ -32,7 +34,7 @@ describe('JUnit XML', () => {
   });
 
   test('what stopped a run is an error with its place; warnings are not', () => {
-    const text = junitText([
+    const text = junitOf([
       {
         study: 'a.yaml',
         record: null,
@@ -69,10 +71,10 @@ describe('JUnit XML', () => {
 
   test('no candidate admitted is a failure; no runs are an empty list', () => {
     const none = record();
-    const text = junitText([
+    const text = junitOf([
       { study: 's', record: { ...none, selection: { ...none.selection, chosen: null } }, problems: [] },
     ]);
     expect(text).toContain('<failure message');
-    expect(junitText([])).toContain('tests="0" failures="0" errors="0"');
+    expect(junitOf([])).toContain('tests="0" failures="0" errors="0"');
   });
 });

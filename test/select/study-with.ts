@@ -61,7 +61,12 @@ export function studyWith(change: SelectionChange): Study {
     examination: { lags: null, splitAt: null, bootstrap: null },
     predict: { rows: [], file: null, interval: 0.9, total: false },
     acceptance: [],
-    report: { formats: [], templates: { html: null, markdown: null }, keepSample: true, caution: null },
+    report: {
+      formats: [],
+      templates: { html: null, markdown: null, comparison: { html: null, markdown: null } },
+      keepSample: true,
+      caution: null,
+    },
     parameters: [],
     settings: [],
     // The path's last step gives the line, so that a test can tell places apart.

@@ -1,9 +1,11 @@
+import type { ComparedCriterion } from '../comparison-type.ts';
 import { count, percent, rangeWithUnit, rounded, withUnit } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
-import type { HeadPrediction, HeadView } from '../view.ts';
+import type { CriterionView, HeadPrediction, HeadView } from '../view.ts';
 import {
   acceptanceSentence,
   acceptanceValue,
+  againstEarlierSentence,
   criterionLabel,
   needsEarlierSentence,
 } from '../words/acceptance.ts';
@@ -18,7 +20,12 @@ import { fittedUnit } from '../words/scale.ts';
 
 const ROWS = 8;
 
-export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
+/** @param verdicts what came of the criteria that need an earlier record; null where they are not judged */
+export function headView(
+  record: StudyRecord,
+  lexicon: Lexicon,
+  verdicts: readonly ComparedCriterion[] | null,
+): HeadView {
   const chosen = estimatedCandidate(record);
   return {
     answer: answerSentences(record, lexicon),
@@ -27,8 +34,7 @@ export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
     predictionConfidence: percent(record.study.prediction_interval),
     predictionsMore: furtherRows(record.predictions.length - ROWS),
     beware: bewareLines(record, lexicon),
-    acceptance:
-      acceptanceSentence(record.acceptance) ?? needsEarlierSentence(record.acceptance_against_earlier),
+    acceptance: accepted(record, verdicts),
     criteria: [
       ...record.acceptance.map((c) => ({
         name: criterionLabel(c),
@@ -37,15 +43,33 @@ export function headView(record: StudyRecord, lexicon: Lexicon): HeadView {
         passed: c.passed,
         word: c.passed ? 'met' : 'missed',
       })),
-      ...(record.acceptance_against_earlier ?? []).map((c) => ({
-        name: criterionLabel(c),
-        value: 'needs an earlier record',
-        limit: c.limit,
-        passed: null,
-        word: 'not judged',
-      })),
+      ...(verdicts?.map(verdictView) ??
+        (record.acceptance_against_earlier ?? []).map((c) => ({
+          name: criterionLabel(c),
+          value: 'needs an earlier record',
+          limit: c.limit,
+          passed: null,
+          word: 'not judged',
+        }))),
     ],
     line: studyLine(record),
+  };
+}
+
+function accepted(record: StudyRecord, verdicts: readonly ComparedCriterion[] | null): string | null {
+  const own = acceptanceSentence(record.acceptance);
+  if (verdicts === null) return own ?? needsEarlierSentence(record.acceptance_against_earlier);
+  return [own, againstEarlierSentence(verdicts)].filter((text) => text !== null).join(' ') || null;
+}
+
+function verdictView(c: ComparedCriterion): CriterionView {
+  const { passed } = c;
+  return {
+    name: criterionLabel(c),
+    value: passed === null ? 'no row is new' : c.value === null ? 'cannot be told' : acceptanceValue(c, null),
+    limit: c.limit,
+    passed,
+    word: passed === null ? 'not judged' : passed ? 'met' : 'missed',
   };
 }
 

@@ -1,6 +1,10 @@
-import { count, NONE, rounded, roundingFor, share, significant, withUnit } from '../numbers.ts';
+import { count, NONE, percent, rounded, roundingFor, share, significant, withUnit } from '../numbers.ts';
 import {
+  type GoneRun,
+  mostMovedFirst,
   OUTCOMES,
+  type Overview,
+  type OverviewChange,
   type OverviewEntry,
   type SharedCoefficients,
   sharedCoefficients,
@@ -8,20 +12,37 @@ import {
 } from '../overview.ts';
 import type { OverviewView } from '../overview-view.ts';
 import { counted, listed } from '../words/lexicon.ts';
-import { outcomeSentence } from '../words/overview.ts';
+import {
+  changeParagraphs,
+  choiceText,
+  insideText,
+  movedText,
+  moveText,
+  outcomeSentence,
+} from '../words/overview.ts';
 
 /** Coefficients side by side on a page; the table in CSV has all. */
 const MOST_COEFFICIENTS = 6;
 
+/** Changed choices and runs no longer there that are named before the table, which has all. */
+const MOST_TOLD = 8;
+
 /** Runs beside one another as people read them. */
-export function overviewView(title: string, tool: string, entries: readonly OverviewEntry[]): OverviewView {
+export function overviewView(tool: string, overview: Overview): OverviewView {
+  const { title, runs: entries } = overview;
   return {
     title,
     tool,
-    answer: [outcomeSentence(entries), ...chosenSentence(entries)],
-    failures: worstFirst(entries).flatMap(({ name, outcome, why }) =>
-      outcome === OUTCOMES[3] ? [] : [{ name, outcome, why: why ?? '' }],
-    ),
+    answer: [outcomeSentence(entries), ...changeParagraphs(overview), ...chosenSentence(entries)],
+    failures: [
+      ...worstFirst(entries).flatMap(({ name, outcome, why, hasEarlier, change }) => {
+        if (outcome === OUTCOMES[3]) return [];
+        const was = hasEarlier === true && change === null ? ' It has an earlier record.' : '';
+        return [{ name, outcome, why: `${why ?? ''}${was}` }];
+      }),
+      ...told(overview),
+    ],
+    changes: overview.compared ? changesView(overview) : null,
     runs: entries.map((entry) => ({
       name: entry.name,
       link: entry.link,
@@ -36,6 +57,79 @@ export function overviewView(title: string, tool: string, entries: readonly Over
     })),
     coefficients: sharedCoefficients(entries).map(coefficientsView),
   };
+}
+
+/** Changed choices and earlier runs no longer there. */
+function told({ runs, gone }: Overview): OverviewView['failures'] {
+  const changed = mostMovedFirst(runs).flatMap(({ name, outcome, change }) =>
+    outcome !== OUTCOMES[3] || change === null || !change.choice.changed
+      ? []
+      : [
+          {
+            name,
+            outcome: 'another choice',
+            why: `${change.choice.to ?? 'No candidate'} is chosen; before, ${change.choice.from ?? 'no candidate'} was.`,
+          },
+        ],
+  );
+  const lost = gone.map(({ name, ...was }) => ({
+    name,
+    outcome: 'no longer there',
+    why: beforeSentence(was),
+  }));
+  return [...changed.slice(0, MOST_TOLD), ...lost.slice(0, MOST_TOLD)];
+}
+
+function beforeSentence({ chosen, rowsUsed }: Pick<GoneRun, 'chosen' | 'rowsUsed'>): string {
+  if (rowsUsed === null) return 'There is an earlier record and no run now.';
+  return `There is an earlier record of ${counted(rowsUsed, 'row', 'rows', count)}, with ${chosen ?? 'no candidate'} chosen, and no run now.`;
+}
+
+function changesView({ runs, gone }: Overview): NonNullable<OverviewView['changes']> {
+  const confidences = new Set(runs.flatMap(({ change }) => change?.inside?.confidence ?? []));
+  const [confidence] = confidences;
+  const inside =
+    confidences.size === 1 && confidence !== undefined
+      ? `in the ${percent(confidence)} prediction interval that the earlier model gives for them; about that share ought to`
+      : 'in the prediction interval that the earlier model gives for them';
+  return {
+    rows: [
+      ...mostMovedFirst(runs).map((entry) => {
+        const { name, outcome, change } = entry;
+        return {
+          name,
+          link: change?.link ?? null,
+          outcome,
+          done: outcome === OUTCOMES[3],
+          choice: choiceText(entry),
+          marked: change === null || change.choice.changed,
+          moved: change === null ? NONE : movedText(change),
+          errors: change === null ? NONE : moveText(change),
+          inside: change === null ? NONE : insideText(change),
+          criteria: change === null ? NONE : criteriaText(change),
+        };
+      }),
+      ...gone.map(({ name, chosen }) => ({
+        name,
+        link: null,
+        outcome: 'no longer there',
+        done: false,
+        choice: `before: ${chosen ?? 'none'}`,
+        marked: true,
+        moved: NONE,
+        errors: NONE,
+        inside: NONE,
+        criteria: NONE,
+      })),
+    ],
+    note: `A move is the difference of a coefficient of the model chosen now, fitted to the earlier and to the present rows, divided by its earlier standard error. New rows inside are those whose response lies ${inside}. Criteria here are those that only an earlier record can judge.`,
+  };
+}
+
+function criteriaText({ criteria, criteriaMet, criteriaIdle }: OverviewChange): string {
+  if (criteria === 0) return NONE;
+  const idle = criteriaIdle === 0 ? '' : `, ${count(criteriaIdle)} not judged`;
+  return `${criteriaMet} of ${criteria - criteriaIdle}${idle}`;
 }
 
 /** Which candidates were chosen how often; nothing where no two runs have the same, as different studies do not. */

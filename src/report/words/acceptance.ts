@@ -96,6 +96,20 @@ export function needsEarlierSentence(criteria: readonly RecordEarlierCriterion[]
   return `${counted(all, 'criterion needs', 'criteria need')} an earlier record and ${all === 1 ? 'is' : 'are'} not judged here: ${which}.`;
 }
 
+/** "Against the earlier record 1 of 2 criteria is missed; comparison.html says what changed." Null for none. */
+export function againstEarlierSentence(criteria: readonly ComparedCriterion[]): string | null {
+  if (criteria.length === 0) return null;
+  const judged = criteria.filter(({ passed }) => passed !== null).length;
+  const missed = criteria.filter(({ passed }) => passed === false).length;
+  const told =
+    judged === 0
+      ? 'no criterion can be judged, since no row is new'
+      : missed > 0
+        ? `${missed} of ${counted(judged, 'criterion', 'criteria')} ${missed === 1 ? 'is' : 'are'} missed`
+        : `${judged === 1 ? 'one criterion is' : `all ${judged} criteria are`} met`;
+  return `Against the earlier record ${told}; comparison.html says what changed.`;
+}
+
 /** What came of a criterion that was held against an earlier record. */
 export function comparedCriterionSentence(criterion: ComparedCriterion): string {
   const label = criterionLabel(criterion);
