@@ -219,6 +219,26 @@ describe('time', () => {
     expect(verdict).toContain('In the file 1 row stands below a later one; they are taken in time order.');
   });
 
+  test('gaps between times that are otherwise one step apart are said', () => {
+    const verdict = (t: number[]) =>
+      findingNamed(
+        chosenFrom([numbers('y', y), numbers('a', many(n, 2)), numbers('t', t)], { terms: ['a'], time: 't' })
+          .chosen,
+        'independence',
+      ).verdict;
+    const said = 'the rows on both sides of a gap are taken as neighbours.';
+    // The thirteenth row, below a header.
+    expect(verdict(count(n).map((i) => (i < 12 ? i : i + 1)))).toContain(
+      `1 row stands behind a gap in time (row 14); ${said}`,
+    );
+    expect(verdict(count(n).map((i) => i + (i < 12 ? 0 : 1) + (i < 20 ? 0 : 5)))).toContain(
+      `2 rows stand behind a gap in time (the first is row 14); ${said}`,
+    );
+    // One step throughout; and no usual step at all, as of working days.
+    expect(verdict(count(n))).not.toContain('gap');
+    expect(verdict(count(n).map((i) => i + 2 * Math.floor(i / 5)))).not.toContain('gap');
+  });
+
   test('more rows than an exact p-value is quick for: an approximate one', () => {
     const rows = 2001;
     const { chosen } = chosenFrom(

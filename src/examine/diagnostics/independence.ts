@@ -72,6 +72,7 @@ function aboutTheOrder(chosen: Chosen): string {
   const time = study.data.time === null ? undefined : sample.columns.get(study.data.time);
   if (time === undefined || time.kind === 'category' || time.kind === 'text') return '';
   const order = sample.timeOrder!;
+  const gaps = gapsIn(time.values, order);
   let repeated = 0;
   let moved = 0;
   for (let t = 1; t < order.length; t++) {
@@ -86,6 +87,24 @@ function aboutTheOrder(chosen: Chosen): string {
       : '') +
     (moved > 0
       ? ` In the file ${rows(moved, 'stands', 'stand')} below a later one; they are taken in time order.`
+      : '') +
+    (gaps.length > 0
+      ? ` ${rows(gaps.length, 'stands', 'stand')} behind a gap in time (${gaps.length === 1 ? '' : 'the first is '}row ${sample.lines[order[gaps[0]!]!]}); the rows on both sides of a gap are taken as neighbours.`
       : '')
   );
+}
+
+/** Times further apart than this many usual steps have a gap between them; where more than a share have, there is no usual step. */
+const GAP = 1.5;
+const MOST_GAPS = 0.1;
+
+/** Positions in time order that stand behind a gap; none where the times are not mostly one step apart. The limits are our own. */
+function gapsIn(values: ArrayLike<number>, order: Int32Array): number[] {
+  const step = (t: number): number => values[order[t]!]! - values[order[t - 1]!]!;
+  const places = Array.from({ length: Math.max(0, order.length - 1) }, (_, k) => k + 1);
+  const steps = Float64Array.from(places.map(step).filter((size) => size > 0)).sort();
+  if (steps.length === 0) return [];
+  const usual = steps[(steps.length - 1) >> 1]!;
+  const gaps = places.filter((t) => step(t) > GAP * usual);
+  return gaps.length <= MOST_GAPS * steps.length ? gaps : [];
 }
