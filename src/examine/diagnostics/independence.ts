@@ -94,17 +94,19 @@ function aboutTheOrder(chosen: Chosen): string {
   );
 }
 
-/** Times further apart than this many usual steps have a gap between them; where more than a share have, there is no usual step. */
+/** Times further apart than this many usual steps have a gap between them. */
 const GAP = 1.5;
-const MOST_GAPS = 0.1;
+/** Steps this far from the usual one, as a share of it, are still usual: months differ by a tenth. */
+const USUAL = 0.25;
+/** Where more than this share of the steps is not usual, there is no usual step. The three limits are our own. */
+const MOST_UNUSUAL = 0.1;
 
-/** Positions in time order that stand behind a gap; none where the times are not mostly one step apart. The limits are our own. */
+/** Positions in time order that stand behind a gap; none where the times are not mostly one step apart, one row at each. */
 function gapsIn(values: ArrayLike<number>, order: Int32Array): number[] {
-  const step = (t: number): number => values[order[t]!]! - values[order[t - 1]!]!;
-  const places = Array.from({ length: Math.max(0, order.length - 1) }, (_, k) => k + 1);
-  const steps = Float64Array.from(places.map(step).filter((size) => size > 0)).sort();
+  const steps = Float64Array.from(order.subarray(1), (row, k) => values[row]! - values[order[k]!]!);
   if (steps.length === 0) return [];
-  const usual = steps[(steps.length - 1) >> 1]!;
-  const gaps = places.filter((t) => step(t) > GAP * usual);
-  return gaps.length <= MOST_GAPS * steps.length ? gaps : [];
+  const usual = steps.slice().sort()[(steps.length - 1) >> 1]!;
+  const unusual = steps.filter((step) => !(Math.abs(step - usual) <= USUAL * usual)).length;
+  if (unusual > MOST_UNUSUAL * steps.length || steps.includes(0)) return [];
+  return Array.from(steps.keys()).flatMap((k) => (steps[k]! > GAP * usual ? [k + 1] : []));
 }
