@@ -1,10 +1,12 @@
+import type { OnBadCell } from './data/faults.ts';
 import { formatDate } from './data/format-date.ts';
 import { readTable } from './data/read-table.ts';
 import type { Column, Table } from './data/table.ts';
 import { nearest } from './expression/nearest.ts';
+import { wholeNumber } from './numerals.ts';
 import { type Prediction, type PredictionTotal, predictRows } from './predict/predict.ts';
 import { emptyFigures, predictionAt } from './predict/predicted-columns.ts';
-import { rowsOfTable, usableRows } from './predict/prediction-rows.ts';
+import { gatherUnread, rowsOfTable, usableRows } from './predict/prediction-rows.ts';
 import type { Problem, Report } from './problem.ts';
 import type { PredictedRowColumns } from './record/predicted-rows.ts';
 import { readRecord } from './record/read-record.ts';
@@ -117,16 +119,18 @@ export async function predictColumnsFromRecord(
   if (record === null) return failed();
   const recorded = predictorIn(record, recordPath, report);
   if (recorded === null) return failed();
-  const table = await readRows(recorded, rowsPath, options, report);
+  const unread = gatherUnread(recorded.predictor);
+  const table = await readRows(recorded, rowsPath, options, unread.onBadCell, report);
   if (table === null) return failed();
 
   const { predictor } = recorded;
   const listing = limited(report, table.file);
   const because = new Array<string | null>(table.rowCount).fill(null);
   const all = rowsOfTable(table, recorded.rowId === null ? null : ROW_ID);
-  const { rows, kept } = usableRows(predictor, all, listing.report, (row, clause) => {
+  const leaveOut = (row: number, clause: string) => {
     because[row] = clause;
-  });
+  };
+  const { rows, kept } = usableRows(predictor, all, listing.report, leaveOut, unread);
   const group =
     options.totalBy === undefined ? null : groupsOf(table.columns.get(groupName(recorded, options.totalBy))!);
   const interval = options.interval ?? record.study.prediction_interval;
@@ -152,6 +156,7 @@ export async function predictColumnsFromRecord(
     });
     return failed();
   }
+  if (predicted.outside.size > 0) report(rowsOutside(table.file, predicted.outside.size, predicted.count));
   const at = new Int32Array(table.rowCount).fill(-1);
   for (let k = 0; k < predicted.count; k++) at[kept[predicted.row[k]!]!] = k;
   at.forEach((k, row) => {
@@ -165,6 +170,21 @@ export async function predictColumnsFromRecord(
       total === null ? [] : [{ group: k === 0 ? null : group!.names[k - 1]!, ...total }],
     ),
     problems,
+  };
+}
+
+function rowsOutside(file: string, outside: number, count: number): Problem {
+  const rows =
+    count === 1
+      ? 'The row predicted lies'
+      : `${wholeNumber(outside)} of the ${wholeNumber(count)} rows predicted ${outside === 1 ? 'lies' : 'lie'}`;
+  const units = outside * 2 > count ? ' Look whether the file is in the units of the study.' : '';
+  return {
+    code: 'prediction_outside',
+    severity: 'warning',
+    place: { kind: 'file', file },
+    message: `${rows} outside the data that the model was fitted to.`,
+    hint: `Each prediction says how, under "outside".${units}`,
   };
 }
 
@@ -203,6 +223,7 @@ async function readRows(
   recorded: RecordedPredictor,
   file: string,
   { totalBy, bytes, onProgress }: PredictRecordOptions,
+  onBadCell: OnBadCell,
   report: Report,
 ): Promise<Table | null> {
   const { inputs, extras } = recorded.predictor;
@@ -226,6 +247,7 @@ async function readRows(
     require: new Set(inputs.map(({ name }) => name)),
     optional: new Set([...extras.map(({ name }) => name), GROUP]),
     ...(bytes === undefined ? {} : { bytes }),
+    onBadCell,
     onProgress: (rows) => onProgress?.('reading rows', rows, null),
   });
   if (table === null) return null;

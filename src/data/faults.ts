@@ -2,6 +2,7 @@ import { wholeNumber } from '../numerals.ts';
 import type { Problem, Report } from '../problem.ts';
 import type { DataPlan, VariablePlan } from '../study/study.ts';
 import { type CellFault, FAULT_KINDS, faultSentence, showText } from './fault-sentence.ts';
+import { readNumber } from './read-number.ts';
 import type { BadValue } from './table.ts';
 
 /** The text of a listed bad value is cut here; the whole cell stands in the file. */
@@ -65,7 +66,10 @@ interface Gathered {
   borneCount: number;
 }
 
-export function gatherFaults(plan: DataPlan, limit: number): Faults {
+/** Told of every bad cell; `row` is its row in the table, `text` is trimmed. */
+export type OnBadCell = (variable: string, row: number, code: CellFault, text: string) => void;
+
+export function gatherFaults(plan: DataPlan, limit: number, onBadCell: OnBadCell = () => {}): Faults {
   const columns: Gathered[] = [];
   const ragged: Listed[] = [];
   let raggedCount = 0;
@@ -97,6 +101,7 @@ export function gatherFaults(plan: DataPlan, limit: number): Faults {
     };
     columns.push(own);
     const add: ColumnFaults['add'] = (code, row, line, text, earlierLine) => {
+      onBadCell(variable.name, row, code, text);
       const stopping = stops(code);
       const told = stopping && code === 'cell_level_undeclared' ? own.again.get(text) : undefined;
       if (told !== undefined) {
@@ -223,5 +228,11 @@ function borneWarning(plan: DataPlan, variable: VariablePlan, kind: KindCount): 
     count === 1
       ? `One cell of ${variable.name} ${isWrong} (${text} in line ${kind.firstLine}) and ${setMissing ? 'was set to missing' : 'its row is left out'}.`
       : `${wholeNumber(count)} cells of ${variable.name} ${areWrong} (the first is ${text} in line ${kind.firstLine}) and ${setMissing ? 'were set to missing' : 'their rows are left out'}.`;
-  return { code, severity: 'warning', place, message };
+  const { decimalMark } = plan.format;
+  const otherMark = decimalMark === '.' ? ',' : '.';
+  const hint =
+    code === 'cell_not_number' && Number.isFinite(readNumber(kind.firstText, otherMark))
+      ? `Numbers are read with the decimal mark "${decimalMark}", that of the study.`
+      : null;
+  return { code, severity: 'warning', place, message, ...(hint === null ? {} : { hint }) };
 }

@@ -2,7 +2,7 @@ import type { Problem, ProblemCode, Report } from '../problem.ts';
 import type { DataPlan } from '../study/study.ts';
 import { checkRowIds } from './check-row-ids.ts';
 import { decodeText } from './decode-text.ts';
-import { gatherFaults } from './faults.ts';
+import { gatherFaults, type OnBadCell } from './faults.ts';
 import { checkBaseline, type Filling, finishColumn, startColumns, takeWholeRows } from './fill-columns.ts';
 import { findDelimiter } from './find-delimiter.ts';
 import { type HeaderMatch, matchHeader } from './match-header.ts';
@@ -25,6 +25,7 @@ export interface ReadTableOptions {
   readonly require?: 'all' | ReadonlySet<string>;
   /** With `require`: names of variables that are read where they are present. */
   readonly optional?: ReadonlySet<string>;
+  readonly onBadCell?: OnBadCell;
   /** Bytes to read instead of those of the file, whose name is then only shown. */
   readonly bytes?: AsyncIterable<Uint8Array>;
   /** Bytes read at a time; the table does not depend on it. */
@@ -78,7 +79,14 @@ async function readRows(
   plan: DataPlan,
   source: ByteSource,
   report: Report,
-  { limit = 20, onProgress, require = 'all', optional: wanted, headSize = 65_536 }: ReadTableOptions,
+  {
+    limit = 20,
+    onProgress,
+    require = 'all',
+    optional: wanted,
+    onBadCell,
+    headSize = 65_536,
+  }: ReadTableOptions,
 ): Promise<Omit<Table, 'sha256'> | null> {
   const whole = require === 'all';
   const required = whole ? new Set(plan.variables.map((variable) => variable.name)) : require;
@@ -100,7 +108,7 @@ async function readRows(
     return null;
   }
 
-  const faults = gatherFaults(plan, limit);
+  const faults = gatherFaults(plan, limit, onBadCell);
   const encoding = watchEncoding(plan);
   const lines: Uint32Array[] = [];
   let header: { cells: readonly string[]; match: HeaderMatch; fillings: readonly Filling[] } | null = null;

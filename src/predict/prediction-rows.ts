@@ -1,3 +1,5 @@
+import { FAULT_KINDS, showText } from '../data/fault-sentence.ts';
+import type { OnBadCell } from '../data/faults.ts';
 import { formatDate } from '../data/format-date.ts';
 import { readTable } from '../data/read-table.ts';
 import type { Column, Table } from '../data/table.ts';
@@ -40,7 +42,9 @@ export async function fileRows(chosen: Chosen, report: Report): Promise<Predicti
   const file = study.predict.file;
   if (file === null) return null;
   const needs = rowNeedsOf(chosen);
+  const unread = gatherUnread(needs);
   const table = await readTable({ ...study.data, file }, study.folder, report, {
+    onBadCell: unread.onBadCell,
     require: new Set(needs.inputs.map((plan) => plan.name)),
     optional: new Set(needs.extras.map((plan) => plan.name)),
   });
@@ -51,7 +55,7 @@ export async function fileRows(chosen: Chosen, report: Report): Promise<Predicti
       needs.inputs.map(({ name }) => ({ variable: name, value: shownValue(table, name, i) })),
     ),
   };
-  return usableRows(needs, rows, report).rows;
+  return usableRows(needs, rows, report, undefined, unread).rows;
 }
 
 /** The rows of a file as they are to be predicted, named by their identity where they have one, else by line. */
@@ -83,6 +87,26 @@ function shownValue(table: Table, name: string, row: number): number | string {
   return value;
 }
 
+/** Why values of a file could not be read, so that a row is not said to lack what it has. */
+export interface UnreadCells {
+  readonly onBadCell: OnBadCell;
+  /** The first value of a row that could not be read, and why, as a clause; null where all could. */
+  readonly inRow: (row: number) => string | null;
+}
+
+/** Gathers the cells of the variables that a row must give. */
+export function gatherUnread({ inputs }: RowNeeds): UnreadCells {
+  const wanted = new Set(inputs.map(({ name }) => name));
+  const clauses = new Map<number, string>();
+  return {
+    onBadCell: (variable, row, code, text) => {
+      if (!wanted.has(variable) || clauses.has(row)) return;
+      clauses.set(row, `${variable} ${showText(text)} ${FAULT_KINDS[code][0]}`);
+    },
+    inRow: (row) => clauses.get(row) ?? null,
+  };
+}
+
 export interface UsableRows {
   readonly rows: PredictionRows;
   /** By row kept: the row that it was. */
@@ -91,13 +115,14 @@ export interface UsableRows {
 
 /**
  * Adds the derived variables, and keeps the rows that have every value and no unknown level; `leaveOut` is told of each
- * other row, with the first reason as a clause.
+ * other row, with the first reason as a clause. A value in `unread` is there, but could not be read.
  */
 export function usableRows(
   needs: RowNeeds,
   rows: PredictionRows,
   report: Report,
   leaveOut: (row: number, because: string) => void = () => {},
+  unread: Pick<UnreadCells, 'inRow'> = { inRow: () => null },
 ): UsableRows {
   const { labelOf, placeOf, severity, rowCount } = rows;
   const derive = derivationsAtHand(needs, rows);
@@ -130,14 +155,15 @@ export function usableRows(
     }
     const missing = names.filter((name) => isMissing(columns.get(name)!, row));
     const derived = missing[0] !== undefined && !inputs.includes(missing[0]);
-    const lacks = `${missing[0]} is ${derived ? 'undefined there' : 'missing'}`;
+    const misread = unread.inRow(row);
+    const lacks = misread ?? `${missing[0]} is ${derived ? 'undefined there' : 'missing'}`;
     if (missing.length > 0) {
       report({
         code: 'prediction_value_missing',
         severity,
         place: placeOf(row),
         message: `${label} cannot be predicted: ${lacks}.`,
-        ...(derived ? {} : { hint: `Give a value for ${missing.join(', ')}.` }),
+        ...(derived || misread !== null ? {} : { hint: `Give a value for ${missing.join(', ')}.` }),
       });
     }
     const [strange] = unknown;

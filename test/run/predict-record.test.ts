@@ -85,7 +85,9 @@ describe('a record alone predicts as its study did, to the last bit', () => {
       // Neither study nor data are needed.
       for (const name of ['study.yaml', 'data.csv']) await writeFile(join(folder, name), 'gone');
       const { rows, totals, interval, problems } = await predictFromRecord(path, join(folder, 'rows.csv'));
-      expect(problems).toEqual([]);
+      expect(problems.map(({ severity, message }) => [severity, message])).toEqual([
+        ['warning', '1 of the 5 rows predicted lies outside the data that the model was fitted to.'],
+      ]);
       expect(interval).toBe(0.8);
       expect(record.predictions).toHaveLength(5);
       expect(rows.map(({ prediction }) => ({ ...prediction, values: [] }))).toEqual(
@@ -120,13 +122,109 @@ describe('predict', () => {
         ['u', '"no row fitted has site ""Sout"""'],
         ['m', 'a is missing'],
         ['c', 'a is missing'],
-        ['x', 'when is missing'],
+        ['x', '"when ""31.02.2025"" is not a date"'],
         ['w', '"no row fitted has site ""West"""'],
       ]);
       expect(run.err).toContain('Did you mean South?');
       expect(run.err).toContain('31.02.2025');
     });
   });
+
+  test('a value that cannot be read is said to be that, and not to be missing', () =>
+    inFolder(filesOf(text), async (folder) => {
+      const { path } = await fitted(folder);
+      const broken = [
+        '2.5;12;East;on;01.02.2025;x;',
+        '-3;12;East;on;01.02.2025;1;',
+        '2;12;East;perhaps;01.02.2025;1;',
+        '2;12;East;on;01.02.2025;x;',
+      ];
+      const rows = broken.map((row, i) => `b${i};${row}\n`).join('');
+      await writeFile(join(folder, 'more.csv'), `${HEADER}${rows}`);
+      const { rows: found, problems } = await predictFromRecord(path, join(folder, 'more.csv'));
+      expect(found.map(({ because }) => because)).toEqual([
+        'a "2.5" is not a number',
+        'a "-3" is out of range',
+        'on "perhaps" is not a flag',
+        // The weight is not asked of a row.
+        null,
+      ]);
+      const of = (code: string) => problems.filter((each) => each.code === code);
+      expect(of('prediction_value_missing').map(({ message, hint }) => [message, hint])).toEqual([
+        ['The row "b0" cannot be predicted: a "2.5" is not a number.', undefined],
+        ['The row "b1" cannot be predicted: a "-3" is out of range.', undefined],
+        ['The row "b2" cannot be predicted: on "perhaps" is not a flag.', undefined],
+      ]);
+      expect(of('cell_not_number')[0]!.hint).toBe(
+        'Numbers are read with the decimal mark ",", that of the study.',
+      );
+    }));
+
+  test('rows outside the data are counted, and where most are, the units are asked about', () =>
+    inFolder(filesOf(text), async (folder) => {
+      const { path } = await fitted(folder);
+      const at = (a: string) => `z;${a};12,5;East;on;01.02.2025;2;\n`;
+      const problemsOf = async (...values: string[]) => {
+        await writeFile(join(folder, 'more.csv'), HEADER + values.map(at).join(''));
+        return (await predictFromRecord(path, join(folder, 'more.csv'))).problems.map(
+          ({ code, severity, message, hint }) => `${code} ${severity}: ${message} ${hint}`,
+        );
+      };
+      const kind = 'prediction_outside warning:';
+      const where =
+        'outside the data that the model was fitted to. Each prediction says how, under "outside".';
+      const units = 'Look whether the file is in the units of the study.';
+      expect(await problemsOf('5', '6')).toEqual([]);
+      expect(await problemsOf('5', '6', '500')).toEqual([`${kind} 1 of the 3 rows predicted lies ${where}`]);
+      expect(await problemsOf('5', '600', '500')).toEqual([
+        `${kind} 2 of the 3 rows predicted lie ${where} ${units}`,
+      ]);
+      expect(await problemsOf('500')).toEqual([`${kind} The row predicted lies ${where} ${units}`]);
+    }));
+
+  test.each([
+    ['empty', '', 'is empty'],
+    ['only a header', HEADER, 'has a header and no rows'],
+    ['a column too few', HEADER.replace(';Menge (t)', ''), 'no column "Menge (t)" of the variable a'],
+    ['a column twice', HEADER.replace(';y', ';b'), 'The header names "b" twice, in columns 3 and 8.'],
+    ['another number of cells', `${HEADER}r;1;2\n`, 'The row has 3 cells where the header has 8.'],
+    ['a quote left open', `${HEADER}"r;1;2\n`, 'The quote that opens in line 2 is not closed'],
+    ['UTF-16', '\ufeffid', 'the byte-order mark of UTF-16'],
+  ])('a file of rows that is %s is refused in a sentence', (what, content, sentence) =>
+    inFolder(filesOf(text), async (folder) => {
+      const { path } = await fitted(folder);
+      const file = join(folder, 'more.csv');
+      await writeFile(file, content, what === 'UTF-16' ? 'utf16le' : 'utf8');
+      const run = await plumbrule('predict', path, file);
+      expect([run.status, run.out]).toEqual([2, '']);
+      expect(run.err).toContain(sentence);
+    }),
+  );
+
+  test('the same rows, however their file is written, give the same predictions', () =>
+    inFolder(filesOf(text), async (folder) => {
+      const { path } = await fitted(folder);
+      const file = join(folder, 'more.csv');
+      const predictions = async (content: string) => {
+        await writeFile(file, content);
+        const run = await plumbrule('predict', path, file);
+        expect(run.status, run.err).toBe(0);
+        return run.out;
+      };
+      const plain = await predictions(ROWS);
+      const quoted = ROWS.replaceAll(/[^;\n]+/g, '"$&"');
+      for (const content of [
+        `\ufeff${ROWS}`,
+        ROWS.replaceAll('\n', '\r\n'),
+        ROWS.replaceAll('\n', '\r'),
+        quoted,
+        quoted.replaceAll(';', ','),
+        ROWS.trimEnd(),
+        ROWS.replaceAll('\n', ' \n'),
+      ]) {
+        expect(await predictions(content)).toBe(plain);
+      }
+    }));
 
   test('totals of groups have the full covariance of their rows, and the group may be any column', () =>
     inFolder({ ...filesOf(text), 'rows.csv': ROWS.replace('far;11', 'far;9') }, async (folder) => {
