@@ -11,7 +11,6 @@ const TOO_CLOSE = 1e-6;
 const SPLITTER = 134217729;
 
 const bits = new DataView(new ArrayBuffer(8));
-const digits = new Uint8Array(17);
 const [ZERO, POINT, MINUS] = [48, 46, 45];
 
 /** By four digits as a number: their characters. */
@@ -98,35 +97,50 @@ export function writeNumber(value: number, out: Uint8Array, at: number): number 
     if (upper >= 1e9) return writeText(String(value), out, at);
   }
 
-  const first = (upper / 1e8) | 0;
-  digits[0] = ZERO + first;
-  writeEight(upper - first * 1e8, 1);
-  writeEight(lower, 9);
-  let count = 17;
-  while (digits[count - 1] === ZERO) count--;
-
   let to = at;
   if (value < 0) out[to++] = MINUS;
-  let from = 0;
   if (ten < 0) {
     out[to++] = ZERO;
     out[to++] = POINT;
     for (let k = ten + 1; k < 0; k++) out[to++] = ZERO;
-  } else {
-    while (from <= ten) out[to++] = digits[from++]!;
-    if (from < count) out[to++] = POINT;
+    writeDigits(upper, lower, out, to);
+    return pastZeros(out, to + 17);
   }
-  while (from < count) out[to++] = digits[from++]!;
-  return to;
+  // One place further on, and then those before the point back by one.
+  writeDigits(upper, lower, out, to + 1);
+  for (let k = 0; k <= ten; k++) out[to + k] = out[to + k + 1]!;
+  const point = to + ten + 1;
+  out[point] = POINT;
+  const end = pastZeros(out, to + 18);
+  return end === point + 1 ? point : end;
 }
 
-function writeEight(number: number, at: number): void {
-  const left = (number / 1e4) | 0;
-  const right = number - left * 1e4;
-  for (let k = 0; k < 4; k++) {
-    digits[at + k] = FOUR_DIGITS[4 * left + k]!;
-    digits[at + 4 + k] = FOUR_DIGITS[4 * right + k]!;
-  }
+/** 9 digits and 8. */
+function writeDigits(upper: number, lower: number, out: Uint8Array, at: number): void {
+  const first = (upper / 1e8) | 0;
+  const rest = upper - first * 1e8;
+  const left = (rest / 1e4) | 0;
+  const middle = (lower / 1e4) | 0;
+  out[at] = ZERO + first;
+  writeFour(left, out, at + 1);
+  writeFour(rest - left * 1e4, out, at + 5);
+  writeFour(middle, out, at + 9);
+  writeFour(lower - middle * 1e4, out, at + 13);
+}
+
+function writeFour(number: number, out: Uint8Array, at: number): void {
+  const from = 4 * number;
+  out[at] = FOUR_DIGITS[from]!;
+  out[at + 1] = FOUR_DIGITS[from + 1]!;
+  out[at + 2] = FOUR_DIGITS[from + 2]!;
+  out[at + 3] = FOUR_DIGITS[from + 3]!;
+}
+
+/** Where digits end, the noughts at their end left out. */
+function pastZeros(out: Uint8Array, end: number): number {
+  let to = end;
+  while (out[to - 1] === ZERO) to--;
+  return to;
 }
 
 function writeText(text: string, out: Uint8Array, at: number): number {

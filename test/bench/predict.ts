@@ -52,7 +52,10 @@ async function seconds(work: () => Promise<unknown>): Promise<number> {
 }
 
 async function done(args: readonly string[]): Promise<void> {
-  const err = (text: string) => process.stderr.write(text);
+  let said = '';
+  const err = (text: string) => {
+    said += text;
+  };
   const status = await runCommandLine([...args], {
     out: () => {},
     err,
@@ -60,7 +63,7 @@ async function done(args: readonly string[]): Promise<void> {
     errIsTerminal: false,
     width: 80,
   });
-  if (status !== 0) throw new Error(`${args[0]} ended with status ${status}`);
+  if (status !== 0) throw new Error(`${args[0]} ended with status ${status}: ${said}`);
 }
 
 function fail({ message }: { readonly message: string }): void {
