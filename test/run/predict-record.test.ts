@@ -1,6 +1,9 @@
+import { spawn } from 'node:child_process';
+import { once } from 'node:events';
 import { readFile, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { Readable } from 'node:stream';
+import { fileURLToPath } from 'node:url';
 import { describe, expect, test } from 'vitest';
 import { predictFromRecord } from '../../src/predict-record.ts';
 import type { StudyRecord } from '../../src/record/record.ts';
@@ -224,6 +227,25 @@ describe('predict', () => {
       ]) {
         expect(await predictions(content)).toBe(plain);
       }
+    }));
+
+  test('a reader that has had enough of a long output ends it without a word', () =>
+    inFolder(filesOf(text), async (folder) => {
+      const { path } = await fitted(folder);
+      const file = join(folder, 'more.csv');
+      await writeFile(file, HEADER + Array.from({ length: 10_000 }, (_, i) => line(i)).join(''));
+      const main = fileURLToPath(new URL('../../src/cli/main.ts', import.meta.url));
+      const args = ['--import', import.meta.resolve('tsx'), main, 'predict', path, file];
+      const child = spawn(process.execPath, args, { stdio: ['ignore', 'pipe', 'pipe'] });
+      let err = '';
+      child.stderr.on('data', (bytes) => {
+        err += bytes;
+      });
+      const [head] = (await once(child.stdout, 'data')) as [Buffer];
+      child.stdout.destroy();
+      const [status] = await once(child, 'close');
+      expect(head.toString()).toMatch(/^label,estimate,/);
+      expect([status, err]).toEqual([0, '']);
     }));
 
   test('totals of groups have the full covariance of their rows, and the group may be any column', () =>
