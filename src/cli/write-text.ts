@@ -1,29 +1,41 @@
-import { randomUUID } from 'node:crypto';
-import { mkdir, rename, rm, writeFile } from 'node:fs/promises';
+import { mkdirSync, realpathSync, renameSync, rmSync, statSync } from 'node:fs';
 import { dirname } from 'node:path';
 import type { Report } from '../problem.ts';
+import { hiddenPath, tidy } from '../record/hidden-files.ts';
+import { isSystemFault, reason } from '../record/system-fault.ts';
+import { writePieces } from '../record/write-results.ts';
 
-/** Writes one file beside the results, whole or not at all; a failure is reported. Says whether it is written. */
+/**
+ * Writes one file beside the results, whole or not at all; a failure is reported. Says whether it is written. Through a
+ * link, the file that it leads to is written; a device or a pipe is written to as it is.
+ */
 export async function writeText(
   path: string,
   content: string | Iterable<string>,
   report: Report,
 ): Promise<boolean> {
-  const beside = `${path}.${randomUUID()}`;
+  let beside: string | null = null;
   try {
-    await mkdir(dirname(path), { recursive: true });
-    await writeFile(beside, content);
-    await rename(beside, path);
+    const found = statSync(path, { throwIfNoEntry: false });
+    if (found !== undefined && !found.isFile() && !found.isDirectory()) {
+      writePieces(path, content);
+      return true;
+    }
+    const place = found === undefined ? path : realpathSync(path);
+    mkdirSync(dirname(place), { recursive: true });
+    beside = hiddenPath(dirname(place));
+    writePieces(beside, content);
+    renameSync(beside, place);
+    tidy(dirname(place));
     return true;
   } catch (fault) {
-    await rm(beside, { force: true }).catch(() => {});
-    const code = (fault as { readonly code?: unknown }).code;
-    if (typeof code !== 'string') throw fault;
+    if (beside !== null) rmSync(beside, { force: true });
+    if (!isSystemFault(fault)) throw fault;
     report({
       code: 'output_unwritable',
       severity: 'error',
       place: { kind: 'file', file: path },
-      message: `"${path}" cannot be written: the system says ${code}.`,
+      message: `"${path}" cannot be written: ${reason(fault)}.`,
     });
     return false;
   }

@@ -1,6 +1,8 @@
 import { readFile } from 'node:fs/promises';
+import { dirname } from 'node:path';
 import type { Place, Report } from '../problem.ts';
 import { findJsonFault } from './json-fault.ts';
+import { finishMoves } from './move-results.ts';
 import type { StudyRecord } from './record.ts';
 import { recordFaults } from './record-faults.ts';
 
@@ -13,6 +15,9 @@ const FORMAT: StudyRecord['format'] = 'plumbrule-record/1';
  * Reads a record from a file, or reports why it cannot be used (`record_unreadable`) and gives null:
  * no such file, not UTF-8, a study, not JSON (with line and column), another format or version, or not as the
  * schema says (each fault, up to ten).
+ *
+ * Where a run was killed while it moved its results into the record's folder, they are moved in first (see `moveIn`), so
+ * that what is read is the whole of one run's.
  */
 export async function readRecord(path: string, report: Report): Promise<StudyRecord | null> {
   const refuse = (message: string, hint?: string, place: Place = { kind: 'file', file: path }) => {
@@ -25,11 +30,14 @@ export async function readRecord(path: string, report: Report): Promise<StudyRec
     });
   };
 
+  const stuck = await finishMoves(dirname(path));
   let bytes: Uint8Array;
   try {
     bytes = await readFile(path);
   } catch (fault) {
-    refuse(`The record cannot be read: ${reason(fault)}.`);
+    if (stuck === null || codeOf(fault) !== 'ENOENT') refuse(`The record cannot be read: ${reason(fault)}.`);
+    else
+      refuse(`The record cannot be read: ${stuck}.`, 'Mend that and read it again, or fit the study again.');
     return null;
   }
 
@@ -87,8 +95,12 @@ function formatOf(value: unknown): string | null {
   return typeof format === 'string' ? format : null;
 }
 
+function codeOf(fault: unknown): unknown {
+  return (fault as { readonly code?: unknown }).code;
+}
+
 function reason(fault: unknown): string {
-  const code = (fault as { code?: unknown }).code;
+  const code = codeOf(fault);
   if (code === 'ENOENT') return 'there is no such file';
   if (code === 'EISDIR') return 'it is a folder';
   if (code === 'EACCES' || code === 'EPERM') return 'permission is denied';

@@ -1,13 +1,9 @@
 /** `compare` and `fit --against` on the command line, with records good and bad. */
-import { spawn } from 'node:child_process';
 import { cp, mkdtemp, readdir, readFile, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { fileURLToPath } from 'node:url';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { runCommandLine } from '../../src/cli/command-line.ts';
-import type { Problem } from '../../src/problem.ts';
-import { RESULT_FILES, writeResults } from '../../src/record/write-results.ts';
 import { collecting } from '../cli/collect.ts';
 import { CARS, carsStudy, csvText } from './sides.ts';
 
@@ -230,98 +226,5 @@ describe('fit --against', () => {
     expect(status).toBe(2);
     expect(err).toContain('there is no such file');
     expect(await readdir(home)).not.toContain('unwritten');
-  });
-});
-
-/** The files of a folder of results; the hidden ones of a run that was killed apart. */
-async function contents(folder: string) {
-  const names = await readdir(folder, { recursive: true });
-  const shown: Record<string, string> = {};
-  for (const name of names.sort()) {
-    if (name.startsWith('.plumbrule-') || !RESULT_FILES.includes(name as (typeof RESULT_FILES)[number]))
-      continue;
-    shown[name] = (await readFile(join(folder, name))).toString('latin1');
-  }
-  return { shown, hidden: names.filter((name) => name.startsWith('.plumbrule-')) };
-}
-
-describe('results under way', () => {
-  test('a run killed at any moment leaves the old results or the new ones', {
-    timeout: 120_000,
-  }, async () => {
-    await writeFile(at('cars.csv'), csvText(OLD));
-    await plumbrule('fit', at('cars.study.yaml'), '--out', at('old'));
-    await writeFile(at('cars.csv'), csvText(NEW));
-    await plumbrule('fit', at('cars.study.yaml'), '--out', at('new'));
-    const [old, fresh] = [(await contents(at('old'))).shown, (await contents(at('new'))).shown];
-    const main = fileURLToPath(new URL('../../src/cli/main.ts', import.meta.url));
-    const args = [
-      '--import',
-      import.meta.resolve('tsx'),
-      main,
-      'fit',
-      at('cars.study.yaml'),
-      '--out',
-      at('killed'),
-    ];
-    const run = (wait: number | null) =>
-      new Promise<number>((resolve) => {
-        const started = performance.now();
-        const child = spawn(process.execPath, args, { stdio: 'ignore' });
-        const timer = wait === null ? null : setTimeout(() => child.kill('SIGKILL'), wait);
-        child.on('exit', () => {
-          if (timer !== null) clearTimeout(timer);
-          resolve(performance.now() - started);
-        });
-      });
-    await cp(at('old'), at('killed'), { recursive: true });
-    const whole = await run(null);
-    expect((await contents(at('killed'))).shown).toEqual(fresh);
-    for (const share of [0.6, 0.9, 0.96, 1]) {
-      await rm(at('killed'), { recursive: true });
-      await cp(at('old'), at('killed'), { recursive: true });
-      await run(whole * share);
-      const { shown, hidden } = await contents(at('killed'));
-      // Within the milliseconds of the last renames the files moved aside lie in the hidden folder; see write-results.ts.
-      const between = hidden.some((name) => name.includes('earlier'));
-      if (between) continue;
-      const same = (other: typeof shown) => JSON.stringify(shown) === JSON.stringify(other);
-      expect(same(old) || same(fresh), `killed after ${Math.round(whole * share)} ms`).toBe(true);
-    }
-    // Whatever was left, the next run goes through.
-    await run(null);
-    expect((await contents(at('killed'))).shown).toEqual(fresh);
-  });
-
-  test('two runs at once leave the whole of one of them', async () => {
-    const names = ['report.html', 'tables/candidates.csv', 'sample.csv.gz', 'record.json'];
-    async function* slowly(text: string) {
-      for (let k = 0; k < 5; k++) {
-        await new Promise((resolve) => setTimeout(resolve, (text.charCodeAt(0) * 7 + k * 3) % 5));
-        yield text.repeat(1000);
-      }
-    }
-    for (let round = 0; round < 8; round++) {
-      const out = at('crowded', String(round % 3));
-      const problems: Problem[] = [];
-      const written = await Promise.all(
-        ['a', 'b', 'c', 'd'].map((run) =>
-          writeResults(
-            out,
-            names.slice(run === 'd' ? 1 : 0).map((name) => ({ name, content: slowly(run + round) })),
-            (problem) => problems.push(problem),
-            RESULT_FILES,
-          ),
-        ),
-      );
-      expect(problems).toEqual([]);
-      expect(written).toEqual([true, true, true, true]);
-      const { shown, hidden } = await contents(out);
-      expect(hidden).toEqual([]);
-      const texts = new Set(Object.values(shown).map((text) => text.slice(0, 2)));
-      expect(texts.size).toBe(1);
-      expect(Object.keys(shown).length).toBe([...texts][0]!.startsWith('d') ? 3 : 4);
-      expect((await readdir(at('crowded'))).filter((name) => name.startsWith('.'))).toEqual([]);
-    }
   });
 });

@@ -37,13 +37,13 @@ const first: ResultFile[] = [
 ];
 
 describe('writeResults', () => {
-  test('makes the folder and its parents, from texts and streams', async () => {
-    async function* stream() {
+  test('makes the folder and its parents, from texts and pieces of texts and bytes', async () => {
+    function* pieces() {
       yield 'a';
-      yield 'é\n';
+      yield Buffer.from('é\n');
     }
     const out = join(folder, 'deep/er/results');
-    const files = [...first, { name: 'a.csv', content: stream() }, { name: 'b.csv', content: ['x', 'y'] }];
+    const files = [...first, { name: 'a.csv', content: pieces() }, { name: 'b.csv', content: ['x', 'y'] }];
     expect(await write(out, files)).toEqual([]);
     expect(await tree(folder)).toEqual({
       'deep/er/results/record.json': 'record 1',
@@ -139,8 +139,12 @@ describe('writeResults', () => {
     const module = new URL('../../src/record/write-results.ts', import.meta.url).href;
     const script = `
       const { writeResults } = await import(${JSON.stringify(module)});
-      async function* endless() {
-        for (;;) yield 'x'.repeat(1000);
+      function* endless() {
+        // Slow, so that the file does not fill the disk before it is found.
+        for (;;) {
+          yield 'x'.repeat(1000);
+          Atomics.wait(new Int32Array(new SharedArrayBuffer(4)), 0, 0, 5);
+        }
       }
       const files = [{ name: 'report.md', content: 'report 2' }, { name: 'record.json', content: endless() }];
       await writeResults(${JSON.stringify(out)}, files, () => {});
