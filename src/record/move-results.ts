@@ -68,7 +68,12 @@ export async function moveIn(folder: string, staging: string, change: Change): P
  */
 export async function finishMoves(folder: string): Promise<string | null> {
   for (;;) {
-    const [staging] = markedIn(folder);
+    let staging: string | undefined;
+    try {
+      [staging] = markedIn(folder);
+    } catch {
+      return null;
+    }
     if (staging === undefined) return null;
     try {
       const turn = await takeTurn(folder);
@@ -85,16 +90,10 @@ export async function finishMoves(folder: string): Promise<string | null> {
   }
 }
 
-/** Hidden folders with a marker; none where the folder cannot be listed. */
+/** Hidden folders with a marker. */
 function markedIn(folder: string): string[] {
-  let names: readonly string[];
-  try {
-    names = readdirSync(folder);
-  } catch {
-    return [];
-  }
-  const hidden = names.filter((name) => name.startsWith(HIDDEN)).map((name) => join(folder, name));
-  return hidden.filter(isMarked);
+  const hidden = readdirSync(folder).filter((name) => name.startsWith(HIDDEN));
+  return hidden.map((name) => join(folder, name)).filter(isMarked);
 }
 
 function unfinished(staging: string, fault: SystemFault): string {

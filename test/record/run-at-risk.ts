@@ -1,7 +1,7 @@
 /**
  * A program that writes results and is killed, stopped or refused by the file system at a step of its own choosing. It is
  * bundled and run by `at-risk.ts`, which gives it tasks on its standard input. A step is whatever changes something on the
- * disk: a file made, a half of its text, a folder made or removed, a file moved or removed.
+ * disk: a file made, a half of its text, a folder made or removed, a file moved or removed. To list a folder is one too.
  */
 import fs from 'node:fs';
 import { syncBuiltinESMExports } from 'node:module';
@@ -95,6 +95,7 @@ function age(folder: string, by: number): void {
 const real = {
   now: Date.now,
   open: fs.openSync,
+  readdir: fs.readdirSync,
   mkdir: fs.mkdirSync,
   rename: fs.renameSync,
   rmdir: fs.rmdirSync,
@@ -130,7 +131,7 @@ function remove(path: string): void {
     if (fs.existsSync(path)) real.unlink(path);
     return;
   }
-  for (const name of fs.readdirSync(path)) remove(join(path, name));
+  for (const name of real.readdir(path)) remove(join(path, name));
   step();
   real.rmdir(path);
 }
@@ -143,6 +144,7 @@ const counting = (work: (...given: never[]) => unknown) =>
 
 Object.assign(fs, {
   openSync: counting(real.open),
+  readdirSync: counting(real.readdir),
   mkdirSync: counting(real.mkdir),
   renameSync: counting(real.rename),
   rmdirSync: counting(real.rmdir),
