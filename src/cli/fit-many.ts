@@ -92,7 +92,7 @@ function jobOf(
   if (earlier == null) return job;
   if (earlier.folders.has(folder)) return { ...job, hasEarlier: true, earlier: join(earlier.root, folder) };
   // Where levels of it were run before, it is not new.
-  const repeated = [...earlier.folders].some((each) => each.startsWith(`${folder}/`));
+  const repeated = place.level === null && [...earlier.folders].some((each) => each.startsWith(`${folder}/`));
   return repeated ? job : { ...job, hasEarlier: false };
 }
 
