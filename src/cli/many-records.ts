@@ -2,6 +2,7 @@ import { readdir, stat } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { ComparedSide } from '../compare/compare.ts';
 import type { Report } from '../problem.ts';
+import { finishMoves } from '../record/move-results.ts';
 import { readRecord } from '../record/read-record.ts';
 import type { StudyRecord } from '../record/record.ts';
 import type { GoneRun } from '../report/overview.ts';
@@ -37,9 +38,12 @@ async function foldersBelow(root: string, folder: string, depth: number): Promis
   return found;
 }
 
-/** Whether results of one run lie in a folder. */
+/** Whether results of one run lie in a folder; where a run was killed while it moved them in, that is finished first. */
 export async function hasRecord(folder: string): Promise<boolean> {
-  return isThere(join(folder, 'record.json'));
+  const record = join(folder, 'record.json');
+  if (await isThere(record)) return true;
+  await finishMoves(folder);
+  return isThere(record);
 }
 
 /** The earlier records that many runs are held against; null, with an error reported, where there are none. */

@@ -1,5 +1,5 @@
 /** Many runs against the records of many earlier ones: `fit --against` and `compare`. */
-import { cp, mkdtemp, readdir, readFile, rm, writeFile } from 'node:fs/promises';
+import { cp, mkdir, mkdtemp, readdir, readFile, rename, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
@@ -239,6 +239,16 @@ describe('a study that repeats', () => {
     const compared = await plumbrule('compare', at('spoilt'), at('results'));
     expect(compared.status).toBe(2);
     expect(plain(compared.out)).toMatch(/Alder failed not compared/);
+  });
+
+  test('a record whose move into its folder was cut short is an earlier record', async () => {
+    await cp(at('earlier'), at('cut'), { recursive: true });
+    const hidden = at('cut', 'Gorse', '.plumbrule-cut');
+    await mkdir(join(hidden, 'new'), { recursive: true });
+    await rename(at('cut', 'Gorse', 'record.json'), join(hidden, 'new', 'record.json'));
+    await writeFile(join(hidden, 'forward.json'), JSON.stringify({ coming: ['record.json'], gone: [] }));
+    await plumbrule('fit', at('wells.study.yaml'), '--out', at('uncut'), '--against', at('cut'));
+    expect((await overviewRows(at('uncut'))).Gorse).toMatchObject({ against_earlier: 'choice kept' });
   });
 
   test('a study that cannot be read loses no level', async () => {
