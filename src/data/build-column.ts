@@ -3,8 +3,13 @@ import type { ColumnFaults } from './faults.ts';
 import { type DateReader, readIsoDate } from './read-date.ts';
 import { flagTexts, readUsualFlag } from './read-flag.ts';
 import { readNumber, readPlainNumber } from './read-number.ts';
-import { type CellRows, cellText } from './split-rows.ts';
 import type { CategoryColumn, Column, TextColumn } from './table.ts';
+
+/** Rows of cells, and the line on which each starts. */
+export interface Rows {
+  readonly cells: readonly (readonly string[])[];
+  readonly lines: readonly number[];
+}
 
 /** Turns the cells of one column into values, batch by batch. */
 export interface ColumnBuilder {
@@ -13,7 +18,7 @@ export interface ColumnBuilder {
    * Reads cell `faults.position` of every row; the first becomes row `base` of the table, which is expected to have
    * `expected` rows in all, or as many as there are.
    */
-  readonly fill: (rows: CellRows, base: number, expected: number) => void;
+  readonly fill: (rows: Rows, base: number, expected: number) => void;
   /** The column, cut to the rows read. */
   readonly finish: (rowCount: number) => Column;
 }
@@ -70,20 +75,20 @@ function buildNumbers(
 
   return {
     variable,
-    fill: (rows, base, expected) => {
-      const { text, codes, starts, ends, first, lines, count } = rows;
+    fill: ({ cells, lines }, base, expected) => {
+      const count = cells.length;
       values = withRoom(values, base + count, expected);
       for (let i = 0; i < count; i++) {
-        const cell = first[i]! + at;
-        let value = readPlainNumber(text, codes, starts[cell]!, ends[cell]!, mark);
+        const cell = cells[i]![at]!;
+        let value = readPlainNumber(cell, mark);
         if (Number.isNaN(value) || (mayBeMissing && missingNumbers.has(value))) {
-          value = readOther(cellText(rows, i, at), base + i, lines[i]!);
+          value = readOther(cell, base + i, lines[i]!);
         }
         if (whole && !Number.isSafeInteger(value) && !Number.isNaN(value)) {
-          faults.add('cell_not_integer', base + i, lines[i]!, cellText(rows, i, at).trim());
+          faults.add('cell_not_integer', base + i, lines[i]!, cell.trim());
           value = Number.NaN;
         } else if (value < least || value > most) {
-          faults.add('cell_out_of_range', base + i, lines[i]!, cellText(rows, i, at).trim());
+          faults.add('cell_out_of_range', base + i, lines[i]!, cell.trim());
           value = Number.NaN;
         }
         values[base + i] = value;
@@ -112,11 +117,11 @@ function buildFlags(
       : (text: string): number => (text === declared[0] ? 0 : text === declared[1] ? 1 : Number.NaN);
   return {
     variable,
-    fill: (rows, base, expected) => {
-      const { lines, count } = rows;
+    fill: ({ cells, lines }, base, expected) => {
+      const count = cells.length;
       values = withRoom(values, base + count, expected);
       for (let i = 0; i < count; i++) {
-        const text = cellText(rows, i, at).trim();
+        const text = cells[i]![at]!.trim();
         const value = missing.has(text) ? Number.NaN : read(text);
         if (value === 0) spelt[0].add(text);
         else if (value === 1) spelt[1].add(text);
@@ -145,11 +150,11 @@ function buildDates(
   let values: Float64Array = new Float64Array(0);
   return {
     variable,
-    fill: (rows, base, expected) => {
-      const { lines, count } = rows;
+    fill: ({ cells, lines }, base, expected) => {
+      const count = cells.length;
       values = withRoom(values, base + count, expected);
       for (let i = 0; i < count; i++) {
-        const text = cellText(rows, i, at).trim();
+        const text = cells[i]![at]!.trim();
         let value = Number.NaN;
         if (!missing.has(text)) {
           value = readDate(text);
@@ -182,11 +187,11 @@ function buildCategory(
   let codes: Int32Array = new Int32Array(0);
   return {
     variable,
-    fill: (rows, base, expected) => {
-      const { lines, count } = rows;
+    fill: ({ cells, lines }, base, expected) => {
+      const count = cells.length;
       codes = withRoom(codes, base + count, expected);
       for (let i = 0; i < count; i++) {
-        const text = cellText(rows, i, at).trim();
+        const text = cells[i]![at]!.trim();
         let code = -1;
         if (!missing.has(text)) {
           const known = codeOf.get(text);
@@ -229,9 +234,9 @@ function buildTexts(
   const values: (string | null)[] = [];
   return {
     variable,
-    fill: (rows) => {
-      for (let i = 0; i < rows.count; i++) {
-        const cell = cellText(rows, i, at);
+    fill: ({ cells }) => {
+      for (const row of cells) {
+        const cell = row[at]!;
         const text = cell.trim();
         const absent = missing.has(text) || (identifier && text === '');
         values.push(absent ? null : keep(identifier ? text : cell));

@@ -1,11 +1,11 @@
 import { nearest } from '../expression/nearest.ts';
 import type { Report } from '../problem.ts';
 import type { DataPlan, VariablePlan } from '../study/study.ts';
-import { buildColumn, type ColumnBuilder } from './build-column.ts';
+import { buildColumn, type ColumnBuilder, type Rows } from './build-column.ts';
 import type { ColumnFaults, Faults } from './faults.ts';
 import type { HeaderMatch } from './match-header.ts';
 import { datePatternReader } from './read-date.ts';
-import { type CellRows, type RowBatch, rowTexts } from './split-rows.ts';
+import type { RowBatch } from './split-rows.ts';
 import type { Column } from './table.ts';
 import type { EncodingWatch } from './watch-encoding.ts';
 
@@ -50,29 +50,31 @@ export function startColumns(
   return readable ? fillings : null;
 }
 
-/** The rows of a batch from `from` on that can be read and have as many cells as the header; the others are noted. */
+/** The rows of a batch from `first` on that can be read and have as many cells as the header; the others are noted. */
 export function takeWholeRows(
   batch: RowBatch,
-  from: number,
+  first: number,
   header: readonly string[],
   faults: Faults,
   encoding: EncodingWatch,
-): CellRows {
-  const { rows, replaced } = batch;
-  const [kept, lines] = [new Int32Array(rows.count), new Uint32Array(rows.count)];
-  let count = 0;
-  for (let i = from; i < rows.count; i++) {
-    const line = rows.lines[i]!;
-    if (replaced && encoding.rejects(rowTexts(rows, i), line, header)) continue;
-    if (rows.widths[i] !== header.length) {
-      faults.ragged(line, rows.widths[i]!, header.length);
+): Rows {
+  const { cells, lines, replaced } = batch;
+  let kept = 0;
+  for (let i = first; i < cells.length; i++) {
+    const row = cells[i]!;
+    const line = lines[i]!;
+    if (replaced && encoding.rejects(row, line, header)) continue;
+    if (row.length !== header.length) {
+      faults.ragged(line, row.length, header.length);
       continue;
     }
-    kept[count] = rows.first[i]!;
-    lines[count] = line;
-    count++;
+    cells[kept] = row;
+    lines[kept] = line;
+    kept++;
   }
-  return { ...rows, first: kept, lines: lines.subarray(0, count), count };
+  cells.length = kept;
+  lines.length = kept;
+  return { cells, lines };
 }
 
 /** The finished column. */

@@ -1,4 +1,4 @@
-import { rowParser, rowTexts } from './split-rows.ts';
+import { rowParser } from './split-rows.ts';
 
 const DELIMITERS = [',', ';', '\t', '|'] as const;
 const ROWS_LOOKED_AT = 50;
@@ -12,11 +12,13 @@ export function findDelimiter(head: string, newline: '\n' | '\r', expected: Read
   let best = ',';
   let bestScore: readonly number[] = [];
   for (const delimiter of DELIMITERS) {
-    const { rows } = rowParser({ delimiter, newline }, ROWS_LOOKED_AT)(head, false, 1);
-    const header = rows.count === 0 ? [] : rowTexts(rows, 0);
+    const rows = rowParser({ delimiter, newline }, ROWS_LOOKED_AT)(head, false).data.filter(
+      (row) => row.length > 1 || row[0]!.trim() !== '',
+    );
+    const header = rows[0] ?? [];
     const named = header.filter((name) => expected.has(name.trim())).length;
-    const even = rows.widths.subarray(0, rows.count).filter((width) => width === header.length).length;
-    const score = header.length > 1 ? [named, even / rows.count, header.length] : [named, 0, 1];
+    const even = rows.filter((row) => row.length === header.length).length / Math.max(1, rows.length);
+    const score = header.length > 1 ? [named, even, header.length] : [named, 0, 1];
     if (isGreater(score, bestScore)) {
       best = delimiter;
       bestScore = score;

@@ -4,33 +4,27 @@ const NUMBER = /^[+-]?(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?$/;
 
 /**
  * A plain decimal ("12", "-3.25", "+.5", "5."), without surrounding spaces or an exponent: exactly the double that
- * `Number` gives; NaN for any other text. `mark` is the character code of the decimal mark. The decimal stands
- * from `from` to `to` in a text, whose UTF-16 code units are `codes`.
+ * `Number` gives; NaN for any other text. `mark` is the character code of the decimal mark.
  *
  * Up to 15 digits are gathered as an integer below 10^15, which is exact, and divided once by an exact power of
  * ten: one correctly rounded operation on exact numbers is correctly rounded (Clinger 1990, the fast path).
  */
-export function readPlainNumber(
-  text: string,
-  codes: Uint16Array,
-  from: number,
-  to: number,
-  mark: number,
-): number {
-  let i = from;
+export function readPlainNumber(text: string, mark: number): number {
+  const length = text.length;
+  let i = 0;
   let negative = false;
-  if (to > from) {
-    const sign = codes[from];
+  if (length > 0) {
+    const sign = text.charCodeAt(0);
     if (sign === 45 || sign === 43) {
       negative = sign === 45;
-      i++;
+      i = 1;
     }
   }
   let integer = 0;
   let digits = 0;
   let afterMark = -1;
-  for (; i < to; i++) {
-    const code = codes[i]!;
+  for (; i < length; i++) {
+    const code = text.charCodeAt(i);
     if (code >= 48 && code <= 57) {
       integer = integer * 10 + (code - 48);
       digits++;
@@ -41,10 +35,7 @@ export function readPlainNumber(
     }
   }
   if (digits === 0) return Number.NaN;
-  if (digits > 15) {
-    const whole = text.slice(from, to);
-    return finite(Number(mark === 46 ? whole : whole.replace(',', '.')));
-  }
+  if (digits > 15) return finite(Number(mark === 46 ? text : text.replace(',', '.')));
   const value = afterMark < 0 ? integer : integer / POWERS_OF_TEN[digits - afterMark]!;
   return negative ? -value : value;
 }

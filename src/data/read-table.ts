@@ -7,7 +7,7 @@ import { checkBaseline, type Filling, finishColumn, startColumns, takeWholeRows 
 import { findDelimiter } from './find-delimiter.ts';
 import { type HeaderMatch, matchHeader } from './match-header.ts';
 import { type ByteSource, brokenOff, isReadingError, openBytes, streamedBytes } from './read-bytes.ts';
-import { rowTexts, splitRows } from './split-rows.ts';
+import { splitRows } from './split-rows.ts';
 import { summarise } from './summarise.ts';
 import type { Table } from './table.ts';
 import { warnOfLikeLevels } from './warn-of-like-levels.ts';
@@ -110,7 +110,7 @@ async function readRows(
 
   const faults = gatherFaults(plan, limit, onBadCell);
   const encoding = watchEncoding(plan);
-  const lines: Uint32Array[] = [];
+  const lines: (readonly number[])[] = [];
   let header: { cells: readonly string[]; match: HeaderMatch; fillings: readonly Filling[] } | null = null;
   let rowCount = 0;
   let rowsExpected = 0;
@@ -120,9 +120,9 @@ async function readRows(
     broken = batch.fault;
     let first = 0;
     if (header === null) {
-      if (batch.rows.count === 0) continue;
-      const cells = rowTexts(batch.rows, 0);
-      const line = batch.rows.lines[0]!;
+      const cells = batch.cells[0];
+      if (cells === undefined) continue;
+      const line = batch.lines[0]!;
       if (batch.replaced) encoding.rejects(cells, line, cells);
       const match = matchHeader(plan, cells, line, required, optional, report);
       const fillings = startColumns(plan, match.found, faults, report);
@@ -134,11 +134,11 @@ async function readRows(
       first = 1;
     }
     const rows = takeWholeRows(batch, first, header.cells, faults, encoding);
-    if (rowsExpected === 0 && rows.count > 0)
-      rowsExpected = expectedRows(source.size, rows.count / decoded.headBytes);
+    if (rowsExpected === 0 && rows.cells.length > 0)
+      rowsExpected = expectedRows(source.size, rows.cells.length / decoded.headBytes);
     for (const { builder } of header.fillings) builder.fill(rows, rowCount, rowsExpected);
     lines.push(rows.lines);
-    rowCount += rows.count;
+    rowCount += rows.cells.length;
     onProgress?.(rowCount);
   }
 
@@ -181,7 +181,7 @@ function expectedRows(size: number | null, perByte: number): number {
   return size === null ? 0 : Math.ceil(size * perByte * 1.05) + 16;
 }
 
-function joinLines(parts: readonly Uint32Array[], rowCount: number): Uint32Array {
+function joinLines(parts: readonly (readonly number[])[], rowCount: number): Uint32Array {
   const all = new Uint32Array(rowCount);
   let at = 0;
   for (const part of parts) {

@@ -1,7 +1,7 @@
 import { decodeText } from '../data/decode-text.ts';
 import { findDelimiter } from '../data/find-delimiter.ts';
 import { brokenOff, isReadingError, openBytes } from '../data/read-bytes.ts';
-import { rowTexts, splitRows } from '../data/split-rows.ts';
+import { splitRows } from '../data/split-rows.ts';
 import type { Problem, Report } from '../problem.ts';
 
 /** The cells of a data file that nothing is declared of yet, trimmed, by column. */
@@ -52,8 +52,7 @@ async function read(
         report(batch.fault);
         return null;
       }
-      for (let k = 0; k < batch.rows.count; k++) {
-        const row = rowTexts(batch.rows, k);
+      for (const [k, row] of batch.cells.entries()) {
         if (header === null) {
           header = row.map((name) => name.trim());
           for (const _ of header) columns.push([]);
@@ -61,7 +60,7 @@ async function read(
         }
         if (row.length !== header.length) {
           const message = `The row has ${row.length} cells where the header has ${header.length}.`;
-          return refuse('row_ragged', message, batch.rows.lines[k]!);
+          return refuse('row_ragged', message, batch.lines[k]!);
         }
         row.forEach((cell, column) => {
           columns[column]!.push(cell.trim());

@@ -4,7 +4,7 @@ import { dirname, join } from 'node:path';
 import { createGunzip } from 'node:zlib';
 import type { TextPiece } from '../data/decode-text.ts';
 import { readPlainNumber } from '../data/read-number.ts';
-import { type CellRows, cellText, rowTexts, splitRows } from '../data/split-rows.ts';
+import { splitRows } from '../data/split-rows.ts';
 import type { Column } from '../data/table.ts';
 import type { Report } from '../problem.ts';
 import { unguardedText } from './quoted-cell.ts';
@@ -59,7 +59,7 @@ export async function readSample(
   try {
     for await (const batch of splitRows(textOf(file, hash), { delimiter: ',', newline: '\n' }, file)) {
       if (batch.fault !== null) return damaged('The rows kept with this record cannot be read as a table.');
-      const fault = reader.take(batch.rows);
+      const fault = reader.take(batch.cells);
       if (fault !== null) return damaged(fault);
     }
   } catch (fault) {
@@ -119,14 +119,13 @@ async function* textOf(
 
 interface Reader {
   /** Takes rows of cells; what is wrong with them, or null. */
-  readonly take: (rows: CellRows) => string | null;
+  readonly take: (cells: readonly (readonly string[])[]) => string | null;
   /** Null where rows are wanting. */
   readonly finish: () => KeptRows | null;
 }
 
 interface Builder {
-  /** Takes one of the cells of rows. */
-  readonly set: (row: number, rows: CellRows, cell: number) => void;
+  readonly set: (row: number, cell: string) => void;
   readonly column: Column;
 }
 
@@ -140,10 +139,9 @@ function startReading(record: StudyRecord): Reader {
   let builders: Builder[] | null = null;
   let count = 0;
   return {
-    take(rows) {
-      for (let k = 0; k < rows.count; k++) {
+    take(cells) {
+      for (const row of cells) {
         if (builders === null) {
-          const row = rowTexts(rows, k);
           const named = row.slice(first).map((cell) => variables.get(unguardedText(cell)));
           if (row[0] !== 'row' || named.includes(undefined)) {
             return 'The rows kept with this record name variables that it does not have.';
@@ -151,15 +149,12 @@ function startReading(record: StudyRecord): Reader {
           builders = named.map((variable) => builderOf(variable!, n));
           continue;
         }
-        if (rows.widths[k] !== first + builders.length || count === n) {
+        if (row.length !== first + builders.length || count === n) {
           return 'The rows kept with this record are not as the record describes them.';
         }
-        lines[count] = Number(cellText(rows, k, 0));
-        if (ids !== null) ids[count] = unguardedText(cellText(rows, k, 1));
-        for (let j = 0; j < builders.length; j++) {
-          const cell = rows.first[k]! + first + j;
-          builders[j]!.set(count, rows, cell);
-        }
+        lines[count] = Number(row[0]);
+        if (ids !== null) ids[count] = unguardedText(row[1]!);
+        for (let j = 0; j < builders.length; j++) builders[j]!.set(count, row[first + j]!);
         count++;
       }
       return null;
@@ -186,9 +181,8 @@ function builderOf(variable: RecordVariable, n: number): Builder {
       const values = new Array<string | null>(n).fill(null);
       return {
         column: { kind: 'text', name, values },
-        set: (row, { text, starts, ends }, cell) => {
-          const [start, end] = [starts[cell]!, ends[cell]!];
-          values[row] = start === end ? null : unguardedText(text.slice(start, end));
+        set: (row, cell) => {
+          values[row] = cell === '' ? null : unguardedText(cell);
         },
       };
     }
@@ -203,10 +197,9 @@ function builderOf(variable: RecordVariable, n: number): Builder {
           values,
           ...(flag ? { flagTexts: [texts[0]!, texts[1]!] as const } : {}),
         },
-        set: (row, { text, codes, starts, ends }, cell) => {
-          const [start, end] = [starts[cell]!, ends[cell]!];
-          const value = readPlainNumber(text, codes, start, end, 46);
-          values[row] = Number.isNaN(value) && start < end ? Number(text.slice(start, end)) : value;
+        set: (row, cell) => {
+          const value = readPlainNumber(cell, 46);
+          values[row] = Number.isNaN(value) && cell !== '' ? Number(cell) : value;
         },
       };
     }
@@ -220,13 +213,12 @@ function categoryBuilder({ name, levels: described }: RecordVariable, n: number)
   const known = new Map(levels.map((level, code) => [level, code]));
   return {
     column: { kind: 'category', name, codes, levels, baseline: levels[0] ?? '' },
-    set: (row, { text, starts, ends }, cell) => {
-      const [start, end] = [starts[cell]!, ends[cell]!];
-      if (start === end) {
+    set: (row, cell) => {
+      if (cell === '') {
         codes[row] = -1;
         return;
       }
-      const level = unguardedText(text.slice(start, end));
+      const level = unguardedText(cell);
       let code = known.get(level);
       if (code === undefined) {
         code = levels.push(level) - 1;
