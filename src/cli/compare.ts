@@ -2,6 +2,7 @@ import { join } from 'node:path';
 import { compareRecords } from '../compare/compare.ts';
 import { readCompared } from '../compare/read-compared.ts';
 import type { Problem } from '../problem.ts';
+import { replacedRecord } from '../record/replaced-record.ts';
 import { type ResultFile, writeResults } from '../record/write-results.ts';
 import { type CompareCommandOptions, filesOf, statusOfComparison, templatePlaces } from './compared-files.ts';
 import { comparisonSummary } from './comparison-summary.ts';
@@ -38,7 +39,9 @@ export async function compareCommand(
   if (comparison !== null) files = await filesOf(comparison, later!.record, options, report);
   let places: string[] = [];
   if (out !== undefined && files.length > 0 && !hasError(problems)) {
-    if (await writeResults(out, files, report)) places = files.map(({ name }) => join(out, name));
+    const obstacle = replacedRecord(out, [earlier!, later!]);
+    if (await writeResults(out, files, report, [], obstacle))
+      places = files.map(({ name }) => join(out, name));
   }
   await showProblems(
     problems,

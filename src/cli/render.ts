@@ -3,6 +3,7 @@ import { readVerdicts } from '../compare/read-verdicts.ts';
 import type { Problem } from '../problem.ts';
 import { readRecord } from '../record/read-record.ts';
 import type { StudyRecord } from '../record/record.ts';
+import { replacedRecord } from '../record/replaced-record.ts';
 import { writeResults } from '../record/write-results.ts';
 import type { ReportFormat } from '../report/render.ts';
 import type { CommonOptions } from './common-options.ts';
@@ -39,7 +40,8 @@ export async function renderCommand(
     // Where this record was held against an earlier one, the comparison beside it says what came of that.
     const verdicts = await readVerdicts(path, record, report);
     const files = hasError(problems) ? [] : await reportFiles(record, formats, templates, verdicts, report);
-    if (!hasError(problems) && (await writeResults(out, files, report))) {
+    const obstacle = replacedRecord(out, [{ file: path, record }]);
+    if (!hasError(problems) && (await writeResults(out, files, report, [], obstacle))) {
       written = files.map((file) => join(out, file.name));
     }
   }

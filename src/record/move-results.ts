@@ -37,8 +37,16 @@ export class MoveStuck extends Error {}
  * files or a part of the new ones and never some of both, and where it has a record it has all that belongs to it. A run
  * that is killed on the way leaves the marker, and whoever next writes there or reads the record finishes the move (see
  * `finishMoves`). A fault of the file system has everything moved back, and is thrown.
+ *
+ * `obstacle` is asked when no other run can change the folder any more: why the files are not to be moved in, as the
+ * end of a sentence, or null.
  */
-export async function moveIn(folder: string, staging: string, change: Change): Promise<void> {
+export async function moveIn(
+  folder: string,
+  staging: string,
+  change: Change,
+  obstacle: () => string | null,
+): Promise<void> {
   let decided = false;
   for (;;) {
     const turn = await takeTurn(folder);
@@ -46,6 +54,8 @@ export async function moveIn(folder: string, staging: string, change: Change): P
       finishWith(turn, folder);
       // Our turn was lost on the way; what was left of the move is done now.
       if (decided) return;
+      const why = obstacle();
+      if (why !== null) throw new MoveStuck(why);
       refuseFolders(folder, change);
       turn.hold();
       writeMarker(staging, change);

@@ -52,6 +52,9 @@ export const RESULT_FILES = [
  * This holds against the end of a process, not of the machine: nothing is forced to the disk, which would take longer
  * than all the rest.
  *
+ * What is made from files in `out`, as a report is from its record, must not be moved in beside others that have come
+ * meanwhile: `obstacle` says so when its turn has come (see `moveIn`).
+ *
  * Any failure is reported as `output_unwritable`, with the earlier results untouched.
  */
 export async function writeResults(
@@ -59,6 +62,7 @@ export async function writeResults(
   files: readonly ResultFile[],
   report: Report,
   obsolete: readonly string[] = [],
+  obstacle: () => string | null = () => null,
 ): Promise<boolean> {
   const folder = resolve(out);
   let made: string | undefined;
@@ -76,7 +80,7 @@ export async function writeResults(
       if (!existed) staging = renamed(staging, join(folder, basename(staging)));
       const coming = files.map((file) => file.name);
       const gone = obsolete.filter((name) => !coming.includes(name));
-      await moveIn(folder, staging, { coming, gone });
+      await moveIn(folder, staging, { coming, gone }, obstacle);
     }
     // Runs that were killed before `out` appeared left their hidden folders beside it.
     tidy(dirname(folder));

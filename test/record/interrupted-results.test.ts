@@ -10,13 +10,14 @@ import {
 } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
-import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { afterAll, beforeAll, describe, expect, test, vi } from 'vitest';
 import type { Problem } from '../../src/problem.ts';
 import { takeTurn } from '../../src/record/folder-turn.ts';
 import { readRecord } from '../../src/record/read-record.ts';
 import { recordText } from '../../src/record/record-text.ts';
 import { RESULT_FILES, writeResults } from '../../src/record/write-results.ts';
 import { randomFrom } from '../../src/stats/random.ts';
+import { plumbrule } from '../cli/in-folder.ts';
 import { atRisk, forgotten, hidden, inPairs, type RunTasks, shown } from './at-risk.ts';
 import type { Outcome, Task } from './run-at-risk.ts';
 import { smallRecord } from './small-record.ts';
@@ -408,6 +409,22 @@ describe('runs at once', () => {
     utimesSync(lock, Date.now() / 1000 - 60, Date.now() / 1000 - 60);
     expect(await written).toEqual([]);
     expect(ours(folder)).toEqual(FRESH);
+    expect(hidden(folder)).toEqual([]);
+  });
+
+  test('a report is not moved in beside the record of another run that has come meanwhile', async () => {
+    const folder = folderWith({ 'record.json': record('old') });
+    const lock = join(folder, '.plumbrule-lock-someone');
+    writeFileSync(lock, '');
+    const rendered = plumbrule('render', join(folder, 'record.json'));
+    // It has read the record and made the report when its hidden folder is there.
+    await vi.waitFor(() => expect(hidden(folder).length).toBeGreaterThan(1), { timeout: 20_000 });
+    writeFileSync(join(folder, 'record.json'), record('new'));
+    rmSync(lock);
+    const { status, err } = await rendered;
+    expect(status).toBe(2);
+    expect(err).toContain('another run has replaced the record in this folder meanwhile');
+    expect(ours(folder)).toEqual({ 'record.json': record('new') });
     expect(hidden(folder)).toEqual([]);
   });
 
