@@ -33,6 +33,8 @@ export type {
 export type { ResidualColumns } from './record/tables.ts';
 export { type Rendered, type RenderOptions, type ReportFormat, render } from './report/render.ts';
 export { renderComparison } from './report/render-comparison.ts';
-export { type CheckedStudy, checkStudy, type RunOptions, type RunResult, runStudy } from './run.ts';
+export { type CheckedStudy, checkStudy } from './run/check-study.ts';
+export type { RunOptions } from './run/read-study-and-data.ts';
+export { type RunResult, runStudy } from './run/run-study.ts';
 export type { Study } from './study/study.ts';
 export { type Verified, type VerifyOptions, verifyRecord } from './verify.ts';

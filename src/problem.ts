@@ -153,6 +153,11 @@ export interface Problem {
 /** Stages report through this and go on. */
 export type Report = (problem: Problem) => void;
 
+/** Whether any of the problems keeps the study, the data or the command line from being used. */
+export function hasError(problems: readonly Problem[]): boolean {
+  return problems.some(({ severity }) => severity === 'error');
+}
+
 /** Thrown only at the public edge, when a stage cannot go on; carries everything found so far. */
 export class Unusable extends Error {
   readonly problems: readonly Problem[];

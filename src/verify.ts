@@ -7,7 +7,8 @@ import { countNumbers, type Difference, differences } from './record/differences
 import { readRecord } from './record/read-record.ts';
 import type { StudyRecord } from './record/record.ts';
 import { recordText } from './record/record-text.ts';
-import { type RunOptions, runStudy } from './run.ts';
+import type { RunOptions } from './run/read-study-and-data.ts';
+import { runStudy } from './run/run-study.ts';
 
 export interface VerifyOptions extends Pick<RunOptions, 'onProgress'> {
   /** The study file, or the folder that it lies in; looked for where left out (see `findStudy`). */

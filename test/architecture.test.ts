@@ -25,7 +25,7 @@ const ROOMS = [
   'record',
   'compare',
   'report',
-  'run.ts',
+  'run',
   'verify.ts',
   'predict-record.ts',
   'cli',

@@ -1,10 +1,9 @@
-import type { Problem } from '../problem.ts';
-import { type CheckedStudy, checkStudy } from '../run.ts';
+import { hasError, type Problem } from '../problem.ts';
+import { type CheckedStudy, checkStudy } from '../run/check-study.ts';
 import type { StudyOptions } from './common-options.ts';
 import { contractSummary } from './contract-summary.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
 import { givenParameters } from './given-parameters.ts';
-import { hasError } from './has-error.ts';
 import { progressOn } from './progress.ts';
 import { showDataNotRead, showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';

@@ -1,13 +1,12 @@
 import { basename, join, resolve } from 'node:path';
 import { compareRecords } from '../compare/compare.ts';
 import { readCompared } from '../compare/read-compared.ts';
-import type { Problem } from '../problem.ts';
+import { hasError, type Problem } from '../problem.ts';
 import { writeResults } from '../record/write-results.ts';
 import { type CompareCommandOptions, filesOf, statusOfComparison, templatePlaces } from './compared-files.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
 import { finishMany } from './finish-many.ts';
 import { givenTemplate } from './given-template.ts';
-import { hasError } from './has-error.ts';
 import { type ManyRecords, readEarlier, recordName } from './many-records.ts';
 import { type ManyRun, manyRun } from './many-run.ts';
 import { progressOn } from './progress.ts';

@@ -1,13 +1,12 @@
 import { join } from 'node:path';
 import { compareRecords } from '../compare/compare.ts';
 import { readCompared } from '../compare/read-compared.ts';
-import type { Problem } from '../problem.ts';
+import { hasError, type Problem } from '../problem.ts';
 import { replacedRecord } from '../record/replaced-record.ts';
 import { type ResultFile, writeResults } from '../record/write-results.ts';
 import { type CompareCommandOptions, filesOf, statusOfComparison, templatePlaces } from './compared-files.ts';
 import { comparisonSummary } from './comparison-summary.ts';
 import { UNUSABLE } from './exit-status.ts';
-import { hasError } from './has-error.ts';
 import { DEEPEST, findRecords, hasRecord, type ManyRecords } from './many-records.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';

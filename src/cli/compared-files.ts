@@ -1,12 +1,11 @@
 import type { Comparison } from '../compare/comparison.ts';
-import type { Problem, Report } from '../problem.ts';
+import { hasError, type Problem, type Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
 import type { ResultFile } from '../record/write-results.ts';
 import type { CommonOptions } from './common-options.ts';
 import { COMPARISON_FORMATS, type ComparisonFormat, comparisonFiles } from './comparison-files.ts';
 import { DONE, NOT_ACCEPTED } from './exit-status.ts';
 import { givenTemplate } from './given-template.ts';
-import { hasError } from './has-error.ts';
 import { templateNames } from './report-files.ts';
 
 export interface CompareCommandOptions extends CommonOptions {

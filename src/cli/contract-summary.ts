@@ -2,7 +2,7 @@ import type { Table } from '../data/table.ts';
 import type { Sample } from '../prepare/sample.ts';
 import { count, isoDate, value } from '../report/numbers.ts';
 import { counted, listed } from '../report/words/lexicon.ts';
-import type { CheckedStudy } from '../run.ts';
+import type { CheckedStudy } from '../run/check-study.ts';
 import type { Study } from '../study/study.ts';
 import { type Paragraph, plumbLine, type Section } from './plumb-line.ts';
 import type { Terminal } from './terminal.ts';

@@ -1,9 +1,8 @@
 import { access } from 'node:fs/promises';
 import { draftStudy } from '../draft/draft-study.ts';
-import type { Problem } from '../problem.ts';
+import { hasError, type Problem } from '../problem.ts';
 import type { CommonOptions } from './common-options.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
-import { hasError } from './has-error.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';

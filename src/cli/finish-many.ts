@@ -1,11 +1,10 @@
 import { join, relative, resolve } from 'node:path';
-import type { Problem } from '../problem.ts';
+import { hasError, type Problem } from '../problem.ts';
 import { writeResults } from '../record/write-results.ts';
 import { goneSuite, junitText } from '../report/junit.ts';
 import type { GoneRun, Overview } from '../report/overview.ts';
 import type { CommonOptions } from './common-options.ts';
 import { UNUSABLE } from './exit-status.ts';
-import { hasError } from './has-error.ts';
 import { goneRuns, type ManyRecords } from './many-records.ts';
 import type { ManyRun } from './many-run.ts';
 import { OVERVIEW_FILES, overviewFiles } from './overview-files.ts';

@@ -1,5 +1,6 @@
 import { join } from 'node:path';
-import { type ReadStudy, type RunOptions, readStudyAndData } from '../run.ts';
+import { hasError } from '../problem.ts';
+import { type ReadStudy, type RunOptions, readStudyAndData } from '../run/read-study-and-data.ts';
 import { studyName } from './fit-one.ts';
 import { doJob, faultText, inTurn, type Job } from './level-job.ts';
 import type { ManyRecords } from './many-records.ts';
@@ -59,7 +60,7 @@ export async function fitRepeats(
   name: string | null = null,
 ): Promise<ManyRun[]> {
   const levels = (read.levels ?? []).map(({ level }) => level);
-  if (levels.length === 0 || read.problems.some(({ severity }) => severity === 'error')) {
+  if (levels.length === 0 || hasError(read.problems)) {
     const place = { name: name ?? studyName(path), folder: name ?? '.', study: path, level: null };
     return [await doJob(path, { ...read, table: null }, jobOf(place, out, null), {})];
   }

@@ -1,14 +1,14 @@
 import { basename, dirname, join, resolve } from 'node:path';
 import type { ComparedSide } from '../compare/compare.ts';
 import type { Comparison } from '../compare/comparison.ts';
-import type { Problem, Report } from '../problem.ts';
+import { hasError, type Problem, type Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
 import { recordPieces } from '../record/record-text.ts';
 import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
 import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
-import { type ReadStudy, type RunOptions, type RunResult, runRead } from '../run.ts';
+import type { ReadStudy, RunOptions } from '../run/read-study-and-data.ts';
+import { type RunResult, runRead } from '../run/run-study.ts';
 import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
-import { hasError } from './has-error.ts';
 import { reportFiles, templateNames, templatesIn } from './report-files.ts';
 
 /** What came of one study. */

@@ -1,6 +1,6 @@
 import { join } from 'node:path';
 import type { Problem } from '../problem.ts';
-import type { ReadStudy } from '../run.ts';
+import type { ReadStudy } from '../run/read-study-and-data.ts';
 import { UNUSABLE } from './exit-status.ts';
 import { findStudies } from './find-studies.ts';
 import { finishMany } from './finish-many.ts';

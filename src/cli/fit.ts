@@ -1,13 +1,12 @@
 import { join, relative, resolve } from 'node:path';
 import type { ComparedSide } from '../compare/compare.ts';
-import type { Problem, Report } from '../problem.ts';
+import { hasError, type Problem, type Report } from '../problem.ts';
 import { junitSuite, junitText } from '../report/junit.ts';
-import { type ReadStudy, readStudyAndData } from '../run.ts';
+import { type ReadStudy, readStudyAndData } from '../run/read-study-and-data.ts';
 import { UNUSABLE } from './exit-status.ts';
 import { defaultFolder, type FittedStudy, fitRead, statusOf } from './fit-one.ts';
 import type { FitCommandOptions } from './fit-options.ts';
 import { givenParameters } from './given-parameters.ts';
-import { hasError } from './has-error.ts';
 import { isFolderOfStudies } from './is-folder.ts';
 import { progressOn } from './progress.ts';
 import { showDataNotRead, showProblems } from './show-problems.ts';

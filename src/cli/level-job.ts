@@ -1,8 +1,8 @@
-import type { Problem } from '../problem.ts';
-import { ofLevel, type ReadStudy, type RunOptions } from '../run.ts';
+import { hasError, type Problem } from '../problem.ts';
+import type { ReadStudy, RunOptions } from '../run/read-study-and-data.ts';
+import { ofLevel } from '../run/run-sample.ts';
 import { UNUSABLE } from './exit-status.ts';
 import { fitRead, statusOf } from './fit-one.ts';
-import { hasError } from './has-error.ts';
 import { readEarlier } from './many-records.ts';
 import { faultyRun, type ManyRun, manyRun, type RunPlace } from './many-run.ts';
 

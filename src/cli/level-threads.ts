@@ -1,7 +1,7 @@
 import { availableParallelism } from 'node:os';
 import { Worker } from 'node:worker_threads';
 import { packageUrl } from '../package-file.ts';
-import type { ReadStudy } from '../run.ts';
+import type { ReadStudy } from '../run/read-study-and-data.ts';
 import { doJob, type Job } from './level-job.ts';
 import { faultyRun, type ManyRun } from './many-run.ts';
 

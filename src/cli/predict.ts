@@ -1,9 +1,8 @@
 import { predictColumnsFromRecord, type RecordPredictionColumns } from '../predict-record.ts';
-import type { Problem } from '../problem.ts';
+import { hasError, type Problem } from '../problem.ts';
 import { predictedRowsJson, predictedRowsTable, totalsTable } from '../record/predicted-rows.ts';
 import type { CommonOptions } from './common-options.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
-import { hasError } from './has-error.ts';
 import { progressOn } from './progress.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';

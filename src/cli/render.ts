@@ -1,6 +1,6 @@
 import { dirname, join } from 'node:path';
 import { readVerdicts } from '../compare/read-verdicts.ts';
-import type { Problem } from '../problem.ts';
+import { hasError, type Problem } from '../problem.ts';
 import { readRecord } from '../record/read-record.ts';
 import type { StudyRecord } from '../record/record.ts';
 import { replacedRecord } from '../record/replaced-record.ts';
@@ -9,7 +9,6 @@ import type { ReportFormat } from '../report/render.ts';
 import type { CommonOptions } from './common-options.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
 import { givenTemplate } from './given-template.ts';
-import { hasError } from './has-error.ts';
 import { reportFiles, templateNames } from './report-files.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';

@@ -1,4 +1,4 @@
-import type { Problem } from '../problem.ts';
+import { hasError, type Problem } from '../problem.ts';
 import type { Difference } from '../record/differences.ts';
 import { type Verified, verifyRecord } from '../verify.ts';
 import type { CommonOptions } from './common-options.ts';
@@ -42,7 +42,7 @@ export async function verifyCommand(
   if (!verified.ran) return UNUSABLE;
   if (options.quiet !== true && options.problems === 'text')
     terminal.out(`${verdict(verified, tolerance)}\n`);
-  return problems.some(({ severity }) => severity === 'error') ? NOT_ACCEPTED : DONE;
+  return hasError(problems) ? NOT_ACCEPTED : DONE;
 }
 
 function toleranceOf(text: string): number | null {
@@ -68,9 +68,7 @@ function verdict({ study, compared, differences, problems }: Verified, tolerance
   const how = tolerance === 0 ? 'to the last bit' : `to ${tolerance} of their size`;
   if (differences.length === 0) {
     const all = `${study} gives all ${compared.toLocaleString('en-GB')} numbers of the record again, ${how}.`;
-    return problems.some(({ severity }) => severity === 'error')
-      ? `${all} But not everything that it was made from is the same.`
-      : all;
+    return hasError(problems) ? `${all} But not everything that it was made from is the same.` : all;
   }
   const most = Math.max(...differences.map(({ relative }) => relative ?? Number.POSITIVE_INFINITY));
   const many = differences.length === 1 ? 'One entry differs' : `${differences.length} entries differ`;

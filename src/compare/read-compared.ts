@@ -1,6 +1,6 @@
 import { stat } from 'node:fs/promises';
 import { join } from 'node:path';
-import type { Problem, Report } from '../problem.ts';
+import { hasError, type Problem, type Report } from '../problem.ts';
 import { readRecord } from '../record/read-record.ts';
 import { readSample } from '../record/read-sample.ts';
 import type { ComparedSide } from './compare.ts';
@@ -16,7 +16,7 @@ export async function readCompared(path: string, report: Report): Promise<Compar
   const found: Problem[] = [];
   const rows = await readSample(file, record, (problem) => found.push(problem));
   found.forEach(report);
-  return found.some(({ severity }) => severity === 'error') ? null : { record, rows, file };
+  return hasError(found) ? null : { record, rows, file };
 }
 
 async function isFolder(path: string): Promise<boolean> {

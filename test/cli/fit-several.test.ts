@@ -8,13 +8,13 @@ import { fitMany } from '../../src/cli/fit-many.ts';
 import { doJob, type Job } from '../../src/cli/level-job.ts';
 import { inThreads, threadsFor } from '../../src/cli/level-threads.ts';
 import { safeNames } from '../../src/cli/safe-names.ts';
-import { readStudyAndData } from '../../src/run.ts';
+import { readStudyAndData } from '../../src/run/read-study-and-data.ts';
 import { data, study } from '../run/small-study.ts';
 import { inFolder, plumbrule } from './in-folder.ts';
 
 /** The program itself, but for studies with "fault" in the names of their files, by which it is broken. */
-vi.mock('../../src/run.ts', async (original) => {
-  const run = await original<typeof import('../../src/run.ts')>();
+vi.mock('../../src/run/read-study-and-data.ts', async (original) => {
+  const run = await original<typeof import('../../src/run/read-study-and-data.ts')>();
   return {
     ...run,
     readStudyAndData: (path: string, options: Parameters<typeof run.readStudyAndData>[1]) => {

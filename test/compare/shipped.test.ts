@@ -6,7 +6,7 @@ import { fileURLToPath } from 'node:url';
 import { afterAll, describe, expect, test } from 'vitest';
 import type { ComparedSide } from '../../src/compare/compare.ts';
 import { renderComparison } from '../../src/report/render-comparison.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 import { compared } from './sides.ts';
 
 const pipelines = fileURLToPath(new URL('../../pipelines/', import.meta.url));

@@ -7,7 +7,8 @@ import { describe, expect, test } from 'vitest';
 import { describeColumn, findDecimalMark } from '../../src/draft/describe-column.ts';
 import { draftStudy } from '../../src/draft/draft-study.ts';
 import { proposeCandidates } from '../../src/draft/propose-candidates.ts';
-import { checkStudy, runStudy } from '../../src/run.ts';
+import { checkStudy } from '../../src/run/check-study.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 import { inFolder, plumbrule } from '../cli/in-folder.ts';
 
 const errorsOf = (problems: readonly { severity: string; message: string }[]) =>

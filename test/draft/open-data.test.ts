@@ -5,7 +5,7 @@ import { fileURLToPath } from 'node:url';
 import papaparse from 'papaparse';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { draftStudy } from '../../src/draft/draft-study.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 
 /** Open data sets of the package vega-datasets, and the data of the shipped studies. */
 const OPEN = fileURLToPath(new URL('../../node_modules/vega-datasets/data/', import.meta.url));

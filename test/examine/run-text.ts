@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { Problem } from '../../src/problem.ts';
 import type { RecordModel, StudyRecord } from '../../src/record/record.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 
 export interface Ran {
   readonly record: StudyRecord | null;

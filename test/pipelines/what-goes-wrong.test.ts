@@ -6,7 +6,7 @@ import { fileURLToPath } from 'node:url';
 import { afterAll, describe, expect, test } from 'vitest';
 import { type Document, parseDocument } from 'yaml';
 import type { StudyRecord } from '../../src/record/record.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 
 const pipelines = fileURLToPath(new URL('../../pipelines/', import.meta.url));
 const scratch = mkdtempSync(join(tmpdir(), 'careless-'));

@@ -6,7 +6,7 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { StudyRecord } from '../../src/report/record-type.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 import { drawData } from './sample-data.ts';
 
 export interface Declared {

@@ -1,7 +1,7 @@
 import { fileURLToPath } from 'node:url';
 import { beforeAll, describe, expect, test } from 'vitest';
 import { render } from '../../src/report/render.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 
 const pageOf = async (pipeline: string): Promise<string> => {
   const path = fileURLToPath(new URL(`../../pipelines/${pipeline}/study.yaml`, import.meta.url));

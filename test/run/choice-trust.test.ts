@@ -318,7 +318,7 @@ test('progress of long work is told', async () => {
   const { mkdtemp, rm, writeFile } = await import('node:fs/promises');
   const { tmpdir } = await import('node:os');
   const { join } = await import('node:path');
-  const { runStudy } = await import('../../src/run.ts');
+  const { runStudy } = await import('../../src/run/run-study.ts');
   const folder = await mkdtemp(join(tmpdir(), 'plumbrule-'));
   try {
     await writeFile(join(folder, 'study.yaml'), study('{ validation: {}, honest_error: {}, stability: {} }'));

@@ -4,7 +4,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, describe, expect, test } from 'vitest';
 import { recordText } from '../../src/record/record-text.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 import { uniform } from '../select/any-problem.ts';
 
 const folder = mkdtempSync(join(tmpdir(), 'examination-'));

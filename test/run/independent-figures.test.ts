@@ -10,7 +10,7 @@ import { fileURLToPath } from 'node:url';
 import { afterAll, describe, expect, test } from 'vitest';
 import { parseDocument } from 'yaml';
 import type { RecordCandidate, StudyRecord } from '../../src/record/record.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 
 const TOLERANCE = 1e-10;
 const here = fileURLToPath(new URL('../reference/', import.meta.url));

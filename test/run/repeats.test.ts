@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
-import { readStudyAndData, runRead, runStudy } from '../../src/run.ts';
+import { readStudyAndData } from '../../src/run/read-study-and-data.ts';
+import { runRead, runStudy } from '../../src/run/run-study.ts';
 import { inFolder } from '../cli/in-folder.ts';
 import { data, study } from './small-study.ts';
 

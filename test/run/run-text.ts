@@ -1,7 +1,7 @@
 import { mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { type RunResult, runStudy } from '../../src/run.ts';
+import { type RunResult, runStudy } from '../../src/run/run-study.ts';
 
 /** Runs a study written as text, its data files beside it, in a folder of its own that is taken away again. */
 export async function runText(study: string, files: Readonly<Record<string, string>>): Promise<RunResult> {

@@ -6,7 +6,7 @@ import type { Problem } from '../../src/problem.ts';
 import type { StudyRecord } from '../../src/record/record.ts';
 import { recordFaults } from '../../src/record/record-faults.ts';
 import { recordText } from '../../src/record/record-text.ts';
-import { runStudy } from '../../src/run.ts';
+import { runStudy } from '../../src/run/run-study.ts';
 import { collecting } from '../cli/collect.ts';
 
 type Content = string | Uint8Array;
