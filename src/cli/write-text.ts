@@ -1,7 +1,8 @@
-import { mkdirSync, realpathSync, renameSync, rmSync, statSync } from 'node:fs';
-import { dirname } from 'node:path';
+import { realpathSync, renameSync, rmSync, statSync } from 'node:fs';
+import { dirname, resolve } from 'node:path';
 import type { Report } from '../problem.ts';
 import { hiddenPath, tidy } from '../record/hidden-files.ts';
+import { makeFolder } from '../record/make-folder.ts';
 import { isSystemFault, reason } from '../record/system-fault.ts';
 import { writePieces } from '../record/write-results.ts';
 
@@ -22,7 +23,7 @@ export async function writeText(
       return true;
     }
     const place = found === undefined ? path : realpathSync(path);
-    mkdirSync(dirname(place), { recursive: true });
+    makeFolder(resolve(dirname(place)));
     beside = hiddenPath(dirname(place));
     writePieces(beside, content);
     renameSync(beside, place);

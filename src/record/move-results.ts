@@ -1,7 +1,6 @@
 import {
   existsSync,
   lstatSync,
-  mkdirSync,
   readdirSync,
   readFileSync,
   renameSync,
@@ -11,6 +10,7 @@ import {
 import { dirname, join } from 'node:path';
 import { type Turn, TurnLost, takeTurn } from './folder-turn.ts';
 import { BACK, discard, FORWARD, HIDDEN, isMarked, tidy, toTrash } from './hidden-files.ts';
+import { makeFolder } from './make-folder.ts';
 import { isSystemFault, reason, type SystemFault, systemFault } from './system-fault.ts';
 
 /** What a run changes in a folder: names of files relative to it. */
@@ -179,7 +179,7 @@ function moveAll(turn: Turn, names: readonly string[], from: string, to: string)
 /** The folders that files of these names lie in. */
 export function makeFolders(folder: string, names: readonly string[]): void {
   for (const path of new Set(names.map((name) => dirname(join(folder, name))))) {
-    mkdirSync(path, { recursive: true });
+    makeFolder(path);
   }
 }
 

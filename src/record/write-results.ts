@@ -11,6 +11,7 @@ import {
 import { basename, dirname, join, resolve } from 'node:path';
 import type { Report } from '../problem.ts';
 import { discard, hiddenPath, isMarked, tidy } from './hidden-files.ts';
+import { makeFolder } from './make-folder.ts';
 import { MoveStuck, makeFolders, moveIn, NEW } from './move-results.ts';
 import { isSystemFault, reason, systemFault } from './system-fault.ts';
 
@@ -70,7 +71,7 @@ export async function writeResults(
   try {
     const existed = isFolder(folder);
     const parent = existed ? folder : dirname(folder);
-    made = mkdirSync(parent, { recursive: true });
+    made = makeFolder(parent);
     staging = hiddenPath(parent);
     mkdirSync(staging);
     stage(join(staging, NEW), files);
