@@ -58,6 +58,9 @@ function endPiece(output: Output): void {
 /** Longest text that may share a line with others of its list. */
 const SHORT = 40;
 
+/** A list of more numbers than this is not read by people: it goes without spaces. */
+const LONG = 50;
+
 type Primitive = string | number | boolean | null;
 
 function isPrimitive(value: unknown): value is Primitive {
@@ -81,8 +84,9 @@ function write(value: unknown, schema: SchemaNode | undefined, output: Output, l
 
 function writeList(list: readonly unknown[], items: SchemaNode | undefined, output: Output, line: string) {
   if (list.every((item) => item === null || Number.isFinite(item))) {
-    // Most of a record are long lists of numbers, which are written several times faster at once.
-    put(output, JSON.stringify(list).replace(/,/g, ', '));
+    // Most of a record are long lists of numbers, which the language writes several times faster at once.
+    const text = JSON.stringify(list);
+    put(output, list.length > LONG ? text : text.replace(/,/g, ', '));
     return;
   }
   if (list.every((item) => isPrimitive(item) && (typeof item !== 'string' || item.length <= SHORT))) {

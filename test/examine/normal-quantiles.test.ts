@@ -1,5 +1,6 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { normalQuantiles } from '../../src/examine/normal-quantiles.ts';
+import { normalQuantiles, sortSpread } from '../../src/examine/normal-quantiles.ts';
 import { normalQuantile } from '../../src/stats/distributions.ts';
 import { randomFrom } from '../../src/stats/random.ts';
 import { numbers } from '../prepare/columns.ts';
@@ -81,4 +82,23 @@ describe('ordered residuals', () => {
   it('are the same again', () => {
     expect(normalQuantiles(straight(50))).toEqual(normalQuantiles(straight(50)));
   });
+});
+
+it('numbers dealt into intervals come out as the language sorts them', () => {
+  const number = fc.oneof(
+    fc.double({ noNaN: true, noDefaultInfinity: true }),
+    fc.integer({ min: -3, max: 3 }),
+  );
+  fc.assert(
+    fc.property(fc.array(number, { maxLength: 60 }), (list) => {
+      // The two zeros are equal here, and are told apart by nothing that follows.
+      const values = Float64Array.from(list, (value) => value + 0);
+      const expected = values.slice().sort();
+      sortSpread(values, {
+        starts: new Int32Array(2 * list.length + 1),
+        sorted: new Float64Array(list.length),
+      });
+      expect(values).toEqual(expected);
+    }),
+  );
 });

@@ -1,7 +1,7 @@
 import { scaleLinear } from 'd3-scale';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { ticksOf } from '../../src/report/chart/axes.ts';
+import { placesAlong, roomy, ticksOf } from '../../src/report/chart/axes.ts';
 import { candidatesChart } from '../../src/report/chart/candidates.ts';
 import { fittedObservedChart } from '../../src/report/chart/fitted-observed.ts';
 import { influenceChart } from '../../src/report/chart/influence.ts';
@@ -243,17 +243,13 @@ describe('drawing helpers', () => {
     expect(() => at(Number.NaN)).toThrow('not a number');
   });
   it('leave out dots that are not finite and draw equal ones once', () => {
-    expect(
-      dots(
-        [
-          [1, 2],
-          [1, 2],
-          [Number.NaN, 1],
-        ],
-        'd',
-      ),
-    ).toBe('<path class="d" d="M1 2h0"/>');
-    expect(dots([], 'd')).toBe('');
+    expect(dots([1, 1, Number.NaN], [2, 2, 1], 'd')).toBe('<path class="d" d="M1 2h0"/>');
+    expect(dots([], [], 'd')).toBe('');
+  });
+  it('place many values where the scale puts each', () => {
+    const scale = roomy([-3, 1e6], [400, 12]);
+    const values = [-3, 0, 0.1, 77.7, 1e6, 2e6];
+    expect([...placesAlong(scale, values)]).toEqual(values.map((value) => scale(value)));
   });
   it('clip by letters, not by halves of them', () => {
     expect(clipped('😀😀😀', 2)).toBe('😀…');

@@ -45,6 +45,21 @@ export function roomy(span: readonly [number, number], range: readonly [number, 
     .range([...range]);
 }
 
+/**
+ * Where a scale puts each of many values: what it gives for them one by one, without a function of its own for each scale,
+ * which is slow until it has run for long.
+ */
+export function placesAlong(scale: Scale, values: readonly number[]): Float64Array {
+  const [low, high] = scale.domain() as [number, number];
+  const [from, to] = scale.range() as [number, number];
+  const at = new Float64Array(values.length);
+  for (let i = 0; i < values.length; i++) {
+    const share = (values[i]! - low) / (high - low);
+    at[i] = from * (1 - share) + to * share;
+  }
+  return at;
+}
+
 export interface Tick {
   readonly value: number;
   readonly text: string;

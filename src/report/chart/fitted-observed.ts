@@ -2,7 +2,17 @@ import type { RecordExamination, RecordModel } from '../record-type.ts';
 import { type Lexicon, raised } from '../words/lexicon.ts';
 import { typicalMiss } from '../words/miss.ts';
 import { fittedQuantity, fittedUnit } from '../words/scale.ts';
-import { axisTitle, bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import {
+  axisTitle,
+  bottomAxis,
+  leftAxis,
+  placesAlong,
+  plotOf,
+  roomy,
+  spanOf,
+  ticksOf,
+  WIDTH,
+} from './axes.ts';
 import { dots, drawing, element, type Figure } from './svg.ts';
 
 const HEIGHT = 330;
@@ -29,10 +39,7 @@ export function fittedObservedChart(
       caption,
       leftAxis(plot, y, ticksOf(y, 6), axisTitle(`observed: ${quantity}`, unit)) +
         bottomAxis(plot, x, ticksOf(x, 6), axisTitle(`fitted: ${quantity}`, unit)) +
-        dots(
-          points.fitted.map((f, i) => [x(f), y(points.observed[i]!)] as const),
-          'dots',
-        ) +
+        dots(placesAlong(x, points.fitted), placesAlong(y, points.observed), 'dots') +
         element('line', { class: 'plumb', x1: x(low), y1: y(low), x2: x(high), y2: y(high) }),
     ),
     caption,

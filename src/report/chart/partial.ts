@@ -3,7 +3,17 @@ import { area, line } from 'd3-shape';
 import { isoDate } from '../numbers.ts';
 import type { RecordExamination, RecordTerm } from '../record-type.ts';
 import { type Lexicon, labelOf, unitOf } from '../words/lexicon.ts';
-import { axisTitle, bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import {
+  axisTitle,
+  bottomAxis,
+  leftAxis,
+  placesAlong,
+  plotOf,
+  roomy,
+  spanOf,
+  ticksOf,
+  WIDTH,
+} from './axes.ts';
 import { differenceTicks, differenceTitle } from './effects.ts';
 import { dots, drawing, element, type Figure } from './svg.ts';
 
@@ -33,16 +43,12 @@ export function partialChart(
     .filter((p) => Number.isFinite(p.x) && Number.isFinite(p.y));
   if (usable.length < 2) return null;
   const numbers = points?.values.find((v) => v.variable === curve.variable)?.numbers ?? null;
-  const cloud =
-    numbers === null || points === null
-      ? []
-      : numbers
-          .map((x, i) => [x, curveAt(curve, x) + points.residual[i]!] as const)
-          .filter(([x, y]) => Number.isFinite(x) && Number.isFinite(y));
+  const shown =
+    numbers === null || points === null ? NO_ROWS : componentsPlusResiduals(curve, numbers, points.residual);
   const plot = plotOf(HEIGHT);
-  const x = roomy(spanOf(usable.map((p) => p.x).concat(cloud.map((p) => p[0]))), [plot.left, plot.right]);
+  const x = roomy(spanOf(usable.map((p) => p.x).concat(shown.x)), [plot.left, plot.right]);
   const drawn: (number | null)[] = [0, ...usable.flatMap((p) => [p.y, p.lower, p.upper])];
-  const y = roomy(spanOf(drawn.concat(cloud.map((p) => p[1]))), [plot.bottom, plot.top]);
+  const y = roomy(spanOf(drawn.concat(shown.y)), [plot.bottom, plot.top]);
   const banded = usable.filter((p) => p.lower !== null && p.upper !== null);
   const band = area<(typeof usable)[number]>()
     .x((p) => x(p.x))
@@ -66,13 +72,28 @@ export function partialChart(
       caption,
       leftAxis(plot, y, differenceTicks(lexicon, y, 5), `${differenceTitle(lexicon)}, the other terms held`) +
         bottomAxis(plot, x, ticks, axisTitle(label, unitOf(lexicon, curve.variable))) +
-        dots(
-          cloud.map(([a, b]) => [x(a), y(b)] as const),
-          'dots faint',
-        ) +
+        dots(placesAlong(x, shown.x), placesAlong(y, shown.y), 'dots faint') +
         (band === null || banded.length < 2 ? '' : element('path', { class: 'band', d: band })) +
         element('path', { class: 'curve', d: path ?? '' }),
     ),
     caption,
   };
+}
+
+const NO_ROWS = { x: [], y: [] };
+
+/** Each row’s value of the variable, and the curve there with the row’s residual; rows without either are left out. */
+function componentsPlusResiduals(
+  curve: Curve,
+  numbers: readonly number[],
+  residuals: readonly number[],
+): { readonly x: number[]; readonly y: number[] } {
+  const [x, y]: [number[], number[]] = [[], []];
+  for (let i = 0; i < numbers.length; i++) {
+    const height = curveAt(curve, numbers[i]!) + residuals[i]!;
+    if (!Number.isFinite(numbers[i]!) || !Number.isFinite(height)) continue;
+    x.push(numbers[i]!);
+    y.push(height);
+  }
+  return { x, y };
 }

@@ -1,7 +1,7 @@
 import { line } from 'd3-shape';
 import { count, fixed, significant } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
-import { bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import { bottomAxis, leftAxis, placesAlong, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
 import { at, clipped, dots, drawing, element, type Figure, label } from './svg.ts';
 
 const HEIGHT = 290;
@@ -56,10 +56,7 @@ export function quantilesChart({ normal_quantiles: found, points }: RecordExamin
         leftAxis(plot, y, ticksOf(y, 5), 'standardised residual') +
         bottomAxis(plot, x, ticksOf(x, 6), 'expected of normal errors') +
         element('line', { class: 'plumb', x1: x(low), y1: y(low), x2: x(high), y2: y(high) }) +
-        dots(
-          expected.map((q, i) => [x(q), y(residual[i]!)] as const),
-          'dots',
-        ) +
+        dots(placesAlong(x, expected), placesAlong(y, residual), 'dots') +
         names.join(''),
     ),
     caption,

@@ -3,7 +3,7 @@ import { rounded, roundingFor, withUnit } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { type Lexicon, labelOf, unitOf } from '../words/lexicon.ts';
 import { fittedUnit } from '../words/scale.ts';
-import { axisTitle, bottomAxis, leftAxis, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import { axisTitle, bottomAxis, leftAxis, placesAlong, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
 import { quantileOf } from './summary.ts';
 import { clipped, dots, drawing, element, type Figure } from './svg.ts';
 
@@ -45,10 +45,7 @@ export function residualsEachChart(lexicon: Lexicon, points: Points): Figure | n
         leftAxis(plot, y, ticksOf(y, 3), '') +
         bottomAxis(plot, x, ticksOf(x, 3), panelTitle(lexicon, variable)) +
         element('line', { class: 'plumb', x1: plot.left, x2: plot.right, y1: y(0), y2: y(0) }) +
-        dots(
-          numbers.map((v, i) => [x(v), y(points.residual[i]!)] as const),
-          'dots fine',
-        ) +
+        dots(placesAlong(x, numbers), placesAlong(y, points.residual), 'dots fine') +
         (course === null || middles.length < 3 ? '' : element('path', { class: 'trend', d: course })),
     };
   });

@@ -3,7 +3,17 @@ import { count, fixed, rounded, roundingFor, withUnit } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { type Lexicon, labelOf, raised, unitOf } from '../words/lexicon.ts';
 import { fittedQuantity, fittedUnit } from '../words/scale.ts';
-import { axisTitle, bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import {
+  axisTitle,
+  bottomAxis,
+  leftAxis,
+  placesAlong,
+  plotOf,
+  roomy,
+  spanOf,
+  ticksOf,
+  WIDTH,
+} from './axes.ts';
 import { levelPositions, strips } from './strips.ts';
 import { correlation, ranks, shareBetween, spreadAlong, twoThirds } from './summary.ts';
 import { at, dots, drawing, element, type Figure } from './svg.ts';
@@ -82,10 +92,7 @@ function againstNumber(
     leftAxis(plot, y, ticksOf(y, 5), residualTitle(lexicon)) +
       bottomAxis(plot, x, ticksOf(x, 6), title) +
       element('line', { class: 'plumb', x1: plot.left, x2: plot.right, y1: y(0), y2: y(0) }) +
-      dots(
-        xs.map((v, i) => [x(v), y(points.residual[i]!)] as const),
-        'dots',
-      ) +
+      dots(placesAlong(x, xs), placesAlong(y, points.residual), 'dots') +
       side(1) +
       side(-1),
   );
@@ -123,7 +130,14 @@ export function residualsTimeChart(lexicon: Lexicon, points: Points): Figure | n
         element('line', { class: 'plumb', x1: plot.left, x2: plot.right, y1: y(0), y2: y(0) }) +
         thread +
         dots(
-          order.map((i) => [x(position[i]!), y(points.residual[i]!)] as const),
+          placesAlong(
+            x,
+            order.map((i) => position[i]!),
+          ),
+          placesAlong(
+            y,
+            order.map((i) => points.residual[i]!),
+          ),
           'dots',
         ),
     ),

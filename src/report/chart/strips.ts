@@ -1,4 +1,4 @@
-import { bottomAxis, plumbLine, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import { bottomAxis, placesAlong, plumbLine, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
 import { clipped, dots, drawing, element, label } from './svg.ts';
 
 /** Levels beyond this are gathered under "other levels" in a drawing. */
@@ -33,9 +33,9 @@ export function strips(
     )
     .join('');
   // A fixed scatter across the strip keeps dots apart without a random number.
-  const cloud = values.flatMap((v, i) => {
+  const heights = values.map((_, i) => {
     const row = places.get(texts[i] ?? '');
-    return row === undefined ? [] : [[x(v), middle(row) + (((i * 7) % 11) - 5)] as const];
+    return row === undefined ? Number.NaN : middle(row) + (((i * 7) % 11) - 5);
   });
   return drawing(
     name,
@@ -45,6 +45,6 @@ export function strips(
     names +
       bottomAxis(plot, x, ticksOf(x, 6), axis) +
       plumbLine(x(0), plot.top, plot.bottom) +
-      dots(cloud, 'dots'),
+      dots(placesAlong(x, values), heights, 'dots'),
   );
 }

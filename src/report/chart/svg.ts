@@ -83,12 +83,13 @@ export function drawing(
 
 /**
  * Many dots as one path of zero-length strokes with round ends: a tenth of the size of as many circles.
- * Dots that fall on one another at a tenth of a unit are drawn once.
+ * Dots that fall on one another at a tenth of a unit are drawn once; what is not finite is left out.
  */
-export function dots(points: readonly (readonly [number, number])[], className: string): string {
+export function dots(xs: ArrayLike<number>, ys: ArrayLike<number>, className: string): string {
   const seen = new Set<number>();
   let path = '';
-  for (const [x, y] of points) {
+  for (let i = 0; i < xs.length; i++) {
+    const [x, y] = [xs[i]!, ys[i]!];
     if (!Number.isFinite(x) || !Number.isFinite(y)) continue;
     const [kx, ky] = [Math.round(x * 10), Math.round(y * 10)];
     // One number for both, exact for whatever lies within a thousand drawings of this one.
