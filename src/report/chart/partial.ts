@@ -1,5 +1,4 @@
 import { bisectLeft } from 'd3-array';
-import { area, line } from 'd3-shape';
 import { isoDate } from '../numbers.ts';
 import type { RecordExamination, RecordTerm } from '../record-type.ts';
 import { type Lexicon, labelOf, unitOf } from '../words/lexicon.ts';
@@ -15,7 +14,7 @@ import {
   WIDTH,
 } from './axes.ts';
 import { differenceTicks, differenceTitle } from './effects.ts';
-import { dots, drawing, element, type Figure } from './svg.ts';
+import { between, dots, drawing, element, type Figure, through } from './svg.ts';
 
 const HEIGHT = 280;
 
@@ -50,15 +49,15 @@ export function partialChart(
   const drawn: (number | null)[] = [0, ...usable.flatMap((p) => [p.y, p.lower, p.upper])];
   const y = roomy(spanOf(drawn.concat(shown.y)), [plot.bottom, plot.top]);
   const banded = usable.filter((p) => p.lower !== null && p.upper !== null);
-  const band = area<(typeof usable)[number]>()
-    .x((p) => x(p.x))
-    .y0((p) => y(p.lower as number))
-    .y1((p) => y(p.upper as number))
-    .digits(1)(banded);
-  const path = line<(typeof usable)[number]>(
-    (p) => x(p.x),
-    (p) => y(p.y),
-  ).digits(1)(usable);
+  const band = between(
+    banded.map((p) => x(p.x)),
+    banded.map((p) => y(p.upper as number)),
+    banded.map((p) => y(p.lower as number)),
+  );
+  const path = through(
+    usable.map((p) => x(p.x)),
+    usable.map((p) => y(p.y)),
+  );
   const label = labelOf(lexicon, curve.variable);
   const dated = lexicon.variables.get(curve.variable)?.type === 'date';
   const ticks = ticksOf(x, dated ? 4 : 6).map((t) =>
@@ -73,8 +72,8 @@ export function partialChart(
       leftAxis(plot, y, differenceTicks(lexicon, y, 5), `${differenceTitle(lexicon)}, the other terms held`) +
         bottomAxis(plot, x, ticks, axisTitle(label, unitOf(lexicon, curve.variable))) +
         dots(placesAlong(x, shown.x), placesAlong(y, shown.y), 'dots faint') +
-        (band === null || banded.length < 2 ? '' : element('path', { class: 'band', d: band })) +
-        element('path', { class: 'curve', d: path ?? '' }),
+        (band === '' ? '' : element('path', { class: 'band', d: band })) +
+        element('path', { class: 'curve', d: path }),
     ),
     caption,
   };

@@ -1,8 +1,7 @@
-import { line } from 'd3-shape';
 import { count, fixed, significant } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { bottomAxis, leftAxis, placesAlong, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
-import { at, clipped, dots, drawing, element, type Figure, label } from './svg.ts';
+import { between, clipped, dots, drawing, element, type Figure, label } from './svg.ts';
 
 const HEIGHT = 290;
 /** The farthest residuals are named where they lie outside the band. */
@@ -23,17 +22,9 @@ export function quantilesChart({ normal_quantiles: found, points }: RecordExamin
       ? ''
       : element('path', {
           class: 'band',
-          d: `${line<number>(
-            (_, i) => x(expected[i]!),
-            (v) => y(v),
-          ).digits(1)(upper)}${[...lower.keys()]
-            .reverse()
-            .map((i) => `L${at(x(expected[i]!))} ${at(y(lower[i]!))}`)
-            .join('')}Z`,
+          d: between(placesAlong(x, expected), placesAlong(y, upper), placesAlong(y, lower)),
         });
-  const outside = residual.flatMap((z, i) =>
-    lower !== null && upper !== null && (z < lower[i]! || z > upper[i]!) ? [i] : [],
-  );
+  const outside = ranksOutside(found);
   const far = [...outside].sort((a, b) => Math.abs(residual[b]!) - Math.abs(residual[a]!)).slice(0, NAMED);
   const names = far.map((i) => {
     const row = points.standardised_residual.indexOf(residual[i]!);
@@ -61,6 +52,15 @@ export function quantilesChart({ normal_quantiles: found, points }: RecordExamin
     ),
     caption,
   };
+}
+
+function ranksOutside({
+  residual,
+  lower,
+  upper,
+}: NonNullable<RecordExamination['normal_quantiles']>): number[] {
+  if (lower === null || upper === null) return [];
+  return residual.flatMap((z, i) => (z < lower[i]! || z > upper[i]! ? [i] : []));
 }
 
 function quantilesCaption(

@@ -1,11 +1,20 @@
-import { line } from 'd3-shape';
 import { rounded, roundingFor, withUnit } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { type Lexicon, labelOf, unitOf } from '../words/lexicon.ts';
 import { fittedUnit } from '../words/scale.ts';
-import { axisTitle, bottomAxis, leftAxis, placesAlong, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import {
+  axisTitle,
+  bottomAxis,
+  leftAxis,
+  placesAlong,
+  roomy,
+  type Scale,
+  spanOf,
+  ticksOf,
+  WIDTH,
+} from './axes.ts';
 import { quantileOf } from './summary.ts';
-import { clipped, dots, drawing, element, type Figure } from './svg.ts';
+import { clipped, dots, drawing, element, type Figure, through } from './svg.ts';
 
 type Points = RecordExamination['points'];
 
@@ -34,10 +43,6 @@ export function residualsEachChart(lexicon: Lexicon, points: Points): Figure | n
     const x = roomy(spanOf(numbers), [plot.left, plot.right]);
     const y = roomy(span, [plot.bottom, plot.top]);
     const middles = points.thinned ? [] : middlesAlong(numbers, points.residual);
-    const course = line<Middle>(
-      (m) => x(m.x),
-      (m) => y(m.y),
-    ).digits(1)(middles);
     return {
       variable,
       strays: Math.max(0, ...middles.map((m) => Math.abs(m.y))),
@@ -46,7 +51,7 @@ export function residualsEachChart(lexicon: Lexicon, points: Points): Figure | n
         bottomAxis(plot, x, ticksOf(x, 3), panelTitle(lexicon, variable)) +
         element('line', { class: 'plumb', x1: plot.left, x2: plot.right, y1: y(0), y2: y(0) }) +
         dots(placesAlong(x, numbers), placesAlong(y, points.residual), 'dots fine') +
-        (course === null || middles.length < 3 ? '' : element('path', { class: 'trend', d: course })),
+        (middles.length < 3 ? '' : element('path', { class: 'trend', d: course(x, y, middles) })),
     };
   });
   const most = [...drawn].sort((a, b) => b.strays - a.strays)[0]!;
@@ -68,6 +73,13 @@ export function residualsEachChart(lexicon: Lexicon, points: Points): Figure | n
     ),
     caption,
   };
+}
+
+function course(x: Scale, y: Scale, middles: readonly Middle[]): string {
+  return through(
+    middles.map((middle) => x(middle.x)),
+    middles.map((middle) => y(middle.y)),
+  );
 }
 
 /** Label and unit, short enough for a panel. */

@@ -1,4 +1,3 @@
-import { line } from 'd3-shape';
 import { count, fixed, rounded, roundingFor, withUnit } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { type Lexicon, labelOf, raised, unitOf } from '../words/lexicon.ts';
@@ -16,7 +15,7 @@ import {
 } from './axes.ts';
 import { levelPositions, strips } from './strips.ts';
 import { correlation, ranks, shareBetween, spreadAlong, twoThirds } from './summary.ts';
-import { at, dots, drawing, element, type Figure } from './svg.ts';
+import { at, dots, drawing, element, type Figure, through } from './svg.ts';
 
 type Points = RecordExamination['points'];
 
@@ -77,13 +76,16 @@ function againstNumber(
     points.thinned || xs.length < 40
       ? []
       : spreadAlong(xs, points.residual, Math.min(8, Math.floor(xs.length / 15)));
-  const side = (sign: 1 | -1): string => {
-    const path = line<{ middle: number; spread: number }>(
-      (b) => x(b.middle),
-      (b) => y(sign * b.spread),
-    ).digits(1)(bins);
-    return path === null || bins.length < 2 ? '' : element('path', { class: 'trend', d: path });
-  };
+  const side = (sign: 1 | -1): string =>
+    bins.length < 2
+      ? ''
+      : element('path', {
+          class: 'trend',
+          d: through(
+            bins.map((bin) => x(bin.middle)),
+            bins.map((bin) => y(sign * bin.spread)),
+          ),
+        });
   return drawing(
     name,
     { width: WIDTH, height: HEIGHT },

@@ -1,10 +1,9 @@
-import { line } from 'd3-shape';
 import { count, rounded } from '../numbers.ts';
 import type { RecordFamily, StudyRecord } from '../record-type.ts';
 import { counted } from '../words/lexicon.ts';
 import { criterionName, criterionRounding } from '../words/selection.ts';
 import { bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
-import { drawing, element, type Figure } from './svg.ts';
+import { drawing, element, type Figure, through } from './svg.ts';
 
 const HEIGHT = 260;
 
@@ -22,10 +21,10 @@ export function sizesChart(
   const x = roomy(spanOf(sizes.map((one) => one.coefficient_count)), [plot.left, plot.right], 0.06);
   const y = roomy(spanOf(sizes.map((one) => one.value)), [plot.bottom, plot.top + 6], 0.06);
   const criterion = criterionName(selection.rank_by);
-  const course = line<(typeof sizes)[number]>(
-    (one) => x(one.coefficient_count),
-    (one) => y(one.value),
-  ).digits(1)(sizes);
+  const course = through(
+    sizes.map((one) => x(one.coefficient_count)),
+    sizes.map((one) => y(one.value)),
+  );
   const every = Math.ceil(sizes.length / 12);
   const caption = sizesCaption(sizes, selection, criterion);
   return {
@@ -43,7 +42,7 @@ export function sizesChart(
             .map((one) => ({ value: one.coefficient_count, text: count(one.coefficient_count) })),
           'number of coefficients',
         ) +
-        (course === null ? '' : element('path', { class: 'thread course', d: course })) +
+        element('path', { class: 'thread course', d: course }) +
         sizes
           .map((one) => {
             const chosen = one.candidate === selection.chosen;

@@ -81,6 +81,22 @@ export function drawing(
   return `<svg class="chart" viewBox="0 0 ${at(size.width)} ${at(size.height)}" role="img" aria-labelledby="${name}-t ${name}-d"><title id="${name}-t">${escaped(title)}</title><desc id="${name}-d">${escaped(description)}</desc>${inner}</svg>`;
 }
 
+/** The path from point to point; empty for fewer than two. */
+export function through(xs: ArrayLike<number>, ys: ArrayLike<number>): string {
+  if (xs.length < 2) return '';
+  let path = `M${at(xs[0]!)} ${at(ys[0]!)}`;
+  for (let i = 1; i < xs.length; i++) path += `L${at(xs[i]!)} ${at(ys[i]!)}`;
+  return path;
+}
+
+/** The path around what lies between two courses over the same places; empty for fewer than two. */
+export function between(xs: ArrayLike<number>, upper: ArrayLike<number>, lower: ArrayLike<number>): string {
+  let path = through(xs, upper);
+  if (path === '') return '';
+  for (let i = xs.length - 1; i >= 0; i--) path += `L${at(xs[i]!)} ${at(lower[i]!)}`;
+  return `${path}Z`;
+}
+
 /**
  * Many dots as one path of zero-length strokes with round ends: a tenth of the size of as many circles.
  * Dots that fall on one another at a tenth of a unit are drawn once; what is not finite is left out.
