@@ -1,5 +1,4 @@
 import { PREDICTED_FIGURES, type PredictedColumns } from '../predict/predicted-columns.ts';
-import { LONGEST_NUMBER, writeNumber } from '../stats/write-number.ts';
 import { cell } from './tables.ts';
 
 /** The rows of a file, each with its prediction or with the reason why it has none. */
@@ -68,10 +67,12 @@ interface RowForm {
   readonly absent: string;
 }
 
+/** The most characters of a number as text. */
+const LONGEST_NUMBER = 25;
 /** Bytes gathered before they are handed on: few enough that their string is not a large object of its own. */
 const BLOCK = 1 << 16;
 
-/** Numbers are written as bytes: a string of each would cost more than its digits. */
+/** Texts are gathered as bytes: strings of rows would cost more than their digits. */
 function* rowTexts(
   { at, predicted }: PredictedRowColumns,
   { head, tail, before, absent }: RowForm,
@@ -99,7 +100,7 @@ function* rowTexts(
     for (let j = 0; k >= 0 && j < columns.length; j++) {
       const figure = columns[j]![k]!;
       to = writeText(before[j]!, block, to);
-      to = Number.isNaN(figure) ? writeText(absent, block, to) : writeNumber(figure, block, to);
+      to = Number.isNaN(figure) ? writeText(absent, block, to) : writeText(String(figure), block, to);
     }
     start = to;
     to = writeText(last, block, to);
