@@ -7,7 +7,7 @@ import type { Report } from '../problem.ts';
 import { type Averaged, unconditional } from '../select/average.ts';
 import { listedUpTo } from '../select/words.ts';
 import { normalQuantile } from '../stats/distributions.ts';
-import { labelsOf, type PredictionRows } from './predict.ts';
+import { endOf, labelsOf, type PredictionRows } from './predict.ts';
 import { statedRows } from './prediction-rows.ts';
 
 /** The mean at a stated row (the median where the scale is not natural), averaged over candidates; own scale. */
@@ -61,10 +61,9 @@ export function averagePredictions(
       };
     });
     const { estimate, standardError } = unconditional(each);
-    const ends = [estimate - reach * standardError, estimate + reach * standardError].map((end) => {
-      const value = fromScale(end, scale);
-      return Number.isFinite(value) ? value : null;
-    });
+    const ends = [estimate - reach * standardError, estimate + reach * standardError].map((end) =>
+      endOf(end, scale),
+    );
     const centre = fromScale(estimate, scale);
     if (!Number.isFinite(centre)) return [];
     const [lower, upper] = isDecreasing(scale) ? ends.reverse() : ends;

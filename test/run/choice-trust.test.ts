@@ -121,6 +121,20 @@ test('averaged predictions lie between those of the candidates, and agree with t
   expect(averaged!.predictions[0]!.lower!).toBeLessThan(by);
 });
 
+test('an averaged interval that leaves the image of the scale ends where a plain one does', async () => {
+  const rows = rowsOf(60);
+  const data = { ...rows, y: rows.a!.map((a, i) => (Number(a) / 3 + 1 + Number(rows.c![i]) * 2) ** 2) };
+  const text = `${study('{ rank_by: aicc, average: true }').replace('response: y', 'response: { variable: y, scale: sqrt }')}predict:
+  rows:
+    - { label: Near nought, a: -4, b: 0, c: 0 }
+`;
+  const { record } = await runText(text, { 'rows.csv': csvOf(data) });
+  const [averaged] = record!.selection.averaged!.predictions;
+  expect(record!.predictions[0]!.mean_lower).toBe(0);
+  expect(averaged!.lower).toBe(0);
+  expect(averaged!.upper).toBeGreaterThan(averaged!.estimate);
+});
+
 test('a stated row that only some of the candidates can predict has no averaged prediction', async () => {
   const data = rowsOf(60);
   data.vessel = data.vessel!.map((vessel) => (vessel === 'Ness' ? 'Tern' : vessel));
