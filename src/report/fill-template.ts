@@ -17,9 +17,12 @@ export type TemplateSpecification = Parameters<typeof Handlebars.template>[0];
 
 /** A template compiled ahead of time, filled from its view: only the small run-time part of Handlebars is loaded. */
 export function fillTemplate(template: TemplateSpecification, view: object): string {
-  const handlebars = environment(require('handlebars/dist/handlebars.runtime.min.js') as typeof Handlebars);
-  return handlebars.template(template)(view, WALLS);
+  own ??= environment(require('handlebars/dist/handlebars.runtime.min.js') as typeof Handlebars);
+  return own.template(template)(view, WALLS);
 }
+
+/** Made once: a study that repeats fills the program's templates for each of its runs, and nothing in them changes it. */
+let own: typeof Handlebars | undefined;
 
 /**
  * A template of the user's own, filled from its view; null where it cannot be compiled or run, each fault of which is
