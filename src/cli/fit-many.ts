@@ -73,7 +73,7 @@ export async function fitRepeats(
   let done = 0;
   const onDone = () => options.onProgress?.('fitting levels', ++done, jobs.length);
   const { inThreads, threadsFor } = await import('./level-threads.ts');
-  const threads = threadsFor(jobs.length);
+  const threads = threadsFor(read.study!, jobs.length, read.table!.rowCount);
   const runs =
     threads > 1
       ? await inThreads(path, read, jobs, options.parameters, threads, onDone)

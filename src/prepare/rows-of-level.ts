@@ -47,39 +47,48 @@ function keyAt(column: Column, row: number): string | number | null {
 }
 
 /**
+ * Some rows of a table, with all that is known of its columns; what was found in them is not summed up.
+ * @param rows ascending, each once
+ */
+export function partOfTable(table: Table, rows: Int32Array): Table {
+  const lines = gatherLines(table.lines, rows);
+  const own = new Set(lines);
+  const badValues = table.badValues.filter((bad) => own.has(bad.row));
+  return {
+    ...table,
+    rowCount: rows.length,
+    columns: new Map([...table.columns].map(([name, column]) => [name, gatherColumn(column, rows)])),
+    lines,
+    badValues,
+    badValueCount: badValues.length,
+    badRows: table.badRows === null ? null : Uint8Array.from(rows, (row) => table.badRows![row]!),
+    summaries: [],
+  };
+}
+
+/**
  * Some rows of a table as a table, as if the file had held no others: levels that the study does not declare are
  * those in these rows, and what was found is summed up anew. Null where a baseline is not among them, which is reported.
  * @param rows ascending, each once
  */
 export function tableOfRows(plan: DataPlan, table: Table, rows: Int32Array, report: Report): Table | null {
-  const lines = gatherLines(table.lines, rows);
-  const own = new Set(lines);
-  const badValues = table.badValues.filter((bad) => own.has(bad.row));
+  const part = partOfTable(table, rows);
+  const { badValues } = part;
   const badOf = (name: string) =>
     plan.onBadValue === 'leave_out_row' ? badValues.filter(({ variable }) => variable === name).length : 0;
   const columns = new Map<string, Column>();
   const summaries: Table['summaries'][number][] = [];
   let sound = true;
   for (const variable of plan.variables) {
-    const whole = table.columns.get(variable.name);
-    if (whole === undefined) continue;
-    const gathered = gatherColumn(whole, rows);
+    const gathered = part.columns.get(variable.name);
+    if (gathered === undefined) continue;
     const column = variable.levels === null ? levelsPresent(gathered, variable.baseline) : gathered;
     sound = checkBaseline(plan, { variable, column }, report) && sound;
     columns.set(variable.name, column);
     summaries.push(summarise(variable, column, badOf(variable.name)));
   }
   if (!sound) return null;
-  return {
-    ...table,
-    rowCount: rows.length,
-    columns,
-    lines,
-    badValues: badValues.slice(0, MOST_LISTED),
-    badValueCount: badValues.length,
-    badRows: table.badRows === null ? null : Uint8Array.from(rows, (row) => table.badRows![row]!),
-    summaries,
-  };
+  return { ...part, columns, badValues: badValues.slice(0, MOST_LISTED), summaries };
 }
 
 /** As many bad values as a table of a whole file lists. */

@@ -6,7 +6,7 @@ import { describe, expect, test, vi } from 'vitest';
 import { findStudies } from '../../src/cli/find-studies.ts';
 import { fitMany } from '../../src/cli/fit-many.ts';
 import { doJob, type Job } from '../../src/cli/level-job.ts';
-import { inThreads, threadsFor } from '../../src/cli/level-threads.ts';
+import { inThreads, secondsOfARun, threadsFor, threadsThatPay } from '../../src/cli/level-threads.ts';
 import { safeNames } from '../../src/cli/safe-names.ts';
 import { readStudyAndData } from '../../src/run/read-study-and-data.ts';
 import { data, study } from '../run/small-study.ts';
@@ -212,8 +212,29 @@ describe('a study that repeats', () => {
     });
   });
 
-  test('takes no thread from the sources', () => {
-    expect(threadsFor(1000, 8)).toBe(1);
+  test('takes as many threads as pay: of many light runs, or of a few heavy ones', async () => {
+    // Runs, seconds of each, cores.
+    expect(threadsThatPay(40, 0.03, 8)).toBe(1);
+    expect(threadsThatPay(200, 0.03, 2)).toBe(2);
+    expect(threadsThatPay(1000, 0.03, 8)).toBe(8);
+    expect(threadsThatPay(5, 20, 8)).toBe(5);
+    expect(threadsThatPay(0, 1, 8)).toBe(1);
+    await inFolder(
+      {
+        ...files,
+        'drawn.study.yaml': `${repeated}examination: { bootstrap: { repetitions: 2000, seed: 1 } }\n`,
+      },
+      async (folder) => {
+        const [light, heavy] = await Promise.all(
+          ['s', 'drawn'].map((name) => readStudyAndData(join(folder, `${name}.study.yaml`))),
+        );
+        expect(secondsOfARun(light!.study!, 500)).toBeLessThan(0.05);
+        expect(secondsOfARun(light!.study!, 1e6)).toBeGreaterThan(5);
+        expect(secondsOfARun(heavy!.study!, 50_000)).toBeGreaterThan(10);
+        // Threads need the built program.
+        expect(threadsFor(heavy!.study!, 1000, 1e6, 8)).toBe(1);
+      },
+    );
   });
 });
 
