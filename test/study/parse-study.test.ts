@@ -148,7 +148,7 @@ describe('a sound study', () => {
     ]);
     expect(study!.report).toEqual({
       formats: ['html'],
-      templates: { html: 'own.hbs', markdown: null },
+      templates: { html: 'own.hbs', markdown: null, comparison: { html: null, markdown: null } },
       keepSample: true,
       caution: 'The harbour master reviews this.',
     });
@@ -207,6 +207,8 @@ describe('settings', () => {
           ['report.formats', 'html, markdown'],
           ['report.templates.html', 'none'],
           ['report.templates.markdown', 'none'],
+          ['report.templates.comparison.html', 'none'],
+          ['report.templates.comparison.markdown', 'none'],
           ['report.keep_sample', 'true'],
           ['report.caution', 'none'],
         ] as const
