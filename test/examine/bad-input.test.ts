@@ -234,6 +234,15 @@ describe('time', () => {
     expect(verdict(count(n).map((i) => i + (i < 12 ? 0 : 1) + (i < 20 ? 0 : 5)))).toContain(
       `2 rows stand behind a gap in time (the first is row 14); ${said}`,
     );
+    // A time that comes twice, and a gap further on.
+    expect(verdict(count(n).map((i) => i - (i < 8 ? 0 : 1) + (i < 20 ? 0 : 5)))).toContain(
+      `1 row shares its time with the row before; they are taken in file order. 1 row stands behind a gap in time (row 22); ${said}`,
+    );
+    // Two rows, and ten, at each time: what lies between two times is no step from row to row.
+    for (const at of [2, 10]) {
+      expect(verdict(count(n).map((i) => Math.floor(i / at) + (i < 20 ? 0 : 5)))).not.toContain('gap');
+    }
+    expect(verdict(count(n).map((i) => (i < 29 ? 0 : 1)))).not.toContain('gap');
     // One step throughout; and no usual step at all, as of working days.
     expect(verdict(count(n))).not.toContain('gap');
     expect(verdict(count(n).map((i) => i + 2 * Math.floor(i / 5)))).not.toContain('gap');

@@ -101,12 +101,15 @@ const USUAL = 0.25;
 /** Where more than this share of the steps is not usual, there is no usual step. The three limits are our own. */
 const MOST_UNUSUAL = 0.1;
 
-/** Positions in time order that stand behind a gap; none where the times are not mostly one step apart, one row at each. */
+/**
+ * Positions in time order that stand behind a gap; none where the times are not mostly one step apart. A time that comes
+ * twice, as an hour does when clocks are put back, is one more unusual step; where most do, there is no step at all.
+ */
 function gapsIn(values: ArrayLike<number>, order: Int32Array): number[] {
   const steps = Float64Array.from(order.subarray(1), (row, k) => values[row]! - values[order[k]!]!);
   if (steps.length === 0) return [];
   const usual = steps.slice().sort()[(steps.length - 1) >> 1]!;
   const unusual = steps.filter((step) => !(Math.abs(step - usual) <= USUAL * usual)).length;
-  if (unusual > MOST_UNUSUAL * steps.length || steps.includes(0)) return [];
+  if (usual === 0 || unusual > MOST_UNUSUAL * steps.length) return [];
   return Array.from(steps.keys()).flatMap((k) => (steps[k]! > GAP * usual ? [k + 1] : []));
 }
