@@ -142,10 +142,21 @@ describe('every kind of change has its sentence', () => {
       'The column “n”, which the study does not use, is gone. Is it “w” now?',
     ],
     [change('column_new'), 'The column “n” is new; the study does not use it.'],
-    [change('unit', { earlier: 'm', later: 'ft' }), 'The unit of v is declared as ft, before as m.'],
+    [
+      change('unit', { earlier: 'm', later: 'ft' }),
+      'The unit of v is declared as ft, before as m: unless that is another name of the same unit, values of before and now are not to be compared, nor is what comes of them.',
+    ],
     [change('type', { earlier: 'text', later: 'number' }), 'v is declared as number, before as text.'],
   ])('$0.kind', (given, sentence) => {
     expect(unbroken(contractChangeSentence(lexicon, given))).toBe(sentence);
+  });
+
+  test('values of before are in the unit of before', () => {
+    const said = (kind: ContractChange['kind'], earlier: string) =>
+      unbroken(contractChangeSentence(lexicon, change(kind), [change('unit', { earlier, later: 'none' })]));
+    expect(said('range', 'ft')).toBe('v runs from 3 to 4; before it ran from 1 to 2 ft.');
+    expect(said('middle', 'ft')).toContain('its median is 3, outside 1 to 2 ft,');
+    expect(said('range', 'none')).toBe('v runs from 3 to 4; before it ran from 1 to 2.');
   });
 
   const kinds: [DeclarationChange['kind'], string | null, string | null, string][] = [
@@ -269,6 +280,21 @@ describe('coefficients', () => {
     const parameter: DeclarationChange = { kind: 'parameter', name: 'f', earlier: 'a', later: 'b' };
     expect(lines({ declaration: { study_changed: true, changes: [parameter] } })).toEqual([]);
     expect(lines({ cannot_tell: ['Nothing was kept.'] })).toEqual(['Nothing was kept.']);
+    // Another unit, which may explain all the rest, before it.
+    const unit: ContractChange = {
+      kind: 'unit',
+      variable: 'v',
+      name: null,
+      likely: null,
+      because: null,
+      earlier: 'g',
+      later: 'kg',
+    };
+    const both = lines({
+      contract: [unit],
+      models: [model({ removed: 0, revised: 0.5, added: 0, declaration: 0 })],
+    });
+    expect(both.map((line) => line.slice(0, 15))).toEqual(['The unit of v i', 'The coefficient']);
   });
 });
 

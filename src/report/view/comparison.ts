@@ -14,6 +14,7 @@ import {
   choiceSentences,
   contractChangeSentence,
   declarationChangeSentence,
+  earlierUnitOf,
   largestChangeSentence,
   newRowsSentences,
   revisedSentence,
@@ -48,7 +49,9 @@ export function comparisonView(comparison: Comparison, record: StudyRecord): Com
     })),
     sides: [sideView('before', comparison.earlier), sideView('now', comparison.later)],
     rows: rowsView(lexicon, comparison),
-    contract: comparison.contract.map((change) => raised(contractChangeSentence(lexicon, change))),
+    contract: comparison.contract.map((change) =>
+      raised(contractChangeSentence(lexicon, change, comparison.contract)),
+    ),
     study: studySentence(comparison),
     declaration: comparison.declaration.changes.map((change) => raised(declarationChangeSentence(change))),
     choice,
@@ -83,12 +86,8 @@ function rowsView(lexicon: Lexicon, comparison: Comparison): ComparisonView['row
       removedList: null,
     };
   }
-  const shown = (cell: number | string | null, variable: string) =>
-    cell === null
-      ? 'missing'
-      : typeof cell === 'number'
-        ? withUnit(value(cell, 10), unitOf(lexicon, variable))
-        : cell;
+  const shown = (cell: number | string | null, unit: string | null) =>
+    cell === null ? 'missing' : typeof cell === 'number' ? withUnit(value(cell, 10), unit) : cell;
   const more = rows.revision_count - rows.revisions.length;
   return {
     sentences,
@@ -96,8 +95,8 @@ function rowsView(lexicon: Lexicon, comparison: Comparison): ComparisonView['row
     revisions: rows.revisions.map(({ id, variable, earlier, later }) => ({
       row: id,
       variable,
-      earlier: shown(earlier, variable),
-      later: shown(later, variable),
+      earlier: shown(earlier, earlierUnitOf(lexicon, variable, comparison.contract)),
+      later: shown(later, unitOf(lexicon, variable)),
     })),
     revisionsMore: more > 0 ? `${counted(more, 'more cell is', 'more cells are', count)} not listed.` : null,
     addedList: listOf('New', rows.added_rows, rows.added),

@@ -55,23 +55,40 @@ export function revisedSentence({ rows }: Comparison): string | null {
   return `Revised: ${listed(parts)}.`;
 }
 
-/** One change of the contract as a sentence. */
-export function contractChangeSentence(lexicon: Lexicon, change: ContractChange): string {
+/** The unit that a variable's earlier values are in: that of now, but where the contract says that it was another. */
+export function earlierUnitOf(
+  lexicon: Lexicon,
+  variable: string,
+  contract: readonly ContractChange[],
+): string | null {
+  const was = contract.find((change) => change.kind === 'unit' && change.variable === variable);
+  if (was === undefined) return unitOf(lexicon, variable);
+  return was.earlier === 'none' ? null : String(was.earlier);
+}
+
+/** One change of the contract as a sentence; `contract` has all changes, and so the units of before. */
+export function contractChangeSentence(
+  lexicon: Lexicon,
+  change: ContractChange,
+  contract: readonly ContractChange[] = [],
+): string {
   const { variable, name, likely } = change;
   const label = variable ?? '';
   const unit = variable === null ? null : unitOf(lexicon, variable);
+  const unitBefore = variable === null ? null : earlierUnitOf(lexicon, variable, contract);
   const numbers = (side: ContractChange['earlier']) => (Array.isArray(side) ? side : []);
   const [a, b] = [numbers(change.earlier), numbers(change.later)];
-  const span = (ends: readonly number[]) => withUnit(`${value(ends[0])} to ${value(ends[1])}`, unit);
+  const span = (ends: readonly number[], of: string | null) =>
+    withUnit(`${value(ends[0])} to ${value(ends[1])}`, of);
   switch (change.kind) {
     case 'level_new':
       return `The level “${name}” of ${label} is new, with ${counted(b[0] ?? 0, 'row', 'rows', count)}.`;
     case 'level_gone':
       return `The level “${name}” of ${label}, with ${counted(a[0] ?? 0, 'row', 'rows', count)} before, has none now.${likelySentence(change)}`;
     case 'range':
-      return `${label} runs from ${span(b)}; before it ran from ${span(a)}.`;
+      return `${label} runs from ${span(b, unit)}; before it ran from ${span(a, unitBefore)}.`;
     case 'middle':
-      return `The middle of ${label} has moved: its median is ${withUnit(value(b[0]), unit)}, outside ${span(a)}, the middle half of its values before.`;
+      return `The middle of ${label} has moved: its median is ${withUnit(value(b[0]), unit)}, outside ${span(a, unitBefore)}, the middle half of its values before.`;
     case 'missing':
       return `${label} is missing more often: in ${percent(b[0] ?? 0)} of the rows read, ${percent(a[0] ?? 0)} before.`;
     case 'bad_values':
@@ -87,7 +104,7 @@ export function contractChangeSentence(lexicon: Lexicon, change: ContractChange)
     case 'column_new':
       return `The column “${name}” is new; the study does not use it.`;
     case 'unit':
-      return `The unit of ${label} is declared as ${String(change.later)}, before as ${String(change.earlier)}.`;
+      return `The unit of ${label} is declared as ${String(change.later)}, before as ${String(change.earlier)}: unless that is another name of the same unit, values of before and now are not to be compared, nor is what comes of them.`;
     case 'type':
       return `${label} is declared as ${String(change.later)}, before as ${String(change.earlier)}.`;
   }
@@ -261,9 +278,12 @@ export function attentionLines(
   const { choice, models, new_rows: rows, contract } = comparison;
   const renamed = contract.filter(({ kind }) => kind === 'level_gone' || kind === 'variable_gone');
   const worse = contract.filter(({ kind }) => ['bad_values', 'rows_lost', 'missing'].includes(kind));
-  const fresh = contract.filter(({ kind }) => kind === 'level_new' || kind === 'unit');
+  const fresh = contract.filter(({ kind }) => kind === 'level_new');
+  const units = contract.filter(({ kind }) => kind === 'unit');
   const studyChanges = comparison.declaration.changes.filter(({ kind }) => kind !== 'parameter').length;
   return [
+    // Values in another unit explain all that follows.
+    ...units.map((change) => contractChangeSentence(lexicon, change)),
     ...comparison.acceptance.filter(({ passed }) => passed === false).map(comparedCriterionSentence),
     ...(choice.changed ? [choiceSentences(comparison, selection)[0]!] : []),
     ...renamed.map((change) => contractChangeSentence(lexicon, change)),
