@@ -4,7 +4,12 @@ import { readTable } from './data/read-table.ts';
 import type { Column, Table } from './data/table.ts';
 import { nearest } from './expression/nearest.ts';
 import { wholeNumber } from './numerals.ts';
-import { type Prediction, type PredictionTotal, predictRows } from './predict/predict.ts';
+import {
+  type Prediction,
+  type PredictionTotal,
+  predictRows,
+  reportWithoutWeight,
+} from './predict/predict.ts';
 import { emptyFigures, predictionAt } from './predict/predicted-columns.ts';
 import { gatherUnread, rowsOfTable, usableRows } from './predict/prediction-rows.ts';
 import type { Problem, Report } from './problem.ts';
@@ -156,6 +161,7 @@ export async function predictColumnsFromRecord(
     });
     return failed();
   }
+  reportWithoutWeight(predictor, rows, report);
   if (predicted.outside.size > 0) report(rowsOutside(table.file, predicted.outside.size, predicted.count));
   const at = new Int32Array(table.rowCount).fill(-1);
   for (let k = 0; k < predicted.count; k++) at[kept[predicted.row[k]!]!] = k;

@@ -5,6 +5,7 @@ import { rootForm } from '../examine/effects/settings.ts';
 import type { DesignColumn } from '../model/design.ts';
 import { designRows } from '../model/design-rows.ts';
 import { fromScale, isDecreasing, scaleName } from '../model/response-scale.ts';
+import { wholeNumber } from '../numerals.ts';
 import type { Place, Report, Severity } from '../problem.ts';
 import { tTwoSidedQuantile } from '../stats/distributions.ts';
 import type { Scale } from '../study/study.ts';
@@ -78,7 +79,9 @@ export function predict(
   report: Report,
 ): Predicted {
   const { interval, total } = chosen.study.predict;
-  const { predicted, totals } = predictRows(predictorOf(chosen, smearing), sources, { interval }, report);
+  const predictor = predictorOf(chosen, smearing);
+  for (const rows of sources) reportWithoutWeight(predictor, rows, report);
+  const { predicted, totals } = predictRows(predictor, sources, { interval }, report);
   const predictions = Array.from({ length: predicted.count }, (_, k) => {
     const rows = sources[predicted.source[k]!]!;
     const row = predicted.row[k]!;
@@ -226,6 +229,38 @@ export function weightsOf(chosen: Chosen, rows: PredictionRows): (row: number) =
 function weightsAt(weights: string | null, rows: PredictionRows): (row: number) => number {
   const column = weights === null ? undefined : rows.columns.get(weights);
   return (row) => (column?.kind === 'number' && column.values[row]! > 0 ? column.values[row]! : 1);
+}
+
+/**
+ * Warns of rows that give no weight above 0 to a model whose rows were weighted: at weight 1 they may be far less certain,
+ * or far more, than any row fitted.
+ */
+export function reportWithoutWeight(
+  { weights, s }: Pick<Predictor, 'weights' | 's'>,
+  rows: PredictionRows,
+  report: Report,
+): void {
+  if (weights === null || s === null) return;
+  const column = rows.columns.get(weights);
+  let first = -1;
+  let count = 0;
+  for (let row = 0; row < rows.rowCount; row++) {
+    if (column?.kind === 'number' && column.values[row]! > 0) continue;
+    if (count++ === 0) first = row;
+  }
+  if (count === 0) return;
+  const lacks = `no ${weights} above 0, by which the rows fitted are weighted`;
+  const label = `"${rows.labelOf(first)}"`;
+  report({
+    code: 'prediction_value_missing',
+    severity: 'warning',
+    place: rows.placeOf(first),
+    message:
+      count === 1
+        ? `The row ${label} gives ${lacks}: its interval for a new row is that of weight 1.`
+        : `${wholeNumber(count)} rows give ${lacks} (the first is ${label}): their intervals for a new row are those of weight 1.`,
+    hint: `Give ${weights}, or what it is derived from.`,
+  });
 }
 
 function dot(a: Float64Array, b: Float64Array): number {

@@ -115,7 +115,7 @@ export interface StudyFile {
    */
   response: string | ResponseInFile;
   /**
-   * A numeric variable by which rows are weighted, in proportion to one over their variance. Null: all rows count alike.
+   * A numeric variable by which rows are weighted, in proportion to one over their variance. A row to be predicted gives it as well, or has weight 1. Null: all rows count alike.
    */
   weights?: string | null;
   /**

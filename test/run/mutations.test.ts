@@ -21,7 +21,7 @@ const STUDY = study(
 leave_out: [{ where: x > 22 and k == "a", because: Trials }]
 weights: w
 selection: { rank_by: bic, prefer_smaller_within: 1, admit: { vif: { at_most: 1000 } } }
-predict: { rows: [{ label: One, x: 4, z: 2, k: c }], total: true }
+predict: { rows: [{ label: One, x: 4, z: 2, k: c, w: 1 }], total: true }
 acceptance: { adjusted_r_squared: { at_least: 0.5 } }
 `,
 );

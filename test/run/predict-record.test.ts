@@ -163,6 +163,33 @@ describe('predict', () => {
       );
     }));
 
+  test.each(['weighted', 'derived weights'])(
+    '%s: a row without a weight is said to count as one of weight 1',
+    (name) => {
+      const weights = name === 'weighted' ? 'w' : 'heavy';
+      const what = `no ${weights} above 0, by which the rows fitted are weighted`;
+      // The study's own rows lack one weight, those of the record all of them.
+      const own = ROWS.replace(line(14), line(14).replace(/^((?:[^;]*;){6})[^;]*/, '$10'));
+      return inFolder(filesOf(CASES[name]!, own), async (folder) => {
+        const { path, record } = await fitted(folder);
+        expect(record.warnings.map(({ text: said }) => said)).toContain(
+          `The row "r14" gives ${what}: its interval for a new row is that of weight 1. Give ${weights}, or what it is derived from.`,
+        );
+        const bare = ROWS.split('\n').map((each) => each.split(';').toSpliced(6, 1).join(';'));
+        await writeFile(join(folder, 'bare.csv'), bare.join('\n'));
+        const { rows, problems } = await predictFromRecord(path, join(folder, 'bare.csv'));
+        expect(problems.map(({ code, message }) => [code, message])).toContainEqual([
+          'prediction_value_missing',
+          `5 rows give ${what} (the first is "r3"): their intervals for a new row are those of weight 1.`,
+        ]);
+        // Of weight 1 the row was before as well; what is said of the mean owes nothing to weights.
+        expect(rows[1]!.prediction!.upper).toBe(record.predictions[1]!.upper);
+        expect(rows[0]!.prediction!.upper).not.toBe(record.predictions[0]!.upper);
+        expect(rows[0]!.prediction!.mean_upper).toBe(record.predictions[0]!.mean_upper);
+      });
+    },
+  );
+
   test('rows outside the data are counted, and where most are, the units are asked about', () =>
     inFolder(filesOf(text), async (folder) => {
       const { path } = await fitted(folder);
