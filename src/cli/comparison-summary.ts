@@ -42,7 +42,9 @@ export function comparisonSummary(
     },
     {
       label: 'contract',
-      paragraphs: marked(comparison.contract.map((change) => contractChangeSentence(lexicon, change))),
+      paragraphs: marked(
+        comparison.contract.map((change) => contractChangeSentence(lexicon, change, comparison.contract)),
+      ),
     },
     {
       label: 'study',
@@ -53,7 +55,7 @@ export function comparisonSummary(
     },
     { label: 'choice', paragraphs: choiceSentences(comparison, selection) },
     { label: 'moved', paragraphs: comparison.models.flatMap((model) => moved(model)) },
-    { label: 'new rows', paragraphs: newRows(lexicon, comparison) },
+    { label: 'new rows', paragraphs: newRows(lexicon, comparison, record) },
     {
       label: 'accepted',
       paragraphs: comparison.acceptance.map((each) => ({ mark: '·', text: comparedCriterionSentence(each) })),
@@ -78,8 +80,8 @@ function marked(lines: readonly string[]): Paragraph[] {
   ];
 }
 
-function newRows(lexicon: Lexicon, { new_rows: rows }: Comparison): Paragraph[] {
-  return rows === null ? [] : newRowsSentences(lexicon, rows);
+function newRows(lexicon: Lexicon, { new_rows: rows }: Comparison, { model }: StudyRecord): Paragraph[] {
+  return rows === null ? [] : newRowsSentences(lexicon, rows, model);
 }
 
 function moved(model: Comparison['models'][number]): Paragraph[] {

@@ -148,7 +148,7 @@ describe('every kind of change has its sentence', () => {
     ],
     [change('type', { earlier: 'text', later: 'number' }), 'v is declared as number, before as text.'],
   ])('$0.kind', (given, sentence) => {
-    expect(unbroken(contractChangeSentence(lexicon, given))).toBe(sentence);
+    expect(unbroken(contractChangeSentence(lexicon, given, [given]))).toBe(sentence);
   });
 
   test('values of before are in the unit of before', () => {
@@ -299,6 +299,7 @@ describe('coefficients', () => {
 });
 
 describe('new rows', () => {
+  type Errors = NonNullable<typeof record.model>['standard_errors'];
   const rows: NewRows = {
     candidate: 'A',
     rows: 12,
@@ -316,8 +317,31 @@ describe('new rows', () => {
     same_surface: { statistic: 9, df1: 2, df2: 20, p_value: 0.0016 },
     predictive: { statistic: 1, df1: 10, df2: 12, p_value: 0.49 },
   };
-  const said = (changed: Partial<NewRows>) =>
-    newRowsSentences(lexicon, { ...rows, ...changed }).map(unbroken);
+  const said = (changed: Partial<NewRows>, kind: NonNullable<Errors>['kind'] = 'classical') =>
+    newRowsSentences(
+      lexicon,
+      { ...rows, ...changed },
+      {
+        ...record.model!,
+        standard_errors: { ...record.model!.standard_errors!, kind },
+      },
+    ).map(unbroken);
+
+  // What Chow's F and a binomial interval assume is in any textbook: independent errors, and for F of one spread.
+  test('what the tests take for granted and the declared standard errors do not', () => {
+    const caution = (kind: NonNullable<Errors>['kind'], changed: Partial<NewRows> = {}) =>
+      said(changed, kind).filter((sentence) => sentence.includes('classical'));
+    expect(caution('classical')).toEqual([]);
+    for (const kind of ['hac', 'clustered'] as const) {
+      expect(caution(kind)).toEqual([
+        'Chow’s tests and the interval for that share are the classical ones: they count rows as independent, which the declared standard errors do not.',
+      ]);
+    }
+    expect(caution('hc3')).toEqual([
+      'Chow’s tests are the classical ones: they take errors to spread evenly, which the declared standard errors do not.',
+    ]);
+    expect(caution('hc3', { same_surface: null, predictive: null })).toEqual([]);
+  });
 
   test('errors, share inside, Chow’s tests and what could not be predicted', () => {
     const sentences = said({});

@@ -29,7 +29,8 @@ export function comparisonView(comparison: Comparison, record: StudyRecord): Com
   const lexicon = lexiconOf(record);
   const { selection } = record;
   const choice = choiceSentences(comparison, selection);
-  const newRows = comparison.new_rows === null ? [] : newRowsSentences(lexicon, comparison.new_rows);
+  const newRows =
+    comparison.new_rows === null ? [] : newRowsSentences(lexicon, comparison.new_rows, record.model);
   const [model] = comparison.models;
   const largest = model === undefined ? null : largestChangeSentence(model);
   return {

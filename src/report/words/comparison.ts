@@ -70,7 +70,7 @@ export function earlierUnitOf(
 export function contractChangeSentence(
   lexicon: Lexicon,
   change: ContractChange,
-  contract: readonly ContractChange[] = [],
+  contract: readonly ContractChange[],
 ): string {
   const { variable, name, likely } = change;
   const label = variable ?? '';
@@ -204,8 +204,8 @@ function mainly({ parts }: CoefficientChange): string {
   return first[1] === whole ? `, all of it by ${CAUSES[first[0]]}` : `, most of it by ${CAUSES[first[0]]}`;
 }
 
-/** How the new rows lie to the earlier model. */
-export function newRowsSentences(lexicon: Lexicon, rows: NewRows): string[] {
+/** How the new rows lie to the earlier model; `model` is that of now, whose standard errors may allow for more than tests do. */
+export function newRowsSentences(lexicon: Lexicon, rows: NewRows, model: StudyRecord['model']): string[] {
   const { scored, bias, root_mean_squared_error: rmse } = rows;
   const notScored = rows.not_scored.map(
     ({ because, rows: n }) => `${counted(n, 'new row', 'new rows', count)} cannot be predicted: ${because}.`,
@@ -219,7 +219,25 @@ export function newRowsSentences(lexicon: Lexicon, rows: NewRows): string[] {
       : [
           `In the ${counted(scored, 'new row', 'new rows', count)} ${label} lies ${withUnit(rounded(Math.abs(bias), rounding), rows.unit)} ${bias < 0 ? 'below' : 'above'} what ${rows.candidate} predicted before, on average; the typical error (root mean square) is ${withUnit(rounded(rmse, rounding), rows.unit)}.`,
         ];
-  return [...errors, ...insideSentence(rows), ...surfaceSentences(rows), ...notScored];
+  return [
+    ...errors,
+    ...insideSentence(rows),
+    ...surfaceSentences(rows),
+    ...classicalSentence(rows, model?.standard_errors?.kind ?? 'classical'),
+    ...notScored,
+  ];
+}
+
+/** What Chow's tests and the binomial interval take for granted and the declared standard errors do not. */
+function classicalSentence({ same_surface: first, predictive: second }: NewRows, kind: string): string[] {
+  if (kind === 'classical' || (first === null && second === null)) return [];
+  return kind === 'hac' || kind === 'clustered'
+    ? [
+        'Chow’s tests and the interval for that share are the classical ones: they count rows as independent, which the declared standard errors do not.',
+      ]
+    : [
+        'Chow’s tests are the classical ones: they take errors to spread evenly, which the declared standard errors do not.',
+      ];
 }
 
 function insideSentence(rows: NewRows): string[] {
@@ -283,10 +301,10 @@ export function attentionLines(
   const studyChanges = comparison.declaration.changes.filter(({ kind }) => kind !== 'parameter').length;
   return [
     // Values in another unit explain all that follows.
-    ...units.map((change) => contractChangeSentence(lexicon, change)),
+    ...units.map((change) => contractChangeSentence(lexicon, change, contract)),
     ...comparison.acceptance.filter(({ passed }) => passed === false).map(comparedCriterionSentence),
     ...(choice.changed ? [choiceSentences(comparison, selection)[0]!] : []),
-    ...renamed.map((change) => contractChangeSentence(lexicon, change)),
+    ...renamed.map((change) => contractChangeSentence(lexicon, change, contract)),
     ...models
       .filter(({ largest_change: change }) => Math.abs(change?.in_standard_errors ?? 0) > MUCH)
       .flatMap((model) => largestChangeSentence(model) ?? []),
@@ -294,8 +312,8 @@ export function attentionLines(
     ...(rows?.same_surface != null && rows.same_surface.p_value < RARE
       ? surfaceSentences({ ...rows, predictive: null })
       : []),
-    ...worse.map((change) => contractChangeSentence(lexicon, change)),
-    ...fresh.map((change) => contractChangeSentence(lexicon, change)),
+    ...worse.map((change) => contractChangeSentence(lexicon, change, contract)),
+    ...fresh.map((change) => contractChangeSentence(lexicon, change, contract)),
     ...(studyChanges > 0 ? [`The study itself changed in ${counted(studyChanges, 'place')}.`] : []),
     ...comparison.cannot_tell,
   ].map(raised);
