@@ -1,6 +1,11 @@
 import type { RecordCandidate, RecordModel, RecordTerm, StudyRecord } from '../record/record.ts';
 import { count, fixed, percent, rangeWithUnit, rounded, withUnit } from '../report/numbers.ts';
-import { acceptanceSentence, missedSentences, needsEarlierSentence } from '../report/words/acceptance.ts';
+import {
+  acceptanceSentence,
+  heldBelowSentence,
+  missedSentences,
+  needsEarlierSentence,
+} from '../report/words/acceptance.ts';
 import { answerSentences, fitSentence } from '../report/words/answer.ts';
 import { bewareLines } from '../report/words/beware.ts';
 import { contractSentence, dateRange, lossReason, rowsSentence } from '../report/words/data.ts';
@@ -181,7 +186,7 @@ function accepted(record: StudyRecord, { response }: Lexicon, compared: boolean)
   return [
     ...present(acceptanceSentence(acceptance)),
     ...missedSentences(acceptance, fittedUnit(response)).map((text) => ({ mark: '·', text })),
-    ...(compared ? [] : present(needsEarlierSentence(later))),
+    ...present(compared ? heldBelowSentence(later) : needsEarlierSentence(later)),
   ];
 }
 

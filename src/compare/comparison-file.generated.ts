@@ -197,11 +197,13 @@ export interface Revision {
  */
 export interface ContractChange {
   /**
-   * level_new, level_gone: a level has rows in one record only. range: values beyond those seen before. middle: the median has left the middle half of what was seen before. missing: a larger share of the rows read has no value. bad_values: more cells break the contract. rows_lost: a larger share of the rows read is not used. variable_gone, variable_new: declared in one study only. column_new, column_gone: a column of the file that the study does not use. unit, type: declared otherwise.
+   * level_new, level_gone: a level has rows in one record only. level_undeclared: a text that is no declared level, and was not among those listed before. rescaled: the revised values are the earlier ones in what looks like another unit. range: values beyond those seen before. middle: the median has left the middle half of what was seen before. missing: a larger share of the rows read has no value. bad_values: more cells break the contract. rows_lost: a larger share of the rows read is not used. variable_gone, variable_new: declared in one study only. column_new, column_gone: a column of the file that the study does not use. unit, type: declared otherwise.
    */
   kind:
     | 'level_new'
     | 'level_gone'
+    | 'level_undeclared'
+    | 'rescaled'
     | 'range'
     | 'middle'
     | 'missing'
@@ -218,7 +220,7 @@ export interface ContractChange {
    */
   variable: string | null;
   /**
-   * The level or column; null for the other kinds.
+   * The level, text or column; null for the other kinds.
    */
   name: string | null;
   /**
@@ -234,7 +236,7 @@ export interface ContractChange {
    */
   earlier: number[] | string | null;
   /**
-   * Now, likewise.
+   * Now, likewise; of rescaled the number of revised values that follow later = offset + factor × earlier, the number of all revised values, the offset and the factor.
    */
   later: number[] | string | null;
 }

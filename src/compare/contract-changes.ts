@@ -3,6 +3,7 @@ import type { KeptRows } from '../record/read-sample.ts';
 import type { RecordVariable, StudyRecord } from '../record/record.ts';
 import type { ContractChange } from './comparison.ts';
 import { cellOf, type MatchedRows } from './match-rows.ts';
+import { rescaled } from './rescaled.ts';
 
 /** A share that grows by less is no change worth a line. */
 const SHARE = 0.005;
@@ -82,7 +83,8 @@ function variableChanges(
     ...(was.unit === is.unit
       ? []
       : [change('unit', name, { earlier: was.unit ?? 'none', later: is.unit ?? 'none' })]),
-    ...(was.type === 'category' && is.type === 'category' ? levelChanges(was, is, now, pairs) : []),
+    ...(was.type === 'category' && is.type === 'category' ? levelChanges(was, is, before, now, pairs) : []),
+    ...(pairs === null ? [] : rescaledChange(name, pairs)),
     ...rangeChanges(was, is),
     ...(b > a + SHARE ? [change('missing', name, { earlier: [a], later: [b] })] : []),
   ];
@@ -91,26 +93,51 @@ function variableChanges(
 function levelChanges(
   was: RecordVariable,
   is: RecordVariable,
+  before: StudyRecord,
   now: StudyRecord,
   pairs: RowPairs | null,
 ): Change[] {
   const inUse = (variable: RecordVariable) =>
     new Map((variable.levels ?? []).filter(({ rows }) => rows > 0).map(({ level, rows }) => [level, rows]));
-  const [before, after] = [inUse(was), inUse(is)];
-  const fresh = [...after.keys()].filter((level) => !before.has(level));
+  const [had, after] = [inUse(was), inUse(is)];
+  const fresh = [...after.keys()].filter((level) => !had.has(level));
   // Texts that broke the contract may be a level under a new name.
-  const broken = now.data.bad_values.filter((bad) => bad.variable === was.name).map((bad) => bad.text);
-  const gone = [...before].filter(([level]) => !after.has(level));
+  const broken = textsAgainst(was.name, now);
+  const gone = [...had].filter(([level]) => !after.has(level));
+  const renamed = gone.map(([level, rows]) =>
+    change('level_gone', was.name, {
+      name: level,
+      earlier: [rows],
+      ...likelyName(was.name, level, fresh, broken, pairs),
+    }),
+  );
+  // Those that broke it before are no news.
+  const known = new Set(textsAgainst(was.name, before));
+  const news = [...new Set(broken)].filter((text) => !known.has(text));
   return [
-    ...gone.map(([level, rows]) =>
-      change('level_gone', was.name, {
-        name: level,
-        earlier: [rows],
-        ...likelyName(was.name, level, fresh, broken, pairs),
-      }),
-    ),
+    ...renamed,
     ...fresh.map((level) => change('level_new', was.name, { name: level, later: [after.get(level)!] })),
+    ...undeclaredLevels(was.name, news, renamed),
   ];
+}
+
+/** Texts that break the contract of a category and are not taken for the new name of a level that is gone. */
+function undeclaredLevels(variable: string, broken: readonly string[], renamed: readonly Change[]): Change[] {
+  const explained = new Set(renamed.map(({ likely }) => likely));
+  return broken
+    .filter((text) => !explained.has(text))
+    .map((text) => change('level_undeclared', variable, { name: text }));
+}
+
+function rescaledChange(variable: string, { earlier, later, matched }: RowPairs): Change[] {
+  const line = rescaled(variable, earlier, later, matched);
+  if (line === null) return [];
+  return [change('rescaled', variable, { later: [line.following, line.revised, line.offset, line.factor] })];
+}
+
+/** The listed texts that break the contract of a variable. */
+function textsAgainst(variable: string, { data }: StudyRecord): string[] {
+  return data.bad_values.filter((bad) => bad.variable === variable).map((bad) => bad.text);
 }
 
 /** The new name of a level: what every kept row that had it has now, what breaks the contract in its place, or the nearest in spelling. */

@@ -2,6 +2,7 @@ import { wholeNumber } from '../numerals.ts';
 import type { Problem, Report } from '../problem.ts';
 import type { DataPlan, VariablePlan } from '../study/study.ts';
 import { type CellFault, FAULT_KINDS, faultSentence, showText } from './fault-sentence.ts';
+import { listedValues } from './listed-values.ts';
 import { readNumber } from './read-number.ts';
 import type { BadValue } from './table.ts';
 
@@ -30,7 +31,7 @@ export interface Faults {
   readonly leftOut: (row: number) => boolean;
   /** Reports everything, and says whether the table can be used. */
   readonly settle: (report: Report) => boolean;
-  /** The first `limit` bad cells in file order. */
+  /** At most `limit` bad cells in file order, the first of each text among them. */
   readonly badValues: () => BadValue[];
   readonly badValueCount: () => number;
   /** 1 for each row to be left out, or null. */
@@ -168,16 +169,18 @@ export function gatherFaults(plan: DataPlan, limit: number, onBadCell: OnBadCell
     leftOut: (row) => marks[row] === 1,
     settle,
     badValues: () =>
-      columns
-        .flatMap((column) => column.borne.map((listed) => ({ listed, name: column.variable.name })))
-        .sort((a, b) => inFileOrder(a.listed, b.listed))
-        .slice(0, limit)
-        .map(({ listed, name }) => ({
-          row: listed.line,
-          variable: name,
-          text: listed.text,
-          because: listed.problem.message,
-        })),
+      listedValues(
+        columns
+          .flatMap((column) => column.borne.map((listed) => ({ listed, name: column.variable.name })))
+          .sort((a, b) => inFileOrder(a.listed, b.listed))
+          .map(({ listed, name }) => ({
+            row: listed.line,
+            variable: name,
+            text: listed.text,
+            because: listed.problem.message,
+          })),
+        limit,
+      ),
     badValueCount: () => columns.reduce((sum, column) => sum + column.borneCount, 0),
     badRows: (rowCount) => {
       if (plan.onBadValue !== 'leave_out_row' || marks.length === 0) return null;

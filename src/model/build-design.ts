@@ -39,7 +39,7 @@ export function buildDesign(study: Study, sample: Sample, report: Report): Desig
         code: 'category_one_level',
         severity: 'error',
         place: study.placeOf(path),
-        message: `${column.name} has ${level === null ? 'no level' : `only the level "${level}"`} in the ${wholeNumber(sample.rowCount)} rows used, so it cannot be a term.`,
+        message: `${column.name} has ${level === null ? 'no level' : `only the level "${level}"`} in the ${sample.rowCount === 1 ? 'one row' : `${wholeNumber(sample.rowCount)} rows`} used, so it cannot be a term.`,
         hint: 'Look at what leave_out and missing values take away, or take the term out.',
       });
     };

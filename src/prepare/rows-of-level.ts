@@ -1,4 +1,5 @@
 import { checkBaseline } from '../data/fill-columns.ts';
+import { listedValues } from '../data/listed-values.ts';
 import { summarise } from '../data/summarise.ts';
 import type { Column, Table } from '../data/table.ts';
 import type { Report } from '../problem.ts';
@@ -88,7 +89,7 @@ export function tableOfRows(plan: DataPlan, table: Table, rows: Int32Array, repo
     summaries.push(summarise(variable, column, badOf(variable.name)));
   }
   if (!sound) return null;
-  return { ...part, columns, badValues: badValues.slice(0, MOST_LISTED), summaries };
+  return { ...part, columns, badValues: listedValues(badValues, MOST_LISTED), summaries };
 }
 
 /** As many bad values as a table of a whole file lists. */

@@ -204,7 +204,7 @@ export interface StudyRecord {
      */
     columns_ignored: string[];
     /**
-     * The first cells that break the contract, in file order.
+     * The first cells that break the contract, in file order; where there are more, the first of each text of a variable comes before repetitions.
      *
      * Items: One cell.
      */

@@ -1,7 +1,7 @@
 import type { Problem } from '../problem.ts';
 import type { Comparison } from './comparison-type.ts';
 import type { StudyRecord } from './record-type.ts';
-import { acceptanceSentence, comparedCriterionSentence } from './words/acceptance.ts';
+import { comparedCriterionSentence, missedSentences } from './words/acceptance.ts';
 import { estimatedCandidate } from './words/estimated.ts';
 import { lexiconOf } from './words/lexicon.ts';
 import { fittedQuantity, fittedUnit } from './words/scale.ts';
@@ -150,7 +150,7 @@ export function overviewEntry(run: OverviewRun): OverviewEntry {
         ? null
         : selection.chosen === null
           ? selection.because
-          : missedText(acceptance, comparison?.acceptance ?? []),
+          : missedText(acceptance, unit, comparison?.acceptance ?? []),
     link: linkTo(run, ['report.html', 'report.md', 'record.json']),
     chosen: selection.chosen,
     rowsRead: record.data.rows_read,
@@ -174,11 +174,11 @@ export function overviewEntry(run: OverviewRun): OverviewEntry {
 
 function missedText(
   acceptance: StudyRecord['acceptance'],
+  unit: string | null,
   against: readonly Comparison['acceptance'][number][],
 ): string {
-  const own = acceptance.every(({ passed }) => passed) ? null : acceptanceSentence(acceptance);
   const missed = against.filter(({ passed }) => passed === false).map(comparedCriterionSentence);
-  return [...(own === null ? [] : [own]), ...missed].join(' ') || 'A criterion was missed.';
+  return [...missedSentences(acceptance, unit), ...missed].join(' ') || 'A criterion was missed.';
 }
 
 /** The address of the first of these files that the run has; null where it has none. */

@@ -128,7 +128,8 @@ function readValue(
     case 'category':
       if (named.levels !== null && !named.levels.includes(text)) {
         const message = `${showPath(path)} is ${quote(text)}, which is not a declared level of ${variable.name}.`;
-        fault(reading, 'level_undeclared', path, message, didYouMean(text, named.levels));
+        const levels = `Its levels are ${listed(named.levels.slice(0, 12).map(quote), 'and')}${named.levels.length > 12 ? ' and others' : ''}.`;
+        fault(reading, 'level_undeclared', path, message, didYouMean(text, named.levels) ?? levels);
         return null;
       }
       return text;

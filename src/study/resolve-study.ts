@@ -66,7 +66,10 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
     names,
     needed: variables.map(({ name }) => name).filter((name) => rests.has(name)),
     allowed: weights === null ? new Set() : derivedFrom(weights),
-    unsure: errors > 0 || candidates.length + families.length < (file.candidates?.length ?? 0),
+    unsure:
+      errors > 0 ||
+      file.candidates === undefined ||
+      candidates.length + families.length < (file.candidates?.length ?? 0),
     derivedFrom,
   });
   const { holdOut } = selection;

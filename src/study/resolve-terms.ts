@@ -58,6 +58,8 @@ function variableTerm(reading: Reading, names: Names, name: string, path: Path):
 
 /** How to write a term that is a calculation with known names; undefined where it is none. */
 function calculationHint(text: string, names: Names): string | undefined {
+  if (text.includes('~'))
+    return 'Terms are given as a list of names; the response is named once, under response.';
   const parts = text.split(/\s*[-+*/:×^()]+\s*/).filter((part) => part !== '');
   const known = (part: string) => names.has(part);
   const calculated = (part: string) => known(part) || /^[\d.]+$/.test(part) || text.includes(`${part}(`);

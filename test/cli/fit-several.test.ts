@@ -78,6 +78,9 @@ describe('several studies', () => {
       const html = await readFile(join(out, 'overview.html'), 'utf8');
       expect(html).toContain('<a href="missed/report.html">missed</a>');
       expect(html).toContain('Wherever a candidate was chosen it is ');
+      expect(html).toMatch(
+        /<strong>missed<\/strong>: criteria missed\. [^<]+ is [^<]+; the study asks for at \w+ /,
+      );
       expect(html.indexOf('<strong>broken</strong>')).toBeLessThan(html.indexOf('<strong>missed</strong>'));
       const markdown = await readFile(join(out, 'overview.md'), 'utf8');
       expect(markdown).toMatch(/^\| \[b\]\(b\/report\.html\) \| done \| \S+ \| 16 \|/m);

@@ -152,6 +152,7 @@ describe('on the command line', () => {
     const record = (folder: string) => readFile(at(folder, 'record.json'), 'utf8');
     expect(await record('second')).toBe(await record('alone'));
     expect(plain(against.out)).not.toContain('need an earlier record');
+    expect(plain(against.out)).toContain('2 criteria are held against the earlier record below');
     expect(plain(against.out)).toMatch(
       /accepted · Largest change of a coefficient is [\d.]+ standard errors; the study asks for at most 0.0001 standard errors\./,
     );

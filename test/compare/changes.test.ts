@@ -168,6 +168,48 @@ describe('the contract', () => {
     ]);
   });
 
+  test('another text that breaks the contract, behind more cells than are listed one by one', async () => {
+    const data = `  row_id: car
+  on_bad_value: leave_out_row
+  variables:
+    car: { type: identifier }
+    first_sold: { type: date }
+    economy: { type: number }
+    weight: { type: number, at_least: 0 }
+    horsepower: { type: number }
+    origin: { type: category, levels: [USA, Europe, Japan] }`;
+    const before = changed((row, i) => (i === 290 ? { ...row, origin: 'Mars' } : row));
+    const later = before.map((row, i) => ({
+      ...row,
+      weight: i < 30 ? '-1' : row.weight!,
+      origin: i === 280 ? 'Korea' : row.origin!,
+    }));
+    const found = kinds(compared(await sideOf(before, { data }), await sideOf(later, { data })));
+    // What broke it before already is no news.
+    expect(found.filter(([kind]) => kind === 'level_undeclared')).toEqual([
+      ['level_undeclared', 'origin', 'Korea', null, null],
+    ]);
+  });
+
+  // The factor is the international pound of 1959 by definition; °F to °C likewise, worked out by hand.
+  test.each<[string, (weight: number) => string, number[] | null]>([
+    ['kg instead of lb', (w) => (w * 0.45359237).toFixed(1), [300, 300, 0, 0.45359237]],
+    ['an offset', (w) => `${w + 459.67}`, [300, 300, 459.67, 1]],
+    ['°C instead of °F', (w) => (((w - 32) * 5) / 9).toFixed(2), [300, 300, -160 / 9, 5 / 9]],
+    ['values revised here and there', (w) => `${w + ((w * 7919) % 101) - 50}`, null],
+    ['nothing', (w) => `${w}`, null],
+  ])('revised values in another unit: %s', async (_, unit, line) => {
+    const later = await sideOf(changed((row) => ({ ...row, weight: unit(Number(row.weight)) })));
+    const found = compared(earlier, later).contract.find(({ kind }) => kind === 'rescaled');
+    if (line === null) expect(found).toBeUndefined();
+    else {
+      expect(found!.variable).toBe('weight');
+      (found!.later as number[]).forEach((figure, k) => {
+        expect(Math.abs(figure - line[k]!)).toBeLessThan(k === 2 ? 0.1 : 1e-3);
+      });
+    }
+  });
+
   test('a range that is wider, a middle that has moved, more missing values', async () => {
     const later = changed((row, i) => ({
       ...row,
@@ -176,14 +218,15 @@ describe('the contract', () => {
     }));
     const { contract } = compared(earlier, await sideOf(later));
     expect(contract.map(({ kind, variable }) => `${kind} ${variable}`)).toEqual([
+      'rescaled weight',
       'range weight',
       'middle weight',
       'missing horsepower',
       'rows_lost null',
     ]);
     const sizes = EARLIER.map(({ weight }) => Number(weight));
-    expect(contract[0]!.earlier).toEqual([Math.min(...sizes), Math.max(...sizes)]);
-    expect(contract[2]).toMatchObject({ earlier: [0], later: [0.05] });
+    expect(contract[1]!.earlier).toEqual([Math.min(...sizes), Math.max(...sizes)]);
+    expect(contract[3]).toMatchObject({ earlier: [0], later: [0.05] });
   });
 
   test('variables and columns under other names, units, types', async () => {

@@ -89,6 +89,9 @@ describe('rows', () => {
       'Of the 10 rows used before, 7 are unchanged, 2 revised and 1 gone.',
       '1 row is new; 11 are used now.',
     ]);
+    expect(unbroken(rowsSentences({ ...nothing, rows: { ...rows, kept: 0, revised: 9 } })[0]!)).toBe(
+      'Of the 10 rows used before, 9 are revised and 1 gone.',
+    );
     expect(unbroken(revisedSentence({ ...nothing, rows })!)).toBe('Revised: fuel in 2 rows.');
     expect(revisedSentence(nothing)).toBeNull();
   });
@@ -120,6 +123,22 @@ describe('every kind of change has its sentence', () => {
     [
       change('level_gone', { likely: 'm', because: 'contract' }),
       'The level “n” of v, with 1 row before, has none now. In its variable most cells that break the contract say “m”: is that its new name? Then declare it.',
+    ],
+    [
+      change('level_undeclared'),
+      'Cells of v say “n”, which is no declared level: is it a new one? Then declare it.',
+    ],
+    [
+      change('rescaled', { later: [27, 27, 0, 0.1] }),
+      'All 27 revised values of v are 0.1 × what they were: has its unit changed?',
+    ],
+    [
+      change('rescaled', { later: [26, 27, -273.15, 1] }),
+      '26 of 27 revised values of v are 273.15 below what they were: has its unit changed?',
+    ],
+    [
+      change('rescaled', { later: [27, 27, 32, 1.8] }),
+      'All 27 revised values of v are 1.8 × what they were + 32: has its unit changed?',
     ],
     [change('range'), 'v runs from 3 to 4; before it ran from 1 to 2.'],
     [
@@ -349,7 +368,7 @@ describe('new rows', () => {
       /^In the 10 new rows .* lies 3\.0 L below what A predicted before, on average; the typical error \(root mean square\) is 20\.0 L\.$/,
     );
     expect(sentences[1]).toBe(
-      '5 of 10 lie inside the 90 % prediction intervals of before (50 %, 95 % interval for that share 18.7 % to 81.3 %); fewer than such intervals ought to hold.',
+      '5 of 10 lie inside the 90 % prediction intervals of before (50 %, 95 % interval for that share 18.7 % to 81.3 %); fewer than the 90 % that ought to.',
     );
     expect(sentences[2]).toBe(
       'The new rows ask for coefficients of their own: one set for earlier and new rows against one for each (Chow’s first test), F = 9.00 on 2 and 20 degrees of freedom, p = 0.0016.',
@@ -359,12 +378,8 @@ describe('new rows', () => {
   });
 
   test('as many as ought to be, and more', () => {
-    expect(said({ share_lower: 0.8, share_upper: 0.99 })[1]).toMatch(
-      /as many as such intervals ought to hold\.$/,
-    );
-    expect(said({ share_lower: 0.92, share_upper: 1 })[1]).toMatch(
-      /more than such intervals ought to hold\.$/,
-    );
+    expect(said({ share_lower: 0.8, share_upper: 0.99 })[1]).toMatch(/; 90\s%\sis within that interval\.$/u);
+    expect(said({ share_lower: 0.92, share_upper: 1 })[1]).toMatch(/; more than the 90\s% that ought to\.$/u);
   });
 
   test('what is not defined is not said', () => {

@@ -525,7 +525,7 @@ describe('data in words', () => {
     expect(contractSentence({ ...record.data, bad_value_count: 0, bad_values: [] })).toBe(
       'No value broke the declared contract.',
     );
-    expect(contractSentence({ ...record.data, bad_value_count: 900 })).toContain('the first 1');
+    expect(contractSentence({ ...record.data, bad_value_count: 900 })).toContain('; 1 of them is listed');
     expect(ignoredSentence({ ...record.data, columns_ignored: [] })).toBeNull();
     expect(
       ignoredSentence({ ...record.data, columns_ignored: Array.from({ length: 15 }, (_, i) => `c${i}`) }),

@@ -501,6 +501,23 @@ const CASES: readonly Case[] = [
   {
     in: SOUND,
     from: 'vessel: Tern',
+    to: 'vessel: «Greyhound»',
+    code: 'level_undeclared',
+    says: [
+      'predict.rows[0].vessel is "Greyhound", which is not a declared level of vessel. Its levels are "Skerry", "Tern" and "Holm".',
+    ],
+  },
+  {
+    from: 'terms: [x]',
+    to: 'terms: [«"y ~ x"»]',
+    code: 'name_unknown',
+    says: [
+      'candidates[0].terms[0] is "y ~ x"; a term is one name. Terms are given as a list of names; the response is named once, under response.',
+    ],
+  },
+  {
+    in: SOUND,
+    from: 'vessel: Tern',
     to: 'vessel: «Turn»',
     code: 'level_undeclared',
     says: ['predict.rows[0].vessel is "Turn", which is not a declared level of vessel. Did you mean Tern?'],
@@ -1075,6 +1092,12 @@ describe('faults at the edges', () => {
       'derive:\n  a: { expression: x + 1 }\nleave_out: [{ where: a > 2, because: Large }]\nresponse: y',
     );
     expect(read(text).places).toEqual([]);
+  });
+
+  it('does not take values for unused where the candidates cannot be read', () => {
+    const text = changed(SMALL, 'candidates:', 'candidtes:');
+    const rows = changed(text, 'response: y', 'response: y\npredict: { rows: [{ label: A, x: 1 }] }');
+    expect(read(rows).problems.filter(({ severity }) => severity === 'warning')).toEqual([]);
   });
 
   it('warns of a value that no candidate uses, a template of no format, and a term derived from the response', () => {

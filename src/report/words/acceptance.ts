@@ -96,6 +96,14 @@ export function needsEarlierSentence(criteria: readonly RecordEarlierCriterion[]
   return `${counted(all, 'criterion needs', 'criteria need')} an earlier record and ${all === 1 ? 'is' : 'are'} not judged here: ${which}.`;
 }
 
+/** "1 criterion is held against the earlier record below: largest change of a coefficient." Null for none. */
+export function heldBelowSentence(criteria: readonly RecordEarlierCriterion[] | undefined): string | null {
+  const all = criteria?.length ?? 0;
+  if (criteria === undefined || all === 0) return null;
+  const which = listed(criteria.map((c) => lowered(criterionLabel(c))));
+  return `${counted(all, 'criterion is', 'criteria are')} held against the earlier record below: ${which}.`;
+}
+
 /** "Against the earlier record 1 of 2 criteria is missed; comparison.html says what changed." Null for none. */
 export function againstEarlierSentence(criteria: readonly ComparedCriterion[]): string | null {
   if (criteria.length === 0) return null;

@@ -1,7 +1,7 @@
 import { count, percent, share } from '../numbers.ts';
 import type { RecordCandidate, RecordTerm, StudyRecord } from '../record-type.ts';
 import { briefEffect } from './effect.ts';
-import { type Lexicon, labelOf, listed, lowered, raised } from './lexicon.ts';
+import { type Lexicon, labelOf, listed, lowered, named, raised } from './lexicon.ts';
 import { typicalMiss } from './miss.ts';
 import { type ModelsLookedAt, modelsPhrase } from './models.ts';
 import { predictionSentence } from './prediction.ts';
@@ -63,7 +63,7 @@ function noneAdmitted(record: StudyRecord): string[] {
   const nearest =
     best === undefined || reasons.length === 0
       ? ''
-      : ` The best ranked, ${best.candidate}, was refused: ${listed(reasons.map((r) => lowered(r.replace(/\.$/, ''))))}.`;
+      : ` The best ranked, ${named(best.candidate)}, was refused: ${listed(reasons.map((r) => lowered(r.replace(/\.$/, ''))))}.`;
   return [`${which} under the rules that the study declares, so there is no model to answer with.${nearest}`];
 }
 
@@ -71,8 +71,8 @@ function noneAdmitted(record: StudyRecord): string[] {
 export function fitSentence(lexicon: Lexicon, candidate: RecordCandidate, looked: ModelsLookedAt): string {
   const from =
     looked.count === 1
-      ? `The one candidate, ${candidate.name},`
-      : `${candidate.name}, chosen of ${modelsPhrase(looked)},`;
+      ? `The one candidate, ${named(candidate.name)},`
+      : `${named(candidate.name)}, chosen of ${modelsPhrase(looked)},`;
   if (candidate.r_squared === null) return `${from} has no defined R².`;
   const adjusted =
     candidate.adjusted_r_squared === null ? '' : ` (adjusted R² ${share(candidate.adjusted_r_squared)})`;

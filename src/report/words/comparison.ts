@@ -20,7 +20,7 @@ import {
 } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
 import { comparedCriterionSentence } from './acceptance.ts';
-import { counted, type Lexicon, labelOf, listed, raised, stopped, unitOf } from './lexicon.ts';
+import { counted, type Lexicon, labelOf, listed, named, raised, stopped, unitOf } from './lexicon.ts';
 import { criterionName, criterionRounding } from './selection.ts';
 
 /** A change of a coefficient of this many earlier standard errors is more than chance makes usual. */
@@ -37,10 +37,12 @@ export function rowsSentences({ rows, earlier, later }: Comparison): string[] {
   }
   const { kept, revised, added, removed } = rows;
   const fate = [
-    ...(kept > 0 ? [`${count(kept)} ${kept === 1 ? 'is' : 'are'} unchanged`] : []),
-    ...(revised !== null && revised > 0 ? [`${count(revised)} revised`] : []),
-    ...(removed > 0 ? [`${count(removed)} gone`] : []),
-  ];
+    { rows: kept, what: 'unchanged' },
+    { rows: revised ?? 0, what: 'revised' },
+    { rows: removed, what: 'gone' },
+  ]
+    .filter((part) => part.rows > 0)
+    .map((part, k) => `${count(part.rows)} ${k > 0 ? '' : part.rows === 1 ? 'is ' : 'are '}${part.what}`);
   const before = `Of the ${counted(earlier.rows_used, 'row', 'rows', count)} used before, ${listed(fate)}.`;
   const now = `${added === 0 ? 'No row is' : counted(added, 'row is', 'rows are', count)} new; ${count(later.rows_used)} are used now.`;
   return [before, now];
@@ -85,6 +87,10 @@ export function contractChangeSentence(
       return `The level “${name}” of ${label} is new, with ${counted(b[0] ?? 0, 'row', 'rows', count)}.`;
     case 'level_gone':
       return `The level “${name}” of ${label}, with ${counted(a[0] ?? 0, 'row', 'rows', count)} before, has none now.${likelySentence(change)}`;
+    case 'level_undeclared':
+      return `Cells of ${label} say “${name}”, which is no declared level: is it a new one? Then declare it.`;
+    case 'rescaled':
+      return rescaledSentence(label, b);
     case 'range':
       return `${label} runs from ${span(b, unit)}; before it ran from ${span(a, unitBefore)}.`;
     case 'middle':
@@ -110,6 +116,22 @@ export function contractChangeSentence(
   }
 }
 
+/** "All 272 revised values of beak_length are 0.1 × what they were: has its unit changed?" */
+function rescaledSentence(
+  label: string,
+  [following = 0, revised = 0, offset = 0, factor = 1]: readonly number[],
+) {
+  const which = following === revised ? `All ${count(revised)}` : `${count(following)} of ${count(revised)}`;
+  const times = `${value(factor)} × what they were`;
+  const line =
+    factor === 1
+      ? `${value(Math.abs(offset), 5)} ${offset < 0 ? 'below' : 'above'} what they were`
+      : offset === 0
+        ? times
+        : `${times} ${offset < 0 ? '−' : '+'} ${value(Math.abs(offset), 5)}`;
+  return `${which} revised values of ${label} are ${line}: has its unit changed?`;
+}
+
 function likelySentence({ likely, because, name }: ContractChange): string {
   if (likely === null) return '';
   return because === 'rows'
@@ -124,11 +146,11 @@ export function declarationChangeSentence({ kind, name, earlier, later }: Declar
   const from = `is now ${later ?? 'left out'}, before ${earlier ?? 'it was not there'}`;
   switch (kind) {
     case 'candidate_added':
-      return `New candidate ${name}: ${later}.`;
+      return `New candidate ${named(name ?? '')}: ${later}.`;
     case 'candidate_removed':
-      return `${name} is no candidate any more (${earlier}).`;
+      return `${named(name ?? '')} is no candidate any more (${earlier}).`;
     case 'candidate_changed':
-      return `The candidate ${name} is another: ${later}; before ${earlier}.`;
+      return `The candidate ${named(name ?? '')} is another: ${later}; before ${earlier}.`;
     case 'derivation':
       return later === null || earlier === null
         ? `${name} is ${later === null ? `no longer derived (it was ${earlier})` : `newly derived: ${later}`}.`
@@ -156,21 +178,21 @@ export function declarationChangeSentence({ kind, name, earlier, later }: Declar
 export function choiceSentences({ choice }: Comparison, selection: StudyRecord['selection']): string[] {
   const { earlier, later, difference } = choice;
   if (later === null && earlier === null) return ['No candidate is chosen, as before.'];
-  if (later === null) return [`No candidate is chosen; before, ${earlier!.name} was.`];
-  if (earlier === null) return [`${later.name} is chosen; before, no candidate was.`];
+  if (later === null) return [`No candidate is chosen; before, ${named(earlier!.name)} was.`];
+  if (earlier === null) return [`${named(later.name)} is chosen; before, no candidate was.`];
   const rule = choice.rule_changed ? ['The rule of the choice is another than before.'] : [];
-  if (!choice.changed) return [`${later.name} is chosen again.`, ...rule];
+  if (!choice.changed) return [`${named(later.name)} is chosen again.`, ...rule];
   const criterion = criterionName(selection.rank_by);
   const { decimals } = criterionRounding(selection);
   const apart =
     difference === null
       ? `How far apart the two are now cannot be said in ${criterion}. ${earlier.reason ?? later.reason ?? ''}`.trim()
-      : `On the rows of now ${earlier.name} comes out ${fixed(Math.abs(difference), decimals)} ${difference < 0 ? 'better' : 'worse'} in ${criterion}${Math.abs(difference) <= choice.prefer_smaller_within ? ', which the rule counts as equal' : ''}.`;
+      : `On the rows of now ${named(earlier.name)} comes out ${fixed(Math.abs(difference), decimals)} ${difference < 0 ? 'better' : 'worse'} in ${criterion}${Math.abs(difference) <= choice.prefer_smaller_within ? ', which the rule counts as equal' : ''}.`;
   const why =
     earlier.admitted === false
       ? [`It is refused now. ${earlier.refused_because.map(stopped).join(' ')}`.trim()]
       : [];
-  return [`${later.name} is chosen; before, ${earlier.name} was.`, ...rule, apart, ...why];
+  return [`${named(later.name)} is chosen; before, ${named(earlier.name)} was.`, ...rule, apart, ...why];
 }
 
 const CAUSES = {
@@ -217,7 +239,7 @@ export function newRowsSentences(lexicon: Lexicon, rows: NewRows, model: StudyRe
     bias === null || rmse === null
       ? []
       : [
-          `In the ${counted(scored, 'new row', 'new rows', count)} ${label} lies ${withUnit(rounded(Math.abs(bias), rounding), rows.unit)} ${bias < 0 ? 'below' : 'above'} what ${rows.candidate} predicted before, on average; the typical error (root mean square) is ${withUnit(rounded(rmse, rounding), rows.unit)}.`,
+          `In the ${counted(scored, 'new row', 'new rows', count)} ${label} lies ${withUnit(rounded(Math.abs(bias), rounding), rows.unit)} ${bias < 0 ? 'below' : 'above'} what ${named(rows.candidate)} predicted before, on average; the typical error (root mean square) is ${withUnit(rounded(rmse, rounding), rows.unit)}.`,
         ];
   return [
     ...errors,
@@ -253,10 +275,10 @@ function insideSentence(rows: NewRows): string[] {
 
 function insideVerdict({ share_lower: low, share_upper: high, interval }: NewRows): string {
   if (low === null || high === null) return 'how many that ought to be cannot be said';
-  if (high < interval) return 'fewer than such intervals ought to hold';
+  if (high < interval) return `fewer than the ${percent(interval)} that ought to`;
   return low > interval
-    ? 'more than such intervals ought to hold'
-    : 'as many as such intervals ought to hold';
+    ? `more than the ${percent(interval)} that ought to`
+    : `${percent(interval)} is within that interval`;
 }
 
 /** Chow's tests, each with its sentence. */
@@ -294,7 +316,9 @@ export function attentionLines(
   selection: StudyRecord['selection'],
 ): string[] {
   const { choice, models, new_rows: rows, contract } = comparison;
-  const renamed = contract.filter(({ kind }) => kind === 'level_gone' || kind === 'variable_gone');
+  const renamed = contract.filter(({ kind }) =>
+    ['level_gone', 'level_undeclared', 'variable_gone', 'rescaled'].includes(kind),
+  );
   const worse = contract.filter(({ kind }) => ['bad_values', 'rows_lost', 'missing'].includes(kind));
   const fresh = contract.filter(({ kind }) => kind === 'level_new');
   const units = contract.filter(({ kind }) => kind === 'unit');

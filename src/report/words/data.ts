@@ -49,7 +49,7 @@ export function contractSentence(data: Data): string {
   if (data.bad_value_count === 0) return 'No value broke the declared contract.';
   const shown =
     data.bad_values.length < data.bad_value_count
-      ? `; the first ${count(data.bad_values.length)} are listed`
+      ? `; ${count(data.bad_values.length)} of them ${data.bad_values.length === 1 ? 'is' : 'are'} listed`
       : '';
   return `${counted(data.bad_value_count, 'value', 'values', count)} broke the declared contract${shown}.`;
 }

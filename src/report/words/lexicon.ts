@@ -84,6 +84,11 @@ export function listed(items: readonly string[], word = 'and'): string {
   return `${items.slice(0, -1).join(', ')} ${word} ${items.at(-1)}`;
 }
 
+/** A candidate's name inside a sentence; in quotation marks where its own punctuation could be taken for the sentence's. */
+export function named(name: string): string {
+  return /[.,;:()]/.test(name) ? `“${name}”` : name;
+}
+
 /** Ends a sentence that may or may not have its full stop. */
 export function stopped(sentence: string): string {
   const text = sentence.trim();
