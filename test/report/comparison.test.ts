@@ -170,6 +170,14 @@ describe('every kind of change has its sentence', () => {
     expect(unbroken(contractChangeSentence(lexicon, given, [given]))).toBe(sentence);
   });
 
+  test('values in another unit whose declaration changed as well', () => {
+    const line = change('rescaled', { later: [27, 27, 0, 0.1] });
+    const unit = change('unit', { earlier: 'mm', later: 'cm' });
+    expect(unbroken(contractChangeSentence(lexicon, line, [unit, line]))).toBe(
+      'All 27 revised values of v are 0.1 × what they were, and its declared unit is another.',
+    );
+  });
+
   test('values of before are in the unit of before', () => {
     const said = (kind: ContractChange['kind'], earlier: string) =>
       unbroken(contractChangeSentence(lexicon, change(kind), [change('unit', { earlier, later: 'none' })]));

@@ -90,7 +90,7 @@ export function contractChangeSentence(
     case 'level_undeclared':
       return `Cells of ${label} say “${name}”, which is no declared level: is it a new one? Then declare it.`;
     case 'rescaled':
-      return rescaledSentence(label, b);
+      return `${rescaledPhrase(label, b)}${unitBefore === unit ? ': has its unit changed?' : ', and its declared unit is another.'}`;
     case 'range':
       return `${label} runs from ${span(b, unit)}; before it ran from ${span(a, unitBefore)}.`;
     case 'middle':
@@ -116,8 +116,8 @@ export function contractChangeSentence(
   }
 }
 
-/** "All 272 revised values of beak_length are 0.1 × what they were: has its unit changed?" */
-function rescaledSentence(
+/** "All 272 revised values of length are 0.1 × what they were" */
+function rescaledPhrase(
   label: string,
   [following = 0, revised = 0, offset = 0, factor = 1]: readonly number[],
 ) {
@@ -129,7 +129,7 @@ function rescaledSentence(
       : offset === 0
         ? times
         : `${times} ${offset < 0 ? '−' : '+'} ${value(Math.abs(offset), 5)}`;
-  return `${which} revised values of ${label} are ${line}: has its unit changed?`;
+  return `${which} revised values of ${label} are ${line}`;
 }
 
 function likelySentence({ likely, because, name }: ContractChange): string {
