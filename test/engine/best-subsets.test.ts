@@ -124,8 +124,8 @@ function expectSame(
 
 const seeds = fc.integer({ min: 1, max: 1_000_000 });
 
-/** Up to fourteen groups, some of several columns, some that need earlier ones. */
-const problems = fc.integer({ min: 1, max: 12 }).chain((count) =>
+/** Groups, some of several columns, some that need earlier ones. */
+const problemsOf = (count: number): fc.Arbitrary<Problem> =>
   fc.record({
     rows: fc.integer({ min: 40, max: 60 }),
     widths: fc.array(fc.constantFrom(1, 1, 1, 2, 3), { minLength: count, maxLength: count }),
@@ -142,8 +142,8 @@ const problems = fc.integer({ min: 1, max: 12 }).chain((count) =>
     always: fc.integer({ min: 0, max: 2 }),
     intercept: fc.boolean(),
     seed: seeds,
-  }),
-);
+  });
+const problems = fc.integer({ min: 1, max: 12 }).chain(problemsOf);
 
 describe('the best subsets of every size', () => {
   it('are those of trying them all, with groups, needs, limits and what is always in', () => {
@@ -164,6 +164,20 @@ describe('the best subsets of every size', () => {
         },
       ),
       { numRuns: 150 },
+    );
+  });
+
+  it('are those of trying all of up to sixteen groups', () => {
+    const large = fc.integer({ min: 13, max: 16 }).chain(problemsOf);
+    fc.assert(
+      fc.property(large, fc.integer({ min: 1, max: 3 }), (problem, keep) => {
+        const { model, search, plain, alwaysCount } = build(problem);
+        const found = bestSubsets(factorRows(model.rows), { ...search, keep });
+        expect(found.finished).toBe(true);
+        expectSame(found, plain, keep, alwaysCount, () => true);
+        expect(found.covered).toBe(plain.length);
+      }),
+      { numRuns: 3 },
     );
   });
 
