@@ -9,7 +9,7 @@ import { comparisonSummary } from './comparison-summary.ts';
 import { UNUSABLE } from './exit-status.ts';
 import { DEEPEST, findRecords, hasRecord, type ManyRecords } from './many-records.ts';
 import { showProblems } from './show-problems.ts';
-import { sourceTexts } from './source-texts.ts';
+import { placedAt, sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
 
 /**
@@ -42,12 +42,8 @@ export async function compareCommand(
     if (await writeResults(out, files, report, [], obstacle))
       places = files.map(({ name }) => join(out, name));
   }
-  await showProblems(
-    problems,
-    await sourceTexts(problems, templatePlaces(later?.record ?? null, options)),
-    options.problems,
-    terminal,
-  );
+  const placed = placedAt(problems, templatePlaces(later?.record ?? null, options));
+  await showProblems(placed, await sourceTexts(placed), options.problems, terminal);
   if (comparison === null || hasError(problems)) return UNUSABLE;
   const status = statusOfComparison(comparison);
   if (options.problems === 'json') return status;

@@ -88,6 +88,19 @@ async function readEarlier(
   report: Report,
 ): Promise<ComparedSide | null> {
   if (path === undefined || (study?.repeatFor ?? null) !== null) return null;
+  const { DEEPEST, findRecords, hasRecord } = await import('./many-records.ts');
+  const below = (await hasRecord(path)) ? new Set<string>() : (await findRecords(path, DEEPEST)).folders;
+  if (below.size > 0) {
+    const [first] = below;
+    report({
+      code: 'command_unusable',
+      severity: 'error',
+      place: { kind: 'command' },
+      message: `--against names "${path}", which holds the records of other runs, each in its own folder, and no record of its own: this is one run.`,
+      hint: `Name the folder of its earlier results there, such as "${join(path, first!)}".`,
+    });
+    return null;
+  }
   const { readCompared } = await import('../compare/read-compared.ts');
   return readCompared(path, report);
 }

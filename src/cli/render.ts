@@ -11,7 +11,7 @@ import { DONE, UNUSABLE } from './exit-status.ts';
 import { givenTemplate } from './given-template.ts';
 import { reportFiles, templateNames } from './report-files.ts';
 import { showProblems } from './show-problems.ts';
-import { sourceTexts } from './source-texts.ts';
+import { placedAt, sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
 
 export interface RenderCommandOptions extends CommonOptions {
@@ -45,12 +45,8 @@ export async function renderCommand(
     }
   }
 
-  await showProblems(
-    problems,
-    await sourceTexts(problems, templatePlace(record, options)),
-    options.problems,
-    terminal,
-  );
+  const placed = placedAt(problems, templatePlace(record, options));
+  await showProblems(placed, await sourceTexts(placed), options.problems, terminal);
   if (hasError(problems)) return UNUSABLE;
   if (options.quiet !== true && options.problems === 'text') {
     for (const file of written) terminal.out(`${file}\n`);

@@ -22,3 +22,14 @@ export async function sourceTexts(
   }
   return texts;
 }
+
+/** Problems in a template that the command line names stand at that file, whatever the library calls it. */
+export function placedAt(problems: readonly Problem[], paths: ReadonlyMap<string, string>): Problem[] {
+  return problems.map((problem) => {
+    const { place } = problem;
+    const path = place.kind === 'source' ? paths.get(place.file) : undefined;
+    return path === undefined || place.kind !== 'source'
+      ? problem
+      : { ...problem, place: { ...place, file: path } };
+  });
+}

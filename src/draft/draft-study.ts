@@ -59,6 +59,7 @@ export async function draftStudy(dataPath: string, options: DraftOptions): Promi
     leftOut,
     response: response.name,
     rowId: rowId?.name ?? null,
+    unique: variables.find(({ seen }) => seen.type === 'date' && seen.unique)?.name ?? null,
     time: time?.name ?? null,
     candidates,
   });

@@ -24,6 +24,8 @@ export interface Draft {
   readonly leftOut: readonly string[];
   readonly response: string;
   readonly rowId: string | null;
+  /** Where there is no `rowId`: a date that no two rows share. */
+  readonly unique: string | null;
   readonly time: string | null;
   readonly candidates: readonly Proposed[];
 }
@@ -44,7 +46,9 @@ export function writeDraft(draft: Draft): string {
     `  missing: [${USUAL_MISSING.map(quoted).join(', ')}]`,
     ...(draft.rowId === null
       ? [
-          '  # row_id: TODO No column tells every row apart; with one, a later run can be compared row by row.',
+          draft.unique === null
+            ? '  # row_id: TODO No column tells every row apart; with one, a later run can be compared row by row.'
+            : `  # row_id: TODO The dates in ${draft.unique} tell every row apart. Declare that column a second time, as an identifier, and name it here: a later run is then compared row by row.`,
         ]
       : [`  row_id: ${quoted(draft.rowId)}`]),
     ...(draft.time === null

@@ -81,9 +81,12 @@ export function faultThrown(fault: unknown, program: unknown): TemplateFault {
     return { message: 'The template calls itself without end.', line: 1, column: 1 };
   const parse = /^Parse error on line (\d+):\n([\s\S]*)$/.exec(text);
   if (parse !== null) {
-    const expectation = parse[2]!.split('\n').at(-1)!.replace(/'/g, '"');
+    // The parser's own words name its tokens, which say nothing to a writer of templates.
+    const ends = /got 'EOF'$/.test(parse[2]!);
     return {
-      message: `The template cannot be read: ${ended(expectation)}`,
+      message: ends
+        ? 'The template cannot be read: it ends inside braces or a block that are not closed.'
+        : 'The template cannot be read: these braces do not hold what braces may.',
       line: Number(parse[1]),
       column: 1,
     };

@@ -56,6 +56,16 @@ describe('a study that repeats', () => {
   }, 60_000);
   afterAll(() => rm(home, { recursive: true }));
 
+  test('is no earlier record of one run; the folder of one of them is', async () => {
+    const one = wellsStudy().replace(/^repeat_for:.*\n/m, '');
+    await writeFile(at('one.study.yaml'), one);
+    const ran = await plumbrule('fit', at('one.study.yaml'), '--out', at('one'), '--against', at('earlier'));
+    expect(ran.status).toBe(2);
+    expect(plain(ran.err)).toContain('holds the records of other runs, each in its own folder');
+    expect(ran.err).toContain(`such as "${at('earlier', 'Alder')}"`);
+    expect(await readdir(home)).not.toContain('one');
+  });
+
   test('is refreshed in place: kept, changed, missed, new, gone and failed levels', async () => {
     const ran = refreshed;
     expect(ran.status).toBe(2);

@@ -270,8 +270,25 @@ describe('fit', () => {
     expect(broken.status).toBe(2);
     expect(broken.err).toMatch(/own\.hbs:2:\d+ .*\n +2 \| \{\{#if\}\}/);
     expect(await readdir(home)).not.toContain('out');
+    await writeFile(join(home, 'own.hbs'), 'Title\n{{#each rows}}');
+    const open = await plumbrule('fit', path, '--out', out);
+    expect(open.err).toContain(
+      'The template cannot be read: it ends inside braces or a block that are not closed.',
+    );
     await writeFile(join(home, 'own.hbs'), 'Mine: {{title}}');
     expect((await plumbrule('fit', path, '--out', out)).status).toBe(0);
+    // One that the command line names is known by its path, and not by the name of the study's own.
+    const given = join(home, 'given.hbs');
+    await writeFile(given, '{{> nothing}}');
+    const record = join(out, 'record.json');
+    for (const args of [
+      ['render', record],
+      ['compare', record, record],
+    ]) {
+      const ran = await plumbrule(...args, '--format', 'markdown', '--template', given);
+      expect([ran.status, ran.err]).toEqual([2, expect.stringContaining(`${given}:1:1 `)]);
+      expect(ran.err).toContain('1 | {{> nothing}}');
+    }
     expect(await readFile(join(out, 'report.md'), 'utf8')).toBe('Mine: A small study\n');
   });
 

@@ -22,6 +22,24 @@ const ROWS = Array.from({ length: 48 }, (_, i) => {
 const EUROPEAN = `Kennung;Gewicht (kg);on;Art, grob;Tag;\${y}\n${ROWS.join('\n')}\n`;
 
 describe('a draft', () => {
+  test('tells of dates that tell every row apart, and how they become its identity', () =>
+    inFolder(
+      {
+        'd.csv': `day,a,b\n${ROWS.slice(0, 28)
+          .map((_, i) => `2025-03-${String(i + 1).padStart(2, '0')},${i * i},${i}.5`)
+          .join('\n')}\n`,
+      },
+      async (folder) => {
+        const { text } = await draftStudy(join(folder, 'd.csv'), { response: 'b' });
+        expect(text).toContain('# row_id: TODO The dates in day tell every row apart.');
+        const study = text!
+          .replace(/^ {2}# row_id: .*$/m, '  row_id: id')
+          .replace('  variables:\n', '  variables:\n    id: { column: day, type: identifier }\n');
+        await writeFile(join(folder, 'd.study.yaml'), study);
+        expect(errorsOf((await checkStudy(join(folder, 'd.study.yaml'))).problems)).toEqual([]);
+      },
+    ));
+
   test('says how the file is written, and runs', () =>
     inFolder({ 'd.csv': EUROPEAN }, async (folder) => {
       await mkdir(join(folder, 'studies'));
