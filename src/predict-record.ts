@@ -45,6 +45,8 @@ export interface RowOutcome {
 export interface GroupTotal extends PredictionTotal {
   /** The value of the grouping variable; null for the total of all rows. */
   readonly group: string | null;
+  /** Rows of the file, or of the group in it, that cannot be predicted and so are missing from the total. */
+  readonly rows_not_predicted: number;
 }
 
 export interface RecordPredictions {
@@ -168,12 +170,20 @@ export async function predictColumnsFromRecord(
   at.forEach((k, row) => {
     if (k < 0) because[row] ??= 'the model has no answer there';
   });
+  const lacking = new Int32Array(totals.length);
+  at.forEach((k, row) => {
+    if (k >= 0) return;
+    lacking[0]!++;
+    if (group !== null) lacking[group.codes[row]! + 1]!++;
+  });
   return {
     record,
     interval,
     rows: { labelOf: all.labelOf, lines: table.lines, at, because, predicted },
     totals: totals.flatMap((total, k) =>
-      total === null ? [] : [{ group: k === 0 ? null : group!.names[k - 1]!, ...total }],
+      total === null
+        ? []
+        : [{ group: k === 0 ? null : group!.names[k - 1]!, ...total, rows_not_predicted: lacking[k]! }],
     ),
     problems,
   };

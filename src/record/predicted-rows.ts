@@ -16,6 +16,8 @@ export interface TotalRow {
   /** Null for the total of all rows. */
   readonly group: string | null;
   readonly rows: number;
+  /** Rows that cannot be predicted and so are missing from the total. */
+  readonly rows_not_predicted: number;
   readonly estimate: number;
   readonly lower: number | null;
   readonly upper: number | null;
@@ -98,9 +100,18 @@ function figuresAt({ figures }: PredictedColumns, k: number): Record<string, num
 
 /** Totals as CSV, that of all rows first, with an empty group. */
 export function totalsTable(totals: readonly TotalRow[], by: string | null): string {
-  const lines = totals.map(({ group, rows, estimate, lower, upper }) =>
-    [...(by === null ? [] : [cell(group ?? '')]), rows, estimate, lower ?? '', upper ?? ''].join(','),
+  const lines = totals.map(({ group, rows, estimate, lower, upper, rows_not_predicted: lacking }) =>
+    [...(by === null ? [] : [cell(group ?? '')]), rows, estimate, lower ?? '', upper ?? '', lacking].join(
+      ',',
+    ),
   );
-  const header = [...(by === null ? [] : [cell(by)]), 'rows', 'estimate', 'lower', 'upper'].join(',');
+  const header = [
+    ...(by === null ? [] : [cell(by)]),
+    'rows',
+    'estimate',
+    'lower',
+    'upper',
+    'rows_not_predicted',
+  ].join(',');
   return `${[header, ...lines].join('\n')}\n`;
 }

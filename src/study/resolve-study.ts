@@ -107,6 +107,7 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
     report,
     settings: settingsOf(reading),
     placeOf: reading.written.placeOf,
+    keyPlaceOf: reading.written.keyPlaceOf,
   };
 }
 

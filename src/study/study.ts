@@ -38,6 +38,8 @@ export interface Study {
   readonly settings: readonly Setting[];
   /** The place of a value in the study file, by its path of keys and indexes; the nearest parent if absent. */
   readonly placeOf: (path: readonly (string | number)[]) => SourcePlace;
+  /** The place of the key itself, for names that are keys. */
+  readonly keyPlaceOf: (path: readonly (string | number)[]) => SourcePlace;
 }
 
 export interface Setting {

@@ -119,6 +119,11 @@ describe('in the study and its record', () => {
     const errors = problems.filter(({ severity }) => severity === 'error');
     expect(errors.map((problem) => problem.code)).toEqual([code]);
     expect(errors[0]!.message).toContain(words);
+    // A name that is a key is pointed to, and not what stands under it.
+    if (code === 'sign_name_unknown') {
+      const name = /\{ of: \{ (\w+):/.exec(acceptance)![1]!;
+      expect(errors[0]!.place).toMatchObject({ kind: 'source', length: name.length });
+    }
   });
 });
 

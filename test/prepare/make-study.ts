@@ -104,6 +104,7 @@ export function makeStudy(columns: readonly Column[], written: Written): Study {
     parameters: [],
     settings: [],
     placeOf: () => place,
+    keyPlaceOf: () => place,
   };
 }
 

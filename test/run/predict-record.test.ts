@@ -100,7 +100,7 @@ describe('a record alone predicts as its study did, to the last bit', () => {
         ['r3', 'r14', 'r25', 'r7', 'far'].map((label, k) => [label, k + 2]),
       );
       if (record.prediction_total === null) expect(totals).toEqual([]);
-      else expect(totals).toEqual([{ group: null, ...record.prediction_total }]);
+      else expect(totals).toEqual([{ group: null, ...record.prediction_total, rows_not_predicted: 0 }]);
       expect(rows[4]!.prediction!.outside).toEqual(['a 11 is above 10, the largest in the data']);
     }),
   );
@@ -282,7 +282,7 @@ describe('predict', () => {
       const bySite = await predictFromRecord(path, file, { totalBy: 'site' });
       const s2 = record.model!.residual_standard_error! ** 2;
       // A group of one row has the interval of that row; all rows together have what the record says.
-      expect(bySite.totals[0]).toEqual({ group: null, ...record.prediction_total });
+      expect(bySite.totals[0]).toEqual({ group: null, ...record.prediction_total, rows_not_predicted: 0 });
       expect(bySite.totals.map(({ group, rows }) => [group, rows])).toEqual([
         [null, 5],
         ['North', 1],
@@ -303,7 +303,17 @@ describe('predict', () => {
       expect(Math.abs(cross)).toBeGreaterThan(1e-4);
 
       const byColumn = await plumbrule('predict', path, file, '--total-by', 'w', '--interval', '0.5');
-      expect(byColumn.out).toMatch(/^w,rows,estimate,lower,upper\n,5,/);
+      expect(byColumn.out).toMatch(/^w,rows,estimate,lower,upper,rows_not_predicted\n,5,[^\n]*,0\n/);
+      // A row that cannot be predicted is counted where it is missing.
+      const [head, first, ...others] = ROWS.trimEnd().split('\n');
+      const without = (row: string) =>
+        row
+          .split(';')
+          .map((each, j) => ([1, 2].includes(j) ? '' : each))
+          .join(';');
+      await writeFile(file, [head, first, without(first!), ...others].join('\n'));
+      const some = await predictFromRecord(path, file, { totalBy: 'site' });
+      expect(some.totals.map(({ rows_not_predicted: n }) => n)).toEqual([1, 1, 0, 0]);
       const unknown = await plumbrule('predict', path, file, '--total-by', 'sit');
       expect([unknown.status, unknown.err]).toEqual([2, expect.stringContaining('Did you mean site?')]);
     }));

@@ -1,5 +1,5 @@
 import { fileURLToPath } from 'node:url';
-import type { Problem } from '../../src/problem.ts';
+import type { Problem, SourcePlace } from '../../src/problem.ts';
 import type { AdmitPlan, SelectionPlan, Study } from '../../src/study/study.ts';
 
 export type SelectionChange = Partial<Omit<SelectionPlan, 'admit'>> & { readonly admit?: Partial<AdmitPlan> };
@@ -69,14 +69,8 @@ export function studyWith(change: SelectionChange): Study {
     },
     parameters: [],
     settings: [],
-    // The path's last step gives the line, so that a test can tell places apart.
-    placeOf: (path) => ({
-      kind: 'source',
-      file: 'study.yaml',
-      line: path.length,
-      column: 1,
-      length: String(path.at(-1)).length,
-    }),
+    placeOf: place,
+    keyPlaceOf: place,
   };
 }
 
@@ -84,4 +78,15 @@ export function studyWith(change: SelectionChange): Study {
 export function collector(): { readonly problems: Problem[]; readonly report: (problem: Problem) => void } {
   const problems: Problem[] = [];
   return { problems, report: (problem) => problems.push(problem) };
+}
+
+/** The path's last step gives the line, so that a test can tell places apart. */
+function place(path: readonly (string | number)[]): SourcePlace {
+  return {
+    kind: 'source',
+    file: 'study.yaml',
+    line: path.length,
+    column: 1,
+    length: String(path.at(-1)).length,
+  };
 }

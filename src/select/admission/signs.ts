@@ -45,7 +45,7 @@ export function checkSignNames(study: Study, { fits, columnNames }: FitContext, 
     // A coefficient of a family of which no model found has it.
     if (study.families.length > 0 && columnNames.includes(name)) continue;
     const term = fits.flatMap((fit) => fit.candidate.terms).find((each) => each.name === name);
-    const place = study.placeOf(path);
+    const place = study.keyPlaceOf(path);
     if (term !== undefined) {
       const columns = term.columns.map((column) => `"${columnNames[column]}"`);
       report({
