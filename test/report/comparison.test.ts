@@ -5,6 +5,7 @@ import type {
   DeclarationChange,
   NewRows,
 } from '../../src/report/comparison-type.ts';
+import type { OverviewEntry } from '../../src/report/overview.ts';
 import {
   attentionLines,
   choiceSentences,
@@ -17,6 +18,7 @@ import {
   studySentence,
 } from '../../src/report/words/comparison.ts';
 import { lexiconOf } from '../../src/report/words/lexicon.ts';
+import { choiceText } from '../../src/report/words/overview.ts';
 import { sampleRecord } from './sample-record.ts';
 
 const record = sampleRecord();
@@ -237,6 +239,16 @@ describe('the choice', () => {
       'The rule of the choice is another than before.',
       'On the rows of now A comes out 10.0 worse in AICc.',
     ]);
+  });
+
+  test('a name with a comma of its own stands in quotation marks', () => {
+    const [earlier, later] = ['Load, heat and kiln', 'Load and heat'].map((name) => ({ ...other, name }));
+    expect(said({ changed: true, earlier: earlier!, later: later! })[0]).toBe(
+      'Load and heat is chosen; before, “Load, heat and kiln” was.',
+    );
+    const change = { choice: { changed: true, from: earlier!.name, to: later!.name } };
+    const entry = { hasEarlier: true, chosen: later!.name, change } as unknown as OverviewEntry;
+    expect(choiceText(entry)).toBe('changed: “Load, heat and kiln” to Load and heat');
   });
 
   test('within what the rule counts as equal; better, but refused; without a value', () => {

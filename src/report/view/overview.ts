@@ -11,7 +11,7 @@ import {
   worstFirst,
 } from '../overview.ts';
 import type { OverviewView } from '../overview-view.ts';
-import { counted, listed } from '../words/lexicon.ts';
+import { counted, listed, named } from '../words/lexicon.ts';
 import {
   changeParagraphs,
   choiceText,
@@ -68,7 +68,7 @@ function told({ runs, gone }: Overview): OverviewView['failures'] {
           {
             name,
             outcome: 'another choice',
-            why: `${change.choice.to ?? 'No candidate'} is chosen; before, ${change.choice.from ?? 'no candidate'} was.`,
+            why: `${change.choice.to === null ? 'No candidate' : named(change.choice.to)} is chosen; before, ${change.choice.from === null ? 'no candidate' : named(change.choice.from)} was.`,
           },
         ],
   );
@@ -82,7 +82,7 @@ function told({ runs, gone }: Overview): OverviewView['failures'] {
 
 function beforeSentence({ chosen, rowsUsed }: Pick<GoneRun, 'chosen' | 'rowsUsed'>): string {
   if (rowsUsed === null) return 'There is an earlier record and no run now.';
-  return `There is an earlier record of ${counted(rowsUsed, 'row', 'rows', count)}, with ${chosen ?? 'no candidate'} chosen, and no run now.`;
+  return `There is an earlier record of ${counted(rowsUsed, 'row', 'rows', count)}, with ${chosen === null ? 'no candidate' : named(chosen)} chosen, and no run now.`;
 }
 
 function changesView({ runs, gone }: Overview): NonNullable<OverviewView['changes']> {
@@ -139,11 +139,11 @@ function chosenSentence(entries: readonly OverviewEntry[]): string[] {
   const [first, ...others] = [...counts].sort(([, a], [, b]) => b - a);
   if (first === undefined || first[1] < 2) return [];
   const [name, runs] = first;
-  if (others.length === 0) return [`Wherever a candidate was chosen it is ${name}.`];
-  const told = others.slice(0, MOST_CHOSEN).map(([other, times]) => `${other} in ${count(times)}`);
+  if (others.length === 0) return [`Wherever a candidate was chosen it is ${named(name)}.`];
+  const told = others.slice(0, MOST_CHOSEN).map(([other, times]) => `${named(other)} in ${count(times)}`);
   const more = others.length - told.length;
   const rest = more > 0 ? [counted(more, 'other candidate', 'other candidates', count)] : [];
-  return [`${name} was chosen in ${count(runs)} of the runs, ${listed([...told, ...rest])}.`];
+  return [`${named(name)} was chosen in ${count(runs)} of the runs, ${listed([...told, ...rest])}.`];
 }
 
 /** Candidates beside the most frequent one that a sentence names. */

@@ -1,6 +1,6 @@
 import { count, fixed, NONE } from '../numbers.ts';
 import { OUTCOMES, type Overview, type OverviewChange, type OverviewEntry } from '../overview.ts';
-import { counted, listed } from './lexicon.ts';
+import { counted, listed, named } from './lexicon.ts';
 
 /** "Of 12 runs, 10 are done, 1 missed criteria and 1 failed." */
 export function outcomeSentence(entries: readonly OverviewEntry[]): string {
@@ -101,5 +101,7 @@ export function choiceText({ change, hasEarlier, chosen }: OverviewEntry): strin
   if (hasEarlier === false) return chosen === null ? 'new' : `new: ${chosen}`;
   if (change === null) return 'not compared';
   const { changed, from, to } = change.choice;
-  return changed ? `changed: ${from ?? 'none'} to ${to ?? 'none'}` : `kept: ${to ?? 'none'}`;
+  return changed
+    ? `changed: ${from === null ? 'none' : named(from)} to ${to === null ? 'none' : named(to)}`
+    : `kept: ${to ?? 'none'}`;
 }
