@@ -1,16 +1,19 @@
 import { significant } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
-import { bottomAxis, leftAxis, plotOf, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
-import { at, clipped, drawing, element, type Figure, label } from './svg.ts';
+import { bottomAxis, placesAlong, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
+import { clipped, dots, drawing, element, type Figure, label } from './svg.ts';
 
-const HEIGHT = 250;
+const HEIGHT = 190;
+/** The rows named, each at a height of its own. */
+const NAMED = 3;
+const NAME_STEP = 20;
 
 /** "C0081 (row 82)" or "row 82". */
 export function rowTitle(row: number, id: string | null): string {
   return id === null ? `row ${row}` : `${id} (row ${row})`;
 }
 
-/** Cook's distance of each row in file order, the three largest named; null where it is defined for none. */
+/** All rows strung along their Cook's distance, with the largest three hung by name; null where it is defined for none. */
 export function influenceChart(examination: RecordExamination): Figure | null {
   const { points } = examination;
   const rows = points.row.flatMap((row, i) => {
@@ -18,35 +21,31 @@ export function influenceChart(examination: RecordExamination): Figure | null {
     return d === null || d === undefined || !Number.isFinite(d) ? [] : [{ row, id: points.id[i] ?? null, d }];
   });
   if (rows.length === 0) return null;
-  const plot = plotOf(HEIGHT);
-  const x = roomy(spanOf(rows.map((r) => r.row)), [plot.left, plot.right], 0.02);
-  const largest = Math.max(...rows.map((r) => r.d));
-  const y = roomy([0, largest || 1], [plot.bottom, plot.top], 0).nice(4);
-  const stems = `<path class="stems" d="${rows.map((r) => `M${at(x(r.row))} ${at(plot.bottom)}V${at(y(r.d))}`).join('')}"/>`;
-  const top = [...rows].sort((a, b) => b.d - a.d || a.row - b.row).slice(0, 3);
-  const taken: { x: number; y: number }[] = [];
-  const names = top
-    .map((r) => {
-      const cx = x(r.row);
-      const cy = y(r.d);
-      const dot = element('circle', { class: 'mark chosen', cx, cy, r: 4 });
-      // Names of rows beside each other would run together; the table below has them all.
-      if (taken.some((t) => Math.abs(t.x - cx) < 90 && Math.abs(t.y - cy) < 14)) return dot;
-      taken.push({ x: cx, y: cy });
-      const left = cx > (plot.left + plot.right) / 2;
+  const plot = { left: 20, right: WIDTH - 20, top: 22 + NAMED * NAME_STEP, bottom: HEIGHT - 42 };
+  const distances = rows.map((r) => r.d);
+  const x = roomy([0, spanOf([0, ...distances])[1]], [plot.left, plot.right], 0.03);
+  const middle = (plot.top + plot.bottom) / 2;
+  // A fixed scatter across the strip keeps dots apart without a random number.
+  const heights = rows.map((_, i) => middle + (((i * 7) % 11) - 5) * 4);
+  const top = [...rows.keys()]
+    .sort((i, j) => rows[j]!.d - rows[i]!.d || rows[i]!.row - rows[j]!.row)
+    .slice(0, NAMED);
+  // Names point to the middle; of two on one side the outer one hangs higher, so that no line runs through a name.
+  const isLeft = (i: number) => x(rows[i]!.d) < WIDTH / 2;
+  const outward = [...top.filter((i) => !isLeft(i)), ...top.filter(isLeft).reverse()];
+  const names = outward
+    .map((i, k) => {
+      const { row, id, d } = rows[i]!;
+      const [cx, cy, name] = [x(d), heights[i]!, 16 + k * NAME_STEP];
+      const [aside, anchor] = isLeft(i) ? [6, 'start'] : [-6, 'end'];
       return (
-        dot +
-        label(
-          cx + (left ? -8 : 8),
-          cy + 4,
-          clipped(r.id ?? `row ${r.row}`, 22),
-          'name',
-          left ? 'end' : 'start',
-        )
+        element('line', { class: 'plumb', x1: cx, x2: cx, y1: name - 8, y2: cy - 4 }) +
+        element('circle', { class: 'mark chosen', cx, cy, r: 4 }) +
+        label(cx + aside, name, clipped(id ?? `row ${row}`, 22), 'name', anchor)
       );
     })
     .join('');
-  const [first, second] = top;
+  const [first, second] = top.map((i) => rows[i]);
   const caption = `${rowTitle(first!.row, first!.id)} moves the coefficients most: Cook’s distance ${significant(first!.d, 2)}${second === undefined ? '' : `, the next ${significant(second.d, 2)} (${rowTitle(second.row, second.id)})`}.`;
   const opening = caption[0] === 'r' && first!.id === null ? `R${caption.slice(1)}` : caption;
   return {
@@ -55,9 +54,8 @@ export function influenceChart(examination: RecordExamination): Figure | null {
       { width: WIDTH, height: HEIGHT },
       'Influence of each row',
       opening,
-      leftAxis(plot, y, ticksOf(y, 4), 'Cook’s distance') +
-        bottomAxis(plot, x, ticksOf(x, 6), 'row of the data file') +
-        stems +
+      bottomAxis(plot, x, ticksOf(x, 6), 'Cook’s distance of each row') +
+        dots(placesAlong(x, distances), heights, 'dots') +
         names,
     ),
     caption: opening,
