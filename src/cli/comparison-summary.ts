@@ -1,7 +1,7 @@
 import type { Comparison } from '../compare/comparison.ts';
 import type { StudyRecord } from '../record/record.ts';
 import { count, fixed, rounded, roundingFor } from '../report/numbers.ts';
-import { comparedCriterionSentence } from '../report/words/acceptance.ts';
+import { comparedCriterionSentence, verdictWord } from '../report/words/acceptance.ts';
 import {
   attentionLines,
   choiceSentences,
@@ -58,7 +58,10 @@ export function comparisonSummary(
     { label: 'new rows', paragraphs: newRows(lexicon, comparison, record) },
     {
       label: 'accepted',
-      paragraphs: comparison.acceptance.map((each) => ({ mark: '·', text: comparedCriterionSentence(each) })),
+      paragraphs: comparison.acceptance.map((each) => ({
+        mark: '·',
+        text: `${verdictWord(each.passed)}: ${comparedCriterionSentence(each)}`,
+      })),
     },
     { label: 'written', paragraphs: places.map((line) => ({ line })) },
   ];

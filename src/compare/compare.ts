@@ -72,7 +72,7 @@ function comparable(earlier: ComparedSide, later: ComparedSide, report: Report):
     report({
       code: 'records_unlike',
       severity: 'error',
-      place: { kind: 'file', file: later.file },
+      place: { kind: 'file', file: earlier.file },
       message: `The later record explains ${b}, the earlier one ${a}: they are of different studies.`,
       hint: 'Compare two records of the same response.',
     });

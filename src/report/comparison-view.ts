@@ -14,6 +14,8 @@ export interface ComparisonView {
   readonly attention: readonly string[];
   /** Every acceptance criterion that an earlier record judges, and what came of it. */
   readonly accepted: readonly VerdictView[];
+  /** Whether rows of either side have dates. */
+  readonly dated: boolean;
   /** The two sides in a line each. */
   readonly sides: readonly SideView[];
   /** Which rows are unchanged, revised, new and gone. */
@@ -50,7 +52,7 @@ export interface SideView {
   readonly data: string;
   /** "230 of 240": rows used of those read. */
   readonly rows: string;
-  /** From the first to the last row used; a dash without a time variable. */
+  /** From the first to the last row used; a dash where they have no dates. */
   readonly dates: string;
   /** The candidate chosen; "none" where none was. */
   readonly chosen: string;

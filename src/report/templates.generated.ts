@@ -145,7 +145,9 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     + alias4((((helper = lookupProperty(helpers,"sentence") || alias1(depth0, "sentence", {"start":{"line":46,"column":61},"end":{"line":46,"column":69}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"sentence","hash":{},"data":data,"loc":{"start":{"line":46,"column":59},"end":{"line":46,"column":71}}}) : helper)))
     + "</li>\n";
 },"6":function(container,depth0,helpers,partials,data) {
-    var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    return "<th scope=\"col\">dates</th>";
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
@@ -160,12 +162,23 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     + alias4((((helper = lookupProperty(helpers,"data") || alias1(depth0, "data", {"start":{"line":57,"column":57},"end":{"line":57,"column":61}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"data","hash":{},"data":data,"loc":{"start":{"line":57,"column":55},"end":{"line":57,"column":63}}}) : helper)))
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"rows") || alias1(depth0, "rows", {"start":{"line":57,"column":84},"end":{"line":57,"column":88}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"rows","hash":{},"data":data,"loc":{"start":{"line":57,"column":82},"end":{"line":57,"column":90}}}) : helper)))
-    + "</td><td>"
-    + alias4((((helper = lookupProperty(helpers,"dates") || alias1(depth0, "dates", {"start":{"line":57,"column":101},"end":{"line":57,"column":106}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"dates","hash":{},"data":data,"loc":{"start":{"line":57,"column":99},"end":{"line":57,"column":108}}}) : helper)))
-    + "</td><td>"
-    + alias4((((helper = lookupProperty(helpers,"chosen") || alias1(depth0, "chosen", {"start":{"line":57,"column":119},"end":{"line":57,"column":125}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"chosen","hash":{},"data":data,"loc":{"start":{"line":57,"column":117},"end":{"line":57,"column":127}}}) : helper)))
+    + "</td>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(data,"root"),"dated"),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":57,"column":95},"end":{"line":57,"column":139}}})) != null ? stack1 : "")
+    + "<td>"
+    + alias4((((helper = lookupProperty(helpers,"chosen") || alias1(depth0, "chosen", {"start":{"line":57,"column":145},"end":{"line":57,"column":151}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"chosen","hash":{},"data":data,"loc":{"start":{"line":57,"column":143},"end":{"line":57,"column":153}}}) : helper)))
     + "</td></tr>\n";
-},"7":function(container,depth0,helpers,partials,data) {
+},"8":function(container,depth0,helpers,partials,data) {
+    var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<td>"
+    + container.escapeExpression((((helper = lookupProperty(helpers,"dates") || container.strict(depth0, "dates", {"start":{"line":57,"column":120},"end":{"line":57,"column":125}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"dates","hash":{},"data":data,"loc":{"start":{"line":57,"column":118},"end":{"line":57,"column":127}}}) : helper)))
+    + "</td>";
+},"9":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -176,10 +189,10 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<p>"
     + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "revised", {"start":{"line":81,"column":5},"end":{"line":81,"column":17}} ), depth0))
     + "</p>\n<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Revised cells\">\n<table>\n<caption>Revised cells</caption>\n<thead><tr><th scope=\"col\">row</th><th scope=\"col\">variable</th><th scope=\"col\" class=\"n\">before</th><th scope=\"col\" class=\"n\">now</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisions"),{"name":"each","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":87,"column":0},"end":{"line":89,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisions"),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":87,"column":0},"end":{"line":89,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisionsMore"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":93,"column":0},"end":{"line":95,"column":7}}})) != null ? stack1 : "");
-},"8":function(container,depth0,helpers,partials,data) {
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(lookupProperty(depth0,"rows"),"revisionsMore"),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":93,"column":0},"end":{"line":95,"column":7}}})) != null ? stack1 : "");
+},"10":function(container,depth0,helpers,partials,data) {
     var helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -196,7 +209,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"later") || alias1(depth0, "later", {"start":{"line":88,"column":99},"end":{"line":88,"column":104}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"later","hash":{},"data":data,"loc":{"start":{"line":88,"column":97},"end":{"line":88,"column":106}}}) : helper)))
     + "</td></tr>\n";
-},"9":function(container,depth0,helpers,partials,data) {
+},"11":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -207,7 +220,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<p class=\"small\">"
     + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "revisionsMore", {"start":{"line":94,"column":19},"end":{"line":94,"column":37}} ), depth0))
     + "</p>\n";
-},"10":function(container,depth0,helpers,partials,data) {
+},"12":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -218,7 +231,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<p class=\"small\">"
     + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "addedList", {"start":{"line":98,"column":19},"end":{"line":98,"column":33}} ), depth0))
     + "</p>\n";
-},"11":function(container,depth0,helpers,partials,data) {
+},"13":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -229,7 +242,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<p class=\"small\">"
     + container.escapeExpression(container.lambda(container.strict(lookupProperty(depth0,"rows"), "removedList", {"start":{"line":101,"column":19},"end":{"line":101,"column":35}} ), depth0))
     + "</p>\n";
-},"12":function(container,depth0,helpers,partials,data) {
+},"14":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -240,9 +253,9 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<ul>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"contract"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":109,"column":0},"end":{"line":111,"column":9}}})) != null ? stack1 : "")
     + "</ul>\n";
-},"13":function(container,depth0,helpers,partials,data) {
+},"15":function(container,depth0,helpers,partials,data) {
     return "<p>Levels, ranges, missing values, columns and units are as they were.</p>\n";
-},"14":function(container,depth0,helpers,partials,data) {
+},"16":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -253,7 +266,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<ul>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"declaration"),{"name":"each","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":122,"column":0},"end":{"line":124,"column":9}}})) != null ? stack1 : "")
     + "</ul>\n";
-},"15":function(container,depth0,helpers,partials,data) {
+},"17":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -262,8 +275,8 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return "<p>Every difference is taken apart in one order: the rows that are gone, then the values revised, then the rows that are new, then the declaration. Each step is a fit of its own, and the parts add up to the whole.</p>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"models"),{"name":"each","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":138,"column":0},"end":{"line":163,"column":9}}})) != null ? stack1 : "");
-},"16":function(container,depth0,helpers,partials,data) {
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"models"),{"name":"each","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":138,"column":0},"end":{"line":163,"column":9}}})) != null ? stack1 : "");
+},"18":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -274,16 +287,16 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<h3>"
     + alias4((((helper = lookupProperty(helpers,"heading") || alias1(depth0, "heading", {"start":{"line":139,"column":6},"end":{"line":139,"column":13}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"heading","hash":{},"data":data,"loc":{"start":{"line":139,"column":4},"end":{"line":139,"column":15}}}) : helper)))
     + "</h3>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"finding"),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":140,"column":0},"end":{"line":142,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"note"),{"name":"if","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":143,"column":0},"end":{"line":145,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"scatter"),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":146,"column":0},"end":{"line":148,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":149,"column":0},"end":{"line":151,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"finding"),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":140,"column":0},"end":{"line":142,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"note"),{"name":"if","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":143,"column":0},"end":{"line":145,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"scatter"),{"name":"if","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":146,"column":0},"end":{"line":148,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"chart"),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":149,"column":0},"end":{"line":151,"column":7}}})) != null ? stack1 : "")
     + "<div class=\"scroll long\" tabindex=\"0\" role=\"region\" aria-label=\"Coefficients before and now\">\n<table>\n<caption>Coefficients for "
     + alias4((((helper = lookupProperty(helpers,"quantity") || alias1(depth0, "quantity", {"start":{"line":154,"column":28},"end":{"line":154,"column":36}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"quantity","hash":{},"data":data,"loc":{"start":{"line":154,"column":26},"end":{"line":154,"column":38}}}) : helper)))
     + ", before and now</caption>\n<thead><tr><th scope=\"col\">coefficient</th><th scope=\"col\" class=\"n\">before</th><th scope=\"col\" class=\"n\">now</th><th scope=\"col\" class=\"n\">difference</th><th scope=\"col\" class=\"n\">by rows gone</th><th scope=\"col\" class=\"n\">by revision</th><th scope=\"col\" class=\"n\">by new rows</th><th scope=\"col\" class=\"n\">by declaration</th><th scope=\"col\" class=\"n\">in earlier standard errors</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"coefficients"),{"name":"each","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":157,"column":0},"end":{"line":159,"column":9}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"coefficients"),{"name":"each","hash":{},"fn":container.program(23, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":157,"column":0},"end":{"line":159,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n";
-},"17":function(container,depth0,helpers,partials,data) {
+},"19":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -294,7 +307,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<p class=\"finding\">"
     + container.escapeExpression((((helper = lookupProperty(helpers,"finding") || container.strict(depth0, "finding", {"start":{"line":141,"column":21},"end":{"line":141,"column":28}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"finding","hash":{},"data":data,"loc":{"start":{"line":141,"column":19},"end":{"line":141,"column":30}}}) : helper)))
     + "</p>\n";
-},"18":function(container,depth0,helpers,partials,data) {
+},"20":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -305,7 +318,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<p>"
     + container.escapeExpression((((helper = lookupProperty(helpers,"note") || container.strict(depth0, "note", {"start":{"line":144,"column":5},"end":{"line":144,"column":9}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"note","hash":{},"data":data,"loc":{"start":{"line":144,"column":3},"end":{"line":144,"column":11}}}) : helper)))
     + "</p>\n";
-},"19":function(container,depth0,helpers,partials,data) {
+},"21":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -316,7 +329,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<p>"
     + container.escapeExpression((((helper = lookupProperty(helpers,"scatter") || container.strict(depth0, "scatter", {"start":{"line":147,"column":5},"end":{"line":147,"column":12}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"scatter","hash":{},"data":data,"loc":{"start":{"line":147,"column":3},"end":{"line":147,"column":14}}}) : helper)))
     + "</p>\n";
-},"20":function(container,depth0,helpers,partials,data) {
+},"22":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -325,7 +338,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return ((stack1 = container.invokePartial(lookupProperty(partials,"figure"),lookupProperty(depth0,"chart"),{"name":"figure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
-},"21":function(container,depth0,helpers,partials,data) {
+},"23":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -335,7 +348,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
 
   return "<tr><th scope=\"row\">"
     + alias4((((helper = lookupProperty(helpers,"name") || alias1(depth0, "name", {"start":{"line":158,"column":22},"end":{"line":158,"column":26}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":158,"column":20},"end":{"line":158,"column":28}}}) : helper)))
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"unit"),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":158,"column":28},"end":{"line":158,"column":82}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"unit"),{"name":"if","hash":{},"fn":container.program(24, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":158,"column":28},"end":{"line":158,"column":82}}})) != null ? stack1 : "")
     + "</th><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"before") || alias1(depth0, "before", {"start":{"line":158,"column":103},"end":{"line":158,"column":109}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"before","hash":{},"data":data,"loc":{"start":{"line":158,"column":101},"end":{"line":158,"column":111}}}) : helper)))
     + "</td><td class=\"n\">"
@@ -353,7 +366,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     + "</td><td class=\"n\">"
     + alias4((((helper = lookupProperty(helpers,"inErrors") || alias1(depth0, "inErrors", {"start":{"line":158,"column":315},"end":{"line":158,"column":323}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"inErrors","hash":{},"data":data,"loc":{"start":{"line":158,"column":313},"end":{"line":158,"column":325}}}) : helper)))
     + "</td></tr>\n";
-},"22":function(container,depth0,helpers,partials,data) {
+},"24":function(container,depth0,helpers,partials,data) {
     var helper, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -364,9 +377,9 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
   return "<span class=\"under\">"
     + container.escapeExpression((((helper = lookupProperty(helpers,"unit") || container.strict(depth0, "unit", {"start":{"line":158,"column":62},"end":{"line":158,"column":66}} ))),(typeof helper === "function" ? helper.call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"unit","hash":{},"data":data,"loc":{"start":{"line":158,"column":60},"end":{"line":158,"column":68}}}) : helper)))
     + "</span>";
-},"23":function(container,depth0,helpers,partials,data) {
+},"25":function(container,depth0,helpers,partials,data) {
     return "<p>There is no model that could be fitted to both sets of rows.</p>\n";
-},"24":function(container,depth0,helpers,partials,data) {
+},"26":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -375,7 +388,7 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     };
 
   return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"newRows"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":171,"column":0},"end":{"line":173,"column":9}}})) != null ? stack1 : "");
-},"25":function(container,depth0,helpers,partials,data) {
+},"27":function(container,depth0,helpers,partials,data) {
     return "<p>There are no new rows that the earlier model could be held against.</p>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, helper, alias1=container.strict, alias2=depth0 != null ? depth0 : (container.nullContext || {}), alias3="function", alias4=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -402,27 +415,29 @@ export const COMPARISON_HTML: unknown = {"0":function(container,depth0,helpers,p
     + "</div>\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"attention"),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":31,"column":0},"end":{"line":40,"column":7}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"accepted"),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":41,"column":0},"end":{"line":50,"column":7}}})) != null ? stack1 : "")
-    + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"The two records\">\n<table>\n<caption>The two records</caption>\n<thead><tr><th scope=\"col\"></th><th scope=\"col\">study</th><th scope=\"col\">data</th><th scope=\"col\" class=\"n\">rows used</th><th scope=\"col\">dates</th><th scope=\"col\">chosen</th></tr></thead>\n<tbody>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"sides"),{"name":"each","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":56,"column":0},"end":{"line":58,"column":9}}})) != null ? stack1 : "")
+    + "<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-label=\"The two records\">\n<table>\n<caption>The two records</caption>\n<thead><tr><th scope=\"col\"></th><th scope=\"col\">study</th><th scope=\"col\">data</th><th scope=\"col\" class=\"n\">rows used</th>"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"dated"),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":54,"column":123},"end":{"line":54,"column":169}}})) != null ? stack1 : "")
+    + "<th scope=\"col\">chosen</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"sides"),{"name":"each","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":56,"column":0},"end":{"line":58,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n<nav aria-label=\"Sections\">\n<ol>\n<li><a href=\"#rows\">Which rows changed?</a></li>\n<li><a href=\"#contract\">Did the data keep its contract?</a></li>\n<li><a href=\"#study\">Did the study change?</a></li>\n<li><a href=\"#choice\">Is the choice the same?</a></li>\n<li><a href=\"#coefficients\">What moved each coefficient?</a></li>\n<li><a href=\"#new-rows\">Do the new rows fit?</a></li>\n</ol>\n</nav>\n</section>\n<main>\n<section id=\"rows\" aria-labelledby=\"rows-heading\">\n<h2 id=\"rows-heading\"><span class=\"no\">1</span> Which rows changed?</h2>\n<p>"
     + alias4((lookupProperty(helpers,"join")||alias1(depth0, "join", {"start":{"line":76,"column":5},"end":{"line":76,"column":9}} )).call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"sentences")," ",{"name":"join","hash":{},"data":data,"loc":{"start":{"line":76,"column":3},"end":{"line":76,"column":30}}}))
     + "</p>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"cannotTell"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":77,"column":0},"end":{"line":79,"column":9}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"revised"),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":80,"column":0},"end":{"line":96,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"addedList"),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":0},"end":{"line":99,"column":7}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"removedList"),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":100,"column":0},"end":{"line":102,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"revised"),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":80,"column":0},"end":{"line":96,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"addedList"),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":97,"column":0},"end":{"line":99,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(lookupProperty(depth0,"rows"),"removedList"),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":100,"column":0},"end":{"line":102,"column":7}}})) != null ? stack1 : "")
     + "<p class=\"small\">Rows are those used: one that was read but is now left out counts as gone.</p>\n</section>\n<section id=\"contract\" aria-labelledby=\"contract-heading\">\n<h2 id=\"contract-heading\"><span class=\"no\">2</span> Did the data keep its contract?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"contract"),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.program(13, data, 0),"data":data,"loc":{"start":{"line":107,"column":0},"end":{"line":115,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"contract"),{"name":"if","hash":{},"fn":container.program(14, data, 0),"inverse":container.program(15, data, 0),"data":data,"loc":{"start":{"line":107,"column":0},"end":{"line":115,"column":7}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"study\" aria-labelledby=\"study-heading\">\n<h2 id=\"study-heading\"><span class=\"no\">3</span> Did the study change?</h2>\n<p>"
     + alias4((((helper = lookupProperty(helpers,"study") || alias1(depth0, "study", {"start":{"line":119,"column":5},"end":{"line":119,"column":10}} ))),(typeof helper === alias3 ? helper.call(alias2,{"name":"study","hash":{},"data":data,"loc":{"start":{"line":119,"column":3},"end":{"line":119,"column":12}}}) : helper)))
     + "</p>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"declaration"),{"name":"if","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":120,"column":0},"end":{"line":126,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"declaration"),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":120,"column":0},"end":{"line":126,"column":7}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"choice\" aria-labelledby=\"choice-heading\">\n<h2 id=\"choice-heading\"><span class=\"no\">4</span> Is the choice the same?</h2>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias2,lookupProperty(depth0,"choice"),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":130,"column":0},"end":{"line":132,"column":9}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"coefficients\" aria-labelledby=\"coefficients-heading\">\n<h2 id=\"coefficients-heading\"><span class=\"no\">5</span> What moved each coefficient?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"models"),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.program(23, data, 0),"data":data,"loc":{"start":{"line":136,"column":0},"end":{"line":166,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"models"),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.program(25, data, 0),"data":data,"loc":{"start":{"line":136,"column":0},"end":{"line":166,"column":7}}})) != null ? stack1 : "")
     + "</section>\n<section id=\"new-rows\" aria-labelledby=\"new-rows-heading\">\n<h2 id=\"new-rows-heading\"><span class=\"no\">6</span> Do the new rows fit?</h2>\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"newRows"),{"name":"if","hash":{},"fn":container.program(24, data, 0),"inverse":container.program(25, data, 0),"data":data,"loc":{"start":{"line":170,"column":0},"end":{"line":176,"column":7}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias2,lookupProperty(depth0,"newRows"),{"name":"if","hash":{},"fn":container.program(26, data, 0),"inverse":container.program(27, data, 0),"data":data,"loc":{"start":{"line":170,"column":0},"end":{"line":176,"column":7}}})) != null ? stack1 : "")
     + "</section>\n</main>\n<footer>\n"
     + ((stack1 = container.invokePartial(lookupProperty(partials,"mark"),depth0,{"name":"mark","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
     + "<p>"

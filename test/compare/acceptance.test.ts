@@ -159,7 +159,7 @@ describe('on the command line', () => {
     expect(plain(against.out)).not.toContain('need an earlier record');
     expect(plain(against.out)).toContain('2 criteria are held against the earlier record below');
     expect(plain(against.out)).toMatch(
-      /accepted · Largest change of a coefficient is [\d.]+ standard errors; the study asks for at most 0.0001 standard errors\./,
+      /accepted · missed: Largest change of a coefficient is [\d.]+ standard errors; the study asks for at most 0.0001 standard errors\./,
     );
     const junit = await readFile(at('ci.xml'), 'utf8');
     expect(junit).toContain('failures="1" errors="0" skipped="0"');

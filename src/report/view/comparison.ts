@@ -8,7 +8,7 @@ import type {
 } from '../comparison-view.ts';
 import { count, fixed, longDate, NONE, rounded, roundingFor, value, withUnit } from '../numbers.ts';
 import type { StudyRecord } from '../record-type.ts';
-import { comparedCriterionSentence } from '../words/acceptance.ts';
+import { comparedCriterionSentence, verdictWord } from '../words/acceptance.ts';
 import {
   attentionLines,
   choiceSentences,
@@ -45,9 +45,10 @@ export function comparisonView(comparison: Comparison, record: StudyRecord): Com
     ],
     attention: attentionLines(lexicon, comparison, selection),
     accepted: comparison.acceptance.map((criterion) => ({
-      word: criterion.passed === null ? 'not judged' : criterion.passed ? 'met' : 'missed',
+      word: verdictWord(criterion.passed),
       sentence: comparedCriterionSentence(criterion),
     })),
+    dated: comparison.earlier.first !== null || comparison.later.first !== null,
     sides: [sideView('before', comparison.earlier), sideView('now', comparison.later)],
     rows: rowsView(lexicon, comparison),
     contract: comparison.contract.map((change) =>

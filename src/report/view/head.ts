@@ -8,6 +8,7 @@ import {
   againstEarlierSentence,
   criterionLabel,
   needsEarlierSentence,
+  verdictWord,
 } from '../words/acceptance.ts';
 import { answerSentences, fitSentence } from '../words/answer.ts';
 import { bewareLines } from '../words/beware.ts';
@@ -41,7 +42,7 @@ export function headView(
         value: acceptanceValue(c, fittedUnit(lexicon.response)),
         limit: c.limit,
         passed: c.passed,
-        word: c.passed ? 'met' : 'missed',
+        word: verdictWord(c.passed),
       })),
       ...(verdicts?.map(verdictView) ??
         (record.acceptance_against_earlier ?? []).map((c) => ({
@@ -49,7 +50,7 @@ export function headView(
           value: 'needs an earlier record',
           limit: c.limit,
           passed: null,
-          word: 'not judged',
+          word: verdictWord(null),
         }))),
     ],
     line: studyLine(record),
@@ -58,8 +59,11 @@ export function headView(
 
 function accepted(record: StudyRecord, verdicts: readonly ComparedCriterion[] | null): string | null {
   const own = acceptanceSentence(record.acceptance);
-  if (verdicts === null) return own ?? needsEarlierSentence(record.acceptance_against_earlier);
-  return [own, againstEarlierSentence(verdicts)].filter((text) => text !== null).join(' ') || null;
+  const against =
+    verdicts === null
+      ? needsEarlierSentence(record.acceptance_against_earlier)
+      : againstEarlierSentence(verdicts);
+  return [own, against].filter((text) => text !== null).join(' ') || null;
 }
 
 function verdictView(c: ComparedCriterion): CriterionView {
@@ -69,7 +73,7 @@ function verdictView(c: ComparedCriterion): CriterionView {
     value: passed === null ? 'no row is new' : c.value === null ? 'cannot be told' : acceptanceValue(c, null),
     limit: c.limit,
     passed,
-    word: passed === null ? 'not judged' : passed ? 'met' : 'missed',
+    word: verdictWord(passed),
   };
 }
 

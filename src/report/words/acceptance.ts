@@ -124,6 +124,10 @@ export function comparedCriterionSentence(criterion: ComparedCriterion): string 
   const asked = `the study asks for ${criterion.limit}`;
   if (criterion.passed === null) return `${label} is not judged, since no row is new; ${asked}.`;
   if (criterion.value === null) return `${label} cannot be told, which misses its limit; ${asked}.`;
-  const is = `${label} is ${acceptanceValue(criterion, null)}`;
-  return `${is}; ${asked}${criterion.passed ? ', which is met' : ''}.`;
+  return `${label} is ${acceptanceValue(criterion, null)}; ${asked}.`;
+}
+
+/** What came of a criterion in a word; null: it could not be judged. */
+export function verdictWord(passed: boolean | null): string {
+  return passed === null ? 'not judged' : passed ? 'met' : 'missed';
 }
