@@ -37,8 +37,15 @@ export function lookUp(reading: Reading, names: Names, name: string, path: Path)
   const named = names.get(name);
   if (named !== undefined) return named;
   const message = `${showPath(path)} names ${quote(name)}, which is neither a variable nor derived.`;
-  fault(reading, 'name_unknown', path, message, didYouMean(name, names.keys()));
+  fault(reading, 'name_unknown', path, message, didYouMean(name, names.keys()) ?? oneName(name));
   return null;
+}
+
+/** For what looks worked out from names. */
+function oneName(text: string): string | undefined {
+  return /[-+*/^~()=]/.test(text)
+    ? 'One name stands here; what is worked out from variables is given a name under derive.'
+    : undefined;
 }
 
 export function didYouMean(word: string, among: Iterable<string>): string | undefined {

@@ -1,4 +1,5 @@
 import type { ErrorObject } from 'ajv';
+import { functionNamed } from '../expression/functions.ts';
 import { nearest } from '../expression/nearest.ts';
 import type { Problem, ProblemCode } from '../problem.ts';
 import { listed, type Path, quote, showPath } from './path.ts';
@@ -181,6 +182,10 @@ function nearForm(data: unknown, form: string): string | undefined {
   const words = [...names, ...plain];
   const keys =
     typeof data === 'string' ? [data] : typeof data === 'object' && data !== null ? Object.keys(data) : [];
+  // Before what it may be a slip of the pen for: log is two letters from something else.
+  const called = keys.find((key) => functionNamed(key) !== null && !words.includes(key));
+  if (called !== undefined && names.includes('spline'))
+    return `What is worked out, such as ${called}(…), is given a name under derive, and that is the term.`;
   for (const key of keys) {
     const near = nearest(key, words);
     if (near !== null) return `Did you mean ${near}?`;

@@ -331,7 +331,19 @@ const CASES: readonly Case[] = [
     code: 'value_not_allowed',
     says: ['data.file is "/data/a.csv", which is not relative to the study file.'],
   },
+  {
+    from: 'terms: [x]',
+    to: 'terms: [«{ log: x }»]',
+    code: 'value_not_allowed',
+    says: ['What is worked out, such as log(…), is given a name under derive, and that is the term.'],
+  },
   // Names
+  {
+    from: 'response: y',
+    to: 'response: «"y ~ x"»',
+    code: 'name_unknown',
+    says: ['One name stands here; what is worked out from variables is given a name under derive.'],
+  },
   {
     from: 'terms: [x]',
     to: 'terms: [x, «xx1»]',
