@@ -6,6 +6,7 @@ import type {
   NewRows,
 } from '../../src/report/comparison-type.ts';
 import type { OverviewEntry } from '../../src/report/overview.ts';
+import { comparisonView } from '../../src/report/view/comparison.ts';
 import {
   attentionLines,
   choiceSentences,
@@ -96,6 +97,21 @@ describe('rows', () => {
     );
     expect(unbroken(revisedSentence({ ...nothing, rows })!)).toBe('Revised: fuel in 2 rows.');
     expect(revisedSentence(nothing)).toBeNull();
+    const cells = (count: number) =>
+      Array.from({ length: count }, (_, i) => ({ id: `R${i}`, variable: 'fuel', earlier: i, later: i + 1 }));
+    const view = (listed: number, count: number) =>
+      comparisonView(
+        { ...nothing, rows: { ...rows, revisions: cells(listed), revision_count: count } },
+        record,
+      ).rows;
+    expect([view(2, 2).revisions.length, view(2, 2).revisionsMore]).toEqual([2, null]);
+    expect(view(13, 13).revisions).toHaveLength(12);
+    expect(unbroken(view(13, 13).revisionsMore!)).toBe(
+      '1 more cell was revised; comparison.json lists all of them.',
+    );
+    expect(unbroken(view(50, 70).revisionsMore!)).toBe(
+      '58 more cells were revised; comparison.json lists the first 50.',
+    );
   });
 });
 

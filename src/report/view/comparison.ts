@@ -75,6 +75,9 @@ function sideView(when: string, side: Comparison['earlier']): SideView {
   };
 }
 
+/** Revised cells shown: enough to see what they are like, and what follows is not pushed away. */
+const SHOWN_CELLS = 12;
+
 function rowsView(lexicon: Lexicon, comparison: Comparison): ComparisonView['rows'] {
   const { rows } = comparison;
   const sentences = rowsSentences(comparison);
@@ -90,17 +93,23 @@ function rowsView(lexicon: Lexicon, comparison: Comparison): ComparisonView['row
   }
   const shown = (cell: number | string | null, unit: string | null) =>
     cell === null ? 'missing' : typeof cell === 'number' ? withUnit(value(cell, 10), unit) : cell;
-  const more = rows.revision_count - rows.revisions.length;
+  const revisions = rows.revisions.slice(0, SHOWN_CELLS);
+  const more = rows.revision_count - revisions.length;
+  const listedAll = rows.revisions.length === rows.revision_count;
+  const where = listedAll ? 'all of them' : `the first ${count(rows.revisions.length)}`;
   return {
     sentences,
     revised: revisedSentence(comparison),
-    revisions: rows.revisions.map(({ id, variable, earlier, later }) => ({
+    revisions: revisions.map(({ id, variable, earlier, later }) => ({
       row: id,
       variable,
       earlier: shown(earlier, earlierUnitOf(lexicon, variable, comparison.contract)),
       later: shown(later, unitOf(lexicon, variable)),
     })),
-    revisionsMore: more > 0 ? `${counted(more, 'more cell is', 'more cells are', count)} not listed.` : null,
+    revisionsMore:
+      more > 0
+        ? `${counted(more, 'more cell was', 'more cells were', count)} revised; comparison.json lists ${where}.`
+        : null,
     addedList: listOf('New', rows.added_rows, rows.added),
     removedList: listOf('Gone', rows.removed_rows, rows.removed),
   };
