@@ -98,7 +98,13 @@ describe('rows', () => {
     expect(unbroken(revisedSentence({ ...nothing, rows })!)).toBe('Revised: fuel in 2 rows.');
     expect(revisedSentence(nothing)).toBeNull();
     const cells = (count: number) =>
-      Array.from({ length: count }, (_, i) => ({ id: `R${i}`, variable: 'fuel', earlier: i, later: i + 1 }));
+      Array.from({ length: count }, (_, i) => ({
+        id: `R${i}`,
+        row: i,
+        variable: 'fuel',
+        earlier: i,
+        later: i + 1,
+      }));
     const view = (listed: number, count: number) =>
       comparisonView(
         { ...nothing, rows: { ...rows, revisions: cells(listed), revision_count: count } },
