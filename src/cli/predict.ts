@@ -1,3 +1,4 @@
+import { setImmediate } from 'node:timers/promises';
 import { predictColumnsFromRecord, type RecordPredictionColumns } from '../predict-record.ts';
 import { hasError, type Problem } from '../problem.ts';
 import { predictedRowsJson, predictedRowsTable, totalsTable } from '../record/predicted-rows.ts';
@@ -65,8 +66,13 @@ export async function predictCommand(
         : wantsTotal
           ? [totalsTable(totalsAsked(predicted, options), options.totalBy ?? null)]
           : predictedRowsTable(predicted.rows);
-    if (options.out === undefined) for (const piece of text) terminal.out(piece);
-    else await writeText(options.out, text, (problem) => problems.push(problem));
+    if (options.out === undefined) {
+      for (const piece of text) {
+        terminal.out(piece);
+        // That a reader has had enough is only told between two turns of the loop of events.
+        await setImmediate();
+      }
+    } else await writeText(options.out, text, (problem) => problems.push(problem));
   }
   await showProblems(problems, await sourceTexts(problems), options.problems, terminal);
   return hasError(problems) ? UNUSABLE : DONE;
