@@ -30,13 +30,14 @@ describe('a draft', () => {
           .join('\n')}\n`,
       },
       async (folder) => {
-        const { text } = await draftStudy(join(folder, 'd.csv'), { response: 'b' });
+        const out = join(folder, 'd.study.yaml');
+        const { text } = await draftStudy(join(folder, 'd.csv'), { response: 'b', out });
         expect(text).toContain('# row_id: TODO The dates in day tell every row apart.');
         const study = text!
           .replace(/^ {2}# row_id: .*$/m, '  row_id: id')
           .replace('  variables:\n', '  variables:\n    id: { column: day, type: identifier }\n');
-        await writeFile(join(folder, 'd.study.yaml'), study);
-        expect(errorsOf((await checkStudy(join(folder, 'd.study.yaml'))).problems)).toEqual([]);
+        await writeFile(out, study);
+        expect(errorsOf((await checkStudy(out)).problems)).toEqual([]);
       },
     ));
 
