@@ -227,8 +227,14 @@ export function weightsOf(chosen: Chosen, rows: PredictionRows): (row: number) =
 }
 
 function weightsAt(weights: string | null, rows: PredictionRows): (row: number) => number {
-  const column = weights === null ? undefined : rows.columns.get(weights);
-  return (row) => (column?.kind === 'number' && column.values[row]! > 0 ? column.values[row]! : 1);
+  const given = weightsGiven(weights, rows);
+  return (row) => given(row) ?? 1;
+}
+
+/** The weight that a row gives; null where it gives none above 0. */
+function weightsGiven(weights: string | null, { columns }: PredictionRows): (row: number) => number | null {
+  const column = weights === null ? undefined : columns.get(weights);
+  return (row) => (column?.kind === 'number' && column.values[row]! > 0 ? column.values[row]! : null);
 }
 
 /**
@@ -241,12 +247,11 @@ export function reportWithoutWeight(
   report: Report,
 ): void {
   if (weights === null || s === null) return;
-  const column = rows.columns.get(weights);
+  const given = weightsGiven(weights, rows);
   let first = -1;
   let count = 0;
   for (let row = 0; row < rows.rowCount; row++) {
-    if (column?.kind === 'number' && column.values[row]! > 0) continue;
-    if (count++ === 0) first = row;
+    if (given(row) === null && count++ === 0) first = row;
   }
   if (count === 0) return;
   const lacks = `no ${weights} above 0, by which the rows fitted are weighted`;

@@ -7,6 +7,7 @@ import type { Chosen } from '../examine/chosen.ts';
 import { isoDays } from '../expression/iso-date.ts';
 import { nearest } from '../expression/nearest.ts';
 import { baseVariables, evaluateDerived } from '../prepare/derive.ts';
+import { gatherColumn } from '../prepare/gather.ts';
 import { isMissing } from '../prepare/is-missing.ts';
 import type { Report } from '../problem.ts';
 import type { VariablePlan } from '../study/study.ts';
@@ -177,7 +178,9 @@ export function usableRows(
       rowCount: count,
       labelOf: (row) => labelOf(kept[row]!),
       given: rows.given.length === 0 ? [] : Array.from(kept, (row) => rows.given[row]!),
-      columns: whole ? columns : new Map([...columns].map(([name, column]) => [name, pick(column, kept)])),
+      columns: whole
+        ? columns
+        : new Map([...columns].map(([name, column]) => [name, gatherColumn(column, kept)])),
       placeOf: (row) => placeOf(kept[row]!),
       severity,
     },
@@ -204,13 +207,6 @@ function derivationsAtHand(needs: RowNeeds, rows: PredictionRows): RowNeeds['der
   return needs.derive.filter((plan) =>
     [...baseVariables(plan.name, needs.derive)].every((name) => rows.columns.has(name)),
   );
-}
-
-function pick(column: Column, rows: Int32Array): Column {
-  if (column.kind === 'category') return { ...column, codes: rows.map((row) => column.codes[row]!) };
-  if (column.kind === 'text')
-    return { ...column, values: Array.from(rows, (row) => column.values[row] ?? null) };
-  return { ...column, values: Float64Array.from(rows, (row) => column.values[row]!) };
 }
 
 /** A column of stated values, typed as the variable is. What is absent or cannot be read is missing. */

@@ -1,4 +1,5 @@
-import { PREDICTED_FIGURES, type PredictedColumns } from '../predict/predicted-columns.ts';
+import { orNull, PREDICTED_FIGURES, type PredictedColumns } from '../predict/predicted-columns.ts';
+import { figureTexts } from './figure-texts.ts';
 import { cell } from './tables.ts';
 
 /** The rows of a file, each with its prediction or with the reason why it has none. */
@@ -29,11 +30,16 @@ export interface TotalRow {
  */
 export function* predictedRowsTable(rows: PredictedRowColumns): Generator<string> {
   const { labelOf, at, because, predicted } = rows;
+  const columns = PREDICTED_FIGURES.map((figure) => predicted.figures[figure]);
   const empty = ','.repeat(PREDICTED_FIGURES.length - 1);
   yield `label,${PREDICTED_FIGURES.join(',')},outside,not_predicted\n`;
   for (let from = 0; from < at.length; from += BLOCK) {
     const to = Math.min(from + BLOCK, at.length);
-    const figures = figureTexts(rows, from, to);
+    // What a row without a prediction gets here is not used.
+    const figures = figureTexts(
+      columns,
+      Array.from(at.subarray(from, to), (k) => Math.max(0, k)),
+    );
     const lines: string[] = [];
     for (let row = from; row < to; row++) {
       const label = cell(labelOf(row));
@@ -75,26 +81,9 @@ export function* predictedRowsJson(
 /** Rows whose texts are handed on at once. */
 const BLOCK = 256;
 
-/**
- * The figures of rows from…to−1 as cells side by side; what a row without a prediction has is not to be used. The language
- * writes the numbers of a whole block as JSON several times faster than one by one, and with the same digits.
- */
-function figureTexts({ at, predicted }: PredictedRowColumns, from: number, to: number): string[] {
-  const columns = PREDICTED_FIGURES.map((figure) => predicted.figures[figure]);
-  const numbers: number[][] = [];
-  for (let row = from; row < to; row++) {
-    const k = Math.max(0, at[row]!);
-    numbers.push(columns.map((column) => column[k]!));
-  }
-  const text = JSON.stringify(numbers);
-  // Only numbers and null stand in it.
-  return (text.includes('null') ? text.replaceAll('null', '') : text).slice(2, -2).split('],[');
-}
-
 function figuresAt({ figures }: PredictedColumns, k: number): Record<string, number | null> {
   const own: Record<string, number | null> = {};
-  for (const figure of PREDICTED_FIGURES)
-    own[figure] = Number.isNaN(figures[figure][k]!) ? null : figures[figure][k]!;
+  for (const figure of PREDICTED_FIGURES) own[figure] = orNull(figures[figure][k]!);
   return own;
 }
 

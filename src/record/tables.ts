@@ -1,4 +1,5 @@
 import papaparse from 'papaparse';
+import { figureTexts } from './figure-texts.ts';
 import type { StudyRecord } from './record.ts';
 
 /**
@@ -145,7 +146,10 @@ export function* residualsTable(columns: ResidualColumns): Generator<string> {
   );
   for (let start = 0; start < columns.row.length; start += BLOCK) {
     const end = Math.min(start + BLOCK, columns.row.length);
-    const texts = figureTexts(figures, start, end);
+    const texts = figureTexts(
+      figures,
+      Array.from({ length: end - start }, (_, i) => start + i),
+    );
     let text = '';
     for (let i = start; i < end; i++) {
       const id = columns.id === null ? '' : `${cell(columns.id[i] ?? '')},`;
@@ -153,33 +157,6 @@ export function* residualsTable(columns: ResidualColumns): Generator<string> {
     }
     yield text;
   }
-}
-
-/**
- * The figures of rows `start` to before `end`, one text per row. A list of numbers is written by
- * `JSON.stringify` in the same digits as one by one, in little more than half the time; a NaN, which it
- * writes as null, ends each row. Rows with a figure that is not finite itself go one by one.
- */
-function figureTexts(figures: readonly Float64Array[], start: number, end: number): string[] {
-  const numbers = new Array<number>((end - start) * (figures.length + 1)).fill(0.5);
-  let at = 0;
-  let finite = true;
-  for (let i = start; i < end; i++) {
-    for (const figure of figures) {
-      const value = figure[i] as number;
-      finite &&= Number.isFinite(value);
-      numbers[at++] = value;
-    }
-    numbers[at++] = Number.NaN;
-  }
-  if (finite) return JSON.stringify(numbers).slice(1, -',null]'.length).split(',null,');
-  return Array.from({ length: end - start }, (_, row) =>
-    figures.map((figure) => finiteText(figure[start + row] as number)).join(','),
-  );
-}
-
-function finiteText(value: number): string {
-  return Number.isFinite(value) ? String(value) : '';
 }
 
 /** What a spreadsheet may take for a formula (OWASP, "CSV injection"). */

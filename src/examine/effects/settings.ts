@@ -102,39 +102,7 @@ function reachOf(chosen: Chosen, covariance: Covariance | null): number {
 /** √(c′(X′WX)⁻¹c) = ‖c′R⁻¹‖. */
 export function rootForm(rootInverse: Float64Array, p: number, c: Float64Array): number {
   let sum = 0;
-  let j = 0;
-  // Four columns at a time, so that one need not wait for another; each is added up in its own order all the same.
-  for (; j + 3 < p; j += 4) {
-    const at0 = j * p;
-    const at1 = at0 + p;
-    const at2 = at1 + p;
-    const at3 = at2 + p;
-    let y0 = 0;
-    let y1 = 0;
-    let y2 = 0;
-    let y3 = 0;
-    for (let k = 0; k <= j; k++) {
-      const x = c[k]!;
-      y0 += rootInverse[at0 + k]! * x;
-      y1 += rootInverse[at1 + k]! * x;
-      y2 += rootInverse[at2 + k]! * x;
-      y3 += rootInverse[at3 + k]! * x;
-    }
-    const x1 = c[j + 1]!;
-    const x2 = c[j + 2]!;
-    const x3 = c[j + 3]!;
-    y1 += rootInverse[at1 + j + 1]! * x1;
-    y2 += rootInverse[at2 + j + 1]! * x1;
-    y2 += rootInverse[at2 + j + 2]! * x2;
-    y3 += rootInverse[at3 + j + 1]! * x1;
-    y3 += rootInverse[at3 + j + 2]! * x2;
-    y3 += rootInverse[at3 + j + 3]! * x3;
-    sum += y0 * y0;
-    sum += y1 * y1;
-    sum += y2 * y2;
-    sum += y3 * y3;
-  }
-  for (; j < p; j++) {
+  for (let j = 0; j < p; j++) {
     let projected = 0;
     for (let k = 0; k <= j; k++) projected += rootInverse[j * p + k]! * c[k]!;
     sum += projected * projected;
