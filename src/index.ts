@@ -31,8 +31,9 @@ export type {
   StudyRecord,
 } from './record/record.ts';
 export type { ResidualColumns } from './record/tables.ts';
-export { type Rendered, type RenderOptions, type ReportFormat, render } from './report/render.ts';
+export { type Rendered, type RenderOptions, render } from './report/render.ts';
 export { renderComparison } from './report/render-comparison.ts';
+export type { ReportFormat } from './report/template-names.ts';
 export { type CheckedStudy, checkStudy } from './run/check-study.ts';
 export type { RunOptions } from './run/read-study-and-data.ts';
 export { type RunResult, runStudy } from './run/run-study.ts';

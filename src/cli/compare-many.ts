@@ -3,10 +3,10 @@ import { compareRecords } from '../compare/compare.ts';
 import { readCompared } from '../compare/read-compared.ts';
 import { hasError, type Problem } from '../problem.ts';
 import { writeResults } from '../record/write-results.ts';
-import { type CompareCommandOptions, filesOf, statusOfComparison, templatePlaces } from './compared-files.ts';
+import { type CompareCommandOptions, filesOf, statusOfComparison } from './compared-files.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
 import { finishMany } from './finish-many.ts';
-import { givenTemplate } from './given-template.ts';
+import { givenTemplate, givenTemplatePlace } from './given-template.ts';
 import { type ManyRecords, readEarlier, recordName } from './many-records.ts';
 import { type ManyRun, manyRun } from './many-run.ts';
 import { progressOn } from './progress.ts';
@@ -90,7 +90,7 @@ async function comparedRun(
   }
   const comparison = compareRecords(before, now, report);
   if (comparison === null) return manyRun(named, stopped);
-  for (const [name, path] of templatePlaces(record, options)) templates.set(name, path);
+  for (const [name, path] of givenTemplatePlace(record, 'comparison', options)) templates.set(name, path);
   const files = await filesOf(comparison, record, options, report);
   if (hasError(problems)) return manyRun(named, stopped);
   const { out } = options;

@@ -4,9 +4,10 @@ import { readCompared } from '../compare/read-compared.ts';
 import { hasError, type Problem } from '../problem.ts';
 import { replacedRecord } from '../record/replaced-record.ts';
 import { type ResultFile, writeResults } from '../record/write-results.ts';
-import { type CompareCommandOptions, filesOf, statusOfComparison, templatePlaces } from './compared-files.ts';
+import { type CompareCommandOptions, filesOf, statusOfComparison } from './compared-files.ts';
 import { comparisonSummary } from './comparison-summary.ts';
 import { UNUSABLE } from './exit-status.ts';
+import { givenTemplatePlace } from './given-template.ts';
 import { DEEPEST, findRecords, hasRecord, type ManyRecords } from './many-records.ts';
 import { showProblems } from './show-problems.ts';
 import { placedAt, sourceTexts } from './source-texts.ts';
@@ -42,7 +43,7 @@ export async function compareCommand(
     if (await writeResults(out, files, report, [], obstacle))
       places = files.map(({ name }) => join(out, name));
   }
-  const placed = placedAt(problems, templatePlaces(later?.record ?? null, options));
+  const placed = placedAt(problems, givenTemplatePlace(later?.record ?? null, 'comparison', options));
   await showProblems(placed, await sourceTexts(placed), options.problems, terminal);
   if (comparison === null || hasError(problems)) return UNUSABLE;
   const status = statusOfComparison(comparison);

@@ -2,11 +2,11 @@ import type { Comparison } from '../compare/comparison.ts';
 import { hasError, type Problem, type Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
 import type { ResultFile } from '../record/write-results.ts';
+import { templateNames } from '../report/template-names.ts';
 import type { CommonOptions } from './common-options.ts';
 import { COMPARISON_FORMATS, type ComparisonFormat, comparisonFiles } from './comparison-files.ts';
 import { DONE, NOT_ACCEPTED } from './exit-status.ts';
 import { givenTemplate } from './given-template.ts';
-import { templateNames } from './report-files.ts';
 
 export interface CompareCommandOptions extends CommonOptions {
   readonly out?: string;
@@ -36,15 +36,4 @@ export async function filesOf(
   );
   found.forEach(report);
   return hasError(found) ? [] : comparisonFiles(comparison, record, formats, templates, report);
-}
-
-/** Where the user's template lies, by the name under which its problems know it. */
-export function templatePlaces(
-  record: StudyRecord | null,
-  { format, template }: CompareCommandOptions,
-): Map<string, string> {
-  if (record === null || template === undefined || format === undefined || format === 'json')
-    return new Map();
-  const name = templateNames(record, 'comparison')[format] ?? `template of the comparison for ${format}`;
-  return new Map([[name, template]]);
 }

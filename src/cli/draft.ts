@@ -1,8 +1,8 @@
-import { access } from 'node:fs/promises';
 import { draftStudy } from '../draft/draft-study.ts';
 import { hasError, type Problem } from '../problem.ts';
 import type { CommonOptions } from './common-options.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
+import { isThere } from './is-there.ts';
 import { showProblems } from './show-problems.ts';
 import { sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
@@ -21,7 +21,7 @@ export async function draftCommand(
 ): Promise<number> {
   const { out, response } = options;
   const problems: Problem[] = [];
-  if (out !== undefined && (await exists(out))) {
+  if (out !== undefined && (await isThere(out))) {
     problems.push({
       code: 'output_unwritable',
       severity: 'error',
@@ -38,13 +38,4 @@ export async function draftCommand(
   }
   await showProblems(problems, await sourceTexts(problems), options.problems, terminal);
   return hasError(problems) ? UNUSABLE : DONE;
-}
-
-async function exists(path: string): Promise<boolean> {
-  try {
-    await access(path);
-    return true;
-  } catch {
-    return false;
-  }
 }

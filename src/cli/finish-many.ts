@@ -1,4 +1,4 @@
-import { join, relative, resolve } from 'node:path';
+import { join, resolve } from 'node:path';
 import { hasError, type Problem } from '../problem.ts';
 import { writeResults } from '../record/write-results.ts';
 import { goneSuite, junitText } from '../report/junit.ts';
@@ -10,6 +10,7 @@ import type { ManyRun } from './many-run.ts';
 import { OVERVIEW_FILES, overviewFiles } from './overview-files.ts';
 import { overviewSummary } from './overview-summary.ts';
 import { showProblems } from './show-problems.ts';
+import { shownFolder } from './shown-folder.ts';
 import { sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
 import { writeText } from './write-text.ts';
@@ -57,9 +58,7 @@ export async function finishMany(
     for (const { fault } of runs) if (fault !== null) terminal.err(`${fault}\n`);
   }
   if (options.quiet !== true && options.problems === 'text' && runs.length > 0) {
-    const near = out === null ? '' : relative('.', out);
-    const shown = near.startsWith('..') ? resolve(out ?? '') : near;
-    const places = written ? OVERVIEW_FILES.map((name) => join(shown, name)) : [];
+    const places = out !== null && written ? OVERVIEW_FILES.map((name) => join(shownFolder(out), name)) : [];
     terminal.out(overviewSummary(overview, places, terminal));
   }
   return Math.max(hasError([...before, ...late]) ? UNUSABLE : 0, ...runs.map(({ status }) => status));

@@ -6,10 +6,11 @@ import type { StudyRecord } from '../record/record.ts';
 import { recordPieces } from '../record/record-text.ts';
 import { candidatesTable, coefficientsTable, predictionsTable, residualsTable } from '../record/tables.ts';
 import { RESULT_FILES, type ResultFile, writeResults } from '../record/write-results.ts';
+import { templateNames } from '../report/template-names.ts';
 import type { ReadStudy, RunOptions } from '../run/read-study-and-data.ts';
 import { type RunResult, runRead } from '../run/run-study.ts';
 import { DONE, NOT_ACCEPTED, UNUSABLE } from './exit-status.ts';
-import { reportFiles, templateNames, templatesIn } from './report-files.ts';
+import { reportFiles, templatesIn } from './report-files.ts';
 
 /** What came of one study. */
 export interface FittedStudy {

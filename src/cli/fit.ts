@@ -1,4 +1,4 @@
-import { join, relative, resolve } from 'node:path';
+import { join } from 'node:path';
 import type { ComparedSide } from '../compare/compare.ts';
 import { hasError, type Problem, type Report } from '../problem.ts';
 import { junitSuite, junitText } from '../report/junit.ts';
@@ -10,6 +10,7 @@ import { givenParameters } from './given-parameters.ts';
 import { isFolderOfStudies } from './is-folder.ts';
 import { progressOn } from './progress.ts';
 import { showDataNotRead, showProblems } from './show-problems.ts';
+import { shownFolder } from './shown-folder.ts';
 import { sourceTexts } from './source-texts.ts';
 import { summary } from './summary.ts';
 import type { Terminal } from './terminal.ts';
@@ -107,10 +108,9 @@ async function readEarlier(
 
 /** The reports first, for a reader; then the record and the tables' folder. Relative where that is shorter. */
 function places(out: string, names: readonly string[]): string[] {
-  const near = relative('.', out);
-  const shown = near.startsWith('..') ? resolve(out) : near;
+  const folder = shownFolder(out);
   const reports = names
     .filter((name) => /^(?:report|comparison)\./.test(name) && !name.endsWith('.json'))
     .sort();
-  return [...reports, 'record.json', 'tables'].map((name) => join(shown, name));
+  return [...reports, 'record.json', 'tables'].map((name) => join(folder, name));
 }

@@ -1,5 +1,11 @@
 import type { Report } from '../problem.ts';
-import type { ReportFormat } from '../report/render.ts';
+import type { StudyRecord } from '../record/record.ts';
+import {
+  type ReportFormat,
+  type TemplateNames,
+  type TemplateOf,
+  templateName,
+} from '../report/template-names.ts';
 import type { TemplatePaths } from './report-files.ts';
 
 /**
@@ -7,7 +13,7 @@ import type { TemplatePaths } from './report-files.ts';
  * said: a record does not know where its study lies.
  */
 export function givenTemplate(
-  named: { readonly [format in ReportFormat]: string | null },
+  named: TemplateNames,
   formats: readonly ReportFormat[],
   template: string | undefined,
   report: Report,
@@ -36,4 +42,15 @@ export function givenTemplate(
     });
   }
   return {};
+}
+
+/** Where such a template lies, by the name under which its problems know it. */
+export function givenTemplatePlace(
+  record: StudyRecord | null,
+  of: TemplateOf,
+  { format, template }: { readonly format?: ReportFormat | 'json'; readonly template?: string },
+): Map<string, string> {
+  if (record === null || template === undefined || format === undefined || format === 'json')
+    return new Map();
+  return new Map([[templateName(record, of, format), template]]);
 }

@@ -1,4 +1,4 @@
-import { readdir, stat } from 'node:fs/promises';
+import { readdir } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { ComparedSide } from '../compare/compare.ts';
 import type { Report } from '../problem.ts';
@@ -6,6 +6,7 @@ import { finishMoves } from '../record/move-results.ts';
 import { readRecord } from '../record/read-record.ts';
 import type { StudyRecord } from '../record/record.ts';
 import type { GoneRun } from '../report/overview.ts';
+import { isThere } from './is-there.ts';
 
 /** The records of many runs, each in its own folder below that of all. */
 export interface ManyRecords {
@@ -117,13 +118,4 @@ export function recordName(folder: string, { data }: StudyRecord): string {
   if (level === undefined) return folder;
   const [study, ...below] = folder.split('/');
   return below.length === 0 ? level : `${study}, ${level}`;
-}
-
-async function isThere(path: string): Promise<boolean> {
-  try {
-    await stat(path);
-    return true;
-  } catch {
-    return false;
-  }
 }

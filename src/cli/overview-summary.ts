@@ -10,6 +10,8 @@ import { counted } from '../report/words/lexicon.ts';
 import {
   changeParagraphs,
   choiceText,
+  GONE,
+  goneChoice,
   insideText,
   movedText,
   moveText,
@@ -74,14 +76,7 @@ function changesTable({ runs, gone }: Overview): Paragraph {
         entry.change === null ? NONE : moveText(entry.change),
         entry.change === null ? NONE : insideText(entry.change),
       ]),
-      ...gone.map(({ name, chosen }) => [
-        name,
-        'no longer there',
-        `before: ${chosen ?? 'none'}`,
-        NONE,
-        NONE,
-        NONE,
-      ]),
+      ...gone.map((each) => [each.name, GONE, goneChoice(each), NONE, NONE, NONE]),
     ],
   };
 }

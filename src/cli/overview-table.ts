@@ -1,5 +1,6 @@
 import { quotedCell } from '../record/quoted-cell.ts';
 import { type GoneRun, type Overview, type OverviewEntry, sharedCoefficients } from '../report/overview.ts';
+import { GONE } from '../report/words/overview.ts';
 
 type Cell = string | number | null;
 
@@ -68,7 +69,7 @@ function againstWord({ change, hasEarlier }: OverviewEntry): string {
 
 function goneCell({ name, chosen }: GoneRun, column: string): Cell {
   if (column === 'run') return name;
-  if (column === 'outcome' || column === 'against_earlier') return 'no longer there';
+  if (column === 'outcome' || column === 'against_earlier') return GONE;
   return column === 'chosen_before' ? chosen : null;
 }
 

@@ -2,14 +2,13 @@ import { dirname, join } from 'node:path';
 import { readVerdicts } from '../compare/read-verdicts.ts';
 import { hasError, type Problem } from '../problem.ts';
 import { readRecord } from '../record/read-record.ts';
-import type { StudyRecord } from '../record/record.ts';
 import { replacedRecord } from '../record/replaced-record.ts';
 import { writeResults } from '../record/write-results.ts';
-import type { ReportFormat } from '../report/render.ts';
+import { type ReportFormat, templateNames } from '../report/template-names.ts';
 import type { CommonOptions } from './common-options.ts';
 import { DONE, UNUSABLE } from './exit-status.ts';
-import { givenTemplate } from './given-template.ts';
-import { reportFiles, templateNames } from './report-files.ts';
+import { givenTemplate, givenTemplatePlace } from './given-template.ts';
+import { reportFiles } from './report-files.ts';
 import { showProblems } from './show-problems.ts';
 import { placedAt, sourceTexts } from './source-texts.ts';
 import type { Terminal } from './terminal.ts';
@@ -45,18 +44,11 @@ export async function renderCommand(
     }
   }
 
-  const placed = placedAt(problems, templatePlace(record, options));
+  const placed = placedAt(problems, givenTemplatePlace(record, 'report', options));
   await showProblems(placed, await sourceTexts(placed), options.problems, terminal);
   if (hasError(problems)) return UNUSABLE;
   if (options.quiet !== true && options.problems === 'text') {
     for (const file of written) terminal.out(`${file}\n`);
   }
   return DONE;
-}
-
-/** Where the user's template lies, by the name under which its problems know it. */
-function templatePlace(record: StudyRecord | null, options: RenderCommandOptions): Map<string, string> {
-  const format = options.format ?? record?.study.report.formats[0];
-  if (record === null || format === undefined || options.template === undefined) return new Map();
-  return new Map([[record.study.report.templates[format] ?? `template for ${format}`, options.template]]);
 }

@@ -3,7 +3,8 @@ import { resolve } from 'node:path';
 import type { Report } from '../problem.ts';
 import type { StudyRecord } from '../record/record.ts';
 import type { ResultFile } from '../record/write-results.ts';
-import { type RenderOptions, type ReportFormat, render } from '../report/render.ts';
+import { type RenderOptions, render } from '../report/render.ts';
+import type { ReportFormat, TemplateNames } from '../report/template-names.ts';
 
 const NAMES: { readonly [format in ReportFormat]: string } = { html: 'report.html', markdown: 'report.md' };
 
@@ -47,14 +48,6 @@ export async function templateTexts(
   }
   return texts;
 }
-
-/** The templates that a study names, relative to it, for its reports or for what is different from an earlier record. */
-export function templateNames(record: StudyRecord, of: 'report' | 'comparison'): TemplateNames {
-  const { html, markdown, comparison } = record.study.report.templates;
-  return of === 'report' ? { html, markdown } : (comparison ?? { html: null, markdown: null });
-}
-
-type TemplateNames = { readonly [format in ReportFormat]: string | null };
 
 /** Where they lie, `folder` being that of the study. */
 export function templatesIn({ html, markdown }: TemplateNames, folder: string): TemplatePaths {

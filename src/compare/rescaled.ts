@@ -1,4 +1,5 @@
 import type { KeptRows } from '../record/read-sample.ts';
+import { quartilesOf } from '../stats/quartiles.ts';
 import { cellOf, type MatchedRows } from './match-rows.ts';
 
 /** Fewer revised values than this could lie on a line by chance. */
@@ -68,7 +69,5 @@ function lines(pairs: readonly (readonly [number, number])[]): (readonly [number
 }
 
 function median(values: readonly number[]): number {
-  const sorted = [...values].sort((a, b) => a - b);
-  const middle = sorted.length >> 1;
-  return sorted.length % 2 === 1 ? sorted[middle]! : (sorted[middle - 1]! + sorted[middle]!) / 2;
+  return quartilesOf(Float64Array.from(values)).median;
 }

@@ -3,6 +3,7 @@ import type { Comparison } from './comparison-type.ts';
 import { mapped } from './markdown.ts';
 import type { StudyRecord } from './record-type.ts';
 import { filled, type Rendered, type RenderOptions } from './render.ts';
+import { templateName } from './template-names.ts';
 import { COMPARISON_HTML, COMPARISON_MARKDOWN } from './templates.generated.ts';
 import { comparisonView } from './view/comparison.ts';
 
@@ -17,10 +18,9 @@ export function renderComparison(
   report: Report,
 ): Rendered {
   const view = comparisonView(comparison, record);
-  const names = record.study.report.templates.comparison;
   return filled(options.formats ?? ['html', 'markdown'], options.templateText ?? {}, report, {
     template: { html: COMPARISON_HTML, markdown: COMPARISON_MARKDOWN },
     view: { html: () => view, markdown: () => mapped(view) as object },
-    file: (format) => names?.[format] ?? `template of the comparison for ${format}`,
+    file: (format) => templateName(record, 'comparison', format),
   });
 }

@@ -3,7 +3,8 @@ import { mapped } from './markdown.ts';
 import type { Overview } from './overview.ts';
 import { OVERVIEW_HTML, OVERVIEW_MARKDOWN } from './overview-templates.generated.ts';
 import type { OverviewView } from './overview-view.ts';
-import { type ReportFormat, tidied } from './render.ts';
+import { tidied } from './render.ts';
+import type { ReportFormat } from './template-names.ts';
 import { overviewView } from './view/overview.ts';
 
 /** Runs beside one another, as a page or as Markdown. `tool` is the program's name and version. */

@@ -3,11 +3,10 @@ import type { ComparedCriterion } from './comparison-type.ts';
 import { fillOwnTemplate, fillTemplate, type TemplateSpecification } from './fill-template.ts';
 import { markdownView } from './markdown.ts';
 import type { StudyRecord } from './record-type.ts';
+import { type ReportFormat, templateName } from './template-names.ts';
 import { HTML, MARKDOWN } from './templates.generated.ts';
 import { buildView } from './view/build-view.ts';
 import type { ReportView } from './view.ts';
-
-export type ReportFormat = 'html' | 'markdown';
 
 export interface RenderOptions {
   /** Formats to render; those that the record's study asks for where left out. */
@@ -32,11 +31,10 @@ export interface Rendered {
  */
 export function render(record: StudyRecord, options: RenderOptions, report: Report): Rendered {
   const view = buildView(record, options.verdicts ?? null);
-  const { formats, templates } = record.study.report;
-  return filled(options.formats ?? formats, options.templateText ?? {}, report, {
+  return filled(options.formats ?? record.study.report.formats, options.templateText ?? {}, report, {
     template: { html: HTML, markdown: MARKDOWN },
     view: { html: () => view, markdown: (): ReportView => markdownView(view) },
-    file: (format) => templates[format] ?? `template for ${format}`,
+    file: (format) => templateName(record, 'report', format),
   });
 }
 

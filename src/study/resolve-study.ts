@@ -69,7 +69,7 @@ export function resolveStudy(given: Reading, origin: StudyOrigin): Study | null 
     unsure:
       errors > 0 ||
       file.candidates === undefined ||
-      candidates.length + families.length < (file.candidates?.length ?? 0),
+      candidates.length + families.length < file.candidates.length,
     derivedFrom,
   });
   const { holdOut } = selection;

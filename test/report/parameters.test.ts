@@ -1,7 +1,8 @@
 /** The parameters of a run stand where a reader learns how to get it again. */
 import { expect, test } from 'vitest';
 import type { StudyRecord } from '../../src/report/record-type.ts';
-import { type ReportFormat, render } from '../../src/report/render.ts';
+import { render } from '../../src/report/render.ts';
+import type { ReportFormat } from '../../src/report/template-names.ts';
 import { smallRecord } from '../record/small-record.ts';
 
 function rendered(record: StudyRecord, format: ReportFormat): string {

@@ -1,7 +1,7 @@
 import { significant } from '../numbers.ts';
 import type { RecordExamination } from '../record-type.ts';
 import { bottomAxis, placesAlong, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
-import { clipped, dots, drawing, element, type Figure, label } from './svg.ts';
+import { clipped, dots, drawing, element, type Figure, label, scatter } from './svg.ts';
 
 const HEIGHT = 190;
 /** The rows named, each at a height of its own. */
@@ -25,8 +25,7 @@ export function influenceChart(examination: RecordExamination): Figure | null {
   const distances = rows.map((r) => r.d);
   const x = roomy([0, spanOf([0, ...distances])[1]], [plot.left, plot.right], 0.03);
   const middle = (plot.top + plot.bottom) / 2;
-  // A fixed scatter across the strip keeps dots apart without a random number.
-  const heights = rows.map((_, i) => middle + (((i * 7) % 11) - 5) * 4);
+  const heights = rows.map((_, i) => middle + scatter(i) * 4);
   const top = [...rows.keys()]
     .sort((i, j) => rows[j]!.d - rows[i]!.d || rows[i]!.row - rows[j]!.row)
     .slice(0, NAMED);

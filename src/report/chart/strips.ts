@@ -1,5 +1,5 @@
 import { bottomAxis, placesAlong, plumbLine, roomy, spanOf, ticksOf, WIDTH } from './axes.ts';
-import { clipped, dots, drawing, element, label } from './svg.ts';
+import { clipped, dots, drawing, element, label, scatter } from './svg.ts';
 
 /** Levels beyond this are gathered under "other levels" in a drawing. */
 const LEVELS = 24;
@@ -32,10 +32,9 @@ export function strips(
         element('line', { class: 'grid', x1: plot.left, x2: plot.right, y1: middle(i), y2: middle(i) }),
     )
     .join('');
-  // A fixed scatter across the strip keeps dots apart without a random number.
   const heights = values.map((_, i) => {
     const row = places.get(texts[i] ?? '');
-    return row === undefined ? Number.NaN : middle(row) + (((i * 7) % 11) - 5);
+    return row === undefined ? Number.NaN : middle(row) + scatter(i);
   });
   return drawing(
     name,

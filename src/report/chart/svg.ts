@@ -81,6 +81,11 @@ export function drawing(
   return `<svg class="chart" viewBox="0 0 ${at(size.width)} ${at(size.height)}" role="img" aria-labelledby="${name}-t ${name}-d"><title id="${name}-t">${escaped(title)}</title><desc id="${name}-d">${escaped(description)}</desc>${inner}</svg>`;
 }
 
+/** A place across a strip, from −5 to 5: a fixed scatter keeps dots apart without a random number. */
+export function scatter(i: number): number {
+  return ((i * 7) % 11) - 5;
+}
+
 /** The path from point to point; empty for fewer than two. */
 export function through(xs: ArrayLike<number>, ys: ArrayLike<number>): string {
   if (xs.length < 2) return '';

@@ -15,6 +15,8 @@ import { counted, listed, named } from '../words/lexicon.ts';
 import {
   changeParagraphs,
   choiceText,
+  GONE,
+  goneChoice,
   insideText,
   movedText,
   moveText,
@@ -74,7 +76,7 @@ function told({ runs, gone }: Overview): OverviewView['failures'] {
   );
   const lost = gone.map(({ name, ...was }) => ({
     name,
-    outcome: 'no longer there',
+    outcome: GONE,
     why: beforeSentence(was),
   }));
   return [...changed.slice(0, MOST_TOLD), ...lost.slice(0, MOST_TOLD)];
@@ -109,12 +111,12 @@ function changesView({ runs, gone }: Overview): NonNullable<OverviewView['change
           criteria: change === null ? NONE : criteriaText(change),
         };
       }),
-      ...gone.map(({ name, chosen }) => ({
-        name,
+      ...gone.map((each) => ({
+        name: each.name,
         link: null,
-        outcome: 'no longer there',
+        outcome: GONE,
         done: false,
-        choice: `before: ${chosen ?? 'none'}`,
+        choice: goneChoice(each),
         marked: true,
         moved: NONE,
         errors: NONE,

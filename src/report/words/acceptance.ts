@@ -89,19 +89,28 @@ export function missedSentences(acceptance: readonly Criterion[], unit: string |
 }
 
 /** "1 criterion needs an earlier record and is not judged here: largest change of a coefficient." Null for none. */
-export function needsEarlierSentence(criteria: readonly RecordEarlierCriterion[] | undefined): string | null {
-  const all = criteria?.length ?? 0;
-  if (criteria === undefined || all === 0) return null;
-  const which = listed(criteria.map((c) => lowered(criterionLabel(c))));
-  return `${counted(all, 'criterion needs', 'criteria need')} an earlier record and ${all === 1 ? 'is' : 'are'} not judged here: ${which}.`;
+export function needsEarlierSentence(criteria: EarlierCriteria): string | null {
+  return aboutEach(
+    criteria,
+    (all) =>
+      `${counted(all, 'criterion needs', 'criteria need')} an earlier record and ${all === 1 ? 'is' : 'are'} not judged here`,
+  );
 }
 
 /** "1 criterion is held against the earlier record below: largest change of a coefficient." Null for none. */
-export function heldBelowSentence(criteria: readonly RecordEarlierCriterion[] | undefined): string | null {
-  const all = criteria?.length ?? 0;
-  if (criteria === undefined || all === 0) return null;
-  const which = listed(criteria.map((c) => lowered(criterionLabel(c))));
-  return `${counted(all, 'criterion is', 'criteria are')} held against the earlier record below: ${which}.`;
+export function heldBelowSentence(criteria: EarlierCriteria): string | null {
+  return aboutEach(
+    criteria,
+    (all) => `${counted(all, 'criterion is', 'criteria are')} held against the earlier record below`,
+  );
+}
+
+type EarlierCriteria = readonly RecordEarlierCriterion[] | undefined;
+
+/** What is said of them, and which they are. */
+function aboutEach(criteria: EarlierCriteria, said: (all: number) => string): string | null {
+  if (criteria === undefined || criteria.length === 0) return null;
+  return `${said(criteria.length)}: ${listed(criteria.map((c) => lowered(criterionLabel(c))))}.`;
 }
 
 /** "Against the earlier record 1 of 2 criteria is missed; comparison.html says what changed." Null for none. */

@@ -1,5 +1,11 @@
 import { count, fixed, NONE } from '../numbers.ts';
-import { OUTCOMES, type Overview, type OverviewChange, type OverviewEntry } from '../overview.ts';
+import {
+  type GoneRun,
+  OUTCOMES,
+  type Overview,
+  type OverviewChange,
+  type OverviewEntry,
+} from '../overview.ts';
 import { counted, listed, named } from './lexicon.ts';
 
 /** "Of 12 runs, 10 are done, 1 missed criteria and 1 failed." */
@@ -74,6 +80,14 @@ function withoutRowsSentence(changes: readonly OverviewChange[]): string[] {
   return [
     `In ${counted(runs, 'run', 'runs', count)} rows were not kept, so that moves and new rows cannot be told.`,
   ];
+}
+
+/** The outcome of an earlier record that no run stands for any more. */
+export const GONE = 'no longer there';
+
+/** "before: By vessel": what it had chosen. */
+export function goneChoice({ chosen }: Pick<GoneRun, 'chosen'>): string {
+  return `before: ${chosen ?? 'none'}`;
 }
 
 /** The coefficient that moved most, where one did. */
